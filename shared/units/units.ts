@@ -1,0 +1,31 @@
+/** The unit in which a measure is stored and exchanged; a key ends with it (`lengthMm`, `flowLph`). */
+export type CanonicalUnit =
+  | 'mm'
+  | 'm'
+  | 'L'
+  | 'W'
+  | 'L/h'
+  | 'L/d'
+  | 'L/wk'
+  | 'C'
+  | 'K'
+  | 'kg'
+  | 'kg/L'
+  | 'kPa'
+  | 'ppt'
+  | 'ppm'
+  | 'dKH'
+  | 'umol/m2/s'
+  | 'umol/s'
+  | 'V'
+  | 'A'
+  | 'deg'
+  | 'nm'
+  | 'h'
+  | '/h'
+  | 'count'
+  | 'fraction'
+  | 'ratio'
+
+/** A code of the Unified Code for Units of Measure. */
+export type UcumCode = string
