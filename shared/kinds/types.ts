@@ -15,6 +15,8 @@ interface AttributeBase {
   readonly role: Role
   /** One sentence: where the calipers, tape or eye go. */
   readonly guide?: string
+  /** Which way is an improvement when one piece replaces another; absent where it only differs. */
+  readonly better?: 'more' | 'less'
 }
 
 /** A number with a dimension, stored in `unit`. Outside `plausible` it is refused, outside `usual` it is questioned. */
@@ -28,12 +30,16 @@ export interface MeasureAttribute extends AttributeBase {
 export interface ChoiceAttribute extends AttributeBase {
   readonly type: 'choice'
   readonly options: readonly Option[]
+  /** Values are stored and exchanged as the numbers that the options spell (mains volts). */
+  readonly numeric?: true
 }
 
 /** Several of the options at once; stored as an array without repeats. */
 export interface SetAttribute extends AttributeBase {
   readonly type: 'set'
   readonly options: readonly Option[]
+  /** Values are stored and exchanged as the numbers that the options spell (mains volts). */
+  readonly numeric?: true
 }
 
 export interface BooleanAttribute extends AttributeBase {
