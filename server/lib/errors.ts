@@ -1,0 +1,35 @@
+/** One wrong field: where it is (a JSON pointer such as `#/setup/tank/wallMm`) and what is wrong with it. */
+export interface Issue {
+  readonly pointer: string
+  readonly detail: string
+}
+
+export type ErrorCode =
+  | 'malformed'
+  | 'not-found'
+  | 'method-not-allowed'
+  | 'conflict'
+  | 'too-large'
+  | 'unsupported-media-type'
+  | 'invalid'
+  | 'too-many-requests'
+  | 'unavailable'
+
+/** What a service throws when it cannot do what was asked. It knows no HTTP: one table in server/http turns codes into statuses. */
+export class AppError extends Error {
+  readonly code: ErrorCode
+  readonly issues: readonly Issue[]
+
+  constructor(code: ErrorCode, detail: string, issues: readonly Issue[] = [], options?: ErrorOptions) {
+    super(detail, options)
+    this.name = 'AppError'
+    this.code = code
+    this.issues = issues
+  }
+}
+
+/** Every wrong field of one request in one error. */
+export function createInvalidError(issues: readonly Issue[]): AppError {
+  const detail = issues.length === 1 ? issues[0]!.detail : `${issues.length} fields need another look.`
+  return new AppError('invalid', detail, issues)
+}
