@@ -1,0 +1,38 @@
+import type { ReactNode } from 'react'
+import { Link, NavLink } from 'react-router-dom'
+import { Wordmark } from './wordmark'
+
+export interface SiteHeaderProps {
+  readonly links: readonly { readonly href: string; readonly label: string }[]
+  readonly unitSwitch: ReactNode
+  readonly themeSwitch: ReactNode
+}
+
+/** Two rows on a phone (name and units; pages and theme), one from there on. */
+export function SiteHeader({ links, unitSwitch, themeSwitch }: SiteHeaderProps) {
+  return (
+    <header className="border-b-[1.5px] border-ink print:border-b-0">
+      <div className="page-width grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-6 pt-3 md:h-16 md:grid-cols-[auto_minmax(0,1fr)_auto_auto] md:pt-0">
+        <Link to="/" className="justify-self-start">
+          <Wordmark />
+        </Link>
+        <div className="justify-self-end md:order-3 print:hidden">{unitSwitch}</div>
+        <nav aria-label="Pages" className="self-stretch overflow-x-auto md:order-2 print:hidden">
+          <ul className="flex h-full gap-x-5">
+            {links.map(({ href, label }) => (
+              <li key={href} className="flex">
+                <NavLink
+                  to={href}
+                  className="flex min-h-11 items-center border-y-[3px] border-transparent text-ink-soft -outline-offset-2 hover:text-action aria-[current=page]:border-b-action aria-[current=page]:font-semibold aria-[current=page]:text-ink"
+                >
+                  {label}
+                </NavLink>
+              </li>
+            ))}
+          </ul>
+        </nav>
+        <div className="justify-self-end md:order-4 print:hidden">{themeSwitch}</div>
+      </div>
+    </header>
+  )
+}
