@@ -1,0 +1,104 @@
+import { and, asc, count, desc, eq, ilike, lte, sql, type SQL } from 'drizzle-orm'
+import type { Database } from '../../db/database'
+import { gear, gearRevisions, gearValues } from '../../db/schema/index'
+
+export type GearRow = typeof gear.$inferSelect
+
+export interface GearFilter {
+  readonly kind?: string
+  /** Each must occur in the brand and model, in any order. */
+  readonly words: readonly string[]
+}
+
+/** The last row of a page, as far as the order needs it. */
+export type GearPlace =
+  | { readonly sort: 'name'; readonly brand: string; readonly model: string; readonly id: number }
+  | { readonly sort: '-updated'; readonly updatedAt: string; readonly id: number }
+
+const lowerBrand = sql`lower(${gear.brand})`
+const lowerModel = sql`lower(${gear.model})`
+const fullName = sql<string>`${gear.brand} || ' ' || ${gear.model}`
+
+function escapeLike(text: string): string {
+  return text.replace(/[\\%_]/g, '\\$&')
+}
+
+function matchFilter({ kind, words }: GearFilter): SQL | undefined {
+  return and(
+    kind === undefined ? undefined : eq(gear.kind, kind),
+    ...words.map((word) => ilike(fullName, `%${escapeLike(word)}%`)),
+  )
+}
+
+function startAfter(place: GearPlace | null): SQL | undefined {
+  if (place === null) return undefined
+  if (place.sort === 'name') {
+    return sql`(${lowerBrand}, ${lowerModel}, ${gear.id}) > (lower(${place.brand}), lower(${place.model}), ${place.id}::int)`
+  }
+  return sql`(${gear.updatedAt}, ${gear.id}) < (${place.updatedAt}::timestamptz, ${place.id}::int)`
+}
+
+export async function listGear(
+  db: Database,
+  filter: GearFilter,
+  sort: GearPlace['sort'],
+  after: GearPlace | null,
+  limit: number,
+): Promise<GearRow[]> {
+  const order = sort === 'name' ? [lowerBrand, lowerModel, asc(gear.id)] : [desc(gear.updatedAt), desc(gear.id)]
+  return db
+    .select()
+    .from(gear)
+    .where(and(matchFilter(filter), startAfter(after)))
+    .orderBy(...order)
+    .limit(limit)
+}
+
+export async function countGear(db: Database, filter: GearFilter): Promise<number> {
+  const [row] = await db.select({ total: count() }).from(gear).where(matchFilter(filter))
+  return row?.total ?? 0
+}
+
+export async function findGear(db: Database, slug: string): Promise<GearRow | null> {
+  const [row] = await db.select().from(gear).where(eq(gear.slug, slug))
+  return row ?? null
+}
+
+const revisionColumns = {
+  number: gearRevisions.number,
+  author: gearRevisions.author,
+  summary: gearRevisions.summary,
+  createdAt: gearRevisions.createdAt,
+  changed: sql<
+    string[]
+  >`array(select ${gearValues.key} from ${gearValues} where ${gearValues.gearId} = ${gearRevisions.gearId} and ${gearValues.revision} = ${gearRevisions.number} order by ${gearValues.key})`,
+}
+
+export async function listRevisions(db: Database, gearId: number) {
+  return db
+    .select(revisionColumns)
+    .from(gearRevisions)
+    .where(eq(gearRevisions.gearId, gearId))
+    .orderBy(desc(gearRevisions.number))
+}
+
+export async function findRevision(db: Database, gearId: number, number: number) {
+  const [row] = await db
+    .select({ ...revisionColumns, specs: gearRevisions.specs })
+    .from(gearRevisions)
+    .where(and(eq(gearRevisions.gearId, gearId), eq(gearRevisions.number, number)))
+  return row ?? null
+}
+
+/** What backed each value at that revision: of every key the newest row up to it. */
+export async function listValues(db: Database, gearId: number, number: number) {
+  return db
+    .selectDistinctOn([gearValues.key])
+    .from(gearValues)
+    .where(and(eq(gearValues.gearId, gearId), lte(gearValues.revision, number)))
+    .orderBy(gearValues.key, desc(gearValues.revision))
+}
+
+export type RevisionRow = NonNullable<Awaited<ReturnType<typeof findRevision>>>
+export type RevisionSummaryRow = Awaited<ReturnType<typeof listRevisions>>[number]
+export type ValueRow = Awaited<ReturnType<typeof listValues>>[number]

@@ -1,0 +1,85 @@
+import { z } from 'zod'
+import { limits } from '../limits'
+
+export const gearStatuses = ['current', 'discontinued', 'unknown'] as const
+export const gearSorts = ['name', '-updated'] as const
+export const sources = ['measured', 'maker', 'estimate'] as const
+
+const controlCharacters = /\p{Cc}/u
+
+/** One line of text as people type it: no control characters, which PostgreSQL would refuse and which forge log lines. */
+export function lineSchema(maxLength: number) {
+  return z
+    .string({ error: 'must be text' })
+    .trim()
+    .min(1, 'must not be empty')
+    .max(maxLength, `must be at most ${maxLength} characters`)
+    .refine((text) => !controlCharacters.test(text), 'must not hold control characters')
+}
+
+export const slugSchema = z
+  .string({ error: 'must be the slug of a piece of gear' })
+  .max(limits.slug, `must be at most ${limits.slug} characters`)
+  .regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'must be the slug of a piece of gear, such as "brand-model-100"')
+
+/** Bare values by attribute key, each in the unit that its key names; `GET /api/v1/kinds` tells what a kind can have. */
+export const bareSpecsSchema = z.record(z.string(), z.unknown())
+
+export const provenanceSchema = z.object({
+  source: z.enum(sources),
+  plusMinus: z.number().optional(),
+  evidence: z.string().optional(),
+  date: z.string(),
+  author: z.string(),
+  revision: z.number().int(),
+})
+
+export const gearItemSchema = z.object({
+  slug: z.string(),
+  kind: z.string(),
+  brand: z.string(),
+  model: z.string(),
+  gtin: z.string().nullable(),
+  status: z.enum(gearStatuses),
+  revision: z.number().int(),
+  updatedAt: z.string(),
+  specs: bareSpecsSchema,
+})
+
+export const gearSchema = gearItemSchema.extend({
+  notes: z.string().nullable(),
+  createdAt: z.string(),
+  provenance: z.record(z.string(), provenanceSchema),
+})
+
+export const gearListSchema = z.object({
+  items: z.array(gearItemSchema),
+  total: z.number().int(),
+  next: z.string().nullable(),
+})
+
+export const revisionSummarySchema = z.object({
+  number: z.number().int(),
+  author: z.string(),
+  summary: z.string().nullable(),
+  createdAt: z.string(),
+  /** Keys that the revision set or removed. */
+  changed: z.array(z.string()),
+})
+
+export const revisionListSchema = z.object({ slug: z.string(), items: z.array(revisionSummarySchema) })
+
+export const revisionSchema = revisionSummarySchema.extend({
+  slug: z.string(),
+  kind: z.string(),
+  specs: bareSpecsSchema,
+  provenance: z.record(z.string(), provenanceSchema),
+})
+
+export type GearItem = z.infer<typeof gearItemSchema>
+export type Gear = z.infer<typeof gearSchema>
+export type GearList = z.infer<typeof gearListSchema>
+export type Provenance = z.infer<typeof provenanceSchema>
+export type RevisionSummary = z.infer<typeof revisionSummarySchema>
+export type RevisionList = z.infer<typeof revisionListSchema>
+export type Revision = z.infer<typeof revisionSchema>
