@@ -27,6 +27,10 @@ export const fromCanonical = (value: number, unit: CanonicalUnit, symbol: string
   return clean((value * units[unit].perBase) / named.factor - (named.offset ?? 0))
 }
 
+/** The unit that this system shows, and that a bare number takes. */
+export const findShownUnit = (unit: CanonicalUnit, system: UnitSystem): NamedUnit =>
+  requireNamedUnit(units[unit][system], unit)
+
 /** The number that a person of this system reads: 114.3 mm is 4.5 in `us`. */
 export const toShown = (value: number, unit: CanonicalUnit, system: UnitSystem): number =>
   fromCanonical(value, unit, units[unit][system])

@@ -39,10 +39,13 @@ export const countDecimals = (value: number, symbol: string): number => {
   return steps.find(([below]) => size < below)?.[1] ?? 0
 }
 
+/** A tie such as 3.175 may be stored a hair under itself; it rounds away from zero all the same. */
+const tieUp = 1 + 4 * Number.EPSILON
+
 /** Trailing zeros trimmed, a true minus sign, and never "-0". What is not finite prints as an en dash. */
 export const printDigits = (value: number, decimals: number): string => {
   if (!Number.isFinite(value)) return '–'
-  const fixed = value.toFixed(Math.min(Math.max(decimals, 0), 12))
+  const fixed = (value * tieUp).toFixed(Math.min(Math.max(decimals, 0), 12))
   const trimmed = fixed.includes('.') ? fixed.replace(/\.?0+$/, '') : fixed
   return trimmed === '-0' ? '0' : trimmed.replace('-', '\u2212')
 }

@@ -45,7 +45,8 @@ const exactDigits = 7
 /** Enough for 0.05 mm, under which lengths count as equal, to show in inches. */
 const mostFiner = 3
 
-const join = (digits: string, symbol: string): string =>
+/** A number and its unit as printed, the space kept from breaking. */
+export const joinUnit = (digits: string, symbol: string): string =>
   symbol === '' ? digits : `${digits}${attached.has(symbol) ? '' : space}${symbol.replaceAll(' ', space)}`
 
 const printNumber = (shown: number, symbol: string, options: PrintOptions): string => {
@@ -61,7 +62,7 @@ export const createPrinter = (system: UnitSystem): Printer => {
   const number = (value: number, unit: CanonicalUnit, options: PrintOptions = {}) =>
     printNumber(toShown(value, unit, system), unitLabel(unit), options)
   const measure = (value: number, unit: CanonicalUnit, options?: PrintOptions) =>
-    join(number(value, unit, options), unitLabel(unit))
+    joinUnit(number(value, unit, options), unitLabel(unit))
   const helper = (unit: CanonicalUnit) => (value: number, options?: PrintOptions) => measure(value, unit, options)
 
   return {
@@ -74,7 +75,7 @@ export const createPrinter = (system: UnitSystem): Printer => {
       const from = number(low, unit, options)
       const to = number(high, unit, options)
       const between = from.startsWith('\u2212') || to.startsWith('\u2212') ? ' to ' : '–'
-      return join(from === to ? to : `${from}${between}${to}`, unitLabel(unit))
+      return joinUnit(from === to ? to : `${from}${between}${to}`, unitLabel(unit))
     },
     apart: (a, b, unit) => {
       const at = (finer: number) => [measure(a, unit, { finer }), measure(b, unit, { finer })] as const
@@ -85,7 +86,7 @@ export const createPrinter = (system: UnitSystem): Printer => {
       return at(a === b ? 0 : mostFiner)
     },
     size: (valuesMm, options) =>
-      join(valuesMm.map((value) => number(value, 'mm', options)).join(`${space}×${space}`), unitLabel('mm')),
+      joinUnit(valuesMm.map((value) => number(value, 'mm', options)).join(`${space}×${space}`), unitLabel('mm')),
     length: helper('mm'),
     volume: helper('L'),
     temperature: helper('C'),

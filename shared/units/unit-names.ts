@@ -122,9 +122,14 @@ export const namedUnits: Readonly<Record<Quantity, readonly NamedUnit[]>> = {
   concentration: [unit('ppm', '[ppm]', 1, 'mg/l')],
   hardness: [unit('dKH', '{dKH}', 1, '°dkh °kh kh')],
   'photon flux density': [
-    unit('µmol/m²/s', 'umol/(m2.s)', 1, 'umol/m2/s umol/(m2s) µmol/(m2s) µmol/(m2·s) umolm-2s-1 umol µmol par ppfd'),
+    unit(
+      'µmol/m²/s',
+      'umol/(m2.s)',
+      1,
+      'umol/m2/s umol/(m2s) µmol/(m2s) µmol/(m2·s) umolm-2s-1 µmolm-2s-1 umol µmol par ppfd',
+    ),
   ],
-  'photon flux': [unit('µmol/s', 'umol/s', 1, 'umol/s umols-1 umol µmol')],
+  'photon flux': [unit('µmol/s', 'umol/s', 1, 'umol/s umols-1 µmols-1 umol µmol')],
   voltage: [unit('V', 'V', 1, 'volt volts vac vdc')],
   current: [unit('A', 'A', 1, 'amp amps ampere amperes'), unit('mA', 'mA', 0.001, 'milliamp milliamps')],
   angle: [unit('°', 'deg', 1, 'deg degs degree degrees')],
@@ -135,7 +140,9 @@ export const namedUnits: Readonly<Record<Quantity, readonly NamedUnit[]>> = {
     unit('d', 'd', 24, 'day days'),
   ],
   turnover: [unit('/h', '/h', 1, 'x × /hr /hour x/h ×/h x/hr ×/hr x/hour times/h times/hr times/hour times')],
-  count: [unit('', '1', 1, 'x × pc pcs piece pieces')],
+  count: [
+    unit('', '1', 1, 'x × pc pcs piece pieces outlet outlets socket sockets plug plugs test tests channel channels'),
+  ],
   fraction: [unit('%', '%', 0.01, 'percent pct')],
   ratio: [unit(': 1', '1', 1, 'to1')],
 }
