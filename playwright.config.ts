@@ -1,0 +1,33 @@
+import { defineConfig } from '@playwright/test'
+import { findChromium } from './scripts/lib/requirements.mjs'
+
+const executablePath = findChromium()
+if (executablePath === null) throw new Error('Chromium is missing on this machine: apt-get install chromium')
+
+export default defineConfig({
+  testDir: 'tests/e2e',
+  globalSetup: './tests/support/e2e-server.ts',
+  outputDir: 'test-results',
+  workers: 2,
+  fullyParallel: true,
+  forbidOnly: Boolean(process.env.CI),
+  timeout: 30_000,
+  reporter: [['list']],
+  use: {
+    locale: 'en-US',
+    timezoneId: 'UTC',
+    trace: 'retain-on-failure',
+    launchOptions: {
+      executablePath,
+      args: [
+        '--no-sandbox',
+        '--disable-gpu',
+        '--disable-quic',
+        '--no-first-run',
+        '--disable-background-networking',
+        '--disable-component-update',
+        '--disable-sync',
+      ],
+    },
+  },
+})

@@ -1,0 +1,56 @@
+import { spawn } from 'node:child_process'
+import { findFreePort } from '../../scripts/lib/ports.mjs'
+import { startTestCluster } from '../../scripts/lib/test-cluster.mjs'
+import { createTestDatabase } from './test-database'
+
+export const e2eOriginVariable = 'STILLFITS_E2E_ORIGIN'
+
+async function waitUntilReady(origin: string, hasEnded: () => boolean): Promise<void> {
+  const deadline = Date.now() + 30_000
+  for (;;) {
+    const isReady = await fetch(`${origin}/ready`).then(
+      (response) => response.ok,
+      () => false,
+    )
+    if (isReady) return
+    if (hasEnded() || Date.now() > deadline) throw new Error('The built server did not become ready.')
+    await new Promise((resolve) => setTimeout(resolve, 100))
+  }
+}
+
+/** Playwright's global setup: the built server, as it is run in production, on a copied database. */
+export default async function setUpServer(): Promise<() => Promise<void>> {
+  const undos: (() => Promise<unknown>)[] = []
+  const tearDown = async () => {
+    for (const undo of undos.reverse()) await undo()
+  }
+  try {
+    await startTestCluster((undo) => undos.push(undo))
+    const database = await createTestDatabase()
+    undos.push(database.drop)
+    const port = await findFreePort()
+    const origin = `http://127.0.0.1:${port}`
+    const server = spawn('setpriv', ['--pdeathsig=TERM', '--', process.execPath, 'dist/server/index.js'], {
+      stdio: ['ignore', 'inherit', 'inherit'],
+      env: {
+        ...process.env,
+        NODE_ENV: 'production',
+        LOG_LEVEL: 'warn',
+        HOST: '127.0.0.1',
+        PORT: String(port),
+        DATABASE_URL: database.databaseUrl,
+      },
+    })
+    const ended = new Promise((resolve) => server.once('exit', resolve))
+    undos.push(async () => {
+      server.kill('SIGTERM')
+      await ended
+    })
+    await waitUntilReady(origin, () => server.exitCode !== null)
+    process.env[e2eOriginVariable] = origin
+  } catch (error) {
+    await tearDown()
+    throw error
+  }
+  return tearDown
+}

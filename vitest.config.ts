@@ -1,0 +1,37 @@
+import react from '@vitejs/plugin-react'
+import { defineConfig } from 'vitest/config'
+
+export default defineConfig({
+  test: {
+    projects: [
+      {
+        test: {
+          name: 'shared',
+          environment: 'node',
+          include: ['tests/**/*.test.ts'],
+          exclude: ['tests/{api,client,e2e}/**'],
+        },
+      },
+      {
+        test: {
+          name: 'api',
+          environment: 'node',
+          include: ['tests/api/**/*.test.ts'],
+          globalSetup: 'tests/support/test-cluster-setup.ts',
+          testTimeout: 20_000,
+          hookTimeout: 60_000,
+        },
+      },
+      {
+        plugins: [react()],
+        test: {
+          name: 'client',
+          environment: 'jsdom',
+          include: ['tests/client/**/*.test.{ts,tsx}'],
+          setupFiles: 'tests/support/client-setup.ts',
+          css: false,
+        },
+      },
+    ],
+  },
+})
