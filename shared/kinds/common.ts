@@ -3,26 +3,50 @@ import type { Attribute, MeasureAttribute } from './types'
 
 /** What names a piece. Columns of its catalogue entry rather than specs, published beside them. */
 export const identityAttributes: readonly Attribute[] = [
-  text('brand', 'brand', 60, { role: 'display', guide: 'The name printed on the piece or its box.' }),
+  text('brand', 'brand', 60, {
+    role: 'display',
+    guide: 'The name printed on the piece or its box.',
+  }),
   text('model', 'model', 100, {
     role: 'display',
     guide: 'The model as its maker writes it, with the size if it comes in sizes.',
   }),
-  text('gtin', 'barcode number (GTIN)', 14, { role: 'display', guide: 'The 8, 12, 13 or 14 digits under the bars.' }),
+  text('gtin', 'barcode number (GTIN)', 14, {
+    role: 'display',
+    guide: 'The 8, 12, 13 or 14 digits under the bars.',
+  }),
   choice(
     'status',
     'status',
-    { current: 'in production', discontinued: 'discontinued', unknown: 'not known' },
-    { role: 'display', guide: 'Whether its maker still makes it, not whether one shop has it.' },
+    {
+      current: 'in production',
+      discontinued: 'discontinued',
+      unknown: 'not known',
+    },
+    {
+      role: 'display',
+      guide: 'Whether its maker still makes it, not whether one shop has it.',
+    },
   ),
-  { ...text('notes', 'notes', 4000, { role: 'display', guide: 'What the numbers do not say.' }), rich: true },
+  {
+    ...text('notes', 'notes', 4000, {
+      role: 'display',
+      guide: 'What the numbers do not say.',
+    }),
+    rich: true,
+  },
 ]
 
 /** Kinds whose pieces may be made for another sort of tank altogether. */
 export const madeFor: Attribute = set(
   'madeFor',
   'made for',
-  { reef: 'reef', 'marine-fish': 'marine fish', freshwater: 'freshwater', plants: 'planted tanks' },
+  {
+    reef: 'reef',
+    'marine-fish': 'marine fish',
+    freshwater: 'freshwater',
+    plants: 'planted tanks',
+  },
   { role: 'check', guide: 'What its maker says it is for.' },
 )
 
@@ -131,5 +155,10 @@ export function rodAttributes(
 }
 
 export function packAttribute(usual: Range, guide: string): MeasureAttribute {
-  return measure('packKg', 'mass of a pack', 'kg', { plausible: [0.1, 1000], usual, role: 'check', guide })
+  return measure('packKg', 'mass of a pack', 'kg', {
+    plausible: [0.1, 1000],
+    usual,
+    role: 'check',
+    guide,
+  })
 }

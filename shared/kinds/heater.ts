@@ -12,7 +12,12 @@ export const heater: Kind = {
     choice(
       'form',
       'form',
-      { 'titanium-rod': 'titanium rod', 'glass-rod': 'glass rod', 'polymer-rod': 'polymer rod', inline: 'inline' },
+      {
+        'titanium-rod': 'titanium rod',
+        'glass-rod': 'glass rod',
+        'polymer-rod': 'polymer rod',
+        inline: 'inline',
+      },
       { role: 'check' },
     ),
     ...rodAttributes({ plausible: [10, 600], usual: [100, 450] }, { plausible: [5, 120], usual: [12, 45] }),
@@ -36,7 +41,10 @@ export const heater: Kind = {
         'external-included': 'external, included',
         'external-needed': 'external, bought apart',
       },
-      { role: 'check', guide: 'What switches it off when the water is warm enough.' },
+      {
+        role: 'check',
+        guide: 'What switches it off when the water is warm enough.',
+      },
     ),
     measure('minImmersionMm', 'least immersion', 'mm', {
       plausible: [5, 600],

@@ -36,7 +36,10 @@ export const powerStrip: Kind = {
       role: 'check',
       guide: 'Read the rating plate.',
     }),
-    boolean('surgeProtected', 'surge protection', { role: 'difference', better: 'more' }),
+    boolean('surgeProtected', 'surge protection', {
+      role: 'difference',
+      better: 'more',
+    }),
     ...plugAttributes,
   ],
 }

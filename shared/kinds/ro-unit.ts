@@ -11,7 +11,12 @@ export const roUnit: Kind = {
     set(
       'stages',
       'stages',
-      { sediment: 'sediment', carbon: 'carbon', membrane: 'membrane', deionisation: 'deionisation' },
+      {
+        sediment: 'sediment',
+        carbon: 'carbon',
+        membrane: 'membrane',
+        deionisation: 'deionisation',
+      },
       { role: 'check', guide: 'What is in each housing, in order of flow.' },
     ),
     measure('membraneLpd', 'membrane output', 'L/d', {
@@ -53,7 +58,10 @@ export const roUnit: Kind = {
       better: 'less',
       guide: 'Litres down the drain for each litre made, both caught for a minute.',
     }),
-    boolean('boosterIncluded', 'booster pump included', { role: 'check', better: 'more' }),
+    boolean('boosterIncluded', 'booster pump included', {
+      role: 'check',
+      better: 'more',
+    }),
     measure('rejectionFraction', 'rejection', 'fraction', {
       plausible: [0, 1],
       usual: [0.9, 0.995],
@@ -61,6 +69,9 @@ export const roUnit: Kind = {
       better: 'more',
       guide: 'One less the dissolved solids after the membrane over those before it.',
     }),
-    boolean('tdsMeterIncluded', 'TDS meter included', { role: 'difference', better: 'more' }),
+    boolean('tdsMeterIncluded', 'TDS meter included', {
+      role: 'difference',
+      better: 'more',
+    }),
   ],
 }

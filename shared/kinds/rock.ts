@@ -13,7 +13,13 @@ export const rock: Kind = {
     choice(
       'form',
       'form',
-      { base: 'base', ledge: 'ledge', arch: 'arch', branch: 'branch', rubble: 'rubble' },
+      {
+        base: 'base',
+        ledge: 'ledge',
+        arch: 'arch',
+        branch: 'branch',
+        rubble: 'rubble',
+      },
       { role: 'check' },
     ),
     packAttribute([2, 25], 'The net mass printed on the box; drained of water if live.'),

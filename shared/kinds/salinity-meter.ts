@@ -11,7 +11,11 @@ export const salinityMeter: Kind = {
     choice(
       'method',
       'method',
-      { refractometer: 'refractometer', hydrometer: 'hydrometer', conductivity: 'conductivity meter' },
+      {
+        refractometer: 'refractometer',
+        hydrometer: 'hydrometer',
+        conductivity: 'conductivity meter',
+      },
       { role: 'check' },
     ),
     set(
@@ -24,7 +28,10 @@ export const salinityMeter: Kind = {
         brix: 'sugar (Brix)',
         other: 'other',
       },
-      { role: 'check', guide: 'What the scale is made for, from its maker’s sheet rather than the letters on it.' },
+      {
+        role: 'check',
+        guide: 'What the scale is made for, from its maker’s sheet rather than the letters on it.',
+      },
     ),
     measure('minPpt', 'lowest reading', 'ppt', {
       plausible: [0, 100],
@@ -45,7 +52,10 @@ export const salinityMeter: Kind = {
       better: 'less',
       guide: 'The salinity between two neighbouring marks or digits.',
     }),
-    boolean('temperatureCompensated', 'temperature compensated', { role: 'difference', better: 'more' }),
+    boolean('temperatureCompensated', 'temperature compensated', {
+      role: 'difference',
+      better: 'more',
+    }),
     measure('calibrationPpt', 'calibration fluid', 'ppt', {
       plausible: [0, 100],
       usual: [0, 53],

@@ -12,8 +12,16 @@ export const sand: Kind = {
     choice(
       'mineral',
       'mineral',
-      { aragonite: 'aragonite', calcite: 'calcite', silica: 'silica', volcanic: 'volcanic' },
-      { role: 'check', guide: 'Vinegar fizzes on aragonite and calcite, not on silica.' },
+      {
+        aragonite: 'aragonite',
+        calcite: 'calcite',
+        silica: 'silica',
+        volcanic: 'volcanic',
+      },
+      {
+        role: 'check',
+        guide: 'Vinegar fizzes on aragonite and calcite, not on silica.',
+      },
     ),
     measure('grainMinMm', 'smallest grain', 'mm', {
       plausible: [0.01, 60],

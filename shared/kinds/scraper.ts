@@ -27,7 +27,10 @@ export const scraper: Kind = {
       { pad: 'pad', plastic: 'plastic', steel: 'steel' },
       { role: 'check', guide: 'What touches the pane.' },
     ),
-    boolean('acrylicSafe', 'safe on acrylic', { role: 'check', better: 'more' }),
+    boolean('acrylicSafe', 'safe on acrylic', {
+      role: 'check',
+      better: 'more',
+    }),
     measure('lengthMm', 'length', 'mm', {
       plausible: [20, 2500],
       usual: [50, 900],

@@ -49,6 +49,9 @@ export const stand: Kind = {
       role: 'difference',
       guide: 'From the floor to the bearing surface, feet half way out.',
     }),
-    boolean('backOpen', 'open back', { role: 'difference', guide: 'Whether hoses and cords pass without drilling.' }),
+    boolean('backOpen', 'open back', {
+      role: 'difference',
+      guide: 'Whether hoses and cords pass without drilling.',
+    }),
   ],
 }

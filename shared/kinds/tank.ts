@@ -3,8 +3,17 @@ import { madeFor } from './common'
 import type { Kind } from './types'
 
 export const chamberFields = [
-  text('id', 'chamber id', 40, { role: 'display', guide: 'A short word that items refer to, such as rear-1.' }),
-  text('name', 'chamber name', 60, { role: 'display', guide: 'What the chamber is called, such as heater chamber.' }),
+  {
+    ...text('id', 'chamber id', 40, {
+      role: 'display',
+      guide: 'A short word that items refer to, such as rear-1.',
+    }),
+    word: true as const,
+  },
+  text('name', 'chamber name', 60, {
+    role: 'display',
+    guide: 'What the chamber is called, such as heater chamber.',
+  }),
   measure('lengthMm', 'chamber length', 'mm', {
     plausible: [15, 4000],
     usual: [60, 500],
@@ -110,13 +119,24 @@ export const tank: Kind = {
     choice(
       'shape',
       'shape',
-      { rectangle: 'rectangle', cube: 'cube', 'bow-front': 'bow front', cylinder: 'cylinder', corner: 'corner' },
+      {
+        rectangle: 'rectangle',
+        cube: 'cube',
+        'bow-front': 'bow front',
+        cylinder: 'cylinder',
+        corner: 'corner',
+      },
       { role: 'check', guide: 'Seen from above.' },
     ),
     choice(
       'filtration',
       'filtration',
-      { 'rear-chambers': 'rear chambers', sump: 'sump', 'hang-on': 'hang-on', none: 'none' },
+      {
+        'rear-chambers': 'rear chambers',
+        sump: 'sump',
+        'hang-on': 'hang-on',
+        none: 'none',
+      },
       { role: 'check', guide: 'How the tank is built to be filtered.' },
     ),
     groups('chambers', 'chambers', {

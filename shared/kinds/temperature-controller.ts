@@ -35,7 +35,10 @@ export const temperatureController: Kind = {
       role: 'check',
       guide: 'The highest temperature it can be set to.',
     }),
-    boolean('highAlarm', 'alarm when too warm', { role: 'difference', better: 'more' }),
+    boolean('highAlarm', 'alarm when too warm', {
+      role: 'difference',
+      better: 'more',
+    }),
     ...electricAttributes([0, 100], [1, 10]),
   ],
 }

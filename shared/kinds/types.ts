@@ -51,6 +51,8 @@ export interface TextAttribute extends AttributeBase {
   readonly maxLength: number
   /** Sanitised rich text rather than a plain line. */
   readonly rich?: boolean
+  /** Letters, digits, dashes and underscores only: it is used inside dotted paths. */
+  readonly word?: true
 }
 
 /** A list of short texts, such as the tanks a stand is made for. */
@@ -67,6 +69,9 @@ export interface GroupAttribute extends AttributeBase {
   /** Keys of `fields` that must be there. */
   readonly required: readonly string[]
 }
+
+/** What can be typed into one field: everything but a group, which is several fields. */
+export type FieldAttribute = Exclude<Attribute, GroupAttribute>
 
 export type Attribute =
   | MeasureAttribute
@@ -90,3 +95,12 @@ export interface Kind {
   readonly additive: boolean
   readonly attributes: readonly Attribute[]
 }
+
+/** A part of the specs that contradicts another part. `path` is dotted, inside the specs: `chambers.0.lengthMm`. */
+export interface Inconsistency {
+  readonly path: string
+  readonly detail: string
+}
+
+/** Bare values by attribute key. Values of a wrong type are somebody else's finding and are passed over here. */
+export type BareSpecs = Readonly<Record<string, unknown>>
