@@ -54,7 +54,7 @@ const readSmallerPart = (
   if (unitText !== '' && lookUpUnit(unitText, quantity) !== small) {
     return { ...refuse('Unknown unit.'), unknownUnit: unitText }
   }
-  if (number.value * small.factor >= large.unit.factor) {
+  if (number.value >= Math.round(large.unit.factor / small.factor)) {
     return refuse(
       `"${number.written} ${small.symbol}" after "${large.unit.symbol}" is a whole ${large.unit.symbol} or more.`,
     )
