@@ -33,15 +33,25 @@ export function leanRod({ lengthMm, diameterMm }: Rod, space: RodSpace): RodFit 
   if (runMm === null) return { fits: false, slackMm: null, angleDeg: null }
   const slackMm = slackInRectangleMm([lengthMm, diameterMm], [runMm, space.heightMm])
   const fits = slackMm !== null && slackMm >= 0
-  return { fits, slackMm, angleDeg: fits ? findLeanDeg(lengthMm, diameterMm, runMm) : null }
+  return { fits, slackMm, angleDeg: fits ? findLeanDeg({ lengthMm, diameterMm }, runMm, space.heightMm) : null }
 }
 
-/** The flattest angle at which a rod's run L cos θ + d sin θ is no longer than there is; the run shrinks from atan(d/L) on. */
-function findLeanDeg(lengthMm: number, diameterMm: number, runMm: number): number {
+/**
+ * The flattest angle at which both the run L cos θ + d sin θ and the rise L sin θ + d cos θ are within bounds. The run
+ * shrinks from atan(d/L) on, the rise from atan(L/d) on: a rod too long to lie may have to stand nearly upright.
+ */
+function findLeanDeg({ lengthMm, diameterMm }: Rod, runMm: number, riseMm: number): number {
   if (lengthMm <= runMm) return 0
-  const run = (angle: number) => lengthMm * Math.cos(angle) + diameterMm * Math.sin(angle)
-  const tooLong = findLast((angle) => run(angle) > runMm, Math.atan2(diameterMm, lengthMm), Math.PI / 2)
-  return ((tooLong ?? Math.PI / 2) * 180) / Math.PI
+  const span = (angle: number) => lengthMm * Math.cos(angle) + diameterMm * Math.sin(angle)
+  const upright = Math.PI / 2
+  const byRun = findLast((angle) => span(angle) > runMm, Math.atan2(diameterMm, lengthMm), upright) ?? 0
+  if (span(upright - byRun) <= riseMm) return toDegrees(byRun)
+  const highest = Math.max(byRun, Math.atan2(lengthMm, diameterMm))
+  return toDegrees(findLast((angle) => span(upright - angle) > riseMm, highest, upright) ?? byRun)
+}
+
+function toDegrees(angle: number): number {
+  return (angle * 180) / Math.PI
 }
 
 /** A rod lying on the floor, at any angle in plan. RangeError for NaN. */
