@@ -6,7 +6,7 @@ export default defineConfig({
     projects: [
       {
         test: {
-          name: 'shared',
+          name: 'unit',
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/{api,client,e2e}/**'],

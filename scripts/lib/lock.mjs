@@ -39,7 +39,7 @@ export function askHolder(/** @type {string} */ name) {
       let text = ''
       const socket = connect(address(name))
       socket.setTimeout(2_000, () => socket.destroy())
-      socket.on('data', (chunk) => (text += chunk))
+      socket.on('data', (chunk) => (text += String(chunk)))
       socket.on('error', () => undefined)
       socket.on('close', () => resolve(text))
     })

@@ -138,7 +138,7 @@ export async function startCluster(/** @type {ClusterOptions} */ options) {
   await initialise(options)
   await stopPostmaster(home)
 
-  let port = 0
+  let port
   for (let tries = 0; ; tries += 1) {
     port = await findFreePort()
     if (isStopped) throw new Trouble('Stopped while PostgreSQL was starting.')
@@ -174,7 +174,7 @@ function describeCluster(
 export function attachToCluster(/** @type {string} */ bin, /** @type {string} */ home) {
   const found = findPostmaster(home)
   if (!found?.isReady) return null
-  return describeCluster(bin, found.port, readPasswords(home), async () => undefined)
+  return describeCluster(bin, found.port, readPasswords(home), () => Promise.resolve())
 }
 
 async function runSql(/** @type {string} */ bin, /** @type {string} */ url, /** @type {string} */ sql) {

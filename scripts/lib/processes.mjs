@@ -13,6 +13,7 @@ import { Trouble } from './say.mjs'
 
 /** @type {Set<ChildProcess>} */
 const steps = new Set()
+let isStopping = false
 
 /**
  * Starts a child in a group of its own: a Ctrl-C in the terminal then reaches only the script, which stops things in
@@ -22,6 +23,7 @@ const steps = new Set()
  * @param {SpawnOptions} [options]
  */
 export function startChild(command, args, options = {}) {
+  if (isStopping) throw new Trouble('Stopped.')
   const { as } = options
   const identity = as ? [`--reuid=${as.uid}`, `--regid=${as.gid}`, '--clear-groups'] : []
   const guard = [...identity, `--pdeathsig=${options.whenParentDies ?? 'TERM'}`, '--', command, ...args]
@@ -93,8 +95,8 @@ export async function runQuietly(command, args, options = {}) {
   child.stdin?.on('error', () => undefined)
   child.stdin?.end(options.input ?? '')
   let output = ''
-  child.stdout?.on('data', (chunk) => (output += chunk))
-  child.stderr?.on('data', (chunk) => (output += chunk))
+  child.stdout?.on('data', (chunk) => (output += String(chunk)))
+  child.stderr?.on('data', (chunk) => (output += String(chunk)))
   try {
     const closed = new Promise((resolve) => child.once('close', resolve))
     const code = await waitForExit(child)
@@ -105,7 +107,9 @@ export async function runQuietly(command, args, options = {}) {
   }
 }
 
+/** Ends the steps that run; none can start afterwards. */
 export async function stopSteps() {
+  isStopping = true
   await Promise.all([...steps].map((child) => stopChild(child, 5_000)))
 }
 

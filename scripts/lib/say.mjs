@@ -9,6 +9,7 @@ export function complain(/** @type {string} */ text) {
 
 /** An error whose message says all there is to say: it is shown without a stack. */
 export class Trouble extends Error {
+  /** @override */
   name = 'Trouble'
 }
 

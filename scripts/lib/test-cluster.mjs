@@ -36,7 +36,7 @@ function sweepAbandoned() {
 
 /**
  * A throwaway PostgreSQL with the template in it, unless an outer run has made one already.
- * @param {(stop: () => Promise<void>) => void} defer
+ * @param {(stop: () => unknown) => void} defer
  * @returns {Promise<TestCluster>}
  */
 export async function startTestCluster(defer) {
@@ -48,7 +48,7 @@ export async function startTestCluster(defer) {
   const identity = findPostgresIdentity()
   const home = mkdtempSync(join(tmpdir(), `${prefix}${process.pid}-`))
   prepareFolder(home, identity)
-  defer(async () => rmSync(home, { recursive: true, force: true }))
+  defer(() => rmSync(home, { recursive: true, force: true }))
   const cluster = await startCluster({ bin: postgres.bin, home, identity, isThrowaway: true, defer })
   await cluster.createDatabase(template)
   const urls = { app: cluster.urlFor('stillfits_app', template), owner: cluster.urlFor('stillfits_owner', template) }

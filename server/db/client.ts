@@ -13,7 +13,7 @@ export type Database = NodePgDatabase & { $client: pg.Pool }
 export interface DatabaseClient {
   readonly db: Database
   readonly pool: pg.Pool
-  close(): Promise<void>
+  readonly close: () => Promise<void>
 }
 
 /**

@@ -11,7 +11,7 @@ export interface TestApp {
   readonly url: string
   readonly client: DatabaseClient
   readonly database: TestDatabase
-  stop(): Promise<void>
+  readonly stop: () => Promise<void>
 }
 
 export interface TestAppOptions {

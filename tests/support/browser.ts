@@ -25,7 +25,9 @@ export const test = base.extend<Fixtures>({
       context.on('console', (message) => {
         if (['error', 'warning'].includes(message.type())) said.push(message.text())
       })
-      context.on('weberror', ({ error }) => said.push(`uncaught: ${error().stack ?? error().message}`))
+      context.on('weberror', (webError) => {
+        said.push(`uncaught: ${webError.error().stack ?? webError.error().message}`)
+      })
       await use((pattern) => allowed.push(pattern))
       const unexpected = said.filter((text) => !allowed.some((pattern) => pattern.test(text)))
       expect(unexpected, 'unexpected console output').toEqual([])

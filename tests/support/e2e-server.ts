@@ -20,7 +20,7 @@ async function waitUntilReady(origin: string, hasEnded: () => boolean): Promise<
 
 /** Playwright's global setup: the built server, as it is run in production, on a copied database. */
 export default async function setUpServer(): Promise<() => Promise<void>> {
-  const undos: (() => Promise<unknown>)[] = []
+  const undos: (() => unknown)[] = []
   const tearDown = async () => {
     for (const undo of undos.reverse()) await undo()
   }

@@ -2,7 +2,7 @@ import { startTestCluster } from '../../scripts/lib/test-cluster.mjs'
 
 /** Vitest's global setup for the API tests; what it returns runs at the end. */
 export default async function setUpTestCluster(): Promise<() => Promise<void>> {
-  const undos: (() => Promise<void>)[] = []
+  const undos: (() => unknown)[] = []
   const tearDown = async () => {
     for (const undo of undos.reverse()) await undo()
   }

@@ -9,8 +9,8 @@ export interface TestDatabase {
   readonly ownerUrl: string
   readonly name: string
   /** Ends every connection to it, as a restart of PostgreSQL would. */
-  cutConnections(): Promise<void>
-  drop(): Promise<void>
+  readonly cutConnections: () => Promise<void>
+  readonly drop: () => Promise<void>
 }
 
 function readTestCluster(): TestCluster {

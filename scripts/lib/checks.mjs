@@ -1,0 +1,36 @@
+import { join } from 'node:path'
+import { checkout } from './checkout.mjs'
+import { runQuietly } from './processes.mjs'
+import { formatSeconds, say } from './say.mjs'
+
+const bin = (/** @type {string} */ path) => join(checkout, 'node_modules', path)
+const compiler = bin('typescript/bin/tsc')
+const cruised = ['server', 'src', 'shared', 'seeds', 'scripts', 'tests']
+
+/** @type {readonly { name: string, args: readonly string[] }[]} */
+const checks = [
+  { name: 'types of shared', args: [compiler, '-p', 'shared'] },
+  { name: 'types of server', args: [compiler, '-p', 'server'] },
+  { name: 'types of src', args: [compiler, '-p', 'src'] },
+  { name: 'types of tests, seeds and scripts', args: [compiler, '-p', '.'] },
+  { name: 'lint', args: [bin('eslint/bin/eslint.js'), '.', '--max-warnings', '0'] },
+  {
+    name: 'import rules',
+    args: [bin('dependency-cruiser/bin/dependency-cruise.mjs'), '--config', '.dependency-cruiser.mjs', ...cruised],
+  },
+  { name: 'format', args: [bin('prettier/bin/prettier.cjs'), '--check', '--log-level', 'warn', '.'] },
+]
+
+/** Runs every check, also after one has failed: one look shows all that is wrong. Needs no database. */
+export async function runChecks() {
+  let failed = 0
+  for (const { name, args } of checks) {
+    const startedMs = Date.now()
+    const { code, output } = await runQuietly(process.execPath, args, { cwd: checkout })
+    say(`${code === 0 ? 'ok    ' : 'FAILED'} ${name} (${formatSeconds(startedMs)})`)
+    if (code === 0) continue
+    failed += 1
+    say(output)
+  }
+  return { passed: checks.length - failed, failed }
+}
