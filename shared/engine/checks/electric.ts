@@ -1,0 +1,122 @@
+import type { KindKey } from '../../kinds/index'
+import { continuousShare } from '../physics/loads'
+import { otherControllers, otherLimits, otherLoad, otherPlugs } from '../mains-budget'
+import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
+import type { Scene } from '../scene'
+import { practiceBasis, thresholds } from '../thresholds'
+import { readMeasure, readNumber, readSet, readText } from '../values'
+
+/** The rules that every kind with a plug shares; the id carries the kind. */
+export const createElectricRules = (kind: KindKey): readonly Rule[] => [
+  {
+    id: `${kind}.mains`,
+    label: 'Mains',
+    worst: 'fail',
+    unit: 'V',
+    basis: { type: 'standard', source: 'Rating plate and household mains (IEC 60038 voltages)' },
+    rule: 'The setup’s mains voltage is among those it is made for; another plug type needs an adaptor, which its maker should be asked about first.',
+    reads: ['volts', 'plugType'],
+    uses: ['mains.volts', 'mains.plugType'],
+    failLabel: 'made for another mains voltage',
+    judge: judgeMains,
+  },
+  {
+    id: `${kind}.plugs`,
+    label: 'Outlets',
+    worst: 'change',
+    unit: 'count',
+    basis: practiceBasis,
+    rule: 'An outlet is free for each of its plugs after all others: strips, plus the wall’s beyond those the strips take, plus a temperature controller’s own for heaters.',
+    reads: ['plugs'],
+    uses: ['mains.outlets'],
+    failLabel: 'no outlet free',
+    judge: judgePlugs,
+  },
+  {
+    id: `${kind}.load`,
+    label: 'Load on the circuit',
+    worst: 'change',
+    unit: 'W',
+    basis: thresholds.continuousShare.basis,
+    rule: `With everything else at full power it stays within ${continuousShare * 100} % of the lower rating of strip and circuit.`,
+    reads: ['powerW'],
+    uses: ['mains.circuitA', 'mains.volts'],
+    failLabel: 'too much load',
+    judge: judgeLoad,
+  },
+]
+
+function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
+  const volts = readSet<number>(piece.specs, 'volts')
+  if (volts === undefined) return lacking(['volts'], () => 'Nobody has recorded the mains voltage it is made for.')
+  const { mains } = plan
+  const list = volts.join(' or ')
+  if (!volts.includes(mains.volts))
+    return { outcome: 'fail', measured: volts.map(String), say: () => `Made for ${list} V, not for ${mains.volts} V.` }
+  const plugType = readText(piece.specs, 'plugType')
+  if (plugType !== undefined && plugType !== mains.plugType)
+    return {
+      outcome: 'change',
+      measured: volts.map(String),
+      asks: { need: 'plug-adaptor', amount: null, unit: null },
+      say: () => `Has a type ${plugType} plug, your outlets are ${mains.plugType}: ask its maker before using an adaptor.`,
+    }
+  return { outcome: 'pass', measured: volts.map(String), say: () => `Made for ${mains.volts} V.` }
+}
+
+/** Plugs that need an outlet: a heater may sit on a controller's own. */
+function countPlugsNeeded(scene: Scene, { piece, quantity }: Candidate, plugs: number): number {
+  if (piece.kind !== 'heater') return plugs * quantity
+  const { outlets, pluggedIn } = otherControllers(scene)
+  return Math.max(0, plugs * quantity - Math.max(0, outlets - pluggedIn))
+}
+
+function judgePlugs(scene: Scene, candidate: Candidate): Judgement {
+  const plugs = readNumber(candidate.piece.specs, 'plugs')
+  if (plugs === undefined) return lacking(['plugs'], () => 'Nobody has recorded how many plugs it has.')
+  const needed = countPlugsNeeded(scene, candidate, plugs)
+  const { used, capacity } = otherPlugs(scene)
+  const free = Math.max(0, capacity - used)
+  const short = needed - free
+  return {
+    outcome: short > 0 ? 'change' : 'pass',
+    measured: needed,
+    limit: free,
+    ...(short > 0 && { asks: { need: 'outlets', amount: short, unit: 'count' as const } }),
+    say: () =>
+      short > 0
+        ? `Needs ${countOf(short, 'more outlet')}: ${used} of ${capacity} are taken. A strip goes on its own wall outlet.`
+        : needed === 0
+          ? 'Plugs into the temperature controller.'
+          : `Takes ${countOf(needed, 'outlet')} of the ${free} that ${free === 1 ? 'is' : 'are'} free.`,
+  }
+}
+
+export const countOf = (count: number, word: string): string => `${count} ${word}${count === 1 ? '' : 's'}`
+
+function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
+  const power = readMeasure(piece.specs, 'powerW')
+  if (!power) return lacking(['powerW'], () => 'Nobody has recorded its power yet.')
+  const { watts, unknown } = otherLoad(scene)
+  const { continuousW, ratedW } = otherLimits(scene)
+  const totalW = watts + power.value * quantity
+  const cautions = [
+    ...(scene.plan.mains.residualCurrentProtected
+      ? []
+      : [() => 'Plug it into an outlet with residual-current (ground-fault) protection, with a drip loop in the cord; local electrical codes and a licensed electrician decide.']),
+    ...(unknown.length > 0 ? [() => `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`] : []),
+  ]
+  return {
+    outcome: totalW <= continuousW ? 'pass' : 'change',
+    measured: totalW,
+    limit: continuousW,
+    cautions,
+    ...(totalW > continuousW && { asks: { need: 'circuit', amount: totalW - continuousW, unit: 'W' as const } }),
+    say: (words) =>
+      totalW <= continuousW
+        ? `${words.power(totalW)} in all, of ${words.power(continuousW)} that may run without pause.`
+        : totalW <= ratedW
+          ? `${words.power(totalW)} in all, more than the ${words.power(continuousW)} that may run without pause: move something to another circuit.`
+          : `${words.power(totalW)} in all, more than the ${words.power(ratedW)} that the circuit carries: it needs a circuit of its own.`,
+  }
+}

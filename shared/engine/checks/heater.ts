@@ -1,0 +1,120 @@
+import { findColdestHeldC, findHeaterNeed } from '../heat-budget'
+import { otherControllers } from '../mains-budget'
+import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import { once, type Scene } from '../scene'
+import { practiceBasis, thresholds } from '../thresholds'
+import { readNumber, readText } from '../values'
+import { heaterPower, heaterStrength } from './heater-power'
+import { scaleHeaters } from './heater-scales'
+import { heaterSpace } from './heater-space'
+
+function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
+  const min = readNumber(piece.specs, 'ratedVolumeMinL')
+  const max = readNumber(piece.specs, 'ratedVolumeMaxL')
+  if (min === undefined && max === undefined)
+    return lacking(['ratedVolumeMaxL'], () => 'Nobody has recorded the volumes its maker rates it for.')
+  const slack = thresholds.ratedVolumeSlack.value
+  const { ratedL } = plan.tank
+  const below = min !== undefined && ratedL < min
+  const above = max !== undefined && ratedL > max
+  const far = (below && ratedL < min * (1 - slack)) || (above && ratedL > max * (1 + slack))
+  const limit = min !== undefined && max !== undefined ? ([min, max] as const) : (max ?? min ?? null)
+  return {
+    outcome: far ? 'change' : 'pass',
+    measured: ratedL,
+    limit,
+    margin: measureMargin(ratedL, min, max),
+    cautions: !far && (below || above) ? [() => 'Its maker’s rating stops just short of this tank’s volume.'] : [],
+    say: (words) => {
+      const range = min !== undefined && max !== undefined ? words.pair([min, max], 'L') : max !== undefined ? `up to ${words.volume(max)}` : `from ${words.volume(min ?? 0)}`
+      if (far) return `Its maker rates it for a ${below ? 'larger' : 'smaller'} tank: ${range}.`
+      return `Its maker rates it for ${range}.`
+    },
+  }
+}
+
+function measureMargin(value: number, min: number | undefined, max: number | undefined): number | null {
+  if (min !== undefined && max !== undefined) return max > min ? Math.min(value - min, max - value) / (max - min) : null
+  if (max !== undefined) return max === 0 ? null : (max - value) / max
+  return min ? (value - min) / min : null
+}
+
+const ratedVolume: Rule = {
+  id: 'heater.rated-volume',
+  label: 'Rated volume',
+  worst: 'change',
+  unit: 'L',
+  basis: practiceBasis,
+  rule: 'The tank’s nominal volume within its maker’s rating passes; a little outside is a caution, further a change. Makers’ ratings differ between tube types though a watt heats alike in any.',
+  reads: ['ratedVolumeMinL', 'ratedVolumeMaxL'],
+  uses: ['tank.volumeL'],
+  failLabel: 'rated for another size of tank',
+  judge: judgeRatedVolume,
+}
+
+function judgeThermostat(scene: Scene, { piece, quantity }: Candidate): Judgement {
+  const thermostat = readText(piece.specs, 'thermostat')
+  if (thermostat === undefined) return lacking(['thermostat'], () => 'Nobody has recorded whether it has its own thermostat.')
+  if (thermostat !== 'external-needed')
+    return { outcome: 'pass', measured: thermostat, say: () => (thermostat === 'built-in' ? 'Has its own thermostat.' : 'Comes with its controller.') }
+  const powerW = readNumber(piece.specs, 'powerW')
+  const plugs = readNumber(piece.specs, 'plugs') ?? 1
+  const controllers = otherControllers(scene)
+  const loadLeftW = controllers.maxLoadW - controllers.loadedW
+  const outletsLeft = controllers.outlets - controllers.pluggedIn
+  if (controllers.count > 0 && powerW !== undefined && loadLeftW >= powerW * quantity && outletsLeft >= plugs * quantity)
+    return { outcome: 'pass', measured: thermostat, say: () => 'The temperature controller in the setup can switch it.' }
+  const amount = powerW === undefined ? null : powerW * quantity
+  return {
+    outcome: 'change',
+    measured: thermostat,
+    asks: { need: 'temperature-control', amount, unit: 'W' },
+    say: (words) => {
+      const load = amount === null ? '' : ` for ${words.power(amount)}`
+      const more = controllers.count > 0 ? 'another temperature controller, or a larger one,' : 'a temperature controller'
+      return `Has no thermostat: needs ${more}${load}.`
+    },
+  }
+}
+
+const thermostat: Rule = {
+  id: 'heater.thermostat',
+  label: 'Thermostat',
+  worst: 'change',
+  unit: null,
+  basis: practiceBasis,
+  rule: 'Built in or included passes; otherwise a temperature controller in the setup with load and an outlet to spare.',
+  reads: ['thermostat', 'powerW', 'plugs'],
+  uses: [],
+  failLabel: 'without a thermostat',
+  judge: judgeThermostat,
+}
+
+/** Share of the time that the heaters would run in the coldest room: need over power, 0 to 1 and beyond. */
+function findDuty(scene: Scene, { piece, quantity }: Candidate): number | null {
+  const powerW = readNumber(piece.specs, 'powerW')
+  const { needW, otherHeatersW } = once(scene, findHeaterNeed)
+  return powerW === undefined ? null : needW / (powerW * quantity + otherHeatersW)
+}
+
+const verbs = { upright: 'Stands', leaning: 'Leans', flat: 'Lies' } as const
+
+export const heaterRules: KindRules = {
+  rules: [heaterSpace, heaterPower, heaterStrength, ratedVolume, thermostat],
+  targetReads: ['powerW'],
+  target: (scene, candidate) => {
+    const duty = findDuty(scene, candidate)
+    return duty === null ? null : Math.abs(duty - thresholds.heaterTargetDuty.value)
+  },
+  summary: {
+    covers: ['heater.space', 'heater.power'],
+    write: (scene, candidate, placement) => (words) => {
+    const powerW = (readNumber(candidate.piece.specs, 'powerW') ?? 0) * candidate.quantity + once(scene, findHeaterNeed).otherHeatersW
+    const held = findColdestHeldC(scene, powerW, 'totalUpperW')
+    const basin = scene.plan.tank.chambers.find(({ id }) => id === placement?.chamber)?.name ?? placement?.chamber
+    const stands = placement ? `${verbs[placement.position]} in the ${basin} and holds` : 'Holds'
+    return `${stands} ${words.temperature(scene.plan.goals.temperatureC)} down to a ${words.temperature(held)} room.`
+    },
+  },
+  scales: scaleHeaters,
+}

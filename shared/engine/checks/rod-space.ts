@@ -1,0 +1,139 @@
+import { combineUncertainties, probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import type { Rectangle } from '../physics/geometry'
+import { packRectangles } from '../physics/packing'
+import { layRodFlat, leanRod } from '../physics/rod'
+import type { Say } from '../rule'
+import { findOccupants, type Basin } from '../setup/places'
+import type { Item, Placement, Value } from '../types'
+import { isWithinMm, readNumber } from '../values'
+import { thresholds } from '../thresholds'
+
+/** A rod as the space check sees it. Lengths in mm. */
+export interface Rod {
+  readonly length: Value<number>
+  readonly diameter: Value<number>
+  /** Length from the lower end that must be under water; the whole rod where its maker states none. */
+  readonly immersed: Value<number>
+  readonly quantity: number
+}
+
+/** The tightest of the limits that one position in one basin sets. */
+export interface Stand {
+  readonly placement: Placement
+  readonly basin: Basin
+  readonly fits: boolean
+  readonly measuredMm: number
+  readonly limitMm: number
+  readonly probability: number
+  /** What is tight: water, height, plan, run, opening or company. */
+  readonly tight: 'water' | 'height' | 'plan' | 'run' | 'opening' | 'company'
+}
+
+type Bound = Pick<Stand, 'measuredMm' | 'limitMm' | 'tight'> & { readonly of: Value<number> }
+
+const clearance = thresholds.rodClearanceMm.value
+const ratio = ({ measuredMm, limitMm }: { measuredMm: number; limitMm: number }) => (limitMm - measuredMm) / Math.abs(limitMm || 1)
+
+function footprintOf({ piece }: Item): Rectangle | undefined {
+  const diameter = readNumber(piece.specs, 'diameterMm')
+  const length = readNumber(piece.specs, 'lengthMm')
+  const width = readNumber(piece.specs, 'widthMm')
+  if (piece.kind === 'heater' && diameter !== undefined) return [diameter, diameter]
+  if (length !== undefined && width !== undefined) return [length, width]
+  return undefined
+}
+
+/** Whether the rods, with the given footprint each, can stand beside what is already in the basin. */
+function hasCompany(basin: Basin, others: readonly Item[], footprint: Rectangle, quantity: number): boolean {
+  const company = findOccupants(others, basin.id).flatMap((item) => {
+    const sides = footprintOf(item)
+    return sides ? Array.from({ length: item.quantity }, () => sides) : []
+  })
+  if (company.length === 0 && quantity === 1) return true
+  const pieces = [...company, ...Array.from({ length: quantity }, () => footprint)]
+  return packRectangles(pieces, [basin.lengthMm, basin.widthMm], clearance).outcome !== 'no'
+}
+
+function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
+  const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))
+  const probability = bounds.map((bound) => {
+    const limitU = Number.isFinite(bound.limitMm) ? standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length') : 0
+    const pieceU = standardUncertainty(bound.of.value, bound.of.source, bound.of.plusMinus, 'length')
+    return probabilityAtMost(bound.measuredMm, bound.limitMm, combineUncertainties(limitU, pieceU))
+  })
+  const fits = bounds.every((bound) => isWithinMm(bound.measuredMm, bound.limitMm))
+  const { measuredMm, limitMm } = tight
+  return {
+    placement,
+    basin,
+    measuredMm,
+    limitMm,
+    fits: fits && isRoomy,
+    tight: fits && !isRoomy ? 'company' : tight.tight,
+    probability: isRoomy ? Math.min(...probability) : 0,
+  }
+}
+
+/** Every allowed position in a basin, each with its tightest limit. See "Rod in a chamber" on the method page. */
+export function tryPositions(rod: Rod, basin: Basin, others: readonly Item[], positions: readonly Placement['position'][]): Stand[] {
+  const { length, diameter, immersed, quantity } = rod
+  const d = diameter.value
+  const opening: Bound[] =
+    basin.openingLengthMm !== undefined && basin.openingWidthMm !== undefined
+      ? [{ measuredMm: d, limitMm: Math.min(basin.openingLengthMm, basin.openingWidthMm), tight: 'opening', of: diameter }]
+      : []
+  const plan: Bound = { measuredMm: d + 2 * clearance, limitMm: Math.min(basin.lengthMm, basin.widthMm), tight: 'plan', of: diameter }
+  const clear: Rectangle = [basin.lengthMm - 2 * clearance, basin.widthMm - 2 * clearance]
+  const bySlack = (slackMm: number | null): Bound =>
+    slackMm === null ? plan : { measuredMm: length.value, limitMm: length.value + slackMm, tight: 'run', of: length }
+  return positions.map((position) => {
+    if (position === 'upright') {
+      const bounds: Bound[] = [
+        plan,
+        { measuredMm: immersed.value, limitMm: basin.waterDepthMm, tight: 'water', of: immersed },
+        { measuredMm: length.value, limitMm: basin.heightMm, tight: 'height', of: length },
+      ]
+      return settle(basin, { chamber: basin.id, position, angleDeg: 90 }, [...opening, ...bounds], hasCompany(basin, others, [d, d], quantity))
+    }
+    const fit =
+      position === 'leaning'
+        ? leanRod({ lengthMm: length.value, diameterMm: d }, { lengthMm: clear[0], widthMm: clear[1], heightMm: basin.waterDepthMm })
+        : layRodFlat({ lengthMm: length.value, diameterMm: d }, clear)
+    const angleDeg = fit.angleDeg ?? 0
+    const runMm = Math.min(length.value * Math.cos((angleDeg * Math.PI) / 180) + d, Math.max(...clear))
+    const isRoomy = hasCompany(basin, others, [runMm, d], quantity)
+    const water: Bound[] = position === 'flat' ? [{ measuredMm: d, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }] : []
+    return settle(basin, { chamber: basin.id, position, angleDeg }, [...opening, bySlack(fit.slackMm), ...water], isRoomy)
+  })
+}
+
+/** In one basin the first position that fits, else the nearest miss; of several basins the one with the most to spare. */
+export function chooseStand(byBasin: readonly (readonly Stand[])[]): Stand | undefined {
+  const nearest = (stands: readonly Stand[]) =>
+    stands.reduce<Stand | undefined>((best, stand) => (!best || ratio(stand) > ratio(best) ? stand : best), undefined)
+  const best = byBasin.flatMap((stands) => stands.find((stand) => stand.fits) ?? nearest(stands) ?? [])
+  return nearest(best.filter((stand) => stand.fits)) ?? nearest(best)
+}
+
+const verbs = { upright: 'Stands', leaning: 'Leans', flat: 'Lies' } as const
+
+/** What the tightest limit means, in words. */
+export const describeStand =
+  (stand: Stand): Say =>
+  (words) => {
+    const { basin, measuredMm, limitMm, placement, tight } = stand
+    const off = words.length(Math.abs(limitMm - measuredMm))
+    const where = `the ${basin.name}`
+    if (stand.fits) {
+      const how = placement.position === 'leaning' ? ` at ${Math.round(placement.angleDeg)}°` : ''
+      const beside = tight === 'plan' ? 'to spare beside it' : tight === 'opening' ? 'to spare in the opening' : 'to spare'
+      return `${verbs[placement.position]} in ${where}${how} with ${off} ${beside}.`
+    }
+    if (tight === 'company') return `There is no room left in ${where} beside what is already there.`
+    if (tight === 'plan') return `${off} too thick for ${where}: it needs ${words.length(measuredMm)} across with water around it, and there are ${words.length(limitMm)}.`
+    if (tight === 'opening') return `${off} too thick for the opening of ${where}.`
+    if (tight === 'height') return `${off} too long to stand in ${where}, which is ${words.length(limitMm)} high.`
+    if (tight === 'water') return `${off} too long for the ${words.length(limitMm)} of water in ${where}.`
+    const verb = placement.position === 'leaning' ? 'lean' : 'lie'
+    return `${off} too long to ${verb} in ${where}, which takes ${words.length(limitMm)} at that thickness.`
+  }

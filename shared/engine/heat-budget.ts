@@ -1,0 +1,90 @@
+import { findLast } from './physics/bisect'
+import { tankHeatLoss, type TankHeatLoss } from './physics/heat'
+import { heatCapacityJK } from './physics/seawater'
+import { findEquilibriumC, stuckOn, type StuckOn } from './physics/stuck-on'
+import { once, type Scene } from './scene'
+import type { Plan } from './setup/plan'
+import type { Item } from './types'
+import { readFlag, readNumber } from './values'
+
+/** Kinds whose motor stands in the water and gives its heat to it. */
+const inWater: ReadonlySet<string> = new Set(['return-pump', 'wavemaker', 'skimmer'])
+
+/** Of a DC pump's rated power, what reaches the water: they are seldom run at full speed (common practice). */
+const dcShare = 0.5
+
+/** Heat in W that the gear in the water gives it, heaters left out; what states no power counts nothing and is not guessed. */
+export function sumGainW(plan: Plan, items: readonly Item[]): number {
+  const hasPump = items.some((item) => item.piece.kind === 'return-pump')
+  const included = hasPump ? 0 : (plan.tank.includedPump?.powerW ?? 0)
+  return items.reduce((sum, { piece, quantity }) => {
+    if (!inWater.has(piece.kind)) return sum
+    const share = readFlag(piece.specs, 'dcControl') ? dcShare : 1
+    return sum + share * quantity * (readNumber(piece.specs, 'powerW') ?? 0)
+  }, included)
+}
+
+/** Heat loss of the setup's water at a water and a room temperature, °C. */
+export function lossAt(plan: Plan, waterC: number, roomC: number): TankHeatLoss {
+  const { boxes, lid } = plan.tank
+  return tankHeatLoss({ boxes, lid, waterC, roomC, relativeHumidity: plan.room.relativeHumidity })
+}
+
+export interface HeaterNeed {
+  /** Loss at the goal in the coldest room less the heat gained, floor 0, W: by ASHRAE's evaporation, and by Shah's. */
+  readonly needW: number
+  readonly needUpperW: number
+  /** The same in the room as it usually is. */
+  readonly usualNeedW: number
+  readonly gainW: number
+  /** Of heaters that count beside the one judged. */
+  readonly otherHeatersW: number
+}
+
+/** Rated power in W of all heaters among the items; those without a stated power count nothing. */
+export const sumHeaterW = (items: readonly Item[]): number =>
+  items.reduce(
+    (sum, { piece, quantity }) =>
+      piece.kind === 'heater' ? sum + quantity * (readNumber(piece.specs, 'powerW') ?? 0) : sum,
+    0,
+  )
+
+export function findHeaterNeed({ plan, others }: Scene): HeaterNeed {
+  const gainW = sumGainW(plan, others)
+  const cold = lossAt(plan, plan.goals.temperatureC, plan.room.coldestC)
+  const usual = lossAt(plan, plan.goals.temperatureC, plan.room.temperatureC)
+  return {
+    needW: Math.max(0, cold.totalW - gainW),
+    needUpperW: Math.max(0, cold.totalUpperW - gainW),
+    usualNeedW: Math.max(0, usual.totalW - gainW),
+    gainW,
+    otherHeatersW: sumHeaterW(others),
+  }
+}
+
+/** The coldest room, °C, in which `heaterW` still holds the goal, by the upper (Shah) or the usual figure; down to −20. */
+export function findColdestHeldC(scene: Scene, heaterW: number, figure: 'totalW' | 'totalUpperW'): number {
+  const { plan } = scene
+  const { gainW } = once(scene, findHeaterNeed)
+  const goalC = plan.goals.temperatureC
+  const fallsShort = (roomC: number) => lossAt(plan, goalC, roomC)[figure] > heaterW + gainW
+  return findLast(fallsShort, -20, goalC + 20) ?? -20
+}
+
+/** What happens if heaters of `heaterW` in all never switch off in the warmest room. */
+export function findStuckOn(scene: Scene, heaterW: number): StuckOn {
+  const { plan } = scene
+  const { gainW } = once(scene, findHeaterNeed)
+  const { temperatureC, salinityPpt } = plan.goals
+  const lossW = (waterC: number) => lossAt(plan, waterC, plan.room.warmestC).totalW
+  return stuckOn(
+    { heatCapacityJK: heatCapacityJK(plan.tank.waterL, salinityPpt, temperatureC), inputW: heaterW + gainW, lossW },
+    temperatureC,
+  )
+}
+
+/** Where the water settles in the warmest room with no heater on, °C. */
+export function findUnheatedC({ plan, others }: Scene): number {
+  const lossW = (waterC: number) => lossAt(plan, waterC, plan.room.warmestC).totalW
+  return findEquilibriumC({ inputW: sumGainW(plan, others), lossW })
+}

@@ -1,0 +1,85 @@
+import type { Printer } from '../units/print'
+import type { Assessment, AssessedItem } from './assess'
+import { describeCondition, type Judged } from './judge'
+import type { Say } from './rule'
+import type { KnockOn, Outcome } from './types'
+
+/** A knock-on before anybody asks for words. */
+export interface RawKnockOn extends Omit<KnockOn, 'message'> {
+  readonly say: Say
+}
+
+const severity: Readonly<Record<Outcome, number>> = { pass: 0, nodata: 0, change: 1, fail: 2 }
+
+const sayOf = ({ judgement, condition }: Judged): Say =>
+  condition ? (words) => `${judgement.say(words)} ${describeCondition(condition())(words)}` : judgement.say
+
+const nameOf = ({ item }: AssessedItem): string => {
+  const { gear, kind } = item.piece
+  return gear ? `${gear.brand} ${gear.model}` : kind.replaceAll('-', ' ')
+}
+
+/** What a piece that is new in the setup asks of the rest: its own checks that did not simply pass. */
+export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
+  return judged.flatMap((one): RawKnockOn[] => {
+    if (one.outcome !== 'change' && one.outcome !== 'fail') return []
+    const { asks } = one.judgement
+    return [{ kind: asks ? 'need' : 'check', subject: asks?.need ?? one.rule.id, from: null, to: one.outcome, say: sayOf(one) }]
+  })
+}
+
+/** Checks of a piece that stayed and that got worse. */
+function worsenedKnockOns(before: AssessedItem, after: AssessedItem): RawKnockOn[] {
+  const was = new Map(before.judged.map((one) => [one.rule.id, one.outcome]))
+  return after.judged.flatMap((one): RawKnockOn[] => {
+    const from = was.get(one.rule.id) ?? 'pass'
+    if (severity[one.outcome] <= severity[from]) return []
+    const say = sayOf(one)
+    return [{ kind: 'check', subject: after.item.id, from, to: one.outcome, say: (words) => `${nameOf(after)}: ${say(words)}` }]
+  })
+}
+
+function budgetKnockOns(before: Assessment, after: Assessment): RawKnockOn[] {
+  return Object.entries(after.budgets).flatMap(([key, now]): RawKnockOn[] => {
+    const was = before.budgets[key]
+    if (!was || Math.abs(was.used - now.used) < 1e-9) return []
+    const isFreed = key === 'plugs' && now.used < was.used
+    return [{ kind: isFreed ? 'freed' : 'budget', subject: key, from: was.used, to: now.used, say: now.say }]
+  })
+}
+
+/**
+ * What changes elsewhere between two assessments of a setup, worst first: needs that are new, checks that got worse,
+ * essentials that went missing, budgets that moved, and what is freed. The difference of a setup with itself is empty.
+ */
+export function diff(before: Assessment, after: Assessment): readonly RawKnockOn[] {
+  const stayed = new Map(before.items.map((one) => [one.item.id, one]))
+  const items = after.items.flatMap((one) => {
+    const was = stayed.get(one.item.id)
+    return was && was.item.piece.kind === one.item.piece.kind && was.item.piece === one.item.piece
+      ? worsenedKnockOns(was, one)
+      : was
+        ? replacedKnockOns(was, one)
+        : listDemands(one.judged)
+  })
+  const met = new Map(before.essentials.map((essential) => [essential.need, essential.isMet]))
+  const essentials = after.essentials.flatMap((essential): RawKnockOn[] => {
+    const wasMet = met.get(essential.need) ?? true
+    if (wasMet === essential.isMet) return []
+    const kind = essential.isMet ? 'freed' : 'missing'
+    return [{ kind, subject: essential.need, from: null, to: null, say: essential.isMet ? essential.sayMet : essential.say }]
+  })
+  return [...items, ...essentials, ...budgetKnockOns(before, after)]
+}
+
+/** A piece in the place of another of its id: only what it asks beyond what that one asked. */
+function replacedKnockOns(before: AssessedItem, after: AssessedItem): readonly RawKnockOn[] {
+  const was = new Map(before.judged.map((one) => [one.rule.id, one.outcome]))
+  return listDemands(after.judged.filter((one) => severity[one.outcome] > severity[was.get(one.rule.id) ?? 'pass']))
+}
+
+/** Knock-ons that ask something to be done, as against what merely moves or is freed. */
+export const isDemand = ({ kind }: RawKnockOn): boolean => kind === 'need' || kind === 'check' || kind === 'missing'
+
+export const presentKnockOns = (knockOns: readonly RawKnockOn[], words: Printer): readonly KnockOn[] =>
+  knockOns.map(({ say, ...rest }) => ({ ...rest, message: say(words) }))

@@ -1,0 +1,111 @@
+import { findLoadLimits } from './physics/loads'
+import { once, type Scene } from './scene'
+import type { Plan } from './setup/plan'
+import type { Item } from './types'
+import { readNumber } from './values'
+
+export interface Outlets {
+  readonly used: number
+  readonly capacity: number
+  /** Items that state no number of plugs: not counted. */
+  readonly unknown: readonly string[]
+}
+
+export interface Load {
+  readonly watts: number
+  readonly unknown: readonly string[]
+}
+
+const ofKind = (items: readonly Item[], kind: string) => items.filter((item) => item.piece.kind === kind)
+
+function sum(items: readonly Item[], key: string): { total: number; unknown: string[] } {
+  const unknown: string[] = []
+  let total = 0
+  for (const { id, piece, quantity } of items) {
+    const value = readNumber(piece.specs, key)
+    if (value === undefined) unknown.push(id)
+    else total += value * quantity
+  }
+  return { total, unknown }
+}
+
+/** Kinds that plug in; a strip's own plug is counted with the wall outlet it takes, not here. */
+const pluggedIn: ReadonlySet<string> = new Set([
+  'light',
+  'light-controller',
+  'heater',
+  'temperature-controller',
+  'return-pump',
+  'wavemaker',
+  'skimmer',
+  'auto-top-off',
+  'booster-pump',
+])
+
+/** Plugs that need an outlet of strip or wall: heaters on a controller's own outlets do not. */
+export function countPlugs(plan: Plan, items: readonly Item[]): Outlets {
+  const plugs = sum(items.filter((item) => pluggedIn.has(item.piece.kind)), 'plugs')
+  const onControllers = Math.min(
+    sum(ofKind(items, 'temperature-controller'), 'outlets').total,
+    sum(ofKind(items, 'heater'), 'plugs').total,
+  )
+  const hasPump = ofKind(items, 'return-pump').length > 0
+  const included = hasPump || !plan.tank.includedPump ? 0 : (plan.tank.includedPump.plugs ?? 1)
+  return {
+    used: plugs.total - onControllers + included,
+    capacity: countOutlets(plan, items),
+    unknown: plugs.unknown,
+  }
+}
+
+/** Outlets of all strips plus the wall's, less the one that each strip takes. */
+export function countOutlets(plan: Plan, items: readonly Item[]): number {
+  const strips = ofKind(items, 'power-strip')
+  const taken = strips.reduce((count, item) => count + item.quantity, 0)
+  return sum(strips, 'outlets').total + Math.max(0, plan.mains.outlets - taken)
+}
+
+/** Everything that can run longer than three hours, heaters at full power, W. */
+export function sumLoad(plan: Plan, items: readonly Item[]): Load {
+  const watts = sum(items.filter((item) => pluggedIn.has(item.piece.kind)), 'powerW')
+  const hasPump = ofKind(items, 'return-pump').length > 0
+  return { watts: watts.total + (hasPump ? 0 : (plan.tank.includedPump?.powerW ?? 0)), unknown: watts.unknown }
+}
+
+/** Rated and continuous load in W of the weakest strip and the circuit. */
+export function findLimits(plan: Plan, items: readonly Item[]) {
+  const ratings = ofKind(items, 'power-strip').map((item) => readNumber(item.piece.specs, 'ratedA'))
+  const known = ratings.filter((rating) => rating !== undefined)
+  return findLoadLimits(plan.mains.volts, [plan.mains.circuitA, ...known])
+}
+
+const countOthers = ({ plan, others }: Scene) => countPlugs(plan, others)
+const loadOthers = ({ plan, others }: Scene) => sumLoad(plan, others)
+const limitOthers = ({ plan, others }: Scene) => findLimits(plan, others)
+
+export const otherPlugs = (scene: Scene): Outlets => once(scene, countOthers)
+export const otherLoad = (scene: Scene): Load => once(scene, loadOthers)
+export const otherLimits = (scene: Scene) => once(scene, limitOthers)
+
+export interface Controllers {
+  readonly maxLoadW: number
+  readonly outlets: number
+  readonly loadedW: number
+  readonly pluggedIn: number
+  readonly count: number
+}
+
+/** Temperature controllers among the others, and what heaters already hang on them. */
+function sumControllers({ others }: Scene): Controllers {
+  const controllers = ofKind(others, 'temperature-controller')
+  const heaters = ofKind(others, 'heater')
+  return {
+    maxLoadW: sum(controllers, 'maxLoadW').total,
+    outlets: sum(controllers, 'outlets').total,
+    loadedW: sum(heaters, 'powerW').total,
+    pluggedIn: sum(heaters, 'plugs').total,
+    count: controllers.length,
+  }
+}
+
+export const otherControllers = (scene: Scene): Controllers => once(scene, sumControllers)

@@ -1,0 +1,109 @@
+import type { Printer } from '../units/print'
+import { units } from '../units/units'
+import type { Assessment, AssessedItem } from './assess'
+import { listAssumptions } from './assumptions'
+import { describeCondition, type Judged } from './judge'
+import { isCloseCall } from './physics/conformance'
+import type { Check, ItemReport, Need, Report, Verdict } from './types'
+
+/** Signed, positive = to spare: distance to a limit over its size, or to the nearer end of an interval over its width. */
+function findMargin({ rule, judgement }: Judged): number | null {
+  const { margin, measured, limit } = judgement
+  if (margin !== undefined) return margin
+  if (typeof measured !== 'number' || limit === undefined || limit === null || limit === 0) return null
+  if (typeof limit === 'number') return ((limit - measured) / Math.abs(limit)) * (rule.limitIs === 'least' ? -1 : 1)
+  const width = limit[1] - limit[0]
+  return width > 0 ? Math.min(measured - limit[0], limit[1] - measured) / width : null
+}
+
+const closeness = (probability: number): string => ` A close call, ${Math.round(probability * 100)} % sure: measure before buying.`
+
+/** One check in words, in the reader's units. */
+export function presentCheck(judged: Judged, words: Printer): Check {
+  const { rule, judgement, outcome, assumed, condition } = judged
+  const { probability, missing } = judgement
+  const close = outcome !== 'nodata' && probability !== undefined && isCloseCall(probability)
+  const message = [judgement.say(words), condition ? ` ${describeCondition(condition())(words)}` : '', close ? closeness(probability) : '']
+  return {
+    id: rule.id,
+    label: rule.label,
+    outcome,
+    measured: judgement.measured ?? null,
+    limit: judgement.limit ?? null,
+    unit: rule.unit ? units[rule.unit].ucum : null,
+    margin: findMargin(judged),
+    message: message.join(''),
+    basis: rule.basis,
+    ...(missing && missing.length > 0 && { missing }),
+    ...(assumed.length > 0 && { assumed }),
+    ...(probability !== undefined && outcome !== 'nodata' && { probability }),
+  }
+}
+
+/** The cautions of all checks, each once. */
+export const presentCautions = (judged: readonly Judged[], words: Printer): readonly string[] => [
+  ...new Set(judged.flatMap(({ judgement }) => judgement.cautions ?? []).map((say) => say(words))),
+]
+
+function presentItem({ item, judged, verdict, placement }: AssessedItem, words: Printer): ItemReport {
+  return {
+    id: item.id,
+    kind: item.piece.kind,
+    verdict,
+    checks: judged.map((one) => presentCheck(one, words)),
+    cautions: presentCautions(judged, words),
+    ...(placement && { place: placement }),
+  }
+}
+
+/** Needs of the setup, then what single pieces ask for and do not find. */
+function presentNeeds({ essentials, items }: Assessment, words: Printer): readonly Need[] {
+  const whole = essentials.map((essential): Need => ({
+    need: essential.need,
+    amount: essential.amount,
+    unit: essential.unit && units[essential.unit].ucum,
+    neededBy: ['setup'],
+    metBy: essential.isMet ? essential.metBy : [],
+    message: (essential.isMet ? essential.sayMet : essential.say)(words),
+  }))
+  const asked = items.flatMap(({ item, judged }) =>
+    judged.flatMap(({ judgement }): Need[] =>
+      judgement.asks
+        ? [
+            {
+              need: judgement.asks.need,
+              amount: judgement.asks.amount,
+              unit: judgement.asks.unit && units[judgement.asks.unit].ucum,
+              neededBy: [item.id],
+              metBy: [],
+              message: judgement.say(words),
+            },
+          ]
+        : [],
+    ),
+  )
+  return [...whole, ...asked]
+}
+
+function sumVerdict({ items, essentials }: Assessment): Verdict {
+  const verdicts = items.map(({ verdict }) => verdict)
+  if (verdicts.includes('no')) return 'no'
+  if (verdicts.includes('unknown')) return 'unknown'
+  return verdicts.includes('changes') || essentials.some(({ isMet }) => !isMet) ? 'changes' : 'fits'
+}
+
+/** A whole assessment in words, in the reader's units. */
+export function presentReport(assessment: Assessment, words: Printer): Report {
+  const { items, essentials, budgets, plan } = assessment
+  return {
+    verdict: sumVerdict(assessment),
+    items: items.map((item) => presentItem(item, words)),
+    missing: essentials.filter(({ isMet }) => !isMet).map(({ need, say }) => ({ need, message: say(words) })),
+    needs: presentNeeds(assessment, words),
+    budgets: Object.fromEntries(
+      Object.entries(budgets).map(([key, { used, limit, unit, say }]) => [key, { used, limit, unit: units[unit].ucum, message: say(words) }]),
+    ),
+    cautions: [...new Set(items.flatMap(({ judged }) => presentCautions(judged, words)))],
+    assumptions: listAssumptions(plan, words),
+  }
+}

@@ -1,0 +1,82 @@
+import type { Printer } from '../units/print'
+import type { CanonicalUnit } from '../units/units'
+import type { Basis, Outcome, Piece, Place, Placement, Scale } from './types'
+import type { Scene } from './scene'
+
+/** A sentence, made only where somebody reads it, in the reader's units. */
+export type Say = (words: Printer) => string
+
+/** Something a piece asks of the rest of the setup; `needs.ts` says which kinds meet it. */
+export interface Ask {
+  readonly need: string
+  readonly amount: number | null
+  readonly unit: CanonicalUnit | null
+}
+
+/** What a rule finds before anybody asks for words. Numbers are in the rule's unit. */
+export interface Judgement {
+  readonly outcome: Outcome
+  readonly measured?: number | string | readonly string[] | null
+  readonly limit?: number | readonly [number, number] | null
+  /** Signed distance to the limit in the rule's unit, positive = to spare; by default taken from measured and limit. */
+  readonly margin?: number | null
+  readonly say: Say
+  readonly probability?: number
+  readonly missing?: readonly string[]
+  readonly asks?: Ask
+  readonly placement?: Placement
+  /** So many of this piece would do where one does not. */
+  readonly enough?: number
+  readonly cautions?: readonly Say[]
+}
+
+/** The piece being judged, how many of it, and where it would go. */
+export interface Candidate {
+  readonly piece: Piece
+  readonly quantity: number
+  readonly place?: Place
+  readonly mountHeightMm?: number
+  /** May a rule answer "two of these"? Not once that was tried and found wanting. */
+  readonly mayMultiply?: boolean
+}
+
+/** One line of the rule table: data for the method page and the API, and the function that judges. */
+export interface Rule {
+  /** `<kind>.<check>` */
+  readonly id: string
+  readonly label: string
+  readonly worst: 'change' | 'fail'
+  readonly basis: Basis
+  readonly unit: CanonicalUnit | null
+  /** A single limit is the most that `measured` may be, unless it is said to be the least. */
+  readonly limitIs?: 'least'
+  /** The rule in a sentence or two, for the method page. */
+  readonly rule: string
+  /** Attribute keys of the piece that it reads. */
+  readonly reads: readonly string[]
+  /** It also asks which piece this is (a stand made for this very tank), so that equal specs may differ. */
+  readonly readsGear?: true
+  /** Setup paths that it rests on, the most telling first. */
+  readonly uses: readonly string[]
+  /** As in "14 too long or too thick for the chamber". */
+  readonly failLabel: string
+  /** Null: does not apply to this piece in this setup. */
+  readonly judge: (scene: Scene, candidate: Candidate) => Judgement | null
+}
+
+/** The rules of one kind, and what else is particular to it. */
+export interface KindRules {
+  readonly rules: readonly Rule[]
+  /** Distance from the kind's target, smaller first; see the order of answers. */
+  readonly target?: (scene: Scene, candidate: Candidate) => number | null
+  readonly targetReads?: readonly string[]
+  /** The whole answer in a sentence, where the checks in `covers` pass. */
+  readonly summary?: {
+    readonly covers: readonly string[]
+    readonly write: (scene: Scene, candidate: Candidate, placement: Placement | undefined) => Say
+  }
+  readonly scales?: (scene: Scene, words: Printer) => readonly Scale[]
+}
+
+/** A judgement that cannot be made for lack of the piece's own numbers. */
+export const lacking = (missing: readonly string[], say: Say): Judgement => ({ outcome: 'nodata', missing, say })

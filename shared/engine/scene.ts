@@ -1,0 +1,37 @@
+import type { Item, Setup } from './types'
+import type { Plan } from './setup/plan'
+import { resolve } from './setup/resolve'
+
+type Override = ReadonlyMap<string, number | string | boolean>
+
+/**
+ * What a check sees besides the piece it judges: the setup with its defaults, and the other pieces that count. What
+ * several checks compute from those is kept, so that judging ten thousand pieces computes it once.
+ */
+export interface Scene {
+  readonly plan: Plan
+  readonly others: readonly Item[]
+  readonly kept: Map<unknown, unknown>
+}
+
+export const createScene = (plan: Plan, others: readonly Item[]): Scene => ({ plan, others, kept: new Map() })
+
+/** Computes `derive(scene)` once per scene. `derive` is its own key, so it must be a named function, not a fresh closure. */
+export function once<T>(scene: Scene, derive: (scene: Scene) => T): T {
+  if (!scene.kept.has(derive)) scene.kept.set(derive, derive(scene))
+  return scene.kept.get(derive) as T
+}
+
+/** The same scene with another value for one assumed path; kept per path and value. */
+export function vary(scene: Scene, path: string, value: number | string | boolean): Scene {
+  const key = `${path}=${value}`
+  const known = scene.kept.get(key) as Scene | undefined
+  if (known) return known
+  const override: Override = new Map([[path, value]])
+  const varied = createScene(resolve(scene.plan.setup, override), scene.others)
+  scene.kept.set(key, varied)
+  return varied
+}
+
+/** The setup with other items, and with its tank replaced where asked. */
+export const withItems = (setup: Setup, items: readonly Item[], tank = setup.tank): Setup => ({ ...setup, items, tank })

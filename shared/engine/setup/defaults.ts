@@ -1,0 +1,49 @@
+import type { Mains } from '../types'
+
+const circuit = (volts: Mains['volts'], circuitA: number, plugType: string) => ({ volts, circuitA, plugType })
+
+const northAmerica = circuit(120, 15, 'A/B')
+const britain = circuit(230, 13, 'G')
+const continent = circuit(230, 16, 'F')
+const australia = circuit(230, 10, 'I')
+const japan = circuit(100, 15, 'A/B')
+
+const byCountry: Readonly<Record<string, ReturnType<typeof circuit>>> = {
+  US: northAmerica,
+  CA: northAmerica,
+  MX: northAmerica,
+  GB: britain,
+  IE: britain,
+  MT: britain,
+  CY: britain,
+  SG: britain,
+  HK: britain,
+  MY: britain,
+  AU: australia,
+  NZ: australia,
+  JP: japan,
+}
+
+/** Household mains of a country (ISO 3166-1 alpha-2); without one 120 V, 15 A, plug A/B. Common practice: the outlet decides. */
+export const chooseMains = (country: string | undefined) =>
+  country === undefined ? northAmerica : (byCountry[country.toUpperCase()] ?? continent)
+
+/** What a setup is taken to be where nobody said otherwise; see the method page. */
+export const defaults = {
+  room: { temperatureC: 21, coldestC: 18, warmestC: 28, relativeHumidity: 0.5, ceilingMm: 2400 },
+  /** Floor to the bottom of the tank. */
+  supportHeightMm: 750,
+  freeWallOutlets: 2,
+  water: { feedKPa: 350, feedTempC: 15, feedTdsPpm: 250 },
+  /** Share of the water that is changed each week. */
+  weeklyChangeShare: 0.15,
+  goals: { temperatureC: 25.5, salinityPpt: 35, coral: ['soft', 'lps'] as const, sandDepthMm: 40, rockKgPerL: 0.12 },
+  turnoverPerHour: { 'rear-chambers': [4, 12], sump: [3, 10], 'hang-on': [4, 12], none: [4, 12] } as const,
+  /** Of a lamp's lens above the water. */
+  mountHeightMm: 200,
+  /** Of grains of unknown rock and sand, kg per litre. */
+  rockSolidDensityKgL: 2.7,
+  sandSolidDensityKgL: 2.8,
+  /** Of a settled carbonate bed: 2.8 × (1 − 0.45 pores). */
+  sandBulkDensityKgL: 1.54,
+} as const
