@@ -42,7 +42,10 @@ const toCandidate = ({ piece, quantity, place, mountHeightMm }: Item): Candidate
 })
 
 export function assessItem(plan: Plan, items: readonly Item[], item: Item): AssessedItem {
-  const scene = createScene(plan, items.filter((other) => other !== item))
+  const scene = createScene(
+    plan,
+    items.filter((other) => other !== item),
+  )
   const judged = judgeAll(scene, toCandidate(item))
   const placement = findPlacement(judged)
   return { item, judged, verdict: decideVerdict(judged), ...(placement && { placement }) }

@@ -12,7 +12,8 @@ export function printSetupValue(path: string, value: Value, words: Printer): str
   if (!attribute) return undefined
   if (attribute.type === 'measure' && typeof value === 'number') return words.measure(value, attribute.unit)
   if (typeof value === 'boolean') return value ? 'yes' : 'no'
-  const label = (one: unknown) => ('options' in attribute && attribute.options.find((option) => option.value === String(one))?.label) || String(one)
+  const label = (one: unknown) =>
+    ('options' in attribute && attribute.options.find((option) => option.value === String(one))?.label) || String(one)
   if (Array.isArray(value)) return value.length === 0 ? 'none' : value.map(label).join(', ')
   return label(value)
 }

@@ -23,14 +23,25 @@ export function addUp(plan: Plan, items: readonly Item[]): Readonly<Record<strin
   const weight = weighFilled(plan)
   const stand = items.find((item) => item.piece.kind === 'stand')
   const standKg = stand ? (readNumber(stand.piece.specs, 'massKg') ?? 0) : 0
-  const top = stand && { lengthMm: readNumber(stand.piece.specs, 'topLengthMm'), widthMm: readNumber(stand.piece.specs, 'topWidthMm') }
+  const top = stand && {
+    lengthMm: readNumber(stand.piece.specs, 'topLengthMm'),
+    widthMm: readNumber(stand.piece.specs, 'topWidthMm'),
+  }
   const footprint = top?.lengthMm && top.widthMm ? { lengthMm: top.lengthMm, widthMm: top.widthMm } : undefined
   const pressureKPa = findFloorPressureKPa(plan, standKg, footprint)
-  const scene = createScene(plan, items.filter((item) => item.piece.kind !== 'heater'))
+  const scene = createScene(
+    plan,
+    items.filter((item) => item.piece.kind !== 'heater'),
+  )
   const { needW, needUpperW } = once(scene, findHeaterNeed)
   const heaterW = sumHeaterW(items)
   const budgets: Record<string, RawBudget> = {
-    plugs: { used: plugs.used, limit: plugs.capacity, unit: 'count', say: () => `${plugs.used} of ${plugs.capacity} outlets.` },
+    plugs: {
+      used: plugs.used,
+      limit: plugs.capacity,
+      unit: 'count',
+      say: () => `${plugs.used} of ${plugs.capacity} outlets.`,
+    },
     powerW: {
       used: load.watts,
       limit: continuousW,
@@ -41,7 +52,8 @@ export function addUp(plan: Plan, items: readonly Item[]): Readonly<Record<strin
       used: weight.totalKg + standKg,
       limit: (stand && readNumber(stand.piece.specs, 'loadRatingKg')) ?? null,
       unit: 'kg',
-      say: (words) => `About ${words.mass(weight.totalKg + standKg)} filled. A structural engineer and local building rules decide for anything large or upstairs.`,
+      say: (words) =>
+        `About ${words.mass(weight.totalKg + standKg)} filled. A structural engineer and local building rules decide for anything large or upstairs.`,
     },
     floorKPa: {
       used: pressureKPa,

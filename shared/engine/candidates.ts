@@ -60,9 +60,20 @@ export function setBench(setup: Setup, kind: KindKey, options: CandidateOptions 
 }
 
 /** The whole setup with the candidate in it, its own judgements taken as they are. */
-function assessAfter({ scene, before, kind }: Bench, candidate: Candidate, judged: readonly Judged[], verdict: Verdict): Assessment {
+function assessAfter(
+  { scene, before, kind }: Bench,
+  candidate: Candidate,
+  judged: readonly Judged[],
+  verdict: Verdict,
+): Assessment {
   const { piece, quantity } = candidate
-  const item: Item = { id: candidateId, piece, quantity, state: 'planned', ...(candidate.place && { place: candidate.place }) }
+  const item: Item = {
+    id: candidateId,
+    piece,
+    quantity,
+    state: 'planned',
+    ...(candidate.place && { place: candidate.place }),
+  }
   if (kind === 'tank') {
     const tank = { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }
     const plan = resolve(withItems(scene.plan.setup, scene.others, tank))
@@ -80,7 +91,12 @@ function assessAfter({ scene, before, kind }: Bench, candidate: Candidate, judge
 }
 
 /** What else changes with the candidate: its own demands, and those that its arrival makes of the rest. */
-export function findKnockOns(bench: Bench, candidate: Candidate, judged: readonly Judged[], verdict: Verdict): readonly RawKnockOn[] {
+export function findKnockOns(
+  bench: Bench,
+  candidate: Candidate,
+  judged: readonly Judged[],
+  verdict: Verdict,
+): readonly RawKnockOn[] {
   if (bench.scene.others.length === 0 && bench.kind !== 'tank') return listDemands(judged)
   // A tank of unknown size cannot be resolved; what it asks itself is all that can be said.
   if (bench.kind === 'tank' && verdict === 'unknown') return listDemands(judged)
@@ -97,7 +113,11 @@ export const countEnough = (judged: readonly Judged[]): number | undefined =>
  * Judges one candidate. Where a rule finds that several of it would do, all rules are asked again for so many; if that
  * fails elsewhere (no room, no outlet), one is judged without that way out.
  */
-export function judgeCandidate(scene: Scene, piece: Piece, options: CandidateOptions = {}): { candidate: Candidate; judged: readonly Judged[]; verdict: Verdict } {
+export function judgeCandidate(
+  scene: Scene,
+  piece: Piece,
+  options: CandidateOptions = {},
+): { candidate: Candidate; judged: readonly Judged[]; verdict: Verdict } {
   const asked = options.quantity ?? 1
   const attempt = (quantity: number, mayMultiply: boolean) => {
     const candidate: Candidate = { piece, quantity, mayMultiply, ...(options.place && { place: options.place }) }
@@ -125,4 +145,5 @@ export function assessCandidate(bench: Bench, piece: Piece, options: CandidateOp
   }
 }
 
-export const getTarget = (scene: Scene, candidate: Candidate): number | null => getRules(candidate.piece.kind).target?.(scene, candidate) ?? null
+export const getTarget = (scene: Scene, candidate: Candidate): number | null =>
+  getRules(candidate.piece.kind).target?.(scene, candidate) ?? null

@@ -15,16 +15,27 @@ import { rankConfidence, rateConfidence, verdictOrder } from './verdict'
 import { getKind } from '../kinds/index'
 
 const onTheWay = (kind: KindKey): readonly string[] =>
-  hasOwnRules(kind) ? [] : [`Checks of their own for ${getKind(kind).plural} are on the way; only the general ones were made.`]
+  hasOwnRules(kind)
+    ? []
+    : [`Checks of their own for ${getKind(kind).plural} are on the way; only the general ones were made.`]
 
 /** The answer in one sentence: what is wrong, what is not known, what must change, or how it fits. */
-function summarise(scene: Sweep['bench']['scene'], { candidate, judged, verdict, placement, knockOns }: AssessedCandidate, words: Printer): string {
+function summarise(
+  scene: Sweep['bench']['scene'],
+  { candidate, judged, verdict, placement, knockOns }: AssessedCandidate,
+  words: Printer,
+): string {
   const sayFirst = (outcome: string) => judged.find((one) => (one.eitherWay ?? one.outcome) === outcome)
   if (verdict === 'no') return presentCheck(sayFirst('fail')!, words).message
-  if (verdict === 'unknown') return presentCheck(judged.find((one) => one.outcome === 'nodata' && one.rule.worst === 'fail')!, words).message
+  if (verdict === 'unknown')
+    return presentCheck(
+      judged.find((one) => one.outcome === 'nodata' && one.rule.worst === 'fail')!,
+      words,
+    ).message
   const summary = getRules(candidate.piece.kind).summary
   const covered = judged.filter(({ rule }) => summary?.covers.includes(rule.id))
-  if (summary && covered.length > 0 && covered.every(({ outcome }) => outcome === 'pass')) return summary.write(scene, candidate, placement)(words)
+  if (summary && covered.length > 0 && covered.every(({ outcome }) => outcome === 'pass'))
+    return summary.write(scene, candidate, placement)(words)
   const changed = sayFirst('change')
   if (changed) return presentCheck(changed, words).message
   if (knockOns[0]) return knockOns[0].say(words)
@@ -86,7 +97,10 @@ function rank(swept: Sweep, pieces: readonly Piece[]): Ranked[] {
   })
 }
 
-const verdictRank = Object.fromEntries(verdictOrder.map((verdict, index) => [verdict, index])) as Record<Verdict, number>
+const verdictRank = Object.fromEntries(verdictOrder.map((verdict, index) => [verdict, index])) as Record<
+  Verdict,
+  number
+>
 
 function compare(swept: Sweep, pieces: readonly Piece[]) {
   const slugOf = (index: number) => pieces[index]?.gear?.slug ?? ''
@@ -103,10 +117,15 @@ const decides = (judged: readonly Judged[], verdict: Verdict): readonly Judged[]
     ? judged.filter((one) => (one.eitherWay ?? one.outcome) === 'fail')
     : judged.filter((one) => one.outcome === 'nodata' && one.eitherWay === undefined && one.rule.worst === 'fail')
 
-function tally<T>(entries: readonly T[], keysOf: (entry: T) => readonly string[]): readonly { key: string; count: number }[] {
+function tally<T>(
+  entries: readonly T[],
+  keysOf: (entry: T) => readonly string[],
+): readonly { key: string; count: number }[] {
   const counts = new Map<string, number>()
   for (const entry of entries) for (const key of new Set(keysOf(entry))) counts.set(key, (counts.get(key) ?? 0) + 1)
-  return [...counts].map(([key, count]) => ({ key, count })).sort((a, b) => b.count - a.count || (a.key < b.key ? -1 : 1))
+  return [...counts]
+    .map(([key, count]) => ({ key, count }))
+    .sort((a, b) => b.count - a.count || (a.key < b.key ? -1 : 1))
 }
 
 const mostMarks = 400
@@ -115,7 +134,13 @@ function markAll(scales: readonly Scale[], ranked: readonly Ranked[], pieces: re
   return ranked.slice(0, mostMarks).flatMap(({ index, verdict }) => {
     const { gear, specs } = pieces[index]!
     if (!gear) return []
-    return [{ slug: gear.slug, verdict, values: Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null])) }]
+    return [
+      {
+        slug: gear.slug,
+        verdict,
+        values: Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null])),
+      },
+    ]
   })
 }
 
@@ -124,7 +149,12 @@ function markAll(scales: readonly Scale[], ranked: readonly Ranked[], pieces: re
  * backing, slug. `pieces` must be one kind's, and the same array from call to call where speed matters.
  * RangeError where the tank has neither an outside size nor a volume.
  */
-export function fit(setup: Setup, kind: KindKey, pieces: readonly Piece[], options: FitOptions & CandidateOptions): FitResult {
+export function fit(
+  setup: Setup,
+  kind: KindKey,
+  pieces: readonly Piece[],
+  options: FitOptions & CandidateOptions,
+): FitResult {
   const words = createPrinter(setup.units)
   const swept = sweep(setup, kind, pieces, options)
   const { scene } = swept.bench
@@ -132,9 +162,12 @@ export function fit(setup: Setup, kind: KindKey, pieces: readonly Piece[], optio
   const byVerdict = (verdict: Verdict) => ranked.filter((one) => one.verdict === verdict)
   const failed = byVerdict('no')
   const unknown = byVerdict('unknown')
-  const decidingRules = ({ index, verdict }: Ranked) => decides(swept.judgedOf(index), verdict).map(({ rule }) => rule.id)
+  const decidingRules = ({ index, verdict }: Ranked) =>
+    decides(swept.judgedOf(index), verdict).map(({ rule }) => rule.id)
   const asked = ranked.filter(
-    (one) => (!options.verdict || one.verdict === options.verdict) && (!options.check || decidingRules(one).includes(options.check)),
+    (one) =>
+      (!options.verdict || one.verdict === options.verdict) &&
+      (!options.check || decidingRules(one).includes(options.check)),
   )
   const labels = new Map(getRules(kind).rules.map(({ id, failLabel }) => [id, failLabel]))
   const scales = options.scales ? getRules(kind).scales?.(scene, words) : undefined
@@ -147,11 +180,20 @@ export function fit(setup: Setup, kind: KindKey, pieces: readonly Piece[], optio
   })
   return {
     answers,
-    counts: { fits: byVerdict('fits').length, changes: byVerdict('changes').length, no: failed.length, unknown: unknown.length },
-    failedBy: tally(failed, decidingRules).map(({ key, count }) => ({ check: key, count, label: labels.get(key) ?? key })),
-    missingBy: tally(unknown, ({ index, verdict }) => decides(swept.judgedOf(index), verdict).flatMap(({ judgement }) => judgement.missing ?? [])).map(
-      ({ key, count }) => ({ key, count, label: getAttribute(kind, key)?.label ?? key }),
-    ),
+    counts: {
+      fits: byVerdict('fits').length,
+      changes: byVerdict('changes').length,
+      no: failed.length,
+      unknown: unknown.length,
+    },
+    failedBy: tally(failed, decidingRules).map(({ key, count }) => ({
+      check: key,
+      count,
+      label: labels.get(key) ?? key,
+    })),
+    missingBy: tally(unknown, ({ index, verdict }) =>
+      decides(swept.judgedOf(index), verdict).flatMap(({ judgement }) => judgement.missing ?? []),
+    ).map(({ key, count }) => ({ key, count, label: getAttribute(kind, key)?.label ?? key })),
     assumptions: listAssumptions(scene.plan, words),
     total: asked.length,
     ...(scales && { scales, marks: markAll(scales, ranked, pieces) }),

@@ -43,7 +43,8 @@ const usualValues = (attribute: Attribute | undefined): readonly (number | strin
     const [low, high] = attribute.usual
     return Array.from({ length: samples }, (_, index) => low + ((high - low) * index) / (samples - 1))
   }
-  if (attribute?.type === 'choice') return attribute.options.map(({ value }) => (attribute.numeric ? Number(value) : value))
+  if (attribute?.type === 'choice')
+    return attribute.options.map(({ value }) => (attribute.numeric ? Number(value) : value))
   return []
 }
 
@@ -52,7 +53,12 @@ function tryMissing(scene: Scene, rule: Rule, candidate: Candidate, missing: rea
   if (missing.length === 0 || missing.length > 2) return undefined
   const grid = missing.reduce<Specs[]>(
     (rows, key) =>
-      rows.flatMap((row) => usualValues(getAttribute(candidate.piece.kind, key)).map((value) => ({ ...row, [key]: { value, source: 'estimate' as const } }))),
+      rows.flatMap((row) =>
+        usualValues(getAttribute(candidate.piece.kind, key)).map((value) => ({
+          ...row,
+          [key]: { value, source: 'estimate' as const },
+        })),
+      ),
     [{}],
   )
   if (grid.length <= 1) return undefined
@@ -66,10 +72,15 @@ function tryMissing(scene: Scene, rule: Rule, candidate: Candidate, missing: rea
   return shared
 }
 
-const isKept = (outcome: Outcome | undefined) => outcome === 'pass' || outcome === 'change'
+const isKept = (outcome: Outcome | undefined) => outcome === 'pass'
 
-/** The first assumed value whose usual range holds one with which the check would be kept. */
-function findCondition(scene: Scene, rule: Rule, candidate: Candidate, assumed: readonly string[]): (() => Condition) | undefined {
+/** The first assumed value whose usual range holds one with which the check would pass. */
+function findCondition(
+  scene: Scene,
+  rule: Rule,
+  candidate: Candidate,
+  assumed: readonly string[],
+): (() => Condition) | undefined {
   const outcomeAt = (path: string, value: number | string) => rule.judge(vary(scene, path, value), candidate)?.outcome
   for (const path of assumed) {
     const used = scene.plan.assumed.get(path)
@@ -79,7 +90,10 @@ function findCondition(scene: Scene, rule: Rule, candidate: Candidate, assumed: 
         const isBeyond = index === 0 ? end < used : end > used
         if (!isBeyond || !isKept(outcomeAt(path, end))) continue
         return () => {
-          const fails = (share: number) => !isKept(rule.judge(vary({ ...scene, kept: new Map() }, path, used + share * (end - used)), candidate)?.outcome)
+          const fails = (share: number) =>
+            !isKept(
+              rule.judge(vary({ ...scene, kept: new Map() }, path, used + share * (end - used)), candidate)?.outcome,
+            )
           const share = findLast(fails, 0, 1) ?? 0
           return { path, assumed: used, turnsAt: used + share * (end - used), toward: index === 0 ? 'less' : 'more' }
         }
@@ -97,7 +111,7 @@ function findCondition(scene: Scene, rule: Rule, candidate: Candidate, assumed: 
 export function judge(scene: Scene, rule: Rule, candidate: Candidate): Judged | null {
   const judgement = rule.judge(scene, candidate)
   if (!judgement) return null
-  const assumed = listAssumed(scene, rule.uses)
+  const assumed = listAssumed(scene, judgement.rests ?? rule.uses)
   const base = { rule, judgement, assumed }
   if (judgement.outcome === 'nodata') {
     const eitherWay = tryMissing(scene, rule, candidate, judgement.missing ?? [])
@@ -116,7 +130,8 @@ export const describeCondition =
     if (!attribute) return ''
     const print = (value: number | string | boolean): string => {
       if (attribute.type === 'measure' && typeof value === 'number') return words.measure(value, attribute.unit)
-      if (attribute.type === 'choice') return attribute.options.find((option) => option.value === String(value))?.label ?? String(value)
+      if (attribute.type === 'choice')
+        return attribute.options.find((option) => option.value === String(value))?.label ?? String(value)
       return String(value)
     }
     const { turnsAt, toward, assumed } = condition

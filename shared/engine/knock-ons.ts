@@ -24,7 +24,15 @@ export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
   return judged.flatMap((one): RawKnockOn[] => {
     if (one.outcome !== 'change' && one.outcome !== 'fail') return []
     const { asks } = one.judgement
-    return [{ kind: asks ? 'need' : 'check', subject: asks?.need ?? one.rule.id, from: null, to: one.outcome, say: sayOf(one) }]
+    return [
+      {
+        kind: asks ? 'need' : 'check',
+        subject: asks?.need ?? one.rule.id,
+        from: null,
+        to: one.outcome,
+        say: sayOf(one),
+      },
+    ]
   })
 }
 
@@ -35,7 +43,15 @@ function worsenedKnockOns(before: AssessedItem, after: AssessedItem): RawKnockOn
     const from = was.get(one.rule.id) ?? 'pass'
     if (severity[one.outcome] <= severity[from]) return []
     const say = sayOf(one)
-    return [{ kind: 'check', subject: after.item.id, from, to: one.outcome, say: (words) => `${nameOf(after)}: ${say(words)}` }]
+    return [
+      {
+        kind: 'check',
+        subject: after.item.id,
+        from,
+        to: one.outcome,
+        say: (words) => `${nameOf(after)}: ${say(words)}`,
+      },
+    ]
   })
 }
 
@@ -67,7 +83,9 @@ export function diff(before: Assessment, after: Assessment): readonly RawKnockOn
     const wasMet = met.get(essential.need) ?? true
     if (wasMet === essential.isMet) return []
     const kind = essential.isMet ? 'freed' : 'missing'
-    return [{ kind, subject: essential.need, from: null, to: null, say: essential.isMet ? essential.sayMet : essential.say }]
+    return [
+      { kind, subject: essential.need, from: null, to: null, say: essential.isMet ? essential.sayMet : essential.say },
+    ]
   })
   return [...items, ...essentials, ...budgetKnockOns(before, after)]
 }

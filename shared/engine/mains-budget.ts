@@ -44,7 +44,10 @@ const pluggedIn: ReadonlySet<string> = new Set([
 
 /** Plugs that need an outlet of strip or wall: heaters on a controller's own outlets do not. */
 export function countPlugs(plan: Plan, items: readonly Item[]): Outlets {
-  const plugs = sum(items.filter((item) => pluggedIn.has(item.piece.kind)), 'plugs')
+  const plugs = sum(
+    items.filter((item) => pluggedIn.has(item.piece.kind)),
+    'plugs',
+  )
   const onControllers = Math.min(
     sum(ofKind(items, 'temperature-controller'), 'outlets').total,
     sum(ofKind(items, 'heater'), 'plugs').total,
@@ -67,7 +70,10 @@ export function countOutlets(plan: Plan, items: readonly Item[]): number {
 
 /** Everything that can run longer than three hours, heaters at full power, W. */
 export function sumLoad(plan: Plan, items: readonly Item[]): Load {
-  const watts = sum(items.filter((item) => pluggedIn.has(item.piece.kind)), 'powerW')
+  const watts = sum(
+    items.filter((item) => pluggedIn.has(item.piece.kind)),
+    'powerW',
+  )
   const hasPump = ofKind(items, 'return-pump').length > 0
   return { watts: watts.total + (hasPump ? 0 : (plan.tank.includedPump?.powerW ?? 0)), unknown: watts.unknown }
 }

@@ -32,9 +32,19 @@ interface EssentialRule {
 
 /** By presence alone; what each piece must be able to do is for its own checks. */
 const essentials: readonly EssentialRule[] = [
-  { need: 'salinity-reading', kinds: ['salinity-meter'], missing: 'Nothing measures salinity: a refractometer or conductivity meter with a seawater scale is missing.', met: 'Salinity can be measured.' },
+  {
+    need: 'salinity-reading',
+    kinds: ['salinity-meter'],
+    missing: 'Nothing measures salinity: a refractometer or conductivity meter with a seawater scale is missing.',
+    met: 'Salinity can be measured.',
+  },
   { need: 'salt', kinds: ['salt-mix'], missing: 'There is no salt mix for the first fill.', met: 'There is salt mix.' },
-  { need: 'pure-water', kinds: ['ro-unit'], missing: 'There is no RO/DI unit; without one, pure water has to be bought.', met: 'Pure water can be made.' },
+  {
+    need: 'pure-water',
+    kinds: ['ro-unit'],
+    missing: 'There is no RO/DI unit; without one, pure water has to be bought.',
+    met: 'Pure water can be made.',
+  },
   {
     need: 'circulation',
     kinds: ['wavemaker', 'return-pump'],
@@ -42,7 +52,12 @@ const essentials: readonly EssentialRule[] = [
     met: 'The water is moved.',
     metByTank: (plan) => plan.tank.includedPump !== undefined,
   },
-  { need: 'glass-cleaning', kinds: ['scraper'], missing: 'There is nothing to clean the viewing panes with.', met: 'The panes can be cleaned.' },
+  {
+    need: 'glass-cleaning',
+    kinds: ['scraper'],
+    missing: 'There is nothing to clean the viewing panes with.',
+    met: 'The panes can be cleaned.',
+  },
   {
     need: 'light',
     kinds: ['light'],
@@ -71,7 +86,10 @@ function checkTests(items: readonly Item[]): Essential {
 
 function checkHeat(plan: Plan, items: readonly Item[]): Essential | null {
   const heaters = items.filter((item) => item.piece.kind === 'heater')
-  const scene = createScene(plan, items.filter((item) => item.piece.kind !== 'heater'))
+  const scene = createScene(
+    plan,
+    items.filter((item) => item.piece.kind !== 'heater'),
+  )
   const { needW, needUpperW } = once(scene, findHeaterNeed)
   if (needUpperW === 0) return null
   return {
@@ -80,8 +98,10 @@ function checkHeat(plan: Plan, items: readonly Item[]): Essential | null {
     unit: 'W',
     metBy: heaters.map(({ id }) => id),
     isMet: heaters.length > 0,
-    say: (words) => `There is no heater: a ${words.temperature(plan.room.coldestC)} room takes ${words.pair([needW, needUpperW], 'W')}.`,
-    sayMet: (words) => `${words.pair([needW, needUpperW], 'W')} hold ${words.temperature(plan.goals.temperatureC)} in a ${words.temperature(plan.room.coldestC)} room.`,
+    say: (words) =>
+      `There is no heater: with the room at ${words.temperature(plan.room.coldestC)} it takes ${words.pair([needW, needUpperW], 'W')}.`,
+    sayMet: (words) =>
+      `${words.pair([needW, needUpperW], 'W')} hold ${words.temperature(plan.goals.temperatureC)} with the room at ${words.temperature(plan.room.coldestC)}.`,
   }
 }
 

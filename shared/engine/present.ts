@@ -16,14 +16,19 @@ function findMargin({ rule, judgement }: Judged): number | null {
   return width > 0 ? Math.min(measured - limit[0], limit[1] - measured) / width : null
 }
 
-const closeness = (probability: number): string => ` A close call, ${Math.round(probability * 100)} % sure: measure before buying.`
+const closeness = (probability: number): string =>
+  ` A close call, ${Math.round(probability * 100)} % sure: measure before buying.`
 
 /** One check in words, in the reader's units. */
 export function presentCheck(judged: Judged, words: Printer): Check {
   const { rule, judgement, outcome, assumed, condition } = judged
   const { probability, missing } = judgement
   const close = outcome !== 'nodata' && probability !== undefined && isCloseCall(probability)
-  const message = [judgement.say(words), condition ? ` ${describeCondition(condition())(words)}` : '', close ? closeness(probability) : '']
+  const message = [
+    judgement.say(words),
+    condition ? ` ${describeCondition(condition())(words)}` : '',
+    close ? closeness(probability) : '',
+  ]
   return {
     id: rule.id,
     label: rule.label,
@@ -101,7 +106,10 @@ export function presentReport(assessment: Assessment, words: Printer): Report {
     missing: essentials.filter(({ isMet }) => !isMet).map(({ need, say }) => ({ need, message: say(words) })),
     needs: presentNeeds(assessment, words),
     budgets: Object.fromEntries(
-      Object.entries(budgets).map(([key, { used, limit, unit, say }]) => [key, { used, limit, unit: units[unit].ucum, message: say(words) }]),
+      Object.entries(budgets).map(([key, { used, limit, unit, say }]) => [
+        key,
+        { used, limit, unit: units[unit].ucum, message: say(words) },
+      ]),
     ),
     cautions: [...new Set(items.flatMap(({ judged }) => presentCautions(judged, words)))],
     assumptions: listAssumptions(plan, words),

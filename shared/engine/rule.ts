@@ -25,6 +25,8 @@ export interface Judgement {
   readonly missing?: readonly string[]
   readonly asks?: Ask
   readonly placement?: Placement
+  /** Setup paths that this finding rests on, where they are fewer than the rule's `uses`. */
+  readonly rests?: readonly string[]
   /** So many of this piece would do where one does not. */
   readonly enough?: number
   readonly cautions?: readonly Say[]

@@ -30,8 +30,17 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
   const { scene } = bench
   const kindRules = getRules(kind)
   const quantity = options.quantity ?? 1
-  const columns: Column[] = kindRules.rules.map((rule) => ({ rule, classes: classifyForRule(pieces, rule), judged: [] }))
-  const candidateOf = (piece: Piece) => ({ piece, quantity, mayMultiply: options.quantity === undefined, ...(options.place && { place: options.place }) })
+  const columns: Column[] = kindRules.rules.map((rule) => ({
+    rule,
+    classes: classifyForRule(pieces, rule),
+    judged: [],
+  }))
+  const candidateOf = (piece: Piece) => ({
+    piece,
+    quantity,
+    mayMultiply: options.quantity === undefined,
+    ...(options.place && { place: options.place }),
+  })
   const settled = new Map<number, readonly Judged[]>()
 
   const collect = (index: number): readonly Judged[] =>
@@ -67,7 +76,8 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
       const id = classes.ofPiece[index]! * 8 + quantities[index]!
       let distance = cache.get(id)
       if (distance === undefined) {
-        distance = kindRules.target(scene, { ...candidateOf(pieces[index]!), quantity: quantities[index]! }) ?? Number.MAX_VALUE
+        distance =
+          kindRules.target(scene, { ...candidateOf(pieces[index]!), quantity: quantities[index]! }) ?? Number.MAX_VALUE
         cache.set(id, distance)
       }
       targets[index] = distance

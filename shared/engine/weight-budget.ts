@@ -24,7 +24,11 @@ export function weighFilled({ tank, goals }: Plan): FilledWeight {
 }
 
 /** Pressure of tank and stand on the floor under the stand, or under the tank where there is none, kPa. */
-export function findFloorPressureKPa(plan: Plan, standKg: number, footprint?: { lengthMm: number; widthMm: number }): number {
+export function findFloorPressureKPa(
+  plan: Plan,
+  standKg: number,
+  footprint?: { lengthMm: number; widthMm: number },
+): number {
   const { outerLengthMm, outerWidthMm } = plan.tank
   const { lengthMm, widthMm } = footprint ?? { lengthMm: outerLengthMm, widthMm: outerWidthMm }
   return floorPressureKPa(weighFilled(plan).totalKg + standKg, lengthMm, widthMm)

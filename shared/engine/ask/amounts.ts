@@ -27,7 +27,9 @@ const valueOf = (token: Token, unit: NamedUnit | undefined): number | undefined 
 
 /** A hyphen between number and unit, as in "20-gallon", is no part of either. */
 const skipHyphen = (tokens: readonly Token[], at: number): number =>
-  tokens[at]?.text === '-' && tokens[at]?.glued && tokens[at + 1]?.glued && tokens[at + 1]?.type === 'word' ? at + 1 : at
+  tokens[at]?.text === '-' && tokens[at]?.glued && tokens[at + 1]?.glued && tokens[at + 1]?.type === 'word'
+    ? at + 1
+    : at
 
 /** The inches of "2 ft 3 in". */
 const readSmaller = (tokens: readonly Token[], large: Amount): Amount => {
@@ -47,7 +49,13 @@ export const readAmount = (tokens: readonly Token[], at: number): Amount | undef
   if (value === undefined) return undefined
   const isBareWord = found === undefined && number.spelled === true
   const to = found?.to ?? at + 1
-  return readSmaller(tokens, { quantity: found?.quantity, parts: [{ value, unit: found?.unit }], from: at, to, isBareWord })
+  return readSmaller(tokens, {
+    quantity: found?.quantity,
+    parts: [{ value, unit: found?.unit }],
+    from: at,
+    to,
+    isBareWord,
+  })
 }
 
 /** The amount with a unit for numbers that have none. */

@@ -24,11 +24,18 @@ const dimensions = indexPhrases<Dimension>([
 ])
 
 /** The phrase nearest before a measure, with no more than `gap` other words between, in the same clause. */
-const lookBack = <T>(reading: Reading, measure: Measure, index: PhraseIndex<T>, gap: number, stops: boolean): Mention<T> | undefined => {
+const lookBack = <T>(
+  reading: Reading,
+  measure: Measure,
+  index: PhraseIndex<T>,
+  gap: number,
+  stops: boolean,
+): Mention<T> | undefined => {
   const { tokens, measureAt, draft } = reading
   for (let end = measure.from; end >= measure.from - gap; end--) {
     const passed = tokens[end]
-    if (end < measure.from && (passed === undefined || measureAt.has(end) || (stops && passed.type === 'stop'))) return undefined
+    if (end < measure.from && (passed === undefined || measureAt.has(end) || (stops && passed.type === 'stop')))
+      return undefined
     for (let length = longestPhrase; length > 0; length--) {
       const mention = matchAt(index, tokens, end - length)
       const isFree = mention?.to === end && !draft.isUsed(mention.from) && !measureAt.has(mention.from)
@@ -38,7 +45,12 @@ const lookBack = <T>(reading: Reading, measure: Measure, index: PhraseIndex<T>, 
   return undefined
 }
 
-const lookAhead = <T>(reading: Reading, measure: Measure, index: PhraseIndex<T>, gap: number): Mention<T> | undefined => {
+const lookAhead = <T>(
+  reading: Reading,
+  measure: Measure,
+  index: PhraseIndex<T>,
+  gap: number,
+): Mention<T> | undefined => {
   const { tokens, measureAt, draft } = reading
   for (let at = measure.to; at <= measure.to + gap; at++) {
     const token = tokens[at]

@@ -44,7 +44,8 @@ export const createDraft = (text: string, tokens: readonly Token[]): Draft => {
     const isFree = (from: number, to: number) =>
       tokens.slice(from, to).every((token, offset) => !used.has(from + offset) && token.type !== 'stop')
     let { from, to } = span
-    for (const cue of cues.toSorted((a, b) => b.from - a.from)) if (cue.from < from && isFree(cue.from, from)) from = cue.from
+    for (const cue of cues.toSorted((a, b) => b.from - a.from))
+      if (cue.from < from && isFree(cue.from, from)) from = cue.from
     for (const cue of cues.toSorted((a, b) => a.to - b.to)) if (cue.to > to && isFree(to, cue.to)) to = cue.to
     return { from, to }
   }

@@ -21,12 +21,20 @@ const isSeparator = (tokens: readonly Token[], at: number): boolean =>
   separators.has(tokens[at]?.text ?? '') && tokens[at + 1]?.type === 'number'
 
 /** "24L" in a row of lengths is a length called so, not 24 litres. */
-const readLabelled = (tokens: readonly Token[], at: number, isLater: boolean): { amount: Amount; label?: Dimension; to: number } | undefined => {
+const readLabelled = (
+  tokens: readonly Token[],
+  at: number,
+  isLater: boolean,
+): { amount: Amount; label?: Dimension; to: number } | undefined => {
   const amount = readAmount(tokens, at)
   if (amount === undefined) return undefined
   const letter = dimensionLetters.get(tokens[at + 1]?.text ?? '')
   if (letter !== undefined && (isSeparator(tokens, at + 2) || isLater)) {
-    const bare = { ...amount, quantity: undefined, parts: amount.parts.slice(0, 1).map(({ value }) => ({ value, unit: undefined })) }
+    const bare = {
+      ...amount,
+      quantity: undefined,
+      parts: amount.parts.slice(0, 1).map(({ value }) => ({ value, unit: undefined })),
+    }
     return { amount: { ...bare, to: at + 1 }, label: letter, to: at + 2 }
   }
   const word = tokens[amount.to]?.text ?? ''
@@ -68,7 +76,10 @@ const readRange = (tokens: readonly Token[], low: Amount): Measure | undefined =
   if (low.quantity !== undefined && high.quantity !== undefined && low.quantity !== high.quantity) return undefined
   const share = (amount: Amount, quantity: Quantity | undefined, unit: NamedUnit | undefined) =>
     quantity === undefined ? amount : unit === undefined ? { ...amount, quantity } : withUnit(amount, quantity, unit)
-  const amounts = [share(low, high.quantity ?? low.quantity, highUnit), share(high, low.quantity ?? high.quantity, lowUnit)]
+  const amounts = [
+    share(low, high.quantity ?? low.quantity, highUnit),
+    share(high, low.quantity ?? high.quantity, lowUnit),
+  ]
   return { shape: 'range', amounts, labels: [], from: low.from, to: high.to }
 }
 

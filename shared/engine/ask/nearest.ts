@@ -39,7 +39,11 @@ const walk = (
 }
 
 /** The closest landmark that could be what the measure is of. Before wins over after where both are as close. */
-export const findNearest = (reading: Reading, measure: Measure, accepts: (landmark: Landmark) => boolean): Near | undefined => {
+export const findNearest = (
+  reading: Reading,
+  measure: Measure,
+  accepts: (landmark: Landmark) => boolean,
+): Near | undefined => {
   const before = walk(reading, measure, -1, accepts)
   const after = walk(reading, measure, 1, accepts)
   if (before === undefined || after === undefined) return before ?? after

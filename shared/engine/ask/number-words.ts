@@ -1,6 +1,7 @@
 import type { Token } from './token'
 
-const ones = 'one two three four five six seven eight nine ten eleven twelve thirteen fourteen fifteen sixteen seventeen eighteen nineteen'
+const ones =
+  'one two three four five six seven eight nine ten eleven twelve thirteen fourteen fifteen sixteen seventeen eighteen nineteen'
 const tens = 'twenty thirty forty fifty sixty seventy eighty ninety'
 const shares: ReadonlyMap<string, number> = new Map([
   ['half', 0.5],

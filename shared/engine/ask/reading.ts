@@ -10,6 +10,8 @@ export interface Reading {
   readonly tokens: readonly Token[]
   readonly system: UnitSystem
   readonly kind: KindKey | null
+  /** The text speaks of a piece that is to be replaced. */
+  readonly isGone: boolean
   readonly measures: readonly Measure[]
   readonly landmarks: readonly Landmark[]
   readonly draft: Draft
@@ -19,4 +21,8 @@ export interface Reading {
 }
 
 export const byToken = <T extends Span>(spans: readonly T[]): ReadonlyMap<number, T> =>
-  new Map(spans.flatMap((span) => Array.from({ length: span.to - span.from }, (_, offset) => [span.from + offset, span] as const)))
+  new Map(
+    spans.flatMap((span) =>
+      Array.from({ length: span.to - span.from }, (_, offset) => [span.from + offset, span] as const),
+    ),
+  )

@@ -7,6 +7,7 @@ import type { Measure } from './measures'
 import { findNearest } from './nearest'
 import type { Reading } from './reading'
 import type { Season } from './words/season-words'
+import { stopWords } from './words/stop-words'
 
 const scaleOf = (symbol: string): NamedUnit | undefined => namedUnits.temperature.find((unit) => unit.symbol === symbol)
 /** °C that rooms and tanks have; a number without a scale is read on the one that puts it here. */
@@ -22,9 +23,17 @@ const isLikely = (amount: Amount, unit: NamedUnit): boolean => {
 
 /** A scale typed in the text, else the system's, unless only the other makes sense. */
 const chooseScale = (amount: Amount, { measures, system }: Reading): NamedUnit | undefined => {
-  const typed = measures.flatMap(({ amounts }) => amounts).find(({ quantity, parts }) => quantity === 'temperature' && parts[0]?.unit)
+  const typed = measures
+    .flatMap(({ amounts }) => amounts)
+    .find(({ quantity, parts }) => quantity === 'temperature' && parts[0]?.unit)
   const scales = [typed?.parts[0]?.unit, findShownUnit('C', system), scaleOf('°F'), scaleOf('°C')]
   return scales.find((scale) => scale !== undefined && isLikely(amount, scale))
+}
+
+/** "10 outlets": a bare number before a word of substance counts that. */
+const countsSomething = ({ tokens }: Reading, measure: Measure): boolean => {
+  const next = tokens[measure.to]
+  return next?.type === 'word' && !stopWords.has(next.text)
 }
 
 const pathOf: Readonly<Record<Season, string>> = {
@@ -32,7 +41,11 @@ const pathOf: Readonly<Record<Season, string>> = {
   warmest: 'room.warmestC',
   usual: 'room.temperatureC',
 }
-const nameOf: Readonly<Record<Season, string>> = { coldest: 'coldest room', warmest: 'warmest room', usual: 'usual room' }
+const nameOf: Readonly<Record<Season, string>> = {
+  coldest: 'coldest room',
+  warmest: 'warmest room',
+  usual: 'usual room',
+}
 
 const guessPlace = (celsius: number): Season | 'water' => {
   if (celsius < waterBand[0]) return 'usual'
@@ -43,9 +56,15 @@ const guessPlace = (celsius: number): Season | 'water' => {
 export const readTemperature = (reading: Reading, measure: Measure): boolean => {
   const { draft } = reading
   const isTyped = measure.amounts.some(({ quantity }) => quantity === 'temperature')
-  if (measure.shape === 'size' || (!isTyped && measure.amounts.some(({ quantity }) => quantity !== undefined))) return false
-  const near = findNearest(reading, measure, ({ subject }) => subject === 'room' || subject === 'water' || subject === 'feed')
+  if (measure.shape === 'size' || (!isTyped && measure.amounts.some(({ quantity }) => quantity !== undefined)))
+    return false
+  const near = findNearest(
+    reading,
+    measure,
+    ({ subject }) => subject === 'room' || subject === 'water' || subject === 'feed',
+  )
   const season = findSeason(reading, measure)
+  if (!isTyped && season?.from !== measure.to && countsSomething(reading, measure)) return false
   const place = near !== undefined && (isTyped || near.cost <= nearEnough || season !== undefined) ? near : undefined
   if (!isTyped && place === undefined) return false
   const amounts = measure.amounts.map((amount) => {
@@ -81,12 +100,20 @@ const readRange = (
   if (isRoom && (ends[0] < waterBand[0] || ends[1] > waterBand[1])) {
     if (!draft.setField('room.coldestC', ends[0], printAmount(low))) return false
     draft.setField('room.warmestC', ends[1], printAmount(high))
-    draft.note({ meaning: `room ${printAmount(low, false)} to ${printAmount(high)}`, path: 'room.coldestC' }, measure, ...cues)
+    draft.note(
+      { meaning: `room ${printAmount(low, false)} to ${printAmount(high)}`, path: 'room.coldestC' },
+      measure,
+      ...cues,
+    )
     return true
   }
   const unit = high.parts[0]?.unit
   const middle = { ...high, parts: [{ value: ((low.parts[0]?.value ?? 0) + (high.parts[0]?.value ?? 0)) / 2, unit }] }
   if (!draft.setField('goals.temperatureC', amountIn(middle, 'C'), printAmount(middle))) return false
-  draft.note({ meaning: `water ${printAmount(middle)}, the middle of what was said`, path: 'goals.temperatureC' }, measure, ...cues)
+  draft.note(
+    { meaning: `water ${printAmount(middle)}, the middle of what was said`, path: 'goals.temperatureC' },
+    measure,
+    ...cues,
+  )
   return true
 }

@@ -59,7 +59,8 @@ function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
       outcome: 'change',
       measured: volts.map(String),
       asks: { need: 'plug-adaptor', amount: null, unit: null },
-      say: () => `Has a type ${plugType} plug, your outlets are ${mains.plugType}: ask its maker before using an adaptor.`,
+      say: () =>
+        `Has a type ${plugType} plug, your outlets are ${mains.plugType}: ask its maker before using an adaptor.`,
     }
   return { outcome: 'pass', measured: volts.map(String), say: () => `Made for ${mains.volts} V.` }
 }
@@ -103,8 +104,16 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const cautions = [
     ...(scene.plan.mains.residualCurrentProtected
       ? []
-      : [() => 'Plug it into an outlet with residual-current (ground-fault) protection, with a drip loop in the cord; local electrical codes and a licensed electrician decide.']),
-    ...(unknown.length > 0 ? [() => `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`] : []),
+      : [
+          () =>
+            'Plug it into an outlet with residual-current (ground-fault) protection, with a drip loop in the cord; local electrical codes and a licensed electrician decide.',
+        ]),
+    ...(unknown.length > 0
+      ? [
+          () =>
+            `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`,
+        ]
+      : []),
   ]
   return {
     outcome: totalW <= continuousW ? 'pass' : 'change',

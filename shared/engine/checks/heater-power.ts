@@ -3,6 +3,7 @@ import { otherControllers } from '../mains-budget'
 import { probabilityAtLeast, probabilityAtMost, standardUncertainty } from '../physics/conformance'
 import { lacking, type Candidate, type Judgement, type Rule, type Say } from '../rule'
 import { once, type Scene } from '../scene'
+import { hasAreas, noAreas } from './shape'
 import { thresholds } from '../thresholds'
 import type { Value } from '../types'
 import { readMeasure } from '../values'
@@ -31,43 +32,57 @@ function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): 
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
   const { plan } = scene
+  if (!hasAreas(plan)) return noAreas(plan)
   const { needW, needUpperW, usualNeedW, otherHeatersW } = once(scene, findHeaterNeed)
   const totalW = power.value * quantity + otherHeatersW
   const goalC = plan.goals.temperatureC
   const coldestC = plan.room.coldestC
   const probability = probabilityAtLeast(totalW, needUpperW, uncertaintyW(power, quantity))
   const base = { measured: totalW, limit: needUpperW, probability }
-  if (needUpperW === 0)
-    return { ...base, outcome: 'pass', say: () => 'No heater is needed at these temperatures.' }
+  if (needUpperW === 0) return { ...base, outcome: 'pass', say: () => 'No heater is needed at these temperatures.' }
   const holdsTo = (figure: 'totalW' | 'totalUpperW') => findColdestHeldC(scene, totalW, figure)
   if (totalW >= needUpperW && quantity > 1 && mayMultiply)
-    return { ...base, outcome: 'change', say: (words) => `${count(quantity)} of these: one alone gives ${words.power(power.value)} of the ${words.pair([needW, needUpperW], 'W')} that hold ${words.temperature(goalC)}.` }
+    return {
+      ...base,
+      outcome: 'change',
+      say: (words) =>
+        `${count(quantity)} of these: one alone gives ${words.power(power.value)} of the ${words.pair([needW, needUpperW], 'W')} that hold ${words.temperature(goalC)}.`,
+    }
   if (totalW >= needUpperW)
     return {
       ...base,
       outcome: 'pass',
-      say: (words) => `Holds ${words.temperature(goalC)} down to a ${words.temperature(holdsTo('totalUpperW'))} room.`,
+      say: (words) =>
+        `Holds ${words.temperature(goalC)} with the room down to ${words.temperature(holdsTo('totalUpperW'))}.`,
     }
   if (totalW >= needW)
     return {
       ...base,
       outcome: 'change',
       say: (words) =>
-        `${quantity > 1 && mayMultiply ? `${count(quantity)} of these just hold` : 'Just holds'} ${words.temperature(goalC)} in a ${words.temperature(coldestC)} room: no reserve on the coldest night (${words.power(totalW)} against ${words.pair([needW, needUpperW], 'W')}).`,
+        `${quantity > 1 && mayMultiply ? `${count(quantity)} of these just hold` : 'Just holds'} ${words.temperature(goalC)} with the room at ${words.temperature(coldestC)}: no reserve on the coldest night (${words.power(totalW)} against ${words.pair([needW, needUpperW], 'W')}).`,
     }
   const both = totalW + power.value * quantity
   if (mayMultiply && quantity === 1 && both >= needW)
-    return { ...base, outcome: 'change', enough: 2, say: (words) => `Two of these: one gives ${words.power(totalW)} of the ${words.pair([needW, needUpperW], 'W')} needed.` }
+    return {
+      ...base,
+      outcome: 'change',
+      enough: 2,
+      say: (words) =>
+        `Two of these: one gives ${words.power(totalW)} of the ${words.pair([needW, needUpperW], 'W')} needed.`,
+    }
   if (totalW >= usualNeedW)
     return {
       ...base,
       outcome: 'change',
-      say: (words) => `Holds ${words.temperature(goalC)} only while the room stays above ${words.temperature(holdsTo('totalW'))}.`,
+      say: (words) =>
+        `Holds ${words.temperature(goalC)} only while the room stays above ${words.temperature(holdsTo('totalW'))}.`,
     }
   return {
     ...base,
     outcome: 'fail',
-    say: (words) => `Too weak: ${words.power(totalW)}, and a ${words.temperature(coldestC)} room takes ${words.pair([needW, needUpperW], 'W')} to hold ${words.temperature(goalC)}.`,
+    say: (words) =>
+      `Too weak: ${words.power(totalW)}, and with the room at ${words.temperature(coldestC)} it takes ${words.pair([needW, needUpperW], 'W')} to hold ${words.temperature(goalC)}.`,
   }
 }
 
@@ -81,7 +96,8 @@ export const heaterPower: Rule = {
   limitIs: 'least',
   basis: {
     type: 'physics',
-    source: 'ISO 6946 surface resistances, EN 572-1 and ISO 10456 conductivities; evaporation by ASHRAE (HVAC Applications, activity 0.5) and Shah 2014, ASHRAE Transactions 120(2)',
+    source:
+      'ISO 6946 surface resistances, EN 572-1 and ISO 10456 conductivities; evaporation by ASHRAE (HVAC Applications, activity 0.5) and Shah 2014, ASHRAE Transactions 120(2)',
   },
   rule: 'All heaters together must replace the heat lost at the goal in the coldest room, less what other gear gives the water. At or above Shah’s figure: passes. Between ASHRAE’s and Shah’s: no reserve. Below: two of them, or only while the room stays warmer, where that helps.',
   reads: ['powerW'],
@@ -109,12 +125,14 @@ const warnStuckOn =
     const past = (limitC: number, hours: number | null) =>
       hours === null ? [] : [`past ${words.temperature(limitC)} after ${words.measure(hours, 'h')}`]
     const steps = [...past(30, hoursTo30C), ...past(34, hoursTo34C)]
-    return `Stuck on in a ${room} room: ${words.temperature(equilibriumC)}${steps.length > 0 ? `, ${steps.join(', ')}` : ''}. A second, independent cut-off is advised.`
+    const passing = steps.length > 0 ? `, ${steps.join(' and ')}` : ''
+    return `If it sticks on with the room at ${room}, the water goes to ${words.temperature(equilibriumC)}${passing}. A second, independent cut-off is advised.`
   }
 
 function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
+  if (!hasAreas(scene.plan)) return noAreas(scene.plan)
   const totalW = power.value * quantity + once(scene, findHeaterNeed).otherHeatersW
   const { passW, changeW } = once(scene, findStrengthLimits)
   const hasCutOff = otherControllers(scene).count > 0
@@ -123,7 +141,10 @@ function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement 
   const hotC = once(scene, findUnheatedC)
   const chill: Say[] =
     hotC > thresholds.chillerFromC.value
-      ? [(words) => `In a ${words.temperature(scene.plan.room.warmestC)} room the water settles near ${words.temperature(hotC)} without any heater: it needs a fan or a chiller.`]
+      ? [
+          (words) =>
+            `With the room at ${words.temperature(scene.plan.room.warmestC)} the water settles near ${words.temperature(hotC)} without any heater: it needs a fan or a chiller.`,
+        ]
       : []
   return {
     outcome,

@@ -22,7 +22,9 @@ export function scaleHeaters(scene: Scene, words: Printer): Scale[] {
   const basins = findBasins(plan, undefined)
   const deepest = basins.reduce((best, basin) => (basin.waterDepthMm > best.waterDepthMm ? basin : best))
   const clearance = 2 * thresholds.rodClearanceMm.value
-  const widest = basins.reduce((best, basin) => (Math.min(basin.lengthMm, basin.widthMm) > Math.min(best.lengthMm, best.widthMm) ? basin : best))
+  const widest = basins.reduce((best, basin) =>
+    Math.min(basin.lengthMm, basin.widthMm) > Math.min(best.lengthMm, best.widthMm) ? basin : best,
+  )
   const acrossMm = Math.min(widest.lengthMm, widest.widthMm) - clearance
   // No rod can be longer than the diagonal of its box, however thin; beyond the depth only a leaning or partly dry one fits.
   const diagonalMm = Math.hypot(deepest.lengthMm - clearance, deepest.widthMm - clearance, deepest.waterDepthMm)
@@ -52,7 +54,7 @@ export function scaleHeaters(scene: Scene, words: Printer): Scale[] {
       limits: needUpperW > 0 ? [own(needUpperW)] : [],
       limitText:
         needUpperW > 0
-          ? `need ${words.pair([needW, needUpperW], 'W')} in a ${words.temperature(plan.room.coldestC)} room`
+          ? `need ${words.pair([needW, needUpperW], 'W')} with the room at ${words.temperature(plan.room.coldestC)}`
           : 'no heater is needed at these temperatures',
       zones: toZones(0, [
         [own(needW / 2), 'fail'],

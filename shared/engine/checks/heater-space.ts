@@ -1,6 +1,6 @@
 import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
 import type { Scene } from '../scene'
-import { findBasins } from '../setup/places'
+import { findBasins, type Basin } from '../setup/places'
 import type { Placement } from '../types'
 import { readMeasure, readText } from '../values'
 import { chooseStand, describeStand, tryPositions } from './rod-space'
@@ -21,6 +21,12 @@ function judgeInline({ plan }: Scene): Judgement {
   }
 }
 
+/** The sizes of the basin that was chosen. */
+const listRests = ({ path }: Basin): readonly string[] =>
+  path === 'tank'
+    ? ['tank.waterLineMm', 'tank.outerHeightMm', 'tank.displayLengthMm', 'tank.displayWidthMm']
+    : ['waterDepthMm', 'heightMm', 'lengthMm', 'widthMm'].map((key) => `${path}.${key}`)
+
 function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgement {
   const { specs } = piece
   if (readText(specs, 'form') === 'inline') return judgeInline(scene)
@@ -28,20 +34,31 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
   const diameter = readMeasure(specs, 'diameterMm')
   const missing = [...(length ? [] : ['lengthMm']), ...(diameter ? [] : ['diameterMm'])]
   if (!length || !diameter)
-    return lacking(missing, () => `Nobody has recorded its ${missing.length > 1 ? 'length and thickness' : length ? 'thickness' : 'length'} yet.`)
+    return lacking(
+      missing,
+      () =>
+        `Nobody has recorded its ${missing.length > 1 ? 'length and thickness' : length ? 'thickness' : 'length'} yet.`,
+    )
   const basins = findBasins(scene.plan, place)
   const rod = { length, diameter, immersed: readMeasure(specs, 'minImmersionMm') ?? length, quantity }
   const orientation = readText(specs, 'orientation')
-  const tryAll = (by: string) => chooseStand(basins.map((basin) => tryPositions(rod, basin, scene.others, positionsBy[by] ?? [])))
+  const tryAll = (by: string) =>
+    chooseStand(basins.map((basin) => tryPositions(rod, basin, scene.others, positionsBy[by] ?? [])))
   const stand = tryAll(orientation ?? 'vertical')
   if (!stand) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
   if (!stand.fits && orientation === undefined && (tryAll('any')?.fits || tryAll('horizontal')?.fits))
-    return lacking(['orientation'], (words) => `${describeStand(stand)(words)} It would fit leaning or lying, if its maker allows that: nobody has recorded it yet.`)
+    return lacking(
+      ['orientation'],
+      (words) =>
+        `${describeStand(stand)(words)} It would fit leaning or lying, if its maker allows that: nobody has recorded it yet.`,
+    )
   const cautions = [
     ...(stand.basin.id === 'display' && stand.fits
       ? [() => 'No chamber for it: it stands in the display, where animals can touch it. A guard keeps them off.']
       : []),
-    ...(orientation === undefined && stand.fits ? [() => 'Its maker’s word on orientation is not recorded; standing was assumed.'] : []),
+    ...(orientation === undefined && stand.fits
+      ? [() => 'Its maker’s word on orientation is not recorded; standing was assumed.']
+      : []),
   ]
   return {
     outcome: stand.fits ? 'pass' : 'fail',
@@ -49,6 +66,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     limit: Number.isFinite(stand.limitMm) ? stand.limitMm : null,
     probability: stand.probability,
     ...(stand.fits && { placement: stand.placement }),
+    rests: listRests(stand.basin),
     say: describeStand(stand),
     cautions,
   }
@@ -61,7 +79,8 @@ export const heaterSpace: Rule = {
   unit: 'mm',
   basis: {
     type: 'physics',
-    source: 'Rectangle in rectangle: Carver 1957, American Mathematical Monthly 64; Wetzel 2000, Mathematics Magazine 73(3)',
+    source:
+      'Rectangle in rectangle: Carver 1957, American Mathematical Monthly 64; Wetzel 2000, Mathematics Magazine 73(3)',
   },
   rule: 'The rod must stand, lean or lie in its place, as its maker allows, with water around it seen from above. Standing: the length that must be under water within the water depth, the whole rod within the height. Leaning and lying: the whole rod under water.',
   reads: ['lengthMm', 'diameterMm', 'minImmersionMm', 'orientation', 'form'],

@@ -26,7 +26,12 @@ function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
     margin: measureMargin(ratedL, min, max),
     cautions: !far && (below || above) ? [() => 'Its maker’s rating stops just short of this tank’s volume.'] : [],
     say: (words) => {
-      const range = min !== undefined && max !== undefined ? words.pair([min, max], 'L') : max !== undefined ? `up to ${words.volume(max)}` : `from ${words.volume(min ?? 0)}`
+      const range =
+        min !== undefined && max !== undefined
+          ? words.pair([min, max], 'L')
+          : max !== undefined
+            ? `up to ${words.volume(max)}`
+            : `from ${words.volume(min ?? 0)}`
       if (far) return `Its maker rates it for a ${below ? 'larger' : 'smaller'} tank: ${range}.`
       return `Its maker rates it for ${range}.`
     },
@@ -54,16 +59,30 @@ const ratedVolume: Rule = {
 
 function judgeThermostat(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const thermostat = readText(piece.specs, 'thermostat')
-  if (thermostat === undefined) return lacking(['thermostat'], () => 'Nobody has recorded whether it has its own thermostat.')
+  if (thermostat === undefined)
+    return lacking(['thermostat'], () => 'Nobody has recorded whether it has its own thermostat.')
   if (thermostat !== 'external-needed')
-    return { outcome: 'pass', measured: thermostat, say: () => (thermostat === 'built-in' ? 'Has its own thermostat.' : 'Comes with its controller.') }
+    return {
+      outcome: 'pass',
+      measured: thermostat,
+      say: () => (thermostat === 'built-in' ? 'Has its own thermostat.' : 'Comes with its controller.'),
+    }
   const powerW = readNumber(piece.specs, 'powerW')
   const plugs = readNumber(piece.specs, 'plugs') ?? 1
   const controllers = otherControllers(scene)
   const loadLeftW = controllers.maxLoadW - controllers.loadedW
   const outletsLeft = controllers.outlets - controllers.pluggedIn
-  if (controllers.count > 0 && powerW !== undefined && loadLeftW >= powerW * quantity && outletsLeft >= plugs * quantity)
-    return { outcome: 'pass', measured: thermostat, say: () => 'The temperature controller in the setup can switch it.' }
+  if (
+    controllers.count > 0 &&
+    powerW !== undefined &&
+    loadLeftW >= powerW * quantity &&
+    outletsLeft >= plugs * quantity
+  )
+    return {
+      outcome: 'pass',
+      measured: thermostat,
+      say: () => 'The temperature controller in the setup can switch it.',
+    }
   const amount = powerW === undefined ? null : powerW * quantity
   return {
     outcome: 'change',
@@ -71,7 +90,8 @@ function judgeThermostat(scene: Scene, { piece, quantity }: Candidate): Judgemen
     asks: { need: 'temperature-control', amount, unit: 'W' },
     say: (words) => {
       const load = amount === null ? '' : ` for ${words.power(amount)}`
-      const more = controllers.count > 0 ? 'another temperature controller, or a larger one,' : 'a temperature controller'
+      const more =
+        controllers.count > 0 ? 'another temperature controller, or a larger one,' : 'a temperature controller'
       return `Has no thermostat: needs ${more}${load}.`
     },
   }
@@ -109,11 +129,13 @@ export const heaterRules: KindRules = {
   summary: {
     covers: ['heater.space', 'heater.power'],
     write: (scene, candidate, placement) => (words) => {
-    const powerW = (readNumber(candidate.piece.specs, 'powerW') ?? 0) * candidate.quantity + once(scene, findHeaterNeed).otherHeatersW
-    const held = findColdestHeldC(scene, powerW, 'totalUpperW')
-    const basin = scene.plan.tank.chambers.find(({ id }) => id === placement?.chamber)?.name ?? placement?.chamber
-    const stands = placement ? `${verbs[placement.position]} in the ${basin} and holds` : 'Holds'
-    return `${stands} ${words.temperature(scene.plan.goals.temperatureC)} down to a ${words.temperature(held)} room.`
+      const powerW =
+        (readNumber(candidate.piece.specs, 'powerW') ?? 0) * candidate.quantity +
+        once(scene, findHeaterNeed).otherHeatersW
+      const held = findColdestHeldC(scene, powerW, 'totalUpperW')
+      const basin = scene.plan.tank.chambers.find(({ id }) => id === placement?.chamber)?.name ?? placement?.chamber
+      const stands = placement ? `${verbs[placement.position]} in the ${basin} and holds` : 'Holds'
+      return `${stands} ${words.temperature(scene.plan.goals.temperatureC)} with the room down to ${words.temperature(held)}.`
     },
   },
   scales: scaleHeaters,

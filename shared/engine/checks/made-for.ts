@@ -4,7 +4,12 @@ import type { Scene } from '../scene'
 import { practiceBasis } from '../thresholds'
 import { readSet } from '../values'
 
-const labels: Readonly<Record<string, string>> = { reef: 'reef', 'marine-fish': 'marine fish', freshwater: 'freshwater', plants: 'planted' }
+const labels: Readonly<Record<string, string>> = {
+  reef: 'reef',
+  'marine-fish': 'marine fish',
+  freshwater: 'freshwater',
+  plants: 'planted',
+}
 
 /** Condemns only what its maker makes for something else; silence condemns nothing. */
 function judgeMadeFor(_scene: Scene, { piece }: Candidate): Judgement | null {
@@ -14,7 +19,10 @@ function judgeMadeFor(_scene: Scene, { piece }: Candidate): Judgement | null {
   return {
     outcome: isMarine ? 'pass' : 'fail',
     measured: uses,
-    say: () => (isMarine ? 'Made for salt water.' : `Made for ${uses.map((use) => labels[use] ?? use).join(' and ')} tanks, not for salt water.`),
+    say: () =>
+      isMarine
+        ? 'Made for salt water.'
+        : `Made for ${uses.map((use) => labels[use] ?? use).join(' and ')} tanks, not for salt water.`,
   }
 }
 

@@ -18,7 +18,13 @@ function judgeOutlets(scene: Scene, { piece, quantity }: Candidate): Judgement {
     measured: outlets * quantity,
     limit: Math.max(0, used - (capacity - outlets * quantity)),
     ...(short > 0 && { asks: { need: 'outlets', amount: short, unit: 'count' as const } }),
-    cautions: unknown.length > 0 ? [() => `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no number of plugs and could not be counted.`] : [],
+    cautions:
+      unknown.length > 0
+        ? [
+            () =>
+              `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no number of plugs and could not be counted.`,
+          ]
+        : [],
     say: () =>
       short > 0
         ? `${countOf(short, 'more outlet')} needed: a second strip on its own wall outlet.`
@@ -33,8 +39,18 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
   const { continuousW, ratedW } = findLoadLimits(volts, [ratedA, circuitA])
   const { watts, unknown } = otherLoad(scene)
   const cautions = [
-    ...(residualCurrentProtected ? [] : [() => 'Use an outlet with residual-current (ground-fault) protection and a drip loop in every cord; never chain strips. Local electrical codes and a licensed electrician decide.']),
-    ...(unknown.length > 0 ? [() => `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`] : []),
+    ...(residualCurrentProtected
+      ? []
+      : [
+          () =>
+            'Use an outlet with residual-current (ground-fault) protection and a drip loop in every cord; never chain strips. Local electrical codes and a licensed electrician decide.',
+        ]),
+    ...(unknown.length > 0
+      ? [
+          () =>
+            `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`,
+        ]
+      : []),
   ]
   return {
     outcome: watts <= continuousW ? 'pass' : watts <= ratedW ? 'change' : 'fail',
@@ -67,7 +83,8 @@ function judgeSwitched({ plan }: Scene, { piece, quantity }: Candidate): Judgeme
   const wanted = plan.goals.switchedOutlets
   if (wanted === 0) return null
   const switched = readNumber(piece.specs, 'switchedOutlets')
-  if (switched === undefined) return lacking(['switchedOutlets'], () => 'Nobody has recorded how many of its outlets switch.')
+  if (switched === undefined)
+    return lacking(['switchedOutlets'], () => 'Nobody has recorded how many of its outlets switch.')
   const has = switched * quantity
   return {
     outcome: has >= wanted ? 'pass' : 'change',

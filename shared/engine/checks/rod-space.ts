@@ -32,7 +32,8 @@ export interface Stand {
 type Bound = Pick<Stand, 'measuredMm' | 'limitMm' | 'tight'> & { readonly of: Value<number> }
 
 const clearance = thresholds.rodClearanceMm.value
-const ratio = ({ measuredMm, limitMm }: { measuredMm: number; limitMm: number }) => (limitMm - measuredMm) / Math.abs(limitMm || 1)
+const ratio = ({ measuredMm, limitMm }: { measuredMm: number; limitMm: number }) =>
+  (limitMm - measuredMm) / Math.abs(limitMm || 1)
 
 function footprintOf({ piece }: Item): Rectangle | undefined {
   const diameter = readNumber(piece.specs, 'diameterMm')
@@ -57,7 +58,9 @@ function hasCompany(basin: Basin, others: readonly Item[], footprint: Rectangle,
 function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
   const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))
   const probability = bounds.map((bound) => {
-    const limitU = Number.isFinite(bound.limitMm) ? standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length') : 0
+    const limitU = Number.isFinite(bound.limitMm)
+      ? standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length')
+      : 0
     const pieceU = standardUncertainty(bound.of.value, bound.of.source, bound.of.plusMinus, 'length')
     return probabilityAtMost(bound.measuredMm, bound.limitMm, combineUncertainties(limitU, pieceU))
   })
@@ -75,14 +78,31 @@ function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], is
 }
 
 /** Every allowed position in a basin, each with its tightest limit. See "Rod in a chamber" on the method page. */
-export function tryPositions(rod: Rod, basin: Basin, others: readonly Item[], positions: readonly Placement['position'][]): Stand[] {
+export function tryPositions(
+  rod: Rod,
+  basin: Basin,
+  others: readonly Item[],
+  positions: readonly Placement['position'][],
+): Stand[] {
   const { length, diameter, immersed, quantity } = rod
   const d = diameter.value
   const opening: Bound[] =
     basin.openingLengthMm !== undefined && basin.openingWidthMm !== undefined
-      ? [{ measuredMm: d, limitMm: Math.min(basin.openingLengthMm, basin.openingWidthMm), tight: 'opening', of: diameter }]
+      ? [
+          {
+            measuredMm: d,
+            limitMm: Math.min(basin.openingLengthMm, basin.openingWidthMm),
+            tight: 'opening',
+            of: diameter,
+          },
+        ]
       : []
-  const plan: Bound = { measuredMm: d + 2 * clearance, limitMm: Math.min(basin.lengthMm, basin.widthMm), tight: 'plan', of: diameter }
+  const plan: Bound = {
+    measuredMm: d + 2 * clearance,
+    limitMm: Math.min(basin.lengthMm, basin.widthMm),
+    tight: 'plan',
+    of: diameter,
+  }
   const clear: Rectangle = [basin.lengthMm - 2 * clearance, basin.widthMm - 2 * clearance]
   const bySlack = (slackMm: number | null): Bound =>
     slackMm === null ? plan : { measuredMm: length.value, limitMm: length.value + slackMm, tight: 'run', of: length }
@@ -93,17 +113,31 @@ export function tryPositions(rod: Rod, basin: Basin, others: readonly Item[], po
         { measuredMm: immersed.value, limitMm: basin.waterDepthMm, tight: 'water', of: immersed },
         { measuredMm: length.value, limitMm: basin.heightMm, tight: 'height', of: length },
       ]
-      return settle(basin, { chamber: basin.id, position, angleDeg: 90 }, [...opening, ...bounds], hasCompany(basin, others, [d, d], quantity))
+      return settle(
+        basin,
+        { chamber: basin.id, position, angleDeg: 90 },
+        [...opening, ...bounds],
+        hasCompany(basin, others, [d, d], quantity),
+      )
     }
     const fit =
       position === 'leaning'
-        ? leanRod({ lengthMm: length.value, diameterMm: d }, { lengthMm: clear[0], widthMm: clear[1], heightMm: basin.waterDepthMm })
+        ? leanRod(
+            { lengthMm: length.value, diameterMm: d },
+            { lengthMm: clear[0], widthMm: clear[1], heightMm: basin.waterDepthMm },
+          )
         : layRodFlat({ lengthMm: length.value, diameterMm: d }, clear)
     const angleDeg = fit.angleDeg ?? 0
     const runMm = Math.min(length.value * Math.cos((angleDeg * Math.PI) / 180) + d, Math.max(...clear))
     const isRoomy = hasCompany(basin, others, [runMm, d], quantity)
-    const water: Bound[] = position === 'flat' ? [{ measuredMm: d, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }] : []
-    return settle(basin, { chamber: basin.id, position, angleDeg }, [...opening, bySlack(fit.slackMm), ...water], isRoomy)
+    const water: Bound[] =
+      position === 'flat' ? [{ measuredMm: d, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }] : []
+    return settle(
+      basin,
+      { chamber: basin.id, position, angleDeg },
+      [...opening, bySlack(fit.slackMm), ...water],
+      isRoomy,
+    )
   })
 }
 
@@ -126,11 +160,13 @@ export const describeStand =
     const where = `the ${basin.name}`
     if (stand.fits) {
       const how = placement.position === 'leaning' ? ` at ${Math.round(placement.angleDeg)}°` : ''
-      const beside = tight === 'plan' ? 'to spare beside it' : tight === 'opening' ? 'to spare in the opening' : 'to spare'
+      const beside =
+        tight === 'plan' ? 'to spare beside it' : tight === 'opening' ? 'to spare in the opening' : 'to spare'
       return `${verbs[placement.position]} in ${where}${how} with ${off} ${beside}.`
     }
     if (tight === 'company') return `There is no room left in ${where} beside what is already there.`
-    if (tight === 'plan') return `${off} too thick for ${where}: it needs ${words.length(measuredMm)} across with water around it, and there are ${words.length(limitMm)}.`
+    if (tight === 'plan')
+      return `${off} too thick for ${where}: it needs ${words.length(measuredMm)} across with water around it, and there are ${words.length(limitMm)}.`
     if (tight === 'opening') return `${off} too thick for the opening of ${where}.`
     if (tight === 'height') return `${off} too long to stand in ${where}, which is ${words.length(limitMm)} high.`
     if (tight === 'water') return `${off} too long for the ${words.length(limitMm)} of water in ${where}.`

@@ -30,7 +30,11 @@ function findSupport({ plan, others }: Scene): Support | readonly string[] | nul
   const { support } = plan.setup
   if (support?.lengthMm === undefined || support.widthMm === undefined) return null
   const given = (value: number): Value<number> => ({ value, source: 'measured' })
-  return { lengthMm: given(support.lengthMm), widthMm: given(support.widthMm), name: support.kind === 'stand' ? 'stand' : 'furniture' }
+  return {
+    lengthMm: given(support.lengthMm),
+    widthMm: given(support.widthMm),
+    name: support.kind === 'stand' ? 'stand' : 'furniture',
+  }
 }
 
 /** The orientation of the tank on its support with the most to spare at its tighter side, mm. */
@@ -52,7 +56,8 @@ function findSpare(tank: readonly [Value<number>, Value<number>], support: reado
 export function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement | null {
   const support = findSupport(scene)
   if (support === null) return null
-  if (!('name' in support)) return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded the size of the stand’s top.' }
+  if (!('name' in support))
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded the size of the stand’s top.' }
   const length = readMeasure(piece.specs, 'outerLengthMm')
   const width = readMeasure(piece.specs, 'outerWidthMm')
   const missing = [...(length ? [] : ['outerLengthMm']), ...(width ? [] : ['outerWidthMm'])]
@@ -64,7 +69,12 @@ export function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement | 
     standardUncertainty(limit.value, limit.source, limit.plusMinus, 'length'),
   )
   const cautions: Say[] =
-    fits && widestMm > overhangNoticedMm ? [(words) => `The ${support.name} is ${words.length(widestMm)} larger than the tank: see that the weight stands over its legs or sides.`] : []
+    fits && widestMm > overhangNoticedMm
+      ? [
+          (words) =>
+            `The ${support.name} is ${words.length(widestMm)} larger than the tank: see that the weight stands over its legs or sides.`,
+        ]
+      : []
   return {
     outcome: fits ? 'pass' : 'fail',
     measured: side.value,
@@ -80,7 +90,8 @@ export function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement | 
 
 const densityOfFilledTankKgL = 1.4
 
-const names = (specs: Specs, key: string): readonly string[] => (Array.isArray(specs[key]?.value) ? (specs[key].value as string[]) : [])
+const names = (specs: Specs, key: string): readonly string[] =>
+  Array.isArray(specs[key]?.value) ? (specs[key].value as string[]) : []
 
 /** Whether the stand is rated for the filled weight of `filled`, which is the setup with this tank in it. */
 export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Judgement | null {
@@ -89,7 +100,15 @@ export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Jud
   const heavy: Say = (words) =>
     `Filled it weighs about ${words.mass(weight.totalKg)}: a structural engineer and local building rules decide for anything large or upstairs.`
   if (!stand)
-    return scene.plan.setup.support ? { outcome: 'pass', measured: weight.totalKg, limit: null, cautions: [heavy], say: (words) => `Filled it weighs about ${words.mass(weight.totalKg)}; what carries it must hold that.` } : null
+    return scene.plan.setup.support
+      ? {
+          outcome: 'pass',
+          measured: weight.totalKg,
+          limit: null,
+          cautions: [heavy],
+          say: (words) => `Filled it weighs about ${words.mass(weight.totalKg)}; what carries it must hold that.`,
+        }
+      : null
   const { specs } = stand.piece
   const rating = readMeasure(specs, 'loadRatingKg')
   if (rating) {
@@ -98,7 +117,11 @@ export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Jud
       outcome: isHeld ? 'pass' : 'fail',
       measured: weight.totalKg,
       limit: rating.value,
-      probability: probabilityAtLeast(rating.value, weight.totalKg, standardUncertainty(rating.value, rating.source, rating.plusMinus, 'other')),
+      probability: probabilityAtLeast(
+        rating.value,
+        weight.totalKg,
+        standardUncertainty(rating.value, rating.source, rating.plusMinus, 'other'),
+      ),
       cautions: [heavy],
       say: (words) =>
         isHeld
@@ -114,7 +137,13 @@ export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Jud
       measured: weight.totalKg,
       limit: null,
       cautions: [heavy, () => 'The stand states no load rating; what it is made for was taken instead.'],
-      say: (words) => `Filled it weighs ${words.mass(weight.totalKg)}, and the stand is made for ${isNamed ? 'this tank' : `tanks of ${words.volume(madeForL ?? 0)}`}.`,
+      say: (words) =>
+        `Filled it weighs ${words.mass(weight.totalKg)}, and the stand is made for ${isNamed ? 'this tank' : `tanks of ${words.volume(madeForL ?? 0)}`}.`,
     }
-  return { outcome: 'nodata', missing: [], measured: weight.totalKg, say: (words) => `The stand states no load rating: ask its maker whether it holds ${words.mass(weight.totalKg)}.` }
+  return {
+    outcome: 'nodata',
+    missing: [],
+    measured: weight.totalKg,
+    say: (words) => `The stand states no load rating: ask its maker whether it holds ${words.mass(weight.totalKg)}.`,
+  }
 }

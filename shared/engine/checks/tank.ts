@@ -11,35 +11,56 @@ import { judgeFootprint, judgeLoad } from './tank-support'
 
 const sizeKeys = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm']
 
-const listMissingSize = ({ specs }: Piece): readonly string[] => sizeKeys.filter((key) => readNumber(specs, key) === undefined)
+const listMissingSize = ({ specs }: Piece): readonly string[] =>
+  sizeKeys.filter((key) => readNumber(specs, key) === undefined)
 
 /** The setup with this tank in it, or undefined where the tank's size is not known. */
 function planWith(scene: Scene, piece: Piece): Plan | undefined {
   if (listMissingSize(piece).length > 0) return undefined
-  return resolve(withItems(scene.plan.setup, scene.others, { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }))
+  return resolve(
+    withItems(scene.plan.setup, scene.others, { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }),
+  )
 }
 
-const labels: Readonly<Record<string, string>> = { 'rear-chambers': 'rear chambers', sump: 'a sump', 'hang-on': 'a hang-on filter', none: 'none' }
+const labels: Readonly<Record<string, string>> = {
+  'rear-chambers': 'rear chambers',
+  sump: 'a sump',
+  'hang-on': 'a hang-on filter',
+  none: 'none',
+}
 
 function judgeFiltration({ plan }: Scene, { piece }: Candidate): Judgement {
   const offered = readText(piece.specs, 'filtration')
   if (offered === undefined) return lacking(['filtration'], () => 'Nobody has recorded how it is filtered.')
   const wanted = plan.tank.filtration
-  if (offered === wanted) return { outcome: 'pass', measured: offered, say: () => (offered === 'none' ? 'No filtration, as now.' : `Has ${labels[offered]}, as now.`) }
-  if (wanted === 'none') return { outcome: 'pass', measured: offered, say: () => `Has ${labels[offered]}, where there was nothing.` }
-  if (offered === 'none') return { outcome: 'fail', measured: offered, say: () => `Has no place for filtration; the setup uses ${labels[wanted]}.` }
+  if (offered === wanted)
+    return {
+      outcome: 'pass',
+      measured: offered,
+      say: () => (offered === 'none' ? 'No filtration, as now.' : `Has ${labels[offered]}, as now.`),
+    }
+  if (wanted === 'none')
+    return { outcome: 'pass', measured: offered, say: () => `Has ${labels[offered]}, where there was nothing.` }
+  if (offered === 'none')
+    return {
+      outcome: 'fail',
+      measured: offered,
+      say: () => `Has no place for filtration; the setup uses ${labels[wanted]}.`,
+    }
   return {
     outcome: 'change',
     measured: offered,
     asks: { need: `filtration-${offered}`, amount: null, unit: null },
-    say: () => `Made for ${labels[offered]}: buy what that takes; what stands in ${wanted === 'rear-chambers' ? 'the rear chambers' : wanted === 'sump' ? 'the sump' : 'the hang-on filter'} loses its place.`,
+    say: () =>
+      `Made for ${labels[offered]}: buy what that takes; what stands in ${wanted === 'rear-chambers' ? 'the rear chambers' : wanted === 'sump' ? 'the sump' : 'the hang-on filter'} loses its place.`,
   }
 }
 
 function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
   const nominal = readMeasure(piece.specs, 'nominalVolumeL')
   const offered = nominal?.value ?? planWith(scene, piece)?.tank.grossL
-  if (offered === undefined) return lacking(['nominalVolumeL'], () => 'Nobody has recorded its volume or its outside size yet.')
+  if (offered === undefined)
+    return lacking(['nominalVolumeL'], () => 'Nobody has recorded its volume or its outside size yet.')
   const now = scene.plan.tank.ratedL
   const pass = thresholds.tankVolumePass.value
   const change = thresholds.tankVolumeChange.value
@@ -52,7 +73,11 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
     limit: [now * (1 - pass), now * (1 + pass)],
     probability: probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
     say: (words) =>
-      off <= pass ? `${wording(words)}: about the same.` : off <= change ? `${wording(words)}: salt, rock, heat and light have to follow.` : `${wording(words)}: that is another setup.`,
+      off <= pass
+        ? `${wording(words)}: about the same.`
+        : off <= change
+          ? `${wording(words)}: salt, rock, heat and light have to follow.`
+          : `${wording(words)}: that is another setup.`,
   }
 }
 
@@ -60,16 +85,22 @@ function judgeReturnPump({ plan, others }: Scene, { piece }: Candidate): Judgeme
   if (readGroup(piece.specs, 'includedPump')) return { outcome: 'pass', say: () => 'Comes with a return pump.' }
   const filtration = readText(piece.specs, 'filtration')
   if (filtration === 'none' || filtration === 'hang-on') return { outcome: 'pass', say: () => 'Needs no return pump.' }
-  if (others.some((item) => item.piece.kind === 'return-pump')) return { outcome: 'pass', say: () => 'The setup has a return pump.' }
+  if (others.some((item) => item.piece.kind === 'return-pump'))
+    return { outcome: 'pass', say: () => 'The setup has a return pump.' }
   const bore = readNumber(piece.specs, 'returnBoreMm') ?? plan.tank.returnBoreMm
   return {
     outcome: 'change',
     asks: { need: 'return-pump', amount: null, unit: null },
-    say: (words) => `Comes without a return pump: needs one${bore === undefined ? '' : ` for a ${words.length(bore)} bore`}.`,
+    say: (words) =>
+      `Comes without a return pump: needs one${bore === undefined ? '' : ` for a ${words.length(bore)} bore`}.`,
   }
 }
 
-const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>, basis = practiceBasis): Rule => ({ id: `tank.${check}`, basis, ...parts })
+const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>, basis = practiceBasis): Rule => ({
+  id: `tank.${check}`,
+  basis,
+  ...parts,
+})
 
 export const tankRules: KindRules = {
   rules: [
@@ -126,10 +157,16 @@ export const tankRules: KindRules = {
         failLabel: 'too heavy for the stand',
         judge: (scene, candidate) => {
           const filled = planWith(scene, candidate.piece)
-          return filled ? judgeLoad(scene, candidate, filled) : lacking(listMissingSize(candidate.piece), () => 'Nobody has recorded its outside size yet.')
+          return filled
+            ? judgeLoad(scene, candidate, filled)
+            : lacking(listMissingSize(candidate.piece), () => 'Nobody has recorded its outside size yet.')
         },
       },
-      { type: 'physics', source: 'Shell by density (EN 572-1 glass, ISO 10456 acrylic), sea water by EOS-80 (UNESCO Technical Papers in Marine Science 44)' },
+      {
+        type: 'physics',
+        source:
+          'Shell by density (EN 572-1 glass, ISO 10456 acrylic), sea water by EOS-80 (UNESCO Technical Papers in Marine Science 44)',
+      },
     ),
   ],
   targetReads: ['nominalVolumeL', ...sizeKeys],

@@ -17,7 +17,11 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
     outcome: capacityW >= fedW ? 'pass' : 'fail',
     measured: capacityW,
     limit: fedW,
-    probability: probabilityAtLeast(capacityW, fedW, quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other')),
+    probability: probabilityAtLeast(
+      capacityW,
+      fedW,
+      quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
+    ),
     say: (words) =>
       fedW === 0
         ? `Switches up to ${words.power(capacityW)}; there is no heater in the setup to hold against it.`
@@ -30,7 +34,10 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
 function judgeOutlets(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const outlets = readNumber(piece.specs, 'outlets')
   if (outlets === undefined) return lacking(['outlets'], () => 'Nobody has recorded how many outlets it has.')
-  const plugs = heatersOf(scene).reduce((sum, item) => sum + item.quantity * (readNumber(item.piece.specs, 'plugs') ?? 1), 0)
+  const plugs = heatersOf(scene).reduce(
+    (sum, item) => sum + item.quantity * (readNumber(item.piece.specs, 'plugs') ?? 1),
+    0,
+  )
   return {
     outcome: outlets * quantity >= plugs ? 'pass' : 'fail',
     measured: outlets * quantity,
@@ -45,8 +52,14 @@ function judgeRange({ plan }: Scene, { piece }: Candidate): Judgement {
   const missing = [...(min === undefined ? ['rangeMinC'] : []), ...(max === undefined ? ['rangeMaxC'] : [])]
   const goalC = plan.goals.temperatureC
   if ((min !== undefined && goalC < min) || (max !== undefined && goalC > max))
-    return { outcome: 'fail', measured: goalC, limit: min !== undefined && max !== undefined ? [min, max] : (min ?? max ?? null), say: (words) => `Cannot be set to ${words.temperature(goalC)}.` }
-  if (min === undefined || max === undefined) return lacking(missing, () => 'Nobody has recorded the range it can be set to.')
+    return {
+      outcome: 'fail',
+      measured: goalC,
+      limit: min !== undefined && max !== undefined ? [min, max] : (min ?? max ?? null),
+      say: (words) => `Cannot be set to ${words.temperature(goalC)}.`,
+    }
+  if (min === undefined || max === undefined)
+    return lacking(missing, () => 'Nobody has recorded the range it can be set to.')
   return {
     outcome: 'pass',
     measured: goalC,

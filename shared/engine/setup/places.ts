@@ -29,14 +29,16 @@ export function describeDisplay({ tank }: Plan): Chamber {
 
 function describeSump({ tank }: Plan): Chamber | undefined {
   const box = tank.boxes[1]
-  return box && {
-    id: 'sump',
-    name: 'sump',
-    lengthMm: box.insideLengthMm,
-    widthMm: box.insideWidthMm,
-    waterDepthMm: box.waterDepthMm,
-    heightMm: Number.POSITIVE_INFINITY,
-  }
+  return (
+    box && {
+      id: 'sump',
+      name: 'sump',
+      lengthMm: box.insideLengthMm,
+      widthMm: box.insideWidthMm,
+      waterDepthMm: box.waterDepthMm,
+      heightMm: Number.POSITIVE_INFINITY,
+    }
+  )
 }
 
 /**

@@ -22,7 +22,11 @@ export const sandMassKg = (area: { displayLengthMm: number; displayWidthMm: numb
   ((area.displayLengthMm * area.displayWidthMm * depthMm) / 1e6) * defaults.sandBulkDensityKgL
 
 /** Litres of water that rock and sand take the place of; 0 unless the person gave both. */
-function displacedL(setup: Setup, items: readonly Item[], area: { displayLengthMm: number; displayWidthMm: number }): number {
+function displacedL(
+  setup: Setup,
+  items: readonly Item[],
+  area: { displayLengthMm: number; displayWidthMm: number },
+): number {
   const rockKg = setup.goals?.rockKg ?? packMassKg(items, 'rock')
   const depthMm = setup.goals?.sandDepthMm
   const sandKg = depthMm === undefined ? packMassKg(items, 'sand') : sandMassKg(area, depthMm)
@@ -30,7 +34,13 @@ function displacedL(setup: Setup, items: readonly Item[], area: { displayLengthM
   return rockKg / defaults.rockSolidDensityKgL + sandKg / defaults.sandSolidDensityKgL
 }
 
-function resolveWater(given: Partial<Water> = {}, tank: TankPlan, room: Room, goals: Goals, assume: <T extends Assumed>(key: string, value: T) => T): Water {
+function resolveWater(
+  given: Partial<Water> = {},
+  tank: TankPlan,
+  room: Room,
+  goals: Goals,
+  assume: <T extends Assumed>(key: string, value: T) => T,
+): Water {
   const weekly = () => {
     const loss = tankHeatLoss({
       boxes: tank.boxes,
@@ -65,9 +75,17 @@ export function resolve(setup: Setup, overrides?: ReadonlyMap<string, Assumed>):
   const tank = resolveTank(setup.tank, (area) => displacedL(setup, items, area), assume)
   const given = setup.room ?? {}
   const room: Room = {
-    temperatureC: given.temperatureC ?? assume('room.temperatureC', Math.max(defaults.room.temperatureC, given.coldestC ?? -Infinity)),
-    coldestC: given.coldestC ?? assume('room.coldestC', Math.min(defaults.room.coldestC, given.temperatureC ?? Infinity)),
-    warmestC: given.warmestC ?? assume('room.warmestC', Math.max(defaults.room.warmestC, given.temperatureC ?? -Infinity, given.coldestC ?? -Infinity)),
+    temperatureC:
+      given.temperatureC ??
+      assume('room.temperatureC', Math.max(defaults.room.temperatureC, given.coldestC ?? -Infinity)),
+    coldestC:
+      given.coldestC ?? assume('room.coldestC', Math.min(defaults.room.coldestC, given.temperatureC ?? Infinity)),
+    warmestC:
+      given.warmestC ??
+      assume(
+        'room.warmestC',
+        Math.max(defaults.room.warmestC, given.temperatureC ?? -Infinity, given.coldestC ?? -Infinity),
+      ),
     relativeHumidity: given.relativeHumidity ?? assume('room.relativeHumidity', defaults.room.relativeHumidity),
     ceilingMm: given.ceilingMm ?? assume('room.ceilingMm', defaults.room.ceilingMm),
     tankTopMm: given.tankTopMm ?? assume('room.tankTopMm', defaults.supportHeightMm + tank.outerHeightMm),
@@ -86,8 +104,10 @@ export function resolve(setup: Setup, overrides?: ReadonlyMap<string, Assumed>):
     salinityPpt: wanted.salinityPpt ?? assume('goals.salinityPpt', defaults.goals.salinityPpt),
     coral: wanted.coral ?? assume('goals.coral', defaults.goals.coral),
     sandDepthMm: wanted.sandDepthMm ?? assume('goals.sandDepthMm', defaults.goals.sandDepthMm),
-    rockKg: wanted.rockKg ?? packMassKg(items, 'rock') ?? assume('goals.rockKg', defaults.goals.rockKgPerL * tank.grossL),
-    turnoverPerHour: wanted.turnoverPerHour ?? assume('goals.turnoverPerHour', defaults.turnoverPerHour[tank.filtration]),
+    rockKg:
+      wanted.rockKg ?? packMassKg(items, 'rock') ?? assume('goals.rockKg', defaults.goals.rockKgPerL * tank.grossL),
+    turnoverPerHour:
+      wanted.turnoverPerHour ?? assume('goals.turnoverPerHour', defaults.turnoverPerHour[tank.filtration]),
     appControl: wanted.appControl ?? assume('goals.appControl', false),
     switchedOutlets: wanted.switchedOutlets ?? assume('goals.switchedOutlets', 0),
   }

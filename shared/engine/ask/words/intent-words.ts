@@ -1,7 +1,7 @@
 import type { Intent } from '../types'
 
 export const missingPhrases: readonly string[] = (
-  'what am i missing, am i missing, anything missing, is anything missing, what is missing, whats missing, what\'s missing, what else do i need, ' +
+  "what am i missing, am i missing, anything missing, is anything missing, what is missing, whats missing, what's missing, what else do i need, " +
   'what else do i still need, anything else i need, what do i still need, do i still need, did i forget, have i forgotten, am i forgetting, forgetting anything, ' +
   'have i got everything, do i have everything, is this everything, is that everything, what do i need, what else should i buy, what else, missing from my, ' +
   'missing from this, missing anything, missing something, forgot anything, what have i missed, did i miss, what should i add, complete my setup, what gear do i need, what equipment do i need, anything i forgot, fill the gaps, everything i need'
@@ -10,9 +10,9 @@ export const missingPhrases: readonly string[] = (
 /** What says that a piece is gone, or that another is to take its place. */
 export const gonePhrases: readonly string[] = (
   'died, dead, broke, broken, discontinued, out of stock, sold out, unavailable, not available, no longer available, no longer made, no longer sold, no longer in stock, failed, ' +
-  'stopped working, quit working, quit, quit on me, gave up, gave out, not working, doesn\'t work anymore, cracked, leaks, leaking, leaked, burned out, burnt out, burned up, packed up, packed in, blew up, exploded, ' +
-  'shattered, stuck on, went out, kicked the bucket, gone, is gone, backordered, back ordered, on backorder, bit the dust, isn\'t made anymore, isn\'t available, can\'t get, cannot get, ' +
-  'can\'t find, cannot find, cant find, crapped out, kaput, conked out, rusted, fried, smashed, tripping the breaker, on back order, isn\'t sold anymore, no longer sell, no longer make, snapped, has died, just died, melted'
+  "stopped working, quit working, quit, quit on me, gave up, gave out, not working, doesn't work anymore, cracked, leaks, leaking, leaked, burned out, burnt out, burned up, packed up, packed in, blew up, exploded, " +
+  "shattered, stuck on, went out, kicked the bucket, gone, is gone, backordered, back ordered, on backorder, bit the dust, isn't made anymore, isn't available, can't get, cannot get, " +
+  "can't find, cannot find, cant find, crapped out, kaput, conked out, rusted, fried, smashed, tripping the breaker, on back order, isn't sold anymore, no longer sell, no longer make, snapped, has died, just died, melted"
 ).split(', ')
 
 export const replacePhrases: readonly string[] = (
@@ -21,16 +21,19 @@ export const replacePhrases: readonly string[] = (
 ).split(', ')
 
 /** "Will it fit?" */
-export const checkPhrases: readonly string[] = (
-  'will, does, is, can i use, would, can, could, could i use, is this, is it, is a, will a, will my, does my, is my, do, are, ok to use, okay to use'
-).split(', ')
+export const checkPhrases: readonly string[] =
+  'will, does, is, can i use, would, can, could, could i use, is this, is it, is a, will a, will my, does my, is my, do, are, ok to use, okay to use'.split(
+    ', ',
+  )
 
-export const fitPhrases: readonly string[] = (
-  'fit, fits, work, works, ok, okay, suitable, big enough, strong enough, enough, too big, too small, too strong, too much, compatible, right size, do the job, work with, go in, go into, safe, powerful enough, overkill, long enough, too long, too weak, powerful, cover, hold'
-).split(', ')
+export const fitPhrases: readonly string[] =
+  'fit, fits, work, works, ok, okay, suitable, big enough, strong enough, enough, too big, too small, too strong, too much, compatible, right size, do the job, work with, go in, go into, safe, powerful enough, overkill, long enough, too long, too weak, powerful, cover, hold'.split(
+    ', ',
+  )
 
 /** A question about which piece, not about one. */
-export const whichPhrases: readonly string[] = 'which, what, any, recommend, suggest, looking for, find, whats, what\'s, best'.split(', ')
+export const whichPhrases: readonly string[] =
+  "which, what, any, recommend, suggest, looking for, find, whats, what's, best".split(', ')
 
 export const toIntentPhrases = (phrases: readonly string[], intent: Intent): readonly (readonly [string, Intent])[] =>
   phrases.map((phrase) => [phrase, intent] as const)

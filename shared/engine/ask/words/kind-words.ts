@@ -21,7 +21,8 @@ const names: Readonly<Record<KindKey, string>> = {
     'temperature controller, temp controller, heater controller, thermostat controller, external thermostat, thermostat, ' +
     'temperture controller, temprature controller, controller for my heater, temperature regulator, temp control, heating controller, ' +
     'controller for a heater, controller for the heater',
-  'return-pump': 'return pump, retun pump, return, main pump, sump pump, return pmp, dc pump, ac pump, circulation pump, water pump, pump',
+  'return-pump':
+    'return pump, retun pump, return, main pump, sump pump, return pmp, dc pump, ac pump, circulation pump, water pump, pump',
   wavemaker:
     'wavemaker, wave maker, powerhead, power head, gyre, circulation powerhead, wave pump, flow pump, wavemakers, wave makr, ' +
     'wavemker, stream pump, propeller pump, nano powerhead',
@@ -42,12 +43,14 @@ const names: Readonly<Record<KindKey, string>> = {
     'test kit, testkit, ammonia test, nitrate test, nitrite test, water test, testing kit, alkalinity test, calcium test, ' +
     'magnesium test, phosphate test, ph test, ammonia test kit, nitrate test kit, nitrite test kit, alkalinity test kit, ' +
     'calcium test kit, magnesium test kit, phosphate test kit, ph test kit, test set, water tests, saltwater test kit, reef test kit',
-  'salt-mix': 'salt mix, salt, reef salt, marine salt, sea salt, salt bucket, bucket of salt, salts, saltmix, bag of salt, box of salt',
+  'salt-mix':
+    'salt mix, salt, reef salt, marine salt, sea salt, salt bucket, bucket of salt, salts, saltmix, bag of salt, box of salt',
   scraper:
     'scraper, algae scraper, magnet cleaner, glass cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, ' +
     'magnet scraper, glass scraper, magnetic glass cleaner, algae cleaner, window cleaner, algae blade, scrapper, algae scrapper, scraper blade, ' +
     'cleaner magnet, magnet float, mag float, float magnet, floating magnet, magnetic algae cleaner, algae pad, blade scraper, magnet glass cleaner, algae scrubber pad, glass magnet',
-  siphon: 'siphon, syphon, gravel vac, gravel vacuum, gravel cleaner, sand vacuum, sand vac, water changer, siphon tube, siphon hose, sifon, gravel siphon',
+  siphon:
+    'siphon, syphon, gravel vac, gravel vacuum, gravel cleaner, sand vacuum, sand vac, water changer, siphon tube, siphon hose, sifon, gravel siphon',
   net: 'net, fish net, dip net, catch net, fishnet, mesh net, transfer net',
   'power-strip':
     'power strip, power bar, surge protector, outlet strip, power board, extension lead, multi plug, power strips, strip plug, powerstrip, ' +
@@ -60,5 +63,7 @@ export const kindPhrases: readonly (readonly [string, KindKey])[] = Object.entri
 
 /** Right words one letter away from a kind's name. */
 export const neverMisspelt: ReadonlySet<string> = new Set(
-  'heated header heather theater theatre beater hearer shimmer skimmed swimmer slimmer scraped scraping chamfer charmer leader reader'.split(' '),
+  'heated header heather theater theatre beater hearer shimmer skimmed swimmer slimmer scraped scraping chamfer charmer leader reader'.split(
+    ' ',
+  ),
 )

@@ -8,7 +8,8 @@ const names: Readonly<Record<Season, string>> = {
   warmest:
     'warmest, hottest, hot, up to, rise to, rises to, high of, highs, high, highest, summer, summers, in summer, heat wave, heatwave, heat waves, max, maximum, ' +
     'as high as, warm, warms to, peaks at, peak, climbs to, hits, reaches, reach, hit, goes up to, gets up to, daytime, afternoon, hottest day, never above, never over, never exceeds, tops out, tops out at, hotest, no higher than',
-  usual: 'normally, normal, usually, usual, stays, always, average, typical, typically, most days, mostly, year round, all year, constant, steady, ordinarily, generally, stable, averages, day to day, kept',
+  usual:
+    'normally, normal, usually, usual, stays, always, average, typical, typically, most days, mostly, year round, all year, constant, steady, ordinarily, generally, stable, averages, day to day, kept',
 }
 
 export const seasonPhrases: readonly (readonly [string, Season])[] = Object.entries(names).flatMap(([season, list]) =>

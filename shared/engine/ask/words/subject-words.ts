@@ -38,7 +38,8 @@ const names: Readonly<Record<Subject, string>> = {
     'run it at, run at, running at, target, target temp, set to, set at, set point, setpoint, goal, heat it to, heat to, heated to, keep the water at, keep my tank at, ' +
     'keep my water at, run the tank at, run my tank at, want it at, like it at, reef at, tank at, display at, stay at, temp of the tank, to keep, keeping it at, aim for, aiming for, hold at, holding',
   sump: 'sump, refugium',
-  support: 'dresser, desk, table, counter, countertop, shelf, furniture, sideboard, counter top, cupboard, kitchen counter',
+  support:
+    'dresser, desk, table, counter, countertop, shelf, furniture, sideboard, counter top, cupboard, kitchen counter',
   wall: 'glass thickness, wall thickness, thick glass, thick acrylic, glass wall, pane, panes, glass panes, walls, acrylic walls, glass walls, tank wall, wall',
   sand: 'sand, sand bed, sandbed, substrate, live sand, bed, aragonite, sand depth, bed depth',
   rock: 'rock, live rock, dry rock, rockwork',
@@ -55,6 +56,6 @@ const names: Readonly<Record<Subject, string>> = {
   'mount-height': 'above the water, above water, over the water, above the surface, above the tank, off the water',
 }
 
-export const subjectPhrases: readonly (readonly [string, Subject])[] = Object.entries(names).flatMap(([subject, list]) =>
-  list.split(', ').map((name) => [name, subject as Subject] as const),
+export const subjectPhrases: readonly (readonly [string, Subject])[] = Object.entries(names).flatMap(
+  ([subject, list]) => list.split(', ').map((name) => [name, subject as Subject] as const),
 )

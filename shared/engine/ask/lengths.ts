@@ -1,0 +1,146 @@
+import { amountIn, printAmount, type Amount } from './amounts'
+import { readBounded } from './bounded'
+import { findBound, findDimension } from './cues'
+import { giveUnits } from './length-units'
+import type { Landmark } from './landmarks'
+import type { Measure } from './measures'
+import { findNearest } from './nearest'
+import type { Mention } from './phrases'
+import type { Reading } from './reading'
+import { chooseLengthKey } from './words/piece-keys'
+import type { Dimension } from './words/dimension-words'
+
+const thickestWallMm = 50
+const deepestSandMm = 300
+const largestGrainMm = 8
+const nearEnough = 12
+
+interface Field {
+  readonly path: string
+  readonly name: string
+}
+
+const field = (path: string, name: string): Field => ({ path, name })
+
+const tankFields: Readonly<Partial<Record<Dimension, Field>>> = {
+  long: field('tank.outerLengthMm', 'tank length'),
+  wide: field('tank.outerWidthMm', 'tank width'),
+  'front-to-back': field('tank.outerWidthMm', 'tank width'),
+  deep: field('tank.outerHeightMm', 'tank height'),
+  tall: field('tank.outerHeightMm', 'tank height'),
+  thick: field('tank.wallMm', 'wall'),
+}
+
+const chamberFields: Readonly<Partial<Record<Dimension, string>>> = {
+  long: 'lengthMm',
+  wide: 'widthMm',
+  'front-to-back': 'widthMm',
+  deep: 'waterDepthMm',
+  tall: 'heightMm',
+}
+
+const simple: Readonly<Partial<Record<NonNullable<Landmark['subject']>, Field>>> = {
+  ceiling: field('room.ceilingMm', 'ceiling'),
+  'water-line': field('tank.waterLineMm', 'water line'),
+  'stand-height': field('room.tankTopMm', 'top edge of the tank'),
+}
+
+const lastChamber = ({ draft }: Reading): number =>
+  Math.max(0, ...Object.keys(draft.fields).map((path) => Number(/^tank\.chambers\.(\d+)\./.exec(path)?.[1] ?? 0)))
+
+/** In "36 wide, 18 deep, 16 tall" the depth runs front to back. */
+const hasHeight = ({ tokens }: Reading): boolean =>
+  tokens.some(({ text }) => text === 'tall' || text === 'high' || text === 'height')
+
+const chooseField = (
+  reading: Reading,
+  landmark: Landmark | undefined,
+  dimension: Dimension | undefined,
+  mm: number,
+): Field | undefined => {
+  const subject = landmark?.subject
+  if (dimension === 'thick' || subject === 'wall')
+    return mm <= thickestWallMm ? field('tank.wallMm', 'wall') : undefined
+  if (subject === 'sand' && mm <= deepestSandMm) return field('goals.sandDepthMm', 'sand')
+  if (subject === 'chamber') {
+    const key = dimension && chamberFields[dimension]
+    return key
+      ? field(
+          `tank.chambers.${lastChamber(reading)}.${key}`,
+          `chamber ${dimension === 'front-to-back' ? 'wide' : dimension}`,
+        )
+      : undefined
+  }
+  if (subject === 'support' || landmark?.kind === 'stand') {
+    if (dimension === 'deep' || dimension === 'wide') return field('support.widthMm', 'surface')
+    return dimension === 'tall' ? undefined : field('support.lengthMm', 'surface')
+  }
+  if (subject !== undefined && simple[subject]) return simple[subject]
+  if (subject !== 'tank') return undefined
+  if (dimension === 'deep' && hasHeight(reading)) return tankFields.wide
+  return tankFields[dimension ?? 'long']
+}
+
+const acceptsLength =
+  (reading: Reading, mm: number) =>
+  (landmark: Landmark): boolean => {
+    const { subject, kind } = landmark
+    if (kind !== undefined && kind === reading.kind && kind !== 'tank') return true
+    if (kind === 'stand') return true
+    if (subject === 'wall') return mm <= thickestWallMm
+    if (subject === 'sand') return mm <= deepestSandMm
+    return (
+      subject !== undefined &&
+      (subject === 'chamber' || subject === 'tank' || subject === 'support' || subject === 'cord' || subject in simple)
+    )
+  }
+
+const isCube = ({ tokens }: Reading, landmark: Landmark | undefined): boolean =>
+  landmark?.subject === 'tank' && tokens[landmark.from]?.text === 'cube'
+
+const fillCube = ({ draft }: Reading, amount: Amount): boolean => {
+  const filled = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'].filter((key) =>
+    draft.setField(`tank.${key}`, amountIn(amount, 'mm'), printAmount(amount)),
+  )
+  return filled.length > 0
+}
+
+const isPieces = (reading: Reading, landmark: Landmark | undefined): boolean =>
+  landmark?.kind !== undefined && landmark.kind === reading.kind && landmark.kind !== 'tank'
+
+/** Reads a length with a unit, or a bare number that a word of dimension stands beside. */
+export const readLength = (reading: Reading, measure: Measure): boolean => {
+  if (measure.shape === 'size') return false
+  const { draft, kind } = reading
+  const dimension: Mention<Dimension> | undefined = findDimension(reading, measure)
+  const isTyped = measure.amounts.some(({ quantity }) => quantity === 'length')
+  if (measure.amounts.some(({ quantity }) => quantity !== undefined && quantity !== 'length')) return false
+  if (!isTyped && dimension === undefined) return false
+  const { amounts } = giveUnits(reading, measure, 'chamber')
+  const amount = amounts.at(-1)
+  if (amount === undefined) return false
+  const mm = amountIn(amount, 'mm')
+  const bound = findBound(reading, measure)
+  const near = findNearest(reading, measure, acceptsLength(reading, mm))
+  const landmark = near !== undefined && near.cost <= nearEnough ? near.landmark : undefined
+  const cues = [dimension, bound, landmark].filter((cue) => cue !== undefined)
+  const isGrain = landmark?.subject === 'sand' && kind === 'sand' && mm <= largestGrainMm && dimension === undefined
+  const isBelowPiece = isPieces(reading, landmark) && !(landmark?.subject === 'sand' && !isGrain)
+  const isLoose = landmark === undefined && kind !== null && kind !== 'tank'
+  if (isGrain || isBelowPiece || isLoose || landmark?.subject === 'cord') {
+    const isCord = landmark?.subject === 'cord'
+    const key = isCord ? 'cordMm' : isGrain ? 'grain' : kind && chooseLengthKey(kind, dimension?.means)
+    return key
+      ? readBounded(reading, { ...measure, amounts }, { key, unit: 'mm', bound: bound?.means, loose: true }, cues)
+      : false
+  }
+  if (isCube(reading, landmark) && (dimension === undefined || dimension.means === 'long')) {
+    if (!fillCube(reading, amount)) return false
+    draft.note({ meaning: `cube of ${printAmount(amount)}`, path: 'tank.outerLengthMm' }, measure, ...cues)
+    return true
+  }
+  const target = chooseField(reading, landmark, dimension?.means, mm)
+  if (target === undefined || !draft.setField(target.path, mm, printAmount(amount))) return false
+  draft.note({ meaning: `${target.name} ${printAmount(amount)}`, path: target.path }, measure, ...cues)
+  return true
+}
