@@ -13,6 +13,10 @@ function createRequestId(req: IncomingMessage, res: ServerResponse): string {
   return id
 }
 
+export function getRequestId(req: IncomingMessage): string {
+  return typeof req.id === 'string' ? req.id : ''
+}
+
 /** One record per request. The query is left out: it holds what somebody owns. */
 export function createRequestLog(logger: Logger) {
   return pinoHttp({

@@ -2,6 +2,7 @@ import type { ErrorRequestHandler, Request, RequestHandler, Response } from 'exp
 import type { Problem } from '#shared/schemas/problem'
 import { AppError } from '../lib/errors'
 import type { ErrorPage } from './error-page'
+import { getRequestId } from './logging'
 import { problemKinds } from './problems'
 import { toAppError } from './to-app-error'
 
@@ -16,7 +17,7 @@ function toProblem(req: Request, error: AppError | null): Problem {
     status,
     detail: error?.message ?? internalDetail,
     instance: req.originalUrl.split('?', 1)[0] ?? '/',
-    requestId: String(req.id),
+    requestId: getRequestId(req),
     ...(error !== null && error.issues.length > 0 && { errors: [...error.issues] }),
   }
 }

@@ -30,6 +30,10 @@ export class AppError extends Error {
 
 /** Every wrong field of one request in one error. */
 export function createInvalidError(issues: readonly Issue[]): AppError {
-  const detail = issues.length === 1 ? issues[0]!.detail : `${issues.length} fields need another look.`
+  const [first, ...others] = issues
+  const detail =
+    first !== undefined && others.length === 0
+      ? `${first.pointer} ${first.detail}.`
+      : `${issues.length} fields need another look.`
   return new AppError('invalid', detail, issues)
 }

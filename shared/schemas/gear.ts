@@ -1,9 +1,9 @@
 import { z } from 'zod'
 import { limits } from '../limits'
+import { sourceSchema } from './specs'
 
 export const gearStatuses = ['current', 'discontinued', 'unknown'] as const
 export const gearSorts = ['name', '-updated'] as const
-export const sources = ['measured', 'maker', 'estimate'] as const
 
 const controlCharacters = /\p{Cc}/u
 
@@ -26,7 +26,7 @@ export const slugSchema = z
 export const bareSpecsSchema = z.record(z.string(), z.unknown())
 
 export const provenanceSchema = z.object({
-  source: z.enum(sources),
+  source: sourceSchema,
   plusMinus: z.number().optional(),
   evidence: z.string().optional(),
   date: z.string(),

@@ -17,6 +17,17 @@ export const attributeSchema = z.looseObject({
   checks: z.array(z.string()).optional(),
 })
 
+/** One line of the rule table, as data. `unit` is the canonical unit of what is measured. */
+const ruleSchema = z.object({
+  id: z.string(),
+  label: z.string(),
+  rule: z.string(),
+  worst: z.enum(['change', 'fail']),
+  unit: z.string().nullable(),
+  basis: z.object({ type: z.enum(['physics', 'standard', 'practice']), source: z.string() }),
+  reads: z.array(z.string()),
+})
+
 export const kindDescriptionSchema = z.object({
   key: z.string(),
   label: z.string(),
@@ -24,6 +35,7 @@ export const kindDescriptionSchema = z.object({
   electric: z.boolean(),
   additive: z.boolean(),
   attributes: z.array(attributeSchema),
+  checks: z.array(ruleSchema),
   jsonSchema: z.record(z.string(), z.unknown()),
 })
 

@@ -32,8 +32,8 @@ export async function insertGear(
   entries: readonly { readonly piece: PreparedPiece; readonly createdAt: Date; readonly updatedAt: Date }[],
 ): Promise<Map<string, number>> {
   const ids = new Map<string, number>()
-  const rows = entries.map(({ piece: { identity, revisions }, createdAt, updatedAt }) => {
-    const { number, specs, provenance } = revisions.at(-1)!.state
+  const rows = entries.map(({ piece: { identity, head }, createdAt, updatedAt }) => {
+    const { number, specs, provenance } = head.state
     return { ...identity, headRevision: number, specs, provenance, createdAt, updatedAt }
   })
   await insertInChunks(rows, async (chunk) => {

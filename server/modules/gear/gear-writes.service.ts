@@ -4,7 +4,7 @@ import { findUniqueViolation } from '../../db/errors'
 import { AppError, createInvalidError, type Issue } from '../../lib/errors'
 import { insertGear, insertRevisions, lockHead, lockHeads, updateHead } from './gear-writes.queries'
 import { preparePiece, prepareRevision } from './gear.prepare'
-import type { PieceInput, PreparedPiece, RevisionInput, SpecsState } from './gear.types'
+import type { PieceInput, PreparedPiece, PreparedRevision, RevisionInput, SpecsState } from './gear.types'
 
 type Head = NonNullable<Awaited<ReturnType<typeof lockHead>>>
 
@@ -14,17 +14,15 @@ function toDate(day: string): Date {
 
 async function insertPieces(db: Database, pieces: readonly PreparedPiece[]): Promise<void> {
   const entries = pieces.map((piece) => {
-    const createdAt = toDate(piece.revisions[0]!.input.date)
-    return { piece, createdAt, updatedAt: toDate(piece.revisions.at(-1)!.input.date) }
+    return { piece, createdAt: toDate(piece.first.input.date), updatedAt: toDate(piece.head.input.date) }
   })
   const ids = await insertGear(db, entries)
-  await insertRevisions(
-    db,
-    pieces.flatMap(({ identity, revisions }) => {
-      const gearId = ids.get(identity.slug)!
-      return revisions.map((revision) => ({ gearId, revision, createdAt: toDate(revision.input.date) }))
-    }),
-  )
+  const inserted = pieces.flatMap(({ identity, revisions }) => {
+    const gearId = ids.get(identity.slug)
+    if (gearId === undefined) throw new Error(`${identity.slug} was not inserted`)
+    return revisions.map((revision) => ({ gearId, revision, createdAt: toDate(revision.input.date) }))
+  })
+  await insertRevisions(db, inserted)
 }
 
 async function appendRevision(db: Database, head: Head, input: RevisionInput, createdAt: Date): Promise<SpecsState> {
@@ -33,6 +31,13 @@ async function appendRevision(db: Database, head: Head, input: RevisionInput, cr
   await insertRevisions(db, [{ gearId: head.id, revision: { state, input }, createdAt }])
   await updateHead(db, head.id, state, createdAt)
   return state
+}
+
+async function appendRevisions(db: Database, head: Head, revisions: readonly PreparedRevision[]): Promise<void> {
+  let newest = head
+  for (const { input } of revisions) {
+    newest = { ...newest, ...(await appendRevision(db, newest, input, toDate(input.date))) }
+  }
 }
 
 function explainDuplicate(error: unknown): never {
@@ -96,10 +101,9 @@ export async function importPieces(db: Database, inputs: readonly PieceInput[]):
     await insertPieces(tx, fresh)
     let extended = 0
     for (const { identity, revisions } of pieces) {
-      let head = headBySlug.get(identity.slug)
+      const head = headBySlug.get(identity.slug)
       const later = head === undefined ? [] : revisions.slice(head.number)
-      for (const { input } of later)
-        head = { ...head!, ...(await appendRevision(tx, head!, input, toDate(input.date))) }
+      if (head !== undefined) await appendRevisions(tx, head, later)
       if (later.length > 0) extended += 1
     }
     return { created: fresh.length, extended, unchanged: pieces.length - fresh.length - extended }

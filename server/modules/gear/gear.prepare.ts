@@ -65,13 +65,15 @@ function prepareIdentity(input: IdentityInput): PreparedPiece['identity'] {
 
 /** A whole piece, checked and ready to be stored. Throws AppError `invalid`, which names every wrong field of one revision. */
 export function preparePiece(input: PieceInput): PreparedPiece {
-  if (input.revisions.length === 0) {
-    throw createInvalidError([{ pointer: '#/revisions', detail: 'must hold at least one revision' }])
-  }
   let state = noSpecs
   const revisions = input.revisions.map((revision) => {
     state = prepareRevision(input.kind, state, revision)
     return { state, input: revision }
   })
-  return { identity: prepareIdentity(input), revisions }
+  const [first] = revisions
+  const head = revisions.at(-1)
+  if (first === undefined || head === undefined) {
+    throw createInvalidError([{ pointer: '#/revisions', detail: 'must hold at least one revision' }])
+  }
+  return { identity: prepareIdentity(input), revisions, first, head }
 }

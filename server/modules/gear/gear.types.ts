@@ -51,4 +51,6 @@ export interface PreparedRevision {
 export interface PreparedPiece {
   readonly identity: IdentityInput & { readonly slug: string }
   readonly revisions: readonly PreparedRevision[]
+  readonly first: PreparedRevision
+  readonly head: PreparedRevision
 }

@@ -2,8 +2,7 @@ import { Router } from 'express'
 import type { Database } from '../../db/database'
 import type { Lifecycle } from '../../http/lifecycle'
 import { addEndpoint } from '../../http/methods'
-import { AppError } from '../../lib/errors'
-import { pingDatabase } from './system.queries'
+import { checkReadiness } from './system.service'
 
 export function createSystemRoutes(db: Database, lifecycle: Lifecycle): Router {
   const router = Router()
@@ -16,8 +15,7 @@ export function createSystemRoutes(db: Database, lifecycle: Lifecycle): Router {
 
   addEndpoint(router, '/ready', {
     get: async (_req, res) => {
-      if (lifecycle.isDraining) throw new AppError('unavailable', 'This process is shutting down.')
-      await pingDatabase(db)
+      await checkReadiness(db, lifecycle.isDraining)
       res.set('Cache-Control', 'no-store').json({ status: 'ready' })
     },
   })

@@ -1,0 +1,63 @@
+import compression from 'compression'
+import express, { Router, type Express } from 'express'
+import type { Env } from './config/env'
+import type { Database } from './db/database'
+import { createErrorPage } from './http/error-page'
+import { createLifecycle, type Lifecycle } from './http/lifecycle'
+import { createRequestLog } from './http/logging'
+import { refuseDotFiles, refuseOddMethods } from './http/methods'
+import { createProblemHandler, refuseUnknownPath } from './http/problem-handler'
+import { createRateLimit, defaultRateLimits, type RateLimits } from './http/rate-limits'
+import { createPageRoutes, type Pages } from './http/render'
+import { readJsonBody, refuseRepeatedKeys } from './http/requests'
+import { assignNonce, createSecurityHeaders } from './http/security-headers'
+import type { Logger } from './lib/logger'
+import { createCatalogue } from './modules/catalogue/catalogue.service'
+import { createFitRoutes } from './modules/fit/fit.routes'
+import { createGearRoutes } from './modules/gear/gear.routes'
+import { createKindRoutes } from './modules/kinds/kinds.routes'
+import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
+import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
+import { createSetupRoutes } from './modules/setups/setups.routes'
+import { createSystemRoutes } from './modules/system/system.routes'
+
+export interface AppDependencies {
+  readonly db: Database
+  readonly env: Env
+  readonly logger: Logger
+  readonly lifecycle?: Lifecycle
+  /** The built client; without it there is the API alone. */
+  readonly pages?: Pages | null
+  readonly rateLimits?: RateLimits
+}
+
+/** Puts the parts together; everything that lives outside the process is handed in. */
+export function createApp(dependencies: AppDependencies): Express {
+  const { db, env, logger, lifecycle = createLifecycle(), pages = null, rateLimits = defaultRateLimits } = dependencies
+  const isHttps = env.PUBLIC_ORIGIN?.startsWith('https:') ?? false
+  const catalogue = createCatalogue(db)
+
+  const app = express()
+  app.disable('x-powered-by')
+  app.disable('etag')
+  app.set('trust proxy', env.TRUST_PROXY)
+  app.use(assignNonce, createRequestLog(logger), createSecurityHeaders(isHttps), refuseOddMethods, refuseDotFiles)
+  app.use(compression())
+  app.use(createSystemRoutes(db, lifecycle))
+
+  const api = Router()
+  api.use(refuseRepeatedKeys)
+  api.use(['/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute), ...readJsonBody)
+  api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))
+  api.use(createFitRoutes(catalogue), createSetupRoutes(catalogue))
+  api.use(createKindRoutes(), createGearRoutes(db), createOpenApiRoutes(env.PUBLIC_ORIGIN))
+  api.use(refuseUnknownPath)
+  app.use('/api/v1', api)
+  app.use('/api', refuseUnknownPath)
+
+  app.use(createPreferenceRoutes(isHttps))
+  if (pages !== null) app.use(createPageRoutes(app, pages, rateLimits.pagesPerMinute))
+  app.use(refuseUnknownPath)
+  app.use(createProblemHandler(pages?.errorPage ?? createErrorPage()))
+  return app
+}

@@ -1,0 +1,21 @@
+import { Router } from 'express'
+import { fitCheckRequestSchema, fitRequestSchema } from '#shared/schemas/fit'
+import { addEndpoint } from '../../http/methods'
+import { parseBody } from '../../http/requests'
+import { sendAnswer } from '../../http/responses'
+import type { Catalogue } from '../catalogue/catalogue.service'
+import { checkFit, findFits } from './fit.service'
+
+export function createFitRoutes(catalogue: Catalogue): Router {
+  const router = Router()
+
+  addEndpoint(router, '/fit', {
+    post: async (req, res) => sendAnswer(res, await findFits(catalogue, parseBody(fitRequestSchema, req))),
+  })
+
+  addEndpoint(router, '/fit/check', {
+    post: async (req, res) => sendAnswer(res, await checkFit(catalogue, parseBody(fitCheckRequestSchema, req))),
+  })
+
+  return router
+}

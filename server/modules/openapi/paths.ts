@@ -1,0 +1,119 @@
+import type { RouteConfig } from '@asteasolutions/zod-to-openapi'
+import { z } from 'zod'
+import { answerSchema, fitResultSchema, reportSchema } from '#shared/schemas/answer'
+import { fitCheckRequestSchema, fitRequestSchema, reportRequestSchema } from '#shared/schemas/fit'
+import { gearListSchema, gearSchema, revisionListSchema, revisionSchema, slugSchema } from '#shared/schemas/gear'
+import { gearQuerySchema } from '#shared/schemas/gear-requests'
+import { kindListSchema } from '#shared/schemas/kinds'
+import { problemSchema } from '#shared/schemas/problem'
+import { examples } from './examples'
+
+const problemTexts = {
+  400: 'The body is not JSON',
+  404: 'There is nothing by that name',
+  413: 'The body is too large',
+  415: 'The body is not sent as application/json',
+  422: 'Some fields are wrong; `errors` names each of them',
+  429: 'Too many requests; `Retry-After` says when there is room again',
+  503: 'The database does not answer; `Retry-After` says when to try again',
+} as const
+
+type ProblemStatus = keyof typeof problemTexts
+
+function describeProblems(...statuses: ProblemStatus[]): RouteConfig['responses'] {
+  const content = { 'application/problem+json': { schema: problemSchema } }
+  return Object.fromEntries(statuses.map((status) => [status, { description: problemTexts[status], content }]))
+}
+
+function describeRead(
+  path: string,
+  summary: string,
+  schema: z.ZodType,
+  request: RouteConfig['request'] = {},
+): RouteConfig {
+  const hasNames = path.includes('{')
+  return {
+    method: 'get',
+    path,
+    summary,
+    tags: ['catalogue'],
+    request,
+    responses: {
+      200: { description: summary, content: { 'application/json': { schema } } },
+      304: { description: 'Not changed since the `ETag` sent as `If-None-Match`' },
+      ...(hasNames ? describeProblems(404) : {}),
+      ...describeProblems(422, 429, 503),
+    },
+  }
+}
+
+function describeCalculation(
+  path: string,
+  summary: string,
+  [body, example, answer]: readonly [z.ZodType, unknown, z.ZodType],
+): RouteConfig {
+  return {
+    method: 'post',
+    path,
+    summary,
+    tags: ['fit'],
+    request: { body: { required: true, content: { 'application/json': { schema: body, example } } } },
+    responses: {
+      200: { description: summary, content: { 'application/json': { schema: answer } } },
+      ...describeProblems(400, 413, 415, 422, 429, 503),
+    },
+  }
+}
+
+const slugParams = z.object({ slug: slugSchema })
+const revisionParams = slugParams.extend({ number: z.int().min(1) })
+const statusSchema = z.object({ status: z.string() })
+
+function describeState(path: string, summary: string, ...problems: ProblemStatus[]): RouteConfig {
+  const content = { 'application/json': { schema: statusSchema } }
+  return {
+    method: 'get',
+    path,
+    summary,
+    tags: ['service'],
+    responses: { 200: { description: summary, content }, ...describeProblems(...problems) },
+  }
+}
+
+/** Every call, each described by the schemas that check it. */
+export const paths: readonly RouteConfig[] = [
+  describeRead(
+    '/api/v1/kinds',
+    'All kinds of gear, what can be known of each, and the checks that read it',
+    kindListSchema,
+  ),
+  describeRead('/api/v1/gear', 'Searches the catalogue; `Link` leads to the next page', gearListSchema, {
+    query: gearQuerySchema,
+  }),
+  describeRead('/api/v1/gear/{slug}', 'A piece of gear, with what backs each of its values', gearSchema, {
+    params: slugParams,
+  }),
+  describeRead('/api/v1/gear/{slug}/revisions', 'Its history, newest first', revisionListSchema, {
+    params: slugParams,
+  }),
+  describeRead('/api/v1/gear/{slug}/revisions/{number}', 'Its specs as of one revision', revisionSchema, {
+    params: revisionParams,
+  }),
+  describeCalculation('/api/v1/fit', 'Every piece of a kind, judged in a setup', [
+    fitRequestSchema,
+    examples.fit,
+    fitResultSchema,
+  ]),
+  describeCalculation('/api/v1/fit/check', 'One piece, judged in a setup', [
+    fitCheckRequestSchema,
+    examples.fitCheck,
+    answerSchema,
+  ]),
+  describeCalculation('/api/v1/setups/report', 'Every check, need and budget of a whole setup', [
+    reportRequestSchema,
+    examples.report,
+    reportSchema,
+  ]),
+  describeState('/health', 'Whether the process lives; asks nobody else'),
+  describeState('/ready', 'Whether the process can answer: not while the database is away or it shuts down', 503),
+]

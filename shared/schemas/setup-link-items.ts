@@ -1,0 +1,51 @@
+import { getAttribute, isKindKey, kindKeys } from '../kinds/index'
+import type { FieldAttribute } from '../kinds/types'
+import { limits } from '../limits'
+
+const places = ['display', 'cabinet', 'hang-on', 'outside'] as const
+
+const options = (values: readonly string[]) => values.map((value) => ({ value, label: value }))
+
+/** The fields of an item beside its specs, in the order in which a link writes them. */
+const ownFields: readonly FieldAttribute[] = [
+  { key: 'kind', label: 'kind', type: 'choice', role: 'check', options: options(kindKeys) },
+  { key: 'gear', label: 'gear', type: 'text', role: 'check', maxLength: limits.slug },
+  {
+    key: 'quantity',
+    label: 'quantity',
+    type: 'measure',
+    role: 'check',
+    unit: 'count',
+    plausible: [1, limits.quantity],
+    usual: [1, 4],
+  },
+  { key: 'state', label: 'state', type: 'choice', role: 'check', options: options(['have', 'planned', 'gone']) },
+  { key: 'place', label: 'place', type: 'text', role: 'check', maxLength: limits.itemId, word: true },
+  {
+    key: 'mountHeightMm',
+    label: 'lamp above the water',
+    type: 'measure',
+    role: 'check',
+    unit: 'mm',
+    plausible: [0, 5000],
+    usual: [60, 500],
+  },
+]
+
+export const itemFieldKeys = ownFields.map(({ key }) => key)
+
+/** The field that `items.<id>.<rest>` names; specs are told apart by the item's kind. */
+export function findItemField(rest: string, kind: string | undefined): FieldAttribute | undefined {
+  const own = ownFields.find(({ key }) => key === rest)
+  if (own !== undefined) return own
+  const [section, key, ...deeper] = rest.split('.')
+  if (section !== 'specs' || key === undefined || deeper.length > 0) return undefined
+  const attribute = kind !== undefined && isKindKey(kind) ? getAttribute(kind, key) : undefined
+  return attribute?.type === 'group' ? undefined : attribute
+}
+
+/** A place in one word: where it is none of the named ones, it is a chamber's id. */
+export function readItemPlace(word: string): { readonly in: (typeof places)[number] } | { readonly chamber: string } {
+  const named = places.find((place) => place === word)
+  return named === undefined ? { chamber: word } : { in: named }
+}
