@@ -7,6 +7,7 @@ import { SiteHeader } from '../../../src/components/layout/site-header'
 import { ThemeSwitch } from '../../../src/features/theme/components/theme-switch'
 import { applyTheme, type Theme } from '../../../src/features/theme/theme'
 import { UnitSwitch } from '../../../src/features/units/components/unit-switch'
+import { DrawingsSpecimen } from './drawings-specimen'
 import { PrimitivesSpecimen } from './primitives-specimen'
 
 const links = [
@@ -35,6 +36,7 @@ export function Specimen() {
       footer={<SiteFooter isDemo />}
     >
       <h1>Which heater still fits?</h1>
+      <DrawingsSpecimen printer={printer} />
       <PrimitivesSpecimen printer={printer} />
     </PageShell>
   )
