@@ -1,9 +1,9 @@
 import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
-import type { Scene } from '../scene'
+import { once, type Scene } from '../scene'
 import { findBasins, type Basin } from '../setup/places'
 import type { Placement } from '../types'
 import { readMeasure, readText } from '../values'
-import { chooseStand, describeStand, tryPositions } from './rod-space'
+import { chooseStand, describeStand } from './rod-space'
 
 const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = {
   vertical: ['upright'],
@@ -27,6 +27,8 @@ const listRests = ({ path }: Basin): readonly string[] =>
     ? ['tank.waterLineMm', 'tank.outerHeightMm', 'tank.displayLengthMm', 'tank.displayWidthMm']
     : ['waterDepthMm', 'heightMm', 'lengthMm', 'widthMm'].map((key) => `${path}.${key}`)
 
+const findUsualBasins = ({ plan }: Scene) => findBasins(plan, undefined)
+
 function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgement {
   const { specs } = piece
   if (readText(specs, 'form') === 'inline') return judgeInline(scene)
@@ -39,11 +41,10 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
       () =>
         `Nobody has recorded its ${missing.length > 1 ? 'length and thickness' : length ? 'thickness' : 'length'} yet.`,
     )
-  const basins = findBasins(scene.plan, place)
+  const basins = place ? findBasins(scene.plan, place) : once(scene, findUsualBasins)
   const rod = { length, diameter, immersed: readMeasure(specs, 'minImmersionMm') ?? length, quantity }
   const orientation = readText(specs, 'orientation')
-  const tryAll = (by: string) =>
-    chooseStand(basins.map((basin) => tryPositions(rod, basin, scene.others, positionsBy[by] ?? [])))
+  const tryAll = (by: string) => chooseStand(rod, basins, scene.others, positionsBy[by] ?? [])
   const stand = tryAll(orientation ?? 'vertical')
   if (!stand) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
   if (!stand.fits && orientation === undefined && (tryAll('any')?.fits || tryAll('horizontal')?.fits))

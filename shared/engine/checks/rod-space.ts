@@ -77,76 +77,80 @@ function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], is
   }
 }
 
-/** Every allowed position in a basin, each with its tightest limit. See "Rod in a chamber" on the method page. */
-export function tryPositions(
-  rod: Rod,
-  basin: Basin,
-  others: readonly Item[],
-  positions: readonly Placement['position'][],
-): Stand[] {
-  const { length, diameter, immersed, quantity } = rod
-  const d = diameter.value
-  const opening: Bound[] =
-    basin.openingLengthMm !== undefined && basin.openingWidthMm !== undefined
-      ? [
-          {
-            measuredMm: d,
-            limitMm: Math.min(basin.openingLengthMm, basin.openingWidthMm),
-            tight: 'opening',
-            of: diameter,
-          },
-        ]
-      : []
-  const plan: Bound = {
-    measuredMm: d + 2 * clearance,
-    limitMm: Math.min(basin.lengthMm, basin.widthMm),
-    tight: 'plan',
-    of: diameter,
-  }
-  const clear: Rectangle = [basin.lengthMm - 2 * clearance, basin.widthMm - 2 * clearance]
-  const bySlack = (slackMm: number | null): Bound =>
-    slackMm === null ? plan : { measuredMm: length.value, limitMm: length.value + slackMm, tight: 'run', of: length }
-  return positions.map((position) => {
-    if (position === 'upright') {
-      const bounds: Bound[] = [
-        plan,
-        { measuredMm: immersed.value, limitMm: basin.waterDepthMm, tight: 'water', of: immersed },
-        { measuredMm: length.value, limitMm: basin.heightMm, tight: 'height', of: length },
-      ]
-      return settle(
-        basin,
-        { chamber: basin.id, position, angleDeg: 90 },
-        [...opening, ...bounds],
-        hasCompany(basin, others, [d, d], quantity),
-      )
-    }
-    const fit =
-      position === 'leaning'
-        ? leanRod(
-            { lengthMm: length.value, diameterMm: d },
-            { lengthMm: clear[0], widthMm: clear[1], heightMm: basin.waterDepthMm },
-          )
-        : layRodFlat({ lengthMm: length.value, diameterMm: d }, clear)
-    const angleDeg = fit.angleDeg ?? 0
-    const runMm = Math.min(length.value * Math.cos((angleDeg * Math.PI) / 180) + d, Math.max(...clear))
-    const isRoomy = hasCompany(basin, others, [runMm, d], quantity)
-    const water: Bound[] =
-      position === 'flat' ? [{ measuredMm: d, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }] : []
-    return settle(
-      basin,
-      { chamber: basin.id, position, angleDeg },
-      [...opening, bySlack(fit.slackMm), ...water],
-      isRoomy,
-    )
-  })
+function boundUpright({ length, diameter, immersed }: Rod, basin: Basin): Bound[] {
+  return [
+    boundPlan(diameter, basin),
+    { measuredMm: immersed.value, limitMm: basin.waterDepthMm, tight: 'water', of: immersed },
+    { measuredMm: length.value, limitMm: basin.heightMm, tight: 'height', of: length },
+  ]
 }
 
-/** In one basin the first position that fits, else the nearest miss; of several basins the one with the most to spare. */
-export function chooseStand(byBasin: readonly (readonly Stand[])[]): Stand | undefined {
-  const nearest = (stands: readonly Stand[]) =>
-    stands.reduce<Stand | undefined>((best, stand) => (!best || ratio(stand) > ratio(best) ? stand : best), undefined)
-  const best = byBasin.flatMap((stands) => stands.find((stand) => stand.fits) ?? nearest(stands) ?? [])
-  return nearest(best.filter((stand) => stand.fits)) ?? nearest(best)
+const boundPlan = (diameter: Value<number>, basin: Basin): Bound => ({
+  measuredMm: diameter.value + 2 * clearance,
+  limitMm: Math.min(basin.lengthMm, basin.widthMm),
+  tight: 'plan',
+  of: diameter,
+})
+
+function boundOpening(diameter: Value<number>, { openingLengthMm, openingWidthMm }: Basin): Bound[] {
+  if (openingLengthMm === undefined || openingWidthMm === undefined) return []
+  const limitMm = Math.min(openingLengthMm, openingWidthMm)
+  return [{ measuredMm: diameter.value, limitMm, tight: 'opening', of: diameter }]
+}
+
+/** A rod leaning or lying: wholly under water, clear of the walls in plan. */
+function boundAslant({ length, diameter }: Rod, basin: Basin, slackMm: number | null): Bound[] {
+  const under: Bound = { measuredMm: diameter.value, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }
+  if (slackMm === null) return [boundPlan(diameter, basin), under]
+  return [{ measuredMm: length.value, limitMm: length.value + slackMm, tight: 'run', of: length }, under]
+}
+
+/** One position in one basin with its tightest limit. See "Rod in a chamber" on the method page. */
+function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: Placement['position']): Stand {
+  const d = rod.diameter.value
+  const opening = boundOpening(rod.diameter, basin)
+  if (position === 'upright') {
+    const isRoomy = hasCompany(basin, others, [d, d], rod.quantity)
+    const placement = { chamber: basin.id, position, angleDeg: 90 }
+    return settle(basin, placement, [...opening, ...boundUpright(rod, basin)], isRoomy)
+  }
+  const size = { lengthMm: rod.length.value, diameterMm: d }
+  const clear = { lengthMm: basin.lengthMm - 2 * clearance, widthMm: basin.widthMm - 2 * clearance }
+  const fit =
+    position === 'leaning'
+      ? leanRod(size, { ...clear, heightMm: basin.waterDepthMm })
+      : layRodFlat(size, [clear.lengthMm, clear.widthMm])
+  const angleDeg = fit.angleDeg ?? 0
+  const runMm = size.lengthMm * Math.cos((angleDeg * Math.PI) / 180) + d
+  const footprint: Rectangle = [Math.min(runMm, Math.max(clear.lengthMm, clear.widthMm)), d]
+  const isRoomy = hasCompany(basin, others, footprint, rod.quantity)
+  const bounds = [...opening, ...boundAslant(rod, basin, fit.slackMm)]
+  return settle(basin, { chamber: basin.id, position, angleDeg }, bounds, isRoomy)
+}
+
+const nearest = (stands: readonly Stand[]): Stand | undefined =>
+  stands.reduce<Stand | undefined>((best, stand) => (!best || ratio(stand) > ratio(best) ? stand : best), undefined)
+
+/** The first of the allowed positions in which the rod fits, else the nearest miss. */
+function choosePosition(rod: Rod, basin: Basin, others: readonly Item[], positions: readonly Placement['position'][]) {
+  const misses: Stand[] = []
+  for (const position of positions) {
+    const stand = tryPosition(rod, basin, others, position)
+    if (stand.fits) return stand
+    misses.push(stand)
+  }
+  return nearest(misses)
+}
+
+/** Where the rod goes: of several basins the one with the most to spare. Undefined: there is no basin. */
+export function chooseStand(
+  rod: Rod,
+  basins: readonly Basin[],
+  others: readonly Item[],
+  positions: readonly Placement['position'][],
+): Stand | undefined {
+  const best = basins.flatMap((basin) => choosePosition(rod, basin, others, positions) ?? [])
+  return nearest(best.filter(({ fits }) => fits)) ?? nearest(best)
 }
 
 const verbs = { upright: 'Stands', leaning: 'Leans', flat: 'Lies' } as const
@@ -169,7 +173,8 @@ export const describeStand =
       return `${off} too thick for ${where}: it needs ${words.length(measuredMm)} across with water around it, and there are ${words.length(limitMm)}.`
     if (tight === 'opening') return `${off} too thick for the opening of ${where}.`
     if (tight === 'height') return `${off} too long to stand in ${where}, which is ${words.length(limitMm)} high.`
-    if (tight === 'water') return `${off} too long for the ${words.length(limitMm)} of water in ${where}.`
+    if (tight === 'water' && placement.position === 'upright')
+      return `${off} too long for the ${words.length(limitMm)} of water in ${where}.`
     const verb = placement.position === 'leaning' ? 'lean' : 'lie'
     return `${off} too long to ${verb} in ${where}, which takes ${words.length(limitMm)} at that thickness.`
   }

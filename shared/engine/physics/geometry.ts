@@ -15,6 +15,11 @@ export const lengthToleranceMm = 0.05
 export function fitsRectangle(piece: Rectangle, space: Rectangle): boolean {
   const [p, q] = sortSides('piece', piece)
   const [a, b] = sortSides('space', space)
+  return isInside(p, q, a, b)
+}
+
+/** The same for sides already checked and sorted, p ≥ q and a ≥ b. */
+function isInside(p: number, q: number, a: number, b: number): boolean {
   if (q > b) return false
   if (p <= a) return true
   const diagonal2 = p * p + q * q
@@ -32,7 +37,13 @@ function sortSides(name: string, [one, other]: Rectangle): [number, number] {
  * RangeError for NaN.
  */
 export function findLongestMm(widthMm: number, space: Rectangle): number | null {
-  return findLast((lengthMm) => fitsRectangle([lengthMm, widthMm], space), 0, Math.hypot(...space))
+  const [a, b] = sortSides('space', space)
+  requireFinite({ widthMm })
+  return findLast(
+    (lengthMm) => isInside(Math.max(lengthMm, widthMm), Math.min(lengthMm, widthMm), a, b),
+    0,
+    Math.hypot(a, b),
+  )
 }
 
 /**
