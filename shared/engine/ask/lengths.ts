@@ -13,7 +13,8 @@ import type { Dimension } from './words/dimension-words'
 const thickestWallMm = 50
 const deepestSandMm = 300
 const largestGrainMm = 8
-const nearEnough = 12
+/** How far a length reaches for its subject; the second and third of a row that say what they are reach back to the first's. */
+const reach = { plain: 12, named: 30 } as const
 
 interface Field {
   readonly path: string
@@ -31,12 +32,13 @@ const tankFields: Readonly<Partial<Record<Dimension, Field>>> = {
   thick: field('tank.wallMm', 'wall'),
 }
 
-const chamberFields: Readonly<Partial<Record<Dimension, string>>> = {
-  long: 'lengthMm',
-  wide: 'widthMm',
-  'front-to-back': 'widthMm',
-  deep: 'waterDepthMm',
-  tall: 'heightMm',
+/** Below the path of the chamber. */
+const chamberFields: Readonly<Partial<Record<Dimension, Field>>> = {
+  long: field('lengthMm', 'chamber length'),
+  wide: field('widthMm', 'chamber width'),
+  'front-to-back': field('widthMm', 'chamber width'),
+  deep: field('waterDepthMm', 'chamber water depth'),
+  tall: field('heightMm', 'chamber height'),
 }
 
 const simple: Readonly<Partial<Record<NonNullable<Landmark['subject']>, Field>>> = {
@@ -63,13 +65,8 @@ const chooseField = (
     return mm <= thickestWallMm ? field('tank.wallMm', 'wall') : undefined
   if (subject === 'sand' && mm <= deepestSandMm) return field('goals.sandDepthMm', 'sand')
   if (subject === 'chamber') {
-    const key = dimension && chamberFields[dimension]
-    return key
-      ? field(
-          `tank.chambers.${lastChamber(reading)}.${key}`,
-          `chamber ${dimension === 'front-to-back' ? 'wide' : dimension}`,
-        )
-      : undefined
+    const side = dimension && chamberFields[dimension]
+    return side && field(`tank.chambers.${lastChamber(reading)}.${side.path}`, side.name)
   }
   if (subject === 'support' || landmark?.kind === 'stand') {
     if (dimension === 'deep' || dimension === 'wide') return field('support.widthMm', 'surface')
@@ -122,7 +119,8 @@ export const readLength = (reading: Reading, measure: Measure): boolean => {
   const mm = amountIn(amount, 'mm')
   const bound = findBound(reading, measure)
   const near = findNearest(reading, measure, acceptsLength(reading, mm))
-  const landmark = near !== undefined && near.cost <= nearEnough ? near.landmark : undefined
+  const landmark =
+    near !== undefined && near.cost <= (dimension === undefined ? reach.plain : reach.named) ? near.landmark : undefined
   const cues = [dimension, bound, landmark].filter((cue) => cue !== undefined)
   const isGrain = landmark?.subject === 'sand' && kind === 'sand' && mm <= largestGrainMm && dimension === undefined
   const isBelowPiece = isPieces(reading, landmark) && !(landmark?.subject === 'sand' && !isGrain)

@@ -94,7 +94,7 @@ const nominalVolts = (volts: number): 100 | 120 | 230 | undefined => {
 const readVolts = (reading: Reading, measure: Measure): boolean => {
   const typed = measure.amounts[0]
   const volts = typed === undefined || measure.shape !== 'single' ? undefined : nominalVolts(amountIn(typed, 'V'))
-  if (volts === undefined || !reading.draft.setField('mains.volts', volts, `${volts} V`)) return false
+  if (volts === undefined || !reading.draft.setField('mains.volts', volts, String(volts))) return false
   reading.draft.note({ meaning: `mains ${volts} V`, path: 'mains.volts' }, measure)
   return true
 }

@@ -74,7 +74,8 @@ export const readTemperature = (reading: Reading, measure: Measure): boolean => 
   const first = amounts[0]
   const last = amounts.at(-1)
   if (first === undefined || last === undefined) return false
-  const cues = [place?.landmark, season].filter((cue) => cue !== undefined)
+  const isWater = place?.landmark.subject === 'water'
+  const cues = [place?.landmark, isWater ? undefined : season].filter((cue) => cue !== undefined)
   const text = (amount: Amount) => printAmount(amount)
   const say = (path: string, meaning: string, amount: Amount) => {
     if (!draft.setField(path, amountIn(amount, 'C'), text(amount))) return false
@@ -82,7 +83,7 @@ export const readTemperature = (reading: Reading, measure: Measure): boolean => 
     return true
   }
   if (place?.landmark.subject === 'feed') return say('water.feedTempC', 'tap water', first)
-  const isRoom = place?.landmark.subject === 'room' || (place?.landmark.subject !== 'water' && season !== undefined)
+  const isRoom = place?.landmark.subject === 'room' || (!isWater && season !== undefined)
   if (measure.shape === 'range') return readRange(reading, measure, first, last, isRoom || place === undefined, cues)
   const target = isRoom ? (season?.means ?? 'usual') : place === undefined ? guessPlace(amountIn(first, 'C')) : 'water'
   return target === 'water' ? say('goals.temperatureC', 'water', first) : say(pathOf[target], nameOf[target], first)

@@ -13,7 +13,7 @@ export type FieldValue = number | string | boolean | readonly string[]
 export interface ReadField {
   /** Canonical, in the unit that the path ends with. */
   readonly value: FieldValue
-  /** As typed, with the unit that was meant: "20 gallons", "12 inch" for the last number of "4 x 5 x 12 inch". */
+  /** The number with the unit that was meant, or the option, as a setup link writes it: "20 gal", "4.5 in", "soft,lps". */
   readonly text: string
 }
 

@@ -18,7 +18,7 @@ const names: Readonly<Record<KindKey, string>> = {
     'heater, heeter, heatr, heatter, heter, haeter, heating rod, heater rod, titanium rod, heating element, aquarium heater, tank heater, ' +
     'titanium heater, glass heater, submersible heater, heating',
   'temperature-controller':
-    'temperature controller, temp controller, heater controller, thermostat controller, external thermostat, thermostat, ' +
+    'temperature controller, controller, temp controller, heater controller, thermostat controller, external thermostat, thermostat, ' +
     'temperture controller, temprature controller, controller for my heater, temperature regulator, temp control, heating controller, ' +
     'controller for a heater, controller for the heater',
   'return-pump':
@@ -31,7 +31,7 @@ const names: Readonly<Record<KindKey, string>> = {
     'auto top off, auto top up, ato, auto topoff, top off system, automatic top off, automatic top up, top up system, auto fill, ' +
     'top off, autotopoff, auto top of, top off unit, ato unit, evaporation top off',
   rock: 'rock, live rock, dry rock, reef rock, base rock, rockwork, rocks, liverock, aquascape rock, dead rock, liv rock',
-  sand: 'sand, live sand, dry sand, substrate, aragonite, sandbed, gravel, aragonite sand, reef sand, livesand, substrat, oolite',
+  sand: 'sand, live sand, dry sand, substrate, aragonite, gravel, aragonite sand, reef sand, livesand, substrat, oolite',
   'ro-unit':
     'ro / di, ro / di unit, ro unit, rodi, rodi unit, ro, ro di, ro di unit, reverse osmosis, reverse osmosis unit, ro / di system, rodi system, ' +
     'ro system, water filter, ro filter, rodi filter, ro / di filter, reverse osmosis system, ro water maker, reverse osmosis filter, osmosis unit',

@@ -35,12 +35,12 @@ const names: Readonly<Record<Subject, string>> = {
     'air temperature, my place, the place, indoors, inside temp, thermostat is, thermostat at, thermostat set, heating goes, ac, air con, aircon, hallway, den, loft, shed, fish room, cabin, household, appartment, apartement, trailer, rv, camper, hall',
   water:
     'water, water temp, water temperature, tank temp, tank temperature, keep it at, keep it, kept at, keep the tank at, keep at, keep tank at, hold it at, hold, maintain, ' +
-    'run it at, run at, running at, target, target temp, set to, set at, set point, setpoint, goal, heat it to, heat to, heated to, keep the water at, keep my tank at, ' +
-    'keep my water at, run the tank at, run my tank at, want it at, like it at, reef at, tank at, display at, stay at, temp of the tank, to keep, keeping it at, aim for, aiming for, hold at, holding',
+    'run it at, run at, running at, target, target temp, set to, set at, set point, setpoint, heat it to, heat to, heated to, keep the water at, keep my tank at, ' +
+    'keep my water at, run the tank at, run my tank at, want it at, like it at, reef at, tank at, display at, temp of the tank, to keep, keeping it at, aim for, aiming for, hold at, holding',
   sump: 'sump, refugium',
   support:
     'dresser, desk, table, counter, countertop, shelf, furniture, sideboard, counter top, cupboard, kitchen counter',
-  wall: 'glass thickness, wall thickness, thick glass, thick acrylic, glass wall, pane, panes, glass panes, walls, acrylic walls, glass walls, tank wall, wall',
+  wall: 'glass thickness, wall thickness, thick glass, thick acrylic, glass wall, pane, panes, glass panes, walls, acrylic walls, glass walls, tank wall, wall, glass, acrylic, starphire, perspex, plexiglass',
   sand: 'sand, sand bed, sandbed, substrate, live sand, bed, aragonite, sand depth, bed depth',
   rock: 'rock, live rock, dry rock, rockwork',
   feed: 'tap, tap water, house pressure, water pressure, line pressure, mains pressure, feed, feed water, source water, tds, tap tds, tap pressure, supply, pressure',

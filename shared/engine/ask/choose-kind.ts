@@ -1,0 +1,77 @@
+import type { KindKey } from '../../kinds/index'
+import { findPhrases, indexPhrases } from './phrases'
+import type { Landmark } from './landmarks'
+import type { Token } from './token'
+import { gonePhrases, replacePhrases } from './words/intent-words'
+
+type KindLandmark = Landmark & { readonly kind: KindKey }
+
+/** Asked for far less often than named as what the asked-for piece goes with. */
+const base: Readonly<Partial<Record<KindKey, number>>> = { tank: 1, sand: 6, rock: 6, stand: 8, net: 8 }
+const usual = 10
+const weights = { asked: 8, replaced: 6, gone: 6, first: 3, qualified: 2, owned: -5, towards: -4 } as const
+
+const asking: ReadonlySet<string> = new Set(
+  "which what need needs want looking find recommend suggest recommendation recommendations best buy get any another new whats what's good seeking after size much many replace replacement show".split(
+    ' ',
+  ),
+)
+const owning: ReadonlySet<string> = new Set('have has got with already on existing own had has my'.split(' '))
+const towards: ReadonlySet<string> = new Set('for in into of fit fits to under over'.split(' '))
+const qualifying: ReadonlySet<string> = new Set('for that to which under with'.split(' '))
+const skipped: ReadonlySet<string> = new Set('a an the my this our your of some'.split(' '))
+const replacing = indexPhrases(replacePhrases.map((phrase) => [phrase, true] as const))
+const going = indexPhrases(gonePhrases.map((phrase) => [phrase, true] as const))
+const window = 6
+
+const endsClause = (token: Token | undefined): boolean => token === undefined || token.type === 'stop'
+
+const wordsBefore = (tokens: readonly Token[], at: number, others: ReadonlySet<number>): readonly string[] => {
+  const words: string[] = []
+  for (let back = at - 1; back >= Math.max(0, at - window); back--) {
+    const token = tokens[back]
+    if (token === undefined || endsClause(token) || others.has(back)) break
+    words.push(token.text)
+  }
+  return words
+}
+
+const isWithin = (places: ReadonlySet<number>, from: number, to: number): boolean => {
+  for (let at = from; at < to; at++) if (places.has(at)) return true
+  return false
+}
+
+const startsOf = (tokens: readonly Token[], index: Parameters<typeof findPhrases>[0]): ReadonlySet<number> =>
+  new Set(findPhrases(index, tokens).map(({ from }) => from))
+
+/** The kind that the text asks about, by the words around each kind that it names; null where it names none. */
+export const chooseKind = (tokens: readonly Token[], landmarks: readonly Landmark[]): KindLandmark | null => {
+  const named = landmarks.filter((landmark): landmark is KindLandmark => landmark.kind !== undefined)
+  const replaced = startsOf(tokens, replacing)
+  const gone = startsOf(tokens, going)
+  const occupied = new Set(
+    named.flatMap(({ from, to }) => Array.from({ length: to - from }, (_, offset) => from + offset)),
+  )
+  const score = ({ from, to, kind }: KindLandmark, index: number): number => {
+    const before = wordsBefore(tokens, from, occupied)
+    const next = named[index + 1]?.from ?? tokens.length
+    const near = before.find((word) => !skipped.has(word)) ?? ''
+    return (
+      (base[kind] ?? usual) +
+      (before.some((word) => asking.has(word)) ? weights.asked : 0) +
+      (isWithin(replaced, from - before.length, from) ? weights.replaced : 0) +
+      (isWithin(gone, to, Math.min(next, to + window)) ? weights.gone : 0) +
+      (index === 0 ? weights.first : 0) +
+      (qualifying.has(tokens[to]?.text ?? '') ? weights.qualified : 0) +
+      (before.slice(0, 3).some((word) => owning.has(word)) ? weights.owned : 0) +
+      (towards.has(near) ? weights.towards : 0)
+    )
+  }
+  let best: { readonly landmark: KindLandmark; readonly points: number } | null = null
+  for (const [index, landmark] of named.entries()) {
+    const points = score(landmark, index)
+    if (best === null || points > best.points) best = { landmark, points }
+  }
+  const isOnlyContext = best?.landmark.kind === 'tank' && best.points < usual
+  return best === null || isOnlyContext ? null : best.landmark
+}
