@@ -136,7 +136,7 @@ function markAll(scales: readonly Scale[], ranked: readonly Ranked[], pieces: re
     if (!gear) return []
     return [
       {
-        slug: gear.slug,
+        ...gear,
         verdict,
         values: Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null])),
       },

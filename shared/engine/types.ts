@@ -247,8 +247,7 @@ export interface Scale {
 }
 
 /** A candidate on the scales: its verdict and its value per scale key (null: unknown). */
-export interface Mark {
-  readonly slug: string
+export interface Mark extends GearRef {
   readonly verdict: Verdict
   readonly values: Readonly<Record<string, number | null>>
 }

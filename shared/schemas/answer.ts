@@ -75,8 +75,7 @@ const scaleSchema = z.object({
   zones: z.array(z.object({ from: z.number(), to: z.number(), outcome: outcomeSchema })),
 })
 
-const markSchema = z.object({
-  slug: z.string(),
+const markSchema = gearRefSchema.extend({
   verdict: verdictSchema,
   values: z.record(z.string(), numberOrNull),
 })

@@ -78,6 +78,8 @@ export const marks: readonly Mark[] = Array.from({ length: 46 }, (_, at) => {
   const verdict = lengthMm > 304.8 ? 'no' : powerW > 200 || powerW < 50 ? 'no' : powerW < 86 ? 'changes' : 'fits'
   return {
     slug: `rod-${at}`,
+    brand: 'Marlin & Fenn',
+    model: `Stoker ${at}`,
     verdict: at % 13 === 5 ? verdicts[3]! : verdict,
     values: { lengthMm: at % 13 === 5 ? null : lengthMm, powerW },
   }
