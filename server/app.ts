@@ -9,7 +9,7 @@ import { refuseDotFiles, refuseOddMethods } from './http/methods'
 import { createProblemHandler, refuseUnknownPath } from './http/problem-handler'
 import { createRateLimit, defaultRateLimits, type RateLimits } from './http/rate-limits'
 import { createPageRoutes, type Pages } from './http/render'
-import { readJsonBody, refuseRepeatedKeys } from './http/requests'
+import { refuseRepeatedKeys } from './http/requests'
 import { assignNonce, createSecurityHeaders } from './http/security-headers'
 import type { Logger } from './lib/logger'
 import { createCatalogue } from './modules/catalogue/catalogue.service'
@@ -47,7 +47,7 @@ export function createApp(dependencies: AppDependencies): Express {
 
   const api = Router()
   api.use(refuseRepeatedKeys)
-  api.use(['/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute), ...readJsonBody)
+  api.use(['/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute))
   api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))
   api.use(createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db), createOpenApiRoutes(env.PUBLIC_ORIGIN))

@@ -24,8 +24,7 @@ export function createRequestLog(logger: Logger) {
     genReqId: createRequestId,
     quietReqLogger: true,
     serializers: {
-      req: (req: { id: unknown; method: string; url: string }) => ({
-        id: req.id,
+      req: (req: { method: string; url: string }) => ({
         method: req.method,
         path: req.url.split('?', 1)[0],
       }),

@@ -7,7 +7,8 @@ import { toIssues, toPointer } from '../lib/to-issues'
 /** Reads JSON bodies and nothing else: another media type could be sent across sites without a preflight. */
 export const readJsonBody: readonly RequestHandler[] = [
   (req, _res, next) => {
-    if (req.is('application/json') === false) {
+    const isEmpty = req.headers['content-length'] === '0'
+    if (!isEmpty && req.is('application/json') === false) {
       throw new AppError('unsupported-media-type', 'Send JSON, with the content type application/json.')
     }
     next()

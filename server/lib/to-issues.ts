@@ -8,7 +8,12 @@ export function toPointer(path: readonly PropertyKey[]): string {
   return ['#', ...parts].join('/')
 }
 
-/** Every problem of a parse, each at its pointer, in the order of the fields. */
+/** Every wrong field of a parse with the first thing that is wrong with it, in the order of the fields. */
 export function toIssues(error: z.ZodError): Issue[] {
-  return unfoldIssues(error.issues).map(({ path, message }) => ({ pointer: toPointer(path), detail: message }))
+  const issues = new Map<string, Issue>()
+  for (const { path, message } of unfoldIssues(error.issues)) {
+    const pointer = toPointer(path)
+    if (!issues.has(pointer)) issues.set(pointer, { pointer, detail: message })
+  }
+  return [...issues.values()]
 }

@@ -1,7 +1,7 @@
-import { Router } from 'express'
+import { Router, type Request, type Response } from 'express'
 import { fitCheckRequestSchema, fitRequestSchema } from '#shared/schemas/fit'
 import { addEndpoint } from '../../http/methods'
-import { parseBody } from '../../http/requests'
+import { parseBody, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
 import type { Catalogue } from '../catalogue/catalogue.service'
 import { checkFit, findFits } from './fit.service'
@@ -10,11 +10,19 @@ export function createFitRoutes(catalogue: Catalogue): Router {
   const router = Router()
 
   addEndpoint(router, '/fit', {
-    post: async (req, res) => sendAnswer(res, await findFits(catalogue, parseBody(fitRequestSchema, req))),
+    post: [
+      ...readJsonBody,
+      async (req: Request, res: Response) =>
+        sendAnswer(res, await findFits(catalogue, parseBody(fitRequestSchema, req))),
+    ],
   })
 
   addEndpoint(router, '/fit/check', {
-    post: async (req, res) => sendAnswer(res, await checkFit(catalogue, parseBody(fitCheckRequestSchema, req))),
+    post: [
+      ...readJsonBody,
+      async (req: Request, res: Response) =>
+        sendAnswer(res, await checkFit(catalogue, parseBody(fitCheckRequestSchema, req))),
+    ],
   })
 
   return router

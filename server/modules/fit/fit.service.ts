@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { fit, fitCheck } from '#shared/engine/fit'
-import type { Answer } from '#shared/engine/types'
+import type { Answer, ChamberInput, Setup } from '#shared/engine/types'
 import type { FitAnswer } from '#shared/schemas/answer'
 import type { FitCheckParsed, FitParsed } from '#shared/schemas/fit'
 import { createCursor, readCursor } from '../../lib/cursor'
@@ -33,12 +33,23 @@ function findUnknownItems({ setup, instead = [] }: FitCheckParsed): Issue[] {
   )
 }
 
+function findUnknownPlace({ place }: FitCheckParsed, { tank }: Setup): Issue[] {
+  if (place === undefined || 'in' in place) return []
+  const chambers = (tank.specs.chambers?.value ?? []) as readonly ChamberInput[]
+  if (chambers.some(({ id }) => id === place.chamber)) return []
+  return [{ pointer: toPointer(['place', 'chamber']), detail: 'is the id of no chamber of the tank' }]
+}
+
 /** One piece, from the catalogue or as somebody describes it, judged in a setup. */
 export async function checkFit(catalogue: Catalogue, request: FitCheckParsed): Promise<Answer> {
   const { setup: parsed, piece: pieceRequest, quantity, place, instead, beside } = request
   const snapshot = await catalogue.snapshot()
   const { expanded: piece, issues } = expandJudgedPiece(snapshot, pieceRequest)
-  const setup = readSetup(snapshot, parsed, [...issues, ...findUnknownItems(request)])
+  const setup = readSetup(snapshot, parsed, (expanded) => [
+    ...issues,
+    ...findUnknownItems(request),
+    ...findUnknownPlace(request, expanded),
+  ])
   return fitCheck(setup, piece, {
     ...(quantity !== undefined && { quantity }),
     ...(place !== undefined && { place }),

@@ -71,14 +71,19 @@ const revisionColumns = {
   createdAt: gearRevisions.createdAt,
   changed: sql<
     string[]
-  >`array(select ${gearValues.key} from ${gearValues} where ${gearValues.gearId} = ${gearRevisions.gearId} and ${gearValues.revision} = ${gearRevisions.number} order by ${gearValues.key})`,
+  >`coalesce(array_agg(${gearValues.key} order by ${gearValues.key}) filter (where ${gearValues.key} is not null), '{}')`,
 }
+
+const setValues = and(eq(gearValues.gearId, gearRevisions.gearId), eq(gearValues.revision, gearRevisions.number))
+const oneRevision = [gearRevisions.gearId, gearRevisions.number] as const
 
 export async function listRevisions(db: Database, gearId: number) {
   return db
     .select(revisionColumns)
     .from(gearRevisions)
+    .leftJoin(gearValues, setValues)
     .where(eq(gearRevisions.gearId, gearId))
+    .groupBy(...oneRevision)
     .orderBy(desc(gearRevisions.number))
 }
 
@@ -86,7 +91,9 @@ export async function findRevision(db: Database, gearId: number, number: number)
   const [row] = await db
     .select({ ...revisionColumns, specs: gearRevisions.specs })
     .from(gearRevisions)
+    .leftJoin(gearValues, setValues)
     .where(and(eq(gearRevisions.gearId, gearId), eq(gearRevisions.number, number)))
+    .groupBy(...oneRevision)
   return row ?? null
 }
 

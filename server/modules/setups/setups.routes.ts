@@ -1,7 +1,7 @@
-import { Router } from 'express'
+import { Router, type Request, type Response } from 'express'
 import { reportRequestSchema } from '#shared/schemas/fit'
 import { addEndpoint } from '../../http/methods'
-import { parseBody } from '../../http/requests'
+import { parseBody, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
 import type { Catalogue } from '../catalogue/catalogue.service'
 import { reportSetup } from './setups.service'
@@ -9,10 +9,13 @@ import { reportSetup } from './setups.service'
 export function createSetupRoutes(catalogue: Catalogue): Router {
   const router = Router()
   addEndpoint(router, '/setups/report', {
-    post: async (req, res) => {
-      const { setup } = parseBody(reportRequestSchema, req)
-      sendAnswer(res, await reportSetup(catalogue, setup))
-    },
+    post: [
+      ...readJsonBody,
+      async (req: Request, res: Response) => {
+        const { setup } = parseBody(reportRequestSchema, req)
+        sendAnswer(res, await reportSetup(catalogue, setup))
+      },
+    ],
   })
   return router
 }
