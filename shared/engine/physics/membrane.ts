@@ -49,7 +49,7 @@ export function concentrationFactor(recovery: number): number {
   requireFinite({ recovery })
   if (recovery <= 0) return 1
   const held = Math.min(0.99, recovery)
-  return -Math.log(1 - held) / held
+  return -Math.log1p(-held) / held
 }
 
 /**

@@ -1,5 +1,6 @@
 import { findLast } from './bisect'
 import { requireFinite } from './finite'
+import { specificGravity } from './seawater'
 
 const sodiumLineNm = 589.26
 
@@ -62,11 +63,11 @@ export function salinityFromNacl(readingPpt: number): number {
 }
 
 /**
- * Salinity of which a specific gravity is true, ppt, given the function from one to the other; 0–60, null outside it.
- * RangeError for NaN.
+ * Salinity of water that has a specific gravity at a sample temperature over water at another, ppt; null outside 0–60.
+ * The inverse of `specificGravity`, by bisection. RangeError for NaN.
  */
-export function salinityFromGravity(gravity: number, gravityOf: (salinityPpt: number) => number): number | null {
+export function salinityFromGravity(gravity: number, sampleC: number, waterC: number): number | null {
   requireFinite({ gravity })
-  if (gravityOf(60) < gravity) return null
-  return findLast((salinityPpt) => gravityOf(salinityPpt) <= gravity, 0, 60)
+  const isAtMost = (salinityPpt: number) => specificGravity(salinityPpt, sampleC, waterC) <= gravity
+  return isAtMost(60) ? null : findLast(isAtMost, 0, 60)
 }
