@@ -1,12 +1,12 @@
 import type { Printer } from '#shared/units/print'
+import { ChamberViews } from './chamber-views'
 import { describeRod, describeSlack, uprightSlackMm } from './describe-tank'
 import { DimensionLine } from './dimension-line'
-import { labelPx } from './dimension-layout'
+import { besideEdge, labelPx } from './dimension-layout'
 import { DrawingSheet } from './drawing-sheet'
 import { placeRod } from './place-rod'
-import { RodShape } from './rod-shape'
 import { type ChamberDrawing, chamberPath, type DrawingEdits, type RodDrawing } from './tank-drawing'
-import { defaultWidthPx, gridStepMm } from './tank-layout'
+import { defaultWidthPx, gridStepMm, sidePx } from './tank-layout'
 import { longestThatFits, monoWidth } from './text-width'
 import { useContainerWidth } from './use-container-width'
 
@@ -21,8 +21,9 @@ export interface ChamberDetailProps extends DrawingEdits {
   readonly clearanceMm?: number
 }
 
-const margin = { top: 34, side: 64, bottom: 40 } as const
-const tallPx = 240
+const abovePx = 36
+const belowPx = 42
+const tallestPx = 250
 const gapPx = 20
 
 /** The chamber enlarged, upright and in plan, with its rod standing, leaning or lying, and what is left over. */
@@ -39,25 +40,22 @@ export function ChamberDetail(props: ChamberDetailProps) {
   const acrossMm = isFromSide ? chamber.widthMm : chamber.lengthMm
   const seen = rod && placeRod(rod, isFromSide ? { lengthMm: chamber.widthMm, widthMm: chamber.lengthMm } : chamber)
   const rodLabel = rod ? printer.length(rod.lengthMm) : ''
-  const rodRoom = rod ? monoWidth(rodLabel, labelPx) + gapPx : 0
-  const highestMm = Math.max(chamber.waterDepthMm, seen?.heightMm ?? 0)
-  const pxPerMm = Math.min(
-    tallPx / highestMm,
-    tallPx / chamber.widthMm,
-    Math.max(60, widthPx - 2 * margin.side - rodRoom - gapPx) / (acrossMm + chamber.lengthMm),
-  )
-  const heightPx = tallPx + margin.top + margin.bottom
-  const contentPx = (acrossMm + chamber.lengthMm) * pxPerMm + rodRoom + gapPx
-  const leftX = (widthPx - contentPx) / 2
+  const isUpright = rod?.position === 'upright'
+  const betweenPx = gapPx + (isUpright ? monoWidth(rodLabel, labelPx) + gapPx : 0)
+  const highestMm = Math.max(chamber.waterDepthMm, seen?.heightMm ?? 0, chamber.widthMm)
+  const parts = acrossMm + chamber.lengthMm
+  const mostPxPerMm = tallestPx / highestMm
+  const pxPerMm = Math.min(mostPxPerMm, Math.max(60, widthPx - 2 * sidePx - betweenPx) / parts)
+  const floorY = abovePx + highestMm * pxPerMm
+  const heightPx = floorY + belowPx
+  const leftX = (widthPx - parts * pxPerMm - betweenPx) / 2
   const rightX = leftX + acrossMm * pxPerMm
-  const floorY = heightPx - margin.bottom
   const waterY = floorY - chamber.waterDepthMm * pxPerMm
-  const planX = rightX + rodRoom + gapPx
+  const planX = rightX + betweenPx
   const planRight = planX + chamber.lengthMm * pxPerMm
   const planY = floorY - chamber.widthMm * pxPerMm
-  const clearPx = clearanceMm * pxPerMm
   const gridMm = gridStepMm(pxPerMm, printer.system)
-  const slackMm = rod?.position === 'upright' ? uprightSlackMm(rod, chamber.waterDepthMm) : undefined
+  const slackMm = rod && isUpright ? uprightSlackMm(rod, chamber.waterDepthMm) : undefined
   const spare = slackMm === undefined ? undefined : describeSlack(slackMm, printer)
   const rodAt = rightX + gapPx / 2 + monoWidth(rodLabel, labelPx) / 2
   const rodTopY = floorY - (rod?.lengthMm ?? 0) * pxPerMm
@@ -69,7 +67,7 @@ export function ChamberDetail(props: ChamberDetailProps) {
   return (
     <DrawingSheet
       frame={frame}
-      title={`${chamber.name}, from the ${isFromSide ? 'side' : 'front'} and from above`}
+      title={`${chamber.name}, ${isFromSide ? 'side' : 'front'} and above`}
       description={[
         `${printer.size([chamber.lengthMm, chamber.widthMm, chamber.waterDepthMm])} along the tank, front to back and water depth.`,
         rod && describeRod(rod, chamber.name, chamber.waterDepthMm, printer),
@@ -79,65 +77,25 @@ export function ChamberDetail(props: ChamberDetailProps) {
         .join(' ')}
       widthPx={widthPx}
       heightPx={heightPx}
+      size={{ acrossPx: parts * mostPxPerMm, contentPx: highestMm * mostPxPerMm, betweenPx, abovePx, belowPx }}
       grid={{ px: gridMm * pxPerMm, x: leftX, y: floorY, label: `grid ${printer.length(gridMm)}` }}
       isInteractive={onEdit !== undefined || editHref !== undefined}
     >
-      <g aria-hidden="true">
-        <rect x={leftX} y={waterY} width={acrossMm * pxPerMm} height={floorY - waterY} className="fill-action-soft" />
-        <path
-          d={`M${leftX} ${waterY - 14}V${floorY}H${rightX}V${waterY - 14}`}
-          fill="none"
-          strokeWidth="2"
-          className="stroke-ink"
-        />
-        <line x1={leftX} x2={rightX} y1={waterY} y2={waterY} strokeWidth="1.5" className="stroke-action" />
-        <rect
-          x={planX}
-          y={planY}
-          width={planRight - planX}
-          height={floorY - planY}
-          strokeWidth="2"
-          className="fill-action-soft stroke-ink"
-        />
-        {clearPx * 2 < Math.min(planRight - planX, floorY - planY) && (
-          <rect
-            x={planX + clearPx}
-            y={planY + clearPx}
-            width={planRight - planX - 2 * clearPx}
-            height={floorY - planY - 2 * clearPx}
-            fill="none"
-            strokeWidth="1.5"
-            strokeDasharray="1.5 3"
-            className="stroke-ink-soft"
-          />
-        )}
-        {rod && placed && seen && (
-          <>
-            <RodShape
-              x={(leftX + rightX) / 2}
-              y={floorY - (seen.heightMm / 2) * pxPerMm}
-              lengthPx={seen.seenLengthMm * pxPerMm}
-              thickPx={rod.diameterMm * pxPerMm}
-              angleDeg={seen.seenAngleDeg}
-              verdict={rod.verdict}
-            />
-            <RodShape
-              x={(planX + planRight) / 2}
-              y={(planY + floorY) / 2}
-              lengthPx={placed.planLengthMm * pxPerMm}
-              thickPx={rod.diameterMm * pxPerMm}
-              angleDeg={placed.planAngleDeg}
-              verdict={rod.verdict}
-            />
-          </>
-        )}
-      </g>
+      <ChamberViews
+        water={{ x: leftX, y: waterY, width: rightX - leftX, height: floorY - waterY }}
+        plan={{ x: planX, y: planY, width: planRight - planX, height: floorY - planY }}
+        clearPx={clearanceMm * pxPerMm}
+        pxPerMm={pxPerMm}
+        rod={rod}
+        seen={seen}
+        placed={placed}
+      />
       <DimensionLine
         {...edits}
         axis="vertical"
         from={waterY}
         to={floorY}
-        at={leftX - 34}
+        {...besideEdge(leftX, -1, printer.length(chamber.waterDepthMm), floorY - waterY)}
         edge={leftX}
         label={printer.length(chamber.waterDepthMm)}
         name={`${chamber.name}, water depth`}
@@ -149,7 +107,7 @@ export function ChamberDetail(props: ChamberDetailProps) {
         axis="vertical"
         from={planY}
         to={floorY}
-        at={planRight + 34}
+        {...besideEdge(planRight, 1, printer.length(chamber.widthMm), floorY - planY)}
         edge={planRight}
         label={printer.length(chamber.widthMm)}
         name={`${chamber.name}, front to back`}
@@ -168,7 +126,7 @@ export function ChamberDetail(props: ChamberDetailProps) {
         status={status('lengthMm')}
         path={chamberPath(at, 'lengthMm')}
       />
-      {rod?.position === 'upright' && (
+      {isUpright && (
         <>
           <DimensionLine
             axis="vertical"
@@ -192,7 +150,7 @@ export function ChamberDetail(props: ChamberDetailProps) {
           </text>
         </>
       )}
-      {rod && rod.position !== 'upright' && (
+      {rod && !isUpright && (
         <text
           x={(leftX + rightX) / 2}
           y={floorY + 20}

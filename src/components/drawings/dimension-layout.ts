@@ -40,6 +40,21 @@ function around(boxes: readonly Box[]): Box {
   return { x: x - moreX / 2, y: y - moreY / 2, width: width + moreX, height: height + moreY }
 }
 
+function isBroken(text: string, lengthPx: number): boolean {
+  return text !== '' && lengthPx >= labelHeight + 20
+}
+
+/** Where a vertical line runs beside an edge so that its label keeps clear of it: -1 to the left, 1 to the right. */
+export function besideEdge(
+  edgePx: number,
+  direction: -1 | 1,
+  text: string,
+  lengthPx: number,
+): { readonly at: number; readonly side: LabelSide } {
+  const offset = isBroken(text, lengthPx) ? Math.max(34, monoWidth(text, labelPx) / 2 + 9) : 12
+  return { at: edgePx + direction * offset, side: direction < 0 ? 'before' : 'after' }
+}
+
 /** A horizontal line carries its label beside it; a vertical one in a gap, or beside it where it is too short for one. */
 export function layoutDimension({ axis, from, to, at }: Span, text: string, side: LabelSide): DimensionLayout {
   const [low, high] = [Math.min(from, to), Math.max(from, to)]
@@ -55,12 +70,12 @@ export function layoutDimension({ axis, from, to, at }: Span, text: string, side
     const line = { x: low, y: at - 5, width: high - low, height: 10 }
     return { stretches: [[low, high]], label, target: around([label, line]) }
   }
-  const isBroken = width > 0 && high - low >= labelHeight + 20
-  const x = isBroken ? at - width / 2 : side === 'before' ? at - 8 - width : at + 8
+  const hasGap = isBroken(text, high - low)
+  const x = hasGap ? at - width / 2 : side === 'before' ? at - 8 - width : at + 8
   const label = { x, y: middle - labelHeight / 2, width, height: labelHeight }
   const line = { x: at - 5, y: low, width: 10, height: high - low }
   const gap = labelHeight / 2 + 2
-  const stretches = isBroken
+  const stretches = hasGap
     ? ([
         [low, middle - gap],
         [middle + gap, high],

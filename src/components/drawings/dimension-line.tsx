@@ -11,6 +11,8 @@ export interface DimensionLineProps extends Span, DrawingEdits {
   readonly side?: LabelSide
   /** The edge that is measured, on the other axis; hairlines lead from it to the line. */
   readonly edge?: number
+  /** What the label stands on, to keep hairlines behind it from touching it. */
+  readonly ground?: 'sheet' | 'water'
   /** Setup path; without one the line cannot be edited. */
   readonly path?: string
 }
@@ -23,7 +25,21 @@ const looks = {
 
 /** A drawn measure: a line between slashed ends with its value. Its label never lies on what it measures. */
 export function DimensionLine(props: DimensionLineProps) {
-  const { axis, from, to, at, label, name, status, side = 'before', edge, path, onEdit, editHref } = props
+  const {
+    axis,
+    from,
+    to,
+    at,
+    label,
+    name,
+    status,
+    side = 'before',
+    edge,
+    ground = 'sheet',
+    path,
+    onEdit,
+    editHref,
+  } = props
   const { stretches, label: box, target } = layoutDimension({ axis, from, to, at }, label, side)
   const isHorizontal = axis === 'horizontal'
   const point = (along: number, across: number) => (isHorizontal ? `${along} ${across}` : `${across} ${along}`)
@@ -57,7 +73,9 @@ export function DimensionLine(props: DimensionLineProps) {
         textAnchor="middle"
         fontSize={labelPx}
         fontWeight={status === 'assumed' ? 400 : 600}
-        className={look.text}
+        strokeWidth="4"
+        paintOrder="stroke"
+        className={`${look.text} ${ground === 'water' ? 'stroke-water' : 'stroke-sheet'}`}
       >
         {label}
       </text>

@@ -7,8 +7,8 @@ export interface DrawingSheetProps {
   readonly description: string
   readonly widthPx: number
   readonly heightPx: number
-  /** How the height follows the width; without it the height is fixed. */
-  readonly size?: SheetSize
+  /** How the height follows the width. */
+  readonly size: SheetSize
   /** Spacing of the drafting grid and where a crossing lies. */
   readonly grid: { readonly px: number; readonly x: number; readonly y: number; readonly label: string }
   readonly isInteractive: boolean
@@ -27,7 +27,7 @@ export function DrawingSheet(props: DrawingSheetProps) {
           {title}
         </p>
         <div className="relative">
-          <SheetSizer heightPx={heightPx} {...(size && { size })} />
+          <SheetSizer size={size} />
           <svg
             role={isInteractive ? 'group' : 'img'}
             aria-label={title}
@@ -73,16 +73,18 @@ export function DrawingSheet(props: DrawingSheetProps) {
  * Holds the height open at every width with attributes alone (inline styles would need a laxer content security policy),
  * so that nothing on the page moves when the drawing is laid out anew for its true width.
  */
-function SheetSizer({ heightPx, size }: Pick<DrawingSheetProps, 'heightPx' | 'size'>) {
-  if (!size) return <svg aria-hidden="true" width="1" height={heightPx} className="block" />
+function SheetSizer({ size }: Pick<DrawingSheetProps, 'size'>) {
   return (
     <div aria-hidden="true" className="px-[66px]">
       <svg width="1" height={size.abovePx} className="block" />
-      <svg
-        width={size.acrossPx}
-        viewBox={`0 0 ${size.acrossPx} ${size.contentPx}`}
-        className="mx-auto block h-auto max-w-full"
-      />
+      <div className="flex justify-center">
+        <svg
+          width={size.acrossPx}
+          viewBox={`0 0 ${size.acrossPx} ${size.contentPx}`}
+          className="block h-auto max-w-full min-w-0 shrink"
+        />
+        {size.betweenPx && <svg width={size.betweenPx} height="1" className="block shrink-0" />}
+      </div>
       <svg width="1" height={size.belowPx} className="block" />
     </div>
   )

@@ -130,7 +130,7 @@ export function Gauge(props: GaugeProps) {
           </text>
         )}
         {value === null && (
-          <text x="50%" y={axisY - 19} textAnchor="middle" fontSize="12" aria-hidden="true" className="fill-unknown">
+          <text x="0" y={axisY - 19} fontSize="12" aria-hidden="true" className="fill-unknown">
             {valueText}
           </text>
         )}

@@ -23,3 +23,20 @@ export function pickMark(
   const at = pile.findIndex((mark) => mark.slug === selected)
   return (at < 0 ? nearest : pile[(at + 1) % pile.length])?.slug
 }
+
+/** The mark that an arrow key, Home or End leads to from the selected one, lowest value first; other keys: none. */
+export function stepMark(slugs: readonly string[], selected: string | null, key: string): string | undefined {
+  const at = selected === null ? -1 : slugs.indexOf(selected)
+  const last = slugs.length - 1
+  const next = Math.min(last, at + 1)
+  const previous = at < 0 ? last : Math.max(0, at - 1)
+  const targets: Readonly<Record<string, number>> = {
+    ArrowRight: next,
+    ArrowDown: next,
+    ArrowLeft: previous,
+    ArrowUp: previous,
+    Home: 0,
+    End: last,
+  }
+  return slugs[targets[key] ?? -1]
+}

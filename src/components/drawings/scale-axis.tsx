@@ -15,15 +15,16 @@ export interface ScaleAxisProps {
 }
 
 const fontPx = 12
-/** Far enough apart that labels keep clear of each other on a phone even before the width is measured. */
-const leastSpacingPx = 72
+const leastSpacingPx = 52
+/** Few enough that their labels keep clear of each other on a phone, should its width never be measured. */
+const mostTicks = 9
 
 /** A ruler in the person's unit. Positions are percentages, so it stretches with its drawing without scripts. */
 export function ScaleAxis({ domain, unit, printer, widthPx, y, hasLabels = true }: ScaleAxisProps) {
   const [low, high] = [toShown(domain[0], unit, printer.system), toShown(domain[1], unit, printer.system)]
   const label = (value: number) => printer.number(value, unit, { exact: true })
   const widest = Math.max(...domain.map((value) => monoWidth(printer.measure(value, unit), fontPx)))
-  const most = Math.max(3, Math.floor(widthPx / Math.max(leastSpacingPx, widest + 18)))
+  const most = Math.min(mostTicks, Math.max(3, Math.floor(widthPx / Math.max(leastSpacingPx, widest + 12))))
   const ticks = niceTicks(low, high, most, printer.unitLabel(unit) === 'in')
   const place = (shown: number) => percent(placePercent(fromShown(shown, unit, printer.system), domain))
   const first = ticks.major[0]

@@ -48,6 +48,7 @@ export function SectionChain({ edits, printer, rod, room, box, floorY, pxPerMm, 
       to={floorY}
       at={depthAt}
       edge={edge}
+      ground="water"
       label={depthLabel}
       name={depth.name}
       status={depth.status}
@@ -94,7 +95,16 @@ export function SectionChain({ edits, printer, rod, room, box, floorY, pxPerMm, 
   return (
     <>
       {line}
-      <DimensionLine axis="vertical" from={rodTop} to={floorY} at={rodAt} label={rodLabel} name="Rod" status="plain" />
+      <DimensionLine
+        axis="vertical"
+        from={rodTop}
+        to={floorY}
+        at={rodAt}
+        label={rodLabel}
+        name="Rod"
+        ground="water"
+        status="plain"
+      />
       <DimensionLine axis="vertical" from={box.y} to={rodTop} at={rodAt} label="" name="Spare" status="plain" />
       {slack && (
         <text

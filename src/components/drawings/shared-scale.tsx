@@ -2,13 +2,14 @@ import { useId, useState, type KeyboardEvent, type MouseEvent } from 'react'
 import type { Mark, Scale } from '#shared/engine/types'
 import type { Printer } from '#shared/units/print'
 import { verdictWords } from '../../lib/verdicts'
-import { assignLanes } from './assign-lanes'
 import { MarkPin } from './mark-pin'
 import { ZoneBand, ZonePatterns } from './patterns'
-import { pickMark } from './pick-mark'
+import { pickMark, stepMark } from './pick-mark'
+import { pinMarks, standingMarks } from './place-marks'
 import { ScaleAxis } from './scale-axis'
 import { fitDomain, percent, placePercent, placeZone } from './scale-domain'
 import { findScaleUnit } from './scale-unit'
+import { monoWidth, shorten } from './text-width'
 import { useContainerWidth } from './use-container-width'
 
 export interface SharedScaleProps {
@@ -27,9 +28,7 @@ export interface SharedScaleProps {
 }
 
 const axisY = 70
-const lanes = 5
-const lanePx = 9
-const pinPx = (lane: number) => 12 + lane * lanePx
+const labelPx = 12
 
 /** One deciding check as a ruler with every candidate standing on it. */
 export function SharedScale(props: SharedScaleProps) {
@@ -39,28 +38,16 @@ export function SharedScale(props: SharedScaleProps) {
   const [hovered, setHovered] = useState<string | null>(null)
   const unit = findScaleUnit(scale.unit)
 
-  const known = marks
-    .flatMap((mark) => {
-      const value = mark.values[scale.key]
-      return typeof value === 'number' ? [{ ...mark, value }] : []
-    })
-    .sort((a, b) => a.value - b.value)
+  const known = standingMarks(marks, scale.key)
   const domain = fitDomain([...known.map((mark) => mark.value), ...scale.limits])
-  const xOf = (value: number) => (placePercent(value, domain) / 100) * widthPx
-  const laneOf = assignLanes(
-    known.map((mark) => xOf(mark.value)),
-    lanePx,
-    lanes,
-  )
-  const placed = known.map((mark, at) => ({ ...mark, xPx: xOf(mark.value), yPx: axisY - pinPx(laneOf[at] ?? 0) }))
+  const pinned = pinMarks(known, domain, widthPx)
 
   const lit = hovered ?? pointed ?? selected
   const optionId = (slug: string) => `${id}-${slug}`
-  const describe = (mark: (typeof placed)[number]) => `${nameOf(mark.slug)}, ${printer.measure(mark.value, unit)}`
-
   const findAt = (event: MouseEvent, from: string | null) => {
     const frame = event.currentTarget.getBoundingClientRect()
-    return pickMark(placed, event.clientX - frame.left, event.clientY - frame.top, from)
+    const heads = pinned.map(({ slug, xPx, pinPx }) => ({ slug, xPx, yPx: axisY - pinPx }))
+    return pickMark(heads, event.clientX - frame.left, event.clientY - frame.top, from)
   }
   const point = (slug: string | null) => {
     if (slug === hovered) return
@@ -68,31 +55,25 @@ export function SharedScale(props: SharedScaleProps) {
     onPoint?.(slug)
   }
   const pickByKey = (event: KeyboardEvent) => {
-    const at = placed.findIndex((mark) => mark.slug === selected)
-    const last = placed.length - 1
-    const targets: Record<string, number> = {
-      ArrowRight: Math.min(last, at + 1),
-      ArrowLeft: at < 0 ? last : Math.max(0, at - 1),
-      ArrowDown: Math.min(last, at + 1),
-      ArrowUp: at < 0 ? last : Math.max(0, at - 1),
-      Home: 0,
-      End: last,
-    }
-    const target = placed[targets[event.key] ?? -1]
-    if (!target) return
+    const target = stepMark(
+      pinned.map((mark) => mark.slug),
+      selected,
+      event.key,
+    )
+    if (target === undefined) return
     event.preventDefault()
-    onPick?.(target.slug)
+    onPick?.(target)
   }
 
   const unplaced = marks.length - known.length
   const summary = `${scale.label}, ${scale.limitText}: ${known.length} on the scale${unplaced > 0 ? `, ${unplaced} without a value` : ''}`
-  const shown = placed.find((mark) => mark.slug === lit)
+  const shown = pinned.find((mark) => mark.slug === lit)
   const list = onPick
     ? ({
         role: 'listbox',
         tabIndex: 0,
         'aria-label': summary,
-        'aria-activedescendant': placed.some((mark) => mark.slug === selected) ? optionId(selected ?? '') : undefined,
+        'aria-activedescendant': pinned.some((mark) => mark.slug === selected) ? optionId(selected ?? '') : undefined,
         onKeyDown: pickByKey,
       } as const)
     : ({ role: 'img', 'aria-label': summary } as const)
@@ -139,22 +120,29 @@ export function SharedScale(props: SharedScaleProps) {
               />
             ))}
             <g {...list}>
-              {placed.map((mark, at) => (
-                <svg key={mark.slug} x={percent(placePercent(mark.value, domain))} y={axisY} overflow="visible">
+              {pinned.map((mark) => (
+                <svg key={mark.slug} x={percent(mark.share)} y={axisY} overflow="visible">
                   <g
                     id={optionId(mark.slug)}
                     {...(onPick && {
                       role: 'option',
                       'aria-selected': mark.slug === selected,
-                      'aria-label': `${describe(mark)}, ${verdictWords[mark.verdict].toLowerCase()}`,
+                      'aria-label': `${nameOf(mark.slug)}, ${printer.measure(mark.value, unit)}, ${verdictWords[mark.verdict].toLowerCase()}`,
                     })}
                   >
-                    <MarkPin verdict={mark.verdict} heightPx={pinPx(laneOf[at] ?? 0)} isLit={mark.slug === lit} />
+                    <MarkPin verdict={mark.verdict} heightPx={mark.pinPx} isLit={mark.slug === lit} />
                   </g>
                 </svg>
               ))}
             </g>
-            {shown && <LitLabel text={describe(shown)} share={placePercent(shown.value, domain)} />}
+            {shown && (
+              <LitLabel
+                name={nameOf(shown.slug)}
+                value={printer.measure(shown.value, unit)}
+                share={shown.share}
+                widthPx={widthPx}
+              />
+            )}
           </svg>
         </div>
       </div>
@@ -162,13 +150,26 @@ export function SharedScale(props: SharedScaleProps) {
   )
 }
 
-function LitLabel({ text, share }: { readonly text: string; readonly share: number }) {
+interface LitLabelProps {
+  readonly name: string
+  readonly value: string
+  readonly share: number
+  readonly widthPx: number
+}
+
+function LitLabel({ name, value, share, widthPx }: LitLabelProps) {
+  const most = Math.floor(widthPx / monoWidth('0', labelPx)) - value.length - 3
+  const text = `${shorten(name, most)} · ${value}`
+  // Kept inside the scale: centred over its mark unless an end is nearer than half its length.
+  const half = monoWidth(text, labelPx) / 2
+  const x = (share / 100) * widthPx
+  const anchor = x < half ? 'start' : x > widthPx - half ? 'end' : 'middle'
   return (
     <text
-      x={percent(share)}
+      x={anchor === 'start' ? 0 : anchor === 'end' ? '100%' : percent(share)}
       y="11"
-      textAnchor={share < 33 ? 'start' : share > 67 ? 'end' : 'middle'}
-      fontSize="12"
+      textAnchor={anchor}
+      fontSize={labelPx}
       fontWeight="700"
       strokeWidth="5"
       paintOrder="stroke"

@@ -25,8 +25,11 @@ export interface TankLayout {
 
 /** How the sheet's height follows its width, so that the page can reserve it before any script has measured. */
 export interface SheetSize {
+  /** Size of what is to scale where there is room for all of it. */
   readonly acrossPx: number
   readonly contentPx: number
+  /** Between the parts that are to scale: does not shrink with them. */
+  readonly betweenPx?: number
   readonly abovePx: number
   readonly belowPx: number
 }

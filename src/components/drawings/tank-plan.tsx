@@ -2,10 +2,10 @@ import type { Printer } from '#shared/units/print'
 import { assignRows } from './assign-rows'
 import { describeTank } from './describe-tank'
 import { DimensionLine } from './dimension-line'
-import { labelPx } from './dimension-layout'
+import { besideEdge, labelPx } from './dimension-layout'
 import { DrawingSheet } from './drawing-sheet'
-import { EditTarget } from './edit-target'
 import { PlanChamber } from './plan-chamber'
+import { PlanDisplay } from './plan-display'
 import { placeRod } from './place-rod'
 import { RodShape } from './rod-shape'
 import { activeChamber, chamberPath, chamberStartsMm, type DrawingEdits, type TankDrawing } from './tank-drawing'
@@ -74,42 +74,7 @@ export function TankPlan({ drawing, printer, onEdit, editHref }: TankViewProps) 
         className="fill-sheet stroke-ink"
       />
       <rect {...inside} strokeWidth="1" className="fill-water stroke-ink-soft" />
-      {display.height > 30 && (
-        <text
-          x={display.x + display.width / 2}
-          y={display.y + display.height / 2 + 4}
-          textAnchor="middle"
-          fontSize="13"
-          aria-hidden="true"
-          className="fill-ink-soft font-text"
-        >
-          display
-        </text>
-      )}
-      {chambers.length === 0 && onEdit && (
-        <EditTarget
-          {...edits}
-          path="tank.chambers"
-          name="Add a rear chamber"
-          box={{ x: inside.x, y: inside.y, width: inside.width, height: 26 }}
-        >
-          <path
-            d={`M${inside.x} ${inside.y + 26}h${inside.width}`}
-            strokeWidth="1.5"
-            strokeDasharray="4 3"
-            className="stroke-ink-soft"
-          />
-          <text
-            x={inside.x + inside.width / 2}
-            y={inside.y + 17}
-            textAnchor="middle"
-            fontSize="13"
-            className="fill-action font-text"
-          >
-            add a rear chamber
-          </text>
-        </EditTarget>
-      )}
+      <PlanDisplay display={display} inside={inside} canAddChamber={chambers.length === 0} edits={edits} />
       {chambers.map((chamber, at) => {
         const box = boxes[at]
         return (
@@ -136,7 +101,8 @@ export function TankPlan({ drawing, printer, onEdit, editHref }: TankViewProps) 
               from={box.x}
               to={box.x + box.width}
               at={topPx - 12 - (rows[at] ?? 0) * rowPx}
-              edge={topPx}
+              // Hairlines from an upper row stop short of the labels below it.
+              edge={rows[at] ? topPx - 4 - (rows[at] ?? 0) * rowPx : topPx}
               label={printer.length(chamber.lengthMm)}
               name={`${chamber.name}, along the tank`}
               status={status(chamberPath(at, 'lengthMm'))}
@@ -151,7 +117,7 @@ export function TankPlan({ drawing, printer, onEdit, editHref }: TankViewProps) 
           axis="vertical"
           from={activeBox.y}
           to={activeBox.y + activeBox.height}
-          at={leftPx - 34}
+          {...besideEdge(leftPx, -1, printer.length(chambers[active]?.widthMm ?? 0), activeBox.height)}
           edge={activeBox.x}
           label={printer.length(chambers[active]?.widthMm ?? 0)}
           name={`${chambers[active]?.name}, front to back`}
@@ -176,7 +142,7 @@ export function TankPlan({ drawing, printer, onEdit, editHref }: TankViewProps) 
         axis="vertical"
         from={topPx}
         to={topPx + depthPx}
-        at={leftPx + lengthPx + 34}
+        {...besideEdge(leftPx + lengthPx, 1, printer.length(drawing.outerWidthMm), depthPx)}
         edge={leftPx + lengthPx}
         label={printer.length(drawing.outerWidthMm)}
         name="Outside, front to back"

@@ -1,4 +1,5 @@
 import { describeTank } from './describe-tank'
+import { besideEdge } from './dimension-layout'
 import { DimensionLine } from './dimension-line'
 import { DrawingSheet } from './drawing-sheet'
 import { placeRod } from './place-rod'
@@ -144,7 +145,7 @@ export function TankSection({ drawing, printer, onEdit, editHref }: TankViewProp
         axis="vertical"
         from={waterY}
         to={floorY}
-        at={leftPx - 34}
+        {...besideEdge(leftPx, -1, printer.length(drawing.waterLineMm), floorY - waterY)}
         edge={leftPx}
         label={printer.length(drawing.waterLineMm)}
         name="Water line above the floor inside"
@@ -156,7 +157,7 @@ export function TankSection({ drawing, printer, onEdit, editHref }: TankViewProp
         axis="vertical"
         from={topY}
         to={bottomY}
-        at={right + 34}
+        {...besideEdge(right, 1, printer.length(drawing.outerHeightMm), tallPx)}
         edge={right}
         label={printer.length(drawing.outerHeightMm)}
         name="Outside height"

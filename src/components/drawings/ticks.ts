@@ -25,11 +25,15 @@ function subdivide(step: number, isInches: boolean): number {
   return leading === 2 || (isInches && step === 1) ? 4 : 5
 }
 
-/** Round ticks from `from` to `to`, at most `most` labelled ones (at least two wherever the span allows). */
+/** Round ticks from `from` to `to`: the finest step of 1, 2 or 5 times a power of ten with at most `most` labels. */
 export function niceTicks(from: number, to: number, most: number, isInches = false): Ticks {
   if (!(to > from)) return { step: 1, major: [from], minor: [] }
-  const step = niceStep((to - from) / Math.max(1, most - 1))
-  const major = multiples(step, from, to)
+  let step = niceStep((to - from) / Math.max(1, most))
+  let major = multiples(step, from, to)
+  while (major.length > Math.max(1, most)) {
+    step = niceStep(step * 1.5)
+    major = multiples(step, from, to)
+  }
   const minor = multiples(step / subdivide(step, isInches), from, to)
   return { step, major, minor: minor.filter((value) => !major.includes(value)) }
 }

@@ -1,4 +1,4 @@
-import { useMemo, type ReactNode } from 'react'
+import { useEffect, useMemo, useRef, type ReactNode } from 'react'
 import { Popover as Radix } from 'radix-ui'
 
 export interface PopoverProps {
@@ -13,6 +13,11 @@ export interface PopoverProps {
 /** Opens beside any element, moves focus inside, and gives it back to that element when it closes. */
 export function Popover({ anchor, onClose, label, children }: PopoverProps) {
   const anchorRef = useMemo(() => ({ current: anchor }), [anchor])
+  // By the time focus is given back the caller has already cleared the anchor.
+  const lastAnchor = useRef<Element | null>(null)
+  useEffect(() => {
+    if (anchor) lastAnchor.current = anchor
+  }, [anchor])
   return (
     <Radix.Root open={anchor !== null} onOpenChange={(isOpen) => !isOpen && onClose()}>
       {/* The ref is read only while open, when it holds an element. */}
@@ -24,7 +29,8 @@ export function Popover({ anchor, onClose, label, children }: PopoverProps) {
           collisionPadding={12}
           onCloseAutoFocus={(event) => {
             event.preventDefault()
-            if (anchor instanceof HTMLElement || anchor instanceof SVGElement) anchor.focus()
+            const last = lastAnchor.current
+            if (last instanceof HTMLElement || last instanceof SVGElement) last.focus()
           }}
           className="z-10 w-72 max-w-[calc(100vw-1.5rem)] rounded-ui border-[1.5px] border-ink bg-sheet p-4 text-ink"
         >
