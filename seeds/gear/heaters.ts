@@ -1,0 +1,481 @@
+import { gal, inch } from '../amounts'
+import { createFamily, estimatedFrom, measuredTo, remeasure, restate } from '../family'
+import { british, continental, northAmerica, wideRange } from '../mains'
+
+const rated = ['ratedVolumeMinL', 'ratedVolumeMaxL'] as const
+const rod = ['powerW', 'lengthMm', 'diameterMm', ...rated] as const
+const glass = {
+  form: 'glass-rod',
+  thermostat: 'built-in',
+  orientation: 'any',
+  madeFor: ['reef', 'marine-fish', 'freshwater'],
+}
+const polymer = { ...glass, form: 'polymer-rod' }
+const titanium = { form: 'titanium-rod', orientation: 'any', madeFor: ['reef', 'marine-fish', 'freshwater'] }
+const bare = { ...titanium, thermostat: 'external-needed' }
+const complete = { ...titanium, thermostat: 'external-included' }
+
+const glassRods = [
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Hearthbrine',
+    line: 'Ember',
+    date: '2024-02-12',
+    author: 'saltmarsh_jo',
+    gtinFrom: 10100,
+    common: { ...glass, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '25 W': [25, 152, 23, gal(2), gal(6), 110],
+      '50 W': [50, 183, 23, gal(5), gal(13), 140],
+      '75 W': [75, 214, 23, gal(10), gal(20), 170],
+      '100 W': [100, 245, 23, gal(15), gal(27), 200],
+      '150 W': [150, 290, 23, gal(25), gal(40), 245],
+      '200 W': [200, 322, 23, gal(35), gal(54), 275],
+      '250 W': [250, 352, 23, gal(45), gal(66), 305],
+      '300 W': [300, 384, 23, gal(55), gal(80), 335],
+    },
+    later: {
+      '50 W': [
+        remeasure('2024-09-02', 'tess_reefs', 'calipers, two pieces', { lengthMm: [185, 1], diameterMm: [23.4, 0.3] }),
+      ],
+      '100 W': [
+        remeasure('2024-09-02', 'tess_reefs', 'calipers, one piece', { lengthMm: [247, 1], diameterMm: [23.5, 0.3] }),
+        remeasure('2025-01-19', 'driploop', 'plug-in meter, five minutes after a cold start', { powerW: [97, 3] }),
+      ],
+      '150 W': [remeasure('2025-05-28', 'caliper_crab', 'steel rule and photo', { lengthMm: [293, 1] })],
+    },
+    notes: { '25 W': 'The dial turns easily; check its setting after cleaning.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Hearthbrine',
+    line: 'Ember EU',
+    date: '2024-02-12',
+    author: 'saltmarsh_jo',
+    gtinFrom: 10120,
+    common: { ...glass, ...continental, cordMm: 1500 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '25 W': [25, 152, 23, 10, 25, 110],
+      '50 W': [50, 183, 23, 20, 50, 140],
+      '75 W': [75, 214, 23, 40, 75, 170],
+      '100 W': [100, 245, 23, 60, 100, 200],
+      '150 W': [150, 290, 23, 100, 150, 245],
+      '200 W': [200, 322, 23, 130, 200, 275],
+      '300 W': [300, 384, 23, 200, 300, 335],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Thermaquill',
+    line: 'Reed',
+    date: '2024-05-06',
+    author: 'nanobrine',
+    common: { ...glass, ...northAmerica, cordMm: 1500, orientation: 'vertical' },
+    columns: rod,
+    rows: {
+      '25 W': [25, 148, 16.5, gal(2), gal(5)],
+      '50 W': [50, 196, 16.5, gal(5), gal(10)],
+      '75 W': [75, 242, 16.5, gal(8), gal(18)],
+      '100 W': [100, 288, 18, gal(12), gal(25)],
+      '150 W': [150, 330, 18, gal(20), gal(38)],
+    },
+    backing: { diameterMm: measuredTo(0.3, 'calipers across the cap') },
+    later: {
+      '100 W': [remeasure('2025-11-08', 'oolite_owl', 'calipers on three pieces', { lengthMm: [286, 1] })],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Pelagane',
+    line: 'Quartz',
+    date: '2024-06-17',
+    author: 'gallon_goat',
+    gtinFrom: 10140,
+    common: { ...glass, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '50': [50, inch(7.25), inch(1.1), gal(5), gal(15), null],
+      '75': [75, inch(8.5), inch(1.1), gal(10), gal(20), null],
+      '100': [100, inch(9.75), inch(1.1), gal(15), gal(30), inch(7)],
+      '150': [150, inch(11), inch(1.1), gal(25), gal(45), inch(8)],
+      '200': [200, inch(12.25), inch(1.1), gal(40), gal(60), inch(9)],
+      '250': [250, inch(13.25), inch(1.1), gal(50), gal(70), inch(10)],
+      '300': [300, inch(14.5), inch(1.1), gal(60), gal(90), inch(11)],
+    },
+    later: {
+      '200': [remeasure('2025-02-23', 'wet_sleeves', 'tape, cap to tip', { lengthMm: [309, 2] })],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Saltquill',
+    line: 'Warden',
+    date: '2024-08-21',
+    author: 'quietpump',
+    common: { ...glass, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '100 W': [100, 262, 38, gal(15), gal(30), 215],
+      '150 W': [150, 300, 38, gal(25), gal(45), 250],
+      '200 W': [200, 328, 38, gal(40), gal(60), 280],
+      '250 W': [250, 360, 40, gal(50), gal(75), 310],
+      '300 W': [300, 395, 42, gal(60), gal(90), 345],
+    },
+    notes: { '150 W': 'The guard comes off with two clips; without it the rod is 24 mm thick.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Halcyrene',
+    line: 'Slate',
+    date: '2024-01-09',
+    author: 'brackish_bea',
+    discontinued: 'all',
+    common: { form: 'glass-rod', ...northAmerica, madeFor: ['reef', 'freshwater'] },
+    columns: [...rod, 'thermostat', 'orientation'],
+    rows: {
+      '50': [50, 200, 25, null, gal(15), 'built-in', 'any'],
+      '75': [75, 232, 25, null, gal(20), 'built-in', null],
+      '100': [100, 268, 25, null, gal(29), 'built-in', 'any'],
+      '150': [150, null, 25, null, gal(40), 'built-in', 'any'],
+      '200': [200, 338, 25, null, gal(55), null, null],
+    },
+    later: {
+      '100': [
+        remeasure('2026-01-14', 'shelf_of_salt', 'calipers, an old piece', {
+          lengthMm: [270, 1],
+          minImmersionMm: [221, 2],
+        }),
+      ],
+    },
+    notes: { '100': 'Gone from its maker’s list since the spring of 2024.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Brackenfin',
+    line: 'Rush',
+    date: '2025-03-03',
+    author: 'two_left_fins',
+    common: { ...glass, ...northAmerica, orientation: 'horizontal', cordMm: 1800 },
+    columns: rod,
+    rows: {
+      '75': [75, 225, 27, gal(10), gal(20)],
+      '100': [100, 255, 27, gal(15), gal(30)],
+      '150': [150, 310, 27, gal(25), gal(40)],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Wrasselund',
+    line: 'Brook',
+    date: '2024-11-25',
+    author: 'ppt35',
+    common: { ...glass, ...northAmerica, madeFor: ['freshwater', 'plants'], cordMm: 1500 },
+    columns: rod,
+    rows: {
+      '50': [50, 190, 24, gal(5), gal(15)],
+      '100': [100, 250, 24, gal(15), gal(30)],
+      '200': [200, 325, 24, gal(40), gal(60)],
+    },
+    notes: { '100': 'Its maker’s sheet says fresh water only: the cap’s seal is not made for salt.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Gobyhurst',
+    line: 'Nip',
+    date: '2025-07-14',
+    author: 'nanobrine',
+    common: { form: 'glass-rod', ...northAmerica, madeFor: ['reef', 'freshwater'], orientation: 'any' },
+    columns: [...rod, 'thermostat'],
+    rows: {
+      'preset 25': [25, 138, 21, null, gal(5), 'built-in'],
+      'preset 50': [50, 170, 21, null, gal(10), 'built-in'],
+      'preset 75': [75, null, 21, null, gal(18), null],
+      'preset 100': [100, 221, 21, null, null, null],
+    },
+    backing: { diameterMm: estimatedFrom('scaled from the picture on the box') },
+  }),
+]
+
+const polymerRods = [
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Kindlewrack',
+    line: 'Moss',
+    date: '2024-03-18',
+    author: 'rimless_rae',
+    gtinFrom: 10200,
+    common: { ...polymer, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'minImmersionMm', 'orientation'],
+    rows: {
+      '50 W': [50, 218, 33, gal(5), gal(15), 165, 'any'],
+      '75 W': [75, 234, 33, gal(10), gal(20), 180, 'any'],
+      '100 W': [100, 252, 33, gal(15), gal(30), 198, 'any'],
+      '150 W': [150, 288, 33, gal(25), gal(45), 234, 'any'],
+      '200 W': [200, 305, 33, gal(35), gal(60), 250, 'vertical'],
+      '250 W': [250, 330, 33, gal(45), gal(70), 275, 'vertical'],
+      '300 W': [300, 352, 33, gal(55), gal(85), 297, 'vertical'],
+    },
+    later: {
+      '75 W': [
+        remeasure('2025-04-11', 'caliper_crab', 'calipers, cap included', {
+          diameterMm: [34.1, 0.3],
+          lengthMm: [235, 1],
+        }),
+      ],
+      '100 W': [
+        restate('2025-01-07', 'rimless_rae', 'New issue of the sheet: a shorter rod', {
+          lengthMm: 249,
+          minImmersionMm: 195,
+        }),
+        remeasure('2025-04-11', 'caliper_crab', 'calipers, cap included', {
+          diameterMm: [34, 0.3],
+          lengthMm: [250, 1],
+        }),
+      ],
+      '200 W': [
+        remeasure('2025-10-30', 'driploop', 'calipers and plug-in meter', { lengthMm: [306, 1], powerW: [203, 4] }),
+      ],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Kindlewrack',
+    line: 'Moss UK',
+    date: '2024-03-18',
+    author: 'rimless_rae',
+    common: { ...polymer, ...british, cordMm: 1700 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '50 W': [50, 218, 33, 20, 60, 165],
+      '100 W': [100, 252, 33, 60, 115, 198],
+      '150 W': [150, 288, 33, 95, 170, 234],
+      '200 W': [200, 305, 33, 130, 225, 250],
+      '300 W': [300, 352, 33, 210, 320, 297],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Vantrosse',
+    line: 'Calid',
+    date: '2024-10-07',
+    author: 'oolite_owl',
+    gtinFrom: 10220,
+    common: { ...polymer, ...northAmerica, cordMm: 1900 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '50': [50, 172, 36, gal(6), gal(13), 120],
+      '75': [75, 188, 36, gal(10), gal(20), 136],
+      '100': [100, 205, 36, gal(13), gal(27), 152],
+      '150': [150, 236, 36, gal(22), gal(40), 184],
+      '200': [200, 262, 36, gal(32), gal(53), 210],
+      '300': [300, 318, 36, gal(48), gal(80), 265],
+    },
+    discontinued: ['75'],
+    later: {
+      '100': [
+        remeasure('2025-06-20', 'tess_reefs', 'calipers on two pieces', {
+          lengthMm: [206, 1],
+          diameterMm: [36.4, 0.3],
+        }),
+      ],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Vantrosse',
+    line: 'Calid 230',
+    date: '2024-10-07',
+    author: 'oolite_owl',
+    common: { ...polymer, ...continental, cordMm: 1500 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '50': [50, 172, 36, 25, 50, 120],
+      '100': [100, 205, 36, 50, 100, 152],
+      '150': [150, 236, 36, 80, 150, 184],
+      '200': [200, 262, 36, 120, 200, 210],
+      '300': [300, 318, 36, 180, 300, 265],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Thermaquill',
+    line: 'Pebble',
+    date: '2025-02-10',
+    author: 'nanobrine',
+    common: { ...polymer, ...wideRange, cordMm: 1400, minImmersionMm: 100 },
+    columns: ['powerW', 'lengthMm', 'diameterMm', 'ratedVolumeMaxL'],
+    rows: {
+      '25': [25, 122, 30, 22],
+      '50': [50, 134, 32, 45],
+      '75': [75, 150, 34, 70],
+    },
+    notes: { '50': 'A self-limiting element on any mains; its maker rates all three voltages at the same power.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Murrelo',
+    line: 'Tally',
+    date: '2025-09-15',
+    author: 'gallon_goat',
+    common: { ...polymer, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'orientation'],
+    rows: {
+      '50': [50, 178, 28, gal(5), gal(13), 'any'],
+      '100': [100, 228, 28, gal(14), gal(28), 'any'],
+      '150': [150, 302, 28, gal(24), gal(42), 'any'],
+      '200': [200, 318, 28, gal(34), gal(55), null],
+      // The power is printed on neither the piece nor the box.
+      travel: [null, 160, 28, null, gal(10), 'any'],
+    },
+  }),
+]
+
+const titaniumRods = [
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Warmskerry',
+    line: 'Strand',
+    date: '2024-04-22',
+    author: 'kelp_and_calipers',
+    gtinFrom: 10300,
+    common: { ...bare, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '50 W': [50, 165, 19, gal(4), gal(13), 130],
+      '100 W': [100, 210, 19, gal(13), gal(30), 175],
+      '150 W': [150, 250, 19, gal(25), gal(45), 215],
+      '200 W': [200, 295, 19, gal(35), gal(60), 260],
+      '300 W': [300, 345, 19, gal(55), gal(90), 310],
+      '500 W': [500, 420, 22, gal(90), gal(150), 385],
+    },
+    later: {
+      '100 W': [
+        remeasure('2024-12-15', 'driploop', 'calipers; cold rod on a plug-in meter', {
+          lengthMm: [212, 1],
+          powerW: [104, 3],
+        }),
+      ],
+      '150 W': [remeasure('2025-08-03', 'tess_reefs', 'calipers', { lengthMm: [251, 1], diameterMm: [19.1, 0.2] })],
+      '500 W': [remeasure('2025-08-03', 'tess_reefs', 'tape', { lengthMm: [417, 2] })],
+    },
+    notes: { '100 W': 'Has no thermostat of its own: it needs a separate temperature controller.' },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Warmskerry',
+    line: 'Strand C',
+    date: '2024-04-22',
+    author: 'kelp_and_calipers',
+    common: { ...complete, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '100 W': [100, 210, 19, gal(13), gal(30), 175],
+      '150 W': [150, 250, 19, gal(25), gal(45), 215],
+      '200 W': [200, 295, 19, gal(35), gal(60), 260],
+      '300 W': [300, 345, 19, gal(55), gal(90), 310],
+      '500 W': [500, 420, 22, gal(90), gal(150), 385],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Thermaquill',
+    line: 'Column',
+    date: '2024-07-01',
+    author: 'quietpump',
+    gtinFrom: 10320,
+    common: { ...bare, ...northAmerica, cordMm: 1800 },
+    columns: rod,
+    rows: {
+      '50': [50, 196, 15, null, gal(15)],
+      '100': [100, 262, 15, gal(10), gal(30)],
+      '150': [150, 308, 15, gal(20), gal(45)],
+      '200': [200, 340, 15, gal(30), gal(60)],
+      '250': [250, 372, 16, gal(40), gal(75)],
+      '300': [300, 405, 16, gal(50), gal(90)],
+    },
+    backing: { diameterMm: measuredTo(0.2, 'calipers at the weld') },
+    discontinued: ['250'],
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Tarnwyke',
+    line: 'Torrid',
+    date: '2024-12-02',
+    author: 'caliper_crab',
+    gtinFrom: 10340,
+    common: { ...titanium, thermostat: 'built-in', ...northAmerica, cordMm: 1800 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '75': [75, 194, 28, gal(10), gal(20), 150],
+      '100': [100, 208, 28, gal(15), gal(28), 164],
+      '150': [150, 232, 28, gal(22), gal(42), 188],
+      '200': [200, 256, 28, gal(35), gal(55), 212],
+      '250': [250, 280, 28, gal(45), gal(70), 236],
+    },
+    later: {
+      '100': [
+        remeasure('2025-03-29', 'saltmarsh_jo', 'calipers, one piece', { lengthMm: [209, 1], diameterMm: [28.3, 0.3] }),
+        remeasure('2025-12-06', 'wet_sleeves', 'plug-in meter', { powerW: [99, 2] }),
+      ],
+      '75': [
+        remeasure('2025-03-29', 'saltmarsh_jo', 'calipers, one piece', { lengthMm: [194, 1], diameterMm: [28.2, 0.3] }),
+      ],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Emberfathom',
+    line: 'Tinder',
+    date: '2025-01-13',
+    author: 'ppt35',
+    common: { ...bare, ...british, cordMm: 1900 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '100': [100, 226, 17, 50, 110, 180],
+      '200': [200, 302, 17, 110, 220, 255],
+      '300': [300, 362, 17, 180, 330, 315],
+      '500': [500, 418, 20, 300, 550, 370],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Emberfathom',
+    line: 'Tinder Complete',
+    date: '2025-01-13',
+    author: 'ppt35',
+    common: { ...complete, ...british, cordMm: 1900 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: {
+      '100': [100, 226, 17, 50, 110, 180],
+      '200': [200, 302, 17, 110, 220, 255],
+      '300': [300, 362, 17, 180, 330, 315],
+      '500': [500, 418, 20, 300, 550, 370],
+    },
+    discontinued: ['500'],
+  }),
+]
+
+const inlineHeaters = createFamily({
+  kind: 'heater',
+  brand: 'Skerrowen',
+  line: 'Inlay',
+  date: '2025-05-19',
+  author: 'two_left_fins',
+  common: {
+    form: 'inline',
+    thermostat: 'built-in',
+    orientation: 'vertical',
+    madeFor: ['freshwater', 'reef'],
+    ...northAmerica,
+  },
+  columns: rod,
+  rows: {
+    '200': [200, 330, 60, gal(30), gal(65)],
+    '300': [300, 365, 60, gal(50), gal(95)],
+    '500': [500, 410, 68, gal(90), gal(160)],
+  },
+})
+
+export const heaters = [...glassRods, ...polymerRods, ...titaniumRods, ...inlineHeaters]

@@ -1,0 +1,162 @@
+import { inch, lb } from '../amounts'
+import { createFamily, remeasure } from '../family'
+import { continental, wideRange } from '../mains'
+
+const armColumns = ['maxLoadKg', 'rimMinMm', 'rimMaxMm', 'reachMm'] as const
+const legColumns = ['maxLoadKg', 'spanMinMm', 'spanMaxMm'] as const
+
+export const lightMounts = [
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Lumenwrack',
+    line: 'Cinder arm',
+    date: '2024-02-05',
+    author: 'kelp_and_calipers',
+    gtinFrom: 16000,
+    common: { type: 'arm' },
+    columns: armColumns,
+    rows: {
+      short: [1, 5, 16, 150],
+      long: [2.5, 5, 20, 300],
+      heavy: [4, 8, 25, 380],
+    },
+    later: { long: [remeasure('2025-03-02', 'caliper_crab', 'calipers on the clamp', { rimMaxMm: [20.6, 0.2] })] },
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Kelpforge',
+    line: 'Gooseneck',
+    date: '2025-01-27',
+    author: 'two_left_fins',
+    common: { type: 'arm' },
+    columns: armColumns,
+    rows: {
+      S: [0.6, 3, 12, 200],
+      M: [1.2, 4, 16, 320],
+      L: [2, 5, 20, 420],
+    },
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Trestlemoor',
+    line: 'Gantry',
+    date: '2024-06-24',
+    author: 'kelp_and_calipers',
+    gtinFrom: 16010,
+    common: { type: 'hanging' },
+    columns: ['maxLoadKg', 'reachMm'],
+    rows: {
+      single: [6, 280],
+      double: [12, 280],
+      deep: [12, 420],
+    },
+    notes: { single: 'Bolts to the back of a stand or to the wall, never to the glass.' },
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Actinelle',
+    line: 'Field legs',
+    date: '2024-06-10',
+    author: 'wet_sleeves',
+    gtinFrom: 16020,
+    common: { type: 'rim-legs' },
+    columns: legColumns,
+    rows: {
+      '12': [3, inch(11), inch(18)],
+      '18': [4, inch(17), inch(24)],
+      '24': [5, inch(23), inch(30)],
+      '30': [6, inch(29), inch(36)],
+      '36': [8, inch(35), inch(42)],
+      '48': [10, inch(47), inch(54)],
+    },
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Anthiamoor',
+    line: 'Facet feet',
+    date: '2024-10-28',
+    author: 'shelf_of_salt',
+    common: { type: 'rim-legs' },
+    columns: legColumns,
+    rows: {
+      '350': [4, 350, 520],
+      '500': [4, 500, 670],
+      '700': [6, 700, 870],
+      '900': [8, 900, 1070],
+    },
+    discontinued: ['350'],
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Ondrelle',
+    line: 'Ceiling wire',
+    date: '2025-06-09',
+    author: 'ppt35',
+    common: { type: 'ceiling' },
+    columns: ['maxLoadKg'],
+    rows: { 'two-point': [8], 'four-point': [16] },
+  }),
+  ...createFamily({
+    kind: 'light-mount',
+    brand: 'Beamquay',
+    line: 'Canopy',
+    date: '2024-10-14',
+    author: 'gallon_goat',
+    common: { type: 'canopy' },
+    columns: legColumns,
+    rows: {
+      '24': [lb(12), inch(24), inch(24.5)],
+      '36': [lb(18), inch(36), inch(36.5)],
+      '48': [null, inch(48), inch(48.5)],
+    },
+  }),
+]
+
+const controllerColumns = ['channels', 'powerW', 'cordMm'] as const
+
+export const lightControllers = [
+  ...createFamily({
+    kind: 'light-controller',
+    brand: 'Zoandrel',
+    line: 'Beacon',
+    date: '2024-05-27',
+    author: 'nanobrine',
+    gtinFrom: 16100,
+    common: { controlGroup: 'Zoandrel Beacon', ...wideRange },
+    columns: controllerColumns,
+    rows: { '1': [1, 2, 1200], '2': [2, 2, 1200], '4': [4, 3, 1500] },
+    later: { '2': [remeasure('2025-06-14', 'tess_reefs', 'plug-in meter', { powerW: [1.6, 0.2] })] },
+  }),
+  ...createFamily({
+    kind: 'light-controller',
+    brand: 'Actinelle',
+    line: 'Link',
+    date: '2024-06-10',
+    author: 'wet_sleeves',
+    gtinFrom: 16110,
+    common: { controlGroup: 'Actinelle Link', ...wideRange },
+    columns: controllerColumns,
+    rows: { One: [2, 2, 1500], Six: [6, 4, 1500] },
+  }),
+  ...createFamily({
+    kind: 'light-controller',
+    brand: 'Ondrelle',
+    line: 'Desk',
+    date: '2025-06-09',
+    author: 'ppt35',
+    common: { controlGroup: 'Ondrelle Desk', ...continental },
+    columns: controllerColumns,
+    rows: { Mini: [2, 3, 1200], Full: [8, 6, 1800] },
+  }),
+  ...createFamily({
+    kind: 'light-controller',
+    brand: 'Tideledger',
+    line: 'Dimmer',
+    date: '2025-03-24',
+    author: 'gallon_goat',
+    common: { ...wideRange },
+    columns: controllerColumns,
+    rows: { '2 × 10 V': [2, 2, 1500], '6 × 10 V': [6, 3, 1500] },
+    notes: { '2 × 10 V': 'Its maker names no family of lamps; it drives any with a 0 to 10 V input.' },
+  }),
+]

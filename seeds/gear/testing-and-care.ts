@@ -1,0 +1,362 @@
+import { inch } from '../amounts'
+import { createFamily, measuredTo, remeasure, restate } from '../family'
+
+const kit = ['parameters', 'testsEach'] as const
+const marine = { madeFor: ['reef', 'marine-fish'] }
+
+const testKits = [
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Reagentry',
+    line: 'Drop',
+    date: '2024-03-04',
+    author: 'wet_sleeves',
+    gtinFrom: 21000,
+    common: { madeFor: ['reef', 'marine-fish', 'freshwater'] },
+    columns: kit,
+    rows: {
+      ammonia: [['ammonia'], 60],
+      nitrite: [['nitrite'], 80],
+      nitrate: [['nitrate'], 50],
+      pH: [['ph'], 100],
+      alkalinity: [['alkalinity'], 75],
+      calcium: [['calcium'], 60],
+      magnesium: [['magnesium'], 50],
+      phosphate: [['phosphate'], 40],
+    },
+    later: { nitrate: [restate('2025-04-15', 'wet_sleeves', 'Fewer tests in the new box', { testsEach: 45 })] },
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Reagentry',
+    line: 'Case',
+    date: '2024-03-04',
+    author: 'wet_sleeves',
+    gtinFrom: 21010,
+    common: { ...marine },
+    columns: kit,
+    rows: {
+      start: [['ammonia', 'nitrite', 'nitrate', 'ph'], 50],
+      reef: [['alkalinity', 'calcium', 'magnesium'], 50],
+      full: [['ammonia', 'nitrite', 'nitrate', 'ph', 'alkalinity', 'calcium', 'magnesium', 'phosphate'], 40],
+    },
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Titralune',
+    line: '',
+    date: '2024-09-09',
+    author: 'ppt35',
+    gtinFrom: 21020,
+    common: { ...marine },
+    columns: kit,
+    rows: {
+      'Ammonia S': [['ammonia'], 50],
+      'Nitrite S': [['nitrite'], 60],
+      'Nitrate S': [['nitrate'], 60],
+      'Calcium F': [['calcium'], 75],
+      'Magnesium F': [['magnesium'], 75],
+      'Alkalinity F': [['alkalinity'], 100],
+      'Cycle trio': [['ammonia', 'nitrite', 'nitrate'], 40],
+    },
+    discontinued: ['Nitrite S'],
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Titralune',
+    line: 'Photometer',
+    date: '2025-02-03',
+    author: 'ppt35',
+    common: { ...marine },
+    columns: kit,
+    rows: {
+      'phosphate low': [['phosphate'], 25],
+      'nitrate low': [['nitrate'], 25],
+      alkalinity: [['alkalinity'], 25],
+    },
+    notes: { 'phosphate low': 'Twenty-five sachets come with the meter; more are sold apart.' },
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Corvelune',
+    line: 'Strip',
+    date: '2025-10-13',
+    author: 'rimless_rae',
+    common: {},
+    columns: [...kit, 'madeFor'],
+    rows: {
+      five: [['nitrite', 'nitrate', 'ph', 'alkalinity'], 50, ['freshwater', 'marine-fish']],
+      ammonia: [['ammonia'], 25, ['freshwater', 'marine-fish']],
+      pond: [['nitrite', 'nitrate', 'ph'], 50, ['freshwater']],
+    },
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Saltreckon',
+    line: 'Titre',
+    date: '2025-07-07',
+    author: 'saltmarsh_jo',
+    gtinFrom: 21040,
+    common: { ...marine },
+    columns: kit,
+    rows: {
+      'NH3 + NO2': [['ammonia', 'nitrite'], 60],
+      NO3: [['nitrate'], 80],
+      'NO3 + PO4': [['nitrate', 'phosphate'], 50],
+      KH: [['alkalinity'], 120],
+      'Ca + Mg': [['calcium', 'magnesium'], 60],
+      basics: [['ammonia', 'nitrite', 'nitrate', 'ph', 'alkalinity'], 60],
+    },
+    later: {
+      KH: [remeasure('2026-01-31', 'tess_reefs', 'counted tests until the bottle ran dry', { testsEach: [112, 2] })],
+    },
+  }),
+  ...createFamily({
+    kind: 'test-kit',
+    brand: 'Brackenfin',
+    line: 'Vial',
+    date: '2025-03-03',
+    author: 'two_left_fins',
+    common: {},
+    columns: [...kit, 'madeFor'],
+    rows: {
+      'NH3/NH4': [['ammonia'], null, null],
+      NO2: [['nitrite'], 75, ['freshwater', 'reef']],
+      NO3: [['nitrate'], 75, ['freshwater', 'reef']],
+      'mystery set': [null, null, ['reef']],
+    },
+  }),
+]
+
+const magnetColumns = ['wallMinMm', 'wallMaxMm', 'blades', 'acrylicSafe', 'lengthMm'] as const
+
+const scrapers = [
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Cleavepane',
+    line: 'Cling',
+    date: '2024-05-06',
+    author: 'rimless_rae',
+    gtinFrom: 21200,
+    common: { form: 'magnet' },
+    columns: magnetColumns,
+    rows: {
+      '6': [3, 6, ['pad'], true, 62],
+      '10': [5, 10, ['pad', 'plastic'], true, 80],
+      '12': [6, 12, ['pad', 'steel'], false, 86],
+      '16': [8, 16, ['pad', 'steel', 'plastic'], true, 104],
+      '20': [12, 20, ['pad', 'steel', 'plastic'], true, 125],
+      '25': [15, 25, ['pad', 'steel'], false, 148],
+    },
+    later: {
+      '10': [
+        remeasure('2025-02-22', 'caliper_crab', 'held on stacked glass plates', {
+          wallMaxMm: [10.5, 0.5],
+          lengthMm: [81, 0.5],
+        }),
+      ],
+      '12': [
+        restate('2025-09-18', 'rimless_rae', 'Plastic blades added to the box', {
+          blades: ['pad', 'steel', 'plastic'],
+          acrylicSafe: true,
+        }),
+      ],
+    },
+  }),
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Cleavepane',
+    line: 'Reach',
+    date: '2024-05-06',
+    author: 'rimless_rae',
+    gtinFrom: 21210,
+    common: { form: 'handheld' },
+    columns: ['blades', 'acrylicSafe', 'lengthMm'],
+    rows: {
+      '30 steel': [['steel'], false, 300],
+      '45 steel': [['steel'], false, 450],
+      '45 duo': [['steel', 'plastic'], true, 450],
+      '65 duo': [['steel', 'plastic'], true, 650],
+      '65 pad': [['pad', 'plastic'], true, 650],
+    },
+  }),
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Quayhollow',
+    line: 'Slide',
+    date: '2024-11-18',
+    author: 'brackish_bea',
+    common: { form: 'magnet' },
+    columns: magnetColumns,
+    rows: {
+      nano: [4, 8, ['pad'], true, 48],
+      S: [5, 10, ['pad'], true, 70],
+      M: [8, 13, ['pad', 'plastic'], true, 92],
+      L: [12, 19, ['pad', 'plastic'], true, 120],
+    },
+    discontinued: ['nano'],
+  }),
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Gobyhurst',
+    line: 'Whisk',
+    date: '2025-07-14',
+    author: 'nanobrine',
+    common: { form: 'magnet' },
+    columns: magnetColumns,
+    rows: {
+      '1': [3, 6, ['pad'], true, 44],
+      '2': [null, 8, ['pad'], null, 58],
+      '3': [null, null, ['pad', 'steel'], false, 75],
+    },
+  }),
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Wrasselund',
+    line: 'Oar',
+    date: '2025-05-12',
+    author: 'quietpump',
+    gtinFrom: 21230,
+    common: { form: 'handheld' },
+    columns: ['blades', 'acrylicSafe', 'lengthMm'],
+    rows: {
+      '25 card': [['plastic'], true, 250],
+      '40': [['plastic', 'pad'], true, 400],
+      '60': [['plastic', 'pad'], true, 600],
+      '60 steel': [['steel'], null, 600],
+      '90': [['steel', 'plastic'], true, 900],
+    },
+    backing: { lengthMm: measuredTo(2, 'tape, blade edge to handle end') },
+  }),
+  ...createFamily({
+    kind: 'scraper',
+    brand: 'Driftanvil',
+    line: 'Grip',
+    date: '2025-08-18',
+    author: 'gallon_goat',
+    common: { form: 'magnet' },
+    columns: magnetColumns,
+    rows: {
+      '8': [4, 8, ['pad', 'steel'], false, 66],
+      '12': [6, 12, ['pad', 'steel'], false, 88],
+      '19': [10, 19, ['pad', 'steel', 'plastic'], true, 118],
+    },
+  }),
+]
+
+const siphonColumns = ['tubeLengthMm', 'hoseLengthMm', 'tubeDiameterMm'] as const
+
+const siphons = [
+  ...createFamily({
+    kind: 'siphon',
+    brand: 'Siphonelle',
+    line: 'Classic',
+    date: '2024-06-03',
+    author: 'shelf_of_salt',
+    gtinFrom: 21300,
+    common: {},
+    columns: siphonColumns,
+    rows: {
+      nano: [180, 1200, 20],
+      S: [260, 1500, 30],
+      M: [400, 1800, 42],
+      L: [600, 2200, 50],
+      XL: [900, 3000, 50],
+    },
+    later: {
+      M: [
+        remeasure('2025-01-30', 'two_left_fins', 'tape, hose pulled straight', {
+          tubeLengthMm: [405, 2],
+          hoseLengthMm: [1790, 10],
+        }),
+      ],
+    },
+  }),
+  ...createFamily({
+    kind: 'siphon',
+    brand: 'Gobyhurst',
+    line: 'Sip',
+    date: '2025-07-14',
+    author: 'nanobrine',
+    common: {},
+    columns: siphonColumns,
+    rows: { '15': [150, 1000, 16], '25': [250, 1400, 25], '35': [350, null, 30] },
+  }),
+  ...createFamily({
+    kind: 'siphon',
+    brand: 'Halcyrene',
+    line: 'Draw',
+    date: '2024-01-09',
+    author: 'brackish_bea',
+    discontinued: ['10'],
+    common: {},
+    columns: siphonColumns,
+    rows: {
+      '10': [inch(10), inch(60), inch(1.25)],
+      '16': [inch(16), inch(72), inch(2)],
+      '24': [inch(24), inch(96), inch(2)],
+      '25 ft': [inch(18), inch(300), inch(2)],
+    },
+  }),
+  ...createFamily({
+    kind: 'siphon',
+    brand: 'Netherling',
+    line: 'Silt',
+    date: '2025-01-20',
+    author: 'brackish_bea',
+    common: {},
+    columns: siphonColumns,
+    rows: { short: [220, 1600, 36], long: [450, 2000, 36], deep: [700, 2500, null], 'hand pump': [300, 2000, 28] },
+  }),
+]
+
+const netColumns = ['openingMm', 'meshMm', 'handleMm'] as const
+
+const nets = [
+  ...createFamily({
+    kind: 'net',
+    brand: 'Netherling',
+    line: 'Fine',
+    date: '2024-06-03',
+    author: 'shelf_of_salt',
+    gtinFrom: 21400,
+    common: {},
+    columns: netColumns,
+    rows: {
+      '8': [80, 0.5, 230],
+      '10': [100, 0.5, 260],
+      '15': [150, 0.8, 320],
+      '20': [200, 0.8, 380],
+      '25': [250, 1, 420],
+    },
+    later: { '15': [remeasure('2025-03-30', 'caliper_crab', 'steel rule across the frame', { openingMm: [153, 1] })] },
+  }),
+  ...createFamily({
+    kind: 'net',
+    brand: 'Wrasselund',
+    line: 'Scoop',
+    date: '2025-05-12',
+    author: 'quietpump',
+    common: {},
+    columns: netColumns,
+    rows: {
+      '3 in': [inch(3), 1, 250],
+      '5 in': [inch(5), 1, 300],
+      '8 in': [inch(8), 1.5, 360],
+      '10 in': [inch(10), 1.5, 400],
+    },
+  }),
+  ...createFamily({
+    kind: 'net',
+    brand: 'Siphonelle',
+    line: 'Brine',
+    date: '2025-11-03',
+    author: 'ppt35',
+    common: {},
+    columns: netColumns,
+    rows: { S: [75, 0.15, 180], M: [100, 0.15, 220], 'clear cup': [120, 2, 280], long: [180, 1, 600] },
+    discontinued: ['clear cup'],
+  }),
+]
+
+export const testingAndCare = [...testKits, ...scrapers, ...siphons, ...nets]
