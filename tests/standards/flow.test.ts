@@ -42,9 +42,11 @@ describe('the friction factor', () => {
     )
   })
 
-  it('below Re 2300 is 64/Re', () => {
-    // Hagen–Poiseuille.
+  it('below Re 2300 is 64/Re and from there on turbulent', () => {
+    // Hagen–Poiseuille, and Colebrook.
     expectWithin(frictionFactor(1000, 1e-3), 0.064, 1e-12)
+    expectWithin(frictionFactor(2299, 1e-3), 64 / 2299, 1e-12)
+    expectWithinShare(frictionFactor(2300, 1e-3), colebrook(2300, 1e-3), 0.06)
   })
 
   it('of fully rough flow is what Colebrook comes to at endless Re', () => {

@@ -137,6 +137,14 @@ describe('coverage', () => {
     expect(shareAbove(map, 150, 37)).toBe(map.cells.filter((cell) => cell * 0.37 > 150).length / 2400)
   })
 
+  it('counts a value on the edge of the band as inside, and of equal dimmings takes the lowest', () => {
+    const even = { ...map, cells: new Float64Array([100, 100, 100, 100]) }
+    expect(shareInBand(even, [50, 100])).toBe(1)
+    expect(shareInBand(even, [100, 150])).toBe(1)
+    expect(shareInBand(even, [101, 150])).toBe(0)
+    expect(findBestDimming(even, [50, 150])).toEqual({ powerPercent: 50, share: 1 })
+  })
+
   it('is at its best at the dimming that trying every percent finds, the lowest of equals', () => {
     const shares = Array.from({ length: 100 }, (_, index) => shareInBand(map, [50, 150], index + 1))
     const best = Math.max(...shares)

@@ -46,6 +46,20 @@ describe('a rod leaning in a box', () => {
     )
   })
 
+  it('stands nearly upright where leaning lower would lift its corner too high', () => {
+    // 100 × 30 in a run of 50 and a height of 102: at the first angle that the run allows, 78°, its corner is at 104.
+    const { angleDeg } = leanRod({ lengthMm: 100, diameterMm: 30 }, { lengthMm: 50, widthMm: 30, heightMm: 102 })
+    const angle = ((angleDeg ?? 0) * Math.PI) / 180
+    expectWithin(100 * Math.sin(angle) + 30 * Math.cos(angle), 102, 1e-6)
+    expect(100 * Math.cos(angle) + 30 * Math.sin(angle)).toBeLessThan(50)
+  })
+
+  it('lies down where its length alone is within the run', () => {
+    // 98 × 30 in a run of 100: tilted a little its corners would reach 102, flat it has 2 to spare.
+    const lying = leanRod({ lengthMm: 98, diameterMm: 30 }, { lengthMm: 100, widthMm: 30, heightMm: 40 })
+    expect(lying).toMatchObject({ fits: true, angleDeg: 0 })
+  })
+
   it('fits whenever it fits flat or upright', () => {
     const side = fc.double({ min: 40, max: 500, noNaN: true })
     fc.assert(
