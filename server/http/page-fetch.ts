@@ -1,3 +1,4 @@
+import type { RequestListener } from 'node:http'
 import type { Express, Request } from 'express'
 import inject from 'light-my-request'
 import { getRequestId } from './logging'
@@ -19,12 +20,33 @@ function carryHeaders(req: Request): Record<string, string> {
   return { 'x-request-id': getRequestId(req), ...(cookie !== undefined && { cookie }) }
 }
 
+/**
+ * Express gives every request and response its own prototypes, which would take away how an in-process answer is
+ * collected. Given the application itself, the library would change those prototypes for real visitors too.
+ */
+function keepOwnMethods(message: object): void {
+  const prototype = Object.getPrototypeOf(message) as Record<string, unknown>
+  for (const name of Object.getOwnPropertyNames(prototype)) {
+    if (name === 'constructor' || Object.hasOwn(message, name)) continue
+    Object.defineProperty(message, name, { value: prototype[name], writable: true, configurable: true })
+  }
+}
+
+function dispatchTo(app: Express): RequestListener {
+  return (req, res) => {
+    keepOwnMethods(req)
+    keepOwnMethods(res)
+    app(req, res)
+  }
+}
+
 /** Calls the application in process, as the visitor: same cookie, same address, same limits, no socket. */
 export function createPageFetch(app: Express, req: Request): PageFetch {
+  const dispatch = dispatchTo(app)
   return async (path, init = {}) => {
     if (!path.startsWith('/') || path.startsWith('//'))
       throw new TypeError(`A page calls its own site only, not ${path}`)
-    const answer = await inject(app as never, {
+    const answer = await inject(dispatch, {
       method: init.method ?? 'GET',
       url: path,
       headers: { ...init.headers, ...carryHeaders(req) },
