@@ -1,0 +1,36 @@
+import { data, type RouteObject } from 'react-router-dom'
+import { paths } from '../config/paths'
+import type { App } from '../lib/app-context'
+import { Layout } from './layout'
+import { createLazy } from './page-route'
+import { ErrorPage } from './routes/error'
+
+function throwNotFound(): never {
+  // A Response of the router's own kind: it keeps its status through server rendering.
+  // eslint-disable-next-line @typescript-eslint/only-throw-error
+  throw data(null, { status: 404 })
+}
+
+/** Every page, each in a file of its own that is fetched when it is first visited. */
+export function createRoutes(app: App): RouteObject[] {
+  return [
+    {
+      id: 'root',
+      Component: Layout,
+      children: [
+        {
+          id: 'pages',
+          ErrorBoundary: ErrorPage,
+          HydrateFallback: () => null,
+          children: [
+            { id: 'home', path: paths.home, lazy: createLazy(app, () => import('./routes/home')) },
+            { id: 'find', path: paths.find, lazy: createLazy(app, () => import('./routes/find')) },
+            { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
+            { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
+            { id: 'unknown', path: '*', loader: throwNotFound },
+          ],
+        },
+      ],
+    },
+  ]
+}

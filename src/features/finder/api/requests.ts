@@ -1,0 +1,29 @@
+import type { Verdict } from '#shared/engine/types'
+import type { FitRequest } from '#shared/schemas/fit'
+import type { ApiClient } from '../../../lib/api-client'
+import type { Visit } from '../link/read-visit'
+import { fitPagesQuery } from './fit'
+
+const pageSize = 8
+
+/** Whether there is anything to ask: without a size or volume of the tank nothing can be judged. */
+export function canAsk({ setup }: Visit): boolean {
+  const tank = setup.tank as Readonly<Record<string, unknown>>
+  const hasSize = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'].every((key) => tank[key] !== undefined)
+  return hasSize || ['volumeL', 'nominalVolumeL', 'gear'].some((key) => tank[key] !== undefined)
+}
+
+/** The list of one verdict; that of those that fit also brings scales, counts and assumptions. */
+export function answersQuery(api: ApiClient, { setup, state }: Visit, verdict: Verdict) {
+  const { kind, opened, from } = state
+  const check = opened?.verdict === verdict ? opened.check : undefined
+  const request: FitRequest = {
+    setup,
+    kind,
+    verdict,
+    limit: pageSize,
+    ...(check !== undefined && { check }),
+    ...(verdict === 'fits' && { scales: true }),
+  }
+  return fitPagesQuery(api, request, from?.verdict === verdict ? from.cursor : null)
+}

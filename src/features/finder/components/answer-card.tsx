@@ -1,0 +1,121 @@
+import { useState } from 'react'
+import clsx from 'clsx'
+import { Link } from 'react-router-dom'
+import type { Answer } from '#shared/engine/types'
+import { Disclosure } from '../../../components/ui/disclosure'
+import { VerdictIcon } from '../../../components/ui/verdict-icon'
+import { paths } from '../../../config/paths'
+import { describeSpecs } from '../../../lib/describe-specs'
+import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
+import type { Finder } from '../hooks/use-finder'
+import { findDecidingCheck } from '../model/deciding-check'
+import { CheckItem } from './check-item'
+import { DecidingGauge } from './deciding-gauge'
+
+export interface AnswerCardProps {
+  readonly answer: Answer
+  readonly finder: Finder
+  readonly isLit: boolean
+  readonly isPicked: boolean
+  readonly onPoint?: (slug: string | null) => void
+}
+
+const bareSpecs = ({ specs }: Answer): Record<string, unknown> =>
+  Object.fromEntries(Object.entries(specs).map(([key, value]) => [key, value?.value]))
+
+function countKnockOns(count: number): string {
+  if (count === 0) return 'Nothing else changes'
+  return count === 1 ? '1 knock-on' : `${count} knock-ons`
+}
+
+/** One piece with its verdict, the sentence, what else changes, and every check behind it. */
+export function AnswerCard({ answer, finder, isLit, isPicked, onPoint }: AnswerCardProps) {
+  const [isOpen, setIsOpen] = useState(false)
+  const { gear, verdict, summary, checks, knockOns, cautions, kind, pieces, confidence } = answer
+  const { printer, hrefOf } = finder
+  const deciding = findDecidingCheck(checks)
+  const quantity = pieces[0]?.quantity ?? 1
+  const slug = gear?.slug ?? null
+  return (
+    <li
+      id={slug === null ? undefined : `answer-${slug}`}
+      data-lit={isLit || undefined}
+      onPointerEnter={() => onPoint?.(slug)}
+      onPointerLeave={() => onPoint?.(null)}
+      className={clsx('border-b border-rule border-l-[3px] py-4 pl-3', isLit ? 'border-l-action bg-sheet' : 'border-l-transparent')}
+    >
+      <article className="grid grid-cols-[1.75rem_minmax(0,1fr)] gap-x-3 gap-y-3 md:grid-cols-[1.75rem_minmax(0,5fr)_minmax(0,4fr)_12rem] md:gap-x-5">
+        <VerdictIcon verdict={verdict} size={28} />
+        <div className="min-w-0">
+          <h4 className="font-heading text-lg leading-snug font-bold">
+            {quantity > 1 && <span>{quantity} × </span>}
+            {gear ? (
+              <Link to={paths.gear(gear.slug)} className="decoration-1 underline-offset-4 hover:text-action hover:underline">
+                {gear.brand} · {gear.model}
+              </Link>
+            ) : (
+              'This piece'
+            )}
+          </h4>
+          <p className="text-sm text-ink-soft">{describeSpecs(kind, bareSpecs(answer), printer)}</p>
+          <p className="mt-1">{summary}</p>
+          <p className="mt-1 flex flex-wrap gap-x-4 text-sm text-ink-soft">
+            <span className={`font-semibold ${verdictTextClasses[verdict]}`}>{verdictWords[verdict]}</span>
+            {confidence.closeCalls > 0 && (
+              <span className="font-semibold text-changes">
+                {confidence.closeCalls === 1 ? 'a close call' : `${confidence.closeCalls} close calls`}
+              </span>
+            )}
+            <span>{confidence.level === 'mixed' ? 'numbers from several sources' : `numbers: ${confidence.level}`}</span>
+            {slug !== null && (
+              <Link to={hrefOf({ picked: isPicked ? null : slug })} replace preventScrollReset className="link print:hidden">
+                {isPicked ? 'drawn above' : 'show in the drawing'}
+              </Link>
+            )}
+          </p>
+        </div>
+        <div className="col-start-2 min-w-0 text-sm md:col-start-auto">
+          {verdict !== 'no' && (
+            <p className={`font-semibold ${knockOns.length === 0 ? 'text-fits' : 'text-changes'}`}>
+              {countKnockOns(knockOns.length)}
+            </p>
+          )}
+          {knockOns.length > 0 && (
+            <ul className="list-disc space-y-0.5 pl-4">
+              {knockOns.map(({ message, subject }) => (
+                <li key={`${subject}${message}`}>{message}</li>
+              ))}
+            </ul>
+          )}
+          {cautions.length > 0 && (
+            <ul className="mt-1 space-y-0.5 text-ink-soft">
+              {cautions.map((caution) => (
+                <li key={caution}>
+                  <strong className="font-semibold">Caution:</strong> {caution}
+                </li>
+              ))}
+            </ul>
+          )}
+        </div>
+        <div className="col-start-2 min-w-0 md:col-start-auto">
+          {deciding && <DecidingGauge check={deciding} printer={printer} />}
+        </div>
+      </article>
+      {checks.length > 0 && (
+        <div className="mt-2 ml-10">
+          <Disclosure
+            summary={checks.length === 1 ? 'The check' : `All ${checks.length} checks`}
+            isOpen={isOpen}
+            onToggle={setIsOpen}
+          >
+            <ul>
+              {checks.map((check) => (
+                <CheckItem key={check.id} check={check} finder={finder} hasGauge={isOpen} />
+              ))}
+            </ul>
+          </Disclosure>
+        </div>
+      )}
+    </li>
+  )
+}

@@ -1,0 +1,63 @@
+import { labelSetupPath } from '#shared/engine/assumptions'
+import type { Check } from '#shared/engine/types'
+import { Gauge } from '../../../components/drawings/gauge'
+import { findScaleUnit } from '../../../components/drawings/scale-unit'
+import { VerdictIcon } from '../../../components/ui/verdict-icon'
+import { outcomeVerdicts, verdictTextClasses } from '../../../lib/verdicts'
+import type { Finder } from '../hooks/use-finder'
+
+export interface CheckItemProps {
+  readonly check: Check
+  readonly finder: Finder
+  /** Drawn once its list is open: a closed list of gauges weighs more than the page around it. */
+  readonly hasGauge: boolean
+}
+
+const bases = { physics: 'Computed', standard: 'Standard', practice: 'Practice' } as const
+const outcomeWords = { pass: 'passes', change: 'needs a change', fail: 'fails', nodata: 'not enough data' } as const
+
+/** One check in full: what was measured, the limit, where the rule is from, and what it rests on. */
+export function CheckItem({ check, finder, hasGauge }: CheckItemProps) {
+  const { printer, plan } = finder
+  const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [], probability } = check
+  const canonical = findScaleUnit(unit)
+  const isDrawn = typeof measured === 'number' && limit !== null
+  const limitText = limit === null ? null : typeof limit === 'number' ? printer.measure(limit, canonical) : printer.pair(limit, canonical)
+  return (
+    <li className="grid gap-x-6 gap-y-2 border-t border-rule py-3 md:grid-cols-[minmax(0,1fr)_16rem]">
+      <div className="min-w-0 text-sm">
+        <p className="flex flex-wrap items-center gap-x-2">
+          <VerdictIcon verdict={outcomeVerdicts[outcome]} size={15} isDecorative />
+          <strong>{label}</strong>
+          <span className={`font-semibold ${verdictTextClasses[outcomeVerdicts[outcome]]}`}>{outcomeWords[outcome]}</span>
+        </p>
+        <p className="mt-1">{message}</p>
+        {isDrawn && (
+          <p className="mt-1 font-mono text-xs text-ink-soft">
+            measured {printer.measure(measured, canonical)} · limit {limitText}
+            {probability !== undefined && probability < 0.95 && ` · close call, ${Math.round(probability * 100)} % sure`}
+          </p>
+        )}
+        <p className="mt-1 text-xs text-ink-soft">
+          {bases[basis.type]}: {basis.source}
+        </p>
+        {assumed.length > 0 && (
+          <p className="mt-1 text-xs text-ink-soft">
+            Rests on what is assumed: {assumed.map((path) => labelSetupPath(path, plan)).join(', ')}.
+          </p>
+        )}
+      </div>
+      {isDrawn && hasGauge && (
+        <Gauge
+          label={label}
+          unit={canonical}
+          printer={printer}
+          value={measured}
+          limit={limit}
+          margin={margin}
+          outcome={outcome}
+        />
+      )}
+    </li>
+  )
+}

@@ -1,0 +1,30 @@
+import type { Check } from '#shared/engine/types'
+import { Gauge } from '../../../components/drawings/gauge'
+import { findScaleUnit } from '../../../components/drawings/scale-unit'
+import type { Finder } from '../hooks/use-finder'
+
+/** The check that decides for a piece, named, on its small gauge; in words where it has no numbers. */
+export function DecidingGauge({ check, printer }: { readonly check: Check; readonly printer: Finder['printer'] }) {
+  const { label, measured, limit, unit, margin, outcome } = check
+  if (typeof measured !== 'number' || limit === null)
+    return (
+      <p className="text-sm text-ink-soft">
+        Decides: <span className="text-ink">{label.toLowerCase()}</span>
+      </p>
+    )
+  return (
+    <div>
+      <Gauge
+        size="small"
+        label={label}
+        unit={findScaleUnit(unit)}
+        printer={printer}
+        value={measured}
+        limit={limit}
+        margin={margin}
+        outcome={outcome}
+      />
+      <p className="text-xs text-ink-soft">decides: {label.toLowerCase()}</p>
+    </div>
+  )
+}

@@ -1,0 +1,90 @@
+import { useState } from 'react'
+import { Form } from 'react-router-dom'
+import { Button } from '../../../components/ui/button'
+import { ErrorSummary } from '../../../components/ui/error-summary'
+import { kindKeys, kinds } from '#shared/kinds/index'
+import { SelectField } from '../../../components/ui/select-field'
+import { paths } from '../../../config/paths'
+import type { Finder } from '../hooks/use-finder'
+import { countChambers } from '../link/edit-raw'
+import type { RawSetup } from '../link/finder-state'
+import { readAssumed } from '../model/assumed'
+import { checkField, explainProblem } from '../model/check-field'
+import { fieldId, listFieldGroups } from '../model/field-groups'
+import { FieldControl } from './field-control'
+
+export interface PlainFormProps {
+  readonly finder: Finder
+}
+
+/** Wrong texts of the link, each with the field it belongs to; one without a field is about the whole link. */
+export function ProblemSummary({ finder }: PlainFormProps) {
+  const { visit, printer } = finder
+  const known = new Set(listFieldGroups(visit.state.kind, countChambers(visit.state.raw)).flatMap(({ fields }) => fields.map(({ path }) => path)))
+  return (
+    <ErrorSummary
+      title="Some of what was typed could not be read"
+      errors={visit.problems.map((problem) => ({
+        message: explainProblem(problem, printer.system),
+        ...(known.has(problem.path) && { fieldId: fieldId(problem.path) }),
+      }))}
+    />
+  )
+}
+
+/** Every field in groups, as a plain form: works without scripts, and beside the drawing with them. */
+export function PlainForm({ finder }: PlainFormProps) {
+  const { state, plan, printer, visit } = finder
+  const { system } = printer
+  const [texts, setTexts] = useState<RawSetup>(state.raw)
+  const wrong = new Map(visit.problems.map((problem) => [problem.path, problem.text]))
+  const chambers = countChambers(state.raw)
+  const groups = listFieldGroups(state.kind, chambers)
+  const asked = new Set(groups.flatMap(({ fields }) => fields.map(({ path }) => path)))
+  const kept = Object.entries(state.raw).filter(([path]) => !asked.has(path))
+  return (
+    <Form action={paths.find} method="get" preventScrollReset noValidate className="space-y-8">
+      <input type="hidden" name="typed" value={system} />
+      {state.asked && <input type="hidden" name="asked" value={state.asked} />}
+      {kept.map(([path, text]) => (
+        <input key={path} type="hidden" name={path} value={text} />
+      ))}
+      <div className="max-w-xs">
+        <SelectField
+          id="field-kind"
+          name="kind"
+          label="Kind of gear"
+          defaultValue={state.kind}
+          options={kindKeys.map((kind) => ({ value: kind, label: kinds[kind].label }))}
+        />
+      </div>
+      {groups.map(({ title, fields }) => (
+        <fieldset key={title}>
+          <legend className="font-heading text-lg font-bold">{title}</legend>
+          <div className="mt-2 grid gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
+            {fields.map(({ path, attribute }) => {
+              const text = texts[path] ?? ''
+              const isAsSent = wrong.get(path) === text
+              return (
+                <FieldControl
+                  key={path}
+                  id={fieldId(path)}
+                  path={path}
+                  attribute={attribute}
+                  text={text}
+                  system={system}
+                  onChange={(next) => setTexts((earlier) => ({ ...earlier, [path]: next }))}
+                  error={isAsSent ? checkField(text, attribute, system) : undefined}
+                  assumed={readAssumed(path, plan, printer)?.shown}
+                />
+              )
+            })}
+          </div>
+        </fieldset>
+      ))}
+      <Button type="submit" variant="primary">
+        Show what fits
+      </Button>
+    </Form>
+  )
+}

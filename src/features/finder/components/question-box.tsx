@@ -1,0 +1,45 @@
+import type { ReactNode } from 'react'
+import { Form } from 'react-router-dom'
+import { Button } from '../../../components/ui/button'
+import { paths } from '../../../config/paths'
+
+export interface QuestionBoxProps {
+  readonly asked?: string
+  readonly example: string
+  readonly label?: string
+  readonly button?: string
+  /** Hidden fields that go along. */
+  readonly children?: ReactNode
+}
+
+/** A question in the person's own words; a plain form, so that it works before and without scripts. */
+export function QuestionBox({ asked = '', example, label = 'Ask in your own words', button = 'Answer', children }: QuestionBoxProps) {
+  return (
+    <Form action={paths.find} method="get" preventScrollReset role="search">
+      {children}
+      <label htmlFor="question" className="block text-sm font-semibold">
+        {label}
+      </label>
+      <div className="mt-1 flex flex-wrap items-end gap-3 border-b-2 border-ink pb-2 focus-within:border-action">
+        <input
+          id="question"
+          name="q"
+          key={asked}
+          type="text"
+          defaultValue={asked}
+          maxLength={400}
+          autoComplete="off"
+          enterKeyHint="search"
+          aria-describedby="question-example"
+          className="min-h-11 min-w-0 flex-[1_1_16rem] bg-transparent text-base outline-none md:text-lg"
+        />
+        <Button type="submit" variant="primary">
+          {button}
+        </Button>
+      </div>
+      <p id="question-example" className="mt-1 text-sm text-ink-soft">
+        Such as “{example}”.
+      </p>
+    </Form>
+  )
+}

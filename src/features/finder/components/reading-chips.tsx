@@ -1,0 +1,79 @@
+import { useMemo } from 'react'
+import { readQuestion } from '#shared/engine/ask/read-question'
+import type { Finder } from '../hooks/use-finder'
+import { fieldId } from '../model/field-groups'
+
+export interface ReadingChipsProps {
+  readonly finder: Finder
+  readonly onEdit: (path: string, target: Element) => void
+}
+
+/** What was understood of the question, piece by piece and correctable, and what was left over. */
+export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
+  const { state, printer } = finder
+  const question = useMemo(() => readQuestion(state.asked, printer.system), [state.asked, printer.system])
+  if (state.asked === '') return null
+  const { understood, ignored, filters } = question
+  const isFiltered = Object.keys(filters).length > 0
+  // A chamber is one thing in a question, whichever of its sizes comes first.
+  const groupOf = (path: string) => (/^tank\.chambers\.\d+\./.test(path) ? path.split('.').slice(0, 3).join('.') : path)
+  return (
+    <div className="mt-3 text-sm">
+      <ul className="flex flex-wrap items-center gap-x-4 gap-y-1" aria-label="We read">
+        <li aria-hidden="true" className="text-ink-soft">
+          We read
+        </li>
+        {understood.map(({ text, meaning, path, start }) => {
+          const isChanged = path !== undefined && state.raw[path] !== question.fields[path]?.text
+          return (
+            <li key={start}>
+              {path === undefined ? (
+                <span className="given" title={`from “${text}”`}>
+                  {meaning}
+                </span>
+              ) : (
+                <a
+                  href={`#${fieldId(path)}`}
+                  role="button"
+                  title={`from “${text}”`}
+                  className={`inline-flex min-h-7 items-center hover:text-action ${isChanged ? 'text-ink-soft line-through' : 'given'}`}
+                  onClick={(event) => {
+                    event.preventDefault()
+                    onEdit(groupOf(path), event.currentTarget)
+                  }}
+                  onKeyDown={(event) => {
+                    if (event.key !== ' ') return
+                    event.preventDefault()
+                    onEdit(groupOf(path), event.currentTarget)
+                  }}
+                >
+                  {meaning}
+                  {isChanged && <span className="sr-only">, changed since</span>}
+                </a>
+              )}
+            </li>
+          )
+        })}
+        {understood.length === 0 && <li>nothing that a setup or a piece of gear could be made of</li>}
+        <li className="text-ink-soft">
+          {ignored.length === 0 ? 'nothing left over' : `not used: ${ignored.map((word) => `“${word}”`).join(', ')}`}
+        </li>
+      </ul>
+      {isFiltered && (
+        <p className="mt-1 text-ink-soft">
+          Wishes about the piece itself are read but do not narrow the answers yet; look for them in each answer.
+        </p>
+      )}
+      {question.intent === 'missing' && (
+        <p className="mt-1 text-ink-soft">
+          What a whole setup lacks is not answered yet. Meanwhile each kind can be asked for by itself, in the heading.
+        </p>
+      )}
+      {question.intent === 'replace' && (
+        <p className="mt-1 text-ink-soft">
+          Every answer below could take the place of the piece that is gone, in the setup that is drawn.
+        </p>
+      )}
+    </div>
+  )
+}

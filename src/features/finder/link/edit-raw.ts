@@ -1,0 +1,40 @@
+import type { MeasureAttribute } from '#shared/kinds/types'
+import { findShownUnit } from '#shared/units/convert'
+import { readMeasure } from '#shared/units/read'
+import type { UnitSystem } from '#shared/units/systems'
+import type { RawSetup } from './finder-state'
+
+/** Sets or (with an empty text) clears fields. */
+export function changeRaw(raw: RawSetup, changes: Readonly<Record<string, string>>): RawSetup {
+  const next = { ...raw, ...changes }
+  return Object.fromEntries(Object.entries(next).filter(([, text]) => text.trim() !== ''))
+}
+
+const chamberPattern = /^tank\.chambers\.(\d+)\.(.+)$/
+
+export function countChambers(raw: RawSetup): number {
+  const places = Object.keys(raw).flatMap((path) => {
+    const place = chamberPattern.exec(path)?.[1]
+    return place === undefined ? [] : [Number(place) + 1]
+  })
+  return Math.max(0, ...places)
+}
+
+/** Takes one chamber out; those after it move up. */
+export function removeChamber(raw: RawSetup, at: number): RawSetup {
+  return Object.fromEntries(
+    Object.entries(raw).flatMap(([path, text]): [string, string][] => {
+      const [, place, key] = chamberPattern.exec(path) ?? []
+      if (place === undefined) return [[path, text]]
+      if (Number(place) === at) return []
+      return [[Number(place) < at ? path : `tank.chambers.${Number(place) - 1}.${key}`, text]]
+    }),
+  )
+}
+
+/** As typed, with the unit that was meant: in a link a bare number is canonical, on the page it is in the person's own unit. */
+export function spellOut(text: string, { unit }: MeasureAttribute, system: UnitSystem): string {
+  const reading = readMeasure(text, unit, system)
+  if (!reading.ok || !reading.assumedUnit) return text.trim()
+  return `${text.trim()} ${findShownUnit(unit, system).symbol}`.trim()
+}

@@ -1,0 +1,86 @@
+import type { Verdict } from '#shared/engine/types'
+import { isKindKey, type KindKey } from '#shared/kinds/index'
+import { isSetupKey } from '#shared/schemas/setup-link-keys'
+import { writeSetupLink } from '#shared/schemas/setup-link'
+import type { UnitSystem } from '#shared/units/systems'
+
+/** The setup as typed: texts by dotted path, chambers by their place. */
+export type RawSetup = Readonly<Record<string, string>>
+
+/** Which answers beside those that fit are shown: a whole verdict, or those that one check decides. */
+export interface Opened {
+  readonly verdict: 'no' | 'unknown'
+  readonly check?: string
+}
+
+/** Where a list of answers goes on, for visitors without scripts. */
+export interface From {
+  readonly verdict: Verdict
+  readonly cursor: string
+}
+
+/** All of the finder: what its address holds, and nothing else. */
+export interface FinderState {
+  readonly kind: KindKey
+  /** The question that was last read, as typed; empty if none. */
+  readonly asked: string
+  readonly raw: RawSetup
+  readonly opened: Opened | null
+  /** Slug of the piece that is drawn and lit. */
+  readonly picked: string | null
+  readonly from: From | null
+}
+
+const startingKind: KindKey = 'heater'
+export const longestQuestion = 400
+const longestCursor = 400
+
+function readOpened(params: URLSearchParams): Opened | null {
+  const verdict = params.get('show')
+  if (verdict !== 'no' && verdict !== 'unknown') return null
+  const check = params.get('check')
+  return check !== null && /^[a-z-]{1,40}\.[a-z-]{1,40}$/.test(check) ? { verdict, check } : { verdict }
+}
+
+function readFrom(params: URLSearchParams): From | null {
+  const verdict = params.get('more')
+  const cursor = params.get('cursor')
+  if (cursor === null || cursor === '' || cursor.length > longestCursor) return null
+  return verdict === 'fits' || verdict === 'changes' || verdict === 'no' || verdict === 'unknown'
+    ? { verdict, cursor }
+    : null
+}
+
+export function readFinderState(params: URLSearchParams, raw: RawSetup): FinderState {
+  const kind = params.get('kind') ?? ''
+  const picked = params.get('picked')
+  return {
+    kind: isKindKey(kind) ? kind : startingKind,
+    asked: (params.get('asked') ?? '').slice(0, longestQuestion),
+    raw,
+    opened: readOpened(params),
+    picked: picked !== null && /^[a-z0-9-]{1,120}$/.test(picked) ? picked : null,
+    from: readFrom(params),
+  }
+}
+
+/** The one address of a state, without its path: kind, question, setup, then what is opened. */
+export function writeFinderState(state: FinderState, system: UnitSystem): string {
+  const own = new URLSearchParams({ kind: state.kind })
+  if (state.asked) own.set('asked', state.asked)
+  const view = new URLSearchParams()
+  if (state.opened) view.set('show', state.opened.verdict)
+  if (state.opened?.check) view.set('check', state.opened.check)
+  if (state.picked) view.set('picked', state.picked)
+  if (state.from) {
+    view.set('more', state.from.verdict)
+    view.set('cursor', state.from.cursor)
+  }
+  const setup = writeSetupLink(Object.entries(state.raw), system)
+  return [own.toString(), setup, view.toString()].filter(Boolean).join('&')
+}
+
+/** The entries of a query that belong to the setup, and the key that says how a form's bare numbers were meant. */
+export function listSetupEntries(params: URLSearchParams): [string, string][] {
+  return [...params].filter(([key]) => (isSetupKey(key) && key !== 'units') || key === 'typed')
+}

@@ -1,0 +1,24 @@
+import { data } from 'react-router-dom'
+import type { EnsureQueryDataOptions, QueryKey } from '@tanstack/react-query'
+import type { App } from './app-context'
+import { toApiError } from './problem'
+
+/** Throws an answer of the API on to the error page, in a form that server rendering can write down. */
+export function throwFailure(error: unknown): never {
+  const { status, title, message, requestId } = toApiError(error)
+  // A Response of the router's own kind, not an Error: it keeps status and words through server rendering.
+  // eslint-disable-next-line @typescript-eslint/only-throw-error
+  throw data({ title, detail: message, ...(requestId && { requestId }) }, { status: status === 0 ? 503 : status })
+}
+
+/** Waits for what the page cannot be without. */
+export async function requireData<T, Key extends QueryKey>(
+  app: App,
+  options: EnsureQueryDataOptions<T, Error, T, Key>,
+): Promise<T> {
+  try {
+    return await app.queryClient.ensureQueryData(options)
+  } catch (error) {
+    return throwFailure(error)
+  }
+}

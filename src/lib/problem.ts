@@ -1,0 +1,45 @@
+import type { Problem } from '#shared/schemas/problem'
+
+/** A request that did not succeed: the server's problem document, or `status` 0 where nothing answered. */
+export class ApiError extends Error {
+  override readonly name = 'ApiError'
+  readonly status: number
+  readonly title: string
+  readonly requestId: string | undefined
+  readonly errors: readonly { readonly pointer: string; readonly detail: string }[]
+
+  constructor(status: number, title: string, detail: string, problem: Partial<Problem> = {}) {
+    super(detail)
+    this.status = status
+    this.title = title
+    this.requestId = problem.requestId
+    this.errors = problem.errors ?? []
+  }
+}
+
+/** Away for the moment: worth asking again without being told to. */
+export function isAway(error: unknown): boolean {
+  return error instanceof ApiError && (error.status === 0 || error.status === 502 || error.status === 503)
+}
+
+export function isNotFound(error: unknown): boolean {
+  return error instanceof ApiError && error.status === 404
+}
+
+export function toApiError(error: unknown): ApiError {
+  if (error instanceof ApiError) return error
+  return new ApiError(500, 'Something went wrong on our side', 'The page could not make sense of what it was sent.')
+}
+
+/** Never throws: an answer that is no problem document, such as a proxy's own page, still becomes an error in words. */
+export async function readProblem(response: Response): Promise<ApiError> {
+  const text = await response.text().catch(() => '')
+  try {
+    const problem = JSON.parse(text) as Partial<Problem>
+    if (typeof problem.title === 'string' && typeof problem.detail === 'string')
+      return new ApiError(response.status, problem.title, problem.detail, problem)
+  } catch {
+    // Not JSON: answered below.
+  }
+  return new ApiError(response.status, 'The request did not succeed', `The server answered with ${response.status}.`)
+}
