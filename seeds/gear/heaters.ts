@@ -478,4 +478,92 @@ const inlineHeaters = createFamily({
   },
 })
 
-export const heaters = [...glassRods, ...polymerRods, ...titaniumRods, ...inlineHeaters]
+/** A size between 100 and 150 W that several makers added in the same season, for tanks of 60 to 130 L. */
+const betweenSizes = [
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Tarnwyke',
+    line: 'Torrid',
+    date: '2025-10-20',
+    author: 'caliper_crab',
+    common: { ...titanium, thermostat: 'built-in', ...northAmerica, cordMm: 1800 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125': [125, 220, 28, gal(18), gal(35), 176] },
+    backing: { lengthMm: measuredTo(1, 'calipers, one piece') },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Vantrosse',
+    line: 'Calid',
+    date: '2025-10-27',
+    author: 'oolite_owl',
+    common: { ...polymer, ...northAmerica, cordMm: 1900 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125': [125, 221, 36, gal(17), gal(34), 168] },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Kindlewrack',
+    line: 'Moss',
+    date: '2025-11-03',
+    author: 'rimless_rae',
+    common: { ...polymer, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125 W': [125, 268, 33, gal(18), gal(38), 214] },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Hearthbrine',
+    line: 'Ember',
+    date: '2025-11-10',
+    author: 'saltmarsh_jo',
+    common: { ...glass, ...northAmerica, cordMm: 1830 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125 W': [125, 266, 23, gal(18), gal(33), 222] },
+    later: {
+      '125 W': [remeasure('2026-02-14', 'tess_reefs', 'calipers, two pieces', { lengthMm: [268, 1] })],
+    },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Murrelo',
+    line: 'Tally',
+    date: '2025-11-17',
+    author: 'gallon_goat',
+    common: { ...polymer, ...northAmerica, cordMm: 1830 },
+    columns: rod,
+    rows: { '125': [125, 262, 28, gal(18), gal(35)] },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Warmskerry',
+    line: 'Strand C',
+    date: '2025-12-01',
+    author: 'kelp_and_calipers',
+    common: { ...complete, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125 W': [125, 230, 19, gal(18), gal(36), 195] },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Warmskerry',
+    line: 'Strand',
+    date: '2025-12-01',
+    author: 'kelp_and_calipers',
+    common: { ...bare, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125 W': [125, 230, 19, gal(18), gal(36), 195] },
+  }),
+  ...createFamily({
+    kind: 'heater',
+    brand: 'Saltquill',
+    line: 'Warden',
+    date: '2026-01-12',
+    author: 'quietpump',
+    common: { ...glass, ...northAmerica, cordMm: 2000 },
+    columns: [...rod, 'minImmersionMm'],
+    rows: { '125 W': [125, 281, 38, gal(18), gal(38), 232] },
+  }),
+]
+
+export const heaters = [...glassRods, ...polymerRods, ...titaniumRods, ...betweenSizes, ...inlineHeaters]
