@@ -32,20 +32,28 @@ export function numberChambers(entries: readonly (readonly [string, string])[]):
   return [...numbered, ...ids.filter(([key]) => !known.has(key))]
 }
 
-/** Where a key stands in the canonical link: as the form asks, then items as they came. */
-export function comparePaths(a: string, b: string): number {
-  const [placeA, placeB] = [rankPath(a), rankPath(b)]
-  return placeA[0] - placeB[0] || placeA[1] - placeB[1] || placeA[2] - placeB[2]
+type Rank = readonly [place: number, inside: number, field: number]
+
+function rankPath(path: string, itemPlaces: ReadonlyMap<string, number>): Rank {
+  const [section, second = '', third = '', fourth] = path.split('.')
+  if (section === 'items') {
+    const field = itemFieldKeys.indexOf(third)
+    return [setupFields.length, itemPlaces.get(second) ?? 0, field < 0 ? itemFieldKeys.length : field]
+  }
+  if (section !== 'tank' || second !== 'chambers') return [placeByPath.get(path) ?? setupFields.length - 1, 0, 0]
+  const first = placeByPath.get('tank.chambers.*.id') ?? 0
+  return [first, Number(third), placeByPath.get(`tank.chambers.*.${fourth}`) ?? 0]
 }
 
-function rankPath(path: string): readonly [number, number, number] {
-  const words = path.split('.')
-  if (words[0] === 'items') {
-    const place = itemFieldKeys.indexOf(words[2] ?? '')
-    return [setupFields.length, 0, place < 0 ? itemFieldKeys.length : place]
+/** As the form asks, then items as they came, each with its fields together. */
+export function sortPaths(paths: readonly string[]): string[] {
+  const itemPlaces = new Map<string, number>()
+  for (const path of paths) {
+    const [section, id = ''] = path.split('.')
+    if (section === 'items' && !itemPlaces.has(id)) itemPlaces.set(id, itemPlaces.size)
   }
-  if (words[1] !== 'chambers') return [placeByPath.get(path) ?? setupFields.length - 1, 0, 0]
-  const first = placeByPath.get('tank.chambers.*.id') ?? 0
-  const field = placeByPath.get(`tank.chambers.*.${words[3]}`) ?? 0
-  return [first, Number(words[2]), field]
+  return paths
+    .map((path) => ({ path, rank: rankPath(path, itemPlaces) }))
+    .sort(({ rank: a }, { rank: b }) => a[0] - b[0] || a[1] - b[1] || a[2] - b[2])
+    .map(({ path }) => path)
 }

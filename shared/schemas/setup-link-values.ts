@@ -1,3 +1,4 @@
+import type { z } from 'zod'
 import type { FieldAttribute, MeasureAttribute } from '../kinds/types'
 import { readMeasure } from '../units/read'
 import { findShownUnit } from '../units/convert'
@@ -79,6 +80,15 @@ function readByType(
   }
 }
 
+const schemas = new WeakMap<FieldAttribute, z.ZodType>()
+
+/** A page reads dozens of fields with every visit; their schemas are made once. */
+function getFieldSchema(attribute: FieldAttribute): z.ZodType {
+  const schema = schemas.get(attribute) ?? createFieldSchema(attribute)
+  schemas.set(attribute, schema)
+  return schema
+}
+
 /** Reads what was typed for one field, and holds it to the field's own limits. Never throws. */
 export function readLinkValue(
   typed: string,
@@ -88,7 +98,7 @@ export function readLinkValue(
 ): LinkValue {
   const read = readByType(typed.trim(), attribute, system, typedIn)
   if (!read.ok) return read
-  const parsed = createFieldSchema(attribute).safeParse(read.value)
+  const parsed = getFieldSchema(attribute).safeParse(read.value)
   return parsed.success
     ? read
     : { ok: false, detail: parsed.error.issues[0]?.message ?? 'is not a value for this field' }

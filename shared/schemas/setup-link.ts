@@ -4,7 +4,7 @@ import { limits } from '../limits'
 import { unitSystems, type UnitSystem } from '../units/systems'
 import type { SetupRequest } from './setup'
 import { findItemField, readItemPlace } from './setup-link-items'
-import { comparePaths, isSetupKey, numberChambers } from './setup-link-keys'
+import { isSetupKey, numberChambers, sortPaths } from './setup-link-keys'
 import { readLinkValue } from './setup-link-values'
 
 /** A text in a link that could not be read: where it stands, as it was typed, and why not. */
@@ -90,26 +90,23 @@ function toSetup(tree: Tree, system: UnitSystem): SetupRequest {
   } as SetupRequest
 }
 
-interface LinkEntry {
-  readonly path: string
-  readonly text: string
-}
-
 /** Every text of the link in canonical order and spelling, with what it means. */
 function readEntries(query: LinkQuery, system: UnitSystem) {
   const given = findText(query, typedInKey)
   const typedIn = isSystem(given) ? given : undefined
   const raw = new Map(numberChambers(joinRepeated(query)))
-  const found: (LinkEntry & { readonly value: unknown })[] = []
+  const found: { readonly path: string; readonly value: unknown }[] = []
   const problems: LinkProblem[] = []
-  for (const path of [...raw.keys()].sort(comparePaths)) {
+  const canonical: [string, string][] = []
+  for (const path of sortPaths([...raw.keys()])) {
     const text = raw.get(path) ?? ''
     const field = findField(path, raw)
     const read = field === undefined ? undefined : readLinkValue(text, field, system, typedIn)
-    if (read?.ok) found.push({ path, text: read.text, value: read.value })
+    canonical.push([path, read?.ok ? read.text : text])
+    if (read?.ok) found.push({ path, value: read.value })
     else problems.push({ path, text, detail: read?.detail ?? 'is not a known field' })
   }
-  return { raw, read: found, problems }
+  return { raw, read: found, problems, canonical }
 }
 
 /**
@@ -149,8 +146,6 @@ function writeQuery(entries: Iterable<readonly [string, string]>): string {
  * with their unit. What could not be read stays as it was typed. Writing twice changes nothing.
  */
 export function writeSetupLink(query: LinkQuery, system: UnitSystem): string {
-  const { read, problems } = readEntries([...query], system)
-  const all: LinkEntry[] = [...read, ...problems]
-  const sorted = all.sort((a, b) => comparePaths(a.path, b.path))
-  return writeQuery(sorted.map(({ path, text }) => [path, text]))
+  const { canonical } = readEntries([...query], system)
+  return writeQuery(canonical)
 }
