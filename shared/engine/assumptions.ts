@@ -18,16 +18,19 @@ export function printSetupValue(path: string, value: Value, words: Printer): str
   return label(value)
 }
 
-/** "coldest room"; a chamber's field names the chamber's place. */
-export function labelSetupPath(path: string): string {
+/** "coldest room"; a chamber's field names the chamber: "water depth of the rear chamber". */
+export function labelSetupPath(path: string, { tank }: Plan): string {
   if (path === 'goals.turnoverPerHour') return 'turnover'
-  return findSetupField(path)?.attribute.label ?? path
+  const label = findSetupField(path)?.attribute.label ?? path
+  const [, list, place] = path.split('.')
+  const chamber = list === 'chambers' ? tank.chambers[Number(place)] : undefined
+  return chamber ? `${label.replace(/^chamber /, '')} of the ${chamber.name}` : label
 }
 
 /** Every default used, in words: "Coldest room: 18 °C, assumed." */
 export function listAssumptions(plan: Plan, words: Printer): readonly Assumption[] {
   return [...plan.assumed].map(([key, value]) => {
-    const label = labelSetupPath(key)
+    const label = labelSetupPath(key, plan)
     const printed = printSetupValue(key, value, words) ?? String(value)
     return { key, value, message: `${label[0]?.toUpperCase()}${label.slice(1)}: ${printed}, assumed.` }
   })

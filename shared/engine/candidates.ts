@@ -1,6 +1,5 @@
 import { assessItem, findPlacement, judgeAll, type Assessment } from './assess'
 import { addUp } from './budgets'
-import { getRules } from './checks/index'
 import type { Judged } from './judge'
 import { diff, isDemand, listDemands, type RawKnockOn } from './knock-ons'
 import { checkEssentials } from './needs'
@@ -8,6 +7,7 @@ import type { Candidate } from './rule'
 import { createScene, withItems, type Scene } from './scene'
 import type { Plan } from './setup/plan'
 import { resolve } from './setup/resolve'
+import { hasSize } from './setup/tank'
 import type { Item, Piece, Place, Placement, Setup, Verdict } from './types'
 import { decideVerdict } from './verdict'
 import { getKind, type KindKey } from '../kinds/index'
@@ -59,91 +59,81 @@ export function setBench(setup: Setup, kind: KindKey, options: CandidateOptions 
   return { scene: createScene(plan, others), before, kind }
 }
 
-/** The whole setup with the candidate in it, its own judgements taken as they are. */
-function assessAfter(
-  { scene, before, kind }: Bench,
-  candidate: Candidate,
-  judged: readonly Judged[],
-  verdict: Verdict,
-): Assessment {
-  const { piece, quantity } = candidate
-  const item: Item = {
-    id: candidateId,
-    piece,
-    quantity,
-    state: 'planned',
-    ...(candidate.place && { place: candidate.place }),
-  }
+/** The whole setup with the candidate in it, judged but for the candidate itself. */
+function assessAfter({ scene, before, kind }: Bench, { piece, quantity, place }: Candidate): Assessment {
+  const { others } = scene
   if (kind === 'tank') {
-    const tank = { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }
-    const plan = resolve(withItems(scene.plan.setup, scene.others, tank))
-    const items = scene.others.map((other) => assessItem(plan, scene.others, other))
-    return { plan, items, essentials: checkEssentials(plan, scene.others), budgets: addUp(plan, scene.others) }
+    const plan = resolve(
+      withItems(scene.plan.setup, others, { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }),
+    )
+    const items = others.map((other) => assessItem(plan, others, other))
+    return { plan, items, essentials: checkEssentials(plan, others), budgets: addUp(plan, others) }
   }
-  const items = [...scene.others, item]
   const { plan } = before
+  const items = [...others, { id: candidateId, piece, quantity, state: 'planned' as const, ...(place && { place }) }]
   return {
     plan,
-    items: [...scene.others.map((other) => assessItem(plan, items, other)), { item, judged, verdict }],
+    items: others.map((other) => assessItem(plan, items, other)),
     essentials: checkEssentials(plan, items),
     budgets: addUp(plan, items),
   }
 }
 
-/** What else changes with the candidate: its own demands, and those that its arrival makes of the rest. */
-export function findKnockOns(
-  bench: Bench,
-  candidate: Candidate,
-  judged: readonly Judged[],
-  verdict: Verdict,
-): readonly RawKnockOn[] {
-  if (bench.scene.others.length === 0 && bench.kind !== 'tank') return listDemands(judged)
-  // A tank of unknown size cannot be resolved; what it asks itself is all that can be said.
-  if (bench.kind === 'tank' && verdict === 'unknown') return listDemands(judged)
-  const after = assessAfter(bench, candidate, judged, verdict)
-  const own = bench.kind === 'tank' ? listDemands(judged) : []
-  return [...own, ...diff(bench.before, after).filter(isDemand)]
+/** What the candidate's arrival makes the rest of the setup ask: checks that got worse, essentials that went missing. */
+export function findRestKnockOns(bench: Bench, candidate: Candidate): readonly RawKnockOn[] {
+  if (bench.scene.others.length === 0) return []
+  // A tank of unknown size cannot be put in the setup; what it asks itself is all that can be said.
+  if (bench.kind === 'tank' && !hasSize(candidate.piece.specs)) return []
+  return diff(bench.before, assessAfter(bench, candidate)).filter(isDemand)
 }
 
-/** How many of the piece would do, where a rule says that several would. */
-export const countEnough = (judged: readonly Judged[]): number | undefined =>
-  judged.find(({ judgement }) => judgement.enough !== undefined)?.judgement.enough
+interface JudgedCandidate {
+  readonly candidate: Candidate
+  readonly judged: readonly Judged[]
+  readonly verdict: Verdict
+}
 
 /**
  * Judges one candidate. Where a rule finds that several of it would do, all rules are asked again for so many; if that
- * fails elsewhere (no room, no outlet), one is judged without that way out.
+ * fails elsewhere (no room), one is judged without that way out. `judgeAs` judges it so many times over.
  */
 export function judgeCandidate(
   scene: Scene,
   piece: Piece,
   options: CandidateOptions = {},
-): { candidate: Candidate; judged: readonly Judged[]; verdict: Verdict } {
+  judgeAs?: (quantity: number, mayMultiply: boolean) => readonly Judged[],
+): JudgedCandidate {
   const asked = options.quantity ?? 1
-  const attempt = (quantity: number, mayMultiply: boolean) => {
+  const attempt = (quantity: number, mayMultiply: boolean): JudgedCandidate => {
     const candidate: Candidate = { piece, quantity, mayMultiply, ...(options.place && { place: options.place }) }
-    const judged = judgeAll(scene, candidate)
+    const judged = judgeAs?.(quantity, mayMultiply) ?? judgeAll(scene, candidate)
     return { candidate, judged, verdict: decideVerdict(judged) }
   }
   const first = attempt(asked, options.quantity === undefined)
-  const enough = countEnough(first.judged)
+  const enough = first.judged.find(({ judgement }) => judgement.enough !== undefined)?.judgement.enough
   if (enough === undefined || first.verdict === 'no') return first
   const several = attempt(enough, true)
   return several.verdict === 'no' ? attempt(asked, false) : several
 }
 
-/** One candidate with its knock-ons; what fits by itself but asks something of the rest fits with changes. */
+/** What fits by itself but asks something of the rest fits with changes. */
+export const weighKnockOns = (own: Verdict, restDemands: number): Verdict =>
+  own === 'fits' && restDemands > 0 ? 'changes' : own
+
+/** One candidate with its knock-ons: its own demands, then the rest's. A piece that does not fit has none. */
 export function assessCandidate(bench: Bench, piece: Piece, options: CandidateOptions = {}): AssessedCandidate {
   const { candidate, judged, verdict } = judgeCandidate(bench.scene, piece, options)
-  const knockOns = verdict === 'no' ? [] : findKnockOns(bench, candidate, judged, verdict)
-  const placement = findPlacement(judged)
-  return {
-    candidate,
-    judged,
-    verdict: verdict === 'fits' && knockOns.length > 0 ? 'changes' : verdict,
-    knockOns,
-    ...(placement && { placement }),
-  }
+  const rest = verdict === 'no' ? [] : findRestKnockOns(bench, candidate)
+  return complete(candidate, judged, verdict, rest)
 }
 
-export const getTarget = (scene: Scene, candidate: Candidate): number | null =>
-  getRules(candidate.piece.kind).target?.(scene, candidate) ?? null
+export function complete(
+  candidate: Candidate,
+  judged: readonly Judged[],
+  own: Verdict,
+  rest: readonly RawKnockOn[],
+): AssessedCandidate {
+  const placement = findPlacement(judged)
+  const knockOns = own === 'no' ? [] : [...listDemands(judged), ...rest]
+  return { candidate, judged, verdict: weighKnockOns(own, rest.length), knockOns, ...(placement && { placement }) }
+}

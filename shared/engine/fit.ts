@@ -1,17 +1,24 @@
 import type { KindKey } from '../kinds/index'
 import { getAttribute } from '../kinds/index'
 import { createPrinter, type Printer } from '../units/print'
-import { assessCandidate, findKnockOns, setBench, type AssessedCandidate, type CandidateOptions } from './candidates'
-import { findPlacement } from './assess'
+import {
+  assessCandidate,
+  complete,
+  findRestKnockOns,
+  setBench,
+  type AssessedCandidate,
+  type CandidateOptions,
+} from './candidates'
 import { getRules, hasOwnRules } from './checks/index'
 import { listAssumptions } from './assumptions'
 import type { Judged } from './judge'
-import { presentKnockOns, type RawKnockOn } from './knock-ons'
+import { presentKnockOns } from './knock-ons'
+import { groupByVerdict, sortGroup, takePage } from './ranking'
 import { presentCautions, presentCheck } from './present'
 import { readNumber } from './values'
 import { sweep, type Sweep } from './sweep'
-import type { Answer, FitOptions, FitResult, Mark, Piece, Scale, Setup, Verdict } from './types'
-import { rankConfidence, rateConfidence, verdictOrder } from './verdict'
+import type { Answer, FitOptions, FitResult, Mark, Piece, Scale, Setup } from './types'
+import { decideVerdict, rateConfidence, verdictOrder } from './verdict'
 import { getKind } from '../kinds/index'
 
 const onTheWay = (kind: KindKey): readonly string[] =>
@@ -70,79 +77,38 @@ export function fitCheck(setup: Setup, piece: Piece, options: CandidateOptions =
   return presentAnswer(bench.scene, assessCandidate(bench, piece, options), createPrinter(setup.units))
 }
 
-interface Ranked {
-  readonly index: number
-  readonly verdict: Verdict
-  readonly knockOns: readonly RawKnockOn[] | undefined
-  readonly demands: number
-  readonly backing: number
-}
+const mostMarks = 400
 
-/** Knock-ons are looked for only where the setup holds more than the piece; otherwise its own changes are all there are. */
-function rank(swept: Sweep, pieces: readonly Piece[]): Ranked[] {
-  const { bench, verdicts, changes, quantities, judgedOf } = swept
-  const isAlone = bench.scene.others.length === 0 && bench.kind !== 'tank'
-  return pieces.map((piece, index) => {
-    const own = verdicts[index]!
-    const judged = judgedOf(index)
-    const knockOns =
-      isAlone || own === 'no' ? undefined : findKnockOns(bench, { piece, quantity: quantities[index]! }, judged, own)
-    return {
-      index,
-      verdict: own === 'fits' && knockOns && knockOns.length > 0 ? 'changes' : own,
-      knockOns,
-      demands: knockOns?.length ?? changes[index]!,
-      backing: rankConfidence(rateConfidence(piece, judged)),
-    }
+function markAll(
+  scales: readonly Scale[],
+  order: readonly number[],
+  swept: Sweep,
+  pieces: readonly Piece[],
+): readonly Mark[] {
+  return order.slice(0, mostMarks).flatMap((index): Mark[] => {
+    const { gear, specs } = pieces[index]!
+    if (!gear) return []
+    const values = Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null]))
+    return [{ ...gear, verdict: swept.verdicts[index]!, values }]
   })
 }
 
-const verdictRank = Object.fromEntries(verdictOrder.map((verdict, index) => [verdict, index])) as Record<
-  Verdict,
-  number
->
-
-function compare(swept: Sweep, pieces: readonly Piece[]) {
-  const slugOf = (index: number) => pieces[index]?.gear?.slug ?? ''
-  return (a: Ranked, b: Ranked): number =>
-    verdictRank[a.verdict] - verdictRank[b.verdict] ||
-    a.demands - b.demands ||
-    swept.targets[a.index]! - swept.targets[b.index]! ||
-    a.backing - b.backing ||
-    (slugOf(a.index) < slugOf(b.index) ? -1 : 1)
-}
-
-const decides = (judged: readonly Judged[], verdict: Verdict): readonly Judged[] =>
-  verdict === 'no'
-    ? judged.filter((one) => (one.eitherWay ?? one.outcome) === 'fail')
-    : judged.filter((one) => one.outcome === 'nodata' && one.eitherWay === undefined && one.rule.worst === 'fail')
-
-function tally<T>(
-  entries: readonly T[],
-  keysOf: (entry: T) => readonly string[],
+function tally(
+  indexes: readonly number[],
+  keysOf: (index: number) => readonly string[],
 ): readonly { key: string; count: number }[] {
   const counts = new Map<string, number>()
-  for (const entry of entries) for (const key of new Set(keysOf(entry))) counts.set(key, (counts.get(key) ?? 0) + 1)
+  for (const index of indexes) for (const key of new Set(keysOf(index))) counts.set(key, (counts.get(key) ?? 0) + 1)
   return [...counts]
     .map(([key, count]) => ({ key, count }))
     .sort((a, b) => b.count - a.count || (a.key < b.key ? -1 : 1))
 }
 
-const mostMarks = 400
-
-function markAll(scales: readonly Scale[], ranked: readonly Ranked[], pieces: readonly Piece[]): readonly Mark[] {
-  return ranked.slice(0, mostMarks).flatMap(({ index, verdict }) => {
-    const { gear, specs } = pieces[index]!
-    if (!gear) return []
-    return [
-      {
-        ...gear,
-        verdict,
-        values: Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null])),
-      },
-    ]
-  })
-}
+/** Missing attributes that leave a piece unjudged. */
+const listMissing = (judged: readonly Judged[]): readonly string[] =>
+  judged
+    .filter(({ outcome, eitherWay, rule }) => outcome === 'nodata' && eitherWay === undefined && rule.worst === 'fail')
+    .flatMap(({ judgement }) => judgement.missing ?? [])
 
 /**
  * Every piece of a kind judged in a setup and put in order: verdict, fewer knock-ons, closeness to the kind's target,
@@ -157,45 +123,51 @@ export function fit(
 ): FitResult {
   const words = createPrinter(setup.units)
   const swept = sweep(setup, kind, pieces, options)
-  const { scene } = swept.bench
-  const ranked = rank(swept, pieces).sort(compare(swept, pieces))
-  const byVerdict = (verdict: Verdict) => ranked.filter((one) => one.verdict === verdict)
-  const failed = byVerdict('no')
-  const unknown = byVerdict('unknown')
-  const decidingRules = ({ index, verdict }: Ranked) =>
-    decides(swept.judgedOf(index), verdict).map(({ rule }) => rule.id)
-  const asked = ranked.filter(
-    (one) =>
-      (!options.verdict || one.verdict === options.verdict) &&
-      (!options.check || decidingRules(one).includes(options.check)),
+  const { bench } = swept
+  const groups = groupByVerdict(swept)
+  const { check } = options
+  const asked = verdictOrder.filter((verdict) => !options.verdict || verdict === options.verdict)
+  const page = takePage(
+    asked.map((verdict) =>
+      check ? groups[verdict].filter((index) => swept.isDecidedBy(index, check)) : groups[verdict],
+    ),
+    options.offset,
+    options.limit,
+    (indexes) => sortGroup(indexes, swept, pieces),
   )
-  const labels = new Map(getRules(kind).rules.map(({ id, failLabel }) => [id, failLabel]))
-  const scales = options.scales ? getRules(kind).scales?.(scene, words) : undefined
-  const answers = asked.slice(options.offset, options.offset + options.limit).map(({ index, verdict, knockOns }) => {
+  const rules = getRules(kind)
+  const labels = new Map(rules.rules.map(({ id, failLabel }) => [id, failLabel]))
+  const scales = options.scales ? rules.scales?.(bench.scene, words) : undefined
+  const answers = page.indexes.map((index) => {
+    const candidate = swept.candidateOf(index)
     const judged = swept.judgedOf(index)
-    const candidate = { piece: pieces[index]!, quantity: swept.quantities[index]! }
-    const found = knockOns ?? (verdict === 'no' ? [] : findKnockOns(swept.bench, candidate, judged, verdict))
-    const placement = findPlacement(judged)
-    return presentAnswer(scene, { candidate, judged, verdict, knockOns: found, ...(placement && { placement }) }, words)
+    const own = decideVerdict(judged)
+    return presentAnswer(
+      bench.scene,
+      complete(candidate, judged, own, own === 'no' ? [] : findRestKnockOns(bench, candidate)),
+      words,
+    )
   })
+  const { fits, changes, no, unknown } = groups
   return {
     answers,
-    counts: {
-      fits: byVerdict('fits').length,
-      changes: byVerdict('changes').length,
-      no: failed.length,
-      unknown: unknown.length,
-    },
-    failedBy: tally(failed, decidingRules).map(({ key, count }) => ({
-      check: key,
+    counts: { fits: fits.length, changes: changes.length, no: no.length, unknown: unknown.length },
+    failedBy: swept.countFailures().map(({ check, count }) => ({ check, count, label: labels.get(check) ?? check })),
+    missingBy: tally(unknown, (index) => listMissing(swept.judgedOf(index))).map(({ key, count }) => ({
+      key,
       count,
-      label: labels.get(key) ?? key,
+      label: getAttribute(kind, key)?.label ?? key,
     })),
-    missingBy: tally(unknown, ({ index, verdict }) =>
-      decides(swept.judgedOf(index), verdict).flatMap(({ judgement }) => judgement.missing ?? []),
-    ).map(({ key, count }) => ({ key, count, label: getAttribute(kind, key)?.label ?? key })),
-    assumptions: listAssumptions(scene.plan, words),
-    total: asked.length,
-    ...(scales && { scales, marks: markAll(scales, ranked, pieces) }),
+    assumptions: listAssumptions(bench.scene.plan, words),
+    total: page.total,
+    ...(scales && {
+      scales,
+      marks: markAll(
+        scales,
+        verdictOrder.flatMap((verdict) => groups[verdict]),
+        swept,
+        pieces,
+      ),
+    }),
   }
 }

@@ -2,7 +2,7 @@ import { findLast } from './physics/bisect'
 import { tankHeatLoss, type TankHeatLoss } from './physics/heat'
 import { heatCapacityJK } from './physics/seawater'
 import { findEquilibriumC, stuckOn, type StuckOn } from './physics/stuck-on'
-import { once, type Scene } from './scene'
+import { once, onceFor, type Scene } from './scene'
 import type { Plan } from './setup/plan'
 import type { Item } from './types'
 import { readFlag, readNumber } from './values'
@@ -62,8 +62,7 @@ export function findHeaterNeed({ plan, others }: Scene): HeaterNeed {
   }
 }
 
-/** The coldest room, °C, in which `heaterW` still holds the goal, by the upper (Shah) or the usual figure; down to −20. */
-export function findColdestHeldC(scene: Scene, heaterW: number, figure: 'totalW' | 'totalUpperW'): number {
+function searchColdestC(scene: Scene, heaterW: number, figure: 'totalW' | 'totalUpperW'): number {
   const { plan } = scene
   const { gainW } = once(scene, findHeaterNeed)
   const goalC = plan.goals.temperatureC
@@ -71,8 +70,14 @@ export function findColdestHeldC(scene: Scene, heaterW: number, figure: 'totalW'
   return findLast(fallsShort, -20, goalC + 20) ?? -20
 }
 
-/** What happens if heaters of `heaterW` in all never switch off in the warmest room. */
-export function findStuckOn(scene: Scene, heaterW: number): StuckOn {
+const searchColdestUsual = (scene: Scene, heaterW: number) => searchColdestC(scene, heaterW, 'totalW')
+const searchColdestUpper = (scene: Scene, heaterW: number) => searchColdestC(scene, heaterW, 'totalUpperW')
+
+/** The coldest room, °C, in which `heaterW` still holds the goal, by the upper (Shah) or the usual figure; down to −20. */
+export const findColdestHeldC = (scene: Scene, heaterW: number, figure: 'totalW' | 'totalUpperW'): number =>
+  onceFor(scene, figure === 'totalW' ? searchColdestUsual : searchColdestUpper, heaterW)
+
+function integrateStuckOn(scene: Scene, heaterW: number): StuckOn {
   const { plan } = scene
   const { gainW } = once(scene, findHeaterNeed)
   const { temperatureC, salinityPpt } = plan.goals
@@ -82,6 +87,9 @@ export function findStuckOn(scene: Scene, heaterW: number): StuckOn {
     temperatureC,
   )
 }
+
+/** What happens if heaters of `heaterW` in all never switch off in the warmest room. */
+export const findStuckOn = (scene: Scene, heaterW: number): StuckOn => onceFor(scene, integrateStuckOn, heaterW)
 
 /** Where the water settles in the warmest room with no heater on, °C. */
 export function findUnheatedC({ plan, others }: Scene): number {

@@ -1,32 +1,20 @@
-import { findSetupField } from '../kinds/setup-fields'
 import { getAttribute } from '../kinds/index'
-import type { Attribute } from '../kinds/types'
-import { findLast } from './physics/bisect'
-import type { Candidate, Judgement, Rule, Say } from './rule'
-import { vary, type Scene } from './scene'
+import { findCondition, type Condition } from './conditions'
+import type { Candidate, Judgement, Rule } from './rule'
+import type { Scene } from './scene'
 import type { Outcome, Specs } from './types'
-
-/** The assumed value on which an outcome turns, and where it turns. */
-export interface Condition {
-  readonly path: string
-  /** The check is kept from here on, towards `toward`; null for a choice, which has no way. */
-  readonly turnsAt: number | string
-  readonly toward: 'more' | 'less' | null
-  readonly assumed: number | string | boolean
-}
+import { listUsual } from './usual'
 
 /** A rule's finding once assumptions and missing numbers were given their due. */
 export interface Judged {
   readonly rule: Rule
   readonly judgement: Judgement
   readonly outcome: Outcome
-  readonly assumed: readonly string[]
+  readonly assumed: () => readonly string[]
   /** For no data: the outcome that every usual value of what is missing would give, if they all agree. */
   readonly eitherWay?: Outcome
   readonly condition?: () => Condition
 }
-
-const samples = 9
 
 /** Setup paths with their defaults in use that match a rule's `uses`, the most telling first. */
 function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
@@ -38,23 +26,22 @@ function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
   })
 }
 
-const usualValues = (attribute: Attribute | undefined): readonly (number | string)[] => {
-  if (attribute?.type === 'measure') {
-    const [low, high] = attribute.usual
-    return Array.from({ length: samples }, (_, index) => low + ((high - low) * index) / (samples - 1))
-  }
-  if (attribute?.type === 'choice')
-    return attribute.options.map(({ value }) => (attribute.numeric ? Number(value) : value))
-  return []
-}
-
-/** What the check would say for every usual value of the missing attributes; undefined where they disagree or cannot be tried. */
-function tryMissing(scene: Scene, rule: Rule, candidate: Candidate, missing: readonly string[]): Outcome | undefined {
-  if (missing.length === 0 || missing.length > 2) return undefined
+/**
+ * What the check would say for every usual value of the missing attributes; undefined where they disagree, cannot be
+ * tried, or would condemn the piece on an assumed value.
+ */
+function tryMissing(
+  scene: Scene,
+  rule: Rule,
+  candidate: Candidate,
+  missing: readonly string[],
+  isAssumed: boolean,
+): Outcome | undefined {
+  if (rule.worst !== 'fail' || missing.length === 0 || missing.length > 2) return undefined
   const grid = missing.reduce<Specs[]>(
     (rows, key) =>
       rows.flatMap((row) =>
-        usualValues(getAttribute(candidate.piece.kind, key)).map((value) => ({
+        listUsual(getAttribute(candidate.piece.kind, key)).map((value) => ({
           ...row,
           [key]: { value, source: 'estimate' as const },
         })),
@@ -69,75 +56,20 @@ function tryMissing(scene: Scene, rule: Rule, candidate: Candidate, missing: rea
     if (outcome === undefined || outcome === 'nodata' || (shared !== undefined && outcome !== shared)) return undefined
     shared = outcome
   }
-  return shared
-}
-
-const isKept = (outcome: Outcome | undefined) => outcome === 'pass'
-
-/** The first assumed value whose usual range holds one with which the check would pass. */
-function findCondition(
-  scene: Scene,
-  rule: Rule,
-  candidate: Candidate,
-  assumed: readonly string[],
-): (() => Condition) | undefined {
-  const outcomeAt = (path: string, value: number | string) => rule.judge(vary(scene, path, value), candidate)?.outcome
-  for (const path of assumed) {
-    const used = scene.plan.assumed.get(path)
-    const attribute = findSetupField(path)?.attribute
-    if (typeof used === 'number' && attribute?.type === 'measure') {
-      for (const [index, end] of attribute.usual.entries()) {
-        const isBeyond = index === 0 ? end < used : end > used
-        if (!isBeyond || !isKept(outcomeAt(path, end))) continue
-        return () => {
-          const fails = (share: number) =>
-            !isKept(
-              rule.judge(vary({ ...scene, kept: new Map() }, path, used + share * (end - used)), candidate)?.outcome,
-            )
-          const share = findLast(fails, 0, 1) ?? 0
-          return { path, assumed: used, turnsAt: used + share * (end - used), toward: index === 0 ? 'less' : 'more' }
-        }
-      }
-    }
-    if (attribute?.type === 'choice' && (typeof used === 'string' || typeof used === 'number')) {
-      const other = usualValues(attribute).find((value) => value !== used && isKept(outcomeAt(path, value)))
-      if (other !== undefined) return () => ({ path, assumed: used, turnsAt: other, toward: null })
-    }
-  }
-  return undefined
+  return shared === 'fail' && isAssumed ? undefined : shared
 }
 
 /** Judges one rule for one candidate. Null where the rule does not apply. */
 export function judge(scene: Scene, rule: Rule, candidate: Candidate): Judged | null {
   const judgement = rule.judge(scene, candidate)
   if (!judgement) return null
-  const assumed = listAssumed(scene, judgement.rests ?? rule.uses)
+  const assumed = () => listAssumed(scene, judgement.rests?.() ?? rule.uses)
   const base = { rule, judgement, assumed }
   if (judgement.outcome === 'nodata') {
-    const eitherWay = tryMissing(scene, rule, candidate, judgement.missing ?? [])
+    const eitherWay = tryMissing(scene, rule, candidate, judgement.missing ?? [], assumed().length > 0)
     return { ...base, outcome: 'nodata', ...(eitherWay && { eitherWay }) }
   }
-  if (judgement.outcome !== 'fail' || assumed.length === 0) return { ...base, outcome: judgement.outcome }
-  const condition = findCondition(scene, rule, candidate, assumed)
+  if (judgement.outcome !== 'fail') return { ...base, outcome: judgement.outcome }
+  const condition = findCondition(scene, assumed(), (varied) => rule.judge(varied, candidate)?.outcome === 'pass')
   return condition ? { ...base, outcome: 'change', condition } : { ...base, outcome: 'fail' }
 }
-
-/** "Only while the coldest room is at least 20.8 °C; we assumed 18 °C." */
-export const describeCondition =
-  (condition: Condition): Say =>
-  (words) => {
-    const attribute = findSetupField(condition.path)?.attribute
-    if (!attribute) return ''
-    const print = (value: number | string | boolean): string => {
-      if (attribute.type === 'measure' && typeof value === 'number') return words.measure(value, attribute.unit)
-      if (attribute.type === 'choice')
-        return attribute.options.find((option) => option.value === String(value))?.label ?? String(value)
-      return String(value)
-    }
-    const { turnsAt, toward, assumed } = condition
-    if (attribute.type === 'measure' && typeof turnsAt === 'number' && typeof assumed === 'number') {
-      const [at, was] = words.apart(turnsAt, assumed, attribute.unit)
-      return `It works if the ${attribute.label} is ${toward === 'less' ? 'at most' : 'at least'} ${at}; we assumed ${was}.`
-    }
-    return `It works if the ${attribute.label} is ${print(turnsAt)}; we assumed ${print(assumed)}.`
-  }

@@ -1,6 +1,7 @@
 import type { Printer } from '../units/print'
 import type { Assessment, AssessedItem } from './assess'
-import { describeCondition, type Judged } from './judge'
+import { describeCondition } from './conditions'
+import type { Judged } from './judge'
 import type { Say } from './rule'
 import type { KnockOn, Outcome } from './types'
 
@@ -36,12 +37,18 @@ export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
   })
 }
 
-/** Checks of a piece that stayed and that got worse. */
-function worsenedKnockOns(before: AssessedItem, after: AssessedItem): RawKnockOn[] {
+/**
+ * Checks of a piece that stayed and that got worse. Too few outlets and too much load are every piece's trouble alike:
+ * the setup's own need for outlets says the one, the first piece that finds it the other.
+ */
+function worsenedKnockOns(before: AssessedItem, after: AssessedItem, said: Set<string>): RawKnockOn[] {
   const was = new Map(before.judged.map((one) => [one.rule.id, one.outcome]))
   return after.judged.flatMap((one): RawKnockOn[] => {
     const from = was.get(one.rule.id) ?? 'pass'
     if (severity[one.outcome] <= severity[from]) return []
+    const need = one.judgement.asks?.need
+    if (need === 'outlets' || (need === 'circuit' && said.has(need))) return []
+    if (need) said.add(need)
     const say = sayOf(one)
     return [
       {
@@ -70,10 +77,11 @@ function budgetKnockOns(before: Assessment, after: Assessment): RawKnockOn[] {
  */
 export function diff(before: Assessment, after: Assessment): readonly RawKnockOn[] {
   const stayed = new Map(before.items.map((one) => [one.item.id, one]))
+  const said = new Set<string>()
   const items = after.items.flatMap((one) => {
     const was = stayed.get(one.item.id)
-    return was && was.item.piece.kind === one.item.piece.kind && was.item.piece === one.item.piece
-      ? worsenedKnockOns(was, one)
+    return was?.item.piece === one.item.piece
+      ? worsenedKnockOns(was, one, said)
       : was
         ? replacedKnockOns(was, one)
         : listDemands(one.judged)
@@ -87,8 +95,14 @@ export function diff(before: Assessment, after: Assessment): readonly RawKnockOn
       { kind, subject: essential.need, from: null, to: null, say: essential.isMet ? essential.sayMet : essential.say },
     ]
   })
-  return [...items, ...essentials, ...budgetKnockOns(before, after)]
+  const all = [...items, ...essentials, ...budgetKnockOns(before, after)]
+  return all.sort((a, b) => weight[a.kind] - weight[b.kind] || rankOf(b) - rankOf(a))
 }
+
+/** Worst first. */
+const weight: Readonly<Record<KnockOn['kind'], number>> = { need: 0, check: 1, missing: 2, budget: 3, freed: 4 }
+
+const rankOf = ({ to }: RawKnockOn): number => (typeof to === 'string' ? severity[to] : 0)
 
 /** A piece in the place of another of its id: only what it asks beyond what that one asked. */
 function replacedKnockOns(before: AssessedItem, after: AssessedItem): readonly RawKnockOn[] {

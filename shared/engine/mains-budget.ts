@@ -61,11 +61,16 @@ export function countPlugs(plan: Plan, items: readonly Item[]): Outlets {
   }
 }
 
-/** Outlets of all strips plus the wall's, less the one that each strip takes. */
+/**
+ * Outlets of the strips plus the wall's, less the one that each strip takes. A strip without a wall outlet of its own
+ * would hang on another strip and does not count, but for a single one: whoever counts no free outlet has it plugged in.
+ */
 export function countOutlets(plan: Plan, items: readonly Item[]): number {
-  const strips = ofKind(items, 'power-strip')
-  const taken = strips.reduce((count, item) => count + item.quantity, 0)
-  return sum(strips, 'outlets').total + Math.max(0, plan.mains.outlets - taken)
+  const strips = ofKind(items, 'power-strip').flatMap(({ piece, quantity }) =>
+    Array.from({ length: quantity }, () => readNumber(piece.specs, 'outlets') ?? 0),
+  )
+  const onTheWall = strips.sort((a, b) => b - a).slice(0, Math.max(1, plan.mains.outlets))
+  return onTheWall.reduce((total, outlets) => total + outlets, 0) + Math.max(0, plan.mains.outlets - strips.length)
 }
 
 /** Everything that can run longer than three hours, heaters at full power, W. */
@@ -95,22 +100,32 @@ export const otherLimits = (scene: Scene) => once(scene, limitOthers)
 
 export interface Controllers {
   readonly maxLoadW: number
+  /** Of the strongest one. */
+  readonly strongestW: number
   readonly outlets: number
   readonly loadedW: number
   readonly pluggedIn: number
   readonly count: number
+  /** A controller or a heater on it does not state what its load, power, outlets or plugs are. */
+  readonly isUnsure: boolean
 }
 
 /** Temperature controllers among the others, and what heaters already hang on them. */
 function sumControllers({ others }: Scene): Controllers {
   const controllers = ofKind(others, 'temperature-controller')
   const heaters = ofKind(others, 'heater')
+  const capacity = sum(controllers, 'maxLoadW')
+  const outlets = sum(controllers, 'outlets')
+  const loaded = sum(heaters, 'powerW')
+  const plugs = sum(heaters, 'plugs')
   return {
-    maxLoadW: sum(controllers, 'maxLoadW').total,
-    outlets: sum(controllers, 'outlets').total,
-    loadedW: sum(heaters, 'powerW').total,
-    pluggedIn: sum(heaters, 'plugs').total,
-    count: controllers.length,
+    maxLoadW: capacity.total,
+    strongestW: Math.max(0, ...controllers.map(({ piece }) => readNumber(piece.specs, 'maxLoadW') ?? 0)),
+    outlets: outlets.total,
+    loadedW: loaded.total,
+    pluggedIn: plugs.total,
+    count: controllers.reduce((count, { quantity }) => count + quantity, 0),
+    isUnsure: [capacity, outlets, loaded, plugs].some(({ unknown }) => unknown.length > 0),
   }
 }
 

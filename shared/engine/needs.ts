@@ -1,6 +1,8 @@
 import type { KindKey } from '../kinds/index'
+import { hasAreas } from './checks/shape'
 import { findHeaterNeed } from './heat-budget'
 import { countPlugs } from './mains-budget'
+import { countOf } from './counting'
 import type { Say } from './rule'
 import { createScene, once } from './scene'
 import type { Plan } from './setup/plan'
@@ -90,18 +92,23 @@ function checkHeat(plan: Plan, items: readonly Item[]): Essential | null {
     plan,
     items.filter((item) => item.piece.kind !== 'heater'),
   )
+  const base = { need: 'heat', unit: 'W' as const, metBy: heaters.map(({ id }) => id), isMet: heaters.length > 0 }
+  if (!hasAreas(plan))
+    return {
+      ...base,
+      amount: null,
+      say: () => 'There is no heater; how much power it takes cannot be computed for this shape of tank yet.',
+      sayMet: () => 'There is a heater; how much power it takes cannot be computed for this shape of tank yet.',
+    }
   const { needW, needUpperW } = once(scene, findHeaterNeed)
   if (needUpperW === 0) return null
   return {
-    need: 'heat',
+    ...base,
     amount: needUpperW,
-    unit: 'W',
-    metBy: heaters.map(({ id }) => id),
-    isMet: heaters.length > 0,
     say: (words) =>
       `There is no heater: with the room at ${words.temperature(plan.room.coldestC)} it takes ${words.pair([needW, needUpperW], 'W')}.`,
     sayMet: (words) =>
-      `${words.pair([needW, needUpperW], 'W')} hold ${words.temperature(plan.goals.temperatureC)} with the room at ${words.temperature(plan.room.coldestC)}.`,
+      `It takes ${words.pair([needW, needUpperW], 'W')} to hold ${words.temperature(plan.goals.temperatureC)} with the room at ${words.temperature(plan.room.coldestC)}.`,
   }
 }
 
@@ -114,8 +121,9 @@ function checkOutlets(plan: Plan, items: readonly Item[]): Essential {
     unit: 'count',
     metBy: strips.map(({ id }) => id),
     isMet: used <= capacity,
-    say: () => `There are ${used} plugs for ${capacity} outlets: a power strip is missing.`,
-    sayMet: () => `${used} of ${capacity} outlets are taken.`,
+    say: () =>
+      `${countOf(used, 'plug')} for ${countOf(capacity, 'outlet')}: ${strips.length > 0 ? 'another' : 'a'} power strip is missing.`,
+    sayMet: () => `${countOf(used, 'plug')} for ${countOf(capacity, 'outlet')}.`,
   }
 }
 

@@ -2,7 +2,8 @@ import type { Printer } from '../units/print'
 import { units } from '../units/units'
 import type { Assessment, AssessedItem } from './assess'
 import { listAssumptions } from './assumptions'
-import { describeCondition, type Judged } from './judge'
+import { describeCondition } from './conditions'
+import type { Judged } from './judge'
 import { isCloseCall } from './physics/conformance'
 import type { Check, ItemReport, Need, Report, Verdict } from './types'
 
@@ -17,13 +18,15 @@ function findMargin({ rule, judgement }: Judged): number | null {
 }
 
 const closeness = (probability: number): string =>
-  ` A close call, ${Math.round(probability * 100)} % sure: measure before buying.`
+  ` A close call: the limit is kept with a probability of ${Math.round(probability * 100)} %; measure before buying.`
 
 /** One check in words, in the reader's units. */
 export function presentCheck(judged: Judged, words: Printer): Check {
-  const { rule, judgement, outcome, assumed, condition } = judged
-  const { probability, missing } = judgement
-  const close = outcome !== 'nodata' && probability !== undefined && isCloseCall(probability)
+  const { rule, judgement, outcome, condition } = judged
+  const { missing } = judgement
+  const assumed = judged.assumed()
+  const probability = outcome === 'nodata' ? undefined : judgement.probability?.()
+  const close = probability !== undefined && isCloseCall(probability)
   const message = [
     judgement.say(words),
     condition ? ` ${describeCondition(condition())(words)}` : '',
@@ -41,7 +44,7 @@ export function presentCheck(judged: Judged, words: Printer): Check {
     basis: rule.basis,
     ...(missing && missing.length > 0 && { missing }),
     ...(assumed.length > 0 && { assumed }),
-    ...(probability !== undefined && outcome !== 'nodata' && { probability }),
+    ...(probability !== undefined && { probability }),
   }
 }
 

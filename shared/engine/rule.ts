@@ -21,12 +21,13 @@ export interface Judgement {
   /** Signed distance to the limit in the rule's unit, positive = to spare; by default taken from measured and limit. */
   readonly margin?: number | null
   readonly say: Say
-  readonly probability?: number
+  /** Probability that the limit is kept; asked for only where somebody reads it. */
+  readonly probability?: () => number
   readonly missing?: readonly string[]
   readonly asks?: Ask
   readonly placement?: Placement
   /** Setup paths that this finding rests on, where they are fewer than the rule's `uses`. */
-  readonly rests?: readonly string[]
+  readonly rests?: () => readonly string[]
   /** So many of this piece would do where one does not. */
   readonly enough?: number
   readonly cautions?: readonly Say[]
@@ -62,6 +63,11 @@ export interface Rule {
   readonly uses: readonly string[]
   /** As in "14 too long or too thick for the chamber". */
   readonly failLabel: string
+  /**
+   * The outcome without its reasons, where that can be told with next to no work; undefined where it cannot. Must agree
+   * with `judge`, assumptions given their due. Thousands of pieces are only counted, and need no more.
+   */
+  readonly glance?: (scene: Scene, candidate: Candidate) => 'pass' | 'fail' | undefined
   /** Null: does not apply to this piece in this setup. */
   readonly judge: (scene: Scene, candidate: Candidate) => Judgement | null
 }
@@ -72,6 +78,8 @@ export interface KindRules {
   /** Distance from the kind's target, smaller first; see the order of answers. */
   readonly target?: (scene: Scene, candidate: Candidate) => number | null
   readonly targetReads?: readonly string[]
+  /** The attributes through which a piece can matter to other pieces' checks and to the setup's needs; by default all. */
+  readonly feltThrough?: readonly string[]
   /** The whole answer in a sentence, where the checks in `covers` pass. */
   readonly summary?: {
     readonly covers: readonly string[]

@@ -1,8 +1,7 @@
 import type { Item, Setup } from './types'
 import type { Plan } from './setup/plan'
+import { giveValue } from './setup/give'
 import { resolve } from './setup/resolve'
-
-type Override = ReadonlyMap<string, number | string | boolean>
 
 /**
  * What a check sees besides the piece it judges: the setup with its defaults, and the other pieces that count. What
@@ -22,13 +21,20 @@ export function once<T>(scene: Scene, derive: (scene: Scene) => T): T {
   return scene.kept.get(derive) as T
 }
 
-/** The same scene with another value for one assumed path; kept per path and value. */
+/** Computes `derive(scene, of)` once per scene and number. */
+export function onceFor<T>(scene: Scene, derive: (scene: Scene, of: number) => T, of: number): T {
+  let known = scene.kept.get(derive) as Map<number, T> | undefined
+  if (!known) scene.kept.set(derive, (known = new Map()))
+  if (!known.has(of)) known.set(of, derive(scene, of))
+  return known.get(of) as T
+}
+
+/** The same scene had the setup's owner said a value that was assumed; kept per path and value. */
 export function vary(scene: Scene, path: string, value: number | string | boolean): Scene {
   const key = `${path}=${value}`
   const known = scene.kept.get(key) as Scene | undefined
   if (known) return known
-  const override: Override = new Map([[path, value]])
-  const varied = createScene(resolve(scene.plan.setup, override), scene.others)
+  const varied = createScene(resolve(giveValue(scene.plan.setup, path, value)), scene.others)
   scene.kept.set(key, varied)
   return varied
 }

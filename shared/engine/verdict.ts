@@ -13,7 +13,7 @@ export function decideVerdict(judged: readonly Judged[]): Verdict {
 }
 
 const isClose = ({ judgement, outcome }: Judged) =>
-  outcome !== 'nodata' && judgement.probability !== undefined && isCloseCall(judgement.probability)
+  outcome !== 'nodata' && judgement.probability !== undefined && isCloseCall(judgement.probability())
 
 /** Where the values that decided came from, and how many checks could as well have gone the other way. */
 export function rateConfidence(piece: Piece, judged: readonly Judged[]): Confidence {

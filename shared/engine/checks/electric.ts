@@ -1,6 +1,7 @@
 import type { KindKey } from '../../kinds/index'
 import { continuousShare } from '../physics/loads'
 import { otherControllers, otherLimits, otherLoad, otherPlugs } from '../mains-budget'
+import { countOf, sayFree, sayUncounted } from '../counting'
 import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
 import type { Scene } from '../scene'
 import { practiceBasis, thresholds } from '../thresholds'
@@ -27,7 +28,7 @@ export const createElectricRules = (kind: KindKey): readonly Rule[] => [
     unit: 'count',
     basis: practiceBasis,
     rule: 'An outlet is free for each of its plugs after all others: strips, plus the wall’s beyond those the strips take, plus a temperature controller’s own for heaters.',
-    reads: ['plugs'],
+    reads: kind === 'temperature-controller' ? ['plugs', 'outlets'] : ['plugs'],
     uses: ['mains.outlets'],
     failLabel: 'no outlet free',
     judge: judgePlugs,
@@ -65,35 +66,39 @@ function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
   return { outcome: 'pass', measured: volts.map(String), say: () => `Made for ${mains.volts} V.` }
 }
 
-/** Plugs that need an outlet: a heater may sit on a controller's own. */
+/** Outlets that it takes, or as a negative number frees: heaters sit on a controller's own. */
 function countPlugsNeeded(scene: Scene, { piece, quantity }: Candidate, plugs: number): number {
-  if (piece.kind !== 'heater') return plugs * quantity
   const { outlets, pluggedIn } = otherControllers(scene)
-  return Math.max(0, plugs * quantity - Math.max(0, outlets - pluggedIn))
+  if (piece.kind === 'heater') return Math.max(0, plugs * quantity - Math.max(0, outlets - pluggedIn))
+  if (piece.kind !== 'temperature-controller') return plugs * quantity
+  const heatersLeft = Math.max(0, pluggedIn - outlets)
+  return plugs * quantity - Math.min((readNumber(piece.specs, 'outlets') ?? 0) * quantity, heatersLeft)
 }
 
 function judgePlugs(scene: Scene, candidate: Candidate): Judgement {
   const plugs = readNumber(candidate.piece.specs, 'plugs')
   if (plugs === undefined) return lacking(['plugs'], () => 'Nobody has recorded how many plugs it has.')
   const needed = countPlugsNeeded(scene, candidate, plugs)
-  const { used, capacity } = otherPlugs(scene)
+  const { used, capacity, unknown } = otherPlugs(scene)
   const free = Math.max(0, capacity - used)
-  const short = needed - free
+  const short = Math.max(0, needed) - free
   return {
     outcome: short > 0 ? 'change' : 'pass',
-    measured: needed,
+    measured: Math.max(0, needed),
     limit: free,
     ...(short > 0 && { asks: { need: 'outlets', amount: short, unit: 'count' as const } }),
-    say: () =>
-      short > 0
-        ? `Needs ${countOf(short, 'more outlet')}: ${used} of ${capacity} are taken. A strip goes on its own wall outlet.`
-        : needed === 0
-          ? 'Plugs into the temperature controller.'
-          : `Takes ${countOf(needed, 'outlet')} of the ${free} that ${free === 1 ? 'is' : 'are'} free.`,
+    cautions: unknown.length > 0 ? [sayUncounted(unknown.length, 'number of plugs')] : [],
+    say: () => {
+      if (short > 0)
+        return `Needs ${countOf(needed, 'outlet')}, and ${sayFree(free)}. A strip goes on its own wall outlet.`
+      if (plugs === 0) return 'Takes no outlet.'
+      if (needed > 0) return `Takes ${countOf(needed, 'outlet')} of the ${free} that ${free === 1 ? 'is' : 'are'} free.`
+      return candidate.piece.kind === 'heater'
+        ? 'Plugs into the temperature controller.'
+        : 'Takes no outlet beyond those of the heaters that it feeds.'
+    },
   }
 }
-
-export const countOf = (count: number, word: string): string => `${count} ${word}${count === 1 ? '' : 's'}`
 
 function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const power = readMeasure(piece.specs, 'powerW')
@@ -108,12 +113,7 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
           () =>
             'Plug it into an outlet with residual-current (ground-fault) protection, with a drip loop in the cord; local electrical codes and a licensed electrician decide.',
         ]),
-    ...(unknown.length > 0
-      ? [
-          () =>
-            `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`,
-        ]
-      : []),
+    ...(unknown.length > 0 ? [sayUncounted(unknown.length, 'power')] : []),
   ]
   return {
     outcome: totalW <= continuousW ? 'pass' : 'change',

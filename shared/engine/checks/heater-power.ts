@@ -6,7 +6,7 @@ import { once, type Scene } from '../scene'
 import { hasAreas, noAreas } from './shape'
 import { thresholds } from '../thresholds'
 import type { Value } from '../types'
-import { readMeasure } from '../values'
+import { readMeasure, readText } from '../values'
 
 const heatUses = [
   'room.coldestC',
@@ -21,6 +21,11 @@ const heatUses = [
   'tank.outerLengthMm',
   'tank.outerWidthMm',
   'tank.outerHeightMm',
+  'tank.filtration',
+  'tank.sump.lengthMm',
+  'tank.sump.widthMm',
+  'tank.sump.waterDepthMm',
+  'tank.shape',
 ]
 
 const noPower = lacking(['powerW'], () => 'Nobody has recorded its power yet.')
@@ -37,7 +42,7 @@ function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): 
   const totalW = power.value * quantity + otherHeatersW
   const goalC = plan.goals.temperatureC
   const coldestC = plan.room.coldestC
-  const probability = probabilityAtLeast(totalW, needUpperW, uncertaintyW(power, quantity))
+  const probability = () => probabilityAtLeast(totalW, needUpperW, uncertaintyW(power, quantity))
   const base = { measured: totalW, limit: needUpperW, probability }
   if (needUpperW === 0) return { ...base, outcome: 'pass', say: () => 'No heater is needed at these temperatures.' }
   const holdsTo = (figure: 'totalW' | 'totalUpperW') => findColdestHeldC(scene, totalW, figure)
@@ -118,15 +123,15 @@ export function findStrengthLimits(scene: Scene): { passW: number; changeW: numb
 
 /** The caution that every heater carries: what happens when it does not switch off. */
 const warnStuckOn =
-  (scene: Scene, totalW: number): Say =>
+  (scene: Scene, totalW: number, isAlone: boolean): Say =>
   (words) => {
     const { equilibriumC, hoursTo30C, hoursTo34C } = findStuckOn(scene, totalW)
     const room = words.temperature(scene.plan.room.warmestC)
     const past = (limitC: number, hours: number | null) =>
-      hours === null ? [] : [`past ${words.temperature(limitC)} after ${words.measure(hours, 'h')}`]
+      hours === null || hours === 0 ? [] : [`past ${words.temperature(limitC)} after ${words.measure(hours, 'h')}`]
     const steps = [...past(30, hoursTo30C), ...past(34, hoursTo34C)]
     const passing = steps.length > 0 ? `, ${steps.join(' and ')}` : ''
-    return `If it sticks on with the room at ${room}, the water goes to ${words.temperature(equilibriumC)}${passing}. A second, independent cut-off is advised.`
+    return `If ${isAlone ? 'it sticks' : 'all heaters stick'} on with the room at ${room}, the water goes to ${words.temperature(equilibriumC)}${passing}. A second, independent cut-off is advised.`
   }
 
 function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement {
@@ -135,7 +140,10 @@ function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement 
   if (!hasAreas(scene.plan)) return noAreas(scene.plan)
   const totalW = power.value * quantity + once(scene, findHeaterNeed).otherHeatersW
   const { passW, changeW } = once(scene, findStrengthLimits)
-  const hasCutOff = otherControllers(scene).count > 0
+  const thermostat = readText(piece.specs, 'thermostat')
+  // A controller that is the heater's only thermostat is no second cut-off.
+  const spoken = thermostat === 'built-in' || thermostat === 'external-included' ? 0 : 1
+  const hasCutOff = otherControllers(scene).count > spoken
   const limit = hasCutOff ? changeW : passW
   const outcome = totalW <= limit ? 'pass' : totalW <= changeW ? 'change' : 'fail'
   const hotC = once(scene, findUnheatedC)
@@ -150,15 +158,15 @@ function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement 
     outcome,
     measured: totalW,
     limit,
-    probability: probabilityAtMost(totalW, limit, uncertaintyW(power, quantity)),
+    probability: () => probabilityAtMost(totalW, limit, uncertaintyW(power, quantity)),
     ...(outcome === 'change' && { asks: { need: 'second-cut-off', amount: null, unit: null } }),
-    cautions: [warnStuckOn(scene, totalW), ...chill],
+    cautions: [warnStuckOn(scene, totalW, totalW === power.value), ...chill],
     say: (words) =>
       outcome === 'pass'
         ? `Not too strong for ${words.volume(scene.plan.tank.waterL)}.`
         : outcome === 'change'
           ? `Strong for ${words.volume(scene.plan.tank.waterL)}: add a second, independent cut-off, such as a separate temperature controller.`
-          : `Far too strong for ${words.volume(scene.plan.tank.waterL)}: stuck on, it would heat the water too fast. Up to ${words.power(changeW)} would do.`,
+          : `Far too strong for ${words.volume(scene.plan.tank.waterL)}: ${words.power(totalW)}, where ${words.power(changeW)} would be the most.`,
   }
 }
 
@@ -169,7 +177,7 @@ export const heaterStrength: Rule = {
   unit: 'W',
   basis: thresholds.heaterPassWPerL.basis,
   rule: `All heaters together pass up to ${thresholds.heaterPassNeeds.value} × the heat needed or ${thresholds.heaterPassWPerL.value} W per litre, whichever is more; up to ${thresholds.heaterChangeNeeds.value} × or ${thresholds.heaterChangeWPerL.value} W per litre with a second, independent cut-off. The caution gives the temperature the water would reach if they stuck on in the warmest room.`,
-  reads: ['powerW'],
+  reads: ['powerW', 'thermostat'],
   uses: ['room.coldestC', ...heatUses.slice(2)],
   failLabel: 'far too strong for this much water',
   judge: judgeStrength,

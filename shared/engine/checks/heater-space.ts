@@ -1,9 +1,12 @@
 import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
 import { once, type Scene } from '../scene'
-import { findBasins, type Basin } from '../setup/places'
+import { findBasins } from '../setup/places'
 import type { Placement } from '../types'
 import { readMeasure, readText } from '../values'
-import { chooseStand, describeStand } from './rod-space'
+import { findUsualBasins, glanceAtSpace } from './heater-glance'
+import { hasAreas, noAreas } from './shape'
+import { describeShares, shareOut } from './rod-shares'
+import { chooseStand, describeStand, listSizes } from './rod-space'
 
 const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = {
   vertical: ['upright'],
@@ -11,23 +14,18 @@ const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = 
   any: ['upright', 'leaning', 'flat'],
 }
 
+const restsOnFiltration = () => ['tank.filtration']
+
 function judgeInline({ plan }: Scene): Judgement {
   if (plan.tank.filtration === 'sump')
-    return { outcome: 'pass', say: () => 'Sits in the return line, outside the tank.' }
+    return { outcome: 'pass', rests: restsOnFiltration, say: () => 'Sits in the return line, outside the tank.' }
   return {
     outcome: 'change',
+    rests: restsOnFiltration,
     asks: { need: 'return-line', amount: null, unit: null },
     say: () => 'Sits in a hose, not in the water: needs a pump line outside the tank.',
   }
 }
-
-/** The sizes of the basin that was chosen. */
-const listRests = ({ path }: Basin): readonly string[] =>
-  path === 'tank'
-    ? ['tank.waterLineMm', 'tank.outerHeightMm', 'tank.displayLengthMm', 'tank.displayWidthMm']
-    : ['waterDepthMm', 'heightMm', 'lengthMm', 'widthMm'].map((key) => `${path}.${key}`)
-
-const findUsualBasins = ({ plan }: Scene) => findBasins(plan, undefined)
 
 function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgement {
   const { specs } = piece
@@ -45,9 +43,31 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
   const rod = { length, diameter, immersed: readMeasure(specs, 'minImmersionMm') ?? length, quantity }
   const orientation = readText(specs, 'orientation')
   const tryAll = (by: string) => chooseStand(rod, basins, scene.others, positionsBy[by] ?? [])
-  const stand = tryAll(orientation ?? 'vertical')
-  if (!stand) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
-  if (!stand.fits && orientation === undefined && (tryAll('any')?.fits || tryAll('horizontal')?.fits))
+  const stands = tryAll(orientation ?? 'vertical')
+  const [stand] = stands
+  if (!stand)
+    return {
+      outcome: 'fail',
+      rests: () => [],
+      say: () =>
+        place && 'chamber' in place
+          ? `The tank has no chamber “${place.chamber}”.`
+          : 'There is no water for it to heat in that place.',
+    }
+  if (stand.basin.path === 'tank' && !hasAreas(scene.plan)) return noAreas(scene.plan)
+  const shares =
+    quantity > 1 && !stand.fits
+      ? shareOut(rod, basins, scene.others, positionsBy[orientation ?? 'vertical'] ?? [])
+      : undefined
+  if (shares?.[0])
+    return {
+      outcome: 'pass',
+      probability: () => Math.min(...shares.map((share) => share.stand.probability())),
+      placement: shares[0].stand.placement,
+      rests: () => [...new Set(shares.flatMap((share) => listSizes(share.stand)))],
+      say: describeShares(shares),
+    }
+  if (!stand.fits && orientation === undefined && (tryAll('any')[0]?.fits || tryAll('horizontal')[0]?.fits))
     return lacking(
       ['orientation'],
       (words) =>
@@ -63,11 +83,10 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
   ]
   return {
     outcome: stand.fits ? 'pass' : 'fail',
-    measured: stand.measuredMm,
-    limit: Number.isFinite(stand.limitMm) ? stand.limitMm : null,
+    ...(stand.tight !== 'company' && { measured: stand.measuredMm, limit: stand.limitMm }),
     probability: stand.probability,
     ...(stand.fits && { placement: stand.placement }),
-    rests: listRests(stand.basin),
+    rests: () => [...new Set(stands.flatMap(listSizes))],
     say: describeStand(stand),
     cautions,
   }
@@ -94,7 +113,16 @@ export const heaterSpace: Rule = {
     'tank.outerHeightMm',
     'tank.displayLengthMm',
     'tank.displayWidthMm',
+    'tank.outerLengthMm',
+    'tank.outerWidthMm',
+    'tank.bottomMm',
+    'tank.sump.lengthMm',
+    'tank.sump.widthMm',
+    'tank.sump.waterDepthMm',
+    'tank.filtration',
+    'tank.shape',
   ],
   failLabel: 'too long or too thick for the place',
+  glance: glanceAtSpace,
   judge: judgeSpace,
 }

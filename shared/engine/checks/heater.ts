@@ -4,6 +4,7 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Rule } fr
 import { once, type Scene } from '../scene'
 import { practiceBasis, thresholds } from '../thresholds'
 import { readNumber, readText } from '../values'
+import { grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 import { heaterPower, heaterStrength } from './heater-power'
 import { scaleHeaters } from './heater-scales'
 import { heaterSpace } from './heater-space'
@@ -15,6 +16,7 @@ function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
     return lacking(['ratedVolumeMaxL'], () => 'Nobody has recorded the volumes its maker rates it for.')
   const slack = thresholds.ratedVolumeSlack.value
   const { ratedL } = plan.tank
+  if (!hasRatedVolume(plan)) return noAreas(plan)
   const below = min !== undefined && ratedL < min
   const above = max !== undefined && ratedL > max
   const far = (below && ratedL < min * (1 - slack)) || (above && ratedL > max * (1 + slack))
@@ -24,7 +26,14 @@ function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
     measured: ratedL,
     limit,
     margin: measureMargin(ratedL, min, max),
-    cautions: !far && (below || above) ? [() => 'Its maker’s rating stops just short of this tank’s volume.'] : [],
+    cautions:
+      !far && (below || above)
+        ? [
+            (words) =>
+              `Its maker’s rating ${below ? 'starts just above' : 'stops just short of'} this tank’s ${words.volume(ratedL)}.`,
+          ]
+        : [],
+    rests: () => (isVolumeStated(plan) ? [] : grossUses),
     say: (words) => {
       const range =
         min !== undefined && max !== undefined
@@ -52,7 +61,7 @@ const ratedVolume: Rule = {
   basis: practiceBasis,
   rule: 'The tank’s nominal volume within its maker’s rating passes; a little outside is a caution, further a change. Makers’ ratings differ between tube types though a watt heats alike in any.',
   reads: ['ratedVolumeMinL', 'ratedVolumeMaxL'],
-  uses: ['tank.volumeL'],
+  uses: grossUses,
   failLabel: 'rated for another size of tank',
   judge: judgeRatedVolume,
 }
@@ -68,21 +77,31 @@ function judgeThermostat(scene: Scene, { piece, quantity }: Candidate): Judgemen
       say: () => (thermostat === 'built-in' ? 'Has its own thermostat.' : 'Comes with its controller.'),
     }
   const powerW = readNumber(piece.specs, 'powerW')
-  const plugs = readNumber(piece.specs, 'plugs') ?? 1
+  const plugs = readNumber(piece.specs, 'plugs')
   const controllers = otherControllers(scene)
-  const loadLeftW = controllers.maxLoadW - controllers.loadedW
-  const outletsLeft = controllers.outlets - controllers.pluggedIn
-  if (
-    controllers.count > 0 &&
-    powerW !== undefined &&
-    loadLeftW >= powerW * quantity &&
-    outletsLeft >= plugs * quantity
-  )
-    return {
-      outcome: 'pass',
-      measured: thermostat,
-      say: () => 'The temperature controller in the setup can switch it.',
-    }
+  if (controllers.count > 0) {
+    const missing = [...(powerW === undefined ? ['powerW'] : []), ...(plugs === undefined ? ['plugs'] : [])]
+    if (powerW === undefined || plugs === undefined)
+      return lacking(
+        missing,
+        () => 'Nobody has recorded the power and plugs that the temperature controller would have to switch.',
+      )
+    const loadLeftW = controllers.maxLoadW - controllers.loadedW
+    const outletsLeft = controllers.outlets - controllers.pluggedIn
+    const canSwitch =
+      controllers.strongestW >= powerW && loadLeftW >= powerW * quantity && outletsLeft >= plugs * quantity
+    if (controllers.isUnsure)
+      return lacking(
+        [],
+        () => 'Nobody has recorded all that the temperature controller in the setup carries and can carry.',
+      )
+    if (canSwitch)
+      return {
+        outcome: 'pass',
+        measured: thermostat,
+        say: () => 'The temperature controller in the setup can switch it.',
+      }
+  }
   const amount = powerW === undefined ? null : powerW * quantity
   return {
     outcome: 'change',
@@ -122,6 +141,7 @@ const verbs = { upright: 'Stands', leaning: 'Leans', flat: 'Lies' } as const
 export const heaterRules: KindRules = {
   rules: [heaterSpace, heaterPower, heaterStrength, ratedVolume, thermostat],
   targetReads: ['powerW'],
+  feltThrough: ['powerW', 'plugs', 'thermostat'],
   target: (scene, candidate) => {
     const duty = findDuty(scene, candidate)
     return duty === null ? null : Math.abs(duty - thresholds.heaterTargetDuty.value)

@@ -1,10 +1,10 @@
+import { countOf, sayFree, sayUncounted } from '../counting'
 import { countOutlets, otherLoad, otherPlugs } from '../mains-budget'
 import { findLoadLimits } from '../physics/loads'
 import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
 import type { Scene } from '../scene'
 import { practiceBasis, thresholds } from '../thresholds'
 import { readNumber } from '../values'
-import { countOf } from './electric'
 
 function judgeOutlets(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const outlets = readNumber(piece.specs, 'outlets')
@@ -13,21 +13,25 @@ function judgeOutlets(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const own = { id: 'candidate', piece, quantity, state: 'planned' as const }
   const capacity = countOutlets(scene.plan, [...scene.others, own])
   const short = used - capacity
+  const strips = scene.others.reduce((n, item) => (item.piece.kind === 'power-strip' ? n + item.quantity : n), quantity)
+  if (strips > scene.plan.mains.outlets)
+    return {
+      outcome: 'change',
+      measured: outlets * quantity,
+      limit: null,
+      asks: { need: 'outlets', amount: strips - scene.plan.mains.outlets, unit: 'count' },
+      say: () =>
+        `Needs a wall outlet of its own, and ${sayFree(scene.plan.mains.outlets)}: a strip never goes on another strip.`,
+    }
   return {
     outcome: short > 0 ? 'change' : 'pass',
     measured: outlets * quantity,
     limit: Math.max(0, used - (capacity - outlets * quantity)),
     ...(short > 0 && { asks: { need: 'outlets', amount: short, unit: 'count' as const } }),
-    cautions:
-      unknown.length > 0
-        ? [
-            () =>
-              `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no number of plugs and could not be counted.`,
-          ]
-        : [],
+    cautions: unknown.length > 0 ? [sayUncounted(unknown.length, 'number of plugs')] : [],
     say: () =>
       short > 0
-        ? `${countOf(short, 'more outlet')} needed: a second strip on its own wall outlet.`
+        ? `${countOf(short, 'more outlet')} needed beside it: a second strip on its own wall outlet.`
         : `${countOf(used, 'plug')} in the setup, ${countOf(capacity, 'outlet')} with this strip and the wall.`,
   }
 }
@@ -45,12 +49,7 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
           () =>
             'Use an outlet with residual-current (ground-fault) protection and a drip loop in every cord; never chain strips. Local electrical codes and a licensed electrician decide.',
         ]),
-    ...(unknown.length > 0
-      ? [
-          () =>
-            `${countOf(unknown.length, 'piece')} in the setup ${unknown.length === 1 ? 'states' : 'state'} no power and could not be counted.`,
-        ]
-      : []),
+    ...(unknown.length > 0 ? [sayUncounted(unknown.length, 'power')] : []),
   ]
   return {
     outcome: watts <= continuousW ? 'pass' : watts <= ratedW ? 'change' : 'fail',

@@ -24,7 +24,7 @@ export interface Stand {
   readonly fits: boolean
   readonly measuredMm: number
   readonly limitMm: number
-  readonly probability: number
+  readonly probability: () => number
   /** What is tight: water, height, plan, run, opening or company. */
   readonly tight: 'water' | 'height' | 'plan' | 'run' | 'opening' | 'company'
 }
@@ -52,18 +52,17 @@ function hasCompany(basin: Basin, others: readonly Item[], footprint: Rectangle,
   })
   if (company.length === 0 && quantity === 1) return true
   const pieces = [...company, ...Array.from({ length: quantity }, () => footprint)]
-  return packRectangles(pieces, [basin.lengthMm, basin.widthMm], clearance).outcome !== 'no'
+  return packRectangles(pieces, [basin.lengthMm, basin.widthMm], clearance).outcome === 'fits'
 }
 
 function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
   const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))
-  const probability = bounds.map((bound) => {
-    const limitU = Number.isFinite(bound.limitMm)
-      ? standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length')
-      : 0
+  const probabilityOf = (bound: Bound): number => {
+    if (!Number.isFinite(bound.limitMm)) return 1
+    const limitU = standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length')
     const pieceU = standardUncertainty(bound.of.value, bound.of.source, bound.of.plusMinus, 'length')
     return probabilityAtMost(bound.measuredMm, bound.limitMm, combineUncertainties(limitU, pieceU))
-  })
+  }
   const fits = bounds.every((bound) => isWithinMm(bound.measuredMm, bound.limitMm))
   const { measuredMm, limitMm } = tight
   return {
@@ -73,7 +72,7 @@ function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], is
     limitMm,
     fits: fits && isRoomy,
     tight: fits && !isRoomy ? 'company' : tight.tight,
-    probability: isRoomy ? Math.min(...probability) : 0,
+    probability: () => (isRoomy ? Math.min(...bounds.map(probabilityOf)) : 0),
   }
 }
 
@@ -92,9 +91,10 @@ const boundPlan = (diameter: Value<number>, basin: Basin): Bound => ({
   of: diameter,
 })
 
+/** A rod goes in end first, so each side of an opening that is known has to let its thickness pass. */
 function boundOpening(diameter: Value<number>, { openingLengthMm, openingWidthMm }: Basin): Bound[] {
-  if (openingLengthMm === undefined || openingWidthMm === undefined) return []
-  const limitMm = Math.min(openingLengthMm, openingWidthMm)
+  const limitMm = Math.min(openingLengthMm ?? Infinity, openingWidthMm ?? Infinity)
+  if (limitMm === Infinity) return []
   return [{ measuredMm: diameter.value, limitMm, tight: 'opening', of: diameter }]
 }
 
@@ -119,7 +119,10 @@ function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: 
   const fit =
     position === 'leaning'
       ? leanRod(size, { ...clear, heightMm: basin.waterDepthMm })
-      : layRodFlat(size, [clear.lengthMm, clear.widthMm])
+      : layRodFlat({ lengthMm: size.lengthMm + 2 * clearance, diameterMm: d + 2 * clearance }, [
+          basin.lengthMm,
+          basin.widthMm,
+        ])
   const angleDeg = fit.angleDeg ?? 0
   const runMm = size.lengthMm * Math.cos((angleDeg * Math.PI) / 180) + d
   const footprint: Rectangle = [Math.min(runMm, Math.max(clear.lengthMm, clear.widthMm)), d]
@@ -131,27 +134,59 @@ function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: 
 const nearest = (stands: readonly Stand[]): Stand | undefined =>
   stands.reduce<Stand | undefined>((best, stand) => (!best || ratio(stand) > ratio(best) ? stand : best), undefined)
 
-/** The first of the allowed positions in which the rod fits, else the nearest miss. */
-function choosePosition(rod: Rod, basin: Basin, others: readonly Item[], positions: readonly Placement['position'][]) {
+/** In one basin the first allowed position in which the rod fits; where none does, all of them. */
+function tryPositions(rod: Rod, basin: Basin, others: readonly Item[], positions: readonly Placement['position'][]) {
   const misses: Stand[] = []
   for (const position of positions) {
     const stand = tryPosition(rod, basin, others, position)
-    if (stand.fits) return stand
+    if (stand.fits) return [stand]
     misses.push(stand)
   }
-  return nearest(misses)
+  return misses
 }
 
-/** Where the rod goes: of several basins the one with the most to spare. Undefined: there is no basin. */
+/**
+ * Where the rod goes: of several basins the one with the most to spare. Where it fits nowhere, the nearest miss first and
+ * then the others. Empty: there is no basin.
+ */
 export function chooseStand(
   rod: Rod,
   basins: readonly Basin[],
   others: readonly Item[],
   positions: readonly Placement['position'][],
-): Stand | undefined {
-  const best = basins.flatMap((basin) => choosePosition(rod, basin, others, positions) ?? [])
-  return nearest(best.filter(({ fits }) => fits)) ?? nearest(best)
+): readonly Stand[] {
+  const tried = basins.flatMap((basin) => tryPositions(rod, basin, others, positions))
+  const fitting = nearest(tried.filter(({ fits }) => fits))
+  if (fitting) return [fitting]
+  const miss = nearest(tried)
+  return miss ? [miss, ...tried.filter((stand) => stand !== miss)] : []
 }
+
+const sizesOf: Readonly<Record<Stand['tight'] | 'any', readonly string[]>> = {
+  water: ['waterDepthMm'],
+  height: ['heightMm'],
+  plan: ['lengthMm', 'widthMm'],
+  run: ['lengthMm', 'widthMm', 'waterDepthMm'],
+  opening: [],
+  company: ['lengthMm', 'widthMm'],
+  any: ['waterDepthMm', 'heightMm', 'lengthMm', 'widthMm'],
+}
+
+const ofTank: Readonly<Record<string, readonly string[]>> = {
+  waterDepthMm: ['waterLineMm', 'outerHeightMm'],
+  heightMm: ['outerHeightMm', 'bottomMm'],
+  lengthMm: ['displayLengthMm', 'outerLengthMm'],
+  widthMm: ['displayWidthMm', 'outerWidthMm'],
+}
+
+/** Setup paths of a basin's sizes, or of those that bear on one limit. */
+export const listBounds = (basin: Basin, tight: Stand['tight'] | 'any' = 'any'): readonly string[] =>
+  sizesOf[tight].flatMap((key) =>
+    (basin.path === 'tank' ? (ofTank[key] ?? []) : [key]).map((size) => `${basin.path}.${size}`),
+  )
+
+/** Setup paths of the sizes that a position rests on: all where it fits, else those that keep it from fitting. */
+export const listSizes = ({ basin, fits, tight }: Stand): readonly string[] => listBounds(basin, fits ? 'any' : tight)
 
 const verbs = { upright: 'Stands', leaning: 'Leans', flat: 'Lies' } as const
 
@@ -168,7 +203,7 @@ export const describeStand =
         tight === 'plan' ? 'to spare beside it' : tight === 'opening' ? 'to spare in the opening' : 'to spare'
       return `${verbs[placement.position]} in ${where}${how} with ${off} ${beside}.`
     }
-    if (tight === 'company') return `There is no room left in ${where} beside what is already there.`
+    if (tight === 'company') return `We find no room for it in ${where} beside what else is there.`
     if (tight === 'plan')
       return `${off} too thick for ${where}: it needs ${words.length(measuredMm)} across with water around it, and there are ${words.length(limitMm)}.`
     if (tight === 'opening') return `${off} too thick for the opening of ${where}.`

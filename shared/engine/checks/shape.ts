@@ -1,5 +1,6 @@
 import type { Judgement } from '../rule'
 import type { Plan } from '../setup/plan'
+import { readNumber } from '../values'
 
 /** Whether the tank's areas follow from its outside size: other shapes are recorded, and their formulas are on the way. */
 export const hasAreas = ({ tank }: Plan): boolean => tank.shape === 'rectangle' || tank.shape === 'cube'
@@ -7,5 +8,22 @@ export const hasAreas = ({ tank }: Plan): boolean => tank.shape === 'rectangle' 
 export const noAreas = ({ tank }: Plan): Judgement => ({
   outcome: 'nodata',
   missing: [],
-  say: () => `The surface of a ${tank.shape.replaceAll('-', ' ')} tank cannot be computed yet.`,
+  say: () => `Areas and volumes of a ${tank.shape.replaceAll('-', ' ')} tank cannot be computed yet.`,
 })
+
+/** Whether somebody stated the tank's volume; otherwise it follows from the sizes in `grossUses`. */
+export const isVolumeStated = ({ setup }: Plan): boolean =>
+  setup.tank.volumeL !== undefined || readNumber(setup.tank.specs, 'nominalVolumeL') !== undefined
+
+export const hasRatedVolume = (plan: Plan): boolean => isVolumeStated(plan) || hasAreas(plan)
+
+/** Setup paths that the volume inside the tank, and its sump, rests on. */
+export const grossUses: readonly string[] = [
+  'tank.waterLineMm',
+  'tank.wallMm',
+  'tank.filtration',
+  'tank.sump.lengthMm',
+  'tank.sump.widthMm',
+  'tank.sump.waterDepthMm',
+  'tank.shape',
+]

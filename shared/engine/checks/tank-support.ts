@@ -18,6 +18,10 @@ const overhangNoticedMm = 150
 
 const findStand = (others: readonly Item[]) => others.find(({ piece }) => piece.kind === 'stand')
 
+/** Whether anything is known of what carries the tank. */
+export const isCarried = ({ plan, others }: Scene): boolean =>
+  findStand(others) !== undefined || plan.setup.support !== undefined
+
 /** Null: nothing known carries it. A list: what the stand does not say. */
 function findSupport({ plan, others }: Scene): Support | readonly string[] | null {
   const stand = findStand(others)
@@ -79,7 +83,7 @@ export function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement | 
     outcome: fits ? 'pass' : 'fail',
     measured: side.value,
     limit: limit.value,
-    probability: probabilityAtLeast(limit.value, side.value, uncertainty),
+    probability: () => probabilityAtLeast(limit.value, side.value, uncertainty),
     cautions,
     say: (words) =>
       fits
@@ -94,21 +98,19 @@ const names = (specs: Specs, key: string): readonly string[] =>
   Array.isArray(specs[key]?.value) ? (specs[key].value as string[]) : []
 
 /** Whether the stand is rated for the filled weight of `filled`, which is the setup with this tank in it. */
-export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Judgement | null {
+export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Judgement {
   const stand = findStand(scene.others)
   const weight = weighFilled(filled)
   const heavy: Say = (words) =>
     `Filled it weighs about ${words.mass(weight.totalKg)}: a structural engineer and local building rules decide for anything large or upstairs.`
   if (!stand)
-    return scene.plan.setup.support
-      ? {
-          outcome: 'pass',
-          measured: weight.totalKg,
-          limit: null,
-          cautions: [heavy],
-          say: (words) => `Filled it weighs about ${words.mass(weight.totalKg)}; what carries it must hold that.`,
-        }
-      : null
+    return {
+      outcome: 'pass',
+      measured: weight.totalKg,
+      limit: null,
+      cautions: [heavy],
+      say: (words) => `Filled it weighs about ${words.mass(weight.totalKg)}; what carries it must hold that.`,
+    }
   const { specs } = stand.piece
   const rating = readMeasure(specs, 'loadRatingKg')
   if (rating) {
@@ -117,11 +119,12 @@ export function judgeLoad(scene: Scene, { piece }: Candidate, filled: Plan): Jud
       outcome: isHeld ? 'pass' : 'fail',
       measured: weight.totalKg,
       limit: rating.value,
-      probability: probabilityAtLeast(
-        rating.value,
-        weight.totalKg,
-        standardUncertainty(rating.value, rating.source, rating.plusMinus, 'other'),
-      ),
+      probability: () =>
+        probabilityAtLeast(
+          rating.value,
+          weight.totalKg,
+          standardUncertainty(rating.value, rating.source, rating.plusMinus, 'other'),
+        ),
       cautions: [heavy],
       say: (words) =>
         isHeld

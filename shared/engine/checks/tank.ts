@@ -7,16 +7,24 @@ import { practiceBasis, thresholds } from '../thresholds'
 import type { Piece } from '../types'
 import { readGroup, readMeasure, readNumber, readText } from '../values'
 import { probabilityWithin, standardUncertainty } from '../physics/conformance'
-import { judgeFootprint, judgeLoad } from './tank-support'
+import { grossUses, hasAreas, hasRatedVolume, isVolumeStated, noAreas } from './shape'
+import { isCarried, judgeFootprint, judgeLoad } from './tank-support'
 
 const sizeKeys = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm']
+const insideKeys = [...sizeKeys, 'wallMm', 'waterLineMm']
 
 const listMissingSize = ({ specs }: Piece): readonly string[] =>
   sizeKeys.filter((key) => readNumber(specs, key) === undefined)
 
-/** The setup with this tank in it, or undefined where the tank's size is not known. */
+/** Attributes that are not known of what the volume inside follows from. */
+const listMissingInside = (piece: Piece): readonly string[] => [
+  ...listMissingSize(piece),
+  ...['wallMm', 'waterLineMm'].filter((key) => readNumber(piece.specs, key) === undefined),
+]
+
+/** The setup with this tank in it, or undefined where what it holds is not known. */
 function planWith(scene: Scene, piece: Piece): Plan | undefined {
-  if (listMissingSize(piece).length > 0) return undefined
+  if (listMissingInside(piece).length > 0) return undefined
   return resolve(
     withItems(scene.plan.setup, scene.others, { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }),
   )
@@ -58,9 +66,10 @@ function judgeFiltration({ plan }: Scene, { piece }: Candidate): Judgement {
 
 function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
   const nominal = readMeasure(piece.specs, 'nominalVolumeL')
-  const offered = nominal?.value ?? planWith(scene, piece)?.tank.grossL
-  if (offered === undefined)
-    return lacking(['nominalVolumeL'], () => 'Nobody has recorded its volume or its outside size yet.')
+  const plan = nominal ? undefined : planWith(scene, piece)
+  const offered = nominal?.value ?? (plan && hasAreas(plan) ? plan.tank.grossL : undefined)
+  if (offered === undefined) return lacking(['nominalVolumeL'], () => 'Nobody has recorded its volume yet.')
+  if (!hasRatedVolume(scene.plan)) return noAreas(scene.plan)
   const now = scene.plan.tank.ratedL
   const pass = thresholds.tankVolumePass.value
   const change = thresholds.tankVolumeChange.value
@@ -71,7 +80,8 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
     outcome: off <= pass ? 'pass' : off <= change ? 'change' : 'fail',
     measured: offered,
     limit: [now * (1 - pass), now * (1 + pass)],
-    probability: probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
+    rests: () => (isVolumeStated(scene.plan) ? [] : grossUses),
+    probability: () => probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
     say: (words) =>
       off <= pass
         ? `${wording(words)}: about the same.`
@@ -81,19 +91,37 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
   }
 }
 
-function judgeReturnPump({ plan, others }: Scene, { piece }: Candidate): Judgement {
+function judgeReturnPump({ others }: Scene, { piece }: Candidate): Judgement {
   if (readGroup(piece.specs, 'includedPump')) return { outcome: 'pass', say: () => 'Comes with a return pump.' }
   const filtration = readText(piece.specs, 'filtration')
   if (filtration === 'none' || filtration === 'hang-on') return { outcome: 'pass', say: () => 'Needs no return pump.' }
   if (others.some((item) => item.piece.kind === 'return-pump'))
     return { outcome: 'pass', say: () => 'The setup has a return pump.' }
-  const bore = readNumber(piece.specs, 'returnBoreMm') ?? plan.tank.returnBoreMm
+  if (filtration === undefined)
+    return lacking(['filtration'], () => 'Nobody has recorded how it is filtered, or whether that takes a pump.')
+  const bore = readNumber(piece.specs, 'returnBoreMm')
   return {
     outcome: 'change',
     asks: { need: 'return-pump', amount: null, unit: null },
     say: (words) =>
-      `Comes without a return pump: needs one${bore === undefined ? '' : ` for a ${words.length(bore)} bore`}.`,
+      `No return pump is stated to come with it: it needs one${bore === undefined ? '' : ` for a ${words.length(bore)} bore`}.`,
   }
+}
+
+/** Where nothing that has to carry it is known, its weight is nobody's question. */
+function judgeFilled(scene: Scene, candidate: Candidate): Judgement | null {
+  const { piece } = candidate
+  if (!isCarried(scene)) return null
+  const missing = [
+    ...listMissingInside(piece),
+    ...(readNumber(piece.specs, 'dryMassKg') === undefined
+      ? ['bottomMm', 'material'].filter((key) => piece.specs[key] === undefined)
+      : []),
+  ]
+  const filled = planWith(scene, piece)
+  if (!filled || missing.length > 0)
+    return lacking(missing, () => 'Nobody has recorded all the sizes that its filled weight follows from.')
+  return hasAreas(filled) ? judgeLoad(scene, candidate, filled) : noAreas(filled)
 }
 
 const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>, basis = practiceBasis): Rule => ({
@@ -119,8 +147,8 @@ export const tankRules: KindRules = {
       worst: 'fail',
       unit: 'L',
       rule: `Nominal volume, else inside size by water line, within ${thresholds.tankVolumePass.value * 100} % passes, within ${thresholds.tankVolumeChange.value * 100} % is a change.`,
-      reads: ['nominalVolumeL', ...sizeKeys],
-      uses: ['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm'],
+      reads: ['nominalVolumeL', ...insideKeys, 'filtration', 'sump', 'shape'],
+      uses: grossUses,
       failLabel: 'far larger or smaller',
       judge: judgeVolume,
     }),
@@ -152,15 +180,21 @@ export const tankRules: KindRules = {
         unit: 'kg',
         rule: 'The stand’s rating is at least the filled weight: shell, water, rock and sand. Without a rating, what its maker says it is made for. On furniture the weight is information.',
         readsGear: true,
-        reads: [...sizeKeys, 'wallMm', 'bottomMm', 'material', 'waterLineMm', 'dryMassKg'],
-        uses: ['goals.rockKg', 'goals.sandDepthMm', 'goals.salinityPpt'],
+        reads: [
+          ...insideKeys,
+          'bottomMm',
+          'material',
+          'dryMassKg',
+          'shape',
+          'displayLengthMm',
+          'displayWidthMm',
+          'chambers',
+          'filtration',
+          'sump',
+        ],
+        uses: ['goals.rockKg', 'goals.sandDepthMm', 'goals.salinityPpt', 'goals.temperatureC'],
         failLabel: 'too heavy for the stand',
-        judge: (scene, candidate) => {
-          const filled = planWith(scene, candidate.piece)
-          return filled
-            ? judgeLoad(scene, candidate, filled)
-            : lacking(listMissingSize(candidate.piece), () => 'Nobody has recorded its outside size yet.')
-        },
+        judge: judgeFilled,
       },
       {
         type: 'physics',
@@ -169,7 +203,7 @@ export const tankRules: KindRules = {
       },
     ),
   ],
-  targetReads: ['nominalVolumeL', ...sizeKeys],
+  targetReads: ['nominalVolumeL', ...insideKeys, 'filtration', 'sump'],
   target: (scene, { piece }) => {
     const offered = readNumber(piece.specs, 'nominalVolumeL') ?? planWith(scene, piece)?.tank.grossL
     return offered === undefined ? null : Math.abs(offered - scene.plan.tank.ratedL) / scene.plan.tank.ratedL

@@ -3,7 +3,7 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Rule } fr
 import type { Scene } from '../scene'
 import { practiceBasis } from '../thresholds'
 import { readMeasure, readNumber } from '../values'
-import { countOf } from './electric'
+import { countOf } from '../counting'
 import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
 
 const heatersOf = ({ others }: Scene) => others.filter((item) => item.piece.kind === 'heater')
@@ -13,15 +13,27 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
   if (!load) return lacking(['maxLoadW'], () => 'Nobody has recorded the load it can switch.')
   const fedW = sumHeaterW(scene.others)
   const capacityW = load.value * quantity
+  const powers = heatersOf(scene).map(({ piece: heater }) => readNumber(heater.specs, 'powerW'))
+  const strongestW = Math.max(0, ...powers.filter((power) => power !== undefined))
+  if (strongestW > load.value)
+    return {
+      outcome: 'fail',
+      measured: load.value,
+      limit: strongestW,
+      say: (words) => `Switches ${words.power(load.value)}, too little for a heater of ${words.power(strongestW)}.`,
+    }
+  if (capacityW >= fedW && powers.includes(undefined))
+    return lacking([], () => 'A heater in the setup states no power, so what it has to switch is not known.')
   return {
     outcome: capacityW >= fedW ? 'pass' : 'fail',
     measured: capacityW,
     limit: fedW,
-    probability: probabilityAtLeast(
-      capacityW,
-      fedW,
-      quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
-    ),
+    probability: () =>
+      probabilityAtLeast(
+        capacityW,
+        fedW,
+        quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
+      ),
     say: (words) =>
       fedW === 0
         ? `Switches up to ${words.power(capacityW)}; there is no heater in the setup to hold against it.`
@@ -42,7 +54,10 @@ function judgeOutlets(scene: Scene, { piece, quantity }: Candidate): Judgement {
     outcome: outlets * quantity >= plugs ? 'pass' : 'fail',
     measured: outlets * quantity,
     limit: plugs,
-    say: () => `Has ${countOf(outlets * quantity, 'outlet')} for ${countOf(plugs, 'heater plug')}.`,
+    say: () =>
+      plugs === 0
+        ? `Has ${countOf(outlets * quantity, 'outlet')}; there is no heater in the setup to plug in.`
+        : `Has ${countOf(outlets * quantity, 'outlet')} for ${countOf(plugs, 'heater plug')}.`,
   }
 }
 
@@ -56,7 +71,16 @@ function judgeRange({ plan }: Scene, { piece }: Candidate): Judgement {
       outcome: 'fail',
       measured: goalC,
       limit: min !== undefined && max !== undefined ? [min, max] : (min ?? max ?? null),
-      say: (words) => `Cannot be set to ${words.temperature(goalC)}.`,
+      ...((min === undefined || max === undefined) && { margin: null }),
+      say: (words) => {
+        const range =
+          min !== undefined && max !== undefined
+            ? `its range is ${words.pair([min, max], 'C')}`
+            : min !== undefined
+              ? `it starts at ${words.temperature(min)}`
+              : `it ends at ${words.temperature(max ?? goalC)}`
+        return `Cannot be set to ${words.temperature(goalC)}: ${range}.`
+      },
     }
   if (min === undefined || max === undefined)
     return lacking(missing, () => 'Nobody has recorded the range it can be set to.')

@@ -1,4 +1,4 @@
-import { readGroups, readNumber } from '../values'
+import { readGroup, readGroups, readNumber, readText } from '../values'
 import type { ChamberInput, Contradiction, Setup } from '../types'
 import type { TankPlan } from './plan'
 import { resolve } from './resolve'
@@ -6,6 +6,9 @@ import { createPrinter, type Printer } from '../../units/print'
 
 const toleranceMm = 0.05
 const sizes = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'] as const
+
+/** A corner tank fills about half of the square that its outside sizes span, a cylinder three quarters. */
+const leastShareBy: Readonly<Record<string, number>> = { corner: 0.2, cylinder: 0.3 }
 
 function checkShell(setup: Setup, words: Printer): Contradiction[] {
   const { specs } = setup.tank
@@ -28,16 +31,18 @@ function checkShell(setup: Setup, words: Printer): Contradiction[] {
   const volumeL = read('nominalVolumeL') ?? setup.tank.volumeL
   if (volumeL !== undefined && length && width && height) {
     const outsideL = (length * width * height) / 1e6
+    const volumePath = read('nominalVolumeL') === undefined ? 'tank.volumeL' : 'tank.nominalVolumeL'
+    const leastShare = leastShareBy[readText(specs, 'shape') ?? ''] ?? 0.4
     // Nominal volumes are often rounded up to a trade size, so a little more than the outside holds is let pass.
     if (volumeL > 1.1 * outsideL)
       found.push({
-        path: 'tank.volumeL',
+        path: volumePath,
         detail: `${words.volume(volumeL)} is more than ${words.size([length, width, height])} holds, ${words.volume(outsideL)} on the outside.`,
       })
-    if (volumeL < 0.4 * outsideL)
+    if (volumeL < leastShare * outsideL)
       found.push({
-        path: 'tank.volumeL',
-        detail: `${words.volume(volumeL)} is less than half of what ${words.size([length, width, height])} holds, ${words.volume(outsideL)} on the outside.`,
+        path: volumePath,
+        detail: `${words.volume(volumeL)} is far less than ${words.size([length, width, height])} holds, ${words.volume(outsideL)} on the outside.`,
       })
   }
   return found
@@ -47,12 +52,14 @@ function checkChamber(
   chamber: ChamberInput,
   index: number,
   tank: TankPlan,
-  isSizeGiven: boolean,
+  isGiven: (key: string) => boolean,
   words: Printer,
 ): Contradiction[] {
-  const inside = isSizeGiven
-    ? 'the tank’s inside'
-    : `the inside that we assumed from the volume; give the tank’s outside size`
+  const inside = (key: string, along: string) =>
+    isGiven(key)
+      ? `the tank’s inside ${along}`
+      : `the inside ${along} that we assumed from the volume; give the tank’s outside size`
+  const height = inside('outerHeightMm', 'height')
   const exceed = (key: keyof ChamberInput, limitMm: number, what: string): Contradiction[] => {
     const value = chamber[key]
     if (typeof value !== 'number' || value <= limitMm + toleranceMm) return []
@@ -64,10 +71,10 @@ function checkChamber(
     ]
   }
   return [
-    ...exceed('lengthMm', tank.insideLengthMm, `${inside} along the front`),
-    ...exceed('widthMm', tank.insideWidthMm, `${inside} front to back`),
-    ...exceed('waterDepthMm', tank.insideHeightMm, 'the tank’s inside height'),
-    ...exceed('heightMm', tank.insideHeightMm, 'the tank’s inside height'),
+    ...exceed('lengthMm', tank.insideLengthMm, inside('outerLengthMm', 'length')),
+    ...exceed('widthMm', tank.insideWidthMm, inside('outerWidthMm', 'width')),
+    ...exceed('waterDepthMm', tank.insideHeightMm, height),
+    ...exceed('heightMm', tank.insideHeightMm, height),
     ...exceed('openingLengthMm', chamber.lengthMm ?? Infinity, 'the chamber’s length'),
     ...exceed('openingWidthMm', chamber.widthMm ?? Infinity, 'the chamber’s width'),
     ...(chamber.heightMm === undefined ? [] : exceed('waterDepthMm', chamber.heightMm, 'the chamber’s height')),
@@ -76,8 +83,8 @@ function checkChamber(
 
 function checkChambers(setup: Setup, tank: TankPlan, words: Printer): Contradiction[] {
   const chambers = readGroups<ChamberInput>(setup.tank.specs, 'chambers') ?? []
-  const isSizeGiven = readNumber(setup.tank.specs, 'outerLengthMm') !== undefined
-  const found = chambers.flatMap((chamber, index) => checkChamber(chamber, index, tank, isSizeGiven, words))
+  const isGiven = (key: string) => readNumber(setup.tank.specs, key) !== undefined
+  const found = chambers.flatMap((chamber, index) => checkChamber(chamber, index, tank, isGiven, words))
   const total = chambers.reduce((sum, chamber) => sum + (chamber.lengthMm ?? 0), 0)
   if (chambers.length > 1 && total > tank.insideLengthMm + toleranceMm)
     found.push({
@@ -93,7 +100,7 @@ function checkChambers(setup: Setup, tank: TankPlan, words: Printer): Contradict
 }
 
 function checkRoom({ room }: Setup, words: Printer): Contradiction[] {
-  const { coldestC, temperatureC, warmestC } = room ?? {}
+  const { coldestC, temperatureC, warmestC, tankTopMm, ceilingMm } = room ?? {}
   const found: Contradiction[] = []
   const order = (path: string, low: number | undefined, high: number | undefined, detail: string) => {
     if (low !== undefined && high !== undefined && low > high)
@@ -103,11 +110,22 @@ function checkRoom({ room }: Setup, words: Printer): Contradiction[] {
   order('room.warmestC', temperatureC, warmestC, 'The usual room is warmer than the warmest')
   if (temperatureC === undefined)
     order('room.warmestC', coldestC, warmestC, 'The coldest room is warmer than the warmest')
+  if (tankTopMm !== undefined && ceilingMm !== undefined && tankTopMm > ceilingMm + toleranceMm)
+    found.push({
+      path: 'room.tankTopMm',
+      detail: `The tank’s top edge at ${words.length(tankTopMm)} is above the ceiling at ${words.length(ceilingMm)}.`,
+    })
   return found
 }
 
 function checkItems(setup: Setup): Contradiction[] {
-  const chambers = new Set((readGroups<ChamberInput>(setup.tank.specs, 'chambers') ?? []).map(({ id }) => id))
+  const { specs } = setup.tank
+  const hasSump = readText(specs, 'filtration') === 'sump' || readGroup(specs, 'sump') !== undefined
+  const chambers = new Set([
+    ...(readGroups<ChamberInput>(specs, 'chambers') ?? []).map(({ id }) => id),
+    'display',
+    ...(hasSump ? ['sump'] : []),
+  ])
   const ids = setup.items.map(({ id }) => id)
   return setup.items.flatMap(({ id, place }, index): Contradiction[] => [
     ...(ids.indexOf(id) < index ? [{ path: `items.${index}.id`, detail: `Two items have the id “${id}”.` }] : []),
@@ -151,6 +169,12 @@ export function findContradictions(setup: Setup): readonly Contradiction[] {
     if (value !== undefined && value > limitMm + toleranceMm)
       inside.push({ path, detail: `${words.length(value)} is more than ${what} (${words.length(limitMm)}).` })
   }
+  const top = setup.room?.tankTopMm
+  if (top !== undefined && hasSize && top < tank.outerHeightMm - toleranceMm)
+    inside.push({
+      path: 'room.tankTopMm',
+      detail: `A tank ${words.length(tank.outerHeightMm)} high cannot have its top edge ${words.length(top)} above the floor.`,
+    })
   within('tank.waterLineMm', line, tank.insideHeightMm, 'the tank’s inside height')
   within('tank.displayLengthMm', readNumber(specs, 'displayLengthMm'), tank.insideLengthMm, 'the tank’s inside length')
   within('tank.displayWidthMm', readNumber(specs, 'displayWidthMm'), tank.insideWidthMm, 'the tank’s inside width')

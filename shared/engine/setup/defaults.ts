@@ -24,9 +24,25 @@ const byCountry: Readonly<Record<string, ReturnType<typeof circuit>>> = {
   JP: japan,
 }
 
-/** Household mains of a country (ISO 3166-1 alpha-2); without one 120 V, 15 A, plug A/B. Common practice: the outlet decides. */
-export const chooseMains = (country: string | undefined) =>
-  country === undefined ? northAmerica : (byCountry[country.toUpperCase()] ?? continent)
+const everywhere = [northAmerica, britain, continent, australia, japan]
+
+const findCountry = (country: string | undefined) =>
+  country === undefined ? undefined : byCountry[country.toUpperCase()]
+
+/** Whether a country alone tells the voltage and the plug. */
+export const hasKnownMains = (country: string | undefined): boolean => findCountry(country) !== undefined
+
+/**
+ * Household mains of a country (ISO 3166-1 alpha-2), or the first usual ones that have the voltage and plug that were
+ * given; told nothing, 120 V, 15 A, plug A/B. Common practice: the outlet decides.
+ */
+export function chooseMains(country: string | undefined, { volts, plugType }: Partial<Mains> = {}) {
+  const usual = findCountry(country) ?? (country === undefined ? northAmerica : continent)
+  const agreeing = [usual, ...everywhere].find(
+    (one) => one.volts === (volts ?? one.volts) && one.plugType === (plugType ?? one.plugType),
+  )
+  return agreeing ?? usual
+}
 
 /** What a setup is taken to be where nobody said otherwise; see the method page. */
 export const defaults = {

@@ -9,12 +9,16 @@ export interface Basin extends Chamber {
   readonly plusMinus?: number
 }
 
-const toBasin = (plan: Plan, chamber: Chamber, path: string): Basin => ({
+type Backing = Pick<Basin, 'source' | 'plusMinus'>
+
+const toBasin = (chamber: Chamber, path: string, { source, plusMinus }: Backing): Basin => ({
   ...chamber,
   path,
-  source: plan.tank.source,
-  ...(plan.tank.plusMinus !== undefined && { plusMinus: plan.tank.plusMinus }),
+  source,
+  ...(plusMinus !== undefined && { plusMinus }),
 })
+
+const assumed: Backing = { source: 'estimate' }
 
 export function describeDisplay({ tank }: Plan): Chamber {
   return {
@@ -42,21 +46,26 @@ function describeSump({ tank }: Plan): Chamber | undefined {
 }
 
 /**
- * Where equipment can go. With a place, that one (an unknown chamber: none). Without: the chambers, else the sump, else
- * the display.
+ * Where equipment can go. With a place, the water that is there: a chamber by its id (the display's and the sump's too),
+ * the sump in the cabinet, none hung on or outside. Without: the chambers, else the sump, else the display.
  */
 export function findBasins(plan: Plan, place: Place | undefined): readonly Basin[] {
-  const display = toBasin(plan, describeDisplay(plan), 'tank')
+  const { specs } = plan.setup.tank
+  const display = toBasin(describeDisplay(plan), 'tank', plan.tank)
   const sump = describeSump(plan)
-  const chambers = plan.tank.chambers.map((chamber, index) => toBasin(plan, chamber, `tank.chambers.${index}`))
+  const sumps = sump ? [toBasin(sump, 'tank.sump', specs['sump'] ?? assumed)] : []
+  const chambers = plan.tank.chambers.map((chamber, index) =>
+    toBasin(chamber, `tank.chambers.${index}`, specs['chambers'] ?? assumed),
+  )
   if (place && 'chamber' in place) {
-    const all = sump ? [...chambers, toBasin(plan, sump, 'tank.sump')] : chambers
-    return all.filter((basin) => basin.id === place.chamber)
+    const all = [...chambers, ...sumps, display]
+    return all.filter((basin) => basin.id === place.chamber).slice(0, 1)
   }
   if (place?.in === 'display') return [display]
-  if (place?.in !== 'cabinet' && chambers.length > 0) return chambers
-  if (sump) return [toBasin(plan, sump, 'tank.sump')]
-  return chambers.length > 0 ? chambers : [display]
+  if (place?.in === 'cabinet') return sumps
+  if (place) return []
+  if (chambers.length > 0) return chambers
+  return sumps.length > 0 ? sumps : [display]
 }
 
 /** The other items that were said to be in that chamber. */

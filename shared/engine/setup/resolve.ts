@@ -1,7 +1,7 @@
 import { readNumber } from '../values'
 import type { Goals, Item, Mains, Room, Setup, Water } from '../types'
 import { tankHeatLoss } from '../physics/heat'
-import { chooseMains, defaults } from './defaults'
+import { chooseMains, defaults, hasKnownMains } from './defaults'
 import type { Plan, TankPlan } from './plan'
 import { resolveTank } from './tank'
 
@@ -59,45 +59,58 @@ function resolveWater(
   }
 }
 
+/** The room's temperatures; a default gives way to what was said, so that coldest, usual and warmest stay in order. */
+function resolveTemperatures(
+  given: Partial<Room>,
+  assume: (key: string, value: number) => number,
+): Pick<Room, 'temperatureC' | 'coldestC' | 'warmestC'> {
+  const { temperatureC, coldestC, warmestC } = given
+  const atLeast = Math.max(temperatureC ?? -Infinity, coldestC ?? -Infinity)
+  const atMost = Math.min(temperatureC ?? Infinity, warmestC ?? Infinity)
+  const between = Math.min(Math.max(defaults.room.temperatureC, coldestC ?? -Infinity), warmestC ?? Infinity)
+  return {
+    temperatureC: temperatureC ?? assume('room.temperatureC', between),
+    coldestC: coldestC ?? assume('room.coldestC', Math.min(defaults.room.coldestC, atMost)),
+    warmestC: warmestC ?? assume('room.warmestC', Math.max(defaults.room.warmestC, atLeast)),
+  }
+}
+
+/** The outlets. A country tells voltage and plug; which circuit and how many outlets it does not. */
+function resolveMains(
+  { country, mains: given = {} }: Setup,
+  assume: <T extends Assumed>(key: string, value: T) => T,
+): Mains {
+  const usual = chooseMains(country, given)
+  const isTold = hasKnownMains(country)
+  return {
+    volts: given.volts ?? (isTold ? usual.volts : assume('mains.volts', usual.volts)),
+    circuitA: given.circuitA ?? assume('mains.circuitA', usual.circuitA),
+    plugType: given.plugType ?? (isTold ? usual.plugType : assume('mains.plugType', usual.plugType)),
+    outlets: given.outlets ?? assume('mains.outlets', defaults.freeWallOutlets),
+    residualCurrentProtected: given.residualCurrentProtected ?? assume('mains.residualCurrentProtected', false),
+  }
+}
+
 /**
- * The setup with every default filled in and each default named. `overrides` replaces assumed values by path, to ask
- * whether another value would change an answer; a value that the person gave is never overridden.
+ * The setup with every default filled in and each default named.
  * Throws RangeError where neither the tank's outside size nor a volume is known.
  */
-export function resolve(setup: Setup, overrides?: ReadonlyMap<string, Assumed>): Plan {
+export function resolve(setup: Setup): Plan {
   const assumed = new Map<string, Assumed>()
   const assume = <T extends Assumed>(key: string, value: T): T => {
-    const used = (overrides?.get(key) as T | undefined) ?? value
-    assumed.set(key, used)
-    return used
+    assumed.set(key, value)
+    return value
   }
   const items = setup.items.filter((item) => item.state !== 'gone')
   const tank = resolveTank(setup.tank, (area) => displacedL(setup, items, area), assume)
   const given = setup.room ?? {}
   const room: Room = {
-    temperatureC:
-      given.temperatureC ??
-      assume('room.temperatureC', Math.max(defaults.room.temperatureC, given.coldestC ?? -Infinity)),
-    coldestC:
-      given.coldestC ?? assume('room.coldestC', Math.min(defaults.room.coldestC, given.temperatureC ?? Infinity)),
-    warmestC:
-      given.warmestC ??
-      assume(
-        'room.warmestC',
-        Math.max(defaults.room.warmestC, given.temperatureC ?? -Infinity, given.coldestC ?? -Infinity),
-      ),
+    ...resolveTemperatures(given, assume),
     relativeHumidity: given.relativeHumidity ?? assume('room.relativeHumidity', defaults.room.relativeHumidity),
     ceilingMm: given.ceilingMm ?? assume('room.ceilingMm', defaults.room.ceilingMm),
     tankTopMm: given.tankTopMm ?? assume('room.tankTopMm', defaults.supportHeightMm + tank.outerHeightMm),
   }
-  const usual = chooseMains(setup.country)
-  const mains: Mains = {
-    volts: setup.mains?.volts ?? assume('mains.volts', usual.volts),
-    circuitA: setup.mains?.circuitA ?? assume('mains.circuitA', usual.circuitA),
-    plugType: setup.mains?.plugType ?? assume('mains.plugType', usual.plugType),
-    outlets: setup.mains?.outlets ?? assume('mains.outlets', defaults.freeWallOutlets),
-    residualCurrentProtected: setup.mains?.residualCurrentProtected ?? assume('mains.residualCurrentProtected', false),
-  }
+  const mains = resolveMains(setup, assume)
   const wanted = setup.goals ?? {}
   const goals: Goals = {
     temperatureC: wanted.temperatureC ?? assume('goals.temperatureC', defaults.goals.temperatureC),

@@ -36,8 +36,8 @@ function guessInside(
   let line = lineMm
   if (line === undefined) {
     if (lengthMm && widthMm) line = volume / (lengthMm * widthMm)
-    else if (lengthMm) line = linePerWidth * Math.sqrt(volume / (lengthMm * linePerWidth))
-    else if (widthMm) line = linePerWidth * widthMm
+    else if (lengthMm) line = Math.max(linePerWidth * Math.sqrt(volume / (lengthMm * linePerWidth)), deepest)
+    else if (widthMm) line = Math.max(linePerWidth * widthMm, deepest)
     else line = Math.max(linePerWidth * cubeWidth, deepest)
   }
   const floor = volume / line
@@ -48,6 +48,11 @@ function guessInside(
     return { length: needed, width: floor / needed, line }
   return { length, width, line }
 }
+
+/** Whether a tank can be laid out at all: by its outside size, or by a nominal volume. */
+export const hasSize = (specs: Specs): boolean =>
+  readNumber(specs, 'nominalVolumeL') !== undefined ||
+  ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'].every((key) => readNumber(specs, key) !== undefined)
 
 function resolveSize(
   specs: Specs,
@@ -84,7 +89,9 @@ function resolveSize(
     },
     chambers,
   )
-  const outerHeightMm = height ?? inside.line / lineShareOfHeight
+  const tallest = Math.max(0, ...chambers.map((chamber) => chamber.heightMm ?? 0))
+  const bottomMm = given('bottomMm') ?? thickness(tallest + thickness(Infinity))
+  const outerHeightMm = height ?? Math.max(inside.line / lineShareOfHeight, tallest > 0 ? tallest + bottomMm : 0)
   const wallMm = thickness(outerHeightMm)
   const size = {
     outerLengthMm: length ?? assume('tank.outerLengthMm', inside.length + 2 * wallMm),

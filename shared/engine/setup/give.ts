@@ -1,0 +1,26 @@
+import { readGroup, readGroups } from '../values'
+import type { ChamberInput, Setup, TankInput } from '../types'
+
+type Given = number | string | boolean
+
+/** A value of the tank, of one of its chambers (`chambers.0.heightMm`) or of its sump. */
+function giveTank(tank: TankInput, [key = '', part = '', field = '']: readonly string[], value: Given): TankInput {
+  const { specs } = tank
+  const put = (whole: unknown) => ({
+    ...tank,
+    specs: { ...specs, [key]: { source: 'estimate' as const, ...specs[key], value: whole } },
+  })
+  if (key === 'chambers') {
+    const chambers = readGroups<ChamberInput>(specs, key) ?? []
+    return put(chambers.map((chamber, index) => (String(index) === part ? { ...chamber, [field]: value } : chamber)))
+  }
+  return put(part === '' ? value : { ...readGroup(specs, key), [part]: value })
+}
+
+/** The setup as if its owner had said `value` at a dotted path; what follows from it by default follows anew. */
+export function giveValue(setup: Setup, path: string, value: Given): Setup {
+  const [section = '', key = '', ...rest] = path.split('.')
+  if (section === 'tank') return { ...setup, tank: giveTank(setup.tank, [key, ...rest], value) }
+  const was = setup[section as 'room' | 'mains' | 'water' | 'goals'] ?? {}
+  return { ...setup, [section]: { ...was, [key]: value } }
+}
