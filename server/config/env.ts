@@ -13,7 +13,7 @@ const databaseUrlSchema = z.url({
 
 const originSchema = z
   .url({ protocol: /^https?$/, error: 'must be an address such as https://example.org' })
-  .refine((text) => new URL(text).pathname === '/' && !/[?#]/.test(text), 'must have no path')
+  .refine((text) => !URL.canParse(text) || /^\w+:\/\/[^/?#]+\/?$/.test(text), 'must have no path')
   .transform((text) => new URL(text).origin)
 
 export const envSchema = z.object({
