@@ -11,8 +11,6 @@ export interface Amount {
   readonly parts: readonly { readonly value: number; readonly unit: NamedUnit | undefined }[]
   readonly from: number
   readonly to: number
-  /** A number written as a word, without a unit: "one" of "which one". */
-  readonly isBareWord: boolean
 }
 
 /** Whoever writes gallons or pounds groups thousands with commas; with litres a comma may stand for either. */
@@ -47,14 +45,12 @@ export const readAmount = (tokens: readonly Token[], at: number): Amount | undef
   const found = readUnit(tokens, skipHyphen(tokens, at + 1))
   const value = valueOf(number, found?.unit)
   if (value === undefined) return undefined
-  const isBareWord = found === undefined && number.spelled === true
   const to = found?.to ?? at + 1
   return readSmaller(tokens, {
     quantity: found?.quantity,
     parts: [{ value, unit: found?.unit }],
     from: at,
     to,
-    isBareWord,
   })
 }
 
@@ -71,14 +67,30 @@ export const amountIn = (amount: Amount, unit: CanonicalUnit): number => {
   return Number(sum.toPrecision(14))
 }
 
+/** Enough for what is typed, without the noise of binary fractions. */
+const digits = { shown: 6, written: 12 } as const
+
 const attached: ReadonlySet<string> = new Set(['%', '/h'])
 
-/** "4.5 in"; the unit alone may be left to the last of a row. */
-export const printAmount = (amount: Amount, hasUnit = true): string =>
+const print = (amount: Amount, precision: number, hasUnit: boolean): string =>
   amount.parts
     .map(({ value, unit }) => {
-      const digits = String(Number(value.toPrecision(6)))
-      if (!hasUnit || unit === undefined) return digits
-      return attached.has(unit.symbol) ? `${digits}${unit.symbol}` : `${digits} ${unit.symbol}`
+      const number = String(Number(value.toPrecision(precision)))
+      if (!hasUnit || unit === undefined) return number
+      return attached.has(unit.symbol) ? `${number}${unit.symbol}` : `${number} ${unit.symbol}`
     })
     .join(' ')
+
+/** "4.5 in"; the unit may be left to the last of a row. */
+export const printAmount = (amount: Amount, hasUnit = true): string => print(amount, digits.shown, hasUnit)
+
+/** The same for a setup link: every digit that was typed. */
+export const writeAmount = (amount: Amount): string => print(amount, digits.written, true)
+
+/** A bare number as an amount of a unit. */
+export const createAmount = (value: number, quantity: Quantity, unit: NamedUnit | undefined): Amount => ({
+  quantity,
+  parts: [{ value, unit }],
+  from: 0,
+  to: 0,
+})

@@ -51,7 +51,24 @@ export const readFilterChoices = (reading: Reading): void => {
 const asTyped = (value: string | boolean): string => (value === true ? 'yes' : value === false ? 'no' : value)
 
 /** Words that say something of the tank even where they also told what a measure is of: "10 mm glass". */
-const alwaysRead: ReadonlySet<string> = new Set(['cube', 'sump', 'glass', 'acrylic', 'perspex', 'plexiglass'])
+const alwaysRead: ReadonlySet<string> = new Set([
+  'desk',
+  'dresser',
+  'table',
+  'counter',
+  'countertop',
+  'kitchen',
+  'sideboard',
+  'cupboard',
+  'shelf',
+  'furniture',
+  'cube',
+  'sump',
+  'glass',
+  'acrylic',
+  'perspex',
+  'plexiglass',
+])
 
 /** Reads words that say something of the setup: "rimless", "acrylic", "no lid". */
 export const readFieldChoices = ({ tokens, draft, landmarkAt }: Reading): void => {

@@ -7,8 +7,10 @@ import { gonePhrases, replacePhrases } from './words/intent-words'
 type KindLandmark = Landmark & { readonly kind: KindKey }
 
 /** Asked for far less often than named as what the asked-for piece goes with. */
-const base: Readonly<Partial<Record<KindKey, number>>> = { tank: 1, sand: 6, rock: 6, stand: 8, net: 8 }
+const base: Readonly<Partial<Record<KindKey, number>>> = { tank: 3, sand: 6, rock: 6, stand: 8, net: 8 }
 const usual = 10
+/** Under this a tank is only what the rest goes with. */
+const leastForTank = 9
 const weights = { asked: 8, replaced: 6, gone: 6, first: 3, qualified: 2, owned: -5, towards: -4 } as const
 
 const asking: ReadonlySet<string> = new Set(
@@ -44,6 +46,13 @@ const isWithin = (places: ReadonlySet<number>, from: number, to: number): boolea
 const startsOf = (tokens: readonly Token[], index: Parameters<typeof findPhrases>[0]): ReadonlySet<number> =>
   new Set(findPhrases(index, tokens).map(({ from }) => from))
 
+/** "what do I need for my tank" asks for no tank; "looking for a tank" does. */
+const isAsked = (kind: KindKey, before: readonly string[]): boolean => {
+  const place = before.findIndex((word) => asking.has(word))
+  const between = before.slice(0, before[place] === 'looking' ? place - 1 : place)
+  return place !== -1 && !(kind === 'tank' && between.some((word) => towards.has(word)))
+}
+
 /** The kind that the text asks about, by the words around each kind that it names; null where it names none. */
 export const chooseKind = (tokens: readonly Token[], landmarks: readonly Landmark[]): KindLandmark | null => {
   const named = landmarks.filter((landmark): landmark is KindLandmark => landmark.kind !== undefined)
@@ -56,14 +65,17 @@ export const chooseKind = (tokens: readonly Token[], landmarks: readonly Landmar
     const before = wordsBefore(tokens, from, occupied)
     const next = named[index + 1]?.from ?? tokens.length
     const near = before.find((word) => !skipped.has(word)) ?? ''
+    const isReplaced = isWithin(replaced, from - before.length, from)
+    const isGone = isWithin(gone, to, Math.min(next, to + window))
+    const isOwned = !isReplaced && !isGone && before.slice(0, 3).some((word) => owning.has(word))
     return (
       (base[kind] ?? usual) +
-      (before.some((word) => asking.has(word)) ? weights.asked : 0) +
-      (isWithin(replaced, from - before.length, from) ? weights.replaced : 0) +
-      (isWithin(gone, to, Math.min(next, to + window)) ? weights.gone : 0) +
+      (isAsked(kind, before) ? weights.asked : 0) +
+      (isReplaced ? weights.replaced : 0) +
+      (isGone ? weights.gone : 0) +
       (index === 0 ? weights.first : 0) +
       (qualifying.has(tokens[to]?.text ?? '') ? weights.qualified : 0) +
-      (before.slice(0, 3).some((word) => owning.has(word)) ? weights.owned : 0) +
+      (isOwned ? weights.owned : 0) +
       (towards.has(near) ? weights.towards : 0)
     )
   }
@@ -72,6 +84,6 @@ export const chooseKind = (tokens: readonly Token[], landmarks: readonly Landmar
     const points = score(landmark, index)
     if (best === null || points > best.points) best = { landmark, points }
   }
-  const isOnlyContext = best?.landmark.kind === 'tank' && best.points < usual
+  const isOnlyContext = best?.landmark.kind === 'tank' && best.points < leastForTank
   return best === null || isOnlyContext ? null : best.landmark
 }

@@ -1,10 +1,7 @@
 import { findBound } from './cues'
 import type { Measure } from './measures'
-import { findNearest } from './nearest'
 import { indexPhrases, matchAt } from './phrases'
 import type { Reading } from './reading'
-import { amountIn, printAmount, withUnit } from './amounts'
-import { namedUnits, type NamedUnit } from '../../units/unit-names'
 
 const outletWords = 'outlet, socket, plug, way, gang, receptacle, port'
 const outlets = indexPhrases<'plain' | 'wall' | 'switched'>([
@@ -58,61 +55,4 @@ export const readOutlets = (reading: Reading, measure: Measure): boolean => {
     ...cues,
   )
   return true
-}
-
-interface Bare {
-  readonly subject: 'salinity' | 'feed' | 'humidity'
-  readonly path: string
-  readonly name: string
-  readonly unit: NamedUnit | undefined
-  readonly canonical: 'ppt' | 'ppm' | 'fraction'
-  readonly likely: readonly [number, number]
-}
-
-const bares: readonly Bare[] = [
-  {
-    subject: 'salinity',
-    path: 'goals.salinityPpt',
-    name: 'salinity',
-    unit: namedUnits.salinity[0],
-    canonical: 'ppt',
-    likely: [20, 45],
-  },
-  {
-    subject: 'feed',
-    path: 'water.feedTdsPpm',
-    name: 'tap dissolved solids',
-    unit: namedUnits.concentration[0],
-    canonical: 'ppm',
-    likely: [5, 2000],
-  },
-]
-const beside = 2
-
-/** Reads "salinity 35" and "TDS of 180": numbers whose unit goes without saying. */
-export const readBareNumber = (reading: Reading, measure: Measure): boolean => {
-  const { draft, tokens } = reading
-  const amount = measure.amounts[0]
-  if (measure.shape !== 'single' || amount === undefined || amount.quantity !== undefined) return false
-  for (const { subject, path, name, unit, canonical, likely } of bares) {
-    const near = findNearest(reading, measure, (landmark) => landmark.subject === subject)
-    const value = amount.parts[0]?.value ?? 0
-    const isSolids =
-      near !== undefined &&
-      (subject !== 'feed' || tokens.slice(near.landmark.from, near.landmark.to).some(({ text }) => text === 'tds'))
-    if (
-      near === undefined ||
-      near.cost > beside ||
-      !isSolids ||
-      unit === undefined ||
-      value < likely[0] ||
-      value > likely[1]
-    )
-      continue
-    const full = withUnit(amount, canonical === 'ppt' ? 'salinity' : 'concentration', unit)
-    if (!draft.setField(path, amountIn(full, canonical), printAmount(full))) return false
-    draft.note({ meaning: `${name} ${printAmount(full)}`, path }, measure, near.landmark)
-    return true
-  }
-  return false
 }

@@ -2,17 +2,19 @@ import { indexPhrases, matchAt, type Mention, type PhraseIndex } from './phrases
 import type { Measure } from './measures'
 import type { Reading } from './reading'
 import { boundsAfter, boundsBefore, type Bound } from './words/compare-words'
-import { dimensionOf, type Dimension } from './words/dimension-words'
+import { dimensionLetters, dimensionOf, type Dimension } from './words/dimension-words'
 import { seasonPhrases, type Season } from './words/season-words'
 
 const longestPhrase = 4
 const seasons = indexPhrases(seasonPhrases)
 const before = indexPhrases(boundsBefore)
 const after = indexPhrases(boundsAfter)
+/** "W 5 in L 4 in". */
+const letters = indexPhrases<Dimension>(dimensionLetters)
 const dimensions = indexPhrases<Dimension>([
   ...dimensionOf,
   ['front to back', 'front-to-back'],
-  ['of water', 'deep'],
+  ['of water', 'water'],
   ['in diameter', 'across'],
   ['in length', 'long'],
   ['in width', 'wide'],
@@ -20,7 +22,8 @@ const dimensions = indexPhrases<Dimension>([
   ['in height', 'tall'],
   ['of depth', 'deep'],
   ['of height', 'tall'],
-  ['water depth', 'deep'],
+  ['water depth', 'water'],
+  ['depth of water', 'water'],
 ])
 
 /** The phrase nearest before a measure, with no more than `gap` other words between, in the same clause. */
@@ -68,7 +71,9 @@ export const findBound = (reading: Reading, measure: Measure): Mention<Bound> | 
 
 /** "depth of 12", "12 deep". */
 export const findDimension = (reading: Reading, measure: Measure): Mention<Dimension> | undefined =>
-  lookBack(reading, measure, dimensions, 3, true) ?? lookAhead(reading, measure, dimensions, 0)
+  lookBack(reading, measure, letters, 0, true) ??
+  lookBack(reading, measure, dimensions, 3, true) ??
+  lookAhead(reading, measure, dimensions, 0)
 
 /** "down to 60", "60 in winter"; whichever stands closer, before where neither does. */
 export const findSeason = (reading: Reading, measure: Measure): Mention<Season> | undefined => {

@@ -1,3 +1,5 @@
+import { findSetupField } from '../../kinds/setup-fields'
+import { amountIn, writeAmount, type Amount } from './amounts'
 import type { FieldValue, Filter, ReadField, Understood } from './types'
 import type { Token } from './token'
 
@@ -22,8 +24,9 @@ export interface Draft {
   use(...spans: readonly Span[]): void
   /** Takes the spans and says what they mean; cues that stand apart from the first span are taken in silence. */
   note(note: Note, span: Span, ...cues: readonly Span[]): void
-  /** The first value given for a path stays. */
+  /** The first value given for a path stays; one that the setup could not hold is not taken. */
   setField(path: string, value: FieldValue, text: string): boolean
+  setAmount(path: string, amount: Amount): boolean
   setFilter(key: string, filter: Filter): boolean
 }
 
@@ -31,6 +34,13 @@ const setOnce = <T>(record: Record<string, T>, key: string, value: T): boolean =
   if (Object.hasOwn(record, key)) return false
   record[key] = value
   return true
+}
+
+/** Inside the range that its field can plausibly have. */
+const canHold = (path: string, value: FieldValue): boolean => {
+  const attribute = findSetupField(path)?.attribute
+  if (attribute?.type !== 'measure') return attribute !== undefined
+  return typeof value === 'number' && value >= attribute.plausible[0] && value <= attribute.plausible[1]
 }
 
 export const createDraft = (text: string, tokens: readonly Token[]): Draft => {
@@ -65,7 +75,13 @@ export const createDraft = (text: string, tokens: readonly Token[]): Draft => {
       const end = tokens[stretch.to - 1]?.end ?? start
       understood.push({ text: text.slice(start, end), ...note, start, end })
     },
-    setField: (path, value, typed) => setOnce(fields, path, { value, text: typed }),
+    setField: (path, value, typed) => canHold(path, value) && setOnce(fields, path, { value, text: typed }),
+    setAmount: (path, amount) => {
+      const attribute = findSetupField(path)?.attribute
+      if (attribute?.type !== 'measure') return false
+      const value = amountIn(amount, attribute.unit)
+      return canHold(path, value) && setOnce(fields, path, { value, text: writeAmount(amount) })
+    },
     setFilter: (key, filter) => setOnce(filters, key, filter),
   }
 }

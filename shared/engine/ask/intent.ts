@@ -6,12 +6,14 @@ import {
   fitPhrases,
   gonePhrases,
   missingPhrases,
+  needPhrases,
   replacePhrases,
   whichPhrases,
 } from './words/intent-words'
 
 const index = (phrases: readonly string[]) => indexPhrases(phrases.map((phrase) => [phrase, true] as const))
 const missing = index(missingPhrases)
+const needs = index(needPhrases)
 const gone = index(gonePhrases)
 const replacing = index(replacePhrases)
 const asksWhether = index(checkPhrases)
@@ -47,10 +49,10 @@ const startsQuestion = (tokens: readonly Token[], at: number): boolean => {
 /** What is asked for: a check of one piece, pieces that fit, a replacement, or what a setup lacks. */
 export const findIntent = (tokens: readonly Token[], { hasKind, hasGear, isTaken }: Asked): IntentFound => {
   const find = (phrases: typeof missing) => findPhrases(phrases, tokens).filter(({ from }) => !isTaken(from))
-  const lacks = find(missing)
+  const lacks = [...find(missing), ...(hasKind ? [] : find(needs))]
   const replaced = [...find(replacing), ...(hasKind || hasGear ? find(gone) : [])]
   if (replaced.length > 0) return { intent: 'replace', cues: replaced }
-  if (lacks.length > 0 && !hasKind) return { intent: 'missing', cues: lacks }
+  if (lacks.length > 0) return { intent: 'missing', cues: lacks }
   const whether = find(asksWhether).filter(
     ({ from, to }) => startsQuestion(tokens, from) && !notWhether.has(tokens[to]?.text ?? ''),
   )

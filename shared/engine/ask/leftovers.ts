@@ -9,6 +9,10 @@ const most = 20
 const hasSize = ({ fields }: Draft): boolean =>
   Object.keys(fields).some((path) => path.endsWith('Mm') || path === 'tank.volumeL')
 
+/** The letter of "6500K" and "T-90". */
+const isInName = (tokens: readonly Token[], at: number): boolean =>
+  tokens[at]?.glued === true || (tokens[at + 1]?.glued === true && tokens[at + 1]?.type !== 'stop')
+
 /** A number that was not used keeps its unit beside it: "1,500 l". */
 const lastOfUnit = (tokens: readonly Token[], at: number): number => (readUnit(tokens, at + 1)?.to ?? at + 1) - 1
 
@@ -21,7 +25,7 @@ export const findLeftovers = (text: string, tokens: readonly Token[], draft: Dra
     return (
       !stopWords.has(token.text) &&
       !(isVague && vagueSizes.has(token.text)) &&
-      (token.text.length > 1 || token.type === 'number')
+      (token.text.length > 1 || token.type === 'number' || isInName(tokens, at))
     )
   }
   const stretches: { start: number; end: number; last: number }[] = []

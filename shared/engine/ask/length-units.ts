@@ -24,8 +24,8 @@ export interface Lengths {
 }
 
 /** The unit of the last length with one before a measure, else of the next after it. */
-const borrowUnit = ({ measures }: Reading, measure: Measure): NamedUnit | undefined => {
-  const place = measures.indexOf(measure)
+const borrowUnit = ({ measures, placeOf }: Reading, measure: Measure): NamedUnit | undefined => {
+  const place = placeOf.get(measure) ?? 0
   const unitOf = (other: Measure) => other.amounts.find(({ quantity }) => quantity === 'length')?.parts.at(-1)?.unit
   const isLength = (other: Measure) => unitOf(other) !== undefined
   const borrowed =

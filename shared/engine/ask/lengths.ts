@@ -1,3 +1,4 @@
+import { getAttribute, type KindKey } from '../../kinds/index'
 import { amountIn, printAmount, type Amount } from './amounts'
 import { readBounded } from './bounded'
 import { findBound, findDimension } from './cues'
@@ -29,6 +30,7 @@ const tankFields: Readonly<Partial<Record<Dimension, Field>>> = {
   'front-to-back': field('tank.outerWidthMm', 'tank width'),
   deep: field('tank.outerHeightMm', 'tank height'),
   tall: field('tank.outerHeightMm', 'tank height'),
+  water: field('tank.waterLineMm', 'water line'),
   thick: field('tank.wallMm', 'wall'),
 }
 
@@ -39,6 +41,7 @@ const chamberFields: Readonly<Partial<Record<Dimension, Field>>> = {
   'front-to-back': field('widthMm', 'chamber width'),
   deep: field('waterDepthMm', 'chamber water depth'),
   tall: field('heightMm', 'chamber height'),
+  water: field('waterDepthMm', 'chamber water depth'),
 }
 
 const simple: Readonly<Partial<Record<NonNullable<Landmark['subject']>, Field>>> = {
@@ -49,10 +52,6 @@ const simple: Readonly<Partial<Record<NonNullable<Landmark['subject']>, Field>>>
 
 const lastChamber = ({ draft }: Reading): number =>
   Math.max(0, ...Object.keys(draft.fields).map((path) => Number(/^tank\.chambers\.(\d+)\./.exec(path)?.[1] ?? 0)))
-
-/** In "36 wide, 18 deep, 16 tall" the depth runs front to back. */
-const hasHeight = ({ tokens }: Reading): boolean =>
-  tokens.some(({ text }) => text === 'tall' || text === 'high' || text === 'height')
 
 const chooseField = (
   reading: Reading,
@@ -74,15 +73,23 @@ const chooseField = (
   }
   if (subject !== undefined && simple[subject]) return simple[subject]
   if (subject !== 'tank') return undefined
-  if (dimension === 'deep' && hasHeight(reading)) return tankFields.wide
+  if (dimension === 'deep' && reading.hasHeight) return tankFields.wide
   return tankFields[dimension ?? 'long']
 }
 
+/** 12 mm is no reach of an arm and no length of a heater, whatever stands beside it. */
+const isBelievable = (kind: KindKey, mm: number): boolean => {
+  const key = chooseLengthKey(kind, undefined)
+  const attribute = key === undefined ? undefined : getAttribute(kind, key)
+  return attribute?.type !== 'measure' || mm >= attribute.usual[0] / 2
+}
+
 const acceptsLength =
-  (reading: Reading, mm: number) =>
+  (reading: Reading, mm: number, dimension: Dimension | undefined) =>
   (landmark: Landmark): boolean => {
     const { subject, kind } = landmark
-    if (kind !== undefined && kind === reading.kind && kind !== 'tank') return true
+    if (dimension === 'water') return subject === 'chamber' || subject === 'tank'
+    if (kind !== undefined && kind === reading.kind && kind !== 'tank' && isBelievable(kind, mm)) return true
     if (kind === 'stand') return true
     if (subject === 'wall') return mm <= thickestWallMm
     if (subject === 'sand') return mm <= deepestSandMm
@@ -97,7 +104,7 @@ const isCube = ({ tokens }: Reading, landmark: Landmark | undefined): boolean =>
 
 const fillCube = ({ draft }: Reading, amount: Amount): boolean => {
   const filled = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'].filter((key) =>
-    draft.setField(`tank.${key}`, amountIn(amount, 'mm'), printAmount(amount)),
+    draft.setAmount(`tank.${key}`, amount),
   )
   return filled.length > 0
 }
@@ -118,11 +125,15 @@ export const readLength = (reading: Reading, measure: Measure): boolean => {
   if (amount === undefined) return false
   const mm = amountIn(amount, 'mm')
   const bound = findBound(reading, measure)
-  const near = findNearest(reading, measure, acceptsLength(reading, mm))
+  const near = findNearest(reading, measure, acceptsLength(reading, mm, dimension?.means))
   const landmark =
     near !== undefined && near.cost <= (dimension === undefined ? reach.plain : reach.named) ? near.landmark : undefined
   const cues = [dimension, bound, landmark].filter((cue) => cue !== undefined)
-  const isGrain = landmark?.subject === 'sand' && kind === 'sand' && mm <= largestGrainMm && dimension === undefined
+  const isGrain =
+    (landmark?.subject === 'sand' || landmark?.kind === 'sand') &&
+    kind === 'sand' &&
+    mm <= largestGrainMm &&
+    dimension === undefined
   const isBelowPiece = isPieces(reading, landmark) && !(landmark?.subject === 'sand' && !isGrain)
   const isLoose = landmark === undefined && kind !== null && kind !== 'tank'
   if (isGrain || isBelowPiece || isLoose || landmark?.subject === 'cord') {
@@ -138,7 +149,7 @@ export const readLength = (reading: Reading, measure: Measure): boolean => {
     return true
   }
   const target = chooseField(reading, landmark, dimension?.means, mm)
-  if (target === undefined || !draft.setField(target.path, mm, printAmount(amount))) return false
+  if (target === undefined || !draft.setAmount(target.path, amount)) return false
   draft.note({ meaning: `${target.name} ${printAmount(amount)}`, path: target.path }, measure, ...cues)
   return true
 }

@@ -1,6 +1,6 @@
-/** True where one letter more, fewer, changed, or two neighbours swapped, turns one word into the other. */
+/** True where one letter after the first more, fewer, changed, or two neighbours swapped, turns one word into the other. */
 export const isNearlyEqual = (a: string, b: string): boolean => {
-  if (Math.abs(a.length - b.length) > 1) return false
+  if (a[0] !== b[0] || Math.abs(a.length - b.length) > 1) return false
   let head = 0
   while (head < a.length && a[head] === b[head]) head++
   let tail = 0

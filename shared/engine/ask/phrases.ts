@@ -35,7 +35,10 @@ const isWord = (token: Token | undefined, word: string): boolean =>
 export const matchAt = <T>(index: PhraseIndex<T>, tokens: readonly Token[], at: number): Mention<T> | undefined => {
   const token = tokens[at]
   if (token === undefined) return undefined
-  const candidates = [...(index.get(token.text) ?? []), ...(index.get(singularOf(token.text)) ?? [])]
+  const exact = index.get(token.text)
+  const singular = token.text.endsWith('s') ? index.get(singularOf(token.text)) : undefined
+  if (exact === undefined && singular === undefined) return undefined
+  const candidates = [...(exact ?? []), ...(singular ?? [])]
   const found = candidates
     .filter(({ words }) => words.every((word, offset) => isWord(tokens[at + offset], word)))
     .sort((a, b) => b.words.length - a.words.length)[0]

@@ -1,10 +1,10 @@
-import type { CanonicalUnit } from '../../units/units'
 import { amountIn, printAmount } from './amounts'
 import { readBounded } from './bounded'
 import { findBound } from './cues'
 import type { Measure } from './measures'
 import { findNearest, type Near } from './nearest'
 import type { Reading } from './reading'
+import { readTurnover } from './turnover'
 import { pieceKeys } from './words/piece-keys'
 import type { Subject } from './words/subject-words'
 
@@ -16,20 +16,35 @@ const findBeside = (reading: Reading, measure: Measure, ...subjects: readonly Su
   return near !== undefined && near.cost <= nearEnough ? near : undefined
 }
 
-const setPlain = (
-  reading: Reading,
-  measure: Measure,
-  path: string,
-  name: string,
-  unit: CanonicalUnit,
-  near?: Near,
-): boolean => {
+const setPlain = (reading: Reading, measure: Measure, path: string, name: string, near?: Near): boolean => {
   const amount = measure.amounts.at(-1)
-  if (amount === undefined || !reading.draft.setField(path, amountIn(amount, unit), printAmount(amount))) return false
+  if (amount === undefined || !reading.draft.setAmount(path, amount)) return false
   const cues = near === undefined ? [] : [near.landmark]
   reading.draft.note({ meaning: `${name} ${printAmount(amount)}`, path }, measure, ...cues)
   return true
 }
+
+const mostPieces = 9
+
+/** "two 100 W heaters" on one controller are 200 W. */
+const countPieces = (
+  { kind, measureAt }: Reading,
+  measure: Measure,
+): { readonly count: number; readonly cue?: Measure } => {
+  const before = kind === 'temperature-controller' ? measureAt.get(measure.from - 1) : undefined
+  const amount = before?.shape === 'single' && before.amounts[0]?.quantity === undefined ? before.amounts[0] : undefined
+  const count = amount?.parts[0]?.value ?? 1
+  if (before === undefined || !Number.isInteger(count) || count < 2 || count > mostPieces) return { count: 1 }
+  return { count, cue: before }
+}
+
+const multiply = (measure: Measure, count: number): Measure => ({
+  ...measure,
+  amounts: measure.amounts.map((amount) => ({
+    ...amount,
+    parts: amount.parts.map((part) => ({ ...part, value: part.value * count })),
+  })),
+})
 
 const readPiece = (reading: Reading, measure: Measure): boolean => {
   const { kind } = reading
@@ -37,12 +52,9 @@ const readPiece = (reading: Reading, measure: Measure): boolean => {
   const piece = kind === null || quantity === undefined ? undefined : pieceKeys[kind]?.[quantity]
   if (piece === undefined) return false
   const bound = findBound(reading, measure)
-  return readBounded(
-    reading,
-    measure,
-    { ...piece, bound: bound?.means ?? piece.bound },
-    bound === undefined ? [] : [bound],
-  )
+  const { count, cue } = countPieces(reading, measure)
+  const cues = [bound, cue].filter((each) => each !== undefined)
+  return readBounded(reading, multiply(measure, count), { ...piece, bound: bound?.means ?? piece.bound }, cues)
 }
 
 const readVolume = (reading: Reading, measure: Measure): boolean => {
@@ -65,8 +77,7 @@ const readVolume = (reading: Reading, measure: Measure): boolean => {
     return readBounded(reading, measure, { key: 'nominalVolumeL', unit: 'L', bound: bound?.means }, cues)
   }
   const amount = measure.amounts.at(-1)
-  if (amount === undefined || !reading.draft.setField('tank.volumeL', amountIn(amount, 'L'), printAmount(amount)))
-    return false
+  if (amount === undefined || !reading.draft.setAmount('tank.volumeL', amount)) return false
   reading.draft.note({ meaning: `tank of ${printAmount(amount)}`, path: 'tank.volumeL' }, measure, ...cues)
   return true
 }
@@ -74,14 +85,7 @@ const readVolume = (reading: Reading, measure: Measure): boolean => {
 const readFlow = (reading: Reading, measure: Measure): boolean => {
   const isWeekly = measure.amounts.at(-1)?.parts[0]?.unit?.symbol.endsWith('/week') ?? false
   if (isWeekly)
-    return setPlain(
-      reading,
-      measure,
-      'water.litresPerWeek',
-      'pure water',
-      'L/wk',
-      findBeside(reading, measure, 'water-change'),
-    )
+    return setPlain(reading, measure, 'water.litresPerWeek', 'pure water', findBeside(reading, measure, 'water-change'))
   return readPiece(reading, measure)
 }
 
@@ -99,24 +103,9 @@ const readVolts = (reading: Reading, measure: Measure): boolean => {
   return true
 }
 
-const readTurnover = (reading: Reading, measure: Measure): boolean => {
-  const [first, last] = [measure.amounts[0], measure.amounts.at(-1)]
-  if (
-    first === undefined ||
-    last === undefined ||
-    !reading.draft.setField('goals.turnoverPerHour.0', amountIn(first, '/h'), printAmount(first))
-  )
-    return false
-  reading.draft.setField('goals.turnoverPerHour.1', amountIn(last, '/h'), printAmount(last))
-  const numbers = first === last ? printAmount(last) : `${printAmount(first, false)} to ${printAmount(last)}`
-  reading.draft.note({ meaning: `turnover ${numbers}`, path: 'goals.turnoverPerHour.0' }, measure)
-  return true
-}
-
 const readMass = (reading: Reading, measure: Measure): boolean => {
   const rock = findBeside(reading, measure, 'rock')
-  if (rock !== undefined || reading.kind === 'rock')
-    return setPlain(reading, measure, 'goals.rockKg', 'rock', 'kg', rock)
+  if (rock !== undefined || reading.kind === 'rock') return setPlain(reading, measure, 'goals.rockKg', 'rock', rock)
   return readPiece(reading, measure)
 }
 
@@ -131,17 +120,17 @@ const readers: Readonly<Partial<Record<string, (reading: Reading, measure: Measu
     const near = findBeside(reading, measure, 'mains')
     return near === undefined
       ? readPiece(reading, measure)
-      : setPlain(reading, measure, 'mains.circuitA', 'circuit', 'A', near)
+      : setPlain(reading, measure, 'mains.circuitA', 'circuit', near)
   },
   pressure: (reading, measure) =>
-    setPlain(reading, measure, 'water.feedKPa', 'tap pressure', 'kPa', findBeside(reading, measure, 'feed')),
+    setPlain(reading, measure, 'water.feedKPa', 'tap pressure', findBeside(reading, measure, 'feed')),
   salinity: (reading, measure) =>
-    setPlain(reading, measure, 'goals.salinityPpt', 'salinity', 'ppt', findBeside(reading, measure, 'salinity')),
+    setPlain(reading, measure, 'goals.salinityPpt', 'salinity', findBeside(reading, measure, 'salinity')),
   concentration: (reading, measure) =>
-    setPlain(reading, measure, 'water.feedTdsPpm', 'tap dissolved solids', 'ppm', findBeside(reading, measure, 'feed')),
+    setPlain(reading, measure, 'water.feedTdsPpm', 'tap dissolved solids', findBeside(reading, measure, 'feed')),
   fraction: (reading, measure) => {
     const near = findBeside(reading, measure, 'humidity')
-    return near !== undefined && setPlain(reading, measure, 'room.relativeHumidity', 'humidity', 'fraction', near)
+    return near !== undefined && setPlain(reading, measure, 'room.relativeHumidity', 'humidity', near)
   },
 }
 

@@ -2,7 +2,8 @@ import { getKind, type KindKey } from '../../kinds/index'
 import type { UnitSystem } from '../../units/systems'
 import { readCorals, readCountry, readFieldChoices, readFilterChoices } from './choices'
 import { chooseKind } from './choose-kind'
-import { readBareNumber, readOutlets } from './counts'
+import { readBareNumber } from './bare-numbers'
+import { readOutlets } from './counts'
 import { createDraft } from './draft'
 import { findGear } from './gear'
 import { findIntent } from './intent'
@@ -11,10 +12,11 @@ import { findLeftovers } from './leftovers'
 import { readLength } from './lengths'
 import { findMeasures } from './measures'
 import { readQuantity } from './quantities'
-import { byToken, type Reading } from './reading'
+import { byToken, createReading } from './reading'
 import { readSizeOf } from './sizes'
 import { readTemperature } from './temperatures'
 import { tokenise } from './tokens'
+import { readReturnFlow } from './turnover'
 import { readTradeSize } from './trade-sizes'
 import type { CatalogueName, Question } from './types'
 
@@ -35,23 +37,14 @@ export const readQuestion = (text: string, system: UnitSystem, catalogue: readon
     gear !== undefined && from < gear.span.to && to > gear.span.from
   const landmarks = findLandmarks(tokens).filter((landmark) => !isOfGear(landmark))
   const asked = chooseKind(tokens, landmarks)
-  const kind = gear?.piece.kind ?? asked?.kind ?? null
+  const named = gear?.piece.kind ?? asked?.kind ?? null
   const measures = findMeasures(tokens).filter((measure) => !isOfGear(measure))
   const landmarkAt = byToken(landmarks)
   const isTaken = (at: number) => landmarkAt.get(at)?.kind !== undefined
-  const { intent, cues } = findIntent(tokens, { hasKind: kind !== null, hasGear: gear !== undefined, isTaken })
+  const { intent, cues } = findIntent(tokens, { hasKind: named !== null, hasGear: gear !== undefined, isTaken })
   const isGone = intent === 'replace'
-  const reading: Reading = {
-    tokens,
-    system,
-    kind,
-    isGone,
-    measures,
-    landmarks,
-    draft,
-    landmarkAt,
-    measureAt: byToken(measures),
-  }
+  const kind = intent === 'missing' ? null : named
+  const reading = createReading({ tokens, system, kind, isGone, measures, landmarks, draft })
 
   if (gear !== undefined) draft.note({ meaning: `${gear.piece.brand} ${gear.piece.model}` }, gear.span)
   for (const read of [
@@ -59,6 +52,7 @@ export const readQuestion = (text: string, system: UnitSystem, catalogue: readon
     readOutlets,
     readSizeOf,
     readQuantity,
+    readReturnFlow,
     readLength,
     readBareNumber,
     readTemperature,

@@ -1,5 +1,7 @@
 import type { KindKey } from '../../kinds/index'
+import type { NamedUnit } from '../../units/unit-names'
 import type { UnitSystem } from '../../units/systems'
+import type { Amount } from './amounts'
 import type { Draft, Span } from './draft'
 import type { Landmark } from './landmarks'
 import type { Measure } from './measures'
@@ -18,6 +20,12 @@ export interface Reading {
   /** By each token that they cover. */
   readonly landmarkAt: ReadonlyMap<number, Landmark>
   readonly measureAt: ReadonlyMap<number, Measure>
+  /** The place of each measure in the row of all. */
+  readonly placeOf: ReadonlyMap<Measure, number>
+  /** The scale of the first temperature that names one. */
+  readonly scale: NamedUnit | undefined
+  /** A height is spoken of, so a depth may run front to back. */
+  readonly hasHeight: boolean
 }
 
 export const byToken = <T extends Span>(spans: readonly T[]): ReadonlyMap<number, T> =>
@@ -26,3 +34,20 @@ export const byToken = <T extends Span>(spans: readonly T[]): ReadonlyMap<number
       Array.from({ length: span.to - span.from }, (_, offset) => [span.from + offset, span] as const),
     ),
   )
+
+const heights: ReadonlySet<string> = new Set(['tall', 'high', 'height'])
+
+type Given = Pick<Reading, 'tokens' | 'system' | 'kind' | 'isGone' | 'measures' | 'landmarks' | 'draft'>
+
+export const createReading = (given: Given): Reading => {
+  const isTyped = ({ quantity, parts }: Amount) => quantity === 'temperature' && parts[0]?.unit !== undefined
+  const temperature = given.measures.flatMap(({ amounts }) => amounts).find(isTyped)
+  return {
+    ...given,
+    landmarkAt: byToken(given.landmarks),
+    measureAt: byToken(given.measures),
+    placeOf: new Map(given.measures.map((measure, place) => [measure, place])),
+    scale: temperature?.parts[0]?.unit,
+    hasHeight: given.tokens.some(({ text }) => heights.has(text)),
+  }
+}

@@ -22,6 +22,8 @@ const smallestTankSideMm = 180
 const shallowMm = 150
 const deepMm = 200
 
+const sides = ['lengthMm', 'widthMm', 'waterDepthMm', 'heightMm'] as const
+
 const bodies: ReadonlySet<string> = new Set(['light', 'return-pump', 'skimmer'])
 
 const accepts = (reading: Reading, isBounded: boolean) => (landmark: Landmark) =>
@@ -66,10 +68,14 @@ const deepestLast = (valuesMm: readonly number[]): readonly number[] => {
   return [...order, largest]
 }
 
-const nextChamber = ({ draft }: Reading): number => {
-  let index = 0
-  while (Object.keys(draft.fields).some((path) => path.startsWith(`tank.chambers.${index}.`))) index++
-  return index
+/** More than any tank has; what comes after is left over. */
+const mostChambers = 12
+
+const nextChamber = ({ draft }: Reading): number | undefined => {
+  for (let index = 0; index < mostChambers; index++) {
+    if (!sides.some((side) => Object.hasOwn(draft.fields, `tank.chambers.${index}.${side}`))) return index
+  }
+  return undefined
 }
 
 const names: Readonly<Record<Of, string>> = {
@@ -107,15 +113,15 @@ export const readSizeOf = (reading: Reading, measure: Measure): boolean => {
     Math.max(...valuesMm) >= deepMm
   const order = isTurned ? deepestLast(valuesMm) : valuesMm.map((_, index) => index)
   const ordered = order.flatMap((index) => amounts[index] ?? [])
-  const base = of === 'chamber' ? `tank.chambers.${nextChamber(reading)}` : of === 'sump' ? 'tank.sump' : of
+  const chamber = of === 'chamber' ? nextChamber(reading) : 0
+  if (chamber === undefined) return false
+  const base = of === 'chamber' ? `tank.chambers.${chamber}` : of === 'sump' ? 'tank.sump' : of
   let filled = 0
   ordered.forEach((amount, index) => {
     const key = keysOf[of][labelled?.[index] ?? index] ?? ''
     if (key === '') return
     const isNew =
-      of === 'piece'
-        ? draft.setFilter(key, [null, amountIn(amount, 'mm')])
-        : draft.setField(`${base}.${key}`, amountIn(amount, 'mm'), printAmount(amount))
+      of === 'piece' ? draft.setFilter(key, [null, amountIn(amount, 'mm')]) : draft.setAmount(`${base}.${key}`, amount)
     if (isNew) filled++
   })
   if (filled === 0) return false

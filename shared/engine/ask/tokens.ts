@@ -13,10 +13,11 @@ const pieces = [
   String.raw`(?<stop>\n|[^\s])`,
 ]
 const pattern = new RegExp(pieces.join('|'), 'gu')
+const glyphs = /[¼-¾⅐-⅞]/
 const thousands = /^\d{1,3}(?:,\d{3})+(?:\.\d+)?$/
 
 const readNumberToken = (text: string) => {
-  const read = scanNumber(normaliseTyped(text), 0)
+  const read = scanNumber(glyphs.test(text) ? normaliseTyped(text) : text, 0)
   if (thousands.test(text)) return { grouped: Number(text.replaceAll(',', '')), ...(read.ok && { value: read.value }) }
   return read.ok ? { value: read.value } : {}
 }
@@ -55,5 +56,6 @@ export const isPartOfName = (tokens: readonly Token[], at: number): boolean => {
   if (tokens[before]?.text === '-' && tokens[before]?.glued) before--
   const word = tokens[before]
   if (word?.type !== 'word' || word.text === 'x' || word.text === 'by') return false
-  return !(word.glued && tokens[before - 1]?.type === 'number')
+  const owner = tokens[before - 1]
+  return !(word.glued && (owner?.type === 'number' || owner?.text === '°'))
 }

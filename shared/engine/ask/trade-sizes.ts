@@ -1,5 +1,5 @@
 import { namedUnits } from '../../units/unit-names'
-import { amountIn, printAmount, type Amount } from './amounts'
+import { createAmount } from './amounts'
 import type { Measure } from './measures'
 import type { Reading } from './reading'
 
@@ -18,14 +18,6 @@ const keys = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'] as const
 const gallon = namedUnits.volume.find((unit) => unit.symbol === 'gal')
 const inch = namedUnits.length.find((unit) => unit.symbol === 'in')
 
-const inUnit = (value: number, quantity: 'volume' | 'length'): Amount => ({
-  quantity,
-  parts: [{ value, unit: quantity === 'volume' ? gallon : inch }],
-  from: 0,
-  to: 0,
-  isBareWord: false,
-})
-
 /** "20 long" next to "12 wide" is twenty inches. */
 const isDimension = ({ tokens }: Reading): boolean =>
   tokens.some(({ text }) => text === 'wide' || text === 'deep' || text === 'width')
@@ -40,11 +32,11 @@ export const readTradeSize = (reading: Reading, measure: Measure): boolean => {
   const word = tokens[measure.to]?.text ?? ''
   const size = Object.hasOwn(sizes, `${gallons} ${word}`) ? sizes[`${gallons} ${word}`] : undefined
   if (size === undefined || isDimension(reading)) return false
-  const volume = inUnit(gallons, 'volume')
-  if (!draft.setField('tank.volumeL', amountIn(volume, 'L'), printAmount(volume))) return false
+  const volume = createAmount(gallons, 'volume', gallon)
+  if (!draft.setAmount('tank.volumeL', volume)) return false
   keys.forEach((key, index) => {
-    const side = inUnit(size[index] ?? 0, 'length')
-    draft.setField(`tank.${key}`, amountIn(side, 'mm'), printAmount(side))
+    const side = createAmount(size[index] ?? 0, 'length', inch)
+    draft.setAmount(`tank.${key}`, side)
   })
   const meaning = `tank of ${gallons} gal, ${size.join(' × ')} in as the trade sells a "${gallons} ${word}"`
   draft.note({ meaning, path: 'tank.volumeL' }, { from: measure.from, to: measure.to + 1 })

@@ -1,5 +1,5 @@
 import { lookUpUnit } from '../../units/read-unit'
-import type { NamedUnit } from '../../units/unit-names'
+import { namedUnits, type NamedUnit } from '../../units/unit-names'
 import type { Quantity } from '../../units/units'
 import type { Token } from './token'
 
@@ -55,6 +55,21 @@ const lookUp = (name: string): UnitFound | undefined => {
   return undefined
 }
 
+const spellings: ReadonlySet<string> = new Set(
+  quantities
+    .flatMap((quantity) => namedUnits[quantity].flatMap((unit) => [unit.symbol, ...unit.spellings]))
+    .map((name) => name.toLowerCase().replace(/[\s.]/g, '')),
+)
+/** Words that start no unit are passed over at once. */
+const beginnings: ReadonlySet<string> = new Set(
+  [...spellings].flatMap((name) => Array.from(name, (_, last) => name.slice(0, last + 1))),
+)
+const perWords: ReadonlySet<string> = new Set(['per', 'a', 'an'])
+
+/** "10x" is a turnover only where that word follows. */
+const isUnitHere = (name: string, next: Token | undefined): boolean =>
+  !never.has(name) || next?.text === 'turnover' || next?.text === 'turnovers'
+
 const canStart = (tokens: readonly Token[], at: number): boolean => {
   const token = tokens[at]
   if (token === undefined || token.type === 'stop' || token.type === 'number') return false
@@ -64,12 +79,19 @@ const canStart = (tokens: readonly Token[], at: number): boolean => {
 /** The unit that starts at a token, the longest that makes sense: "gallons a day" before "gallons". */
 export const readUnit = (tokens: readonly Token[], at: number): UnitFound | undefined => {
   if (!canStart(tokens, at) || isPreposition(tokens, at)) return undefined
-  for (let length = longestUnit; length > 0; length--) {
-    const span = tokens.slice(at, at + length)
-    if (span.length < length || span.some((token) => token.type === 'stop' || token.type === 'number')) continue
-    const name = span.map((token) => token.text).join(' ')
-    const found = never.has(name) || name.endsWith(' ') ? undefined : lookUp(name)
-    if (found !== undefined) return { ...found, to: at + length }
+  let best: UnitFound | undefined
+  let key = ''
+  const names: string[] = []
+  for (let to = at + 1; to <= at + longestUnit; to++) {
+    const token = tokens[to - 1]
+    if (token === undefined || token.type === 'stop' || token.type === 'number') break
+    key += perWords.has(token.text) && to > at + 1 ? '/' : token.text
+    if (!beginnings.has(key)) break
+    names.push(token.text)
+    const name = names.join(' ')
+    const found = spellings.has(key) && isUnitHere(name, tokens[to]) ? lookUp(name) : undefined
+    if (found !== undefined) best = { ...found, to }
   }
-  return degrees.has(tokens[at]?.text ?? '') ? { quantity: 'temperature', unit: undefined, to: at + 1 } : undefined
+  if (best !== undefined || !degrees.has(tokens[at]?.text ?? '')) return best
+  return { quantity: 'temperature', unit: undefined, to: at + 1 }
 }

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { readQuestion } from '#shared/engine/ask/read-question'
 import type { Filter } from '#shared/engine/ask/types'
 import { catalogue } from './phrasings/catalogue'
+import { hobbyistPhrasings } from './phrasings/hobbyists'
 import { piecePhrasings } from './phrasings/pieces'
 import { setupPhrasings } from './phrasings/setups'
 import type { Phrasing } from './phrasings/types'
@@ -22,6 +23,7 @@ const read = ([text, system]: Phrasing) => {
 describe.each([
   ['the setup', setupPhrasings],
   ['the piece', piecePhrasings],
+  ['both at length', hobbyistPhrasings],
 ])('a question about %s', (_, phrasings) => {
   it.each(phrasings.map((phrasing) => [phrasing[0], phrasing] as const))('reads "%s"', (_text, phrasing) => {
     const { intent, kind, fields = {}, filters = {}, ignored } = phrasing[2]

@@ -193,6 +193,12 @@ export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
     'solid lid',
     'glass lid, glass top, solid lid, acrylic lid, hood, with a lid, with lid, covered, polycarbonate lid, glass cover',
   ),
+  ...said(
+    'support.kind',
+    'furniture',
+    'stands on furniture',
+    'desk, dresser, table, counter, countertop, counter top, kitchen counter, sideboard, cupboard, shelf, furniture',
+  ),
   ...said('tank.shape', 'cube', 'cube', 'cube'),
   ...said('tank.shape', 'bow-front', 'bow front', 'bow front, bowfront, bowed front'),
   ...said('tank.shape', 'cylinder', 'cylinder', 'cylinder, cylindrical, round tank'),
@@ -201,7 +207,7 @@ export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
     'tank.filtration',
     'rear-chambers',
     'rear chambers',
-    'all in one, aio, rear chambers, back chambers, all in one tank, aio tank, allinone',
+    'all in 1, aio, rear chambers, back chambers, all in 1 tank, aio tank, allinone',
   ),
   ...said('tank.filtration', 'sump', 'a sump', 'sump, refugium, with sump, with a sump'),
   ...said(

@@ -1,5 +1,5 @@
 /** How a length is called, before it is known of what. */
-export type Dimension = 'long' | 'wide' | 'deep' | 'tall' | 'thick' | 'across' | 'front-to-back'
+export type Dimension = 'long' | 'wide' | 'deep' | 'tall' | 'thick' | 'across' | 'front-to-back' | 'water'
 
 const words: Readonly<Record<Dimension, string>> = {
   long: 'long length',
@@ -9,6 +9,7 @@ const words: Readonly<Record<Dimension, string>> = {
   thick: 'thick thickness',
   across: 'diameter dia',
   'front-to-back': 'front-to-back',
+  water: 'water-depth',
 }
 
 export const dimensionOf: ReadonlyMap<string, Dimension> = new Map(

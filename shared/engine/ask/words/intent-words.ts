@@ -1,10 +1,15 @@
-import type { Intent } from '../types'
-
+/** What asks for whatever is not there, even where pieces are named that are. */
 export const missingPhrases: readonly string[] = (
-  "what am i missing, am i missing, anything missing, is anything missing, what is missing, whats missing, what's missing, what else do i need, " +
-  'what else do i still need, anything else i need, what do i still need, do i still need, did i forget, have i forgotten, am i forgetting, forgetting anything, ' +
-  'have i got everything, do i have everything, is this everything, is that everything, what do i need, what else should i buy, what else, missing from my, ' +
-  'missing from this, missing anything, missing something, forgot anything, what have i missed, did i miss, what should i add, complete my setup, what gear do i need, what equipment do i need, anything i forgot, fill the gaps, everything i need'
+  "what am i missing, what else am i missing, am i missing, anything missing, is anything missing, what is missing, whats missing, what's missing, " +
+  'did i forget, have i forgotten, am i forgetting, forgetting anything, have i got everything, do i have everything, is this everything, ' +
+  'is that everything, missing from my, missing from this, missing anything, missing something, forgot anything, what have i missed, did i miss, ' +
+  'complete my setup, anything i forgot, fill the gaps, everything i need, did i leave out, what else do i still need, what do i still need'
+).split(', ')
+
+/** The same where no kind is named: "what do I need for 20 gallons". */
+export const needPhrases: readonly string[] = (
+  'what else do i need, anything else i need, do i still need, what do i need, what else should i buy, what else, what should i add, ' +
+  'what gear do i need, what equipment do i need, what would i need, what will i need, what do you need'
 ).split(', ')
 
 /** What says that a piece is gone, or that another is to take its place. */
@@ -27,13 +32,10 @@ export const checkPhrases: readonly string[] =
   )
 
 export const fitPhrases: readonly string[] =
-  'fit, fits, work, works, ok, okay, suitable, big enough, strong enough, enough, too big, too small, too strong, too much, compatible, right size, do the job, work with, go in, go into, safe, powerful enough, overkill, long enough, too long, too weak, powerful, cover, hold'.split(
+  'fit, fits, stand up, stand upright, work, works, ok, okay, suitable, big enough, strong enough, enough, too big, too small, too strong, too much, compatible, right size, do the job, work with, go in, go into, safe, powerful enough, overkill, long enough, too long, too weak, powerful, cover, hold'.split(
     ', ',
   )
 
 /** A question about which piece, not about one. */
 export const whichPhrases: readonly string[] =
   "which, what, any, recommend, suggest, looking for, find, whats, what's, best".split(', ')
-
-export const toIntentPhrases = (phrases: readonly string[], intent: Intent): readonly (readonly [string, Intent])[] =>
-  phrases.map((phrase) => [phrase, intent] as const)

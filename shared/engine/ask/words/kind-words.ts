@@ -46,7 +46,7 @@ const names: Readonly<Record<KindKey, string>> = {
   'salt-mix':
     'salt mix, salt, reef salt, marine salt, sea salt, salt bucket, bucket of salt, salts, saltmix, bag of salt, box of salt',
   scraper:
-    'scraper, algae scraper, magnet cleaner, glass cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, ' +
+    'scraper, scrape, scraping, algae scraper, magnet cleaner, glass cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, ' +
     'magnet scraper, glass scraper, magnetic glass cleaner, algae cleaner, window cleaner, algae blade, scrapper, algae scrapper, scraper blade, ' +
     'cleaner magnet, magnet float, mag float, float magnet, floating magnet, magnetic algae cleaner, algae pad, blade scraper, magnet glass cleaner, algae scrubber pad, glass magnet',
   siphon:
@@ -63,7 +63,7 @@ export const kindPhrases: readonly (readonly [string, KindKey])[] = Object.entri
 
 /** Right words one letter away from a kind's name. */
 export const neverMisspelt: ReadonlySet<string> = new Set(
-  'heated header heather theater theatre beater hearer shimmer skimmed swimmer slimmer scraped scraping chamfer charmer leader reader'.split(
+  'heated header heather theater theatre beater hearer shimmer skimmed swimmer slimmer scraped chamfer charmer leader reader'.split(
     ' ',
   ),
 )

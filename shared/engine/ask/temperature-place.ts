@@ -1,0 +1,64 @@
+import { findSeason } from './cues'
+import type { Landmark } from './landmarks'
+import type { Measure } from './measures'
+import { findNearest, type Near } from './nearest'
+import type { Mention } from './phrases'
+import type { Reading } from './reading'
+import type { Season } from './words/season-words'
+import { stopWords } from './words/stop-words'
+
+export interface TemperaturePlace {
+  readonly of: 'room' | 'water' | 'feed' | undefined
+  readonly landmark: Landmark | undefined
+  readonly season: Mention<Season> | undefined
+}
+
+/** A bare number is a temperature only this close to a word of room or water. */
+const nearEnough = 8
+const adjacent = 1
+
+/** "10 outlets": a bare number before a word of substance counts that. */
+const countsSomething = ({ tokens }: Reading, measure: Measure): boolean => {
+  const next = tokens[measure.to]
+  return next?.type === 'word' && !stopWords.has(next.text)
+}
+
+const isAcrossStop = ({ tokens }: Reading, measure: Measure, { landmark }: Near): boolean =>
+  landmark.from >= measure.to && tokens.slice(measure.to, landmark.from).some(({ type }) => type === 'stop')
+
+/** "tank 78F"; of a tank further off, the temperature is rather its room's. */
+const findTankBefore = ({ landmarkAt, tokens }: Reading, measure: Measure): Landmark | undefined => {
+  const before = ['is', 'at', ':'].includes(tokens[measure.from - 1]?.text ?? '') ? measure.from - 2 : measure.from - 1
+  const landmark = landmarkAt.get(before)
+  return landmark?.subject === 'tank' ? landmark : undefined
+}
+
+const findSeasonBeside = (measure: Measure, season: Mention<Season> | undefined): boolean =>
+  season !== undefined &&
+  (season.to === measure.from || (season.from >= measure.to && season.from - measure.to <= adjacent))
+
+/**
+ * What a temperature is of. Words of the water ("keep it at") count where they are nearer than the room's, unless a
+ * word of the seasons stands right beside the number; across a comma they belong to the next number.
+ */
+export const findTemperaturePlace = (
+  reading: Reading,
+  measure: Measure,
+  isTyped: boolean,
+): TemperaturePlace | undefined => {
+  const season = findSeason(reading, measure)
+  if (!isTyped && season?.from !== measure.to && countsSomething(reading, measure)) return undefined
+  const isSubject = ({ subject }: Landmark) => subject === 'room' || subject === 'water' || subject === 'feed'
+  const first = findNearest(reading, measure, isSubject)
+  const isWaterElsewhere =
+    first?.landmark.subject === 'water' &&
+    (isAcrossStop(reading, measure, first) || (findSeasonBeside(measure, season) && first.cost > adjacent))
+  const near = isWaterElsewhere ? findNearest(reading, measure, ({ subject }) => subject === 'room') : first
+  const isNear = near !== undefined && (isTyped || near.cost <= nearEnough || season !== undefined)
+  const tank = season === undefined && !(isNear && near.cost <= adjacent) ? findTankBefore(reading, measure) : undefined
+  if (tank !== undefined) return { of: 'water', landmark: tank, season: undefined }
+  if (!isNear)
+    return isTyped ? { of: season === undefined ? undefined : 'room', landmark: undefined, season } : undefined
+  const of = near.landmark.subject === 'water' || near.landmark.subject === 'feed' ? near.landmark.subject : 'room'
+  return { of, landmark: near.landmark, season: of === 'room' ? season : undefined }
+}
