@@ -35,5 +35,7 @@ export function createDatabaseClient(databaseUrl: string, options: PoolOptions =
   })
   // Without a listener an idle connection's loss (a PostgreSQL restart) ends the process.
   pool.on('error', (error) => options.onError?.(error))
+  // So does that of a connection which a transaction holds between two statements; its next statement then rejects.
+  pool.on('connect', (client) => client.on('error', () => undefined))
   return { db: drizzle(pool), pool, close: () => pool.end() }
 }

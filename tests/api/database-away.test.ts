@@ -8,6 +8,7 @@ import { createApp } from '../../server/app'
 import { readEnv } from '../../server/config/env'
 import { createDatabaseClient, type DatabaseClient } from '../../server/db/client'
 import { createLogger } from '../../server/lib/logger'
+import { pingDatabase } from '../../server/modules/system/system.queries'
 import { expectProblem } from './problems'
 import { addHeaters, rearChamberSetup as setup } from './records'
 
@@ -110,6 +111,17 @@ describe('while the database is away', () => {
     await request(url).get('/api/v1/gear').expect(200)
     await app.database.cutConnections()
     await expect.poll(async () => (await request(url).get('/api/v1/gear')).status, { timeout: 5000 }).toBe(200)
+  })
+
+  it('survives the loss of a connection between two statements of a transaction', async () => {
+    const lost = client.db.transaction(async (tx) => {
+      await pingDatabase(tx)
+      await app.database.cutConnections()
+      await new Promise((resolve) => setTimeout(resolve, 100))
+      await pingDatabase(tx)
+    })
+    await expect(lost).rejects.toThrow()
+    await expect.poll(async () => (await request(url).get('/ready')).status, { timeout: 5000 }).toBe(200)
   })
 
   it('answers 503 rather than wait when every connection is taken', async () => {
