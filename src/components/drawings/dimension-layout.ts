@@ -29,7 +29,8 @@ export interface DimensionLayout {
 
 export const labelPx = 12
 const labelHeight = 15
-const leastTarget = 24
+// One over, for the fraction of a pixel that the width of a drawing is rounded by.
+export const leastTarget = 25
 
 function around(boxes: readonly Box[]): Box {
   const x = Math.min(...boxes.map((box) => box.x))

@@ -7,8 +7,8 @@ export interface DrawingSheetProps {
   readonly description: string
   readonly widthPx: number
   readonly heightPx: number
-  /** How the height follows the width. */
-  readonly size: SheetSize
+  /** How the height follows the width; without it the height is fixed. */
+  readonly size?: SheetSize
   /** Spacing of the drafting grid and where a crossing lies. */
   readonly grid: { readonly px: number; readonly x: number; readonly y: number; readonly label: string }
   readonly isInteractive: boolean
@@ -27,7 +27,7 @@ export function DrawingSheet(props: DrawingSheetProps) {
           {title}
         </p>
         <div className="relative">
-          <SheetSizer size={size} />
+          {size ? <SheetSizer size={size} /> : <svg aria-hidden="true" width="1" height={heightPx} className="block" />}
           <svg
             role={isInteractive ? 'group' : 'img'}
             aria-label={title}
@@ -73,7 +73,7 @@ export function DrawingSheet(props: DrawingSheetProps) {
  * Holds the height open at every width with attributes alone (inline styles would need a laxer content security policy),
  * so that nothing on the page moves when the drawing is laid out anew for its true width.
  */
-function SheetSizer({ size }: Pick<DrawingSheetProps, 'size'>) {
+function SheetSizer({ size }: { readonly size: SheetSize }) {
   return (
     <div aria-hidden="true" className="px-[66px]">
       <svg width="1" height={size.abovePx} className="block" />

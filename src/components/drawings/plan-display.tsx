@@ -9,7 +9,7 @@ export interface PlanDisplayProps {
   readonly edits: DrawingEdits
 }
 
-const stripPx = 26
+const stripPx = 27
 
 /** Names the display, and offers a chamber along the back wall of a tank that has none. */
 export function PlanDisplay({ display, inside, canAddChamber, edits }: PlanDisplayProps) {

@@ -176,7 +176,7 @@ export function TankSection({ drawing, printer, onEdit, editHref }: TankViewProp
       <TextTarget
         edits={edits}
         x={leftPx}
-        y={bottomY + 46}
+        y={bottomY + 47}
         text={`floor ${printer.length(drawing.bottomMm)}`}
         name={`Floor thickness ${printer.length(drawing.bottomMm)}`}
         isGiven={isGiven('tank.bottomMm')}

@@ -1,4 +1,4 @@
-import { labelPx } from './dimension-layout'
+import { labelPx, leastTarget } from './dimension-layout'
 import { EditTarget } from './edit-target'
 import type { DrawingEdits } from './tank-drawing'
 import { monoWidth } from './text-width'
@@ -22,7 +22,7 @@ export function TextTarget({ edits, x, y, text, name, isGiven, path }: TextTarge
       {...edits}
       path={path}
       name={isGiven ? name : `${name}, assumed`}
-      box={{ x: x - 4, y: y - 12, width: width + 8, height: 24 }}
+      box={{ x: x - 4, y: y - leastTarget / 2, width: width + 8, height: leastTarget }}
     >
       <text x={x} y={y + 4} fontSize={labelPx} fontWeight={isGiven ? 600 : 400} className="fill-action">
         {text}

@@ -20,8 +20,7 @@ export function Popover({ anchor, onClose, label, children }: PopoverProps) {
   }, [anchor])
   return (
     <Radix.Root open={anchor !== null} onOpenChange={(isOpen) => !isOpen && onClose()}>
-      {/* The ref is read only while open, when it holds an element. */}
-      <Radix.Anchor virtualRef={anchorRef as { current: Element }} />
+      <Radix.Anchor virtualRef={anchorRef} />
       <Radix.Portal>
         <Radix.Content
           aria-label={label}

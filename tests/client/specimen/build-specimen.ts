@@ -10,6 +10,17 @@ const root = fileURLToPath(new URL('.', import.meta.url))
 
 /** Builds the specimen page as the product is built (server-rendered, then hydrated) and returns its folder. */
 export async function buildSpecimen(): Promise<string> {
+  const environment = process.env.NODE_ENV
+  // Else a test runner's own environment would give React's development build.
+  process.env.NODE_ENV = 'production'
+  try {
+    return await buildForProduction()
+  } finally {
+    process.env.NODE_ENV = environment
+  }
+}
+
+async function buildForProduction(): Promise<string> {
   const folder = await mkdtemp(join(tmpdir(), 'stillfits-specimen-'))
   const shared: InlineConfig = {
     root,
@@ -17,7 +28,6 @@ export async function buildSpecimen(): Promise<string> {
     logLevel: 'error',
     base: '/',
     plugins: [react(), tailwindcss()],
-    define: { 'process.env.NODE_ENV': '"production"' },
   }
   await build({ ...shared, build: { outDir: join(folder, 'client'), emptyOutDir: true } })
   await build({

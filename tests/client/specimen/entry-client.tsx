@@ -10,5 +10,4 @@ hydrateRoot(
   <BrowserRouter>
     <Specimen />
   </BrowserRouter>,
-  { onRecoverableError: (error) => console.error('hydration', error) },
 )

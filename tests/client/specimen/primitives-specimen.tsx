@@ -6,6 +6,7 @@ import { Disclosure } from '../../../src/components/ui/disclosure'
 import { EmptyState } from '../../../src/components/ui/empty-state'
 import { ErrorState } from '../../../src/components/ui/error-state'
 import { ErrorSummary } from '../../../src/components/ui/error-summary'
+import { LoadingBlock } from '../../../src/components/ui/loading-block'
 import { MeasureField } from '../../../src/components/ui/measure-field'
 import { SelectField } from '../../../src/components/ui/select-field'
 import { Skeleton } from '../../../src/components/ui/skeleton'
@@ -95,11 +96,13 @@ export function PrimitivesSpecimen({ printer }: { readonly printer: Printer }) {
         <ErrorState title="The answers could not be fetched" onRetry={() => undefined} requestId="01J8">
           Your setup is still in the address of this page. Wait a moment and try again.
         </ErrorState>
-        <div className="space-y-3" aria-busy="true" aria-label="Loading answers">
-          <Skeleton className="h-6 w-40" />
-          <Skeleton />
-          <Skeleton className="h-5 w-3/4" />
-        </div>
+        <LoadingBlock label="Loading answers">
+          <div className="space-y-3">
+            <Skeleton className="h-6 w-40" />
+            <Skeleton />
+            <Skeleton className="h-5 w-3/4" />
+          </div>
+        </LoadingBlock>
       </section>
     </div>
   )
