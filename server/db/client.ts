@@ -34,7 +34,11 @@ export function createDatabaseClient(databaseUrl: string, options: PoolOptions =
     idle_in_transaction_session_timeout: 10_000,
   })
   // Without a listener an idle connection's loss (a PostgreSQL restart) ends the process.
-  pool.on('error', (error) => options.onError?.(error))
+  pool.on('error', (error: Error & { client?: unknown }) => {
+    // The driver hangs the whole connection on it, its secret key included: nothing for a log.
+    delete error.client
+    options.onError?.(error)
+  })
   // So does that of a connection which a transaction holds between two statements; its next statement then rejects.
   pool.on('connect', (client) => client.on('error', () => undefined))
   return { db: drizzle(pool), pool, close: () => pool.end() }
