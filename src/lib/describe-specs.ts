@@ -33,7 +33,8 @@ const firstKeys: Readonly<Record<KindKey, readonly string[]>> = {
 const bodyKeys = ['lengthMm', 'widthMm', 'heightMm'] as const
 
 function describeSize(specs: BareSpecs, printer: Printer): string | undefined {
-  const keys = specs.outerLengthMm === undefined ? bodyKeys : (['outerLengthMm', 'outerWidthMm', 'outerHeightMm'] as const)
+  const keys =
+    specs.outerLengthMm === undefined ? bodyKeys : (['outerLengthMm', 'outerWidthMm', 'outerHeightMm'] as const)
   const top = specs.topLengthMm === undefined ? keys : (['topLengthMm', 'topWidthMm', 'heightMm'] as const)
   const sizes = top.map((key) => specs[key])
   return sizes.every((size) => typeof size === 'number') ? printer.size(sizes) : undefined
@@ -61,7 +62,8 @@ export function describeSpecs(kind: KindKey, specs: BareSpecs, printer: Printer)
     if (!attribute || value === undefined) return undefined
     const printed = printValue(attribute, value, printer)
     if (attribute.type === 'boolean') return value === true ? attribute.label : `no ${attribute.label}`
-    const isNamed = isBare(attribute.type, key) || (attribute.type === 'measure' && !['powerW', 'nominalVolumeL'].includes(key))
+    const isNamed =
+      isBare(attribute.type, key) || (attribute.type === 'measure' && !['powerW', 'nominalVolumeL'].includes(key))
     return isNamed ? `${attribute.label} ${printed}` : printed
   })
   return parts.filter((part) => part !== undefined).join(', ')

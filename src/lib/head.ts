@@ -43,7 +43,9 @@ export function writeHead(head: Head): string {
   const { canonical, refreshSeconds, jsonLd } = head
   return [
     `<title>${escapeHtml(printTitle(head))}</title>`,
-    ...listMeta(head).map(({ attribute, key, content }) => `<meta ${attribute}="${key}" content="${escapeHtml(content)}">`),
+    ...listMeta(head).map(
+      ({ attribute, key, content }) => `<meta ${attribute}="${key}" content="${escapeHtml(content)}">`,
+    ),
     ...(canonical === undefined ? [] : [`<link rel="canonical" href="${escapeHtml(canonical)}">`]),
     ...(refreshSeconds === undefined
       ? []

@@ -9,9 +9,9 @@ export interface Preferences {
 }
 
 export interface PreferenceStore {
-  get(): Preferences
-  set(change: Partial<Preferences>): void
-  subscribe(listener: () => void): () => void
+  readonly get: () => Preferences
+  readonly set: (change: Partial<Preferences>) => void
+  readonly subscribe: (listener: () => void) => () => void
 }
 
 function readCookie(cookies: string, name: string): string | undefined {

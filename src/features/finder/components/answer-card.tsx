@@ -42,7 +42,10 @@ export function AnswerCard({ answer, finder, isLit, isPicked, onPoint }: AnswerC
       data-lit={isLit || undefined}
       onPointerEnter={() => onPoint?.(slug)}
       onPointerLeave={() => onPoint?.(null)}
-      className={clsx('border-b border-rule border-l-[3px] py-4 pl-3', isLit ? 'border-l-action bg-sheet' : 'border-l-transparent')}
+      className={clsx(
+        'border-b border-rule border-l-[3px] py-4 pl-3',
+        isLit ? 'border-l-action bg-sheet' : 'border-l-transparent',
+      )}
     >
       <article className="grid grid-cols-[1.75rem_minmax(0,1fr)] gap-x-3 gap-y-3 md:grid-cols-[1.75rem_minmax(0,5fr)_minmax(0,4fr)_12rem] md:gap-x-5">
         <VerdictIcon verdict={verdict} size={28} />
@@ -50,7 +53,10 @@ export function AnswerCard({ answer, finder, isLit, isPicked, onPoint }: AnswerC
           <h4 className="font-heading text-lg leading-snug font-bold">
             {quantity > 1 && <span>{quantity} × </span>}
             {gear ? (
-              <Link to={paths.gear(gear.slug)} className="decoration-1 underline-offset-4 hover:text-action hover:underline">
+              <Link
+                to={paths.gear(gear.slug)}
+                className="decoration-1 underline-offset-4 hover:text-action hover:underline"
+              >
                 {gear.brand} · {gear.model}
               </Link>
             ) : (
@@ -66,9 +72,16 @@ export function AnswerCard({ answer, finder, isLit, isPicked, onPoint }: AnswerC
                 {confidence.closeCalls === 1 ? 'a close call' : `${confidence.closeCalls} close calls`}
               </span>
             )}
-            <span>{confidence.level === 'mixed' ? 'numbers from several sources' : `numbers: ${confidence.level}`}</span>
+            <span>
+              {confidence.level === 'mixed' ? 'numbers from several sources' : `numbers: ${confidence.level}`}
+            </span>
             {slug !== null && (
-              <Link to={hrefOf({ picked: isPicked ? null : slug })} replace preventScrollReset className="link print:hidden">
+              <Link
+                to={hrefOf({ picked: isPicked ? null : slug })}
+                replace
+                preventScrollReset
+                className="link print:hidden"
+              >
                 {isPicked ? 'drawn above' : 'show in the drawing'}
               </Link>
             )}

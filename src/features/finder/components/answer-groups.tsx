@@ -77,7 +77,9 @@ export function AnswerGroups({ finder, fits, changes, openedList, lit, onPoint }
       {!isNothing && (
         <section className={groupClass}>
           <GroupHeading verdict="fits" count={first?.counts.fits} />
-          {first?.counts.fits === 0 && <p className="mt-2 text-ink-soft">None as the setup stands; see what fits with changes.</p>}
+          {first?.counts.fits === 0 && (
+            <p className="mt-2 text-ink-soft">None as the setup stands; see what fits with changes.</p>
+          )}
           <AnswerList verdict="fits" list={fits} {...shared} />
         </section>
       )}

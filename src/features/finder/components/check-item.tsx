@@ -22,20 +22,29 @@ export function CheckItem({ check, finder, hasGauge }: CheckItemProps) {
   const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [], probability } = check
   const canonical = findScaleUnit(unit)
   const isDrawn = typeof measured === 'number' && limit !== null
-  const limitText = limit === null ? null : typeof limit === 'number' ? printer.measure(limit, canonical) : printer.pair(limit, canonical)
+  const limitText =
+    limit === null
+      ? null
+      : typeof limit === 'number'
+        ? printer.measure(limit, canonical)
+        : printer.pair(limit, canonical)
   return (
     <li className="grid gap-x-6 gap-y-2 border-t border-rule py-3 md:grid-cols-[minmax(0,1fr)_16rem]">
       <div className="min-w-0 text-sm">
         <p className="flex flex-wrap items-center gap-x-2">
           <VerdictIcon verdict={outcomeVerdicts[outcome]} size={15} isDecorative />
           <strong>{label}</strong>
-          <span className={`font-semibold ${verdictTextClasses[outcomeVerdicts[outcome]]}`}>{outcomeWords[outcome]}</span>
+          <span className={`font-semibold ${verdictTextClasses[outcomeVerdicts[outcome]]}`}>
+            {outcomeWords[outcome]}
+          </span>
         </p>
         <p className="mt-1">{message}</p>
         {isDrawn && (
           <p className="mt-1 font-mono text-xs text-ink-soft">
             measured {printer.measure(measured, canonical)} · limit {limitText}
-            {probability !== undefined && probability < 0.95 && ` · close call, ${Math.round(probability * 100)} % sure`}
+            {probability !== undefined &&
+              probability < 0.95 &&
+              ` · close call, ${Math.round(probability * 100)} % sure`}
           </p>
         )}
         <p className="mt-1 text-xs text-ink-soft">

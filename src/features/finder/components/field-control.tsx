@@ -28,7 +28,15 @@ const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${t
 /** One thing to say of a setup, asked for as its sort demands. The text stays as it was typed. */
 export function FieldControl(props: FieldControlProps) {
   const { id, path, attribute, text, system, onChange, error, assumed } = props
-  const shared = { id, name: path, label: capitalise(attribute.label), hint: attribute.guide, error, value: text, onChange }
+  const shared = {
+    id,
+    name: path,
+    label: capitalise(attribute.label),
+    hint: attribute.guide,
+    error,
+    value: text,
+    onChange,
+  }
   const taken = assumed === undefined ? 'not said' : `${assumed}, assumed`
   switch (attribute.type) {
     case 'measure':
@@ -85,7 +93,8 @@ function SetControl({ id, path, attribute, text, onChange, error, assumed }: Fie
           {error}
         </p>
       ) : (
-        text.trim() === '' && assumed !== undefined && <p className="font-mono text-xs text-ink-soft">{assumed}, assumed</p>
+        text.trim() === '' &&
+        assumed !== undefined && <p className="font-mono text-xs text-ink-soft">{assumed}, assumed</p>
       )}
     </fieldset>
   )

@@ -67,7 +67,10 @@ export function Finder() {
       <LiveStatus message={announce(fits)} />
       <KindHeading state={state} />
       <div className="mt-4">
-        <QuestionBox asked={state.asked} example="heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, room gets down to 60 F">
+        <QuestionBox
+          asked={state.asked}
+          example="heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, room gets down to 60 F"
+        >
           <HiddenFields state={state} without={['asked']} />
         </QuestionBox>
       </div>
@@ -131,7 +134,9 @@ export function Finder() {
         </Popover>
       )}
       {/* Printed or read aloud, a page says in whose units it speaks. */}
-      <p className="sr-only">Measures are in {printer.system === 'us' ? 'inches, gallons and °F' : 'millimetres, litres and °C'}.</p>
+      <p className="sr-only">
+        Measures are in {printer.system === 'us' ? 'inches, gallons and °F' : 'millimetres, litres and °C'}.
+      </p>
     </>
   )
 }

@@ -20,7 +20,11 @@ export interface PlainFormProps {
 /** Wrong texts of the link, each with the field it belongs to; one without a field is about the whole link. */
 export function ProblemSummary({ finder }: PlainFormProps) {
   const { visit, printer } = finder
-  const known = new Set(listFieldGroups(visit.state.kind, countChambers(visit.state.raw)).flatMap(({ fields }) => fields.map(({ path }) => path)))
+  const known = new Set(
+    listFieldGroups(visit.state.kind, countChambers(visit.state.raw)).flatMap(({ fields }) =>
+      fields.map(({ path }) => path),
+    ),
+  )
   return (
     <ErrorSummary
       title="Some of what was typed could not be read"

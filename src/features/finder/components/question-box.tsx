@@ -13,7 +13,13 @@ export interface QuestionBoxProps {
 }
 
 /** A question in the person's own words; a plain form, so that it works before and without scripts. */
-export function QuestionBox({ asked = '', example, label = 'Ask in your own words', button = 'Answer', children }: QuestionBoxProps) {
+export function QuestionBox({
+  asked = '',
+  example,
+  label = 'Ask in your own words',
+  button = 'Answer',
+  children,
+}: QuestionBoxProps) {
   return (
     <Form action={paths.find} method="get" preventScrollReset role="search">
       {children}

@@ -17,8 +17,8 @@ export interface Answers {
   readonly error: Error | null
   readonly next: string | null
   readonly isFetchingMore: boolean
-  fetchMore(): void
-  retry(): void
+  readonly fetchMore: () => void
+  readonly retry: () => void
 }
 
 const isFit = (page: FitPage): page is FitAnswer => !isRefusal(page)

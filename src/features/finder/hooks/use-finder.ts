@@ -21,9 +21,9 @@ export interface Finder {
   readonly isExample: boolean
   /** Setup paths that the person, or the tank they named, gave. */
   readonly given: ReadonlySet<string>
-  hrefOf(change: Partial<FinderState>): string
+  readonly hrefOf: (change: Partial<FinderState>) => string
   /** Goes to the changed state; what only lights something up takes no step in the history. */
-  go(change: Partial<FinderState>, isGlance?: boolean): void
+  readonly go: (change: Partial<FinderState>, isGlance?: boolean) => void
 }
 
 function listGiven({ state, problems }: Visit, specs: object): ReadonlySet<string> {
@@ -55,7 +55,6 @@ export function useFinder(): Finder {
     given,
     ...drawn,
     hrefOf,
-    go: (change, isGlance = false) =>
-      void navigate(hrefOf(change), { replace: isGlance, preventScrollReset: true }),
+    go: (change, isGlance = false) => void navigate(hrefOf(change), { replace: isGlance, preventScrollReset: true }),
   }
 }

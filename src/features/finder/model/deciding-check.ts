@@ -10,7 +10,5 @@ function findTightness({ margin, probability }: Check): number {
 
 /** The check that decides for a piece: the worst one, and of several alike the one with least to spare. */
 export function findDecidingCheck(checks: readonly Check[]): Check | undefined {
-  return [...checks].sort(
-    (a, b) => severity[a.outcome] - severity[b.outcome] || findTightness(a) - findTightness(b),
-  )[0]
+  return [...checks].sort((a, b) => severity[a.outcome] - severity[b.outcome] || findTightness(a) - findTightness(b))[0]
 }

@@ -24,8 +24,7 @@ export function findEditTarget(path: string, plan: Plan): EditTarget | null {
     return { title: 'Tank size', fields: pick(['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm']) }
   if (path === 'goals.turnoverPerHour')
     return { title: 'Turnover', fields: pick(['goals.turnoverPerHour.0', 'goals.turnoverPerHour.1']) }
-  if (path === 'room')
-    return { title: 'Room', fields: pick(['room.coldestC', 'room.temperatureC', 'room.warmestC']) }
+  if (path === 'room') return { title: 'Room', fields: pick(['room.coldestC', 'room.temperatureC', 'room.warmestC']) }
   const words = path.split('.')
   if (words[0] === 'tank' && words[1] === 'chambers' && words.length <= 3) {
     const isNew = words[2] === undefined

@@ -5,7 +5,8 @@ export interface TankEntry extends GearRef {
   readonly specs: Readonly<Record<string, unknown>>
 }
 
-const isSourced = (value: unknown): value is Specs[string] => typeof value === 'object' && value !== null && 'value' in value
+const isSourced = (value: unknown): value is Specs[string] =>
+  typeof value === 'object' && value !== null && 'value' in value
 
 /** The setup as the engine takes it, for drawing: the person's own numbers count as measured. */
 export function toEngineSetup(request: SetupRequest, entry?: TankEntry): Setup {
@@ -16,7 +17,7 @@ export function toEngineSetup(request: SetupRequest, entry?: TankEntry): Setup {
   for (const [key, value] of Object.entries({ ...entry?.specs, ...own })) {
     specs[key] = isSourced(value) ? value : { value, source: 'measured' }
   }
-  const { name: _name, country, room, mains, water, goals, units } = parsed
+  const { country, room, mains, water, goals, units } = parsed
   return {
     units,
     tank: { specs, ...(volumeL !== undefined && { volumeL }) },

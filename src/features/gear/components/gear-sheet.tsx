@@ -1,0 +1,76 @@
+import { useQuery } from '@tanstack/react-query'
+import { Link } from 'react-router-dom'
+import { getKind, isKindKey } from '#shared/kinds/index'
+import type { Gear } from '#shared/schemas/gear'
+import { buttonClass } from '../../../components/ui/button-class'
+import { paths } from '../../../config/paths'
+import { useApp } from '../../../lib/app-context'
+import { describeSpecs } from '../../../lib/describe-specs'
+import { usePrinter } from '../../../lib/use-printer'
+import { revisionsQuery } from '../api/get-revisions'
+import { GearDrawing } from './gear-drawing'
+import { KindCautions } from './kind-cautions'
+import { MissingNumbers } from './missing-numbers'
+import { RevisionList } from './revision-list'
+import { SpecList } from './spec-list'
+
+const statusWords = {
+  current: 'In production',
+  discontinued: 'Discontinued: its maker no longer makes it',
+  unknown: 'Not known whether it is still made',
+} as const
+
+/** A tank is drawn in the finder; any other piece is picked among those of its kind. */
+function checkHref({ kind, slug }: Gear): string {
+  const query = kind === 'tank' ? { kind: 'heater', 'tank.gear': slug } : { kind, picked: slug }
+  return `${paths.find}?${new URLSearchParams(query).toString()}`
+}
+
+/** Everything recorded of one piece. */
+export function GearSheet({ gear }: { readonly gear: Gear }) {
+  const { api } = useApp()
+  const printer = usePrinter()
+  const revisions = useQuery(revisionsQuery(api, gear.slug)).data?.items ?? []
+  const kind = isKindKey(gear.kind) ? gear.kind : null
+  if (!kind) return <h1>{gear.model}</h1>
+  const { attributes, label } = getKind(kind)
+  return (
+    <>
+      <p className="text-sm text-ink-soft">
+        <Link to={`${paths.find}?kind=${kind}`} className="link">
+          {label}
+        </Link>{' '}
+        · revision {gear.revision}
+      </p>
+      <h1 className="mt-1">
+        {gear.brand} · {gear.model}
+      </h1>
+      <p className="mt-2 max-w-prose text-lg">{describeSpecs(kind, gear.specs, printer)}</p>
+      <p className={gear.status === 'discontinued' ? 'mt-1 font-semibold text-changes' : 'mt-1 text-ink-soft'}>
+        {statusWords[gear.status]}
+        {gear.gtin !== null && <span className="font-mono text-sm"> · GTIN {gear.gtin}</span>}
+      </p>
+      <p className="mt-4 flex flex-wrap gap-3 print:hidden">
+        <Link to={checkHref(gear)} className={buttonClass({ variant: 'primary' })}>
+          {kind === 'tank' ? 'See what fits this tank' : 'Check it against a setup'}
+        </Link>
+      </p>
+      <div className="mt-8 max-w-4xl">
+        <GearDrawing gear={gear} printer={printer} />
+      </div>
+      {(['check', 'difference', 'display'] as const).map((role) => (
+        <SpecList key={role} role={role} attributes={attributes} gear={gear} printer={printer} />
+      ))}
+      <MissingNumbers gear={gear} attributes={attributes} />
+      {gear.notes !== null && (
+        <section className="mt-8">
+          <h2>Notes</h2>
+          {/* Sanitised where it is written: only plain text markup is ever stored. */}
+          <div className="mt-2 max-w-prose space-y-2" dangerouslySetInnerHTML={{ __html: gear.notes }} />
+        </section>
+      )}
+      {revisions.length > 0 && <RevisionList kind={kind} revisions={revisions} />}
+      <KindCautions kind={kind} />
+    </>
+  )
+}

@@ -1,0 +1,31 @@
+import type { Attribute } from '#shared/kinds/types'
+import type { Gear } from '#shared/schemas/gear'
+
+/** Numbers that checks read and nobody has recorded, each with how to measure it. */
+export function MissingNumbers({
+  gear,
+  attributes,
+}: {
+  readonly gear: Gear
+  readonly attributes: readonly Attribute[]
+}) {
+  const missing = attributes.filter(({ role, key }) => role === 'check' && gear.specs[key] === undefined)
+  if (missing.length === 0) return null
+  return (
+    <section className="mt-8 border-[1.5px] border-dashed border-ink-soft px-5 py-4">
+      <h2>Nobody has recorded yet</h2>
+      <p className="mt-1 max-w-prose text-sm text-ink-soft">
+        Checks that need one of these answer “not enough data” for this piece. Have it at hand? This is where to
+        measure.
+      </p>
+      <dl className="mt-3 grid gap-x-8 gap-y-2 sm:grid-cols-2">
+        {missing.map(({ key, label, guide }) => (
+          <div key={key} className="text-sm">
+            <dt className="font-semibold first-letter:uppercase">{label}</dt>
+            <dd className="text-ink-soft">{guide ?? 'From its box or its maker’s sheet.'}</dd>
+          </div>
+        ))}
+      </dl>
+    </section>
+  )
+}
