@@ -11,12 +11,13 @@ export default defineConfig({
   workers: 2,
   fullyParallel: true,
   forbidOnly: Boolean(process.env.CI),
-  timeout: 30_000,
+  timeout: 60_000,
+  expect: { timeout: 10_000 },
   reporter: [['list']],
   use: {
     locale: 'en-US',
     timezoneId: 'UTC',
-    trace: 'retain-on-failure',
+    screenshot: 'only-on-failure',
     launchOptions: {
       executablePath,
       args: [

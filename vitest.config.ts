@@ -10,6 +10,7 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/{api,client,e2e}/**'],
+          testTimeout: 20_000,
         },
       },
       {
@@ -29,6 +30,7 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['tests/client/**/*.test.{ts,tsx}'],
           setupFiles: 'tests/support/client-setup.ts',
+          testTimeout: 20_000,
           css: false,
         },
       },
