@@ -8,7 +8,7 @@ import { findChromium } from '../../scripts/lib/requirements.mjs'
 import { buildSpecimen } from './specimen/build-specimen'
 
 // A browser and a build: slow where other work shares the machine.
-vi.setConfig({ testTimeout: 60_000 })
+vi.setConfig({ testTimeout: 120_000 })
 
 const origin = 'http://specimen.test'
 const types: Record<string, string> = { '.html': 'text/html', '.js': 'text/javascript', '.css': 'text/css' }
@@ -123,6 +123,7 @@ it.each([360, 1280])('lays no label of the plan or section on another, at %d pix
           )
         }),
       )
+      expect(await page.locator('figure svg text').count()).toBeGreaterThan(40)
       expect(clashes).toEqual([])
     }
   })
