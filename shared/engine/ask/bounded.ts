@@ -1,3 +1,4 @@
+import { getAttribute } from '../../kinds/index'
 import { amountIn, printAmount } from './amounts'
 import type { Span } from './draft'
 import type { Measure } from './measures'
@@ -47,7 +48,8 @@ export const readBounded = (reading: Reading, measure: Measure, target: Target, 
   const prefix =
     target.bound !== undefined && !isRange ? `${describeBound[target.bound]} ` : isAbout && !isRange ? 'about ' : ''
   const numbers = isRange ? `${printAmount(first, false)} to ${printAmount(last)}` : printAmount(last)
-  draft.note({ meaning: `${prefix}${numbers}` }, measure, ...cues)
+  const label = reading.kind === null ? undefined : getAttribute(reading.kind, target.key)?.label
+  draft.note({ meaning: `${label === undefined ? '' : `${label} `}${prefix}${numbers}` }, measure, ...cues)
   return true
 }
 

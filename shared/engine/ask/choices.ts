@@ -17,6 +17,8 @@ const corals = indexPhrases(coralPhrases)
 const countries = indexPhrases(countryPhrases)
 
 const spare = 4
+/** "swap my glass heater for titanium": what comes after is what is wanted. */
+const swapTo: ReadonlySet<string> = new Set(['for', 'with', 'to'])
 
 /** "glass" beside the heater is the heater's, anywhere else the tank's. */
 const isBesidePiece = ({ landmarkAt, kind, tokens }: Reading, from: number, to: number): boolean => {
@@ -33,7 +35,7 @@ const ofTankToo: ReadonlySet<string> = new Set(['glass', 'hood', 'canopy', 'bar'
 
 /** Reads words that pick an option of the piece: "titanium", "dry", "with a thermostat". */
 export const readFilterChoices = (reading: Reading): void => {
-  const { tokens, draft, kind, landmarkAt } = reading
+  const { tokens, draft, kind, isGone, landmarkAt } = reading
   for (const { from, to, means } of findPhrases(filters, tokens)) {
     const choice = means.find((each: FilterChoice) => each.kind === kind)
     const word = tokens[from]?.text ?? ''
@@ -44,11 +46,15 @@ export const readFilterChoices = (reading: Reading): void => {
       (to - from === 1 && ofTankToo.has(word) && !isBesidePiece(reading, from, to))
     )
       continue
-    if (draft.setFilter(choice.key, choice.value)) draft.note({ meaning: choice.meaning }, { from, to })
+    const isWantedInstead = isGone && swapTo.has(tokens[from - 1]?.text ?? '')
+    if (isWantedInstead) draft.filters[choice.key] = choice.value
+    if (isWantedInstead || draft.setFilter(choice.key, choice.value))
+      draft.note({ meaning: choice.meaning }, { from, to })
   }
 }
 
-const asTyped = (value: string | boolean): string => (value === true ? 'yes' : value === false ? 'no' : value)
+const asTyped = (value: string | boolean | number): string =>
+  value === true ? 'yes' : value === false ? 'no' : String(value)
 
 /** Words that say something of the tank even where they also told what a measure is of: "10 mm glass". */
 const alwaysRead: ReadonlySet<string> = new Set([

@@ -20,6 +20,7 @@ const asking: ReadonlySet<string> = new Set(
 )
 const owning: ReadonlySet<string> = new Set('have has got with already on existing own had has my'.split(' '))
 const towards: ReadonlySet<string> = new Set('for in into of fit fits to under over'.split(' '))
+const refusing: ReadonlySet<string> = new Set(['no', 'without', 'not', "don't"])
 const qualifying: ReadonlySet<string> = new Set('for that to which under with'.split(' '))
 const skipped: ReadonlySet<string> = new Set('a an the my this our your of some'.split(' '))
 const replacing = indexPhrases(replacePhrases.map((phrase) => [phrase, true] as const))
@@ -55,7 +56,10 @@ const isAsked = (kind: KindKey, before: readonly string[]): boolean => {
 
 /** The kind that the text asks about, by the words around each kind that it names; null where it names none. */
 export const chooseKind = (tokens: readonly Token[], landmarks: readonly Landmark[]): KindLandmark | null => {
-  const named = landmarks.filter((landmark): landmark is KindLandmark => landmark.kind !== undefined)
+  const isRefused = ({ from }: Landmark) => refusing.has(tokens[from - 1]?.text ?? '')
+  const named = landmarks.filter(
+    (landmark): landmark is KindLandmark => landmark.kind !== undefined && !isRefused(landmark),
+  )
   const replaced = startsOf(tokens, replacing)
   const gone = startsOf(tokens, going)
   const occupied = new Set(

@@ -21,7 +21,12 @@ const outlets = indexPhrases<'plain' | 'wall' | 'switched'>([
       ] as const,
   ),
 ])
+const owning: ReadonlySet<string> = new Set(['has', 'have', 'had', 'got'])
 const hasOutlets: ReadonlySet<string | null> = new Set(['power-strip', 'temperature-controller'])
+
+/** "mine only has 4 outlets" asks for other than 4. */
+const isOwned = ({ tokens }: Reading, measure: Measure): boolean =>
+  [1, 2].some((back) => owning.has(tokens[measure.from - back]?.text ?? ''))
 
 /** Reads "8 outlets", "4 switched outlets", "2 free wall outlets". */
 export const readOutlets = (reading: Reading, measure: Measure): boolean => {
@@ -33,6 +38,7 @@ export const readOutlets = (reading: Reading, measure: Measure): boolean => {
   const count = amount?.parts[0]?.value
   if (mention === undefined || count === undefined || !Number.isInteger(count)) return false
   const isOfPiece = hasOutlets.has(kind) && mention.means !== 'wall'
+  if (isOfPiece && isOwned(reading, measure)) return false
   const bound = findBound(reading, measure)
   const cues = bound === undefined ? [mention] : [mention, bound]
   if (isOfPiece && !(mention.means === 'switched' && kind !== 'power-strip')) {

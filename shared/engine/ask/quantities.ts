@@ -1,20 +1,13 @@
 import { amountIn, printAmount } from './amounts'
+import { findBeside } from './beside'
 import { readBounded } from './bounded'
 import { findBound } from './cues'
 import type { Measure } from './measures'
-import { findNearest, type Near } from './nearest'
+import type { Near } from './nearest'
 import type { Reading } from './reading'
 import { readTurnover } from './turnover'
+import { readVolume } from './volumes'
 import { pieceKeys } from './words/piece-keys'
-import type { Subject } from './words/subject-words'
-
-const nearEnough = 6
-
-/** The nearest of some subjects, if it stands beside the measure. */
-const findBeside = (reading: Reading, measure: Measure, ...subjects: readonly Subject[]): Near | undefined => {
-  const near = findNearest(reading, measure, ({ subject }) => subject !== undefined && subjects.includes(subject))
-  return near !== undefined && near.cost <= nearEnough ? near : undefined
-}
 
 const setPlain = (reading: Reading, measure: Measure, path: string, name: string, near?: Near): boolean => {
   const amount = measure.amounts.at(-1)
@@ -55,31 +48,6 @@ const readPiece = (reading: Reading, measure: Measure): boolean => {
   const { count, cue } = countPieces(reading, measure)
   const cues = [bound, cue].filter((each) => each !== undefined)
   return readBounded(reading, multiply(measure, count), { ...piece, bound: bound?.means ?? piece.bound }, cues)
-}
-
-const readVolume = (reading: Reading, measure: Measure): boolean => {
-  const { kind } = reading
-  const reservoir = findBeside(reading, measure, 'reservoir')
-  if (reservoir !== undefined && kind === 'auto-top-off') {
-    const bound = findBound(reading, measure)
-    return readBounded(reading, measure, { key: 'reservoirL', unit: 'L', bound: bound?.means, loose: true }, [
-      reservoir.landmark,
-    ])
-  }
-  const change = findBeside(reading, measure, 'water-change')
-  const tank = findNearest(reading, measure, ({ subject }) => subject === 'tank')
-  if (change !== undefined && (tank === undefined || change.cost < tank.cost)) return false
-  const bound = findBound(reading, measure)
-  const cues = [bound, tank !== undefined && tank.cost <= 1 ? tank.landmark : undefined].filter(
-    (cue) => cue !== undefined,
-  )
-  if (kind === 'tank' && (bound !== undefined || measure.shape === 'range')) {
-    return readBounded(reading, measure, { key: 'nominalVolumeL', unit: 'L', bound: bound?.means }, cues)
-  }
-  const amount = measure.amounts.at(-1)
-  if (amount === undefined || !reading.draft.setAmount('tank.volumeL', amount)) return false
-  reading.draft.note({ meaning: `tank of ${printAmount(amount)}`, path: 'tank.volumeL' }, measure, ...cues)
-  return true
 }
 
 const readFlow = (reading: Reading, measure: Measure): boolean => {

@@ -18,6 +18,7 @@ import { readTemperature } from './temperatures'
 import { tokenise } from './tokens'
 import { readReturnFlow } from './turnover'
 import { readTradeSize } from './trade-sizes'
+import { readRockPerVolume } from './volumes'
 import type { CatalogueName, Question } from './types'
 
 const withArticle = (label: string): string =>
@@ -53,6 +54,7 @@ export const readQuestion = (text: string, system: UnitSystem, catalogue: readon
     readSizeOf,
     readQuantity,
     readReturnFlow,
+    readRockPerVolume,
     readLength,
     readBareNumber,
     readTemperature,

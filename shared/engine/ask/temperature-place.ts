@@ -17,6 +17,24 @@ export interface TemperaturePlace {
 const nearEnough = 8
 const adjacent = 1
 
+/** Words that only temperatures of rooms go with. */
+const seasonal: ReadonlySet<string> = new Set(
+  'winter winters summer summers night nights overnight coldest warmest hottest day daytime'.split(' '),
+)
+const seasonReach = { before: 4, after: 3 } as const
+
+/** "up to 84 in summer" needs no word of the room. */
+const isSeasonal = ({ tokens, measureAt }: Reading, measure: Measure): boolean => {
+  const after = tokens.slice(measure.to, measure.to + seasonReach.after)
+  const before = tokens.slice(Math.max(0, measure.from - seasonReach.before), measure.from).reverse()
+  const endOf = (row: typeof tokens, at: (index: number) => number) => {
+    const end = row.findIndex(({ type }, index) => type === 'stop' || measureAt.has(at(index)))
+    return end === -1 ? row : row.slice(0, end)
+  }
+  const near = [...endOf(after, (index) => measure.to + index), ...endOf(before, (index) => measure.from - 1 - index)]
+  return near.some(({ text }) => seasonal.has(text))
+}
+
 /** "10 outlets": a bare number before a word of substance counts that. */
 const countsSomething = ({ tokens }: Reading, measure: Measure): boolean => {
   const next = tokens[measure.to]
@@ -54,11 +72,14 @@ export const findTemperaturePlace = (
     first?.landmark.subject === 'water' &&
     (isAcrossStop(reading, measure, first) || (findSeasonBeside(measure, season) && first.cost > adjacent))
   const near = isWaterElsewhere ? findNearest(reading, measure, ({ subject }) => subject === 'room') : first
-  const isNear = near !== undefined && (isTyped || near.cost <= nearEnough || season !== undefined)
+  const isElsewhere = near !== undefined && !isTyped && season === undefined && isAcrossStop(reading, measure, near)
+  const isNear = near !== undefined && !isElsewhere && (isTyped || near.cost <= nearEnough || season !== undefined)
   const tank = season === undefined && !(isNear && near.cost <= adjacent) ? findTankBefore(reading, measure) : undefined
   if (tank !== undefined) return { of: 'water', landmark: tank, season: undefined }
-  if (!isNear)
-    return isTyped ? { of: season === undefined ? undefined : 'room', landmark: undefined, season } : undefined
+  if (!isNear) {
+    const isOfRoom = season !== undefined && (isTyped || isSeasonal(reading, measure))
+    return isTyped || isOfRoom ? { of: isOfRoom ? 'room' : undefined, landmark: undefined, season } : undefined
+  }
   const of = near.landmark.subject === 'water' || near.landmark.subject === 'feed' ? near.landmark.subject : 'room'
   return { of, landmark: near.landmark, season: of === 'room' ? season : undefined }
 }

@@ -26,7 +26,7 @@ const chooseScale = (amount: Amount, { scale: typed, system }: Reading): NamedUn
 const roomFields: Readonly<Record<Season, { readonly path: string; readonly name: string }>> = {
   coldest: { path: 'room.coldestC', name: 'coldest room' },
   warmest: { path: 'room.warmestC', name: 'warmest room' },
-  usual: { path: 'room.temperatureC', name: 'usual room' },
+  usual: { path: 'room.temperatureC', name: 'room' },
 }
 const waterField = { path: 'goals.temperatureC', name: 'water' }
 const feedField = { path: 'water.feedTempC', name: 'tap water' }

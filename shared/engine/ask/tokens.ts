@@ -6,7 +6,7 @@ import type { Token } from './token'
 
 const pieces = [
   // "4 1/2", "4-1/2"; "4½", "½"; "3/8"; "25.5", "25,5", "1,200"; ".5"
-  String.raw`(?<number>\d+(?: ?- ?| )\d+ ?\/ ?\d+(?![\d/])|(?:\d+ ?)?[¼-¾⅐-⅞]|\d+ ?\/ ?\d+(?![\d/])|\d+(?:[.,]\d+)*|[.,]\d+)`,
+  String.raw`(?<number>\d+(?: ?- ?| )\d+ ?\/ ?\d+(?![\d/])|(?:\d+ ?)?[¼-¾⅐-⅞]|\d+ ?\/ ?\d+(?![\d/])|\d+(?:[.,]\d+)*|(?<![\p{L}\p{N}])\.\d+)`,
   // A unit run into the next number of a row: "4inx5in".
   String.raw`(?<word>(?:in|cm|mm|ft)(?=x\d)|\p{L}[\p{L}\p{M}]*(?:'\p{L}+)*)`,
   String.raw`(?<sign>''|[^\s\p{L}\p{N}.,;:?!()[\]{}…])`,

@@ -26,6 +26,7 @@ const quantities: readonly Quantity[] = [
   'current',
   'turnover',
   'fraction',
+  'density',
 ]
 const longestUnit = 4
 /** Units to the letter, but rarely meant so in a sentence. */

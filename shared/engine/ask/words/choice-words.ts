@@ -28,7 +28,7 @@ export const filterChoices: readonly (readonly [string, FilterChoice])[] = [
     'thermostat',
     'external-included',
     'external thermostat, included',
-    'controller included, with controller, with a controller, includes controller, comes with a controller, external controller included',
+    'controller included, with controller, with a controller, w / controller, w / a controller, includes controller, comes with a controller, external controller included',
   ),
   ...choice(
     'light',
@@ -157,11 +157,11 @@ export const filterChoices: readonly (readonly [string, FilterChoice])[] = [
 /** Words that say something of the setup, whatever is asked about. */
 export interface FieldChoice {
   readonly path: string
-  readonly value: string | boolean
+  readonly value: string | boolean | number
   readonly meaning: string
 }
 
-const said = (path: string, value: string | boolean, meaning: string, phrases: string) =>
+const said = (path: string, value: FieldChoice['value'], meaning: string, phrases: string) =>
   phrases.split(', ').map((phrase) => [phrase, { path, value, meaning }] as const)
 
 export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
@@ -180,7 +180,12 @@ export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
     'braced tank',
     'braced, euro braced, eurobraced, euro brace, eurobrace, center brace, centre brace',
   ),
-  ...said('tank.lid', 'none', 'no lid', 'no lid, open top, without a lid, open topped, lidless, topless, without lid'),
+  ...said(
+    'tank.lid',
+    'none',
+    'no lid',
+    'no lid, w / o lid, w / o a lid, open top, without a lid, open topped, lidless, topless, without lid',
+  ),
   ...said(
     'tank.lid',
     'mesh',
@@ -199,6 +204,7 @@ export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
     'stands on furniture',
     'desk, dresser, table, counter, countertop, counter top, kitchen counter, sideboard, cupboard, shelf, furniture',
   ),
+  ...said('goals.sandDepthMm', 0, 'no sand', 'no sand, bare bottom, barebottom, without sand, w / o sand'),
   ...said('tank.shape', 'cube', 'cube', 'cube'),
   ...said('tank.shape', 'bow-front', 'bow front', 'bow front, bowfront, bowed front'),
   ...said('tank.shape', 'cylinder', 'cylinder', 'cylinder, cylindrical, round tank'),

@@ -5,7 +5,7 @@ const before: Readonly<Record<Bound, string>> = {
   most:
     'under, below, less than, smaller than, shorter than, narrower than, thinner than, no more than, not more than, at most, up to, max, ' +
     'maximum, max of, maximum of, within, not over, no longer than, no bigger than, no larger than, no taller than, no wider than, no deeper than, no higher than, not longer than, not ' +
-    'bigger than, cheaper than, limit of, <, ≤, < =, only have, only, fits in, fit in, at the most, not exceeding, beneath, weaker than, lower than, not taller than, not to exceed, no thicker than',
+    'bigger than, cheaper than, limit of, <, ≤, < =, fits in, fit in, at the most, not exceeding, beneath, weaker than, lower than, not taller than, not to exceed, no thicker than',
   least:
     'at least, over, above, more than, min, minimum, min of, minimum of, longer than, bigger than, larger than, no less than, not less than, no smaller than, ' +
     'not under, greater than, >, ≥, > =, stronger than, upwards of, at minimum, at the least, exceeding, no shorter than, higher than, taller than, holds, holding, supports, can hold, can take, rated for, to hold, holds up to, supporting, to support, that holds',

@@ -16,7 +16,7 @@ const names: Readonly<Record<KindKey, string>> = {
     'controller for my light, lights controller',
   heater:
     'heater, heeter, heatr, heatter, heter, haeter, heating rod, heater rod, titanium rod, heating element, aquarium heater, tank heater, ' +
-    'titanium heater, glass heater, submersible heater, heating',
+    'titanium heater, glass heater, submersible heater, heating, something to heat, to heat, heat source, warm up',
   'temperature-controller':
     'temperature controller, controller, temp controller, heater controller, thermostat controller, external thermostat, thermostat, ' +
     'temperture controller, temprature controller, controller for my heater, temperature regulator, temp control, heating controller, ' +

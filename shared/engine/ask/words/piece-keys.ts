@@ -6,7 +6,6 @@ import type { Dimension } from './dimension-words'
 const body = {
   long: 'lengthMm',
   wide: 'widthMm',
-  deep: 'widthMm',
   'front-to-back': 'widthMm',
   tall: 'heightMm',
 } as const

@@ -1,7 +1,7 @@
 /** Words that carry nothing to be used: grammar, pleasantries, and what every question here is about. */
 export const stopWords: ReadonlySet<string> = new Set(
   (
-    "most a an the this that these those it its it's is are was were be been being am i i'm im i've ive i'd i'll me my mine we we're our us you your " +
+    "most plug plugs wattage watts section ready strong behind back something lxwxh lxwxd wxdxh lxdxh w a an the this that these those it its it's is are was were be been being am i i'm im i've ive i'd i'll me my mine we we're our us you your " +
     'he she they them their there here of to in on at by for from with without and or but so if then than as into onto inside up down out ' +
     'off over do does did doing done have has had having got get gets getting will would could should can may might must shall what which who ' +
     'whom whose where when why how hi hello hey please pls thanks thank thx cheers guys folks anyone anybody someone somebody all any some ' +

@@ -21,6 +21,7 @@ export type Subject =
   | 'stand-height'
   | 'mount-height'
   | 'posture'
+  | 'opening'
 
 const names: Readonly<Record<Subject, string>> = {
   chamber:
@@ -54,6 +55,7 @@ const names: Readonly<Record<Subject, string>> = {
   cord: 'cord, cable, power cord, power cable, lead',
   'water-line': 'water line, waterline, water level, water column',
   'stand-height': 'top of the tank, tank top, top of tank, rim height',
+  opening: 'opening, hole, access hole, chamber opening, lid opening, access',
   posture: 'stand up, stand upright, stand vertically, stand on end, stand vertical',
   'mount-height': 'above the water, above water, over the water, above the surface, above the tank, off the water',
 }
