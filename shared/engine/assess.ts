@@ -36,7 +36,6 @@ export const findPlacement = (judged: readonly Judged[]): Placement | undefined 
 const toCandidate = ({ piece, quantity, place, mountHeightMm }: Item): Candidate => ({
   piece,
   quantity,
-  mayMultiply: false,
   ...(place && { place }),
   ...(mountHeightMm !== undefined && { mountHeightMm }),
 })

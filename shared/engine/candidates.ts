@@ -16,6 +16,7 @@ import { getKind, type KindKey } from '../kinds/index'
 export interface CandidateOptions {
   readonly quantity?: number
   readonly place?: Place
+  readonly mountHeightMm?: number
   readonly instead?: readonly string[]
   readonly beside?: boolean
 }
@@ -87,6 +88,19 @@ export function findRestKnockOns(bench: Bench, candidate: Candidate): readonly R
   return diff(bench.before, assessAfter(bench, candidate)).filter(isDemand)
 }
 
+/** How a candidate is judged, the piece itself left out. */
+export const describeWay = (
+  options: CandidateOptions,
+  quantity: number,
+  mayMultiply = true,
+): Omit<Candidate, 'piece'> => ({
+  quantity,
+  asked: options.quantity ?? 1,
+  mayMultiply,
+  ...(options.place && { place: options.place }),
+  ...(options.mountHeightMm !== undefined && { mountHeightMm: options.mountHeightMm }),
+})
+
 interface JudgedCandidate {
   readonly candidate: Candidate
   readonly judged: readonly Judged[]
@@ -101,17 +115,18 @@ export function judgeCandidate(
   scene: Scene,
   piece: Piece,
   options: CandidateOptions = {},
-  judgeAs?: (quantity: number, mayMultiply: boolean) => readonly Judged[],
+  judgeAs?: (way: Omit<Candidate, 'piece'>) => readonly Judged[],
 ): JudgedCandidate {
   const asked = options.quantity ?? 1
   const attempt = (quantity: number, mayMultiply: boolean): JudgedCandidate => {
-    const candidate: Candidate = { piece, quantity, mayMultiply, ...(options.place && { place: options.place }) }
-    const judged = judgeAs?.(quantity, mayMultiply) ?? judgeAll(scene, candidate)
+    const way = describeWay(options, quantity, mayMultiply)
+    const candidate: Candidate = { piece, ...way }
+    const judged = judgeAs?.(way) ?? judgeAll(scene, candidate)
     return { candidate, judged, verdict: decideVerdict(judged) }
   }
-  const first = attempt(asked, options.quantity === undefined)
+  const first = attempt(asked, true)
   const enough = first.judged.find(({ judgement }) => judgement.enough !== undefined)?.judgement.enough
-  if (enough === undefined || first.verdict === 'no') return first
+  if (enough === undefined || options.quantity !== undefined || first.verdict === 'no') return first
   const several = attempt(enough, true)
   return several.verdict === 'no' ? attempt(asked, false) : several
 }

@@ -12,7 +12,8 @@ function findMargin({ rule, judgement }: Judged): number | null {
   const { margin, measured, limit } = judgement
   if (margin !== undefined) return margin
   if (typeof measured !== 'number' || limit === undefined || limit === null || limit === 0) return null
-  if (typeof limit === 'number') return ((limit - measured) / Math.abs(limit)) * (rule.limitIs === 'least' ? -1 : 1)
+  if (typeof limit === 'number')
+    return (rule.limitIs === 'least' ? measured - limit : limit - measured) / Math.abs(limit)
   const width = limit[1] - limit[0]
   return width > 0 ? Math.min(measured - limit[0], limit[1] - measured) / width : null
 }

@@ -39,9 +39,18 @@ export interface Candidate {
   readonly quantity: number
   readonly place?: Place
   readonly mountHeightMm?: number
-  /** May a rule answer "two of these"? Not once that was tried and found wanting. */
+  /** How many were asked about, where more are judged because one does not do. */
+  readonly asked?: number
+  /** False: do not answer "two of these" again; it was tried and found wanting. */
   readonly mayMultiply?: boolean
 }
+
+/** Whether more of the piece are judged than were asked about. */
+export const isMultiplied = ({ quantity, asked = quantity }: Candidate): boolean => quantity > asked
+
+/** "Two of these" */
+export const countOfThese = (quantity: number): string =>
+  `${['One', 'Two', 'Three', 'Four'][quantity - 1] ?? quantity} of these`
 
 /** One line of the rule table: data for the method page and the API, and the function that judges. */
 export interface Rule {

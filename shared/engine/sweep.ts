@@ -1,5 +1,6 @@
 import { getKind, type KindKey } from '../kinds/index'
 import {
+  describeWay,
   findRestKnockOns,
   judgeCandidate,
   setBench,
@@ -60,7 +61,7 @@ class Table {
   constructor(
     private readonly bench: Bench,
     private readonly pieces: readonly Piece[],
-    private readonly way: Omit<Candidate, 'piece'>,
+    readonly way: Omit<Candidate, 'piece'>,
   ) {
     this.columns = getRules(bench.kind).rules.map((rule) => {
       const classes = classifyForRule(pieces, rule)
@@ -93,36 +94,26 @@ class Table {
   }
 }
 
-/** How one piece is judged in the end: alone, or so many of it where that is what works. */
-interface Settled {
-  readonly table: Table
-  readonly quantity: number
-}
-
 /** Judges every piece by every rule of its kind. See `fit` for what is asked of `pieces`. */
 export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], options: CandidateOptions): Sweep {
   const bench = setBench(setup, kind, options)
-  const asked = options.quantity ?? 1
   const tables = new Map<string, Table>()
-  const tableFor = (quantity: number, mayMultiply: boolean): Table => {
-    const key = `${quantity} ${mayMultiply}`
-    const way = { quantity, mayMultiply, ...(options.place && { place: options.place }) }
+  const tableFor = (way: Omit<Candidate, 'piece'>): Table => {
+    const key = `${way.quantity} ${way.mayMultiply}`
     const table = tables.get(key) ?? new Table(bench, pieces, way)
     tables.set(key, table)
     return table
   }
-  const first = tableFor(asked, options.quantity === undefined)
-  const others = new Map<number, Settled>()
+  const first = tableFor(describeWay(options, options.quantity ?? 1))
+  const settled = new Map<number, Table>()
   const own = new Int8Array(pieces.length)
   const demands = new Int32Array(pieces.length)
 
   const settle = (index: number): void => {
-    const { candidate } = judgeCandidate(bench.scene, pieces[index]!, options, (quantity, mayMultiply) =>
-      tableFor(quantity, mayMultiply).judgedOf(index),
-    )
-    const table = tableFor(candidate.quantity, candidate.mayMultiply ?? false)
-    others.set(index, { table, quantity: candidate.quantity })
-    count(table, index)
+    const { candidate } = judgeCandidate(bench.scene, pieces[index]!, options, (way) => tableFor(way).judgedOf(index))
+    const table = tableFor(candidate)
+    settled.set(index, table)
+    if (table !== first) count(table, index)
   }
   const count = (table: Table, index: number): void => {
     let worst: number = codes.nothing
@@ -135,18 +126,14 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
       if (code === codes.change) changes += 1
       if (coded >= severalWouldDo) several = true
     }
-    if (several && table === first && worst !== codes.fail) return settle(index)
     own[index] = worst
     demands[index] = changes
+    if (several && options.quantity === undefined && table === first && worst !== codes.fail) settle(index)
   }
   for (let index = 0; index < pieces.length; index += 1) count(first, index)
 
-  const settledOf = (index: number): Settled => others.get(index) ?? { table: first, quantity: asked }
-  const candidateOf = (index: number): Candidate => ({
-    piece: pieces[index]!,
-    quantity: settledOf(index).quantity,
-    ...(options.place && { place: options.place }),
-  })
+  const tableOf = (index: number): Table => settled.get(index) ?? first
+  const candidateOf = (index: number): Candidate => ({ piece: pieces[index]!, ...tableOf(index).way })
   addRestDemands(bench, pieces, own, demands, candidateOf)
   return {
     bench,
@@ -154,9 +141,10 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
     candidateOf,
     verdicts: Array.from(own, (code) => verdictOfCode[code]!),
     targets: measureTargets(bench, pieces, candidateOf),
-    judgedOf: (index) => settledOf(index).table.judgedOf(index),
+    judgedOf: (index) => tableOf(index).judgedOf(index),
     isDecidedBy: (index, ruleId) => {
-      const { table } = settledOf(index)
+      if (own[index] !== codes.fail && own[index] !== codes.unknown) return false
+      const table = tableOf(index)
       const column = table.columns.find(({ rule }) => rule.id === ruleId)
       return column !== undefined && (table.codeOf(column, index) & 7) === own[index]
     },
@@ -164,7 +152,7 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
       const counts = new Int32Array(first.columns.length)
       for (let index = 0; index < pieces.length; index += 1) {
         if (own[index] !== codes.fail) continue
-        const { table } = settledOf(index)
+        const table = tableOf(index)
         table.columns.forEach((column, at) => {
           if ((table.codeOf(column, index) & 7) === codes.fail) counts[at]! += 1
         })

@@ -1,7 +1,7 @@
 import { findColdestHeldC, findHeaterNeed, findStuckOn, findUnheatedC } from '../heat-budget'
 import { otherControllers } from '../mains-budget'
 import { probabilityAtLeast, probabilityAtMost, standardUncertainty } from '../physics/conformance'
-import { lacking, type Candidate, type Judgement, type Rule, type Say } from '../rule'
+import { countOfThese, isMultiplied, lacking, type Candidate, type Judgement, type Rule, type Say } from '../rule'
 import { once, type Scene } from '../scene'
 import { hasAreas, noAreas } from './shape'
 import { thresholds } from '../thresholds'
@@ -33,7 +33,8 @@ const noPower = lacking(['powerW'], () => 'Nobody has recorded its power yet.')
 const uncertaintyW = (power: Value<number>, quantity: number) =>
   quantity * standardUncertainty(power.value, power.source, power.plusMinus, 'other')
 
-function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): Judgement {
+function judgePower(scene: Scene, candidate: Candidate): Judgement {
+  const { piece, quantity, mayMultiply } = candidate
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
   const { plan } = scene
@@ -46,12 +47,12 @@ function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): 
   const base = { measured: totalW, limit: needUpperW, probability }
   if (needUpperW === 0) return { ...base, outcome: 'pass', say: () => 'No heater is needed at these temperatures.' }
   const holdsTo = (figure: 'totalW' | 'totalUpperW') => findColdestHeldC(scene, totalW, figure)
-  if (totalW >= needUpperW && quantity > 1 && mayMultiply)
+  if (totalW >= needUpperW && isMultiplied(candidate))
     return {
       ...base,
       outcome: 'change',
       say: (words) =>
-        `${count(quantity)} of these: one alone gives ${words.power(power.value)} of the ${words.pair([needW, needUpperW], 'W')} that hold ${words.temperature(goalC)}.`,
+        `${countOfThese(quantity)}: one alone gives ${words.power(power.value)} of the ${words.pair([needW, needUpperW], 'W')} that hold ${words.temperature(goalC)}.`,
     }
   if (totalW >= needUpperW)
     return {
@@ -65,16 +66,16 @@ function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): 
       ...base,
       outcome: 'change',
       say: (words) =>
-        `${quantity > 1 && mayMultiply ? `${count(quantity)} of these just hold` : 'Just holds'} ${words.temperature(goalC)} with the room at ${words.temperature(coldestC)}: no reserve on the coldest night (${words.power(totalW)} against ${words.pair([needW, needUpperW], 'W')}).`,
+        `${isMultiplied(candidate) ? `${countOfThese(quantity)} just hold` : 'Just holds'} ${words.temperature(goalC)} with the room at ${words.temperature(coldestC)}: no reserve on the coldest night (${words.power(totalW)} against ${words.pair([needW, needUpperW], 'W')}).`,
     }
   const both = totalW + power.value * quantity
-  if (mayMultiply && quantity === 1 && both >= needW)
+  if (mayMultiply !== false && quantity === 1 && both >= needW)
     return {
       ...base,
       outcome: 'change',
       enough: 2,
       say: (words) =>
-        `Two of these: one gives ${words.power(totalW)} of the ${words.pair([needW, needUpperW], 'W')} needed.`,
+        `${countOfThese(2)}: one gives ${words.power(totalW)} of the ${words.pair([needW, needUpperW], 'W')} needed.`,
     }
   if (totalW >= usualNeedW)
     return {
@@ -90,8 +91,6 @@ function judgePower(scene: Scene, { piece, quantity, mayMultiply }: Candidate): 
       `Too weak: ${words.power(totalW)}, and with the room at ${words.temperature(coldestC)} it takes ${words.pair([needW, needUpperW], 'W')} to hold ${words.temperature(goalC)}.`,
   }
 }
-
-const count = (quantity: number): string => ['One', 'Two', 'Three', 'Four'][quantity - 1] ?? String(quantity)
 
 export const heaterPower: Rule = {
   id: 'heater.power',

@@ -2,16 +2,28 @@ import { getKind, kindKeys, type KindKey } from '../../kinds/index'
 import type { KindRules, Rule } from '../rule'
 import { createElectricRules } from './electric'
 import { heaterRules } from './heater'
+import { lightRules } from './light'
+import { lightControllerRules } from './light-controller'
+import { lightMountRules } from './light-mount'
 import { createMadeForRule } from './made-for'
 import { powerStripRules } from './power-strip'
+import { returnPumpRules } from './return-pump'
+import { standRules } from './stand'
 import { tankRules } from './tank'
 import { temperatureControllerRules } from './temperature-controller'
+import { wavemakerRules } from './wavemaker'
 
 /** Kinds with rules of their own. The others answer through the general rules, and say so. */
 const own: Partial<Record<KindKey, KindRules>> = {
   tank: tankRules,
+  stand: standRules,
+  light: lightRules,
+  'light-mount': lightMountRules,
+  'light-controller': lightControllerRules,
   heater: heaterRules,
   'temperature-controller': temperatureControllerRules,
+  'return-pump': returnPumpRules,
+  wavemaker: wavemakerRules,
   'power-strip': powerStripRules,
 }
 

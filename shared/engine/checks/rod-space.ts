@@ -1,12 +1,12 @@
 import { combineUncertainties, probabilityAtMost, standardUncertainty } from '../physics/conformance'
 import type { Rectangle } from '../physics/geometry'
-import { packRectangles } from '../physics/packing'
 import { layRodFlat, leanRod } from '../physics/rod'
 import type { Say } from '../rule'
-import { findOccupants, type Basin } from '../setup/places'
+import type { Basin } from '../setup/places'
 import type { Item, Placement, Value } from '../types'
-import { isWithinMm, readNumber } from '../values'
 import { thresholds } from '../thresholds'
+import { isWithinMm } from '../values'
+import { hasCompanyRoom } from './body-space'
 
 /** A rod as the space check sees it. Lengths in mm. */
 export interface Rod {
@@ -35,25 +35,9 @@ const clearance = thresholds.rodClearanceMm.value
 const ratio = ({ measuredMm, limitMm }: { measuredMm: number; limitMm: number }) =>
   (limitMm - measuredMm) / Math.abs(limitMm || 1)
 
-function footprintOf({ piece }: Item): Rectangle | undefined {
-  const diameter = readNumber(piece.specs, 'diameterMm')
-  const length = readNumber(piece.specs, 'lengthMm')
-  const width = readNumber(piece.specs, 'widthMm')
-  if (piece.kind === 'heater' && diameter !== undefined) return [diameter, diameter]
-  if (length !== undefined && width !== undefined) return [length, width]
-  return undefined
-}
-
 /** Whether the rods, with the given footprint each, can stand beside what is already in the basin. */
-function hasCompany(basin: Basin, others: readonly Item[], footprint: Rectangle, quantity: number): boolean {
-  const company = findOccupants(others, basin.id).flatMap((item) => {
-    const sides = footprintOf(item)
-    return sides ? Array.from({ length: item.quantity }, () => sides) : []
-  })
-  if (company.length === 0 && quantity === 1) return true
-  const pieces = [...company, ...Array.from({ length: quantity }, () => footprint)]
-  return packRectangles(pieces, [basin.lengthMm, basin.widthMm], clearance).outcome === 'fits'
-}
+const hasCompany = (basin: Basin, others: readonly Item[], footprint: Rectangle, quantity: number): boolean =>
+  hasCompanyRoom(basin, others, footprint, quantity, clearance)
 
 function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
   const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))

@@ -121,7 +121,7 @@ function judgeFilled(scene: Scene, candidate: Candidate): Judgement | null {
   const filled = planWith(scene, piece)
   if (!filled || missing.length > 0)
     return lacking(missing, () => 'Nobody has recorded all the sizes that its filled weight follows from.')
-  return hasAreas(filled) ? judgeLoad(scene, candidate, filled) : noAreas(filled)
+  return hasAreas(filled) ? judgeLoad(scene, filled) : noAreas(filled)
 }
 
 const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>, basis = practiceBasis): Rule => ({

@@ -55,8 +55,18 @@ export const defaults = {
   weeklyChangeShare: 0.15,
   goals: { temperatureC: 25.5, salinityPpt: 35, coral: ['soft', 'lps'] as const, sandDepthMm: 40, rockKgPerL: 0.12 },
   turnoverPerHour: { 'rear-chambers': [4, 12], sump: [3, 10], 'hang-on': [4, 12], none: [4, 12] } as const,
+  turnoverChangePerHour: { 'rear-chambers': [3, 16], sump: [2, 15], 'hang-on': [3, 16], none: [3, 16] } as const,
+  /** What wavemakers together are set to. */
+  circulationPerHour: { usual: [10, 40], sps: [20, 60] } as const,
+  /** Bore of the return where nobody said, by water volume up to 100 L and above. */
+  boreSmallMm: 13,
+  boreLargeMm: 20,
   /** Of a lamp's lens above the water. */
   mountHeightMm: 200,
+  /** The same for a light on legs of its own. */
+  legsHeightMm: 60,
+  /** Lower than this a lens gets wet. */
+  lowestLensMm: 30,
   /** Of grains of unknown rock and sand, kg per litre. */
   rockSolidDensityKgL: 2.7,
   sandSolidDensityKgL: 2.8,

@@ -1,0 +1,120 @@
+import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import type { Scene } from '../scene'
+import { practiceBasis } from '../thresholds'
+import type { Item } from '../types'
+import { readMeasure, readNumber, readSet, readText } from '../values'
+import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { limitsOfMount, mountNames, suits } from './light-mounts'
+
+const lightsOf = ({ others }: Scene): readonly Item[] => others.filter((item) => item.piece.kind === 'light')
+
+const noLight: Judgement = { outcome: 'pass', say: () => 'There is no light in the setup to hold against it.' }
+
+function judgeLamp(scene: Scene, { piece }: Candidate): Judgement {
+  const type = readText(piece.specs, 'type')
+  if (type === undefined) return lacking(['type'], () => 'Nobody has recorded what sort of mount it is.')
+  const lights = lightsOf(scene)
+  if (lights.length === 0) return noLight
+  const takes = lights.some(({ piece: { specs } }) =>
+    [...(readSet<string>(specs, 'mountsIncluded') ?? []), ...(readSet<string>(specs, 'mountsPossible') ?? [])].includes(
+      type,
+    ),
+  )
+  const unrecorded = lights.every(({ piece: { specs } }) => !specs['mountsIncluded'] && !specs['mountsPossible'])
+  if (unrecorded)
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded which mounts the light takes.' }
+  return {
+    outcome: takes ? 'pass' : 'fail',
+    measured: type,
+    say: () => (takes ? `The light takes ${mountNames[type]}.` : `The light does not take ${mountNames[type]}.`),
+  }
+}
+
+function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
+  const load = readMeasure(piece.specs, 'maxLoadKg')
+  if (!load) return lacking(['maxLoadKg'], () => 'Nobody has recorded the load it carries.')
+  const masses = lightsOf(scene).map((item) => readNumber(item.piece.specs, 'massKg'))
+  if (masses.length === 0) return noLight
+  if (masses.includes(undefined))
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded what the light weighs.' }
+  const heaviest = Math.max(...(masses as number[]))
+  return {
+    outcome: load.value >= heaviest ? 'pass' : 'fail',
+    measured: load.value,
+    limit: heaviest,
+    probability: () =>
+      probabilityAtLeast(
+        load.value,
+        heaviest,
+        quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
+      ),
+    say: (words) => `Carries ${words.mass(load.value)}, and the light weighs ${words.mass(heaviest)}.`,
+  }
+}
+
+function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
+  const type = readText(piece.specs, 'type')
+  if (type === undefined) return lacking(['type'], () => 'Nobody has recorded what sort of mount it is.')
+  const lampHeightMm = Math.max(0, ...lightsOf(scene).map((item) => readNumber(item.piece.specs, 'heightMm') ?? 0))
+  const found = suits(scene, type, limitsOfMount(piece.specs), lampHeightMm)
+  if (found === undefined) {
+    const keys = type === 'arm' ? ['rimMinMm', 'rimMaxMm'] : ['spanMinMm', 'spanMaxMm']
+    const missing = keys.filter((key) => readNumber(piece.specs, key) === undefined)
+    return lacking(missing, () => `Nobody has recorded the ${type === 'arm' ? 'rims' : 'spans'} that it fits.`)
+  }
+  const { tank, room } = scene.plan
+  return {
+    outcome: found ? 'pass' : 'fail',
+    measured: type === 'arm' ? tank.wallMm : type === 'rim-legs' ? tank.outerLengthMm : room.ceilingMm,
+    say: (words) => {
+      if (type === 'arm')
+        return found
+          ? `Clamps the ${words.length(tank.wallMm)} wall.`
+          : `Its clamp does not fit a ${words.length(tank.wallMm)} wall.`
+      if (type === 'rim-legs')
+        return found ? 'Its legs span the tank.' : 'Its legs span neither the tank’s length nor its width.'
+      return found ? 'There is height for it under the ceiling.' : 'There is no height for it under the ceiling.'
+    },
+  }
+}
+
+const rule = (check: string, parts: Omit<Rule, 'id' | 'basis' | 'worst'>): Rule => ({
+  id: `light-mount.${check}`,
+  basis: practiceBasis,
+  worst: 'fail',
+  ...parts,
+})
+
+export const lightMountRules: KindRules = {
+  rules: [
+    rule('lamp', {
+      label: 'Fits the light',
+      unit: null,
+      rule: 'Of a sort that the setup’s light takes, included or sold apart.',
+      reads: ['type'],
+      uses: [],
+      failLabel: 'not made for the light',
+      judge: judgeLamp,
+    }),
+    rule('load', {
+      label: 'Carries the light',
+      unit: 'kg',
+      limitIs: 'least',
+      rule: 'Its greatest load is at least the mass of the light.',
+      reads: ['maxLoadKg'],
+      uses: [],
+      failLabel: 'too weak for the light',
+      judge: judgeLoad,
+    }),
+    rule('tank', {
+      label: 'Fits the tank',
+      unit: 'mm',
+      rule: 'Clamp around the wall, legs across the length or width, or height under the ceiling.',
+      reads: ['type', 'rimMinMm', 'rimMaxMm', 'spanMinMm', 'spanMaxMm'],
+      uses: ['tank.wallMm', 'tank.outerLengthMm', 'tank.outerWidthMm', 'room.ceilingMm', 'room.tankTopMm'],
+      failLabel: 'not made for this tank',
+      judge: judgeTank,
+    }),
+  ],
+  feltThrough: ['type', 'rimMinMm', 'rimMaxMm', 'spanMinMm', 'spanMaxMm'],
+}

@@ -1,0 +1,133 @@
+import { once, type Scene } from '../scene'
+import { findBestDimming, shareAbove, summariseMap, shareInBand } from '../physics/light-coverage'
+import { mapLight, type Lamp, type LightScene } from '../physics/light-map'
+import { findHeightForSpillMm, shareSpilled } from '../physics/light-spill'
+import { defaults } from '../setup/defaults'
+import { thresholds } from '../thresholds'
+import type { Coral, Piece, Specs } from '../types'
+import { readFlag, readNumber, readSet, readText } from '../values'
+
+/** What one count of a light at one height does to the target plane. */
+export interface Plane {
+  readonly heightMm: number
+  readonly brightestUmol: number
+  readonly lowestUmol: number
+  readonly meanUmol: number
+  /** Share of the plane above the band at full power. */
+  readonly aboveShare: number
+  /** Share in the band at full power, and at the dimming that serves best. */
+  readonly fullShare: number
+  readonly bestShare: number
+  readonly bestPercent: number
+}
+
+/** PAR band of what is kept, µmol/(m² s); null for fish only. Common practice. */
+export function chooseBand(coral: readonly Coral[]): readonly [number, number] | null {
+  if (coral.length === 0) return null
+  return coral.includes('sps')
+    ? [thresholds.parSpsLow.value, thresholds.parSpsHigh.value]
+    : [thresholds.parSoftLow.value, thresholds.parSoftHigh.value]
+}
+
+const listMissingOutput = (specs: Specs): readonly string[] => {
+  if (readNumber(specs, 'photonFluxUmolS') !== undefined) return []
+  return ['ppfdUmol', 'ppfdAtMm'].filter((key) => readNumber(specs, key) === undefined)
+}
+
+/** Attributes without which the light cannot be modelled; a point needs no size. */
+export function listMissing({ specs }: Piece): readonly string[] {
+  const layout = readText(specs, 'layout')
+  const sizes = layout === 'point' ? ['lengthMm'] : ['lengthMm', 'widthMm']
+  return [
+    ...(layout === undefined ? ['layout'] : []),
+    ...sizes.filter((key) => readNumber(specs, key) === undefined),
+    ...listMissingOutput(specs),
+  ]
+}
+
+function describeLamp(specs: Specs): Lamp {
+  const reading = readNumber(specs, 'ppfdUmol')
+  const readAtMm = readNumber(specs, 'ppfdAtMm')
+  const beamAngleDeg = readNumber(specs, 'beamAngleDeg')
+  return {
+    layout: readText(specs, 'layout') as Lamp['layout'],
+    lengthMm: readNumber(specs, 'lengthMm') ?? 0,
+    widthMm: readNumber(specs, 'widthMm') ?? 0,
+    ...(beamAngleDeg !== undefined && { beamAngleDeg }),
+    output:
+      reading !== undefined && readAtMm !== undefined
+        ? { ppfdUmol: reading, ppfdAtMm: readAtMm }
+        : { photonFluxUmolS: readNumber(specs, 'photonFluxUmolS') ?? 0 },
+  }
+}
+
+/** Lens to water where nobody said: by the mount that comes with the light. */
+export function chooseHeightMm(specs: Specs): number {
+  const mounts = readSet<string>(specs, 'mountsIncluded') ?? []
+  const standsOnRim = mounts.includes('rim-legs') && !mounts.includes('arm') && !mounts.includes('hanging')
+  return standsOnRim ? defaults.legsHeightMm : defaults.mountHeightMm
+}
+
+function describeScene({ plan }: Scene, specs: Specs, count: number, heightMm: number): LightScene {
+  const { tank } = plan
+  return {
+    lamp: describeLamp(specs),
+    count,
+    displayLengthMm: tank.displayLengthMm,
+    displayWidthMm: tank.displayWidthMm,
+    heightMm,
+    depthMm: tank.waterLineMm / 2,
+  }
+}
+
+const keepPlanes = () => new WeakMap<Specs, Map<string, Plane>>()
+const keepSpills = () => new WeakMap<Specs, Map<string, number>>()
+
+function remember<T>(kept: WeakMap<Specs, Map<string, T>>, specs: Specs, key: string, compute: () => T): T {
+  let byKey = kept.get(specs)
+  if (!byKey) kept.set(specs, (byKey = new Map()))
+  let known = byKey.get(key)
+  if (known === undefined) byKey.set(key, (known = compute()))
+  return known
+}
+
+/** The target plane under so many of a light, half way down the water. The light must lack nothing of `listMissing`. */
+export function lightPlane(
+  scene: Scene,
+  specs: Specs,
+  count: number,
+  heightMm: number,
+  band: readonly [number, number],
+): Plane {
+  return remember(once(scene, keepPlanes), specs, `${count} ${heightMm} ${band.join(' ')}`, () => {
+    const map = mapLight(describeScene(scene, specs, count, heightMm))
+    const { brightestUmol, lowestUmol, meanUmol } = summariseMap(map)
+    const best = findBestDimming(map, band)
+    return {
+      heightMm,
+      brightestUmol,
+      lowestUmol,
+      meanUmol,
+      aboveShare: shareAbove(map, band[1]),
+      fullShare: shareInBand(map, band),
+      bestShare: best.share,
+      bestPercent: best.powerPercent,
+    }
+  })
+}
+
+/** Share of the photons that miss the water. */
+export const findSpill = (scene: Scene, specs: Specs, count: number, heightMm: number): number =>
+  remember(once(scene, keepSpills), specs, `${count} ${heightMm}`, () =>
+    shareSpilled(describeScene(scene, specs, count, heightMm)),
+  )
+
+/** The height that brings the spill under the threshold, mm, or null. */
+export const findLowerMm = (scene: Scene, specs: Specs, count: number, heightMm: number): number | null =>
+  findHeightForSpillMm(describeScene(scene, specs, count, heightMm), thresholds.lightSpill.value, defaults.lowestLensMm)
+
+/** Whether the light can be dimmed; unknown where nobody recorded it. */
+export const isDimmable = (specs: Specs): boolean | undefined => readFlag(specs, 'dimmable')
+
+/** Share of the plane in the band as the light can be set. */
+export const shareOf = (plane: Plane, dimmable: boolean): number => (dimmable ? plane.bestShare : plane.fullShare)

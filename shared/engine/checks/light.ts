@@ -1,0 +1,161 @@
+import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import type { Scene } from '../scene'
+import { practiceBasis, thresholds } from '../thresholds'
+import { isWithinMm, readGroups, readMeasure, readSet, readText } from '../values'
+import { probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { lightCoverage, lightIntensity, lightTargetReads, rankLight } from './light-beam'
+import { judgeMount } from './light-mounts'
+
+const hangs = ['hanging', 'ceiling']
+
+function judgeBody({ plan }: Scene, { piece }: Candidate): Judgement {
+  const length = readMeasure(piece.specs, 'lengthMm')
+  if (!length) return lacking(['lengthMm'], () => 'Nobody has recorded its length yet.')
+  const tankMm = plan.tank.outerLengthMm
+  const limitMm = tankMm + thresholds.lightOverTankMm.value
+  const mounts = [
+    ...(readSet<string>(piece.specs, 'mountsIncluded') ?? []),
+    ...(readSet<string>(piece.specs, 'mountsPossible') ?? []),
+  ]
+  const canHang = mounts.some((mount) => hangs.includes(mount))
+  const base = {
+    measured: length.value,
+    limit: limitMm,
+    probability: () =>
+      probabilityAtMost(
+        length.value,
+        limitMm,
+        standardUncertainty(length.value, length.source, length.plusMinus, 'length'),
+      ),
+  }
+  if (isWithinMm(length.value, limitMm))
+    return {
+      ...base,
+      outcome: 'pass',
+      say: (words) => `${words.length(length.value)} long over ${words.length(tankMm)} of tank.`,
+    }
+  const over = length.value - tankMm
+  if (canHang && isWithinMm(length.value, thresholds.lightHungRatio.value * tankMm))
+    return { ...base, outcome: 'change', say: (words) => `${words.length(over)} longer than the tank: hang it.` }
+  return { ...base, outcome: 'fail', say: (words) => `${words.length(over)} longer than the tank.` }
+}
+
+interface Band {
+  readonly fromNm: number
+  readonly toNm: number
+  readonly share: number
+}
+
+/** Share of photons from 400 to 500 nm, bands prorated by wavelength. */
+export function findBlueShare(bands: readonly Band[]): number {
+  return bands.reduce((sum, { fromNm, toNm, share }) => {
+    const inside = Math.min(toNm, 500) - Math.max(fromNm, 400)
+    return inside <= 0 ? sum : sum + (toNm > fromNm ? (share * inside) / (toNm - fromNm) : share)
+  }, 0)
+}
+
+function judgeSpectrum(_scene: Scene, { piece }: Candidate): Judgement {
+  const bands = readGroups<Band>(piece.specs, 'bands')
+  if (!bands || bands.length === 0)
+    return {
+      ...lacking(['bands'], () => 'Nobody has recorded its spectrum.'),
+      cautions: [() => 'Its spectrum is not recorded: ask for a plot before keeping corals under it.'],
+    }
+  const share = findBlueShare(bands)
+  const isBlue = share >= thresholds.blueShare.value
+  return {
+    outcome: isBlue ? 'pass' : 'change',
+    measured: share,
+    limit: thresholds.blueShare.value,
+    say: () => `${Math.round(share * 100)} % of its photons are blue${isBlue ? '' : ': warmer than corals prefer'}.`,
+  }
+}
+
+function judgeControl(scene: Scene, { piece }: Candidate): Judgement | null {
+  if (!scene.plan.goals.appControl) return null
+  const control = readText(piece.specs, 'control')
+  if (control === undefined) return lacking(['control'], () => 'Nobody has recorded how it is controlled.')
+  if (control === 'app-built-in')
+    return { outcome: 'pass', measured: control, say: () => 'Set by app without anything else.' }
+  if (control !== 'controller-needed')
+    return { outcome: 'change', measured: control, say: () => 'Cannot be set by app.' }
+  const group = readText(piece.specs, 'controlGroup')
+  const has = scene.others.some(
+    (item) =>
+      item.piece.kind === 'light-controller' &&
+      group !== undefined &&
+      readText(item.piece.specs, 'controlGroup') === group,
+  )
+  if (has) return { outcome: 'pass', measured: control, say: () => 'The light controller in the setup speaks to it.' }
+  return {
+    outcome: 'change',
+    measured: control,
+    asks: { need: 'light-control', amount: null, unit: null },
+    say: () => `Set by app only with a controller${group === undefined ? '' : ` of the ${group} group`}.`,
+  }
+}
+
+const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>): Rule => ({
+  id: `light.${check}`,
+  basis: practiceBasis,
+  ...parts,
+})
+
+export const lightRules: KindRules = {
+  rules: [
+    lightIntensity,
+    lightCoverage,
+    rule('body', {
+      label: 'Length over the tank',
+      worst: 'fail',
+      unit: 'mm',
+      rule: `No longer than the tank and ${thresholds.lightOverTankMm.value} mm; hung, up to ${thresholds.lightHungRatio.value} times the tank.`,
+      reads: ['lengthMm', 'mountsIncluded', 'mountsPossible'],
+      uses: ['tank.outerLengthMm'],
+      failLabel: 'too long for the tank',
+      judge: judgeBody,
+    }),
+    rule('spectrum', {
+      label: 'Spectrum',
+      worst: 'change',
+      unit: 'fraction',
+      limitIs: 'least',
+      rule: `At least ${thresholds.blueShare.value * 100} % of its photons between 400 and 500 nm.`,
+      reads: ['bands'],
+      uses: [],
+      failLabel: 'too warm',
+      judge: judgeSpectrum,
+    }),
+    rule('mount', {
+      label: 'Mount',
+      worst: 'change',
+      unit: null,
+      rule: 'A mount that comes with it, or is in the setup, suits the tank’s rim, its length or width, or the ceiling; one sold apart is a change.',
+      reads: [
+        'mountsIncluded',
+        'mountsPossible',
+        'armRimMinMm',
+        'armRimMaxMm',
+        'legSpanMinMm',
+        'legSpanMaxMm',
+        'heightMm',
+      ],
+      uses: ['tank.wallMm', 'tank.outerLengthMm', 'tank.outerWidthMm', 'room.ceilingMm', 'room.tankTopMm'],
+      failLabel: 'without a mount',
+      judge: judgeMount,
+    }),
+    rule('control', {
+      label: 'Control',
+      worst: 'change',
+      unit: null,
+      rule: 'Judged only where control by app is wanted: built in passes, a controller of its group is a change unless one is there.',
+      reads: ['control', 'controlGroup'],
+      uses: ['goals.appControl'],
+      failLabel: 'without control by app',
+      judge: judgeControl,
+    }),
+  ],
+  target: rankLight,
+  targetReads: lightTargetReads,
+  feltThrough: ['powerW', 'plugs', 'massKg', 'controlGroup', 'control', 'mountsPossible', 'mountsIncluded'],
+}
