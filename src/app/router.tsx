@@ -27,7 +27,7 @@ export function createRoutes(app: App): RouteObject[] {
             { id: 'find', path: paths.find, lazy: createLazy(app, () => import('./routes/find')) },
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
-            { id: 'unknown', path: '*', loader: throwNotFound },
+            { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],
         },
       ],

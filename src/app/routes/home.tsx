@@ -1,4 +1,5 @@
 import { QuestionBox } from '../../features/finder/components/question-box'
+import { HeroDrawing } from '../../features/home/components/hero-drawing'
 import { HowItWorks } from '../../features/home/components/how-it-works'
 import { Openings } from '../../features/home/components/openings'
 import { CautionBox } from '../../components/ui/caution-box'
@@ -8,15 +9,20 @@ import type { Page } from '../page-route'
 function HomePage() {
   return (
     <>
-      <h1 className="max-w-[22ch] text-[clamp(2rem,5vw,3.25rem)] leading-[1.06]">
-        The piece you wanted is gone. What still fits?
-      </h1>
-      <p className="mt-4 max-w-prose text-lg">
-        Describe a reef tank in a sentence or a drawing. Stillfits measures every piece in its catalogue against it, and
-        shows the numbers behind each answer.
-      </p>
-      <div className="mt-8 max-w-3xl">
-        <QuestionBox example="heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, room gets down to 60 F" />
+      <div className="grid items-end gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,1fr)_24rem]">
+        <div>
+          <h1 className="max-w-[22ch] text-[clamp(2rem,5vw,3.25rem)] leading-[1.06]">
+            The piece you wanted is gone. What still fits?
+          </h1>
+          <p className="mt-4 max-w-prose text-lg">
+            Describe a reef tank in a sentence or a drawing. Stillfits measures every piece in its catalogue against it,
+            and shows the numbers behind each answer.
+          </p>
+          <div className="mt-8">
+            <QuestionBox example="heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, room gets down to 60 F" />
+          </div>
+        </div>
+        <HeroDrawing />
       </div>
       <Openings />
       <HowItWorks />

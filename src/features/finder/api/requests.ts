@@ -4,7 +4,7 @@ import type { ApiClient } from '../../../lib/api-client'
 import type { Visit } from '../link/read-visit'
 import { fitPagesQuery } from './fit'
 
-const pageSize = 8
+const pageSize = 6
 
 /** Whether there is anything to ask: without a size or volume of the tank nothing can be judged. */
 export function canAsk({ setup }: Visit): boolean {

@@ -17,6 +17,8 @@ export interface AnswerCardProps {
   readonly finder: Finder
   readonly isLit: boolean
   readonly isPicked: boolean
+  /** Cautions that were said above for all. */
+  readonly saidAbove?: readonly string[]
   readonly onPoint?: (slug: string | null) => void
 }
 
@@ -29,11 +31,12 @@ function countKnockOns(count: number): string {
 }
 
 /** One piece with its verdict, the sentence, what else changes, and every check behind it. */
-export function AnswerCard({ answer, finder, isLit, isPicked, onPoint }: AnswerCardProps) {
+export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], onPoint }: AnswerCardProps) {
   const [isOpen, setIsOpen] = useState(false)
-  const { gear, verdict, summary, checks, knockOns, cautions, kind, pieces, confidence } = answer
+  const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence } = answer
   const { printer, hrefOf } = finder
   const deciding = findDecidingCheck(checks)
+  const cautions = answer.cautions.filter((caution) => !saidAbove.includes(caution))
   const quantity = pieces[0]?.quantity ?? 1
   const slug = gear?.slug ?? null
   return (

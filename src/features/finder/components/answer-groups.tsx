@@ -1,9 +1,11 @@
 import type { FitAnswer } from '#shared/schemas/answer'
 import { getKind } from '#shared/kinds/index'
+import { CautionBox } from '../../../components/ui/caution-box'
 import { EmptyState } from '../../../components/ui/empty-state'
 import type { Answers } from '../hooks/use-answers'
 import type { Finder } from '../hooks/use-finder'
 import type { Opened } from '../link/finder-state'
+import { findSharedCautions } from '../model/shared-cautions'
 import { AnswerList } from './answer-list'
 import { GroupHeading } from './group-heading'
 import { ReasonChips, type Reason } from './reason-chips'
@@ -69,10 +71,12 @@ function Nothing({ finder, first }: { readonly finder: Finder; readonly first: F
 export function AnswerGroups({ finder, fits, changes, openedList, lit, onPoint }: AnswerGroupsProps) {
   const { first } = fits
   const { opened } = finder.state
-  const shared = { finder, lit, onPoint }
+  const saidAbove = findSharedCautions([...fits.answers, ...changes.answers])
+  const shared = { finder, lit, saidAbove, onPoint }
   const isNothing = first !== undefined && first.counts.fits + first.counts.changes === 0
   return (
     <div className="mt-10 space-y-10">
+      {saidAbove.length > 0 && <CautionBox title="For every answer that fits:">{saidAbove.join(' ')}</CautionBox>}
       {first && isNothing && <Nothing finder={finder} first={first} />}
       {!isNothing && (
         <section className={groupClass}>

@@ -14,6 +14,7 @@ export interface AnswerListProps {
   readonly list: Answers
   readonly finder: Finder
   readonly lit: string | null
+  readonly saidAbove: readonly string[]
   readonly onPoint: (slug: string | null) => void
 }
 
@@ -47,7 +48,7 @@ export function AnswersFailed({ list }: { readonly list: Answers }) {
 }
 
 /** Ranked answers, page by page. */
-export function AnswerList({ verdict, list, finder, lit, onPoint }: AnswerListProps) {
+export function AnswerList({ verdict, list, finder, lit, saidAbove, onPoint }: AnswerListProps) {
   const { answers, isPending, isStale, next, isFetchingMore, fetchMore, error } = list
   const { hrefOf, state } = finder
   if (error && answers.length === 0) return <AnswersFailed list={list} />
@@ -69,6 +70,7 @@ export function AnswerList({ verdict, list, finder, lit, onPoint }: AnswerListPr
               finder={finder}
               isLit={slug !== null && slug === lit}
               isPicked={slug !== null && slug === state.picked}
+              saidAbove={saidAbove}
               onPoint={onPoint}
             />
           )

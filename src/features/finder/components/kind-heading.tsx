@@ -13,14 +13,14 @@ export function KindHeading({ state }: { readonly state: FinderState }) {
       <HiddenFields state={state} without={['kind']} />
       <h1 className="flex flex-wrap items-baseline gap-x-2">
         <span>Which</span>
-        <label className="inline-flex max-w-full">
+        <label className="inline-flex max-w-full min-w-0">
           <span className="sr-only">Kind of gear</span>
           <select
             key={state.kind}
             name="kind"
             defaultValue={state.kind}
             onChange={(event) => void submit(event.currentTarget.form, { preventScrollReset: true })}
-            className="max-w-full rounded-ui border-b-[3px] border-action bg-transparent pr-1 font-heading text-action"
+            className="field-sizing-content max-w-full min-w-0 rounded-ui border-b-[3px] border-action bg-transparent pr-1 font-heading text-action"
           >
             {kindKeys.map((kind) => (
               <option key={kind} value={kind} className="bg-sheet text-base text-ink">

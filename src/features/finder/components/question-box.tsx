@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react'
-import { Form } from 'react-router-dom'
+import { Form, Link } from 'react-router-dom'
 import { Button } from '../../../components/ui/button'
 import { paths } from '../../../config/paths'
 
@@ -36,16 +36,21 @@ export function QuestionBox({
           maxLength={400}
           autoComplete="off"
           enterKeyHint="search"
-          aria-describedby="question-example"
+          aria-describedby={asked === '' ? 'question-example' : undefined}
           className="min-h-11 min-w-0 flex-[1_1_16rem] bg-transparent text-base outline-none md:text-lg"
         />
         <Button type="submit" variant="primary">
           {button}
         </Button>
       </div>
-      <p id="question-example" className="mt-1 text-sm text-ink-soft">
-        Such as “{example}”.
-      </p>
+      {asked === '' && (
+        <p id="question-example" className="mt-1 text-sm text-ink-soft">
+          Such as{' '}
+          <Link to={`${paths.find}?${new URLSearchParams({ q: example }).toString()}`} className="link">
+            {example}
+          </Link>
+        </p>
+      )}
     </Form>
   )
 }

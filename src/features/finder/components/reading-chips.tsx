@@ -28,7 +28,7 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
           return (
             <li key={start}>
               {path === undefined ? (
-                <span className="given" title={`from “${text}”`}>
+                <span className="given inline-flex min-h-7 items-center" title={`from “${text}”`}>
                   {meaning}
                 </span>
               ) : (

@@ -15,8 +15,11 @@ export interface SetupValuesProps {
 
 const shownAtOnce = 7
 
-/** What is drawn already needs no second line. */
-const isSaidElsewhere = (path: string): boolean => /\.(id|name)$/.test(path) || path === 'tank.gear'
+const drawn =
+  /^(tank\.(outer\w+Mm|wallMm|bottomMm|waterLineMm|chambers\.\d+\.(id|name|lengthMm|widthMm|waterDepthMm))|room\.(coldest|warmest|temperature)C|goals\.temperatureC)$/
+
+/** What is drawn can be read and pressed there, and needs no second line before the rest. */
+const isDrawn = (path: string): boolean => drawn.test(path)
 
 /** What the person said, and what is assumed until they do. */
 export function SetupValues({ finder, telling, onEdit }: SetupValuesProps) {
@@ -24,22 +27,17 @@ export function SetupValues({ finder, telling, onEdit }: SetupValuesProps) {
   const hrefOf = (path: string) => `#${fieldId(path)}`
   const said = Object.entries(state.raw).flatMap(([path, text]): ValueLine[] => {
     const field = findSetupField(path)
-    if (!field || !given.has(path) || isSaidElsewhere(path)) return []
+    if (!field || !given.has(path) || isDrawn(path)) return []
     return [{ path, label: labelSetupPath(path, plan), shown: text, href: hrefOf(path) }]
   })
   const isTelling = telling.size > 0 ? telling : new Set(['room.coldestC', 'goals.temperatureC'])
   const assumed = listAssumed(plan, printer, isTelling)
     .filter(({ path }) => !isExample || !path.startsWith('tank.'))
     .map((one): ValueLine => ({ ...one, href: hrefOf(one.path) }))
+    .toSorted((a, b) => Number(isDrawn(a.path)) - Number(isDrawn(b.path)))
   const [first, rest] = [assumed.slice(0, shownAtOnce), assumed.slice(shownAtOnce)]
   return (
     <div className="space-y-6">
-      {said.length > 0 && (
-        <section>
-          <h2>You said</h2>
-          <ValueList lines={said} look="given" onEdit={onEdit} />
-        </section>
-      )}
       <section>
         <h2>Assumed until you say</h2>
         <ValueList lines={first} look="assumed" onEdit={onEdit} />
@@ -49,6 +47,12 @@ export function SetupValues({ finder, telling, onEdit }: SetupValuesProps) {
           </Disclosure>
         )}
       </section>
+      {said.length > 0 && (
+        <section>
+          <h2>Also said</h2>
+          <ValueList lines={said} look="given" onEdit={onEdit} />
+        </section>
+      )}
     </div>
   )
 }

@@ -5,6 +5,7 @@ import { buttonClass } from '../../../components/ui/button-class'
 import type { Finder } from '../hooks/use-finder'
 import { fieldId } from '../model/field-groups'
 import { toDrawing } from '../model/to-drawing'
+import { RoomStrip } from './room-strip'
 
 export interface TankFormProps {
   readonly finder: Finder
@@ -37,13 +38,14 @@ export function TankForm({ finder, rod, onEdit }: TankFormProps) {
         <TankPlan {...shared} />
         <TankSection {...shared} />
       </div>
+      <RoomStrip finder={finder} onEdit={onEdit} editHref={editHref} />
       <div className="mt-3 flex flex-wrap gap-2 print:hidden">
         {actions.map(({ path, label, field }) => (
           <a
             key={path}
             href={field === undefined ? editHref(path) : `#${fieldId(field)}`}
             role="button"
-            className={buttonClass({ size: 'sm' })}
+            className={buttonClass({ size: 'sm', variant: isExample && path === 'tank.volumeL' ? 'primary' : 'plain' })}
             onClick={(event) => {
               event.preventDefault()
               onEdit(path, event.currentTarget)
