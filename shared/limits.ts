@@ -19,7 +19,5 @@ export const limits = {
   pageMax: 100,
   answers: 10,
   answersMax: 50,
-  /** Candidates that are marked on the shared scales. */
-  marks: 2000,
   cursor: 400,
 } as const

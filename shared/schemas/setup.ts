@@ -9,12 +9,12 @@ import { tankInputSchema } from './tank-input'
 import type { Goals, Mains, Room, Setup, Water } from '../engine/types'
 
 /** One section of a setup: every field optional, each checked as its own definition says. */
-function createSectionSchema<Section>(section: string, extra: z.core.$ZodLooseShape = {}): z.ZodType<Section> {
+function createSectionSchema<Section>(section: string, extra: z.core.$ZodLooseShape = {}): z.ZodType<Section, Section> {
   const fields = setupFields.filter(({ path }) => path.startsWith(`${section}.`) && path.split('.').length === 2)
   const shape = Object.fromEntries(
     fields.map(({ attribute: { key }, attribute }) => [key, createFieldSchema(attribute).optional()]),
   )
-  return z.strictObject({ ...shape, ...extra }, { error: explainObject }) as unknown as z.ZodType<Section>
+  return z.strictObject({ ...shape, ...extra }, { error: explainObject }) as unknown as z.ZodType<Section, Section>
 }
 
 function explainObject(issue: { readonly code?: string }): string | undefined {

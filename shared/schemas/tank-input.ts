@@ -44,4 +44,4 @@ export const tankInputSchema = z
       }
     }
   })
-  .meta(createJsonSchema()) as unknown as z.ZodType<TankRequest>
+  .meta(createJsonSchema()) as unknown as z.ZodType<TankRequest, TankRequest>

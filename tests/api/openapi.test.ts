@@ -153,7 +153,7 @@ describe('GET /api/v1/kinds', () => {
     for (const { attributes, checks, jsonSchema } of items) {
       const keys = attributes.map(({ key }) => key)
       const { $schema: _, ...schema } = jsonSchema
-      expect(Object.keys((schema.properties ?? {}) as object)).toEqual(keys)
+      expect(Object.keys((schema.properties ?? {}))).toEqual(keys)
       expect(ajv.compile(schema)({ unheardOf: 1 })).toBe(false)
       const ids = checks.map(({ id }) => id)
       for (const id of attributes.flatMap((attribute) => attribute.checks ?? [])) expect(ids).toContain(id)
