@@ -72,8 +72,6 @@ const alwaysRead: ReadonlySet<string> = new Set([
   'sump',
   'glass',
   'acrylic',
-  'perspex',
-  'plexiglass',
 ])
 
 /** Reads words that say something of the setup: "rimless", "acrylic", "no lid". */

@@ -10,14 +10,14 @@ const perHour = namedUnits.turnover[0]
 
 const round = (value: number): number => Number(value.toPrecision(4))
 
-const setTurnover = ({ setAmount }: Draft, from: number, to: number): boolean => {
+const setTurnover = (draft: Draft, from: number, to: number): boolean => {
   const ends = from === to ? [from * around[0], to * around[1]] : [from, to]
   const [low, high] = ends.map((value) => createAmount(round(value), 'turnover', perHour))
   return (
     low !== undefined &&
     high !== undefined &&
-    setAmount('goals.turnoverPerHour.0', low) &&
-    setAmount('goals.turnoverPerHour.1', high)
+    draft.setAmount('goals.turnoverPerHour.0', low) &&
+    draft.setAmount('goals.turnoverPerHour.1', high)
   )
 }
 

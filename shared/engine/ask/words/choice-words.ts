@@ -128,7 +128,7 @@ export const filterChoices: readonly (readonly [string, FilterChoice])[] = [
     'form',
     'magnet',
     'magnet',
-    'magnet, magnetic, magnet cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, magnet scraper, magnetic glass cleaner, mag float, magnet float, float magnet, floating magnet, magnetic algae cleaner, glass magnet, magnet glass cleaner, cleaner magnet',
+    'magnet, magnetic, magnet cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, magnet scraper, magnetic glass cleaner, magnet float, float magnet, floating magnet, magnetic algae cleaner, glass magnet, magnet glass cleaner, cleaner magnet',
   ),
   ...choice(
     'scraper',
@@ -165,7 +165,7 @@ const said = (path: string, value: FieldChoice['value'], meaning: string, phrase
   phrases.split(', ').map((phrase) => [phrase, { path, value, meaning }] as const)
 
 export const fieldChoices: readonly (readonly [string, FieldChoice])[] = [
-  ...said('tank.material', 'acrylic', 'acrylic tank', 'acrylic, acrilic, acryllic, plexiglass, perspex'),
+  ...said('tank.material', 'acrylic', 'acrylic tank', 'acrylic, acrilic, acryllic'),
   ...said(
     'tank.material',
     'glass',

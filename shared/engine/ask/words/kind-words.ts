@@ -24,7 +24,7 @@ const names: Readonly<Record<KindKey, string>> = {
   'return-pump':
     'return pump, retun pump, return, main pump, sump pump, return pmp, dc pump, ac pump, circulation pump, water pump, pump',
   wavemaker:
-    'wavemaker, wave maker, powerhead, power head, gyre, circulation powerhead, wave pump, flow pump, wavemakers, wave makr, ' +
+    'wavemaker, wave maker, powerhead, power head, circulation powerhead, wave pump, flow pump, wavemakers, wave makr, ' +
     'wavemker, stream pump, propeller pump, nano powerhead',
   skimmer: 'skimmer, protein skimmer, skimer, foam fractionator, protien skimmer, protein skimer',
   'auto-top-off':
@@ -48,7 +48,7 @@ const names: Readonly<Record<KindKey, string>> = {
   scraper:
     'scraper, scrape, scraping, algae scraper, magnet cleaner, glass cleaner, algae magnet, cleaning magnet, magnetic scraper, magnetic cleaner, ' +
     'magnet scraper, glass scraper, magnetic glass cleaner, algae cleaner, window cleaner, algae blade, scrapper, algae scrapper, scraper blade, ' +
-    'cleaner magnet, magnet float, mag float, float magnet, floating magnet, magnetic algae cleaner, algae pad, blade scraper, magnet glass cleaner, algae scrubber pad, glass magnet',
+    'cleaner magnet, magnet float, float magnet, floating magnet, magnetic algae cleaner, algae pad, blade scraper, magnet glass cleaner, algae scrubber pad, glass magnet',
   siphon:
     'siphon, syphon, gravel vac, gravel vacuum, gravel cleaner, sand vacuum, sand vac, water changer, siphon tube, siphon hose, sifon, gravel siphon',
   net: 'net, fish net, dip net, catch net, fishnet, mesh net, transfer net',

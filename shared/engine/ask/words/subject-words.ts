@@ -30,7 +30,7 @@ const names: Readonly<Record<Subject, string>> = {
     'heater compartment, return section, return compartment, side chamber, overflow chamber, rear filtration, back filtration, heater slot, filtration chamber, filter chamber',
   tank:
     'tank, aquarium, cube, display, system, nano, reef tank, fish tank, display tank, fishtank, setup, reef, frag tank, pico, ' +
-    'footprint, tank size, tank dimensions, aquarim, biocube style, glass box, build',
+    'footprint, tank size, tank dimensions, aquarim, glass box, build',
   room:
     'room, house, flat, apartment, home, basement, garage, office, condo, bedroom, living room, lounge, kitchen, ambient, room temp, ' +
     'room temperature, classroom, dorm, dorm room, studio, cellar, attic, conservatory, ambient temp, ambient temperature, air temp, ' +
@@ -42,7 +42,7 @@ const names: Readonly<Record<Subject, string>> = {
   sump: 'sump, refugium',
   support:
     'dresser, desk, table, counter, countertop, shelf, furniture, sideboard, counter top, cupboard, kitchen counter',
-  wall: 'glass thickness, wall thickness, thick glass, thick acrylic, glass wall, pane, panes, glass panes, walls, acrylic walls, glass walls, tank wall, wall, glass, acrylic, starphire, perspex, plexiglass',
+  wall: 'glass thickness, wall thickness, thick glass, thick acrylic, glass wall, pane, panes, glass panes, walls, acrylic walls, glass walls, tank wall, wall, glass, acrylic',
   sand: 'sand, sand bed, sandbed, substrate, live sand, bed, aragonite, sand depth, bed depth',
   rock: 'rock, live rock, dry rock, rockwork',
   feed: 'tap, tap water, house pressure, water pressure, line pressure, mains pressure, feed, feed water, source water, tds, tap tds, tap pressure, supply, pressure',

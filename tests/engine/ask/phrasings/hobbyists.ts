@@ -79,7 +79,7 @@ export const hobbyistPhrasings: readonly Phrasing[] = [
     { kind: 'scraper', filters: { form: 'magnet' }, fields: { 'tank.wallMm': 9.525, 'tank.material': 'glass' } },
   ],
   [
-    'mag float style cleaner for 6mm glass nano',
+    'float magnet cleaner for 6mm glass nano',
     'metric',
     { kind: 'scraper', filters: { form: 'magnet' }, fields: { 'tank.wallMm': 6, 'tank.material': 'glass' } },
   ],
@@ -99,7 +99,7 @@ export const hobbyistPhrasings: readonly Phrasing[] = [
     { kind: 'wavemaker', fields: { ...volume(75), 'goals.coral': ['lps'] } },
   ],
   ['wavemaker between 1000 and 3000 l/h', 'metric', { kind: 'wavemaker', filters: { flowMaxLph: [1000, 3000] } }],
-  ['gyre under 2000 gph', 'us', { kind: 'wavemaker', filters: { flowMaxLph: [null, gallons(2000)] } }],
+  ['powerhead under 2000 gph', 'us', { kind: 'wavemaker', filters: { flowMaxLph: [null, gallons(2000)] } }],
   [
     'return pump 300 gph for 30 gallons',
     'us',
