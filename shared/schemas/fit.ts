@@ -1,28 +1,33 @@
 import { z } from 'zod'
 import { limits } from '../limits'
 import { verdictSchema } from './answer'
+import { checkFilters, filtersSchema } from './filters'
 import { cursorSchema, kindSchema } from './gear-requests'
 import { checkPieceInput, pieceInputShape } from './piece-input'
 import { placeSchema, quantitySchema, setupSchema } from './setup'
 
 const limitError = `must be a whole number from 1 to ${limits.answersMax}`
 
-export const fitRequestSchema = z.strictObject({
-  setup: setupSchema,
-  kind: kindSchema,
-  limit: z.int({ error: limitError }).min(1, limitError).max(limits.answersMax, limitError).default(limits.answers),
-  cursor: cursorSchema.optional(),
-  /** Only answers with this verdict. */
-  verdict: verdictSchema.optional(),
-  /** Only pieces that fail this check, or lack data for it. */
-  check: z
-    .string({ error: 'must be the id of a check, such as heater.space' })
-    .max(80)
-    .regex(/^[a-z-]+\.[a-z-]+$/, 'must be the id of a check, such as heater.space')
-    .optional(),
-  /** Also the shared scales, and where every candidate stands on them. */
-  scales: z.boolean({ error: 'must be true or false' }).default(false),
-})
+export const fitRequestSchema = z
+  .strictObject({
+    setup: setupSchema,
+    kind: kindSchema,
+    /** Only pieces of which these attributes are known and match. */
+    filters: filtersSchema.optional(),
+    limit: z.int({ error: limitError }).min(1, limitError).max(limits.answersMax, limitError).default(limits.answers),
+    cursor: cursorSchema.optional(),
+    /** Only answers with this verdict. */
+    verdict: verdictSchema.optional(),
+    /** Only pieces that fail this check, or lack data for it. */
+    check: z
+      .string({ error: 'must be the id of a check, such as heater.space' })
+      .max(80)
+      .regex(/^[a-z-]+\.[a-z-]+$/, 'must be the id of a check, such as heater.space')
+      .optional(),
+    /** Also the shared scales, and where every candidate stands on them. */
+    scales: z.boolean({ error: 'must be true or false' }).default(false),
+  })
+  .superRefine(checkFilters)
 
 export const fitCheckRequestSchema = z.strictObject({
   setup: setupSchema,

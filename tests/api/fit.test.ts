@@ -73,6 +73,30 @@ describe('POST /api/v1/fit', () => {
     expect(new Set(outcomes)).toEqual(new Set(['fail', 'nodata']))
   })
 
+  it('keeps to what was asked for, and takes nothing unknown for a match', async () => {
+    const slugs = async (filters: object) => (await findAll({ filters })).map(({ gear }) => gear?.slug)
+    const exact = await slugs({ lengthMm: [220, 220], powerW: [150, null], form: 'titanium-rod', volts: '120' })
+    expect(exact).toContain(slugOf('rod-a'))
+    expect(exact).not.toContain(slugOf('rod-b'))
+    expect(exact).not.toContain(slugOf('rod-c'))
+    expect(await slugs({ lengthMm: [600, null] })).toContain(slugOf('rod-b'))
+    expect(await slugs({ powerW: [null, 149.9] })).not.toContain(slugOf('rod-a'))
+    expect(await slugs({})).toHaveLength((await findAll({})).length)
+  })
+
+  it('names every filter that the kind cannot answer', async () => {
+    const filters = { lengthMm: [300, 200], powerW: 'much', form: 'brick', colour: 'red', volts: true, diameterMm: [1] }
+    const known = { lengthMm: [300, 200], powerW: 'much', form: 'brick', colour: 'red', volts: true }
+    const malformed = await post('/fit', { setup, kind: 'heater', filters })
+    expect(listPointers(expectProblem(malformed, 422))).toContain('#/filters/diameterMm')
+    const response = await post('/fit', { setup, kind: 'heater', filters: known })
+    expect(listPointers(expectProblem(response, 422))).toEqual(
+      Object.keys(known)
+        .sort()
+        .map((key) => `#/filters/${key}`),
+    )
+  })
+
   it('gives the scales and a mark for every candidate only when asked', async () => {
     const plain = fitResultSchema.parse((await post('/fit', { setup, kind: 'heater' })).body)
     expect(plain.marks).toBeUndefined()
