@@ -43,8 +43,9 @@ export const readAmount = (tokens: readonly Token[], at: number): Amount | undef
   const number = tokens[at]
   if (number?.type !== 'number' || isPartOfName(tokens, at)) return undefined
   const found = readUnit(tokens, skipHyphen(tokens, at + 1))
-  const value = valueOf(number, found?.unit)
-  if (value === undefined) return undefined
+  const size = valueOf(number, found?.unit)
+  if (size === undefined) return undefined
+  const value = number.isNegative === true && found?.quantity === 'temperature' ? -size : size
   const to = found?.to ?? at + 1
   return readSmaller(tokens, {
     quantity: found?.quantity,

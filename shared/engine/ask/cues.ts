@@ -9,6 +9,8 @@ const longestPhrase = 4
 const seasons = indexPhrases(seasonPhrases)
 const before = indexPhrases(boundsBefore)
 const after = indexPhrases(boundsAfter)
+/** "11 in water", while "above water 10 in" is of something else. */
+const water = indexPhrases<Dimension>([['water', 'water']])
 /** "W 5 in L 4 in". */
 const letters = indexPhrases<Dimension>(dimensionLetters)
 const dimensions = indexPhrases<Dimension>([
@@ -73,7 +75,8 @@ export const findBound = (reading: Reading, measure: Measure): Mention<Bound> | 
 export const findDimension = (reading: Reading, measure: Measure): Mention<Dimension> | undefined =>
   lookBack(reading, measure, letters, 0, true) ??
   lookBack(reading, measure, dimensions, 3, true) ??
-  lookAhead(reading, measure, dimensions, 0)
+  lookAhead(reading, measure, dimensions, 0) ??
+  lookAhead(reading, measure, water, 0)
 
 /** "down to 60", "60 in winter"; whichever stands closer, before where neither does. */
 export const findSeason = (reading: Reading, measure: Measure): Mention<Season> | undefined => {

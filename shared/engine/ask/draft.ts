@@ -27,6 +27,8 @@ export interface Draft {
   /** The first value given for a path stays; one that the setup could not hold is not taken. */
   setField(path: string, value: FieldValue, text: string): boolean
   setAmount(path: string, amount: Amount): boolean
+  /** Whether the setup could hold it there. */
+  canHold(path: string, amount: Amount): boolean
   setFilter(key: string, filter: Filter): boolean
 }
 
@@ -41,6 +43,14 @@ const canHold = (path: string, value: FieldValue): boolean => {
   const attribute = findSetupField(path)?.attribute
   if (attribute?.type !== 'measure') return attribute !== undefined
   return typeof value === 'number' && value >= attribute.plausible[0] && value <= attribute.plausible[1]
+}
+
+/** An amount in the unit of its field; undefined where the field could not hold it. */
+const valueAt = (path: string, amount: Amount): number | undefined => {
+  const attribute = findSetupField(path)?.attribute
+  if (attribute?.type !== 'measure') return undefined
+  const value = amountIn(amount, attribute.unit)
+  return canHold(path, value) ? value : undefined
 }
 
 export const createDraft = (text: string, tokens: readonly Token[]): Draft => {
@@ -77,11 +87,10 @@ export const createDraft = (text: string, tokens: readonly Token[]): Draft => {
     },
     setField: (path, value, typed) => canHold(path, value) && setOnce(fields, path, { value, text: typed }),
     setAmount: (path, amount) => {
-      const attribute = findSetupField(path)?.attribute
-      if (attribute?.type !== 'measure') return false
-      const value = amountIn(amount, attribute.unit)
-      return canHold(path, value) && setOnce(fields, path, { value, text: writeAmount(amount) })
+      const value = valueAt(path, amount)
+      return value !== undefined && setOnce(fields, path, { value, text: writeAmount(amount) })
     },
+    canHold: (path, amount) => valueAt(path, amount) !== undefined,
     setFilter: (key, filter) => setOnce(filters, key, filter),
   }
 }

@@ -34,7 +34,9 @@ export const findLeftovers = (text: string, tokens: readonly Token[], draft: Dra
     const open = stretches.at(-1)
     const between = open === undefined ? undefined : tokens.slice(open.last + 1, at)
     const joins =
-      between?.every((each, offset) => each.type === 'sign' && !draft.isUsed((open?.last ?? 0) + 1 + offset)) ?? false
+      between?.every(
+        (each, offset) => (each.type === 'sign' || each.text === 'x') && !draft.isUsed((open?.last ?? 0) + 1 + offset),
+      ) ?? false
     const last = token.type === 'number' ? lastOfUnit(tokens, at) : at
     const end = tokens[last]?.end ?? token.end
     if (open !== undefined && at <= open.last) return

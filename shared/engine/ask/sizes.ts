@@ -53,6 +53,9 @@ export const readSizeOf = (reading: Reading, measure: Measure): boolean => {
   const { subject, amounts, keys, doubts } = readSides(reading, measure, near?.landmark)
   const base = findSizePath(reading, subject)
   if (base === undefined) return false
+  const isOfSetup = subject !== 'piece'
+  const isAbsurd = amounts.some((amount, index) => keys[index] && !draft.canHold(`${base}.${keys[index]}`, amount))
+  if (isOfSetup && isAbsurd) return false
   const filled = amounts.filter((amount, index) => {
     const key = keys[index]
     if (key === undefined) return false
@@ -63,6 +66,6 @@ export const readSizeOf = (reading: Reading, measure: Measure): boolean => {
   if (filled.length === 0) return false
   const cues = [near?.landmark, bound].filter((cue) => cue !== undefined)
   const meaning = `${sizeNames[subject]} ${printSize(amounts)}${doubts}`
-  draft.note({ meaning, ...(subject !== 'piece' && { path: `${base}.${keys[0] ?? ''}` }) }, measure, ...cues)
+  draft.note({ meaning, ...(isOfSetup && { path: `${base}.${keys[0] ?? ''}` }) }, measure, ...cues)
   return true
 }

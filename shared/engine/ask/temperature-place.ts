@@ -66,8 +66,10 @@ export const findTemperaturePlace = (
 ): TemperaturePlace | undefined => {
   const season = findSeason(reading, measure)
   if (!isTyped && season?.from !== measure.to && countsSomething(reading, measure)) return undefined
-  const isSubject = ({ subject }: Landmark) => subject === 'room' || subject === 'water' || subject === 'feed'
+  const isSubject = ({ subject }: Landmark) =>
+    subject === 'room' || subject === 'water' || subject === 'feed' || subject === 'outdoors'
   const first = findNearest(reading, measure, isSubject)
+  if (first?.landmark.subject === 'outdoors') return undefined
   const isWaterElsewhere =
     first?.landmark.subject === 'water' &&
     (isAcrossStop(reading, measure, first) || (findSeasonBeside(measure, season) && first.cost > adjacent))

@@ -10,6 +10,8 @@ export interface Token {
   readonly value?: number
   /** Of "1,200": the value if its commas group thousands. */
   readonly grouped?: number
+  /** A minus stands before it: "-5", but not "8-10". */
+  readonly isNegative?: true
   /** Written as a word: "twenty". */
   readonly spelled?: true
 }

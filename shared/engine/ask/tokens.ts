@@ -31,7 +31,14 @@ const split = (text: string): Token[] => {
     const end = start + match[0].length
     const token = { type, text: match[0] === "''" ? '"' : match[0], start, end } as const
     const glued = start > 0 && tokens.at(-1)?.end === start
-    tokens.push({ ...token, glued, ...(type === 'number' && readNumberToken(match[0])) })
+    const sign = tokens.at(-1)
+    const isNegative = type === 'number' && glued && sign?.text === '-' && !sign.glued
+    tokens.push({
+      ...token,
+      glued,
+      ...(isNegative && { isNegative }),
+      ...(type === 'number' && readNumberToken(match[0])),
+    })
   }
   return tokens
 }

@@ -21,6 +21,7 @@ export type Subject =
   | 'stand-height'
   | 'mount-height'
   | 'posture'
+  | 'outdoors'
   | 'opening'
 
 const names: Readonly<Record<Subject, string>> = {
@@ -56,6 +57,8 @@ const names: Readonly<Record<Subject, string>> = {
   'water-line': 'water line, waterline, water level, water column',
   'stand-height': 'top of the tank, tank top, top of tank, rim height',
   opening: 'opening, hole, access hole, chamber opening, lid opening, access',
+  outdoors:
+    'outdoors, outdoor, outside temp, outdoor temp, outside temperature, outdoor temperature, garden, outside it',
   posture: 'stand up, stand upright, stand vertically, stand on end, stand vertical',
   'mount-height': 'above the water, above water, over the water, above the surface, above the tank, off the water',
 }

@@ -446,4 +446,29 @@ export const hobbyistPhrasings: readonly Phrasing[] = [
   ['wavemakr for 200 l', 'metric', { kind: 'wavemaker', fields: volume(200) }],
   ['return pmup for 200 l', 'metric', { kind: 'return-pump', fields: volume(200) }],
   ['syphon or gravel vac for 20 gallon', 'us', { kind: 'siphon', fields: volumeGal(20) }],
+
+  [
+    'wanted: heater, titanium, 3" x 4" chamber, 11" water',
+    'us',
+    { kind: 'heater', filters: { form: 'titanium-rod' }, fields: chamberIn(3, 4, 11) },
+  ],
+  ['the heater is 300mm x 30mm', 'us', { kind: 'heater', ignored: ['300mm x 30mm'] }],
+  ['outdoor temps -5C, room 15C', 'metric', { kind: null, fields: usual(15) }],
+  ['garage drops to -5 C', 'metric', { kind: null, fields: coldest(-5) }],
+  [
+    '- 20 gal\n- heater\n-4x5x12 in chamber',
+    'us',
+    { kind: 'heater', fields: { ...volumeGal(20), ...chamberIn(4, 5, 12) } },
+  ],
+  ['20 gallons (75 liters)', 'us', { kind: null, fields: volumeGal(20), ignored: ['75 liters'] }],
+  [
+    'heater 30mm diameter 250mm long',
+    'metric',
+    { kind: 'heater', filters: { diameterMm: [27, 33], lengthMm: [225, 275] } },
+  ],
+  [
+    'will my stand hold a 40 breeder?',
+    'us',
+    { intent: 'check', kind: 'stand', fields: { ...volumeGal(40), ...tankIn(36, 18, 16) } },
+  ],
 ]
