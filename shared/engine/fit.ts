@@ -9,22 +9,16 @@ import {
   type AssessedCandidate,
   type CandidateOptions,
 } from './candidates'
-import { getRules, hasOwnRules } from './checks/index'
+import { getRules } from './checks/index'
 import { listAssumptions } from './assumptions'
 import type { Judged } from './judge'
 import { presentKnockOns } from './knock-ons'
 import { groupByVerdict, sortGroup, takePage } from './ranking'
 import { presentCautions, presentCheck } from './present'
-import { readNumber } from './values'
+import { drawScales } from './scales'
 import { sweep, type Sweep } from './sweep'
-import type { Answer, FitOptions, FitResult, Mark, Piece, Scale, Setup } from './types'
+import type { Answer, FitOptions, FitResult, Piece, Setup } from './types'
 import { decideVerdict, rateConfidence, verdictOrder } from './verdict'
-import { getKind } from '../kinds/index'
-
-const onTheWay = (kind: KindKey): readonly string[] =>
-  hasOwnRules(kind)
-    ? []
-    : [`Checks of their own for ${getKind(kind).plural} are on the way; only the general ones were made.`]
 
 /** The answer in one sentence: what is wrong, what is not known, what must change, or how it fits. */
 function summarise(
@@ -62,7 +56,7 @@ function presentAnswer(scene: Sweep['bench']['scene'], assessed: AssessedCandida
     summary: summarise(scene, assessed, words),
     checks: judged.map((one) => presentCheck(one, words)),
     knockOns: presentKnockOns(knockOns, words),
-    cautions: [...presentCautions(judged, words), ...onTheWay(piece.kind)],
+    cautions: presentCautions(judged, words),
     confidence: rateConfidence(piece, judged),
     ...(placement && { place: placement }),
   }
@@ -75,22 +69,6 @@ function presentAnswer(scene: Sweep['bench']['scene'], assessed: AssessedCandida
 export function fitCheck(setup: Setup, piece: Piece, options: CandidateOptions = {}): Answer {
   const bench = setBench(setup, piece.kind, options)
   return presentAnswer(bench.scene, assessCandidate(bench, piece, options), createPrinter(setup.units))
-}
-
-const mostMarks = 400
-
-function markAll(
-  scales: readonly Scale[],
-  order: readonly number[],
-  swept: Sweep,
-  pieces: readonly Piece[],
-): readonly Mark[] {
-  return order.slice(0, mostMarks).flatMap((index): Mark[] => {
-    const { gear, specs } = pieces[index]!
-    if (!gear) return []
-    const values = Object.fromEntries(scales.map(({ key }) => [key, readNumber(specs, key) ?? null]))
-    return [{ ...gear, verdict: swept.verdicts[index]!, values }]
-  })
 }
 
 function tally(
@@ -137,7 +115,6 @@ export function fit(
   )
   const rules = getRules(kind)
   const labels = new Map(rules.rules.map(({ id, failLabel }) => [id, failLabel]))
-  const scales = options.scales ? rules.scales?.(bench.scene, words) : undefined
   const answers = page.indexes.map((index) => {
     const candidate = swept.candidateOf(index)
     const judged = swept.judgedOf(index)
@@ -160,14 +137,13 @@ export function fit(
     })),
     assumptions: listAssumptions(bench.scene.plan, words),
     total: page.total,
-    ...(scales && {
-      scales,
-      marks: markAll(
-        scales,
-        verdictOrder.flatMap((verdict) => groups[verdict]),
+    ...(options.scales &&
+      drawScales(
+        kind,
         swept,
+        verdictOrder.flatMap((verdict) => groups[verdict]),
         pieces,
-      ),
-    }),
+        words,
+      )),
   }
 }

@@ -176,6 +176,22 @@ export const thresholds = {
     basis: practice,
   },
   sandBlowsTurnover: { value: 20, unit: '/h', text: 'Strong flow, by the hour', basis: practice },
+  rockBaseShare: { value: 0.5, unit: 'fraction', text: 'Share of the rock that should be base rock', basis: practice },
+  grainLowMm: { value: 0.25, unit: 'mm', text: 'Finer sand blows about in strong flow', basis: practice },
+  grainHighMm: { value: 2, unit: 'mm', text: 'Coarser sand traps waste', basis: practice },
+  salinityLowPpt: { value: 30, unit: 'ppt', text: 'Lower end of what a salinity meter has to span', basis: practice },
+  salinityHighPpt: { value: 40, unit: 'ppt', text: 'Upper end of it', basis: practice },
+  salinityStepPpt: { value: 1, unit: 'ppt', text: 'Coarsest step of a salinity meter', basis: practice },
+  magnetThinShare: {
+    value: 0.6,
+    unit: 'fraction',
+    text: 'Share of a magnet’s thinnest wall down to which it is only stronger than needed',
+    basis: practice,
+  },
+  scraperReachMm: { value: 50, unit: 'mm', text: 'Handle left above the tank', basis: practice },
+  siphonDryMm: { value: 50, unit: 'mm', text: 'How far a hand goes below the rim with a siphon', basis: practice },
+  netShare: { value: 0.5, unit: 'fraction', text: 'Share of the display’s width that a net may open', basis: practice },
+  reservoirDays: { value: 3, unit: 'count', text: 'Days of evaporation that a reservoir should hold', basis: practice },
 } as const satisfies Record<string, Threshold>
 
 export const practiceBasis = practice

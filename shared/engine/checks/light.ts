@@ -103,8 +103,8 @@ const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>): Rule => ({
 
 export const lightRules: KindRules = {
   rules: [
-    lightIntensity,
     lightCoverage,
+    lightIntensity,
     rule('body', {
       label: 'Length over the tank',
       worst: 'fail',

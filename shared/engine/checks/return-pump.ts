@@ -69,7 +69,9 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
       const [low, high] = pass.map((value) => words.number(value, '/h'))
       const flow = `${words.flow(point.flowLph)} against ${words.measure(point.headM, 'm')} of head, ${words.number(perHour, '/h')} times the water an hour`
       if (outcome === 'pass')
-        return isThrottled ? `${flow}; throttled it comes down to ${words.number(judged, '/h')}.` : `${flow}.`
+        return isThrottled
+          ? `${flow} at full speed; its speed control brings it down to what is wanted, ${low} to ${high}.`
+          : `${flow}.`
       const wanted = `${low} to ${high} are wanted`
       if (judged < pass[0]) return outcome === 'change' ? `Low: ${flow}; ${wanted}.` : `Too weak: ${flow}; ${wanted}.`
       return outcome === 'change' ? `Throttle it: ${flow}; ${wanted}.` : `Far too strong: ${flow}; ${wanted}.`

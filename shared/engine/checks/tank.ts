@@ -132,16 +132,6 @@ const rule = (check: string, parts: Omit<Rule, 'id' | 'basis'>, basis = practice
 
 export const tankRules: KindRules = {
   rules: [
-    rule('filtration', {
-      label: 'Filtration',
-      worst: 'fail',
-      unit: null,
-      rule: 'The same style passes; another style is a change that names what must be bought; no filtration in place of some fails.',
-      reads: ['filtration'],
-      uses: ['tank.filtration'],
-      failLabel: 'without a place for filtration',
-      judge: judgeFiltration,
-    }),
     rule('volume', {
       label: 'Volume',
       worst: 'fail',
@@ -151,6 +141,16 @@ export const tankRules: KindRules = {
       uses: grossUses,
       failLabel: 'far larger or smaller',
       judge: judgeVolume,
+    }),
+    rule('filtration', {
+      label: 'Filtration',
+      worst: 'fail',
+      unit: null,
+      rule: 'The same style passes; another style is a change that names what must be bought; no filtration in place of some fails.',
+      reads: ['filtration'],
+      uses: ['tank.filtration'],
+      failLabel: 'without a place for filtration',
+      judge: judgeFiltration,
     }),
     rule('return-pump', {
       label: 'Return pump',

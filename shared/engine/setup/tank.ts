@@ -153,7 +153,7 @@ export function resolveTank(
   const bottomMm = readNumber(specs, 'bottomMm') ?? assume('tank.bottomMm', size.wallMm)
   const choose = <T extends string>(key: string, fallback: T): T =>
     (readText(specs, key) as T | undefined) ?? assume(`tank.${key}`, fallback)
-  const material = choose('material', 'glass' as TankPlan['material'])
+  const material = choose('material', 'glass')
   const insideLengthMm = size.outerLengthMm - 2 * size.wallMm
   const insideWidthMm = size.outerWidthMm - 2 * size.wallMm
   const insideHeightMm = size.outerHeightMm - bottomMm
@@ -180,12 +180,14 @@ export function resolveTank(
   const displayWidthMm = readNumber(specs, 'displayWidthMm') ?? assume('tank.displayWidthMm', insideWidthMm - widest)
   const includedPump = readGroup<IncludedPump>(specs, 'includedPump')
   const dims = specs['outerLengthMm'] ?? specs['chambers']
+  const returnBoreMm = readNumber(specs, 'returnBoreMm')
+  const dryMassKg = readNumber(specs, 'dryMassKg')
   const optional = {
     ...(input.gear && { gear: input.gear }),
     ...(dims?.plusMinus !== undefined && { plusMinus: dims.plusMinus }),
     ...(includedPump && { includedPump }),
-    ...(readNumber(specs, 'returnBoreMm') !== undefined && { returnBoreMm: readNumber(specs, 'returnBoreMm')! }),
-    ...(readNumber(specs, 'dryMassKg') !== undefined && { dryMassKg: readNumber(specs, 'dryMassKg')! }),
+    ...(returnBoreMm !== undefined && { returnBoreMm }),
+    ...(dryMassKg !== undefined && { dryMassKg }),
   }
   return {
     ...size,
@@ -193,8 +195,8 @@ export function resolveTank(
     bottomMm,
     source: dims?.source ?? 'estimate',
     material,
-    rim: choose('rim', 'rimless' as TankPlan['rim']),
-    lid: choose('lid', 'none' as TankPlan['lid']),
+    rim: choose('rim', 'rimless'),
+    lid: choose('lid', 'none'),
     shape: choose('shape', 'rectangle'),
     filtration,
     insideLengthMm,

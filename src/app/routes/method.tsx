@@ -1,16 +1,12 @@
-import { getRules, hasOwnRules } from '#shared/engine/checks/index'
+import { getRules } from '#shared/engine/checks/index'
 import { getKind, kindKeys } from '#shared/kinds/index'
 import { CautionBox } from '../../components/ui/caution-box'
-import { Disclosure } from '../../components/ui/disclosure'
 import { paths } from '../../config/paths'
 import { DefaultTable } from '../../features/method/components/default-table'
 import { RuleTable } from '../../features/method/components/rule-table'
 import { ThresholdTable } from '../../features/method/components/threshold-table'
 import { VerdictTable } from '../../features/method/components/verdict-table'
 import type { Page } from '../page-route'
-
-const judged = kindKeys.filter(hasOwnRules)
-const others = kindKeys.filter((kind) => !hasOwnRules(kind))
 
 function MethodPage() {
   return (
@@ -25,7 +21,7 @@ function MethodPage() {
       </section>
       <section className="mt-12">
         <h2>Checks, kind by kind</h2>
-        {judged.map((kind) => (
+        {kindKeys.map((kind) => (
           <section key={kind} id={kind} className="mt-6">
             <h3 className="font-heading text-lg font-bold first-letter:uppercase">{getKind(kind).plural}</h3>
             <div className="mt-2">
@@ -33,30 +29,6 @@ function MethodPage() {
             </div>
           </section>
         ))}
-        <h3 className="mt-8 font-heading text-lg font-bold">Kinds whose own rules are on the way</h3>
-        <p className="mt-1 max-w-prose">
-          Until then they answer through the general checks alone, and each answer says so.
-        </p>
-        <div className="mt-2">
-          {others.map((kind) => (
-            <Disclosure
-              key={kind}
-              id={kind}
-              summary={
-                <>
-                  {getKind(kind).plural}{' '}
-                  <span className="font-mono font-normal text-ink-soft">{getRules(kind).rules.length}</span>
-                </>
-              }
-            >
-              {getRules(kind).rules.length > 0 ? (
-                <RuleTable kind={kind} rules={getRules(kind).rules} />
-              ) : (
-                <p>No general check applies to them either.</p>
-              )}
-            </Disclosure>
-          ))}
-        </div>
       </section>
       <section className="mt-12">
         <h2>Numbers that decide</h2>

@@ -1,0 +1,105 @@
+import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
+import type { Scene } from '../scene'
+import { thresholds } from '../thresholds'
+import { isWithinMm, readNumber } from '../values'
+import { createRuleMaker } from './build-rule'
+
+function judgeTube({ plan }: Scene, { piece }: Candidate): Judgement {
+  const tube = readNumber(piece.specs, 'tubeLengthMm')
+  if (tube === undefined) return lacking(['tubeLengthMm'], () => 'Nobody has recorded the length of its tube.')
+  const neededMm = plan.tank.outerHeightMm - thresholds.siphonDryMm.value
+  const reaches = isWithinMm(neededMm, tube)
+  return {
+    outcome: reaches ? 'pass' : 'change',
+    measured: tube,
+    limit: neededMm,
+    say: (words) =>
+      reaches
+        ? 'Its tube reaches the sand.'
+        : `Its tube is ${words.length(neededMm - tube)} short of the sand with a dry hand.`,
+  }
+}
+
+function judgeHose({ plan }: Scene, { piece }: Candidate): Judgement {
+  const tube = readNumber(piece.specs, 'tubeLengthMm')
+  const hose = readNumber(piece.specs, 'hoseLengthMm')
+  const missing = [...(tube === undefined ? ['tubeLengthMm'] : []), ...(hose === undefined ? ['hoseLengthMm'] : [])]
+  if (tube === undefined || hose === undefined)
+    return lacking(missing, () => 'Nobody has recorded the length of its hose.')
+  const neededMm = plan.room.tankTopMm + plan.tank.outerHeightMm
+  const reaches = isWithinMm(neededMm, tube + hose)
+  return {
+    outcome: reaches ? 'pass' : 'change',
+    measured: tube + hose,
+    limit: neededMm,
+    say: (words) =>
+      reaches
+        ? 'Tube and hose reach from the sand over the rim to a bucket on the floor.'
+        : `Tube and hose are ${words.length(neededMm - tube - hose)} short of a bucket on the floor.`,
+  }
+}
+
+const siphonRule = createRuleMaker('siphon')
+
+export const siphonRules: KindRules = {
+  rules: [
+    siphonRule('reach', {
+      label: 'Tube',
+      worst: 'change',
+      unit: 'mm',
+      limitIs: 'least',
+      rule: `The tube as long as the tank is high, less ${thresholds.siphonDryMm.value} mm.`,
+      reads: ['tubeLengthMm'],
+      uses: ['tank.outerHeightMm'],
+      failLabel: 'too short',
+      judge: judgeTube,
+    }),
+    siphonRule('hose', {
+      label: 'Hose',
+      worst: 'change',
+      unit: 'mm',
+      limitIs: 'least',
+      rule: 'Tube and hose from the sand over the rim to the floor: the height of the tank’s top edge and of the tank.',
+      reads: ['tubeLengthMm', 'hoseLengthMm'],
+      uses: ['room.tankTopMm', 'tank.outerHeightMm'],
+      failLabel: 'too short',
+      judge: judgeHose,
+    }),
+  ],
+  feltThrough: [],
+}
+
+function judgeSize({ plan }: Scene, { piece }: Candidate): Judgement {
+  const opening = readNumber(piece.specs, 'openingMm')
+  if (opening === undefined) return lacking(['openingMm'], () => 'Nobody has recorded the size of its opening.')
+  const limitMm = plan.tank.displayWidthMm * thresholds.netShare.value
+  const fits = isWithinMm(opening, limitMm)
+  return {
+    outcome: fits ? 'pass' : 'change',
+    measured: opening,
+    limit: limitMm,
+    cautions: [() => 'Two or three nets make catching easier on the animals.'],
+    say: (words) =>
+      fits
+        ? 'Leaves room to turn in the display.'
+        : `Wider than half the display (${words.length(limitMm)}): hard to turn in it.`,
+  }
+}
+
+const netRule = createRuleMaker('net')
+
+export const netRules: KindRules = {
+  rules: [
+    netRule('size', {
+      label: 'Opening',
+      worst: 'change',
+      unit: 'mm',
+      rule: 'The opening at most half as wide as the display.',
+      reads: ['openingMm'],
+      uses: ['tank.displayWidthMm'],
+      failLabel: 'too wide',
+      judge: judgeSize,
+    }),
+  ],
+  feltThrough: [],
+}
