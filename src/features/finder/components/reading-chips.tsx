@@ -1,5 +1,6 @@
 import { useMemo } from 'react'
 import { readQuestion } from '#shared/engine/ask/read-question'
+import { kinds } from '#shared/kinds/index'
 import type { Finder } from '../hooks/use-finder'
 import { fieldId } from '../model/field-groups'
 
@@ -14,6 +15,7 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
   const question = useMemo(() => readQuestion(state.asked, printer.system), [state.asked, printer.system])
   if (state.asked === '') return null
   const { understood, ignored, filters } = question
+  const isOtherKind = question.kind !== null && question.kind !== state.kind
   const isFiltered = Object.keys(filters).length > 0
   // A chamber is one thing in a question, whichever of its sizes comes first.
   const groupOf = (path: string) => (/^tank\.chambers\.\d+\./.test(path) ? path.split('.').slice(0, 3).join('.') : path)
@@ -24,11 +26,15 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
           We read
         </li>
         {understood.map(({ text, meaning, path, start }) => {
-          const isChanged = path !== undefined && state.raw[path] !== question.fields[path]?.text
+          const isChanged =
+            path === undefined
+              ? isOtherKind && meaning.endsWith(kinds[question.kind ?? state.kind].label)
+              : state.raw[path] !== question.fields[path]?.text
+          const look = isChanged ? 'text-ink-soft line-through' : 'given'
           return (
             <li key={start}>
               {path === undefined ? (
-                <span className="given inline-flex min-h-7 items-center" title={`from “${text}”`}>
+                <span className={`inline-flex min-h-7 items-center ${look}`} title={`from “${text}”`}>
                   {meaning}
                 </span>
               ) : (
@@ -36,7 +42,7 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
                   href={`#${fieldId(path)}`}
                   role="button"
                   title={`from “${text}”`}
-                  className={`inline-flex min-h-7 items-center hover:text-action ${isChanged ? 'text-ink-soft line-through' : 'given'}`}
+                  className={`inline-flex min-h-7 items-center hover:text-action ${look}`}
                   onClick={(event) => {
                     event.preventDefault()
                     onEdit(groupOf(path), event.currentTarget)

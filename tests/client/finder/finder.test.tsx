@@ -1,0 +1,111 @@
+import { act, fireEvent, screen, waitFor, within } from '@testing-library/react'
+import { describe, expect, it } from 'vitest'
+import { createFakeServer, renderApp } from '../support/render-app'
+
+const setup =
+  'tank.volumeL=20%20gal&tank.chambers.0.id=rear-1&tank.chambers.0.lengthMm=4%20in&tank.chambers.0.widthMm=5%20in&tank.chambers.0.waterDepthMm=12%20in&room.coldestC=65%20%C2%B0F'
+const address = `/find?kind=heater&${setup}`
+
+const findShort = () => screen.findByText('Invented · Short 100')
+
+describe('the finder page', () => {
+  it('shows what fits, and announces how many do, do not, or cannot be judged', async () => {
+    renderApp(address, createFakeServer())
+    await findShort()
+    await screen.findByText('1 fit, 0 with changes, 1 do not fit, 1 lack data.')
+    expect(screen.getByText('without a recorded length')).toBeDefined()
+  })
+
+  it('asks nothing and shows an example while the tank is not described', async () => {
+    const server = createFakeServer()
+    renderApp('/find', server)
+    await screen.findByText(/Drawn as a 20 gal tank until you say/)
+    expect(server.calls).toEqual([])
+  })
+
+  it('applies a measure typed into the drawing: the address changes and new answers come', async () => {
+    const server = createFakeServer()
+    const view = renderApp(address, server)
+    await findShort()
+    fireEvent.click(screen.getAllByRole('button', { name: /rear chamber, water depth/i })[0]!)
+    const dialog = await screen.findByRole('dialog')
+    const field = within(dialog).getByLabelText('Chamber water depth')
+    fireEvent.change(field, { target: { value: '8' } })
+    expect(within(dialog).getByText('8 in = 203.2 mm')).toBeDefined()
+    fireEvent.submit(field.closest('form')!)
+    await screen.findByText(/0 fit, 0 with changes, 2 do not fit, 1 lack data/)
+    expect(view.address()).toContain('tank.chambers.0.waterDepthMm=8%20in')
+    expect(screen.queryByRole('dialog')).toBeNull()
+    expect(screen.getByText(/None of the 3 heaters fits/)).toBeDefined()
+  })
+
+  it('keeps a measure that cannot be read, says why, and changes nothing', async () => {
+    const view = renderApp(address, createFakeServer())
+    await findShort()
+    const before = view.address()
+    fireEvent.click(screen.getAllByRole('button', { name: /rear chamber, water depth/i })[0]!)
+    const dialog = await screen.findByRole('dialog')
+    const field = within(dialog).getByLabelText<HTMLInputElement>('Chamber water depth')
+    fireEvent.change(field, { target: { value: '12 gallons' } })
+    fireEvent.submit(field.closest('form')!)
+    await within(dialog).findByText(/is a volume; a length is expected/)
+    expect(field.value).toBe('12 gallons')
+    fireEvent.change(field, { target: { value: '40 ft' } })
+    // Far outside of what a chamber can be: said in the person's own unit.
+    await within(dialog).findByText(/outside of what this can be: .*in/)
+    expect(view.address()).toBe(before)
+  })
+
+  it('confirms an assumption with one press', async () => {
+    const view = renderApp(address, createFakeServer())
+    await findShort()
+    fireEvent.click(screen.getAllByRole('button', { name: /Humidity, 50%, assumed/ })[0]!)
+    fireEvent.click(within(await screen.findByRole('dialog')).getByRole('button', { name: 'Yes, 50%' }))
+    await waitFor(() => expect(view.address()).toContain('room.relativeHumidity=50%25'))
+    await screen.findByRole('button', { name: /Humidity, 50%, given/ })
+  })
+
+  it('opens the pieces that one check turned away', async () => {
+    const view = renderApp(address, createFakeServer())
+    await findShort()
+    const chip = screen.getByRole('link', { name: /too long/ })
+    fireEvent.click(chip)
+    await screen.findByText('Invented · Long 100')
+    expect(view.address()).toContain('show=no&check=heater.space')
+  })
+
+  it('picks a piece on the scales by keyboard and shows its answer beside them', async () => {
+    const view = renderApp(address, createFakeServer())
+    await findShort()
+    const scale = screen.getAllByRole('listbox', { name: /Length/ })[0]!
+    fireEvent.keyDown(scale, { key: 'End' })
+    await waitFor(() => expect(view.address()).toContain('picked=invented-long-100'))
+    const apart = await screen.findByRole('list', { name: 'The piece you picked' })
+    expect(within(apart).getByText(/Does not fit/)).toBeDefined()
+  })
+
+  it('names wrong fields of a link with what is allowed and still answers for the rest', async () => {
+    renderApp(`${address}&mains.volts=12`, createFakeServer())
+    await findShort()
+    const summary = screen.getByRole('alert')
+    expect(summary.textContent).toMatch(/Mains voltage: .*100, 120, 230/)
+  })
+
+  it('speaks in the other units at once when they are switched', async () => {
+    const { app } = renderApp(address, createFakeServer())
+    await findShort()
+    act(() => app.preferences.set({ system: 'metric' }))
+    await waitFor(() => expect(screen.getAllByText(/250 mm long/).length).toBeGreaterThan(0))
+    expect(screen.getAllByRole('button', { name: /water depth 305/i }).length).toBeGreaterThan(0)
+  })
+
+  it('says that the catalogue is away, keeps the setup, and answers by itself once it is back', async () => {
+    const server = createFakeServer()
+    server.setAway(true)
+    const view = renderApp(address, server)
+    await screen.findByText('The catalogue cannot be reached just now')
+    expect(view.address()).toBe(address)
+    server.setAway(false)
+    await waitFor(() => screen.getByText('Invented · Short 100'), { timeout: 8_000 })
+  })
+})
