@@ -34,7 +34,7 @@ function sort(pieces: readonly Piece[], keys: readonly string[], byGear: boolean
  */
 export function classify(pieces: readonly Piece[], key: string, reads: readonly string[], byGear = false): Classes {
   let byKey = known.get(pieces)
-  if (!byKey) known.set(pieces, (byKey = new Map()))
+  if (!byKey) known.set(pieces, (byKey = new Map<string, Classes>()))
   let classes = byKey.get(key)
   if (!classes) byKey.set(key, (classes = sort(pieces, reads, byGear)))
   return classes

@@ -54,9 +54,7 @@ function deriveScale(
   const list = [...readings.values()]
   const { unit } = rule
   if (unit === null || list.length < 2) return undefined
-  const ends = list.map(
-    ({ limit }) => (typeof limit === 'number' ? [limit, limit] : limit),
-  )
+  const ends = list.map(({ limit }) => (typeof limit === 'number' ? [limit, limit] : limit))
   const hasOneLimit = isAlike(ends.map(([low]) => low)) && isAlike(ends.map(([, high]) => high))
   const hasOneMeasure =
     isAlike(list.map(({ measured }) => measured)) && list.every(({ limit }) => typeof limit === 'number')

@@ -85,7 +85,7 @@ const keepSpills = () => new WeakMap<Specs, Map<string, number>>()
 
 function remember<T>(kept: WeakMap<Specs, Map<string, T>>, specs: Specs, key: string, compute: () => T): T {
   let byKey = kept.get(specs)
-  if (!byKey) kept.set(specs, (byKey = new Map()))
+  if (!byKey) kept.set(specs, (byKey = new Map<string, T>()))
   let known = byKey.get(key)
   if (known === undefined) byKey.set(key, (known = compute()))
   return known
