@@ -49,9 +49,14 @@ export function presentCheck(judged: Judged, words: Printer): Check {
   }
 }
 
-/** The cautions of all checks, each once. */
+/** The cautions of all checks, each once; one that turns out to have nothing to say is left out. */
 export const presentCautions = (judged: readonly Judged[], words: Printer): readonly string[] => [
-  ...new Set(judged.flatMap(({ judgement }) => judgement.cautions ?? []).map((say) => say(words))),
+  ...new Set(
+    judged
+      .flatMap(({ judgement }) => judgement.cautions ?? [])
+      .map((say) => say(words))
+      .filter((caution) => caution !== ''),
+  ),
 ]
 
 function presentItem({ item, judged, verdict, placement }: AssessedItem, words: Printer): ItemReport {

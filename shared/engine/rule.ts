@@ -30,6 +30,7 @@ export interface Judgement {
   readonly rests?: () => readonly string[]
   /** So many of this piece would do where one does not. */
   readonly enough?: number
+  /** Things worth knowing that change no verdict; one that says nothing is left out. */
   readonly cautions?: readonly Say[]
 }
 

@@ -133,6 +133,15 @@ const warnStuckOn =
     return `If ${isAlone ? 'it sticks' : 'all heaters stick'} on with the room at ${room}, the water goes to ${words.temperature(equilibriumC)}${passing}. A second, independent cut-off is advised.`
   }
 
+/** Said only where the water gets warm by itself; told by whoever reads the cautions, since it takes a search. */
+const warnHot =
+  (scene: Scene): Say =>
+  (words) => {
+    const hotC = once(scene, findUnheatedC)
+    if (hotC <= thresholds.chillerFromC.value) return ''
+    return `With the room at ${words.temperature(scene.plan.room.warmestC)} the water settles near ${words.temperature(hotC)} without any heater: it needs a fan or a chiller.`
+  }
+
 function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
@@ -145,21 +154,13 @@ function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement 
   const hasCutOff = otherControllers(scene).count > spoken
   const limit = hasCutOff ? changeW : passW
   const outcome = totalW <= limit ? 'pass' : totalW <= changeW ? 'change' : 'fail'
-  const hotC = once(scene, findUnheatedC)
-  const chill: Say[] =
-    hotC > thresholds.chillerFromC.value
-      ? [
-          (words) =>
-            `With the room at ${words.temperature(scene.plan.room.warmestC)} the water settles near ${words.temperature(hotC)} without any heater: it needs a fan or a chiller.`,
-        ]
-      : []
   return {
     outcome,
     measured: totalW,
     limit,
     probability: () => probabilityAtMost(totalW, limit, uncertaintyW(power, quantity)),
     ...(outcome === 'change' && { asks: { need: 'second-cut-off', amount: null, unit: null } }),
-    cautions: [warnStuckOn(scene, totalW, totalW === power.value), ...chill],
+    cautions: [warnStuckOn(scene, totalW, totalW === power.value), warnHot(scene)],
     say: (words) =>
       outcome === 'pass'
         ? `Not too strong for ${words.volume(scene.plan.tank.waterL)}.`
