@@ -68,7 +68,8 @@ export function chooseHeightMm(specs: Specs): number {
   return standsOnRim ? defaults.legsHeightMm : defaults.mountHeightMm
 }
 
-function describeScene({ plan }: Scene, specs: Specs, count: number, heightMm: number): LightScene {
+/** So many of a light over the display, the plane half way down. The light must lack nothing of `listMissing`. */
+export function describeLightScene({ plan }: Scene, specs: Specs, count: number, heightMm: number): LightScene {
   const { tank } = plan
   return {
     lamp: describeLamp(specs),
@@ -100,7 +101,7 @@ export function lightPlane(
   band: readonly [number, number],
 ): Plane {
   return remember(once(scene, keepPlanes), specs, `${count} ${heightMm} ${band.join(' ')}`, () => {
-    const map = mapLight(describeScene(scene, specs, count, heightMm))
+    const map = mapLight(describeLightScene(scene, specs, count, heightMm))
     const { brightestUmol, lowestUmol, meanUmol } = summariseMap(map)
     const best = findBestDimming(map, band)
     return {
@@ -119,12 +120,16 @@ export function lightPlane(
 /** Share of the photons that miss the water. */
 export const findSpill = (scene: Scene, specs: Specs, count: number, heightMm: number): number =>
   remember(once(scene, keepSpills), specs, `${count} ${heightMm}`, () =>
-    shareSpilled(describeScene(scene, specs, count, heightMm)),
+    shareSpilled(describeLightScene(scene, specs, count, heightMm)),
   )
 
 /** The height that brings the spill under the threshold, mm, or null. */
 export const findLowerMm = (scene: Scene, specs: Specs, count: number, heightMm: number): number | null =>
-  findHeightForSpillMm(describeScene(scene, specs, count, heightMm), thresholds.lightSpill.value, defaults.lowestLensMm)
+  findHeightForSpillMm(
+    describeLightScene(scene, specs, count, heightMm),
+    thresholds.lightSpill.value,
+    defaults.lowestLensMm,
+  )
 
 /** Whether the light can be dimmed; unknown where nobody recorded it. */
 export const isDimmable = (specs: Specs): boolean | undefined => readFlag(specs, 'dimmable')

@@ -1,10 +1,13 @@
-import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import { lacking, type Candidate, type Judgement, type KindRules, type Rule, type Say } from '../rule'
 import { type Scene } from '../scene'
+import type { Basin } from '../setup/places'
 import { practiceBasis, thresholds } from '../thresholds'
 import type { Value } from '../types'
 import { readFlag, readMeasure, readNumber } from '../values'
-import { chooseBasin, describeBody, listBodySizes, tryBody, type BodyFit } from './body-space'
-import { chooseBands, findPumpBasins, findTurnover, readCurve } from './pump-flow'
+import { bodyUses, judgeBody, lackWater } from './body-judgement'
+import { chooseBasin, tryBody, type BodyFit } from './body-space'
+import { chooseBands, findPumpBasins, findTurnover, readCurve, type Turnover } from './pump-flow'
+import { hasAreas, noAreas, waterUses } from './shape'
 
 /** The roomiest place for the pump, or what its size lacks. */
 function place(scene: Scene, candidate: Candidate): BodyFit | readonly string[] | undefined {
@@ -30,53 +33,70 @@ function place(scene: Scene, candidate: Candidate): BodyFit | readonly string[] 
 const isFit = (found: BodyFit | readonly string[] | undefined): found is BodyFit =>
   found !== undefined && 'basin' in found
 
+/** The water that the pump is judged in: where it fits best, else where it would go; undefined where there is none. */
+export function choosePumpBasin(scene: Scene, candidate: Candidate): Basin | undefined {
+  const found = place(scene, candidate)
+  return isFit(found) ? found.basin : findPumpBasins(scene, candidate)[0]
+}
+
 function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   const found = place(scene, candidate)
-  if (found === undefined) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
+  if (found === undefined) return lackWater(candidate.place)
   if (!isFit(found)) return lacking(found, () => 'Nobody has recorded its outside size yet.')
-  const cautions = found.basin.id === 'display' ? [() => 'No chamber or sump for it: it stands in the display.'] : []
-  return {
-    outcome: found.fits ? 'pass' : 'fail',
-    measured: found.measuredMm,
-    limit: found.limitMm,
-    probability: found.probability,
-    ...(found.fits && { placement: { chamber: found.basin.id, position: 'upright' as const, angleDeg: 90 } }),
-    rests: () => listBodySizes(found),
-    cautions,
-    say: describeBody(found),
-  }
+  return judgeBody(found, scene.plan)
 }
+
+type Bands = ReturnType<typeof chooseBands>
+
+/** The turnover to judge by: as much of the wanted band as the speed control reaches. */
+function findJudged({ perHour, slowestPerHour }: Turnover, { pass }: Bands, isControlled: boolean): number {
+  return isControlled && perHour > pass[1] ? Math.max(slowestPerHour, pass[1]) : perHour
+}
+
+const isWithin = (value: number, [low, high]: readonly [number, number]) => value >= low && value <= high
+
+const decide = (judged: number, { pass, change }: Bands) =>
+  isWithin(judged, pass) ? 'pass' : isWithin(judged, change) ? 'change' : 'fail'
+
+const sayTurnover =
+  (turnover: Turnover, judged: number, bands: Bands): Say =>
+  (words) => {
+    const { perHour, point } = turnover
+    const wanted = words.pair(bands.pass, '/h')
+    const times = (value: number) => `${words.number(value, '/h')} times the water an hour`
+    const against = point.headM > 0 ? ` against ${words.measure(point.headM, 'm')} of head` : ''
+    const flow = `${words.flow(point.flowLph)}${against}, ${times(perHour)}`
+    const outcome = decide(judged, bands)
+    if (outcome === 'pass')
+      return judged < perHour ? `${flow}; its speed control brings that down to the ${wanted} wanted.` : `${flow}.`
+    if (judged < bands.pass[0])
+      return `${outcome === 'change' ? 'Low' : 'Too weak'}: ${flow}; ${wanted} are wanted.`
+    const slowest = judged < perHour ? `, and still ${words.number(judged, '/h')} at its slowest` : ''
+    return `${outcome === 'change' ? 'Throttle it' : 'Far too strong'}: ${flow}${slowest}; ${wanted} are wanted.`
+  }
 
 function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
   if (!readCurve(specs)) return lacking(['flowCurve'], () => 'Nobody has recorded how its flow falls with height yet.')
-  const found = place(scene, candidate)
-  const basin = isFit(found) ? found.basin : findPumpBasins(scene, candidate)[0]
-  const isControlled = readFlag(specs, 'dcControl') ?? false
-  const turnover = basin && findTurnover(scene, candidate, basin, isControlled)
-  if (!turnover) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
-  const { pass, change } = chooseBands(scene)
-  const { perHour, slowestPerHour, point } = turnover
-  const isThrottled = perHour > pass[1] && isControlled
-  const judged = isThrottled ? Math.max(slowestPerHour, Math.min(perHour, pass[1])) : perHour
-  const outcome =
-    judged >= pass[0] && judged <= pass[1] ? 'pass' : judged >= change[0] && judged <= change[1] ? 'change' : 'fail'
-  return {
-    outcome,
-    measured: judged,
-    limit: pass,
-    say: (words) => {
-      const [low, high] = pass.map((value) => words.number(value, '/h'))
-      const flow = `${words.flow(point.flowLph)} against ${words.measure(point.headM, 'm')} of head, ${words.number(perHour, '/h')} times the water an hour`
-      if (outcome === 'pass')
-        return isThrottled
-          ? `${flow} at full speed; its speed control brings it down to what is wanted, ${low} to ${high}.`
-          : `${flow}.`
-      const wanted = `${low} to ${high} are wanted`
-      if (judged < pass[0]) return outcome === 'change' ? `Low: ${flow}; ${wanted}.` : `Too weak: ${flow}; ${wanted}.`
-      return outcome === 'change' ? `Throttle it: ${flow}; ${wanted}.` : `Far too strong: ${flow}; ${wanted}.`
-    },
+  const basin = choosePumpBasin(scene, candidate)
+  if (!basin) return lackWater(candidate.place)
+  if (!hasAreas(scene.plan)) return noAreas(scene.plan)
+  const bands = chooseBands(scene)
+  const judgeAs = (isControlled: boolean): Judgement | null => {
+    const turnover = findTurnover(scene, candidate, basin, isControlled)
+    if (!turnover) return null
+    const judged = findJudged(turnover, bands, isControlled)
+    const say = sayTurnover(turnover, judged, bands)
+    return { outcome: decide(judged, bands), measured: judged, limit: bands.pass, say }
   }
+  const isControlled = readFlag(specs, 'dcControl')
+  const plain = judgeAs(isControlled ?? false)
+  if (!plain) return lacking(['flowCurve'], () => 'Its flow curve has too few points.')
+  if (isControlled !== undefined || judgeAs(true)?.outcome === plain.outcome) return plain
+  return lacking(
+    ['dcControl'],
+    (words) => `${plain.say(words)} Nobody has recorded whether its speed can be set lower.`,
+  )
 }
 
 function judgeBore({ plan }: Scene, { piece }: Candidate): Judgement | null {
@@ -118,12 +138,9 @@ export const returnPumpRules: KindRules = {
         uses: [
           'goals.turnoverPerHour',
           'room.tankTopMm',
-          'tank.waterLineMm',
-          'tank.outerHeightMm',
-          'tank.sump.waterDepthMm',
           'tank.chambers.*.waterDepthMm',
-          'tank.outerLengthMm',
-          'tank.outerWidthMm',
+          ...waterUses,
+          'tank.bottomMm',
         ],
         failLabel: 'too weak or far too strong',
         judge: judgeFlow,
@@ -140,17 +157,7 @@ export const returnPumpRules: KindRules = {
       unit: 'mm',
       rule: `Its body in the chamber with what else is there, ${thresholds.pumpClearanceMm.value} mm to each side, and under the water its maker asks for, else ${thresholds.pumpCoverMm.value} mm above it.`,
       reads: bodyReads,
-      uses: [
-        'tank.chambers.*.lengthMm',
-        'tank.chambers.*.widthMm',
-        'tank.chambers.*.waterDepthMm',
-        'tank.sump.lengthMm',
-        'tank.sump.widthMm',
-        'tank.sump.waterDepthMm',
-        'tank.displayLengthMm',
-        'tank.displayWidthMm',
-        'tank.waterLineMm',
-      ],
+      uses: bodyUses,
       failLabel: 'too large for the place',
       judge: judgeSpace,
     }),
@@ -167,8 +174,7 @@ export const returnPumpRules: KindRules = {
   ],
   targetReads: ['flowCurve', 'boreMm', 'dcControl', ...bodyReads],
   target: (scene, candidate) => {
-    const found = place(scene, candidate)
-    const basin = isFit(found) ? found.basin : findPumpBasins(scene, candidate)[0]
+    const basin = choosePumpBasin(scene, candidate)
     const isControlled = readFlag(candidate.piece.specs, 'dcControl') ?? false
     const turnover = basin ? findTurnover(scene, candidate, basin, isControlled) : null
     if (!turnover) return null

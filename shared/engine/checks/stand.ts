@@ -3,18 +3,15 @@ import type { Scene } from '../scene'
 import { practiceBasis } from '../thresholds'
 import type { Value } from '../types'
 import { readMeasure } from '../values'
-import { compareFootprints, describeFootprint, massBasis, rateStand } from './support'
+import { displayUses, hasAreas, noAreas } from './shape'
+import { compareFootprints, describeFootprint, isMadeForTank, massBasis, rateStand } from './support'
+import { findTankSize } from './tank-size'
 
 /** The setup's tank as it stands on something: its outside size with where that comes from. */
-function measureTank({ plan }: Scene): readonly [Value<number>, Value<number>] {
-  const { tank } = plan
-  const size = (value: number): Value<number> => ({
-    value,
-    source: tank.source,
-    ...(tank.plusMinus !== undefined && { plusMinus: tank.plusMinus }),
-  })
-  return [size(tank.outerLengthMm), size(tank.outerWidthMm)]
-}
+export const measureTank = ({ plan }: Scene): readonly [Value<number>, Value<number>] => [
+  findTankSize(plan, 'outerLengthMm'),
+  findTankSize(plan, 'outerWidthMm'),
+]
 
 function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement {
   const length = readMeasure(piece.specs, 'topLengthMm')
@@ -28,6 +25,13 @@ function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement {
       : []
   const found = describeFootprint(compared, 'stand')
   return { ...found, cautions: [...(found.cautions ?? []), ...level] }
+}
+
+/** The filled weight follows from areas; a stand that is made for this very tank holds it whatever it weighs. */
+function judgeLoad({ plan }: Scene, { piece }: Candidate): Judgement {
+  if (hasAreas(plan)) return rateStand(piece.specs, plan, ['loadRatingKg'])
+  if (!isMadeForTank(piece.specs, plan)) return noAreas(plan)
+  return { outcome: 'pass', say: () => 'The stand is made for this tank.' }
 }
 
 const rule = (check: string, parts: Omit<Rule, 'id' | 'worst'>): Rule => ({
@@ -44,7 +48,7 @@ export const standRules: KindRules = {
       basis: practiceBasis,
       rule: 'The top is at least as long and as wide as the tank, turned by 90° if need be; far larger is a caution.',
       reads: ['topLengthMm', 'topWidthMm'],
-      uses: ['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.rim'],
+      uses: ['tank.outerLengthMm', 'tank.outerWidthMm'],
       failLabel: 'too small for the tank',
       judge: judgeFootprint,
     }),
@@ -58,16 +62,15 @@ export const standRules: KindRules = {
         'goals.rockKg',
         'goals.sandDepthMm',
         'tank.waterLineMm',
-        'tank.outerLengthMm',
-        'tank.outerWidthMm',
         'tank.outerHeightMm',
-        'tank.wallMm',
         'tank.bottomMm',
         'tank.material',
+        ...displayUses,
         'goals.salinityPpt',
+        'goals.temperatureC',
       ],
       failLabel: 'rated for less weight',
-      judge: ({ plan }, { piece }) => rateStand(piece.specs, plan, ['loadRatingKg']),
+      judge: judgeLoad,
     }),
   ],
   targetReads: ['topLengthMm', 'topWidthMm'],

@@ -3,7 +3,7 @@ import type { Judgement, Say } from '../rule'
 import type { Plan } from '../setup/plan'
 import { thresholds } from '../thresholds'
 import type { Basis, Specs, Value } from '../types'
-import { isWithinMm, readMeasure, readNumber } from '../values'
+import { isWithinMm, readMeasure, readNumber, readSet } from '../values'
 import { weighFilled } from '../weight-budget'
 
 export const massBasis: Basis = {
@@ -21,11 +21,15 @@ export interface Footprints {
   readonly widestMm: number
   readonly tankSide: Value<number>
   readonly topSide: Value<number>
+  /** Along the top's length and across it, mm; negative: so much too small. */
+  readonly sparesMm: readonly [number, number]
+  /** The tank's length lies across the top. */
+  readonly isTurned: boolean
 }
 
 /** A tank on a top, in the orientation with the most to spare at its tighter side; as it stands where that fits. */
 export function compareFootprints(tank: Sides, top: Sides): Footprints {
-  const way = (length: Value<number>, width: Value<number>): Footprints => {
+  const way = (length: Value<number>, width: Value<number>, isTurned: boolean): Footprints => {
     const spares = [top[0].value - length.value, top[1].value - width.value] as const
     const isLengthTight = spares[0] <= spares[1]
     return {
@@ -33,10 +37,12 @@ export function compareFootprints(tank: Sides, top: Sides): Footprints {
       widestMm: Math.max(...spares),
       tankSide: isLengthTight ? length : width,
       topSide: isLengthTight ? top[0] : top[1],
+      sparesMm: spares,
+      isTurned,
     }
   }
-  const straight = way(tank[0], tank[1])
-  const turned = way(tank[1], tank[0])
+  const straight = way(tank[0], tank[1], false)
+  const turned = way(tank[1], tank[0], true)
   return isWithinMm(0, straight.spareMm) || straight.spareMm >= turned.spareMm ? straight : turned
 }
 
@@ -48,7 +54,7 @@ export function describeFootprint({ spareMm, widestMm, tankSide, topSide }: Foot
     fits && widestMm > thresholds.standOverhangMm.value
       ? [
           (words) =>
-            `The ${name} is ${words.length(widestMm)} larger than the tank: see that the weight stands over its legs or sides.`,
+            `The top of the ${name} is ${words.length(widestMm)} larger than the tank: see that the weight stands over its legs or sides.`,
         ]
       : []
   return {
@@ -69,11 +75,14 @@ export function describeFootprint({ spareMm, widestMm, tankSide, topSide }: Foot
 export const warnWeight =
   (totalKg: number): Say =>
   (words) =>
-    `Filled it weighs about ${words.mass(totalKg)}: a structural engineer and local building rules decide for anything large or upstairs.`
+    `Filled, the tank weighs about ${words.mass(totalKg)}: a structural engineer and local building rules decide for anything large or upstairs.`
+
+/** Whether its maker names the setup's tank among those that the stand is made for. */
+export const isMadeForTank = (stand: Specs, { tank }: Plan): boolean =>
+  tank.gear !== undefined && (readSet<string>(stand, 'madeForTanks') ?? []).includes(tank.gear.slug)
 
 function readMadeFor(stand: Specs, filled: Plan): 'tank' | 'volume' | null {
-  const named: unknown = stand['madeForTanks']?.value
-  if (filled.tank.gear && Array.isArray(named) && named.includes(filled.tank.gear.slug)) return 'tank'
+  if (isMadeForTank(stand, filled)) return 'tank'
   const madeForL = readNumber(stand, 'madeForVolumeL')
   const heldKg = madeForL === undefined ? 0 : madeForL * thresholds.standKgPerRatedL.value
   return heldKg >= weighFilled(filled).totalKg ? 'volume' : null
@@ -93,7 +102,9 @@ export function rateStand(stand: Specs, filled: Plan, missing: readonly string[]
       limit: rating.value,
       probability: () => probabilityAtLeast(rating.value, totalKg, uncertainty),
       say: (words) =>
-        `Filled the tank weighs ${words.mass(totalKg)}${isHeld ? '; the stand is rated for' : ', more than the stand is rated for:'} ${words.mass(rating.value)}.`,
+        isHeld
+          ? `Filled, the tank weighs ${words.mass(totalKg)}; the stand is rated for ${words.mass(rating.value)}.`
+          : `Filled, the tank weighs ${words.mass(totalKg)}, and the stand is rated for only ${words.mass(rating.value)}.`,
     }
   }
   const madeFor = readMadeFor(stand, filled)
@@ -103,7 +114,7 @@ export function rateStand(stand: Specs, filled: Plan, missing: readonly string[]
       outcome: 'pass',
       cautions: [...base.cautions, () => 'The stand states no load rating; what it is made for was taken instead.'],
       say: (words) =>
-        `Filled the tank weighs ${words.mass(totalKg)}, and the stand is made for ${madeFor === 'tank' ? 'this tank' : `tanks of ${words.volume(readNumber(stand, 'madeForVolumeL') ?? 0)}`}.`,
+        `Filled, the tank weighs ${words.mass(totalKg)}, and the stand is made for ${madeFor === 'tank' ? 'this tank' : `tanks of ${words.volume(readNumber(stand, 'madeForVolumeL') ?? 0)}`}.`,
     }
   return {
     ...base,
