@@ -112,6 +112,9 @@ export function drawScales(
   )
   const derived = rules
     .flatMap((rule) => {
+      const judged = drawn.flatMap((index) => judgedOf.get(index)?.get(rule.id) ?? [])
+      // A check that every candidate passes and that fails nobody tells them apart by nothing.
+      if (rule.worst === 'change' && judged.every(({ outcome }) => outcome === 'pass')) return []
       const readings = new Map(
         drawn.flatMap((index) => {
           const reading = readJudged(judgedOf.get(index)?.get(rule.id))
