@@ -58,6 +58,7 @@ export function texts(key: string, label: string, maxLength: number, extras: Ext
 interface GroupExtras extends Extras {
   readonly fields: readonly Attribute[]
   readonly required: readonly string[]
+  readonly phrase?: string
 }
 
 /** One object stored as one value. */

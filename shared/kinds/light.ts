@@ -86,6 +86,7 @@ export const light: Kind = {
       guide: 'Shares of photons by wavelength band, from its maker’s plot or a spectrometer.',
       fields: bandFields,
       required: ['fromNm', 'toNm', 'share'],
+      phrase: '{share} from {fromNm} to {toNm}',
     }),
     set('mountsIncluded', 'mounts included', mountTypes, { role: 'check' }),
     set('mountsPossible', 'mounts sold apart', mountTypes, { role: 'check' }),

@@ -30,6 +30,7 @@ export const returnPump: Kind = {
       guide: 'At least two points: flow at no head, and the head at which flow ends.',
       fields: curveFields,
       required: ['headM', 'flowLph'],
+      phrase: '{flowLph} at {headM}',
     }),
     measure('boreMm', 'bore', 'mm', {
       plausible: [3, 110],

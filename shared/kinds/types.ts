@@ -66,6 +66,8 @@ export interface GroupAttribute extends AttributeBase {
   readonly type: 'group'
   readonly many: boolean
   readonly fields: readonly Attribute[]
+  /** How one entry reads, fields by key: `{flowLph} at {headM}`. Absent: each field with its label. */
+  readonly phrase?: string
   /** Keys of `fields` that must be there. */
   readonly required: readonly string[]
 }

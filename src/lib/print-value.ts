@@ -7,9 +7,15 @@ function printOption(attribute: Attribute, value: unknown): string {
 }
 
 function printGroup(attribute: Attribute & { type: 'group' }, value: object, printer: Printer): string {
+  const entry = value as Record<string, unknown>
+  if (attribute.phrase !== undefined)
+    return attribute.phrase.replace(/\{(\w+)\}/g, (_, key: string) => {
+      const field = attribute.fields.find((one) => one.key === key)
+      return field && entry[key] !== undefined ? printValue(field, entry[key], printer) : '–'
+    })
   return attribute.fields
     .flatMap((field) => {
-      const inner = (value as Record<string, unknown>)[field.key]
+      const inner = entry[field.key]
       return inner === undefined || field.key === 'id' ? [] : [`${field.label} ${printValue(field, inner, printer)}`]
     })
     .join(', ')
