@@ -4,6 +4,7 @@ import { Disclosure } from '../../../components/ui/disclosure'
 import type { Finder } from '../hooks/use-finder'
 import { listAssumed } from '../model/assumed'
 import { fieldId } from '../model/field-groups'
+import { showTyped } from '../model/show-typed'
 import { ValueList, type ValueLine } from './value-list'
 
 export interface SetupValuesProps {
@@ -28,7 +29,7 @@ export function SetupValues({ finder, telling, onEdit }: SetupValuesProps) {
   const said = Object.entries(state.raw).flatMap(([path, text]): ValueLine[] => {
     const field = findSetupField(path)
     if (!field || !given.has(path) || isDrawn(path)) return []
-    return [{ path, label: labelSetupPath(path, plan), shown: text, href: hrefOf(path) }]
+    return [{ path, label: labelSetupPath(path, plan), shown: showTyped(field, text, printer), href: hrefOf(path) }]
   })
   const isTelling = telling.size > 0 ? telling : new Set(['room.coldestC', 'goals.temperatureC'])
   const assumed = listAssumed(plan, printer, isTelling)
