@@ -1,5 +1,7 @@
 import { fitCheck } from '#shared/engine/fit'
 import type { CandidateOptions } from '#shared/engine/candidates'
+import { createScene, type Scene } from '#shared/engine/scene'
+import { resolve } from '#shared/engine/setup/resolve'
 import type { KindKey } from '#shared/kinds/index'
 import type { Answer, Check, Item, Piece, Setup, Source, Specs } from '#shared/engine/types'
 
@@ -105,3 +107,9 @@ export const judgeOutcome = (setup: Setup, what: Piece, id: string, options: Can
 
 /** A sentence with ordinary spaces where it was kept from breaking. */
 export const toPlain = (text: string | undefined): string => (text ?? '').replaceAll('\u00a0', ' ')
+
+/** What a piece of a kind is judged against, without judging the rest of the setup. */
+export function sceneFor(setup: Setup, kind: KindKey): Scene {
+  const others = setup.items.filter(({ state, piece: what }) => state !== 'gone' && what.kind !== kind)
+  return createScene(resolve({ ...setup, items: others }), others)
+}

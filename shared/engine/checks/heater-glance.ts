@@ -19,6 +19,7 @@ const clearanceMm = 2 * thresholds.rodClearanceMm.value
 
 function findReach(scene: Scene): Reach {
   const basins = once(scene, findUsualBasins)
+  const mayHaveSump = scene.plan.assumed.has('tank.filtration') && scene.plan.tank.chambers.length === 0
   const mayGrow = (path: string) => scene.plan.assumed.has(path) && !path.endsWith('.heightMm')
   const most = (measure: (basin: (typeof basins)[number]) => number) => Math.max(...basins.map(measure))
   return {
@@ -32,13 +33,14 @@ function findReach(scene: Scene): Reach {
         heightMm,
         acrossMm: Math.min(lengthMm, widthMm),
       })),
-    most: basins.some((basin) => listBounds(basin).some(mayGrow))
-      ? null
-      : {
-          uprightMm: most(({ waterDepthMm }) => waterDepthMm),
-          flatMm: most(({ lengthMm, widthMm }) => Math.hypot(lengthMm - clearanceMm, widthMm - clearanceMm)),
-          leaningMm: most(({ lengthMm, widthMm, waterDepthMm }) => Math.hypot(lengthMm, widthMm, waterDepthMm)),
-        },
+    most:
+      mayHaveSump || basins.some((basin) => listBounds(basin).some(mayGrow))
+        ? null
+        : {
+            uprightMm: most(({ waterDepthMm }) => waterDepthMm),
+            flatMm: most(({ lengthMm, widthMm }) => Math.hypot(lengthMm - clearanceMm, widthMm - clearanceMm)),
+            leaningMm: most(({ lengthMm, widthMm, waterDepthMm }) => Math.hypot(lengthMm, widthMm, waterDepthMm)),
+          },
   }
 }
 

@@ -1,6 +1,6 @@
 import { lacking, type Candidate, type Judgement, type Rule } from '../rule'
 import { once, type Scene } from '../scene'
-import { findBasins } from '../setup/places'
+import { findBasins, type Basin } from '../setup/places'
 import type { Placement } from '../types'
 import { readMeasure, readText } from '../values'
 import { findUsualBasins, glanceAtSpace } from './heater-glance'
@@ -15,6 +15,10 @@ const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = 
 }
 
 const restsOnFiltration = () => ['tank.filtration']
+
+/** Without chambers, whether there is a sump decides which water it is. */
+const restsOnPlace = ({ plan }: Scene, { path }: Basin): readonly string[] =>
+  plan.tank.chambers.length === 0 && path !== 'tank.sump' ? ['tank.filtration'] : []
 
 function judgeInline({ plan }: Scene): Judgement {
   if (plan.tank.filtration === 'sump')
@@ -86,7 +90,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     ...(stand.tight !== 'company' && { measured: stand.measuredMm, limit: stand.limitMm }),
     probability: stand.probability,
     ...(stand.fits && { placement: stand.placement }),
-    rests: () => [...new Set(stands.flatMap(listSizes))],
+    rests: () => [...new Set([...stands.flatMap(listSizes), ...restsOnPlace(scene, stand.basin)])],
     say: describeStand(stand),
     cautions,
   }

@@ -1,0 +1,172 @@
+import fc from 'fast-check'
+import { describe, expect, it } from 'vitest'
+import { getRules, listRules } from '#shared/engine/checks/index'
+import { judge, type Judged } from '#shared/engine/judge'
+import type { Rule } from '#shared/engine/rule'
+import type { Scene } from '#shared/engine/scene'
+import type { Piece } from '#shared/engine/types'
+import { createPrinter } from '#shared/units/print'
+import { anyPiece, anySetup } from '../arbitraries'
+import { sceneFor } from '../build'
+
+const words = createPrinter('metric')
+
+/** What a judgement says, to compare two of them. */
+const tell = (judged: Judged | null) =>
+  judged && {
+    outcome: judged.outcome,
+    eitherWay: judged.eitherWay,
+    measured: judged.judgement.measured ?? null,
+    limit: judged.judgement.limit ?? null,
+    missing: judged.judgement.missing ?? [],
+    probability: judged.judgement.probability?.(),
+    says: judged.judgement.say(words),
+    cautions: (judged.judgement.cautions ?? []).map((say) => say(words)),
+    condition: judged.condition?.(),
+  }
+
+const judgeIn = (scene: Scene, rule: Rule, piece: Piece) =>
+  judge(scene, rule, { piece, quantity: 1, mayMultiply: true })
+
+const keep = ({ specs, ...piece }: Piece, isKept: (key: string) => boolean): Piece => ({
+  ...piece,
+  specs: Object.fromEntries(Object.entries(specs).filter(([key]) => isKept(key))),
+})
+
+/** Attributes whose absence a rule takes for something harmless, on purpose; each with why. */
+const harmless: Readonly<Record<string, readonly string[]>> = {
+  // No immersion stated: the whole rod has to be under water. No position stated: it must stand, and a caution says so.
+  // A form that is not known is a rod's.
+  'heater.space': ['minImmersionMm', 'orientation', 'form'],
+  // Not known to have a thermostat: a controller in the setup is not counted as a second cut-off.
+  'heater.not-too-strong': ['thermostat'],
+  // One end of a rating may be left out: one number is the maximum.
+  'heater.rated-volume': ['ratedVolumeMinL', 'ratedVolumeMaxL'],
+  // Asked for only where the heater has none of its own, and a controller has to carry it.
+  'heater.thermostat': ['powerW', 'plugs'],
+  // Fewer outlets of its own free fewer of the strip's.
+  'temperature-controller.plugs': ['outlets'],
+  // The nominal volume and the sizes stand in for each other; so does what the tank weighs dry.
+  'tank.volume': [
+    'nominalVolumeL',
+    'outerLengthMm',
+    'outerWidthMm',
+    'outerHeightMm',
+    'wallMm',
+    'waterLineMm',
+    'filtration',
+    'sump',
+    'shape',
+  ],
+  'tank.return-pump': ['includedPump', 'filtration', 'returnBoreMm'],
+  'tank.support-load': [
+    'dryMassKg',
+    'bottomMm',
+    'material',
+    'shape',
+    'displayLengthMm',
+    'displayWidthMm',
+    'chambers',
+    'filtration',
+    'sump',
+  ],
+  // Without a rating, what its maker says the stand is made for.
+  'stand.load': ['loadRatingKg', 'madeForTanks', 'madeForVolumeL'],
+  // Brightness on the axis and photon flux stand in for each other; a beam angle has a default, as an estimate.
+  'light.coverage': ['ppfdUmol', 'ppfdAtMm', 'photonFluxUmolS', 'beamAngleDeg'],
+  'light.intensity': ['ppfdUmol', 'ppfdAtMm', 'photonFluxUmolS', 'beamAngleDeg'],
+  // A lower end that nobody states is not judged.
+  'wavemaker.wall': ['wallMinMm'],
+  'scraper.wall': ['wallMinMm'],
+  'wavemaker.flow': ['flowMinLph'],
+  // Plastic and pads with a handle are safe on acrylic whatever else is stated.
+  'scraper.acrylic': ['acrylicSafe', 'blades'],
+  // Rated at 250 ppm where its maker does not say.
+  'ro-unit.output': ['testTdsPpm'],
+  // A form that nobody recorded is not held against a rock.
+  'rock.amount': ['form'],
+}
+
+const isHarmless = ({ id }: Rule, key: string) =>
+  (harmless[id]?.includes(key) ?? false) || key === 'plugType' || key === 'madeFor'
+
+/** These judge many setups over. */
+const patienceMs = 60_000
+
+describe('what a rule reads of a piece', () => {
+  it(
+    'is all that it says it reads',
+    () => {
+      fc.assert(
+        fc.property(anySetup, anyPiece, (setup, piece) => {
+          const scene = sceneFor(setup, piece.kind)
+          for (const rule of getRules(piece.kind).rules) {
+            const restricted = keep(piece, (key) => rule.reads.includes(key))
+            expect(tell(judgeIn(scene, rule, restricted)), rule.id).toEqual(tell(judgeIn(scene, rule, piece)))
+          }
+        }),
+        { numRuns: 120 },
+      )
+    },
+    patienceMs,
+  )
+
+  it(
+    'is not passed over where it is missing',
+    () => {
+      fc.assert(
+        fc.property(anySetup, anyPiece, (setup, piece) => {
+          const scene = sceneFor(setup, piece.kind)
+          for (const rule of getRules(piece.kind).rules)
+            for (const key of rule.reads.filter((one) => !isHarmless(rule, one))) {
+              const outcome = judgeIn(
+                scene,
+                rule,
+                keep(piece, (one) => one !== key),
+              )?.outcome
+              // It may be that nothing turns on it here; then it must not turn into a pass by being left out.
+              if (outcome === 'pass' && piece.specs[key]) expect(judgeIn(scene, rule, piece)?.outcome).toBe('pass')
+            }
+        }),
+        { numRuns: 120 },
+      )
+    },
+    patienceMs,
+  )
+
+  it(
+    'does not pass where nothing is recorded at all, unless the rule has nothing to ask',
+    () => {
+      fc.assert(
+        fc.property(anySetup, (setup) => {
+          for (const rule of listRules()) {
+            const kind = rule.id.split('.')[0] as Piece['kind']
+            const outcome = judgeIn(sceneFor(setup, kind), rule, { kind, specs: {} })?.outcome
+            // Where the setup has a return pump already, no tank needs to say more.
+            if (rule.id !== 'tank.return-pump') expect(outcome, rule.id).not.toBe('pass')
+          }
+        }),
+        { numRuns: 40 },
+      )
+    },
+    patienceMs,
+  )
+
+  it(
+    'names what is missing among what it reads',
+    () => {
+      fc.assert(
+        fc.property(anySetup, anyPiece, (setup, piece) => {
+          const scene = sceneFor(setup, piece.kind)
+          for (const rule of getRules(piece.kind).rules) {
+            const judged = judgeIn(scene, rule, piece)
+            if (judged?.outcome !== 'nodata') continue
+            for (const key of judged.judgement.missing ?? []) expect(rule.reads, rule.id).toContain(key)
+          }
+        }),
+        { numRuns: 120 },
+      )
+    },
+    patienceMs,
+  )
+})
