@@ -11,6 +11,7 @@ import type { Finder } from '../hooks/use-finder'
 import { findDecidingCheck } from '../model/deciding-check'
 import { CheckItem } from './check-item'
 import { DecidingGauge } from './deciding-gauge'
+import { LazyAnswerDrawing } from './lazy-answer-drawing'
 
 export interface AnswerCardProps {
   readonly answer: Answer
@@ -124,6 +125,7 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
             isOpen={isOpen}
             onToggle={setIsOpen}
           >
+            {isOpen && <LazyAnswerDrawing answer={answer} finder={finder} />}
             <ul>
               {checks.map((check) => (
                 <CheckItem key={check.id} check={check} finder={finder} hasGauge={isOpen} />

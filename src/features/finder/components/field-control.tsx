@@ -1,4 +1,4 @@
-import type { FieldAttribute } from '#shared/kinds/types'
+import type { FieldAttribute, Option } from '#shared/kinds/types'
 import { describeExample } from '#shared/units/examples'
 import type { UnitSystem } from '#shared/units/systems'
 import { MeasureField } from '../../../components/ui/measure-field'
@@ -22,6 +22,12 @@ const yesNo = [
   { value: 'yes', label: 'yes' },
   { value: 'no', label: 'no' },
 ]
+
+/** A link may hold what is no option: it stays in sight until something else is chosen. */
+const keepTyped = (options: readonly Option[], text: string): readonly Option[] =>
+  text === '' || options.some(({ value }) => value === text)
+    ? options
+    : [...options, { value: text, label: `“${text}”` }]
 
 const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 
@@ -48,9 +54,9 @@ export function FieldControl(props: FieldControlProps) {
         />
       )
     case 'choice':
-      return <SelectField {...shared} options={attribute.options} emptyLabel={taken} />
+      return <SelectField {...shared} options={keepTyped(attribute.options, text)} emptyLabel={taken} />
     case 'boolean':
-      return <SelectField {...shared} options={yesNo} emptyLabel={taken} />
+      return <SelectField {...shared} options={keepTyped(yesNo, text)} emptyLabel={taken} />
     case 'set':
       return <SetControl {...props} />
     case 'text':

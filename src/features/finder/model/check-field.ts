@@ -41,5 +41,7 @@ export function explainProblem({ path, text, detail }: LinkProblem, system: Unit
   const label = attribute?.label ?? path
   const own = attribute && checkField(text, attribute, system, undefined)
   const said = own ?? toSentence(detail)
-  return label === '' ? said : `${label[0]?.toUpperCase()}${label.slice(1)}: ${said}`
+  if (label === '') return said
+  const typed = said.includes(text) || text === '' ? '' : `“${text.slice(0, 60)}”. `
+  return `${label[0]?.toUpperCase()}${label.slice(1)}: ${typed}${said}`
 }
