@@ -73,7 +73,8 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
   const now = scene.plan.tank.ratedL
   const pass = thresholds.tankVolumePass.value
   const change = thresholds.tankVolumeChange.value
-  const off = Math.abs(offered - now) / now
+  const rounding = 1e-9
+  const off = Math.abs(offered - now) / now - rounding
   const u = standardUncertainty(offered, nominal?.source ?? 'maker', nominal?.plusMinus, 'other')
   const wording = (words: Printer) => `${words.volume(offered)} in place of ${words.volume(now)}`
   return {

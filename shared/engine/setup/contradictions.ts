@@ -1,10 +1,21 @@
 import { readGroup, readGroups, readNumber, readText } from '../values'
-import type { ChamberInput, Contradiction, Setup } from '../types'
+import type { ChamberInput, Contradiction, Setup, Specs } from '../types'
+import { defaultPlusMinus } from '../physics/conformance'
+import { lengthToleranceMm } from '../physics/geometry'
 import type { TankPlan } from './plan'
 import { resolve } from './resolve'
 import { createPrinter, type Printer } from '../../units/print'
 
-const toleranceMm = 0.05
+const toleranceMm = lengthToleranceMm
+
+/**
+ * What sizes may be apart without contradicting each other, mm. Sizes of one source were read together; a drawing and
+ * somebody's calipers each have a ± of their own.
+ */
+function findLeewayMm(specs: Specs): number {
+  const sources = new Set(Object.values(specs).map((entry) => entry?.source))
+  return sources.size > 1 ? defaultPlusMinus.measured.lengthMm + defaultPlusMinus.maker.lengthMm : toleranceMm
+}
 const sizes = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'] as const
 
 /** A corner tank fills about half of the square that its outside sizes span, a cylinder three quarters. */
@@ -52,6 +63,7 @@ function checkChamber(
   chamber: ChamberInput,
   index: number,
   tank: TankPlan,
+  leewayMm: number,
   isGiven: (key: string) => boolean,
   words: Printer,
 ): Contradiction[] {
@@ -62,7 +74,7 @@ function checkChamber(
   const height = inside('outerHeightMm', 'height')
   const exceed = (key: keyof ChamberInput, limitMm: number, what: string): Contradiction[] => {
     const value = chamber[key]
-    if (typeof value !== 'number' || value <= limitMm + toleranceMm) return []
+    if (typeof value !== 'number' || value <= limitMm + leewayMm) return []
     return [
       {
         path: `tank.chambers.${index}.${key}`,
@@ -84,9 +96,10 @@ function checkChamber(
 function checkChambers(setup: Setup, tank: TankPlan, words: Printer): Contradiction[] {
   const chambers = readGroups<ChamberInput>(setup.tank.specs, 'chambers') ?? []
   const isGiven = (key: string) => readNumber(setup.tank.specs, key) !== undefined
-  const found = chambers.flatMap((chamber, index) => checkChamber(chamber, index, tank, isGiven, words))
+  const leewayMm = findLeewayMm(setup.tank.specs)
+  const found = chambers.flatMap((chamber, index) => checkChamber(chamber, index, tank, leewayMm, isGiven, words))
   const total = chambers.reduce((sum, chamber) => sum + (chamber.lengthMm ?? 0), 0)
-  if (chambers.length > 1 && total > tank.insideLengthMm + toleranceMm)
+  if (chambers.length > 1 && total > tank.insideLengthMm + leewayMm)
     found.push({
       path: 'tank.chambers',
       detail: `The chambers are ${words.length(total)} long together, and the tank is ${words.length(tank.insideLengthMm)} inside.`,
@@ -119,6 +132,7 @@ function checkRoom({ room }: Setup, words: Printer): Contradiction[] {
 }
 
 function checkItems(setup: Setup): Contradiction[] {
+  if (setup.items.length === 0) return []
   const { specs } = setup.tank
   const hasSump = readText(specs, 'filtration') === 'sump' || readGroup(specs, 'sump') !== undefined
   const chambers = new Set([
@@ -166,9 +180,10 @@ export function findContradictions(setup: Setup): readonly Contradiction[] {
   const line = readNumber(specs, 'waterLineMm')
   const inside: Contradiction[] = []
   const within = (path: string, value: number | undefined, limitMm: number, what: string) => {
-    if (value !== undefined && value > limitMm + toleranceMm)
+    if (value !== undefined && value > limitMm + leewayMm)
       inside.push({ path, detail: `${words.length(value)} is more than ${what} (${words.length(limitMm)}).` })
   }
+  const leewayMm = findLeewayMm(specs)
   const top = setup.room?.tankTopMm
   if (top !== undefined && hasSize && top < tank.outerHeightMm - toleranceMm)
     inside.push({
