@@ -8,6 +8,7 @@ import { drain } from './http/drain'
 import { createLifecycle } from './http/lifecycle'
 import { loadPages } from './http/render'
 import { createLogger } from './lib/logger'
+import { refreshSearchTexts } from './modules/gear/gear-search.service'
 
 function readEnvOrExit(): Env {
   try {
@@ -40,7 +41,12 @@ server.requestTimeout = 30_000
 server.headersTimeout = 15_000
 server.keepAliveTimeout = 10_000
 
-server.once('listening', () => logger.info({ address: server.address() }, 'listening'))
+server.once('listening', () => {
+  logger.info({ address: server.address() }, 'listening')
+  refreshSearchTexts(database.db).catch((error: unknown) =>
+    logger.warn({ err: error }, 'search texts stay as they were'),
+  )
+})
 server.once('error', (error: NodeJS.ErrnoException) => {
   const taken = `Port ${env.PORT} on ${env.HOST} is taken: stop what uses it, or set PORT to another.`
   process.stderr.write(`${error.code === 'EADDRINUSE' ? taken : error.message}\n`)

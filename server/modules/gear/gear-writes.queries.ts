@@ -2,6 +2,7 @@ import { eq, inArray } from 'drizzle-orm'
 import type { Database } from '../../db/database'
 import { gear, gearRevisions, gearValues } from '../../db/schema/index'
 import type { PreparedPiece, PreparedRevision } from './gear.types'
+import { toSearchColumns } from './search-columns'
 
 /** PostgreSQL takes at most 65 535 parameters in one statement. */
 const rowsPerInsert = 4000
@@ -34,7 +35,15 @@ export async function insertGear(
   const ids = new Map<string, number>()
   const rows = entries.map(({ piece: { identity, head }, createdAt, updatedAt }) => {
     const { number, specs, provenance } = head.state
-    return { ...identity, headRevision: number, specs, provenance, createdAt, updatedAt }
+    return {
+      ...identity,
+      ...toSearchColumns({ ...identity, specs }),
+      headRevision: number,
+      specs,
+      provenance,
+      createdAt,
+      updatedAt,
+    }
   })
   await insertInChunks(rows, async (chunk) => {
     const inserted = await db.insert(gear).values(chunk).returning({ id: gear.id, slug: gear.slug })
@@ -47,6 +56,8 @@ const headColumns = {
   id: gear.id,
   slug: gear.slug,
   kind: gear.kind,
+  brand: gear.brand,
+  model: gear.model,
   number: gear.headRevision,
   specs: gear.specs,
   provenance: gear.provenance,
@@ -70,9 +81,13 @@ export async function lockHeads(db: Database, slugs: readonly string[]) {
 
 export async function updateHead(
   db: Database,
-  gearId: number,
+  head: { readonly id: number; readonly kind: string; readonly brand: string; readonly model: string },
   { number, specs, provenance }: PreparedRevision['state'],
   updatedAt: Date,
 ): Promise<void> {
-  await db.update(gear).set({ headRevision: number, specs, provenance, updatedAt }).where(eq(gear.id, gearId))
+  const searched = toSearchColumns({ ...head, specs })
+  await db
+    .update(gear)
+    .set({ ...searched, headRevision: number, specs, provenance, updatedAt })
+    .where(eq(gear.id, head.id))
 }

@@ -29,7 +29,7 @@ async function appendRevision(db: Database, head: Head, input: RevisionInput, cr
   if (!isKindKey(head.kind)) throw new Error(`${head.slug} is of a kind that is no longer known: ${head.kind}`)
   const state = prepareRevision(head.kind, head, input)
   await insertRevisions(db, [{ gearId: head.id, revision: { state, input }, createdAt }])
-  await updateHead(db, head.id, state, createdAt)
+  await updateHead(db, head, state, createdAt)
   return state
 }
 
