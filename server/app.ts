@@ -13,6 +13,7 @@ import { refuseRepeatedKeys } from './http/requests'
 import { assignNonce, createSecurityHeaders } from './http/security-headers'
 import type { Logger } from './lib/logger'
 import { createCatalogue } from './modules/catalogue/catalogue.service'
+import { createAskRoutes } from './modules/ask/ask.routes'
 import { createFitRoutes } from './modules/fit/fit.routes'
 import { createGearRoutes } from './modules/gear/gear.routes'
 import { createKindRoutes } from './modules/kinds/kinds.routes'
@@ -47,10 +48,10 @@ export function createApp(dependencies: AppDependencies): Express {
 
   const api = Router()
   api.use(refuseRepeatedKeys)
-  api.use(['/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute))
+  api.use(['/ask', '/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute))
   api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))
-  api.use(createFitRoutes(catalogue), createSetupRoutes(catalogue))
-  api.use(createKindRoutes(), createGearRoutes(db), createOpenApiRoutes(env.PUBLIC_ORIGIN))
+  api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
+  api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)
   app.use('/api', refuseUnknownPath)

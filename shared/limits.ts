@@ -12,6 +12,8 @@ export const limits = {
   evidence: 500,
   setupName: 120,
   searchText: 200,
+  sort: 60,
+  question: 2000,
   itemId: 64,
   items: 200,
   quantity: 99,

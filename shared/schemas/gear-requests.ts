@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { kindKeys } from '../kinds/index'
 import { limits } from '../limits'
-import { gearSorts, lineSchema } from './gear'
+import { lineSchema } from './gear'
 
 export const kindSchema = z.enum(kindKeys, { error: 'must be one of the kinds that GET /api/v1/kinds lists' })
 
@@ -19,10 +19,11 @@ export function countTextSchema(max: number) {
     .pipe(z.number().min(1, error).max(max, error))
 }
 
-export const gearQuerySchema = z.strictObject({
+/** The fixed keys. Every other key is a filter, which `readGearFilters` holds to the kind's own attributes. */
+export const gearQuerySchema = z.object({
   kind: kindSchema.optional(),
   q: lineSchema(limits.searchText).optional(),
-  sort: z.enum(gearSorts, { error: `must be one of ${gearSorts.join(', ')}` }).default('name'),
+  sort: z.string().max(limits.sort).optional(),
   limit: countTextSchema(limits.pageMax).default(limits.page),
   cursor: cursorSchema.optional(),
 })

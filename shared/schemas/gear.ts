@@ -3,7 +3,6 @@ import { limits } from '../limits'
 import { sourceSchema } from './specs'
 
 export const gearStatuses = ['current', 'discontinued', 'unknown'] as const
-export const gearSorts = ['name', '-updated'] as const
 
 const controlCharacters = /\p{Cc}/u
 
@@ -52,9 +51,43 @@ export const gearSchema = gearItemSchema.extend({
   provenance: z.record(z.string(), provenanceSchema),
 })
 
+const optionCountSchema = z.object({
+  value: z.union([z.string(), z.number(), z.boolean()]),
+  label: z.string(),
+  count: z.number().int(),
+})
+
+/** How the answers spread over one filter, that filter itself set aside. */
+export const facetSchema = z.discriminatedUnion('type', [
+  z.object({
+    type: z.literal('measure'),
+    label: z.string(),
+    unit: z.string(),
+    min: z.number().nullable(),
+    max: z.number().nullable(),
+    known: z.number().int(),
+    unknown: z.number().int(),
+  }),
+  z.object({
+    type: z.literal('options'),
+    label: z.string(),
+    counts: z.array(optionCountSchema),
+    /** Options beyond those listed. */
+    more: z.number().int(),
+    known: z.number().int(),
+    unknown: z.number().int(),
+  }),
+])
+
 export const gearListSchema = z.object({
   items: z.array(gearItemSchema),
+  /** Over all pages. */
   total: z.number().int(),
+  facets: z.record(z.string(), facetSchema),
+  /** Why there is nothing, or what was passed over. */
+  hint: z.string().nullable(),
+  /** Where filters leave nothing: how many there would be without each one of them. */
+  loosen: z.array(z.object({ key: z.string(), total: z.number().int() })),
   next: z.string().nullable(),
 })
 
@@ -78,6 +111,7 @@ export const revisionSchema = revisionSummarySchema.extend({
 
 export type GearItem = z.infer<typeof gearItemSchema>
 export type Gear = z.infer<typeof gearSchema>
+export type Facet = z.infer<typeof facetSchema>
 export type GearList = z.infer<typeof gearListSchema>
 export type Provenance = z.infer<typeof provenanceSchema>
 export type RevisionSummary = z.infer<typeof revisionSummarySchema>

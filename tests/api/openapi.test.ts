@@ -72,6 +72,7 @@ describe('the OpenAPI document', () => {
       'get /api/v1/kinds',
       'get /health',
       'get /ready',
+      'post /api/v1/ask',
       'post /api/v1/fit',
       'post /api/v1/fit/check',
       'post /api/v1/setups/report',
@@ -103,7 +104,7 @@ describe('the OpenAPI document', () => {
 
   it('gives examples that work and fit their own schemas, as do the answers', async () => {
     const posts = operations().filter(({ method }) => method === 'post')
-    expect(posts).toHaveLength(3)
+    expect(posts).toHaveLength(4)
     for (const { path, operation } of posts) {
       const example = operation.requestBody?.content['application/json']?.example
       expectValid(example, 'paths', path, 'post', 'requestBody', 'content', 'application/json', 'schema')
@@ -153,7 +154,7 @@ describe('GET /api/v1/kinds', () => {
     for (const { attributes, checks, jsonSchema } of items) {
       const keys = attributes.map(({ key }) => key)
       const { $schema: _, ...schema } = jsonSchema
-      expect(Object.keys((schema.properties ?? {}))).toEqual(keys)
+      expect(Object.keys(schema.properties ?? {})).toEqual(keys)
       expect(ajv.compile(schema)({ unheardOf: 1 })).toBe(false)
       const ids = checks.map(({ id }) => id)
       for (const id of attributes.flatMap((attribute) => attribute.checks ?? [])) expect(ids).toContain(id)

@@ -1,15 +1,27 @@
 import { isKindKey, kindKeys, type KindKey } from '#shared/kinds/index'
-import type { Piece, Value } from '#shared/engine/types'
+import type { GearRef, Piece, Value } from '#shared/engine/types'
 import type { PieceRow } from './catalogue.queries'
+
+/** A piece with what the list of gear is narrowed and ordered by, beside its specs. */
+export interface CatalogueEntry {
+  readonly id: number
+  readonly kind: KindKey
+  readonly piece: Piece
+  readonly gear: GearRef
+  readonly status: PieceRow['status']
+  /** Milliseconds since 1970. */
+  readonly updatedAt: number
+}
 
 /** Everything in the catalogue at one version, as the engine reads it. Shared by all requests: nothing in it may be changed. */
 export interface Snapshot {
   readonly version: number
   readonly byKind: Readonly<Record<KindKey, readonly Piece[]>>
   readonly bySlug: ReadonlyMap<string, Piece>
+  readonly entries: readonly CatalogueEntry[]
 }
 
-function toPiece(row: PieceRow, kind: KindKey): Piece {
+function toEntry(row: PieceRow, kind: KindKey): CatalogueEntry {
   const specs: Record<string, Value> = {}
   for (const [key, value] of Object.entries(row.specs)) {
     const backing = row.provenance[key]
@@ -19,17 +31,21 @@ function toPiece(row: PieceRow, kind: KindKey): Piece {
       ...(backing?.plusMinus !== undefined && { plusMinus: backing.plusMinus }),
     }
   }
-  return { kind, specs, gear: { slug: row.slug, brand: row.brand, model: row.model } }
+  const { id, slug, brand, model, status } = row
+  const gear = { slug, brand, model }
+  return { id, kind, piece: { kind, specs, gear }, gear, status, updatedAt: row.updatedAt.getTime() }
 }
 
 export function buildSnapshot(version: number, rows: readonly PieceRow[]): Snapshot {
   const byKind = Object.fromEntries(kindKeys.map((key) => [key, [] as Piece[]])) as Record<KindKey, Piece[]>
   const bySlug = new Map<string, Piece>()
+  const entries: CatalogueEntry[] = []
   for (const row of rows) {
     if (!isKindKey(row.kind)) continue
-    const piece = toPiece(row, row.kind)
-    byKind[row.kind].push(piece)
-    bySlug.set(row.slug, piece)
+    const entry = toEntry(row, row.kind)
+    entries.push(entry)
+    byKind[row.kind].push(entry.piece)
+    bySlug.set(row.slug, entry.piece)
   }
-  return { version, byKind, bySlug }
+  return { version, byKind, bySlug, entries }
 }

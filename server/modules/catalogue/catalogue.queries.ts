@@ -12,10 +12,13 @@ export async function readVersion(db: Database): Promise<number> {
 }
 
 const pieceColumns = {
+  id: gear.id,
   slug: gear.slug,
   kind: gear.kind,
   brand: gear.brand,
   model: gear.model,
+  status: gear.status,
+  updatedAt: gear.updatedAt,
   specs: gear.specs,
   provenance: gear.provenance,
 }

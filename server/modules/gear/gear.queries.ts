@@ -1,14 +1,15 @@
-import { and, asc, count, desc, eq, ilike, lte, sql, type SQL } from 'drizzle-orm'
+import { and, asc, count, desc, eq, getTableColumns, inArray, lte, sql, type SQL } from 'drizzle-orm'
 import type { Database } from '../../db/database'
 import { gear, gearRevisions, gearValues } from '../../db/schema/index'
 
-export type GearRow = typeof gear.$inferSelect
+type SearchColumn = 'searchName' | 'searchCode' | 'searchFullCode' | 'searchTerms' | 'searchVersion'
 
-export interface GearFilter {
-  readonly kind?: string
-  /** Each must occur in the brand and model, in any order. */
-  readonly words: readonly string[]
-}
+/** What a piece is found by is nobody's reading. */
+const rowColumns = Object.fromEntries(
+  Object.entries(getTableColumns(gear)).filter(([name]) => !name.startsWith('search')),
+) as Omit<ReturnType<typeof getTableColumns<typeof gear>>, SearchColumn>
+
+export type GearRow = Omit<typeof gear.$inferSelect, SearchColumn>
 
 /** The last row of a page, as far as the order needs it. */
 export type GearPlace =
@@ -17,17 +18,9 @@ export type GearPlace =
 
 const lowerBrand = sql`lower(${gear.brand})`
 const lowerModel = sql`lower(${gear.model})`
-const fullName = sql<string>`${gear.brand} || ' ' || ${gear.model}`
 
-function escapeLike(text: string): string {
-  return text.replace(/[\\%_]/g, '\\$&')
-}
-
-function matchFilter({ kind, words }: GearFilter): SQL | undefined {
-  return and(
-    kind === undefined ? undefined : eq(gear.kind, kind),
-    ...words.map((word) => ilike(fullName, `%${escapeLike(word)}%`)),
-  )
+function ofKind(kind: string | undefined): SQL | undefined {
+  return kind === undefined ? undefined : eq(gear.kind, kind)
 }
 
 function startAfter(place: GearPlace | null): SQL | undefined {
@@ -40,27 +33,38 @@ function startAfter(place: GearPlace | null): SQL | undefined {
 
 export async function listGear(
   db: Database,
-  filter: GearFilter,
+  kind: string | undefined,
   sort: GearPlace['sort'],
   after: GearPlace | null,
   limit: number,
 ): Promise<GearRow[]> {
   const order = sort === 'name' ? [lowerBrand, lowerModel, asc(gear.id)] : [desc(gear.updatedAt), desc(gear.id)]
   return db
-    .select()
+    .select(rowColumns)
     .from(gear)
-    .where(and(matchFilter(filter), startAfter(after)))
+    .where(and(ofKind(kind), startAfter(after)))
     .orderBy(...order)
     .limit(limit)
 }
 
-export async function countGear(db: Database, filter: GearFilter): Promise<number> {
-  const [row] = await db.select({ total: count() }).from(gear).where(matchFilter(filter))
+/** The rows of a page whose order was settled elsewhere. */
+export async function listGearById(db: Database, ids: readonly number[]): Promise<GearRow[]> {
+  if (ids.length === 0) return []
+  const rows = await db
+    .select(rowColumns)
+    .from(gear)
+    .where(inArray(gear.id, [...ids]))
+  const rowById = new Map(rows.map((row) => [row.id, row]))
+  return ids.flatMap((id) => rowById.get(id) ?? [])
+}
+
+export async function countGear(db: Database, kind: string | undefined): Promise<number> {
+  const [row] = await db.select({ total: count() }).from(gear).where(ofKind(kind))
   return row?.total ?? 0
 }
 
 export async function findGear(db: Database, slug: string): Promise<GearRow | null> {
-  const [row] = await db.select().from(gear).where(eq(gear.slug, slug))
+  const [row] = await db.select(rowColumns).from(gear).where(eq(gear.slug, slug))
   return row ?? null
 }
 

@@ -1,12 +1,13 @@
 import { Router, type Request } from 'express'
 import { slugSchema } from '#shared/schemas/gear'
-import { gearQuerySchema } from '#shared/schemas/gear-requests'
 import type { Database } from '../../db/database'
 import { addEndpoint } from '../../http/methods'
-import { parseQuery } from '../../http/requests'
 import { createBody, sendRead } from '../../http/responses'
 import { AppError } from '../../lib/errors'
-import { getGear, getRevision, getRevisions, searchGear } from './gear.service'
+import type { Catalogue } from '../catalogue/catalogue.service'
+import { searchGear } from './gear-list.service'
+import { parseGearQuery } from './gear-query'
+import { getGear, getRevision, getRevisions } from './gear.service'
 
 /** Text that cannot be a slug names nothing: it is not there, rather than wrongly asked. */
 function readSlug(req: Request): string {
@@ -28,12 +29,12 @@ function createNextLink(req: Request, next: string): string {
   return `<${req.baseUrl}${req.path}?${query.toString()}>; rel="next"`
 }
 
-export function createGearRoutes(db: Database): Router {
+export function createGearRoutes(db: Database, catalogue: Catalogue): Router {
   const router = Router()
 
   addEndpoint(router, '/gear', {
     get: async (req, res) => {
-      const list = await searchGear(db, parseQuery(gearQuerySchema, req))
+      const list = await searchGear(db, catalogue, parseGearQuery({ ...req.query } as Record<string, string>))
       if (list.next !== null) res.set('Link', createNextLink(req, list.next))
       sendRead(req, res, createBody(list))
     },

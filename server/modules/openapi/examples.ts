@@ -15,6 +15,7 @@ const setup = {
 
 /** Requests that work as they stand; the tests send each of them. */
 export const examples = {
+  ask: { text: 'heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, flat gets down to 60 °F', units: 'us' },
   fit: { setup, kind: 'heater', limit: 5 },
   fitCheck: {
     setup,

@@ -1,8 +1,16 @@
 import { OpenAPIRegistry, OpenApiGeneratorV31 } from '@asteasolutions/zod-to-openapi'
 import type { z } from 'zod'
 import { answerSchema, checkSchema, fitResultSchema, reportSchema } from '#shared/schemas/answer'
+import { askRequestSchema, questionSchema } from '#shared/schemas/ask'
 import { fitCheckRequestSchema, fitRequestSchema } from '#shared/schemas/fit'
-import { gearItemSchema, gearListSchema, gearSchema, provenanceSchema, revisionSchema } from '#shared/schemas/gear'
+import {
+  facetSchema,
+  gearItemSchema,
+  gearListSchema,
+  gearSchema,
+  provenanceSchema,
+  revisionSchema,
+} from '#shared/schemas/gear'
 import { kindDescriptionSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
 import { setupSchema } from '#shared/schemas/setup'
@@ -21,7 +29,9 @@ brand and product is invented.`.replaceAll('\n', ' '),
 
 const named = {
   Answer: answerSchema,
+  AskRequest: askRequestSchema,
   Check: checkSchema,
+  Facet: facetSchema,
   FitResult: fitResultSchema,
   FitRequest: fitRequestSchema,
   FitCheckRequest: fitCheckRequestSchema,
@@ -31,6 +41,7 @@ const named = {
   Kind: kindDescriptionSchema,
   Problem: problemSchema,
   Provenance: provenanceSchema,
+  Question: questionSchema,
   Report: reportSchema,
   Revision: revisionSchema,
   Setup: setupSchema,

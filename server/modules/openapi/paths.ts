@@ -1,9 +1,10 @@
 import type { RouteConfig } from '@asteasolutions/zod-to-openapi'
 import { z } from 'zod'
 import { answerSchema, fitResultSchema, reportSchema } from '#shared/schemas/answer'
+import { askRequestSchema, questionSchema } from '#shared/schemas/ask'
 import { fitCheckRequestSchema, fitRequestSchema, reportRequestSchema } from '#shared/schemas/fit'
 import { gearListSchema, gearSchema, revisionListSchema, revisionSchema, slugSchema } from '#shared/schemas/gear'
-import { gearQuerySchema } from '#shared/schemas/gear-requests'
+import { describedGearQuerySchema } from './gear-query-description'
 import { kindListSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
 import { examples } from './examples'
@@ -88,7 +89,7 @@ export const paths: readonly RouteConfig[] = [
     kindListSchema,
   ),
   describeRead('/api/v1/gear', 'Searches the catalogue; `Link` leads to the next page', gearListSchema, {
-    query: gearQuerySchema,
+    query: describedGearQuerySchema,
   }),
   describeRead('/api/v1/gear/{slug}', 'A piece of gear, with what backs each of its values', gearSchema, {
     params: slugParams,
@@ -99,6 +100,11 @@ export const paths: readonly RouteConfig[] = [
   describeRead('/api/v1/gear/{slug}/revisions/{number}', 'Its specs as of one revision', revisionSchema, {
     params: revisionParams,
   }),
+  describeCalculation(
+    '/api/v1/ask',
+    'Reads a question: what is asked about, its filters, and what it tells of the setup',
+    [askRequestSchema, examples.ask, questionSchema],
+  ),
   describeCalculation('/api/v1/fit', 'Every piece of a kind, judged in a setup', [
     fitRequestSchema,
     examples.fit,
