@@ -50,7 +50,9 @@ function keepItems(plan: Plan, kind: KindKey, options: CandidateOptions): readon
 export function setBench(setup: Setup, kind: KindKey, options: CandidateOptions = {}): Bench {
   const whole = resolve(setup)
   const others = keepItems(whole, kind, options)
-  const plan = others.length === whole.items.length ? whole : resolve(withItems(setup, others))
+  // What makes room stays listed as gone: what was planned tells what the piece has to live up to.
+  const left = setup.items.map((item) => (others.includes(item) ? item : { ...item, state: 'gone' as const }))
+  const plan = others.length === whole.items.length ? whole : resolve(withItems(setup, left))
   const before = {
     plan,
     items: others.map((item) => assessItem(plan, others, item)),

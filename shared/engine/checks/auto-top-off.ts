@@ -3,12 +3,18 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Say } fro
 import { once, type Scene } from '../scene'
 import { thresholds } from '../thresholds'
 import type { Value } from '../types'
+import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
 import { readMeasure, readNumber } from '../values'
-import { chooseBasin, describeBody, listBodySizes, tryBody } from './body-space'
+import { bodyUses, judgeBody, lackWater } from './body-judgement'
+import { chooseBasin, tryBody } from './body-space'
 import { createRuleMaker } from './build-rule'
 import { findPumpBasins } from './pump-flow'
+import { hasAreas } from './shape'
 
 const nothing: Value<number> = { value: 0, source: 'measured' }
+
+/** From a sump's water to its rim, mm: what water has to be lifted over (common practice). */
+const sumpRimMm = 100
 
 function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
@@ -18,41 +24,40 @@ function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   if (!length || !width) return lacking(missing, () => 'Nobody has recorded the size of its sensor.')
   const body = { length, width, height: nothing, depth: nothing, clearanceMm: 0, quantity: candidate.quantity }
   const found = chooseBasin(findPumpBasins(scene, candidate).map((basin) => tryBody(body, basin, scene.others)))
-  if (!found) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
-  return {
-    outcome: found.fits ? 'pass' : 'fail',
-    measured: found.measuredMm,
-    limit: found.limitMm,
-    probability: found.probability,
-    rests: () => listBodySizes(found),
-    say: (words) => describeBody(found)(words).replace('Stands in', 'Its sensor fits in'),
-  }
+  return found ? judgeBody(found, scene.plan, 'Its sensor') : lackWater(candidate.place)
 }
 
 /** Litres that evaporate in a day in the room as it usually is. */
 const findEvaporationLpd = ({ plan }: Scene): number =>
   lossAt(plan, plan.goals.temperatureC, plan.room.temperatureC).evaporationLPerDay
 
-function judgeLift(scene: Scene, { piece }: Candidate): Judgement {
-  const head = readMeasure(piece.specs, 'pumpHeadM')
-  if (!head) return lacking(['pumpHeadM'], () => 'Nobody has recorded how high its pump lifts.')
-  const liftM = scene.plan.room.tankTopMm / 1000
-  const reservoir = readNumber(piece.specs, 'reservoirL')
+function warnReservoir(scene: Scene, reservoirL: number | undefined): readonly Say[] {
+  if (reservoirL === undefined || !hasAreas(scene.plan)) return []
   const perDay = once(scene, findEvaporationLpd)
-  const isSmall = reservoir !== undefined && reservoir < thresholds.reservoirDays.value * perDay
-  const cautions: Say[] = isSmall
-    ? [
-        (words) =>
-          `Its ${words.volume(reservoir)} last less than ${thresholds.reservoirDays.value} days: about ${words.volume(perDay)} evaporate in one.`,
-      ]
-    : []
+  if (reservoirL >= thresholds.reservoirDays.value * perDay) return []
+  return [
+    (words) =>
+      `Its reservoir of ${words.volume(reservoirL)} lasts less than ${thresholds.reservoirDays.value} days: about ${words.volume(perDay)} evaporates in one.`,
+  ]
+}
+
+function judgeLift(scene: Scene, candidate: Candidate): Judgement {
+  const { specs } = candidate.piece
+  const head = readMeasure(specs, 'pumpHeadM')
+  if (!head) return lacking(['pumpHeadM'], () => 'Nobody has recorded how high its pump lifts.')
+  const basin = findPumpBasins(scene, candidate)[0]
+  const isSump = basin?.id === 'sump'
+  const liftM = (isSump ? basin.waterDepthMm + sumpRimMm : scene.plan.room.tankTopMm) / 1000
+  const u = standardUncertainty(head.value, head.source, head.plusMinus, 'other')
   return {
     outcome: head.value >= liftM ? 'pass' : 'fail',
     measured: head.value,
     limit: liftM,
-    cautions,
+    probability: () => probabilityAtLeast(head.value, liftM, u),
+    rests: () => (isSump ? ['tank.sump.waterDepthMm', 'tank.filtration'] : ['room.tankTopMm', 'tank.outerHeightMm']),
+    cautions: warnReservoir(scene, readNumber(specs, 'reservoirL')),
     say: (words) =>
-      `Lifts ${words.measure(head.value, 'm')}, and the rim is ${words.measure(liftM, 'm')} above the floor.`,
+      `Lifts water ${words.measure(head.value, 'm')}, and the rim of the ${isSump ? 'sump' : 'tank'} is ${words.measure(liftM, 'm')} above the floor.`,
   }
 }
 
@@ -66,14 +71,7 @@ export const autoTopOffRules: KindRules = {
       unit: 'mm',
       rule: 'Its sensor fits in a chamber with what else is there.',
       reads: ['lengthMm', 'widthMm'],
-      uses: [
-        'tank.chambers.*.lengthMm',
-        'tank.chambers.*.widthMm',
-        'tank.sump.lengthMm',
-        'tank.sump.widthMm',
-        'tank.displayLengthMm',
-        'tank.displayWidthMm',
-      ],
+      uses: bodyUses,
       failLabel: 'too large for the place',
       judge: judgeSpace,
     }),
@@ -82,9 +80,9 @@ export const autoTopOffRules: KindRules = {
       worst: 'fail',
       unit: 'm',
       limitIs: 'least',
-      rule: `Its pump lifts water from the floor over the tank’s rim; a reservoir for less than ${thresholds.reservoirDays.value} days of evaporation is a caution.`,
+      rule: `Its pump lifts water from the floor over the tank’s rim, or over a sump’s, taken as ${sumpRimMm} mm above its water; a reservoir for less than ${thresholds.reservoirDays.value} days of evaporation is a caution.`,
       reads: ['pumpHeadM', 'reservoirL'],
-      uses: ['room.tankTopMm'],
+      uses: ['room.tankTopMm', 'tank.outerHeightMm', 'tank.sump.waterDepthMm', 'tank.filtration'],
       failLabel: 'too weak to lift water over the rim',
       judge: judgeLift,
     }),

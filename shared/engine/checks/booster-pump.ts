@@ -1,12 +1,16 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
-import { readNumber } from '../values'
+import { readFlag, readNumber } from '../values'
 import { createRuleMaker } from './build-rule'
 import { findOutputLpd } from './ro-unit'
 
 const findUnit = ({ others }: Scene) => others.find((item) => item.piece.kind === 'ro-unit')
 
-const noUnit: Judgement = { outcome: 'pass', say: () => 'There is no RO/DI unit in the setup to hold against it.' }
+const noUnit: Judgement = {
+  outcome: 'nodata',
+  missing: [],
+  say: () => 'There is no RO/DI unit in the setup to hold it against.',
+}
 
 function judgeInlet({ plan }: Scene, { piece }: Candidate): Judgement {
   const least = readNumber(piece.specs, 'inletMinKPa')
@@ -39,11 +43,20 @@ function judgePressure(scene: Scene, { piece }: Candidate): Judgement {
 
 function judgeFlow(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const most = readNumber(piece.specs, 'maxLpd')
-  if (most === undefined) return lacking(['maxLpd'], () => 'Nobody has recorded the flow it delivers.')
+  const missing = [
+    ...(most === undefined ? ['maxLpd'] : []),
+    ...(readNumber(piece.specs, 'outletKPa') === undefined ? ['outletKPa'] : []),
+  ]
+  if (most === undefined || missing.length > 0)
+    return lacking(
+      missing,
+      () => `Nobody has recorded the ${most === undefined ? 'flow it delivers' : 'pressure it gives'}.`,
+    )
   const unit = findUnit(scene)
   if (!unit) return noUnit
-  const others = [...scene.others, { id: 'candidate', piece, quantity, state: 'planned' as const }]
-  const output = findOutputLpd({ ...scene, others, kept: new Map() }, unit.piece.specs)
+  const hasOwnBooster = readFlag(unit.piece.specs, 'boosterIncluded') ?? false
+  const others = [{ id: 'candidate', piece, quantity, state: 'planned' as const }]
+  const output = findOutputLpd(scene, unit.piece.specs, { hasOwnBooster, others })
   const waste = readNumber(unit.piece.specs, 'wasteRatio')
   if (typeof output !== 'number' || waste === undefined)
     return {
@@ -51,13 +64,14 @@ function judgeFlow(scene: Scene, { piece, quantity }: Candidate): Judgement {
       missing: [],
       say: () => 'Nobody has recorded all that the RO/DI unit’s output is computed from.',
     }
+  const deliveredLpd = most * quantity
   const neededLpd = output * unit.quantity * (1 + waste)
   return {
-    outcome: most * quantity >= neededLpd ? 'pass' : 'fail',
-    measured: most * quantity,
+    outcome: deliveredLpd >= neededLpd ? 'pass' : 'fail',
+    measured: deliveredLpd,
     limit: neededLpd,
     say: (words) =>
-      `Delivers ${words.measure(most * quantity, 'L/d')}, and the RO/DI unit takes ${words.measure(neededLpd, 'L/d')} with its waste.`,
+      `Delivers ${words.measure(deliveredLpd, 'L/d')}, and the RO/DI unit takes ${words.measure(neededLpd, 'L/d')} with its waste.`,
   }
 }
 

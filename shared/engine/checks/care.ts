@@ -16,7 +16,7 @@ function judgeTube({ plan }: Scene, { piece }: Candidate): Judgement {
     say: (words) =>
       reaches
         ? 'Its tube reaches the sand.'
-        : `Its tube is ${words.length(neededMm - tube)} short of the sand with a dry hand.`,
+        : `Its tube is ${words.length(neededMm - tube)} too short to reach the sand with a dry hand.`,
   }
 }
 
@@ -25,7 +25,7 @@ function judgeHose({ plan }: Scene, { piece }: Candidate): Judgement {
   const hose = readNumber(piece.specs, 'hoseLengthMm')
   const missing = [...(tube === undefined ? ['tubeLengthMm'] : []), ...(hose === undefined ? ['hoseLengthMm'] : [])]
   if (tube === undefined || hose === undefined)
-    return lacking(missing, () => 'Nobody has recorded the length of its hose.')
+    return lacking(missing, () => `Nobody has recorded the length of its ${tube === undefined ? 'tube' : 'hose'}.`)
   const neededMm = plan.room.tankTopMm + plan.tank.outerHeightMm
   const reaches = isWithinMm(neededMm, tube + hose)
   return {
@@ -35,7 +35,7 @@ function judgeHose({ plan }: Scene, { piece }: Candidate): Judgement {
     say: (words) =>
       reaches
         ? 'Tube and hose reach from the sand over the rim to a bucket on the floor.'
-        : `Tube and hose are ${words.length(neededMm - tube - hose)} short of a bucket on the floor.`,
+        : `Tube and hose are ${words.length(neededMm - tube - hose)} too short to reach a bucket on the floor.`,
   }
 }
 
@@ -81,8 +81,8 @@ function judgeSize({ plan }: Scene, { piece }: Candidate): Judgement {
     cautions: [() => 'Two or three nets make catching easier on the animals.'],
     say: (words) =>
       fits
-        ? 'Leaves room to turn in the display.'
-        : `Wider than half the display (${words.length(limitMm)}): hard to turn in it.`,
+        ? 'It can be turned in the display.'
+        : `Wider than half the display, which is ${words.length(limitMm)}: hard to turn in it.`,
   }
 }
 
@@ -96,7 +96,7 @@ export const netRules: KindRules = {
       unit: 'mm',
       rule: 'The opening at most half as wide as the display.',
       reads: ['openingMm'],
-      uses: ['tank.displayWidthMm'],
+      uses: ['tank.displayWidthMm', 'tank.outerWidthMm', 'tank.wallMm', 'tank.chambers.*.widthMm'],
       failLabel: 'too wide',
       judge: judgeSize,
     }),

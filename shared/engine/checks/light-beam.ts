@@ -4,7 +4,9 @@ import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
 import { readMeasure } from '../values'
 import { getAttribute } from '../../kinds/index'
-import { hasAreas, noAreas } from './shape'
+import { joinNames } from '../counting'
+import type { Specs } from '../types'
+import { displayUses, hasAreas, noAreas } from './shape'
 import {
   chooseBand,
   chooseHeightMm,
@@ -14,6 +16,7 @@ import {
   lightPlane,
   listMissing,
   shareOf,
+  standsOnLegs,
   type Plane,
 } from './light-plane'
 
@@ -28,43 +31,49 @@ const lampReads = [
   'dimmable',
   'mountsIncluded',
 ]
-const planeUses = [
-  'goals.coral',
-  'tank.waterLineMm',
-  'tank.displayLengthMm',
-  'tank.displayWidthMm',
-  'tank.outerLengthMm',
-  'tank.outerWidthMm',
-  'tank.outerHeightMm',
-]
+/** The display and its water: other sizes bear on the plane through these alone. */
+const planeRests = ['goals.coral', 'tank.waterLineMm', 'tank.displayLengthMm', 'tank.displayWidthMm']
+const planeUses = [...planeRests, ...displayUses.slice(2), 'tank.outerHeightMm']
 
-/** Heights that a lens is usually hung at, tried where nobody said one; a light on legs stands where its legs are. */
-const usualHeightsMm = [100, 150, 200, 250, 300, 400]
+/** Heights that a lens is usually at, tried where nobody said one: hung or on an arm, and on legs (common practice). */
+const usualHeightsMm = { free: [100, 150, 200, 250, 300, 400], legs: [40, 60, 80, 100, 150] } as const
 
 interface Lit {
   readonly band: readonly [number, number]
-  readonly plane: Plane
+  /** "your corals", or which ones were assumed. */
+  readonly whose: string
   readonly count: number
+  readonly heightMm: number
   readonly isHeightGiven: boolean
-  readonly at: (count: number, heightMm?: number) => Plane
+  /** Up to so many are tried. */
+  readonly most: number
+  readonly at: (count: number, heightMm: number) => Plane
 }
 
 /** What both beam checks look at; a judgement where there is nothing to look at, null where it does not apply. */
-function light(scene: Scene, { piece, quantity, mountHeightMm }: Candidate): Lit | Judgement | null {
-  const band = chooseBand(scene.plan.goals.coral)
+function light(scene: Scene, candidate: Candidate): Lit | Judgement | null {
+  const { piece, quantity, mountHeightMm, mayMultiply } = candidate
+  const { goals, assumed } = scene.plan
+  const band = chooseBand(goals.coral)
   if (!band) return null
   const missing = listMissing(piece)
   if (missing.length > 0) {
     const names = missing.map((key) => getAttribute('light', key)?.label ?? key)
-    return lacking(missing, () => `Nobody has recorded its ${names.join(', ')} yet.`)
+    return lacking(missing, () => `Nobody has recorded its ${joinNames(names)} yet.`)
   }
   if (!hasAreas(scene.plan)) return noAreas(scene.plan)
-  const usual = mountHeightMm ?? chooseHeightMm(piece.specs)
-  const at = (count: number, heightMm = usual) => lightPlane(scene, piece.specs, count, heightMm, band)
-  return { band, plane: at(quantity), count: quantity, isHeightGiven: mountHeightMm !== undefined, at }
+  return {
+    band,
+    whose: assumed.has('goals.coral') ? 'soft and large-polyp corals' : 'your corals',
+    count: quantity,
+    most: mayMultiply === false || isMultiplied(candidate) ? quantity : thresholds.lightMostUnits.value,
+    heightMm: mountHeightMm ?? chooseHeightMm(piece.specs),
+    isHeightGiven: mountHeightMm !== undefined,
+    at: (count, heightMm) => lightPlane(scene, piece.specs, count, heightMm, band),
+  }
 }
 
-const isLit = (found: Lit | Judgement): found is Lit => 'plane' in found
+const isLit = (found: Lit | Judgement): found is Lit => 'band' in found
 
 /** Outcomes that a light of unknown dimming would have, agreed or not. */
 function agree(dimmable: boolean | undefined, judge: (dimmable: boolean) => Judgement): Judgement {
@@ -79,117 +88,126 @@ const sayHeight =
   (words) =>
     isGiven ? '' : ` (lens ${words.length(heightMm)} above the water, assumed)`
 
+type JudgeLit = (lit: Lit) => Judgement
+
 /** The same check at other usual heights: a height that nobody gave condemns nothing. */
-function tryHeights(lit: Lit, judge: (plane: Plane) => Judgement): Judgement {
-  const first = judge(lit.plane)
+function tryHeights(lit: Lit, specs: Specs, judge: JudgeLit): Judgement {
+  const first = judge(lit)
   if (first.outcome !== 'fail' || lit.isHeightGiven) return first
-  const better = usualHeightsMm
-    .filter((heightMm) => heightMm !== lit.plane.heightMm)
-    .sort((a, b) => Math.abs(a - lit.plane.heightMm) - Math.abs(b - lit.plane.heightMm))
-    .find((heightMm) => judge(lit.at(lit.count, heightMm)).outcome === 'pass')
+  const better = usualHeightsMm[standsOnLegs(specs) ? 'legs' : 'free']
+    .filter((heightMm) => heightMm !== lit.heightMm)
+    .sort((a, b) => Math.abs(a - lit.heightMm) - Math.abs(b - lit.heightMm))
+    .find((heightMm) => judge({ ...lit, heightMm, most: lit.count }).outcome === 'pass')
   if (better === undefined) return first
   return {
     ...first,
     outcome: 'change',
     say: (words) =>
-      `${first.say(words)} It works with the lens ${words.length(better)} above the water; we assumed ${words.length(lit.plane.heightMm)}.`,
+      `${first.say(words)} It works with the lens ${words.length(better)} above the water; we assumed ${words.length(lit.heightMm)}.`,
   }
 }
 
-function judgeIntensity(scene: Scene, candidate: Candidate): Judgement | null {
+/** The same check under other corals: those that nobody named condemn nothing either. */
+function judgeLit(scene: Scene, candidate: Candidate, judge: (lit: Lit, dimmable: boolean) => Judgement) {
   const lit = light(scene, candidate)
   if (!lit || !isLit(lit)) return lit
   const { specs } = candidate.piece
-  const reading = readMeasure(specs, 'ppfdUmol') ?? readMeasure(specs, 'photonFluxUmolS')
-  const [low, high] = lit.band
-  const judgeAt = (plane: Plane, dimmable: boolean): Judgement => {
-    const { brightestUmol, aboveShare } = plane
-    const u = reading
-      ? (brightestUmol * standardUncertainty(reading.value, reading.source, reading.plusMinus, 'other')) / reading.value
-      : 0
-    const base = { measured: brightestUmol, limit: low, probability: () => probabilityAtLeast(brightestUmol, low, u) }
-    const print = (words: Parameters<Say>[0], umol: number) => words.measure(umol, 'umol/m2/s')
-    const height = sayHeight(plane.heightMm, lit.isHeightGiven)
-    if (brightestUmol < low)
-      return {
-        ...base,
-        outcome: 'fail',
-        say: (words) =>
-          `Too dim: at most ${print(words, brightestUmol)} half way down${height(words)}, where your corals want ${words.pair([low, high], 'umol/m2/s')}.`,
-      }
-    if (!dimmable && aboveShare > 0.5)
-      return {
-        ...base,
-        outcome: 'fail',
-        say: (words) =>
-          `Too bright and not dimmable: ${Math.round(aboveShare * 100)} % of the tank gets more than ${print(words, high)}${height(words)}.`,
-      }
-    return {
-      ...base,
-      outcome: 'pass',
-      say: (words) =>
-        `Up to ${print(words, brightestUmol)} half way down${height(words)}; your corals want ${words.pair([low, high], 'umol/m2/s')}.`,
-    }
-  }
-  return tryHeights(lit, (plane) => agree(isDimmable(specs), (dimmable) => judgeAt(plane, dimmable)))
+  const judgeOne: JudgeLit = (tried) => agree(isDimmable(specs), (dimmable) => judge(tried, dimmable))
+  const found = { ...tryHeights(lit, specs, judgeOne), rests: () => planeRests }
+  const strong = chooseBand(['sps'])
+  if (found.outcome !== 'fail' || !strong || !scene.plan.assumed.has('goals.coral')) return found
+  const at: Lit['at'] = (count, heightMm) => lightPlane(scene, specs, count, heightMm, strong)
+  if (judgeOne({ ...lit, band: strong, at, most: lit.count }).outcome !== 'pass') return found
+  const say: Say = (words) => `${found.say(words)} It suits small-polyp corals; we assumed soft and large-polyp ones.`
+  return { ...found, outcome: 'change' as const, say }
 }
 
-function judgeCoverage(scene: Scene, candidate: Candidate): Judgement | null {
-  const lit = light(scene, candidate)
-  if (!lit || !isLit(lit)) return lit
-  const { piece, mayMultiply } = candidate
-  const { lightCoverPass, lightCoverChange, lightMostUnits } = thresholds
-  const isEnough = (share: number) => share >= lightCoverPass.value
-  const judgeAt = (plane: Plane, dimmable: boolean): Judgement => {
+const isEnough = (share: number) => share >= thresholds.lightCoverPass.value
+
+/** The fewest of the light, from what is asked about on, that cover the plane; undefined where four do not. */
+function findEnough(lit: Lit, dimmable: boolean): number | undefined {
+  for (let { count } = lit; count <= lit.most; count += 1)
+    if (isEnough(shareOf(lit.at(count, lit.heightMm), dimmable))) return count
+  return undefined
+}
+
+const judgeIntensity = (scene: Scene, candidate: Candidate): Judgement | null =>
+  judgeLit(scene, candidate, (lit, dimmable) => {
+    const { specs } = candidate.piece
+    const count = findEnough(lit, dimmable) ?? lit.count
+    const { brightestUmol, aboveShare } = lit.at(count, lit.heightMm)
+    const [low, high] = lit.band
+    const reading = readMeasure(specs, 'ppfdUmol') ?? readMeasure(specs, 'photonFluxUmolS')
+    const probability = () => {
+      if (!reading || reading.value === 0) return brightestUmol >= low ? 1 : 0
+      const { value, source, plusMinus } = reading
+      const u = (brightestUmol * standardUncertainty(value, source, plusMinus, 'other')) / value
+      return probabilityAtLeast(brightestUmol, low, u)
+    }
+    const base = { measured: brightestUmol, limit: low, probability }
+    const height = sayHeight(lit.heightMm, lit.isHeightGiven)
+    const wants: Say = (words) => `${lit.whose} want ${words.pair([low, high], 'umol/m2/s')}`
+    const brightest: Say = (words) =>
+      `${words.measure(brightestUmol, 'umol/m2/s')} half way down${count > lit.count ? ` under ${countOfThese(count).toLowerCase()}` : ''}${height(words)}`
+    if (brightestUmol < low)
+      return { ...base, outcome: 'fail', say: (words) => `Too dim: at most ${brightest(words)}; ${wants(words)}.` }
+    if (!dimmable && aboveShare > brightMost)
+      return {
+        outcome: 'fail',
+        measured: brightestUmol,
+        limit: null,
+        margin: (brightMost - aboveShare) / brightMost,
+        say: (words) =>
+          `Too bright and not dimmable: ${Math.round(aboveShare * 100)} % of the tank gets more than ${words.measure(high, 'umol/m2/s')}${height(words)}; ${wants(words)}.`,
+      }
+    return { ...base, outcome: 'pass', say: (words) => `Up to ${brightest(words)}; ${wants(words)}.` }
+  })
+
+/** Share of the plane that a light which cannot be dimmed may put above the band. */
+const brightMost = 0.5
+
+const judgeCoverage = (scene: Scene, candidate: Candidate): Judgement | null =>
+  judgeLit(scene, candidate, (lit, dimmable) => {
+    const plane = lit.at(lit.count, lit.heightMm)
     const share = shareOf(plane, dimmable)
     const setting = dimmable && plane.bestPercent < 100 ? ` at ${plane.bestPercent} %` : ''
-    const covers = `${Math.round(share * 100)} % of the tank${setting}`
-    const base = { measured: share, limit: lightCoverPass.value }
-    if (isEnough(share) && isMultiplied(candidate))
+    const height = sayHeight(lit.heightMm, lit.isHeightGiven)
+    const covers: Say = (words) => `${Math.round(share * 100)} % of the tank${setting}${height(words)}`
+    const enough = findEnough(lit, dimmable)
+    const cautions = warnSpill(scene, candidate, enough ?? lit.count, lit.heightMm)
+    const base = { measured: share, limit: thresholds.lightCoverPass.value, cautions }
+    if (enough === lit.count && isMultiplied(candidate))
       return {
         ...base,
         outcome: 'change',
-        say: () => `${countOfThese(lit.count)}: together they light ${covers}, one alone does not.`,
+        say: (words) => `${countOfThese(lit.count)}: together they light ${covers(words)}, one alone too little.`,
       }
-    if (isEnough(share))
-      return {
-        ...base,
-        outcome: 'pass',
-        cautions: warnSpill(scene, candidate, plane),
-        say: (words) => `Lights ${covers}${sayHeight(plane.heightMm, lit.isHeightGiven)(words)}.`,
-      }
-    if (mayMultiply !== false && !isMultiplied(candidate)) {
-      for (let count = lit.count + 1; count <= lightMostUnits.value; count += 1)
-        if (isEnough(shareOf(lit.at(count, plane.heightMm), dimmable)))
-          return {
-            ...base,
-            outcome: 'change',
-            enough: count,
-            say: () =>
-              `${countOfThese(count)}: ${lit.count === 1 ? 'one lights' : `${lit.count} light`} only ${covers}.`,
-          }
-    }
-    if (share >= lightCoverChange.value)
+    if (enough === lit.count) return { ...base, outcome: 'pass', say: (words) => `Lights ${covers(words)}.` }
+    if (enough !== undefined)
       return {
         ...base,
         outcome: 'change',
-        cautions: warnSpill(scene, candidate, plane),
-        say: () => `Lights ${covers}: the ends stay dim.`,
+        enough,
+        say: (words) =>
+          `${countOfThese(enough)}: ${lit.count === 1 ? 'one lights' : `${lit.count} light`} only ${covers(words)}.`,
       }
-    return { ...base, outcome: 'fail', say: () => `Lights only ${covers}.` }
-  }
-  return tryHeights(lit, (plane) => agree(isDimmable(piece.specs), (dimmable) => judgeAt(plane, dimmable)))
-}
+    if (share >= thresholds.lightCoverChange.value)
+      return { ...base, outcome: 'change', say: (words) => `Lights ${covers(words)}: the ends stay dim.` }
+    return { ...base, outcome: 'fail', cautions: [], say: (words) => `Lights only ${covers(words)}.` }
+  })
 
-function warnSpill(scene: Scene, { piece, quantity }: Candidate, { heightMm }: Plane): readonly Say[] {
-  const spill = findSpill(scene, piece.specs, quantity, heightMm)
+function warnSpill(scene: Scene, { piece }: Candidate, count: number, heightMm: number): readonly Say[] {
+  const spill = findSpill(scene, piece.specs, count, heightMm)
   if (spill <= thresholds.lightSpill.value) return []
   return [
     (words) => {
-      const lower = findLowerMm(scene, piece.specs, quantity, heightMm)
+      const lower = findLowerMm(scene, piece.specs, count, heightMm)
+      const limit = `${thresholds.lightSpill.value * 100} %`
       const cure =
-        lower === null ? 'no height brings it under' : `${words.length(lower)} above the water brings it under`
-      return `${Math.round(spill * 100)} % of its light misses the water; ${cure} ${thresholds.lightSpill.value * 100} %. Estimates are estimates: measure before trusting livestock to them.`
+        lower === null
+          ? `no height brings that under ${limit}`
+          : `with the lens ${words.length(lower)} above the water it is under ${limit}`
+      return `${Math.round(spill * 100)} % of its light misses the water; ${cure}. Estimates are estimates: measure before trusting livestock to them.`
     },
   ]
 }
@@ -198,8 +216,9 @@ function warnSpill(scene: Scene, { piece, quantity }: Candidate, { heightMm }: P
 export function rankLight(scene: Scene, candidate: Candidate): number | null {
   const lit = light(scene, candidate)
   if (!lit || !isLit(lit)) return null
-  const share = shareOf(lit.plane, isDimmable(candidate.piece.specs) ?? false)
-  return Math.round((1 - share) * 100) + findSpill(scene, candidate.piece.specs, candidate.quantity, lit.plane.heightMm)
+  const { heightMm, count } = lit
+  const share = shareOf(lit.at(count, heightMm), isDimmable(candidate.piece.specs) ?? false)
+  return Math.round((1 - share) * 100) + findSpill(scene, candidate.piece.specs, count, heightMm)
 }
 
 export const lightTargetReads = lampReads
@@ -217,7 +236,7 @@ export const lightIntensity: Rule = {
   unit: 'umol/m2/s',
   limitIs: 'least',
   basis: model,
-  rule: 'At full power the brightest point half way down the water reaches the lower end of the band that the corals are kept under; a light that cannot be dimmed must not put more than half of the plane above the upper end. Fish only: not judged.',
+  rule: 'At full power, with as many as cover the tank, the brightest point half way down the water reaches the lower end of the band that the corals are kept under; a light that cannot be dimmed must not put more than half of the plane above the upper end. Fish only: not judged.',
   reads: lampReads,
   uses: planeUses,
   failLabel: 'too dim or too bright',

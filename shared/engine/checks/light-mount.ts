@@ -4,25 +4,27 @@ import { practiceBasis } from '../thresholds'
 import type { Item } from '../types'
 import { readMeasure, readNumber, readSet, readText } from '../values'
 import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { sayUncounted } from '../counting'
 import { limitsOfMount, mountNames, suits } from './light-mounts'
 
 const lightsOf = ({ others }: Scene): readonly Item[] => others.filter((item) => item.piece.kind === 'light')
 
-const noLight: Judgement = { outcome: 'pass', say: () => 'There is no light in the setup to hold against it.' }
+const noLight: Judgement = {
+  outcome: 'nodata',
+  missing: [],
+  say: () => 'There is no light in the setup to hold it against.',
+}
 
 function judgeLamp(scene: Scene, { piece }: Candidate): Judgement {
   const type = readText(piece.specs, 'type')
   if (type === undefined) return lacking(['type'], () => 'Nobody has recorded what sort of mount it is.')
   const lights = lightsOf(scene)
   if (lights.length === 0) return noLight
-  const takes = lights.some(({ piece: { specs } }) =>
-    [...(readSet<string>(specs, 'mountsIncluded') ?? []), ...(readSet<string>(specs, 'mountsPossible') ?? [])].includes(
-      type,
-    ),
-  )
-  const unrecorded = lights.every(({ piece: { specs } }) => !specs['mountsIncluded'] && !specs['mountsPossible'])
-  if (unrecorded)
-    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded which mounts the light takes.' }
+  const setsOf = ({ piece: { specs } }: Item) =>
+    ['mountsIncluded', 'mountsPossible'].map((key) => readSet<string>(specs, key))
+  const takes = lights.some((item) => setsOf(item).some((mounts) => mounts?.includes(type)))
+  if (!takes && lights.some((item) => setsOf(item).includes(undefined)))
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded all the mounts that the light takes.' }
   return {
     outcome: takes ? 'pass' : 'fail',
     measured: type,
@@ -30,24 +32,21 @@ function judgeLamp(scene: Scene, { piece }: Candidate): Judgement {
   }
 }
 
-function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
+function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
   const load = readMeasure(piece.specs, 'maxLoadKg')
   if (!load) return lacking(['maxLoadKg'], () => 'Nobody has recorded the load it carries.')
-  const masses = lightsOf(scene).map((item) => readNumber(item.piece.specs, 'massKg'))
-  if (masses.length === 0) return noLight
-  if (masses.includes(undefined))
+  const lights = lightsOf(scene)
+  const masses = lights.flatMap((item) => readNumber(item.piece.specs, 'massKg') ?? [])
+  if (lights.length === 0) return noLight
+  if (masses.length < lights.length)
     return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded what the light weighs.' }
-  const heaviest = Math.max(...(masses as number[]))
+  const heaviest = Math.max(...masses)
   return {
     outcome: load.value >= heaviest ? 'pass' : 'fail',
     measured: load.value,
     limit: heaviest,
     probability: () =>
-      probabilityAtLeast(
-        load.value,
-        heaviest,
-        quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
-      ),
+      probabilityAtLeast(load.value, heaviest, standardUncertainty(load.value, load.source, load.plusMinus, 'other')),
     say: (words) => `Carries ${words.mass(load.value)}, and the light weighs ${words.mass(heaviest)}.`,
   }
 }
@@ -55,15 +54,21 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
 function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
   const type = readText(piece.specs, 'type')
   if (type === undefined) return lacking(['type'], () => 'Nobody has recorded what sort of mount it is.')
-  const lampHeightMm = Math.max(0, ...lightsOf(scene).map((item) => readNumber(item.piece.specs, 'heightMm') ?? 0))
-  const found = suits(scene, type, limitsOfMount(piece.specs), lampHeightMm)
+  if (type === 'canopy')
+    return { outcome: 'nodata', missing: [], say: () => 'Whether a canopy goes over this tank cannot be checked here.' }
+  const lights = lightsOf(scene)
+  const heights = lights.flatMap((item) => readNumber(item.piece.specs, 'heightMm') ?? [])
+  const found = suits(scene, type, limitsOfMount(piece.specs), Math.max(0, ...heights))
   if (found === undefined) {
     const keys = type === 'arm' ? ['rimMinMm', 'rimMaxMm'] : ['spanMinMm', 'spanMaxMm']
     const missing = keys.filter((key) => readNumber(piece.specs, key) === undefined)
     return lacking(missing, () => `Nobody has recorded the ${type === 'arm' ? 'rims' : 'spans'} that it fits.`)
   }
   const { tank, room } = scene.plan
+  const isHung = type === 'hanging' || type === 'ceiling'
+  const unknown = isHung ? lights.length - heights.length : 0
   return {
+    cautions: unknown > 0 ? [sayUncounted(unknown, 'height')] : [],
     outcome: found ? 'pass' : 'fail',
     measured: type === 'arm' ? tank.wallMm : type === 'rim-legs' ? tank.outerLengthMm : room.ceilingMm,
     say: (words) => {
@@ -111,7 +116,14 @@ export const lightMountRules: KindRules = {
       unit: 'mm',
       rule: 'Clamp around the wall, legs across the length or width, or height under the ceiling.',
       reads: ['type', 'rimMinMm', 'rimMaxMm', 'spanMinMm', 'spanMaxMm'],
-      uses: ['tank.wallMm', 'tank.outerLengthMm', 'tank.outerWidthMm', 'room.ceilingMm', 'room.tankTopMm'],
+      uses: [
+        'tank.wallMm',
+        'tank.outerLengthMm',
+        'tank.outerWidthMm',
+        'room.ceilingMm',
+        'room.tankTopMm',
+        'tank.outerHeightMm',
+      ],
       failLabel: 'not made for this tank',
       judge: judgeTank,
     }),

@@ -1,3 +1,4 @@
+import { joinNames } from '../counting'
 import { lacking, type Candidate, type Judgement } from '../rule'
 import type { Scene } from '../scene'
 import { defaults } from '../setup/defaults'
@@ -26,7 +27,7 @@ export function suits(
   { plan }: Scene,
   type: string,
   limits: Limits,
-  lampHeightMm: number,
+  lampHeightMm: number | undefined,
   lensMm: number = defaults.mountHeightMm,
 ): boolean | undefined {
   const { tank, room } = plan
@@ -40,8 +41,9 @@ export function suits(
     const across = within(tank.outerWidthMm, limits.spanMinMm, limits.spanMaxMm)
     return along === true || across === true ? true : along === undefined || across === undefined ? undefined : false
   }
-  if (type === 'canopy') return false
-  return isWithinMm(room.tankTopMm + lensMm + lampHeightMm, room.ceilingMm)
+  if (type === 'canopy') return undefined
+  const isUnderCeiling = isWithinMm(room.tankTopMm + lensMm + (lampHeightMm ?? 0), room.ceilingMm)
+  return isUnderCeiling && lampHeightMm === undefined ? undefined : isUnderCeiling
 }
 
 const limitsOfLight = (specs: Specs): Limits => ({
@@ -58,7 +60,19 @@ export const limitsOfMount = (specs: Specs): Limits => ({
   spanMaxMm: readNumber(specs, 'spanMaxMm'),
 })
 
-const listNames = (types: readonly string[]) => types.map((type) => mountNames[type] ?? type).join(' or ')
+const listNames = (types: readonly string[]) =>
+  joinNames(
+    types.map((type) => mountNames[type] ?? type),
+    'or',
+  )
+
+/** What has to be known to tell whether a mount of a sort suits. */
+const missingFor: Readonly<Record<string, readonly string[]>> = {
+  arm: ['armRimMinMm', 'armRimMaxMm'],
+  'rim-legs': ['legSpanMinMm', 'legSpanMaxMm'],
+  hanging: ['heightMm'],
+  ceiling: ['heightMm'],
+}
 
 /** Whether a mount that comes with the light, stands in the setup, or can be bought suits the tank. */
 export function judgeMount(scene: Scene, { piece, mountHeightMm }: Candidate): Judgement {
@@ -67,7 +81,7 @@ export function judgeMount(scene: Scene, { piece, mountHeightMm }: Candidate): J
   const possible = readSet<Mount>(specs, 'mountsPossible')
   if (!included && !possible)
     return lacking(['mountsIncluded', 'mountsPossible'], () => 'Nobody has recorded how it is mounted.')
-  const lampHeightMm = readNumber(specs, 'heightMm') ?? 0
+  const lampHeightMm = readNumber(specs, 'heightMm')
   const check = (type: string, limits: Limits) => suits(scene, type, limits, lampHeightMm, mountHeightMm)
   const own = (included ?? []).map((type) => ({ type, suits: check(type, limitsOfLight(specs)) }))
   const suiting = own.find((mount) => mount.suits)
@@ -85,18 +99,13 @@ export function judgeMount(scene: Scene, { piece, mountHeightMm }: Candidate): J
       check(readText(item.piece.specs, 'type') ?? '', limitsOfMount(item.piece.specs)),
   )
   if (there) return { outcome: 'pass', measured: sold, say: () => 'The light mount in the setup holds it.' }
-  const unclear = own.filter((mount) => mount.suits === undefined)
-  if (unclear.length > 0) {
-    const missing = unclear[0]?.type === 'arm' ? ['armRimMinMm', 'armRimMaxMm'] : ['legSpanMinMm', 'legSpanMaxMm']
-    return lacking(
-      missing,
-      () => `Comes with ${listNames(unclear.map(({ type }) => type))}; nobody has recorded what it fits.`,
-    )
+  const [unclear] = own.filter((mount) => mount.suits === undefined)
+  if (unclear) {
+    const missing = (missingFor[unclear.type] ?? []).filter((key) => specs[key] === undefined)
+    return lacking(missing, () => `Comes with ${mountNames[unclear.type]}; nobody has recorded what it fits.`)
   }
-  const open = sold.filter(
-    (type) =>
-      check(type, { rimMinMm: undefined, rimMaxMm: undefined, spanMinMm: undefined, spanMaxMm: undefined }) !== false,
-  )
+  if (!included) return lacking(['mountsIncluded'], () => 'Nobody has recorded which mounts come with it.')
+  const open = sold.filter((type) => check(type, limitsOfLight(specs)) !== false)
   if (open.length > 0)
     return {
       outcome: 'change',
@@ -104,9 +113,10 @@ export function judgeMount(scene: Scene, { piece, mountHeightMm }: Candidate): J
       asks: { need: 'light-mount', amount: null, unit: null },
       say: () => `Needs ${listNames(open)}, sold apart.`,
     }
+  if (!possible) return lacking(['mountsPossible'], () => 'Nobody has recorded which mounts its maker sells for it.')
   return {
     outcome: 'change',
-    measured: [...(included ?? []), ...sold],
+    measured: [...included, ...sold],
     asks: { need: 'light-mount', amount: null, unit: null },
     say: () => 'Its maker has no mount for this tank; a home-made one is outside what can be checked here.',
   }

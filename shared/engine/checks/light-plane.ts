@@ -1,4 +1,4 @@
-import { once, type Scene } from '../scene'
+import type { Scene } from '../scene'
 import { findBestDimming, shareAbove, summariseMap, shareInBand } from '../physics/light-coverage'
 import { mapLight, type Lamp, type LightScene } from '../physics/light-map'
 import { findHeightForSpillMm, shareSpilled } from '../physics/light-spill'
@@ -61,12 +61,15 @@ function describeLamp(specs: Specs): Lamp {
   }
 }
 
-/** Lens to water where nobody said: by the mount that comes with the light. */
-export function chooseHeightMm(specs: Specs): number {
+/** Whether legs of its own hold the light, and nothing that comes with it could hold it higher. */
+export function standsOnLegs(specs: Specs): boolean {
   const mounts = readSet<string>(specs, 'mountsIncluded') ?? []
-  const standsOnRim = mounts.includes('rim-legs') && !mounts.includes('arm') && !mounts.includes('hanging')
-  return standsOnRim ? defaults.legsHeightMm : defaults.mountHeightMm
+  return mounts.includes('rim-legs') && !mounts.includes('arm') && !mounts.includes('hanging')
 }
+
+/** Lens to water where nobody said: by the mount that comes with the light. */
+export const chooseHeightMm = (specs: Specs): number =>
+  standsOnLegs(specs) ? defaults.legsHeightMm : defaults.mountHeightMm
 
 /** So many of a light over the display, the plane half way down. The light must lack nothing of `listMissing`. */
 export function describeLightScene({ plan }: Scene, specs: Specs, count: number, heightMm: number): LightScene {
@@ -81,16 +84,23 @@ export function describeLightScene({ plan }: Scene, specs: Specs, count: number,
   }
 }
 
-const keepPlanes = () => new WeakMap<Specs, Map<string, Plane>>()
-const keepSpills = () => new WeakMap<Specs, Map<string, number>>()
+/** Planes and spills that were computed, per light: setups come back with the same tank over and over. */
+const planes = new WeakMap<Specs, Map<string, Plane>>()
+const spills = new WeakMap<Specs, Map<string, number>>()
+const mostKept = 500
 
 function remember<T>(kept: WeakMap<Specs, Map<string, T>>, specs: Specs, key: string, compute: () => T): T {
   let byKey = kept.get(specs)
   if (!byKey) kept.set(specs, (byKey = new Map<string, T>()))
   let known = byKey.get(key)
-  if (known === undefined) byKey.set(key, (known = compute()))
+  if (known !== undefined) return known
+  if (byKey.size >= mostKept) byKey.clear()
+  byKey.set(key, (known = compute()))
   return known
 }
+
+const keyOf = ({ displayLengthMm, displayWidthMm, depthMm, heightMm, count }: LightScene): string =>
+  [displayLengthMm, displayWidthMm, depthMm, heightMm, count].join(' ')
 
 /** The target plane under so many of a light, half way down the water. The light must lack nothing of `listMissing`. */
 export function lightPlane(
@@ -100,8 +110,9 @@ export function lightPlane(
   heightMm: number,
   band: readonly [number, number],
 ): Plane {
-  return remember(once(scene, keepPlanes), specs, `${count} ${heightMm} ${band.join(' ')}`, () => {
-    const map = mapLight(describeLightScene(scene, specs, count, heightMm))
+  const lit = describeLightScene(scene, specs, count, heightMm)
+  return remember(planes, specs, `${keyOf(lit)} ${band.join(' ')}`, () => {
+    const map = mapLight(lit)
     const { brightestUmol, lowestUmol, meanUmol } = summariseMap(map)
     const best = findBestDimming(map, band)
     return {
@@ -118,10 +129,10 @@ export function lightPlane(
 }
 
 /** Share of the photons that miss the water. */
-export const findSpill = (scene: Scene, specs: Specs, count: number, heightMm: number): number =>
-  remember(once(scene, keepSpills), specs, `${count} ${heightMm}`, () =>
-    shareSpilled(describeLightScene(scene, specs, count, heightMm)),
-  )
+export function findSpill(scene: Scene, specs: Specs, count: number, heightMm: number): number {
+  const lit = describeLightScene(scene, specs, count, heightMm)
+  return remember(spills, specs, keyOf(lit), () => shareSpilled(lit))
+}
 
 /** The height that brings the spill under the threshold, mm, or null. */
 export const findLowerMm = (scene: Scene, specs: Specs, count: number, heightMm: number): number | null =>

@@ -13,11 +13,9 @@ function judgeBody({ plan }: Scene, { piece }: Candidate): Judgement {
   if (!length) return lacking(['lengthMm'], () => 'Nobody has recorded its length yet.')
   const tankMm = plan.tank.outerLengthMm
   const limitMm = tankMm + thresholds.lightOverTankMm.value
-  const mounts = [
-    ...(readSet<string>(piece.specs, 'mountsIncluded') ?? []),
-    ...(readSet<string>(piece.specs, 'mountsPossible') ?? []),
-  ]
-  const canHang = mounts.some((mount) => hangs.includes(mount))
+  const mountKeys = ['mountsIncluded', 'mountsPossible']
+  const canHang = mountKeys.some((key) => readSet<string>(piece.specs, key)?.some((mount) => hangs.includes(mount)))
+  const isUnrecorded = mountKeys.some((key) => piece.specs[key] === undefined)
   const base = {
     measured: length.value,
     limit: limitMm,
@@ -35,9 +33,16 @@ function judgeBody({ plan }: Scene, { piece }: Candidate): Judgement {
       say: (words) => `${words.length(length.value)} long over ${words.length(tankMm)} of tank.`,
     }
   const over = length.value - tankMm
-  if (canHang && isWithinMm(length.value, thresholds.lightHungRatio.value * tankMm))
-    return { ...base, outcome: 'change', say: (words) => `${words.length(over)} longer than the tank: hang it.` }
-  return { ...base, outcome: 'fail', say: (words) => `${words.length(over)} longer than the tank.` }
+  const isShortEnough = isWithinMm(length.value, thresholds.lightHungRatio.value * tankMm)
+  if (canHang && isShortEnough)
+    return { ...base, outcome: 'change', say: (words) => `It is ${words.length(over)} longer than the tank: hang it.` }
+  if (isUnrecorded && isShortEnough)
+    return lacking(
+      mountKeys.filter((key) => piece.specs[key] === undefined),
+      (words) =>
+        `It is ${words.length(over)} longer than the tank, and nobody has recorded whether it can hang above it.`,
+    )
+  return { ...base, outcome: 'fail', say: (words) => `It is ${words.length(over)} longer than the tank.` }
 }
 
 interface Band {
@@ -62,7 +67,7 @@ function judgeSpectrum(_scene: Scene, { piece }: Candidate): Judgement {
       cautions: [() => 'Its spectrum is not recorded: ask for a plot before keeping corals under it.'],
     }
   const share = findBlueShare(bands)
-  const isBlue = share >= thresholds.blueShare.value
+  const isBlue = share + 1e-9 >= thresholds.blueShare.value
   return {
     outcome: isBlue ? 'pass' : 'change',
     measured: share,
@@ -80,13 +85,19 @@ function judgeControl(scene: Scene, { piece }: Candidate): Judgement | null {
   if (control !== 'controller-needed')
     return { outcome: 'change', measured: control, say: () => 'Cannot be set by app.' }
   const group = readText(piece.specs, 'controlGroup')
-  const has = scene.others.some(
-    (item) =>
-      item.piece.kind === 'light-controller' &&
-      group !== undefined &&
-      readText(item.piece.specs, 'controlGroup') === group,
-  )
-  if (has) return { outcome: 'pass', measured: control, say: () => 'The light controller in the setup speaks to it.' }
+  const controllers = scene.others
+    .filter((item) => item.piece.kind === 'light-controller')
+    .map((item) => readText(item.piece.specs, 'controlGroup'))
+  if (group !== undefined && controllers.includes(group))
+    return { outcome: 'pass', measured: control, say: () => 'The light controller in the setup speaks to it.' }
+  if (group === undefined && controllers.length > 0)
+    return lacking(['controlGroup'], () => 'Nobody has recorded which controllers it listens to.')
+  if (controllers.includes(undefined))
+    return {
+      outcome: 'nodata',
+      missing: [],
+      say: () => 'Nobody has recorded which lights the light controller speaks to.',
+    }
   return {
     outcome: 'change',
     measured: control,
@@ -140,7 +151,14 @@ export const lightRules: KindRules = {
         'legSpanMaxMm',
         'heightMm',
       ],
-      uses: ['tank.wallMm', 'tank.outerLengthMm', 'tank.outerWidthMm', 'room.ceilingMm', 'room.tankTopMm'],
+      uses: [
+        'tank.wallMm',
+        'tank.outerLengthMm',
+        'tank.outerWidthMm',
+        'room.ceilingMm',
+        'room.tankTopMm',
+        'tank.outerHeightMm',
+      ],
       failLabel: 'without a mount',
       judge: judgeMount,
     }),
@@ -157,5 +175,5 @@ export const lightRules: KindRules = {
   ],
   target: rankLight,
   targetReads: lightTargetReads,
-  feltThrough: ['powerW', 'plugs', 'massKg', 'controlGroup', 'control', 'mountsPossible', 'mountsIncluded'],
+  feltThrough: ['powerW', 'plugs', 'massKg', 'heightMm', 'controlGroup', 'control', 'mountsPossible', 'mountsIncluded'],
 }

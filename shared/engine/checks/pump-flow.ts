@@ -26,9 +26,10 @@ export interface Plumbing {
   readonly pipe: Pipe
 }
 
-/** The bore of the return as built, or what tanks of the size have, mm. */
-export function chooseBoreMm({ plan }: Scene): number {
-  return plan.tank.returnBoreMm ?? (plan.tank.grossL <= 100 ? defaults.boreSmallMm : defaults.boreLargeMm)
+/** The smaller of the tank's return and the pump's outlet; where neither is known, what tanks of the size have, mm. */
+export function chooseBoreMm({ plan: { tank } }: Scene, specs: Specs): number {
+  const known = [tank.returnBoreMm, readNumber(specs, 'boreMm')].filter((boreMm) => boreMm !== undefined)
+  return known.length > 0 ? Math.min(...known) : tank.grossL <= 100 ? defaults.boreSmallMm : defaults.boreLargeMm
 }
 
 /** The lift from a sump's water to the return under the tank's rim, or from a chamber's level to the display's, m. */
@@ -40,8 +41,7 @@ export function findStaticHeadM({ plan }: Scene, basin: Basin): number {
 }
 
 export function describePlumbing(scene: Scene, specs: Specs, basin: Basin): Plumbing {
-  const bores = [chooseBoreMm(scene), readNumber(specs, 'boreMm') ?? Number.POSITIVE_INFINITY]
-  const boreMm = Math.min(...bores)
+  const boreMm = chooseBoreMm(scene, specs)
   const lengthMm = basin.id === 'sump' ? sumpPipeMm : chamberPipeMm
   return {
     staticHeadM: findStaticHeadM(scene, basin),

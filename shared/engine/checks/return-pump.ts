@@ -69,8 +69,7 @@ const sayTurnover =
     const outcome = decide(judged, bands)
     if (outcome === 'pass')
       return judged < perHour ? `${flow}; its speed control brings that down to the ${wanted} wanted.` : `${flow}.`
-    if (judged < bands.pass[0])
-      return `${outcome === 'change' ? 'Low' : 'Too weak'}: ${flow}; ${wanted} are wanted.`
+    if (judged < bands.pass[0]) return `${outcome === 'change' ? 'Low' : 'Too weak'}: ${flow}; ${wanted} are wanted.`
     const slowest = judged < perHour ? `, and still ${words.number(judged, '/h')} at its slowest` : ''
     return `${outcome === 'change' ? 'Throttle it' : 'Far too strong'}: ${flow}${slowest}; ${wanted} are wanted.`
   }

@@ -1,104 +1,140 @@
-import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
+import type { Printer } from '../../units/print'
+import { lacking, type Candidate, type Judgement, type KindRules, type Say } from '../rule'
 import type { Scene } from '../scene'
 import { membraneFlowLpd } from '../physics/membrane'
 import type { Item, Specs } from '../types'
 import { readFlag, readNumber, readSet } from '../values'
+import { joinNames } from '../counting'
 import { createRuleMaker } from './build-rule'
+import { hasAreas, noAreas } from './shape'
 
-const stageNames: Readonly<Record<string, string>> = {
-  sediment: 'sediment',
-  carbon: 'carbon',
-  membrane: 'membrane',
-  deionisation: 'deionisation',
-}
+const wantedStages = ['sediment', 'carbon', 'membrane', 'deionisation']
 
 function judgeStages(_scene: Scene, { piece }: Candidate): Judgement {
   const stages = readSet<string>(piece.specs, 'stages')
   if (stages === undefined) return lacking(['stages'], () => 'Nobody has recorded its stages.')
   if (!stages.includes('membrane'))
     return { outcome: 'fail', measured: stages, say: () => 'Has no membrane: it cannot make pure water.' }
-  const missing = Object.keys(stageNames).filter((stage) => !stages.includes(stage))
+  const missing = wantedStages.filter((stage) => !stages.includes(stage))
   return {
     outcome: missing.length > 0 ? 'change' : 'pass',
     measured: stages,
     ...(missing.length > 0 && { asks: { need: 'filter-stage', amount: missing.length, unit: 'count' as const } }),
     say: () =>
       missing.length > 0
-        ? `Add a stage: ${missing.map((stage) => stageNames[stage]).join(' and ')}.`
+        ? `It lacks ${joinNames(missing)}: add ${missing.length === 1 ? 'that stage' : 'those stages'}.`
         : 'Sediment, carbon, membrane and deionisation.',
   }
 }
 
 const findBooster = (others: readonly Item[]) => others.find((item) => item.piece.kind === 'booster-pump')
 
+/** What stands between the tap and the membrane: a pump of its own, one in the setup, or nothing. */
+interface Feed {
+  readonly hasOwnBooster: boolean
+  /** Booster pumps of which one raises the pressure, the candidate first. */
+  readonly others: readonly Item[]
+}
+
 /** Pressure at the membrane, kPa: its rated one behind a booster of its own, a booster's outlet, else the tap's. */
-function findPressureKPa({ plan, others }: Scene, specs: Specs): number {
+function findPressureKPa({ plan }: Scene, specs: Specs, { hasOwnBooster, others }: Feed): number {
   const { feedKPa } = plan.water
-  if (readFlag(specs, 'boosterIncluded')) return Math.max(feedKPa, readNumber(specs, 'testPressureKPa') ?? feedKPa)
+  if (hasOwnBooster) return Math.max(feedKPa, readNumber(specs, 'testPressureKPa') ?? feedKPa)
   const booster = findBooster(others)
   return Math.max(feedKPa, (booster && readNumber(booster.piece.specs, 'outletKPa')) ?? feedKPa)
 }
 
-/** Litres a day that the unit makes at the setup's tap; the attributes it lacks where that cannot be told. */
-export function findOutputLpd(scene: Scene, specs: Specs): number | readonly string[] {
-  const [ratedLpd, testPressureKPa, testTempC, wasteRatio] = [
-    'membraneLpd',
-    'testPressureKPa',
-    'testTempC',
-    'wasteRatio',
-  ].map((key) => readNumber(specs, key))
+const outputKeys = ['membraneLpd', 'testPressureKPa', 'testTempC', 'wasteRatio']
+
+/** Litres a day that the unit makes on a feed; the attributes it lacks where that cannot be told. */
+export function findOutputLpd(scene: Scene, specs: Specs, feed: Feed): number | readonly string[] {
+  const [ratedLpd, testPressureKPa, testTempC, wasteRatio] = outputKeys.map((key) => readNumber(specs, key))
   if (ratedLpd === undefined || testPressureKPa === undefined || testTempC === undefined || wasteRatio === undefined)
-    return ['membraneLpd', 'testPressureKPa', 'testTempC', 'wasteRatio'].filter(
-      (key) => readNumber(specs, key) === undefined,
-    )
+    return outputKeys.filter((key) => readNumber(specs, key) === undefined)
   const testTdsPpm = readNumber(specs, 'testTdsPpm')
   const { feedTempC, feedTdsPpm } = scene.plan.water
   return membraneFlowLpd(
     { ratedLpd, testPressureKPa, testTempC, ...(testTdsPpm !== undefined && { testTdsPpm }) },
-    { feedKPa: findPressureKPa(scene, specs), feedTempC, feedTdsPpm, wasteRatio },
+    { feedKPa: findPressureKPa(scene, specs, feed), feedTempC, feedTdsPpm, wasteRatio },
   )
 }
 
+/** "3 days", "less than a day" */
+const sayDays = (days: number, words: Printer) => {
+  const printed = words.number(days, 'count')
+  return days < 0.95 ? 'less than a day' : printed === '1' ? 'a day' : `${printed} days`
+}
+
 function judgeOutput(scene: Scene, { piece, quantity }: Candidate): Judgement {
-  const found = findOutputLpd(scene, piece.specs)
+  const { plan, others } = scene
+  const hasOwnBooster = readFlag(piece.specs, 'boosterIncluded')
+  const found = findOutputLpd(scene, piece.specs, { hasOwnBooster: hasOwnBooster ?? false, others })
   if (typeof found !== 'number')
     return lacking(found, () => 'Nobody has recorded all that its output is computed from.')
+  if (plan.assumed.has('water.litresPerWeek') && !hasAreas(plan)) return noAreas(plan)
   const outputLpd = found * quantity
-  const needLpd = scene.plan.water.litresPerWeek / 7
-  const firstFillDays = outputLpd > 0 ? scene.plan.tank.waterL / outputLpd : null
+  const needLpd = plan.water.litresPerWeek / 7
+  const isEnough = outputLpd >= needLpd
+  if (!isEnough && hasOwnBooster === undefined)
+    return lacking(['boosterIncluded'], () => 'Makes too little at your tap, unless a booster pump comes with it.')
+  const booster = findBooster(others)
+  if (!isEnough && !hasOwnBooster && booster && readNumber(booster.piece.specs, 'outletKPa') === undefined)
+    return {
+      outcome: 'nodata',
+      missing: [],
+      say: () => 'Nobody has recorded the pressure that the booster pump gives.',
+    }
+  const fillDays = outputLpd > 0 && hasAreas(plan) ? plan.tank.waterL / outputLpd : undefined
   return {
-    outcome: outputLpd >= needLpd ? 'pass' : 'fail',
+    outcome: isEnough ? 'pass' : 'fail',
     measured: outputLpd,
     limit: needLpd,
     say: (words) => {
-      const fill = firstFillDays === null ? '' : `; the first fill takes ${words.number(firstFillDays, 'count')} days`
-      return outputLpd >= needLpd
-        ? `Makes ${words.measure(outputLpd, 'L/d')} at your tap, of ${words.measure(needLpd, 'L/d')} needed${fill}.`
-        : `Makes only ${words.measure(outputLpd, 'L/d')} at your tap, and ${words.measure(needLpd, 'L/d')} are needed.`
+      const fill = fillDays === undefined ? '' : `; the first fill takes ${sayDays(fillDays, words)}`
+      const [made, needed] = [words.measure(outputLpd, 'L/d'), words.measure(needLpd, 'L/d')]
+      return isEnough
+        ? `Makes ${made} at your tap, and you need ${needed}${fill}.`
+        : `Makes only ${made} at your tap, and you need ${needed}.`
     },
   }
 }
 
 function judgePressure({ plan, others }: Scene, { piece }: Candidate): Judgement {
-  if (readFlag(piece.specs, 'boosterIncluded')) return { outcome: 'pass', say: () => 'Comes with a booster pump.' }
+  const hasOwnBooster = readFlag(piece.specs, 'boosterIncluded')
+  if (hasOwnBooster) return { outcome: 'pass', say: () => 'Comes with a booster pump.' }
   const least = readNumber(piece.specs, 'minFeedKPa')
   if (least === undefined) return lacking(['minFeedKPa'], () => 'Nobody has recorded the pressure it needs.')
   const { feedKPa } = plan.water
+  const base = { measured: feedKPa, limit: least }
+  const needs: Say = (words) =>
+    `Needs ${words.measure(least, 'kPa')}, and your tap has ${words.measure(feedKPa, 'kPa')}`
+  if (feedKPa >= least) return { ...base, outcome: 'pass', say: (words) => `${needs(words)}.` }
   const booster = findBooster(others)
-  if (feedKPa < least && booster)
+  const boostedKPa = booster && readNumber(booster.piece.specs, 'outletKPa')
+  if (boostedKPa !== undefined && boostedKPa >= least)
     return {
       outcome: 'pass',
-      measured: feedKPa,
+      measured: boostedKPa,
       limit: least,
-      say: () => 'The booster pump in the setup raises the pressure.',
+      say: (words) =>
+        `Needs ${words.measure(least, 'kPa')}; the booster pump in the setup gives ${words.measure(boostedKPa, 'kPa')}.`,
     }
+  if (booster && boostedKPa === undefined)
+    return {
+      outcome: 'nodata',
+      missing: [],
+      say: () => 'Nobody has recorded the pressure that the booster pump gives.',
+    }
+  if (hasOwnBooster === undefined)
+    return lacking(
+      ['boosterIncluded'],
+      (words) => `${needs(words)}: nobody has recorded whether a booster pump comes with it.`,
+    )
   return {
-    outcome: feedKPa >= least ? 'pass' : 'change',
-    measured: feedKPa,
-    limit: least,
-    ...(feedKPa < least && { asks: { need: 'feed-pressure', amount: least, unit: 'kPa' as const } }),
-    say: (words) =>
-      `Needs ${words.measure(least, 'kPa')}, and your tap has ${words.measure(feedKPa, 'kPa')}${feedKPa < least ? ': add a booster pump' : ''}.`,
+    ...base,
+    outcome: 'change',
+    asks: { need: 'feed-pressure', amount: least, unit: 'kPa' },
+    say: (words) => `${needs(words)}: add a booster pump.`,
   }
 }
 
@@ -135,7 +171,7 @@ export const roUnitRules: KindRules = {
       worst: 'change',
       unit: 'kPa',
       limitIs: 'least',
-      rule: 'The tap’s pressure is at least what it needs, or a booster pump comes with it or is in the setup.',
+      rule: 'The tap’s pressure is at least what it needs, or a booster pump comes with it, or one in the setup gives it.',
       reads: ['minFeedKPa', 'boosterIncluded'],
       uses: ['water.feedKPa'],
       failLabel: 'needing more pressure',
@@ -144,7 +180,8 @@ export const roUnitRules: KindRules = {
   ],
   targetReads: ['membraneLpd', 'testPressureKPa', 'testTempC', 'testTdsPpm', 'wasteRatio', 'boosterIncluded'],
   target: (scene, { piece, quantity }) => {
-    const found = findOutputLpd(scene, piece.specs)
+    const hasOwnBooster = readFlag(piece.specs, 'boosterIncluded') ?? false
+    const found = findOutputLpd(scene, piece.specs, { hasOwnBooster, others: scene.others })
     const needLpd = scene.plan.water.litresPerWeek / 7
     return typeof found === 'number' ? Math.abs(found * quantity - needLpd) / Math.max(needLpd, 1e-9) : null
   },

@@ -5,45 +5,53 @@ import { thresholds } from '../thresholds'
 import type { Item } from '../types'
 import { readNumber, readText } from '../values'
 import { createRuleMaker } from './build-rule'
-import { countOf } from '../counting'
+import { countOf, sayUncounted } from '../counting'
+import { hasAreas, noAreas, waterUses } from './shape'
 
 const rocksOf = (items: readonly Item[]) => items.filter((item) => item.piece.kind === 'rock')
 
 const massOf = ({ piece, quantity }: Item): number => quantity * (readNumber(piece.specs, 'packKg') ?? 0)
+const sumMass = (items: readonly Item[]): number => items.reduce((sum, item) => sum + massOf(item), 0)
 
-/** Whether live rock or sand was meant, by what the setup lists or listed. */
-export const wasLivePlanned = ({ plan }: Scene, kind: 'rock' | 'sand'): boolean =>
-  plan.setup.items.some((item) => item.piece.kind === kind && readText(item.piece.specs, 'state') === 'live')
+const isLive = ({ piece }: Item, kind: 'rock' | 'sand') =>
+  piece.kind === kind && readText(piece.specs, 'state') === 'live'
+
+/** Whether live rock or sand was meant, by what the setup lists or listed, and none of it stays. */
+export const isLiveLost = ({ plan, others }: Scene, kind: 'rock' | 'sand'): boolean =>
+  plan.setup.items.some((item) => isLive(item, kind)) && !others.some((item) => isLive(item, kind))
 
 function judgeAmount(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const packKg = readNumber(piece.specs, 'packKg')
   if (packKg === undefined) return lacking(['packKg'], () => 'Nobody has recorded how much is in a pack.')
-  const goalKg = scene.plan.goals.rockKg
+  const { plan } = scene
+  if (plan.assumed.has('goals.rockKg') && !hasAreas(plan)) return noAreas(plan)
+  const goalKg = plan.goals.rockKg
+  const baseGoalKg = thresholds.rockBaseShare.value * goalKg
   const rocks = rocksOf(scene.others)
-  const leftKg = Math.max(0, goalKg - rocks.reduce((sum, item) => sum + massOf(item), 0))
-  const isBase = (specs: Item['piece']['specs']) => readText(specs, 'form') === 'base'
+  const leftKg = Math.max(0, goalKg - sumMass(rocks))
   const packs = countPacks(leftKg / packKg)
   const form = readText(piece.specs, 'form')
-  const baseKg = rocks.filter((item) => isBase(item.piece.specs)).reduce((sum, item) => sum + massOf(item), 0)
-  const needsBase = form !== undefined && form !== 'base' && baseKg < thresholds.rockBaseShare.value * goalKg
+  const baseKg = sumMass(rocks.filter((item) => readText(item.piece.specs, 'form') === 'base'))
+  const isShort = form !== 'base' && baseKg < baseGoalKg
+  if (isShort && form === undefined) return lacking(['form'], () => 'Nobody has recorded whether it is base rock.')
+  const unknown = rocks.filter((item) => readNumber(item.piece.specs, 'packKg') === undefined).length
   const cautions = [
     () =>
       'Never use rock collected outdoors: it can carry pollution and pests, and taking it is often against the law.',
+    ...(unknown > 0 ? [sayUncounted(unknown, 'mass')] : []),
   ]
   return {
-    outcome: needsBase ? 'change' : 'pass',
+    outcome: isShort ? 'change' : 'pass',
     measured: packKg * quantity,
     limit: null,
     cautions,
-    ...(needsBase && {
-      asks: { need: 'base-rock', amount: thresholds.rockBaseShare.value * goalKg - baseKg, unit: 'kg' as const },
-    }),
+    ...(isShort && { asks: { need: 'base-rock', amount: baseGoalKg - baseKg, unit: 'kg' as const } }),
     say: (words) => {
       const amount =
         leftKg === 0
           ? 'The rock in the setup already reaches the goal'
           : `${countOf(packs, 'pack')} of ${words.mass(packKg)} for the ${words.mass(leftKg)} still wanted`
-      return needsBase ? `${amount}; at least half of it should be base rock, which this is not.` : `${amount}.`
+      return isShort ? `${amount}; at least half of all rock should be base rock, and this is not.` : `${amount}.`
     },
   }
 }
@@ -51,16 +59,17 @@ function judgeAmount(scene: Scene, { piece, quantity }: Candidate): Judgement {
 function judgeState(scene: Scene, { piece }: Candidate): Judgement {
   const state = readText(piece.specs, 'state')
   if (state === undefined) return lacking(['state'], () => 'Nobody has recorded whether it is live or dry.')
-  const isSlower = state !== 'live' && wasLivePlanned(scene, 'rock')
+  const isSlower = state !== 'live' && isLiveLost(scene, 'rock')
+  const name = state === 'artificial' ? 'Artificial' : 'Dry'
   return {
     outcome: isSlower ? 'change' : 'pass',
     measured: state,
     say: () =>
       isSlower
-        ? 'Dry where live was planned: the cycle takes longer.'
+        ? `${name} where live was planned: the cycle takes longer.`
         : state === 'live'
           ? 'Live rock: quarantine it, and look for what came with it.'
-          : 'Dry rock: the cycle takes its time.',
+          : `${name} rock: the tank has to cycle before animals go in.`,
   }
 }
 
@@ -74,7 +83,7 @@ export const rockRules: KindRules = {
       unit: 'kg',
       rule: 'Packs for what is still wanted of the goal; at least half of the goal is base rock.',
       reads: ['packKg', 'form'],
-      uses: ['goals.rockKg'],
+      uses: ['goals.rockKg', ...waterUses],
       failLabel: 'of another form',
       judge: judgeAmount,
     }),

@@ -4,10 +4,12 @@ import { countPacks, saltPacks } from '../physics/salt'
 import { readNumber } from '../values'
 import { createRuleMaker } from './build-rule'
 import { countOf } from '../counting'
+import { hasAreas, noAreas, waterUses } from './shape'
 
 function judgeAmount({ plan }: Scene, { piece }: Candidate): Judgement {
   const makesL = readNumber(piece.specs, 'makesL')
   if (makesL === undefined) return lacking(['makesL'], () => 'Nobody has recorded how much water a pack makes.')
+  if (!hasAreas(plan)) return noAreas(plan)
   const { salinityPpt } = plan.goals
   const packs = countPacks(saltPacks(plan.tank.waterL, salinityPpt, makesL))
   return {
@@ -30,7 +32,7 @@ export const saltMixRules: KindRules = {
       basis: { type: 'physics', source: 'In proportion to what a pack makes at 35 ppt' },
       rule: 'Whole packs for the first fill. Every marine salt mix is acceptable to start with.',
       reads: ['makesL'],
-      uses: ['goals.salinityPpt', 'tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm', 'tank.waterLineMm'],
+      uses: ['goals.salinityPpt', ...waterUses],
       failLabel: 'too little',
       judge: judgeAmount,
     }),

@@ -7,14 +7,13 @@ import { thresholds } from '../thresholds'
 import { readFlag, readNumber, readSet, readText } from '../values'
 import { createRuleMaker } from './build-rule'
 import { countOf } from '../counting'
-import { wasLivePlanned } from './rock'
-import { hasAreas, noAreas } from './shape'
+import { isLiveLost } from './rock'
+import { displayUses, hasAreas, noAreas } from './shape'
 
 function judgeMineral(_scene: Scene, { piece }: Candidate): Judgement {
   const mineral = readText(piece.specs, 'mineral')
   if (mineral === undefined) return lacking(['mineral'], () => 'Nobody has recorded what it is made of.')
-  const uses = readSet<string>(piece.specs, 'madeFor') ?? []
-  const isMarine = uses.includes('reef') || uses.includes('marine-fish')
+  const uses = readSet<string>(piece.specs, 'madeFor')
   const beach = () => 'Never use sand from a beach: it can carry contaminants, and taking it is often against the law.'
   const base = { measured: mineral, cautions: [beach] }
   if (mineral === 'aragonite' || mineral === 'calcite')
@@ -30,25 +29,29 @@ function judgeMineral(_scene: Scene, { piece }: Candidate): Judgement {
       cautions: [beach, () => 'Volcanic sand does not buffer the water and may hold magnetic grains.'],
       say: () => 'Volcanic sand.',
     }
-  return isMarine
+  if (uses === undefined)
+    return lacking(['madeFor'], () => 'Silica, and nobody has recorded whether it is made for salt water.')
+  return uses.includes('reef') || uses.includes('marine-fish')
     ? {
         ...base,
         outcome: 'change',
-        say: () => 'Silica made for marine use: it does not buffer the water, and can feed a diatom bloom.',
+        say: () => 'Silica made for salt water: it does not buffer the water, and can feed a diatom bloom.',
       }
-    : { ...base, outcome: 'fail', say: () => 'Silica that nobody makes for marine use.' }
+    : { ...base, outcome: 'fail', say: () => 'Silica that is not made for salt water.' }
 }
 
 function judgeMagnetic({ others }: Scene, { piece }: Candidate): Judgement | null {
-  const hasMagnet = others.some(
-    (item) => item.piece.kind === 'scraper' && readText(item.piece.specs, 'form') === 'magnet',
-  )
-  if (!hasMagnet) return null
+  const forms = others.filter((item) => item.piece.kind === 'scraper').map((item) => readText(item.piece.specs, 'form'))
+  const hasMagnet = forms.includes('magnet')
+  if (!hasMagnet && !forms.includes(undefined)) return null
   const isMagnetic = readFlag(piece.specs, 'magneticGrains')
   if (isMagnetic === undefined)
     return lacking(['magneticGrains'], () => 'Nobody has recorded whether a magnet picks up its grains.')
+  if (isMagnetic && !hasMagnet)
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded whether the scraper is a magnet.' }
   return {
     outcome: isMagnetic ? 'change' : 'pass',
+    measured: isMagnetic ? 'magnetic' : 'not magnetic',
     say: () =>
       isMagnetic
         ? 'The magnet scraper in the setup picks up its grains and will scratch the pane.'
@@ -104,7 +107,7 @@ function judgeAmount({ plan }: Scene, { piece }: Candidate): Judgement {
 function judgeState(scene: Scene, { piece }: Candidate): Judgement {
   const state = readText(piece.specs, 'state')
   if (state === undefined) return lacking(['state'], () => 'Nobody has recorded whether it is live or dry.')
-  const isSlower = state === 'dry' && wasLivePlanned(scene, 'sand')
+  const isSlower = state === 'dry' && isLiveLost(scene, 'sand')
   return {
     outcome: isSlower ? 'change' : 'pass',
     measured: state,
@@ -149,7 +152,7 @@ export const sandRules: KindRules = {
       },
       rule: 'The mass of a bed of the depth that is wanted over the display, in whole bags.',
       reads: ['packKg', 'bulkDensityKgL'],
-      uses: ['goals.sandDepthMm', 'tank.displayLengthMm', 'tank.displayWidthMm'],
+      uses: ['goals.sandDepthMm', ...displayUses],
       failLabel: 'too little',
       judge: judgeAmount,
     }),
@@ -172,5 +175,5 @@ export const sandRules: KindRules = {
       judge: judgeState,
     }),
   ],
-  feltThrough: ['grainMinMm', 'packKg', 'solidDensityKgL', 'magneticGrains'],
+  feltThrough: ['grainMinMm'],
 }

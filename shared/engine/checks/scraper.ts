@@ -1,67 +1,49 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
-import { isWithinMm, readFlag, readMeasure, readNumber, readSet, readText } from '../values'
-import { combineUncertainties, probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { isWithinMm, readFlag, readMeasure, readSet, readText } from '../values'
 import { createRuleMaker } from './build-rule'
+import { judgeMagnetWall } from './magnet-wall'
+import { findTankSize } from './tank-size'
 
 function judgeWall({ plan }: Scene, { piece }: Candidate): Judgement | null {
   const form = readText(piece.specs, 'form')
   if (form === undefined) return lacking(['form'], () => 'Nobody has recorded whether it is a magnet or has a handle.')
   if (form !== 'magnet') return null
-  const min = readNumber(piece.specs, 'wallMinMm')
-  const max = readMeasure(piece.specs, 'wallMaxMm')
-  const { wallMm, source, plusMinus } = plan.tank
-  if (!max) return lacking(['wallMaxMm'], () => 'Nobody has recorded the wall that its magnet holds through.')
-  const low = min ?? 0
-  const u = combineUncertainties(
-    standardUncertainty(wallMm, source, plusMinus, 'length'),
-    standardUncertainty(max.value, max.source, max.plusMinus, 'other'),
-  )
-  const base = {
-    measured: wallMm,
-    limit: [low, max.value] as const,
-    probability: () => probabilityAtMost(wallMm, max.value, u),
-  }
-  if (!isWithinMm(wallMm, max.value))
-    return {
-      ...base,
-      outcome: 'fail',
-      say: (words) => `Its magnet holds through ${words.length(max.value)}, and the wall is ${words.length(wallMm)}.`,
-    }
-  if (isWithinMm(low, wallMm))
-    return { ...base, outcome: 'pass', say: (words) => `Its magnet holds through the ${words.length(wallMm)} wall.` }
-  const isNear = isWithinMm(low * thresholds.magnetThinShare.value, wallMm)
+  const [min, max] = [readMeasure(piece.specs, 'wallMinMm'), readMeasure(piece.specs, 'wallMaxMm')]
+  return judgeMagnetWall(findTankSize(plan, 'wallMm'), min, max, thresholds.magnetThinShare.value)
+}
+
+function judgeGlass(isMagnet: boolean, blades: readonly string[] | undefined): Judgement {
+  if (!isMagnet && blades === undefined) return lacking(['blades'], () => 'Nobody has recorded its blades.')
+  return { outcome: 'pass', ...(blades && { measured: blades }), say: () => 'Safe on glass.' }
+}
+
+/** Steel alone scratches; beside something softer it can be left out. */
+function judgeSteel(blades: readonly string[]): Judgement {
+  const hasSofter = blades.some((blade) => blade !== 'steel')
   return {
-    ...base,
-    outcome: isNear ? 'change' : 'fail',
-    say: (words) =>
-      `Made for walls from ${words.length(low)}, and this one is ${words.length(wallMm)}: ${isNear ? 'stronger than needed, so mind the seams' : 'far too strong'}.`,
+    outcome: hasSofter ? 'change' : 'fail',
+    measured: blades,
+    say: () =>
+      hasSofter ? 'On acrylic use its plastic or pad only: steel scratches.' : 'Its steel blade scratches acrylic.',
   }
 }
 
 function judgeMaterial({ plan }: Scene, { piece }: Candidate): Judgement {
-  const blades = readSet<string>(piece.specs, 'blades')
-  if (plan.tank.material === 'glass') {
-    if (readText(piece.specs, 'form') === 'magnet') return { outcome: 'pass', say: () => 'Safe on glass.' }
-    if (blades === undefined) return lacking(['blades'], () => 'Nobody has recorded its blades.')
-    return { outcome: 'pass', measured: blades, say: () => 'Safe on glass.' }
-  }
+  const form = readText(piece.specs, 'form')
+  const recorded = readSet<string>(piece.specs, 'blades')
+  const blades = recorded && recorded.length > 0 ? recorded : undefined
+  if (plan.tank.material === 'glass') return judgeGlass(form === 'magnet', blades)
+  if (form === undefined) return lacking(['form'], () => 'Nobody has recorded whether it is a magnet or has a handle.')
   const isSafe = readFlag(piece.specs, 'acrylicSafe')
-  if (blades?.includes('steel')) {
-    const hasSofter = blades.some((blade) => blade !== 'steel')
-    return {
-      outcome: hasSofter ? 'change' : 'fail',
-      measured: blades,
-      say: () =>
-        hasSofter ? 'On acrylic use its plastic or pad only: steel scratches.' : 'Its steel blade scratches acrylic.',
-    }
-  }
-  if (isSafe === undefined && !(readText(piece.specs, 'form') === 'handheld' && blades !== undefined))
+  const unsafe: Judgement = { outcome: 'fail', say: () => 'Its maker says that it is not safe on acrylic.' }
+  if (form === 'magnet' && isSafe === false) return unsafe
+  if (blades?.includes('steel')) return judgeSteel(blades)
+  if (isSafe === false) return unsafe
+  if (isSafe === undefined && (form === 'magnet' || !blades))
     return lacking(['acrylicSafe'], () => 'Nobody has recorded whether it is safe on acrylic.')
-  return isSafe === false
-    ? { outcome: 'fail', say: () => 'Not safe on acrylic.' }
-    : { outcome: 'pass', say: () => 'Safe on acrylic.' }
+  return { outcome: 'pass', ...(blades && { measured: blades }), say: () => 'Safe on acrylic.' }
 }
 
 function judgeReach({ plan }: Scene, { piece }: Candidate): Judgement | null {
@@ -76,8 +58,8 @@ function judgeReach({ plan }: Scene, { piece }: Candidate): Judgement | null {
     limit: neededMm,
     say: (words) =>
       reaches
-        ? 'Reaches the bottom without wetting your hand.'
-        : `${words.length(neededMm - length.value)} short of the bottom with a dry hand.`,
+        ? 'It reaches the bottom without wetting your hand.'
+        : `It is ${words.length(neededMm - length.value)} too short to reach the bottom with a dry hand.`,
   }
 }
 
@@ -99,7 +81,7 @@ export const scraperRules: KindRules = {
       label: 'Safe on the pane',
       worst: 'fail',
       unit: null,
-      rule: 'On acrylic it has to be safe there: plastic or pad; steel beside those is a change, steel alone fails. On glass all pass.',
+      rule: 'On acrylic a magnet has to be stated safe there, and a handle has to hold plastic or a pad; steel beside those is a change, steel alone fails. On glass all pass.',
       reads: ['form', 'blades', 'acrylicSafe'],
       uses: ['tank.material'],
       failLabel: 'scratching acrylic',

@@ -27,3 +27,22 @@ export const grossUses: readonly string[] = [
   'tank.sump.waterDepthMm',
   'tank.shape',
 ]
+
+/** The same for the water that is moved, salted and heated: the tank's own sizes, and rock and sand where both are known. */
+export const waterUses: readonly string[] = [
+  'tank.outerLengthMm',
+  'tank.outerWidthMm',
+  'tank.outerHeightMm',
+  ...grossUses,
+]
+
+/** Setup paths of the display's size in plan. */
+export const displayUses: readonly string[] = [
+  'tank.displayLengthMm',
+  'tank.displayWidthMm',
+  'tank.outerLengthMm',
+  'tank.outerWidthMm',
+  'tank.wallMm',
+  'tank.chambers.*.widthMm',
+  'tank.shape',
+]

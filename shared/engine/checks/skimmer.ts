@@ -1,28 +1,43 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
-import { readMeasure, readNumber } from '../values'
-import { chooseBasin, describeBody, listBodySizes, tryBody, type BodyFit } from './body-space'
+import { combineUncertainties, probabilityWithin, standardUncertainty } from '../physics/conformance'
+import type { Basin } from '../setup/places'
+import type { Specs } from '../types'
+import { isWithinMm, readMeasure, readNumber } from '../values'
+import { bodyUses, judgeBody, lackWater } from './body-judgement'
+import { chooseBasin, tryBody, type BodyFit } from './body-space'
 import { createRuleMaker } from './build-rule'
 import { findPumpBasins } from './pump-flow'
+import { grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 
 const bodyKeys = ['lengthMm', 'widthMm', 'heightMm'] as const
 
-/** The roomiest place for its body, deep enough for its least depth; or what its size lacks. */
+const readDepths = (specs: Specs) =>
+  [readMeasure(specs, 'waterDepthMinMm'), readMeasure(specs, 'waterDepthMaxMm')] as const
+
+/** Too deep for it, or too shallow; what is not known keeps it from no basin. */
+function isDeepEnough(specs: Specs, { waterDepthMm }: Basin): boolean {
+  const [min, max] = readDepths(specs)
+  return (!min || isWithinMm(min.value, waterDepthMm)) && (!max || isWithinMm(waterDepthMm, max.value))
+}
+
+/** The roomiest place for its body among those of a depth that it works in, else of all; or what its size lacks. */
 function place(scene: Scene, candidate: Candidate): BodyFit | readonly string[] | undefined {
   const { specs } = candidate.piece
   const [length, width, height] = bodyKeys.map((key) => readMeasure(specs, key))
   if (!length || !width || !height) return bodyKeys.filter((key) => readNumber(specs, key) === undefined)
-  const depth = readMeasure(specs, 'waterDepthMinMm') ?? { ...height, value: 0 }
   const body = {
     length,
     width,
     height,
-    depth,
+    depth: { value: 0, source: height.source },
     clearanceMm: thresholds.pumpClearanceMm.value,
     quantity: candidate.quantity,
   }
-  return chooseBasin(findPumpBasins(scene, candidate).map((basin) => tryBody(body, basin, scene.others)))
+  const tried = findPumpBasins(scene, candidate).map((basin) => tryBody(body, basin, scene.others))
+  const best = chooseBasin(tried.filter(({ basin }) => isDeepEnough(specs, basin)))
+  return best?.fits ? best : chooseBasin(tried)
 }
 
 const isFit = (found: BodyFit | readonly string[] | undefined): found is BodyFit =>
@@ -30,48 +45,45 @@ const isFit = (found: BodyFit | readonly string[] | undefined): found is BodyFit
 
 function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   const found = place(scene, candidate)
-  if (found === undefined) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
+  if (found === undefined) return lackWater(candidate.place)
   if (!isFit(found)) return lacking(found, () => 'Nobody has recorded its outside size yet.')
-  return {
-    outcome: found.fits ? 'pass' : 'fail',
-    measured: found.measuredMm,
-    limit: found.limitMm,
-    probability: found.probability,
-    ...(found.fits && { placement: { chamber: found.basin.id, position: 'upright' as const, angleDeg: 90 } }),
-    rests: () => listBodySizes(found),
-    say: describeBody(found),
-  }
+  return judgeBody(found, scene.plan)
 }
 
 function judgeDepth(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
-  const min = readNumber(specs, 'waterDepthMinMm')
-  const max = readNumber(specs, 'waterDepthMaxMm')
-  const missing = [...(min === undefined ? ['waterDepthMinMm'] : []), ...(max === undefined ? ['waterDepthMaxMm'] : [])]
-  if (min === undefined || max === undefined)
-    return lacking(missing, () => 'Nobody has recorded the water depth it works in.')
+  const [min, max] = readDepths(specs)
+  const missing = [...(min ? [] : ['waterDepthMinMm']), ...(max ? [] : ['waterDepthMaxMm'])]
+  if (!min || !max) return lacking(missing, () => 'Nobody has recorded the water depth it works in.')
   const found = place(scene, candidate)
   const basin = isFit(found) ? found.basin : findPumpBasins(scene, candidate)[0]
-  if (!basin) return { outcome: 'fail', say: () => 'The setup has no such chamber.' }
+  if (!basin) return lackWater(candidate.place)
   const depth = basin.waterDepthMm
+  const u = combineUncertainties(
+    standardUncertainty(depth, basin.source, basin.plusMinus, 'length'),
+    standardUncertainty(min.value, min.source, min.plusMinus, 'length'),
+  )
   return {
-    outcome: depth >= min && depth <= max ? 'pass' : 'fail',
+    outcome: isDeepEnough(specs, basin) ? 'pass' : 'fail',
     measured: depth,
-    limit: [min, max],
+    limit: [min.value, max.value],
+    probability: () => probabilityWithin(depth, min.value, max.value, u),
     rests: () => [basin.path === 'tank' ? 'tank.waterLineMm' : `${basin.path}.waterDepthMm`],
     say: (words) =>
-      `Works in ${words.pair([min, max], 'mm')} of water, and the ${basin.name} has ${words.length(depth)}.`,
+      `Works in ${words.pair([min.value, max.value], 'mm')} of water, and the ${basin.name} has ${words.length(depth)}.`,
   }
 }
 
 function judgeRating({ plan }: Scene, { piece }: Candidate): Judgement {
   const rated = readNumber(piece.specs, 'ratedVolumeL')
   if (rated === undefined) return lacking(['ratedVolumeL'], () => 'Nobody has recorded the volume it is rated for.')
+  if (!hasRatedVolume(plan)) return noAreas(plan)
   const { ratedL } = plan.tank
   return {
     outcome: rated >= ratedL ? 'pass' : 'change',
     measured: rated,
     limit: ratedL,
+    rests: () => (isVolumeStated(plan) ? [] : grossUses),
     say: (words) => `Its maker rates it for ${words.volume(rated)}; the tank holds ${words.volume(ratedL)}.`,
   }
 }
@@ -84,19 +96,9 @@ export const skimmerRules: KindRules = {
       label: 'Room for the body',
       worst: 'fail',
       unit: 'mm',
-      rule: `Its body in a chamber with what else is there, ${thresholds.pumpClearanceMm.value} mm to each side.`,
-      reads: [...bodyKeys, 'waterDepthMinMm'],
-      uses: [
-        'tank.chambers.*.lengthMm',
-        'tank.chambers.*.widthMm',
-        'tank.chambers.*.waterDepthMm',
-        'tank.sump.lengthMm',
-        'tank.sump.widthMm',
-        'tank.sump.waterDepthMm',
-        'tank.displayLengthMm',
-        'tank.displayWidthMm',
-        'tank.waterLineMm',
-      ],
+      rule: `Its body in a chamber with what else is there, ${thresholds.pumpClearanceMm.value} mm to each side; of several chambers one of a depth that it works in comes first.`,
+      reads: [...bodyKeys, 'waterDepthMinMm', 'waterDepthMaxMm'],
+      uses: bodyUses,
       failLabel: 'too large for the place',
       judge: judgeSpace,
     }),
@@ -106,7 +108,7 @@ export const skimmerRules: KindRules = {
       unit: 'mm',
       rule: 'The water in its place within the depths that it works in.',
       reads: ['waterDepthMinMm', 'waterDepthMaxMm', ...bodyKeys],
-      uses: ['tank.chambers.*.waterDepthMm', 'tank.sump.waterDepthMm', 'tank.waterLineMm'],
+      uses: ['tank.chambers.*.waterDepthMm', 'tank.sump.waterDepthMm', 'tank.waterLineMm', 'tank.filtration'],
       failLabel: 'made for another depth',
       judge: judgeDepth,
     }),
@@ -117,7 +119,7 @@ export const skimmerRules: KindRules = {
       limitIs: 'least',
       rule: 'Rated for at least the tank’s volume.',
       reads: ['ratedVolumeL'],
-      uses: ['tank.volumeL'],
+      uses: grossUses,
       failLabel: 'rated for a smaller tank',
       judge: judgeRating,
     }),

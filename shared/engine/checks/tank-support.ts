@@ -55,6 +55,6 @@ export function judgeLoad(scene: Scene, filled: Plan): Judgement {
     measured: totalKg,
     limit: null,
     cautions: [warnWeight(totalKg)],
-    say: (words) => `Filled it weighs about ${words.mass(totalKg)}; what carries it must hold that.`,
+    say: (words) => `Filled, it weighs about ${words.mass(totalKg)}; what carries it must hold that.`,
   }
 }

@@ -1,3 +1,5 @@
+import { getAttribute } from '../../kinds/index'
+import { joinNames, sayUncounted } from '../counting'
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
 import { readSet } from '../values'
@@ -6,22 +8,30 @@ import { createRuleMaker } from './build-rule'
 /** What the cycle of a new tank is followed by. */
 export const cycleParameters = ['ammonia', 'nitrite', 'nitrate'] as const
 
+/** The names of parameters as they are written: "pH". */
+function nameParameters(parameters: readonly string[]): string {
+  const attribute = getAttribute('test-kit', 'parameters')
+  const options = attribute && 'options' in attribute ? attribute.options : []
+  return joinNames(parameters.map((one) => options.find(({ value }) => value === one)?.label ?? one))
+}
+
 function judgeCoverage({ others }: Scene, { piece }: Candidate): Judgement {
   const own = readSet<string>(piece.specs, 'parameters')
   if (own === undefined) return lacking(['parameters'], () => 'Nobody has recorded what it measures.')
-  const there = others
-    .filter((item) => item.piece.kind === 'test-kit')
-    .flatMap((item) => readSet<string>(item.piece.specs, 'parameters') ?? [])
+  const kits = others.filter((item) => item.piece.kind === 'test-kit').map((item) => item.piece.specs)
+  const there = kits.flatMap((specs) => readSet<string>(specs, 'parameters') ?? [])
+  const unknown = kits.filter((specs) => specs['parameters'] === undefined).length
   const missing = cycleParameters.filter((parameter) => !own.includes(parameter) && !there.includes(parameter))
+  const isAlone = cycleParameters.every((parameter) => own.includes(parameter))
   return {
     outcome: missing.length > 0 ? 'change' : 'pass',
     measured: own,
     ...(missing.length > 0 && { asks: { need: 'cycle-tests', amount: missing.length, unit: 'count' as const } }),
+    cautions: unknown > 0 ? [sayUncounted(unknown, 'parameters')] : [],
     say: () => {
-      const list = own.join(', ')
-      if (missing.length === 0)
-        return `Measures ${list}${there.length > 0 ? '; with the other kits nothing is missing for the cycle' : ''}.`
-      return `Measures ${list}; a test for ${missing.join(' and ')} is still missing.`
+      const measures = own.length > 0 ? `Measures ${nameParameters(own)}` : 'Measures nothing that is asked for'
+      if (missing.length > 0) return `${measures}; a test for ${nameParameters(missing)} is still missing.`
+      return isAlone ? `${measures}.` : `${measures}; with the other kits nothing is missing for the cycle.`
     },
   }
 }

@@ -1,18 +1,46 @@
-import { countOfThese, isMultiplied, lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import {
+  countOfThese,
+  isMultiplied,
+  lacking,
+  type Candidate,
+  type Judgement,
+  type KindRules,
+  type Rule,
+  type Say,
+} from '../rule'
 import type { Scene } from '../scene'
 import { defaults } from '../setup/defaults'
 import { practiceBasis, thresholds } from '../thresholds'
 import type { Item } from '../types'
-import { isWithinMm, readMeasure, readNumber } from '../values'
-import { combineUncertainties, probabilityWithin, standardUncertainty } from '../physics/conformance'
+import type { Printer } from '../../units/print'
+import { sayUncounted } from '../counting'
+import { readMeasure, readNumber } from '../values'
+import { judgeMagnetWall } from './magnet-wall'
+import { hasAreas, noAreas, waterUses } from './shape'
+import { findTankSize } from './tank-size'
 
-/** Flow in L/h that the other wavemakers add, at most. */
-const sumOthersLph = (others: readonly Item[]): number =>
-  others.reduce(
-    (sum, { piece, quantity }) =>
-      piece.kind === 'wavemaker' ? sum + quantity * (readNumber(piece.specs, 'flowMaxLph') ?? 0) : sum,
-    0,
-  )
+interface Others {
+  /** Set as low and as high as they go, L/h; one without a least flow runs at its only speed. */
+  readonly leastLph: number
+  readonly mostLph: number
+  readonly cautions: readonly Say[]
+}
+
+function sumOthers(others: readonly Item[]): Others {
+  const wavemakers = others.filter(({ piece }) => piece.kind === 'wavemaker')
+  const known = wavemakers.flatMap(({ piece, quantity }) => {
+    const most = readNumber(piece.specs, 'flowMaxLph')
+    return most === undefined
+      ? []
+      : [{ least: quantity * (readNumber(piece.specs, 'flowMinLph') ?? most), most: quantity * most }]
+  })
+  const unknown = wavemakers.length - known.length
+  return {
+    leastLph: known.reduce((sum, { least }) => sum + least, 0),
+    mostLph: known.reduce((sum, { most }) => sum + most, 0),
+    cautions: unknown > 0 ? [sayUncounted(unknown, 'flow')] : [],
+  }
+}
 
 const chooseBand = ({ plan }: Scene): readonly [number, number] =>
   defaults.circulationPerHour[plan.goals.coral.includes('sps') ? 'sps' : 'usual']
@@ -21,107 +49,100 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const { piece, quantity, mayMultiply } = candidate
   const most = readNumber(piece.specs, 'flowMaxLph')
   if (most === undefined) return lacking(['flowMaxLph'], () => 'Nobody has recorded its flow yet.')
-  const least = readNumber(piece.specs, 'flowMinLph') ?? most
+  if (!hasAreas(scene.plan)) return noAreas(scene.plan)
+  const least = readNumber(piece.specs, 'flowMinLph')
   const litres = scene.plan.tank.waterL
-  const others = sumOthersLph(scene.others)
-  const perHour = (lph: number, count = quantity) => (others + lph * count) / litres
+  const { leastLph, mostLph, cautions } = sumOthers(scene.others)
   const [low, high] = chooseBand(scene)
-  const judged = Math.max(perHour(least), Math.min(perHour(most), high))
-  const base = { measured: judged, limit: [low, high] as const }
-  const isStrong = perHour(most) >= low
-  if (isStrong && perHour(least) <= high && isMultiplied(candidate))
+  const highest = (count: number) => (mostLph + most * count) / litres
+  const lowest = (leastLph + (least ?? most) * quantity) / litres
+  const judged = Math.max(lowest, Math.min(highest(quantity), high))
+  const base = { measured: judged, limit: [low, high] as const, cautions }
+  const times = (words: Printer, perHour: number) => `${words.number(perHour, '/h')} times an hour`
+  const usual = (words: Printer) => `${words.pair([low, high], '/h')} are usual`
+  const lead = mostLph > 0 ? 'With the others it' : 'It'
+  if (highest(quantity) < low) {
+    const counts = mayMultiply === false || isMultiplied(candidate) ? [] : listCounts(quantity)
+    const enough = counts.find((count) => highest(count) >= low)
+    if (enough !== undefined)
+      return {
+        ...base,
+        outcome: 'change',
+        enough,
+        say: (words) =>
+          `${countOfThese(enough)}: ${quantity === 1 ? 'one moves' : `${quantity} move`} the water only ${times(words, highest(quantity))}; ${usual(words)}.`,
+      }
     return {
       ...base,
       outcome: 'change',
       say: (words) =>
-        `${countOfThese(quantity)}: together they move the water ${words.number(perHour(most), '/h')} times an hour.`,
-    }
-  if (isStrong && perHour(least) <= high)
-    return {
-      ...base,
-      outcome: 'pass',
-      say: (words) =>
-        `Moves the water up to ${words.number(perHour(most), '/h')} times an hour; ${words.number(low, '/h')} to ${words.number(high, '/h')} are usual.`,
-    }
-  if (!isStrong) {
-    if (mayMultiply !== false && !isMultiplied(candidate))
-      for (let count = quantity + 1; count <= thresholds.wavemakerMost.value; count += 1)
-        if (perHour(most, count) >= low)
-          return {
-            ...base,
-            outcome: 'change',
-            enough: count,
-            say: (words) =>
-              `${countOfThese(count)}: one moves the water only ${words.number(perHour(most), '/h')} times an hour.`,
-          }
-    return {
-      ...base,
-      outcome: 'change',
-      say: (words) =>
-        `Too weak alone: ${words.number(perHour(most), '/h')} times an hour, where ${words.number(low, '/h')} to ${words.number(high, '/h')} are usual.`,
+        `Too weak: ${lead.toLowerCase()} moves the water ${times(words, highest(quantity))}; ${usual(words)}.`,
     }
   }
+  if (lowest > high) {
+    if (least === undefined)
+      return lacking(
+        ['flowMinLph'],
+        (words) =>
+          `${lead} moves the water ${times(words, highest(quantity))}; ${usual(words)}, and nobody has recorded how low it can be set.`,
+      )
+    return {
+      ...base,
+      outcome: 'change',
+      say: (words) =>
+        `Too strong: even at its lowest ${lead.toLowerCase()} moves the water ${times(words, lowest)}; ${usual(words)}.`,
+    }
+  }
+  if (isMultiplied(candidate))
+    return {
+      ...base,
+      outcome: 'change',
+      say: (words) =>
+        `${countOfThese(quantity)}: together they move the water up to ${times(words, highest(quantity))}.`,
+    }
   return {
     ...base,
-    outcome: 'change',
-    say: (words) =>
-      `Too strong even at its lowest: ${words.number(perHour(least), '/h')} times an hour, where ${words.number(low, '/h')} to ${words.number(high, '/h')} are usual.`,
+    outcome: 'pass',
+    say: (words) => `${lead} moves the water up to ${times(words, highest(quantity))}; ${usual(words)}.`,
   }
 }
+
+const listCounts = (above: number): readonly number[] =>
+  Array.from({ length: Math.max(0, thresholds.wavemakerMost.value - above) }, (_, index) => above + 1 + index)
 
 function judgeWall({ plan }: Scene, { piece }: Candidate): Judgement {
   const min = readMeasure(piece.specs, 'wallMinMm')
   const max = readMeasure(piece.specs, 'wallMaxMm')
-  const { wallMm, source, plusMinus } = plan.tank
-  if (max && !isWithinMm(wallMm, max.value))
-    return {
-      outcome: 'fail',
-      measured: wallMm,
-      limit: [min?.value ?? 0, max.value],
-      say: (words) => `Its magnet holds through ${words.length(max.value)}, and the wall is ${words.length(wallMm)}.`,
-    }
-  if (min && !isWithinMm(min.value, wallMm))
-    return {
-      outcome: 'fail',
-      measured: wallMm,
-      limit: [min.value, max?.value ?? min.value],
-      say: (words) =>
-        `Its magnet is made for walls from ${words.length(min.value)}, and this one is ${words.length(wallMm)}.`,
-    }
-  if (!max) return lacking(['wallMaxMm'], () => 'Nobody has recorded the wall that its magnet holds through.')
-  const low = min?.value ?? 0
-  const u = combineUncertainties(
-    standardUncertainty(wallMm, source, plusMinus, 'length'),
-    standardUncertainty(max.value, max.source, max.plusMinus, 'other'),
-  )
-  return {
-    outcome: 'pass',
-    measured: wallMm,
-    limit: [low, max.value],
-    probability: () => probabilityWithin(wallMm, low === 0 ? -1e6 : low, max.value, u),
-    say: (words) => `Its magnet holds through the ${words.length(wallMm)} wall.`,
-  }
+  return judgeMagnetWall(findTankSize(plan, 'wallMm'), min, max)
 }
 
 function judgeSand(scene: Scene, { piece, quantity }: Candidate): Judgement | null {
-  const fine = scene.others.some(
-    (item) =>
-      item.piece.kind === 'sand' &&
-      (readNumber(item.piece.specs, 'grainMinMm') ?? Infinity) < thresholds.sandBlowsMm.value,
-  )
-  if (!fine) return null
-  const least = readNumber(piece.specs, 'flowMinLph') ?? readNumber(piece.specs, 'flowMaxLph')
-  if (least === undefined) return lacking(['flowMaxLph'], () => 'Nobody has recorded its flow yet.')
-  const perHour = (sumOthersLph(scene.others) + least * quantity) / scene.plan.tank.waterL
-  const isStrong = perHour > thresholds.sandBlowsTurnover.value
+  const grains = scene.others
+    .filter((item) => item.piece.kind === 'sand')
+    .map((item) => readNumber(item.piece.specs, 'grainMinMm'))
+  const isFine = grains.some((grainMm) => grainMm !== undefined && grainMm < thresholds.sandBlowsMm.value)
+  if (!isFine && !grains.includes(undefined)) return null
+  const least = readNumber(piece.specs, 'flowMinLph')
+  const most = readNumber(piece.specs, 'flowMaxLph')
+  if (least === undefined && most === undefined)
+    return lacking(['flowMaxLph'], () => 'Nobody has recorded its flow yet.')
+  if (!hasAreas(scene.plan)) return noAreas(scene.plan)
+  const { leastLph, cautions } = sumOthers(scene.others)
+  const limit = thresholds.sandBlowsTurnover.value
+  const perHour = (leastLph + (least ?? most ?? 0) * quantity) / scene.plan.tank.waterL
+  if (perHour > limit && least === undefined)
+    return lacking(['flowMinLph'], () => 'Nobody has recorded whether it can be set low enough for the sand.')
+  if (perHour > limit && !isFine)
+    return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded how fine the sand in the setup is.' }
   return {
-    outcome: isStrong ? 'change' : 'pass',
+    outcome: perHour > limit ? 'change' : 'pass',
     measured: perHour,
-    limit: thresholds.sandBlowsTurnover.value,
-    say: () =>
-      isStrong
-        ? 'The fine sand in the setup will blow about, even at its lowest.'
-        : 'Gentle enough at its lowest for the fine sand in the setup.',
+    limit,
+    cautions,
+    say: (words) =>
+      perHour > limit
+        ? `The fine sand in the setup will blow about: even at its lowest the water is moved ${words.number(perHour, '/h')} times an hour.`
+        : 'It can be set low enough for the sand in the setup.',
   }
 }
 
@@ -139,7 +160,7 @@ export const wavemakerRules: KindRules = {
       unit: '/h',
       rule: 'With the other wavemakers 10 to 40 times the water an hour, for small-polyp corals 20 to 60; too weak names how many would do, up to three.',
       reads: ['flowMinLph', 'flowMaxLph'],
-      uses: ['goals.coral', 'tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm', 'tank.waterLineMm'],
+      uses: ['goals.coral', ...waterUses],
       failLabel: 'too weak or too strong',
       judge: judgeFlow,
     }),
@@ -159,10 +180,10 @@ export const wavemakerRules: KindRules = {
       unit: '/h',
       rule: `Over sand with grains under ${thresholds.sandBlowsMm.value} mm it can be set to no more than ${thresholds.sandBlowsTurnover.value} times the water an hour.`,
       reads: ['flowMinLph', 'flowMaxLph'],
-      uses: [],
+      uses: waterUses,
       failLabel: 'too strong for the sand',
       judge: judgeSand,
     }),
   ],
-  feltThrough: ['powerW', 'plugs', 'flowMaxLph'],
+  feltThrough: ['powerW', 'plugs', 'flowMinLph', 'flowMaxLph'],
 }
