@@ -49,7 +49,9 @@ function describeRod(specs: BareSpecs, printer: Printer): string | undefined {
 
 /** Words that say nothing without their attribute's name. */
 function isBare(type: string, key: string): boolean {
-  return (type === 'choice' && ['thermostat', 'control'].includes(key)) || type === 'boolean' || type === 'set'
+  return (
+    (type === 'choice' && ['thermostat', 'control', 'filtration'].includes(key)) || type === 'boolean' || type === 'set'
+  )
 }
 
 /** "100 W, glass rod, 10.6 in long, 0.9 in thick, thermostat built in": one line of what is known. */

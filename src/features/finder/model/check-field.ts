@@ -42,6 +42,7 @@ export function explainProblem({ path, text, detail }: LinkProblem, system: Unit
   const own = attribute && checkField(text, attribute, system, undefined)
   const said = own ?? toSentence(detail)
   if (label === '') return said
-  const typed = said.includes(text) || text === '' ? '' : `“${text.slice(0, 60)}”. `
+  const isQuoted = said.includes(`"${text}"`) || said.includes(`“${text}”`)
+  const typed = isQuoted || text === '' ? '' : `“${text.slice(0, 60)}”. `
   return `${label[0]?.toUpperCase()}${label.slice(1)}: ${typed}${said}`
 }

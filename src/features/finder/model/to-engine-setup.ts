@@ -20,7 +20,7 @@ export function toEngineSetup(request: SetupRequest, entry?: TankEntry): Setup {
   const { country, room, mains, water, goals, units } = parsed
   return {
     units,
-    tank: { specs, ...(volumeL !== undefined && { volumeL }) },
+    tank: { specs, ...(volumeL !== undefined && { volumeL }), ...(entry && { gear: entry }) },
     ...(country !== undefined && { country }),
     ...(room && { room }),
     ...(mains && { mains }),
