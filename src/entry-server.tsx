@@ -64,7 +64,8 @@ export async function render({ url, cookie, nonce, fetch }: Visit): Promise<Rend
       <Providers app={app}>
         <StaticRouterProvider router={router} context={context} hydrate={false} />
       </Providers>,
-      { nonce, onAllReady: () => resolve(started), onShellError: reject },
+      // Nothing is sent before all is ready, so nothing need be sent apart and put in place by a script.
+      { nonce, progressiveChunkSize: Infinity, onAllReady: () => resolve(started), onShellError: reject },
     )
   })
   const head = findHead(app, context, pageUrl)

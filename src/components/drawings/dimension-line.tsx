@@ -44,6 +44,8 @@ export function DimensionLine(props: DimensionLineProps) {
   const isHorizontal = axis === 'horizontal'
   const point = (along: number, across: number) => (isHorizontal ? `${along} ${across}` : `${across} ${along}`)
   const look = looks[status]
+  // Ink in place of the action colour where there is nothing to press.
+  const isEditable = path !== undefined
   const dash = status === 'assumed' ? '4 3' : undefined
   const overshoot = edge === undefined ? 0 : Math.sign(at - edge) * 5
   const drawn = (
@@ -75,11 +77,11 @@ export function DimensionLine(props: DimensionLineProps) {
         fontWeight={status === 'assumed' ? 400 : 600}
         strokeWidth="4"
         paintOrder="stroke"
-        className={`${look.text} ${ground === 'water' ? 'stroke-water' : 'stroke-sheet'}`}
+        className={`${isEditable ? look.text : 'fill-ink'} ${ground === 'water' ? 'stroke-water' : 'stroke-sheet'}`}
       >
         {label}
       </text>
-      {status === 'assumed' && (
+      {status === 'assumed' && isEditable && (
         <line
           x1={box.x}
           x2={box.x + box.width}
@@ -92,7 +94,7 @@ export function DimensionLine(props: DimensionLineProps) {
       )}
     </>
   )
-  if (path === undefined) return <g aria-hidden="true">{drawn}</g>
+  if (!isEditable) return <g aria-hidden="true">{drawn}</g>
   return (
     <EditTarget
       path={path}

@@ -3,7 +3,7 @@ import type { UnitSystem } from '#shared/units/systems'
 import type { TankDrawing } from './tank-drawing'
 import { niceStep } from './ticks'
 
-/** Room beside the tank for a dimension line and its label; `DrawingSheet` pads by the same. */
+/** Room beside the tank for a dimension line and its label; `DrawingSheet` keeps the same free. */
 export const sidePx = 66
 const bottomPx = 62
 /** Over the back wall: one row of chamber lengths, or two where neighbours' labels may meet. */
@@ -30,6 +30,8 @@ export interface SheetSize {
   readonly contentPx: number
   /** Between the parts that are to scale: does not shrink with them. */
   readonly betweenPx?: number
+  /** Kept free to the left and right; by default room for a dimension line on either side. */
+  readonly sidesPx?: readonly [number, number]
   readonly abovePx: number
   readonly belowPx: number
 }

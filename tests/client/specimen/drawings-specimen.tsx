@@ -7,6 +7,7 @@ import { TankPlan } from '../../../src/components/drawings/tank-plan'
 import { TankSection } from '../../../src/components/drawings/tank-section'
 import { MeasureField } from '../../../src/components/ui/measure-field'
 import { Popover } from '../../../src/components/ui/popover'
+import { JudgedSpecimen } from './judged-specimen'
 import { leaningTank, manyChambers, marks, nameOf, scales, standingTank } from './invented'
 
 export function DrawingsSpecimen({ printer }: { readonly printer: Printer }) {
@@ -37,6 +38,7 @@ export function DrawingsSpecimen({ printer }: { readonly printer: Printer }) {
             ),
         )}
       </div>
+      <JudgedSpecimen printer={printer} />
       <div className="grid gap-6">
         {scales.map((scale) => (
           <SharedScale

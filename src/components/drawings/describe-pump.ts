@@ -1,0 +1,38 @@
+import type { PumpCurveDrawing, PumpDrawing } from '#shared/engine/drawings/pump'
+import type { Printer } from '#shared/units/print'
+
+export const isAtWork = (drawing: PumpCurveDrawing | PumpDrawing): drawing is PumpDrawing => 'system' in drawing
+
+export function printPoint({ flowLph, headM }: PumpDrawing['point'], printer: Printer): string {
+  return flowLph > 0
+    ? `${printer.flow(flowLph)} against ${printer.measure(headM, 'm')} of head`
+    : 'nothing: it does not lift the water'
+}
+
+export function printWanted({ turnoversPerHour, wantedLph }: PumpDrawing, printer: Printer): string {
+  const [low, high] = turnoversPerHour.map((value) => printer.number(value, '/h'))
+  return `wanted: ${printer.pair(wantedLph, 'L/h')}, the water ${low} to ${high} times an hour`
+}
+
+export function printPlumbing({ staticHeadM, boreMm }: PumpDrawing, printer: Printer): string {
+  return `what ${printer.length(staticHeadM * 1000)} of lift and a usual pipe, ${printer.length(boreMm)} wide, take`
+}
+
+/** The text alternative of a pump's curve, alone or at work. */
+export function describePump(drawing: PumpCurveDrawing | PumpDrawing, printer: Printer): string {
+  const recorded = drawing.recorded.map(
+    ({ headM, flowLph }) => `${printer.flow(flowLph)} at ${printer.measure(headM, 'm')}`,
+  )
+  const curve = `Flow against head as recorded: ${recorded.join(', ')}.`
+  if (!isAtWork(drawing)) return curve
+  const { point, slowest } = drawing
+  return [
+    curve,
+    `It meets ${printPlumbing(drawing, printer)}, at ${printPoint(point, printer)};`,
+    `${printWanted(drawing, printer)}.`,
+    slowest &&
+      `At ${printer.measure(slowest.speedShare, 'fraction')} speed it gives ${printPoint(slowest.point, printer)}.`,
+  ]
+    .filter(Boolean)
+    .join(' ')
+}
