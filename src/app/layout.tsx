@@ -12,6 +12,7 @@ import { keepPreferences, type Preferences } from '../lib/preferences'
 
 const links = [
   { href: paths.find, label: 'Find' },
+  { href: paths.gearList, label: 'Gear' },
   { href: paths.method, label: 'Method' },
 ]
 

@@ -25,6 +25,12 @@ export function createRoutes(app: App): RouteObject[] {
           children: [
             { id: 'home', path: paths.home, lazy: createLazy(app, () => import('./routes/home')) },
             { id: 'find', path: paths.find, lazy: createLazy(app, () => import('./routes/find')) },
+            { id: 'gear-list', path: paths.gearList, lazy: createLazy(app, () => import('./routes/gear-list')) },
+            {
+              id: 'gear-history',
+              path: '/gear/:slug/history',
+              lazy: createLazy(app, () => import('./routes/gear-history')),
+            },
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },

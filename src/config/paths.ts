@@ -3,5 +3,7 @@ export const paths = {
   home: '/',
   find: '/find',
   method: '/method',
+  gearList: '/gear',
   gear: (slug: string) => `/gear/${encodeURIComponent(slug)}`,
+  gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

@@ -1,11 +1,24 @@
+import { useEffect } from 'react'
+import { useLocation } from 'react-router-dom'
 import { getKind, isKindKey } from '#shared/kinds/index'
 import { paths } from '../../config/paths'
 import { Finder } from '../../features/finder/components/finder'
+import { listSetupEntries } from '../../features/finder/link/finder-state'
 import { loadFinder } from '../../features/finder/load-finder'
+import { keepLastSetup } from '../../lib/last-setup'
 import type { Page } from '../page-route'
 
+/** The finder, whose setup is remembered for the sheets of single pieces. */
+function FindPage() {
+  const { search } = useLocation()
+  useEffect(() => {
+    keepLastSetup(new URLSearchParams(listSetupEntries(new URLSearchParams(search))).toString())
+  }, [search])
+  return <Finder />
+}
+
 export const page: Page = {
-  Component: Finder,
+  Component: FindPage,
   load: (app, { request }) => loadFinder(app, new URL(request.url), paths.find),
   head: ({ url }) => {
     const key = url.searchParams.get('kind') ?? ''

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react'
 import { Form, Link } from 'react-router-dom'
+import { SuggestInput } from '../../../components/suggest/suggest-input'
 import { Button } from '../../../components/ui/button'
 import { paths } from '../../../config/paths'
 
@@ -27,17 +28,16 @@ export function QuestionBox({
         {label}
       </label>
       <div className="mt-1 flex flex-wrap items-end gap-3 border-b-2 border-ink pb-2 focus-within:border-action">
-        <input
+        <SuggestInput
           id="question"
           name="q"
           key={asked}
-          type="text"
+          scope={{ page: 'question', kind: null }}
           defaultValue={asked}
           maxLength={400}
-          autoComplete="off"
           enterKeyHint="search"
           aria-describedby={asked === '' ? 'question-example' : undefined}
-          className="min-h-11 min-w-0 flex-[1_1_16rem] bg-transparent text-base outline-none md:text-lg"
+          className="block min-h-11 w-full bg-transparent text-base outline-none md:text-lg"
         />
         <Button type="submit" variant="primary">
           {button}

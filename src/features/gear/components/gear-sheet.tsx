@@ -2,12 +2,12 @@ import { useQuery } from '@tanstack/react-query'
 import { Link } from 'react-router-dom'
 import { getKind, isKindKey } from '#shared/kinds/index'
 import type { Gear } from '#shared/schemas/gear'
-import { buttonClass } from '../../../components/ui/button-class'
 import { paths } from '../../../config/paths'
 import { useApp } from '../../../lib/app-context'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { usePrinter } from '../../../lib/use-printer'
 import { revisionsQuery } from '../api/get-revisions'
+import { CheckLinks } from './check-links'
 import { GearDrawing } from './gear-drawing'
 import { KindCautions } from './kind-cautions'
 import { MissingNumbers } from './missing-numbers'
@@ -20,12 +20,6 @@ const statusWords = {
   unknown: 'Not known whether it is still made',
 } as const
 
-/** A tank is drawn in the finder; any other piece is picked among those of its kind. */
-function checkHref({ kind, slug }: Gear): string {
-  const query = kind === 'tank' ? { kind: 'heater', 'tank.gear': slug } : { kind, picked: slug }
-  return `${paths.find}?${new URLSearchParams(query).toString()}`
-}
-
 /** Everything recorded of one piece. */
 export function GearSheet({ gear }: { readonly gear: Gear }) {
   const { api } = useApp()
@@ -33,14 +27,17 @@ export function GearSheet({ gear }: { readonly gear: Gear }) {
   const revisions = useQuery(revisionsQuery(api, gear.slug)).data?.items ?? []
   const kind = isKindKey(gear.kind) ? gear.kind : null
   if (!kind) return <h1>{gear.model}</h1>
-  const { attributes, label } = getKind(kind)
+  const { attributes, plural } = getKind(kind)
   return (
     <>
       <p className="text-sm text-ink-soft">
-        <Link to={`${paths.find}?kind=${kind}`} className="link">
-          {label}
+        <Link to={`${paths.gearList}?kind=${kind}`} className="link">
+          {plural}
         </Link>{' '}
-        · revision {gear.revision}
+        · revision {gear.revision} ·{' '}
+        <Link to={paths.gearHistory(gear.slug)} className="link">
+          history
+        </Link>
       </p>
       <h1 className="mt-1">
         {gear.brand} · {gear.model}
@@ -50,11 +47,7 @@ export function GearSheet({ gear }: { readonly gear: Gear }) {
         {statusWords[gear.status]}
         {gear.gtin !== null && <span className="font-mono text-sm"> · GTIN {gear.gtin}</span>}
       </p>
-      <p className="mt-4 flex flex-wrap gap-3 print:hidden">
-        <Link to={checkHref(gear)} className={buttonClass({ variant: 'primary' })}>
-          {kind === 'tank' ? 'See what fits this tank' : 'Check it against a setup'}
-        </Link>
-      </p>
+      <CheckLinks gear={gear} />
       <div className="mt-8 max-w-4xl">
         <GearDrawing gear={gear} printer={printer} />
       </div>
@@ -69,7 +62,7 @@ export function GearSheet({ gear }: { readonly gear: Gear }) {
           <div className="mt-2 max-w-prose space-y-2" dangerouslySetInnerHTML={{ __html: gear.notes }} />
         </section>
       )}
-      {revisions.length > 0 && <RevisionList kind={kind} revisions={revisions} />}
+      {revisions.length > 0 && <RevisionList kind={kind} revisions={revisions} slug={gear.slug} />}
       <KindCautions kind={kind} />
     </>
   )

@@ -1,8 +1,9 @@
 import type { Attribute, Role } from '#shared/kinds/types'
-import type { Gear, Provenance } from '#shared/schemas/gear'
+import type { Gear } from '#shared/schemas/gear'
 import type { Printer } from '#shared/units/print'
 import { printValue } from '../../../lib/print-value'
-import { printDate } from '../print-date'
+import { roleTitles } from '../../../lib/role-titles'
+import { printPlusMinus, SpecSource } from './spec-source'
 
 export interface SpecListProps {
   readonly role: Role
@@ -11,37 +12,13 @@ export interface SpecListProps {
   readonly printer: Printer
 }
 
-const titles: Readonly<Record<Role, string>> = {
-  check: 'What decides whether it fits',
-  difference: 'What is compared when it replaces another',
-  display: 'Also recorded',
-}
-
-const sources = { measured: 'measured', maker: 'its maker’s figure', estimate: 'an estimate' } as const
-
-function printPlusMinus(attribute: Attribute, { plusMinus }: Provenance, printer: Printer): string | null {
-  if (attribute.type !== 'measure' || plusMinus === undefined) return null
-  return `± ${printer.difference(plusMinus, attribute.unit)}`
-}
-
-function SpecSource({ provenance }: { readonly provenance: Provenance | undefined }) {
-  if (!provenance) return <span>source not recorded</span>
-  const { source, evidence, date, author } = provenance
-  return (
-    <>
-      <strong className="font-semibold text-ink">{sources[source]}</strong>, {printDate(date)}, {author}
-      {evidence !== undefined && <span className="block break-words">{evidence}</span>}
-    </>
-  )
-}
-
 /** Values of one role, each with its ±, and who says so. */
 export function SpecList({ role, attributes, gear, printer }: SpecListProps) {
   const shown = attributes.filter((attribute) => attribute.role === role && gear.specs[attribute.key] !== undefined)
   if (shown.length === 0) return null
   return (
     <section className="mt-8">
-      <h2>{titles[role]}</h2>
+      <h2>{roleTitles[role]}</h2>
       <dl className="mt-2">
         {shown.map((attribute) => {
           const provenance = gear.provenance[attribute.key]
