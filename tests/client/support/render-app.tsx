@@ -15,8 +15,8 @@ import { createPreferenceStore, type Preferences } from '../../../src/lib/prefer
 import { createQueryClient } from '../../../src/lib/query-client'
 
 // Many tests share few processors.
-configure({ asyncUtilTimeout: 5_000 })
-vi.setConfig({ testTimeout: 20_000 })
+configure({ asyncUtilTimeout: 15_000 })
+vi.setConfig({ testTimeout: 60_000 })
 
 class StillObserver implements ResizeObserver {
   observe(): void {}
