@@ -1,3 +1,4 @@
+import { getKind } from '../kinds/index'
 import type { Printer } from '../units/print'
 import type { Assessment, AssessedItem } from './assess'
 import { describeCondition } from './conditions'
@@ -17,7 +18,8 @@ const sayOf = ({ judgement, condition }: Judged): Say =>
 
 const nameOf = ({ item }: AssessedItem): string => {
   const { gear, kind } = item.piece
-  return gear ? `${gear.brand} ${gear.model}` : kind.replaceAll('-', ' ')
+  const { label } = getKind(kind)
+  return gear ? `${gear.brand} ${gear.model}` : `${label[0]?.toUpperCase()}${label.slice(1)}`
 }
 
 /** What a piece that is new in the setup asks of the rest: its own checks that did not simply pass. */

@@ -19,7 +19,7 @@ function findMargin({ rule, judgement }: Judged): number | null {
 }
 
 const closeness = (probability: number): string =>
-  ` A close call: the limit is kept with a probability of ${Math.round(probability * 100)} %; measure before buying.`
+  ` A close call: the chance that it keeps to the limit is ${Math.round(probability * 100)} %; measure before buying.`
 
 /** One check in words, in the reader's units. */
 export function presentCheck(judged: Judged, words: Printer): Check {

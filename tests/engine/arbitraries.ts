@@ -54,7 +54,7 @@ export const pieceOf = (kind: KindKey, known = 9): fc.Arbitrary<Piece> =>
         ]),
       ),
     )
-    .map((specs) => ({ kind, specs: Object.fromEntries(Object.entries(specs).filter(([, value]) => value)) as Specs }))
+    .map((specs) => ({ kind, specs: Object.fromEntries(Object.entries(specs).filter(([, value]) => value)) }))
 
 /** A heater of a size that setups take, so that checks pass, change and fail alike. */
 export const anyHeater: fc.Arbitrary<Piece> = fc
@@ -147,7 +147,9 @@ const items: fc.Arbitrary<Item[]> = fc
       ),
     { maxLength: 4 },
   )
-  .map((list) => list.map(({ place, ...rest }, index) => ({ id: `item-${index}`, ...rest, ...(place && { place }) })))
+  .map((list) =>
+    onlyOneStand(list).map(({ place, ...rest }, index) => ({ id: `item-${index}`, ...rest, ...(place && { place }) })),
+  )
 
 /** Setups that contradict nothing, with all sorts of parts left unsaid. */
 export const anySetup: fc.Arbitrary<Setup> = fc

@@ -237,7 +237,7 @@ describe('the probability that a limit is kept', () => {
     const answer = fitCheck(wholeSetup(), rod)
     expect(answer.confidence.closeCalls).toBe(1)
     expect(checkOf(answer, 'heater.space').message).toMatch(
-      /close call: the limit is kept with a probability of \d\d %/,
+      /close call: the chance that it keeps to the limit is \d\d %/,
     )
     expect(fitCheck(wholeSetup(), heater()).confidence.closeCalls).toBe(0)
   })

@@ -49,7 +49,8 @@ export const createElectricRules = (kind: KindKey): readonly Rule[] => [
 
 function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
   const volts = readSet<number>(piece.specs, 'volts')
-  if (volts === undefined) return lacking(['volts'], () => 'Nobody has recorded the mains voltage it is made for.')
+  if (volts === undefined || volts.length === 0)
+    return lacking(['volts'], () => 'Nobody has recorded the mains voltage it is made for.')
   const { mains } = plan
   const list = volts.join(' or ')
   if (!volts.includes(mains.volts))
@@ -60,8 +61,12 @@ function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
       outcome: 'change',
       measured: volts.map(String),
       asks: { need: 'plug-adaptor', amount: null, unit: null },
-      say: () =>
-        `Has a type ${plugType} plug, your outlets are ${mains.plugType}: ask its maker before using an adaptor.`,
+      say: () => {
+        const plug = plugType === 'other' ? 'a plug of another type' : `a type ${plugType} plug`
+        const outlets = mains.plugType === 'other' ? 'of another type' : mains.plugType
+        const are = plan.assumed.has('mains.plugType') ? 'we assumed outlets' : 'your outlets are'
+        return `Has ${plug}, and ${are} ${outlets}: ask its maker before using an adaptor.`
+      },
     }
   return { outcome: 'pass', measured: volts.map(String), say: () => `Made for ${mains.volts} V.` }
 }

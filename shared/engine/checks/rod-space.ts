@@ -112,7 +112,9 @@ function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: 
   const footprint: Rectangle = [Math.min(runMm, Math.max(clear.lengthMm, clear.widthMm)), d]
   const isRoomy = hasCompany(basin, others, footprint, rod.quantity)
   const bounds = [...opening, ...boundAslant(rod, basin, fit.slackMm)]
-  return settle(basin, { chamber: basin.id, position, angleDeg }, bounds, isRoomy)
+  // A rod that need not be raised at all lies.
+  const shown = angleDeg > 0 ? position : 'flat'
+  return settle(basin, { chamber: basin.id, position: shown, angleDeg }, bounds, isRoomy)
 }
 
 const nearest = (stands: readonly Stand[]): Stand | undefined =>

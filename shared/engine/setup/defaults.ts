@@ -8,7 +8,11 @@ const continent = circuit(230, 16, 'F')
 const australia = circuit(230, 10, 'I')
 const japan = circuit(100, 15, 'A/B')
 
+/** Europe on 230 V (EN 50160, HD 472) whose sockets take the round two-pin plug; from memory, the outlet decides. */
+const onTheContinent = 'AT BE BG CZ DE DK EE ES FI FR GR HR HU IS IT LT LU LV NL NO PL PT RO RS SE SI SK UA'.split(' ')
+
 const byCountry: Readonly<Record<string, ReturnType<typeof circuit>>> = {
+  ...Object.fromEntries(onTheContinent.map((country) => [country, continent])),
   US: northAmerica,
   CA: northAmerica,
   MX: northAmerica,

@@ -6,10 +6,9 @@ type Given = number | string | boolean
 /** A value of the tank, of one of its chambers (`chambers.0.heightMm`) or of its sump. */
 function giveTank(tank: TankInput, [key = '', part = '', field = '']: readonly string[], value: Given): TankInput {
   const { specs } = tank
-  const put = (whole: unknown) => ({
-    ...tank,
-    specs: { ...specs, [key]: { source: 'estimate' as const, ...specs[key], value: whole } },
-  })
+  // Said by whoever said the rest, so that sizes are compared as closely as theirs.
+  const source = Object.values(specs)[0]?.source ?? 'estimate'
+  const put = (whole: unknown) => ({ ...tank, specs: { ...specs, [key]: { source, ...specs[key], value: whole } } })
   if (key === 'chambers') {
     const chambers = readGroups<ChamberInput>(specs, key) ?? []
     return put(chambers.map((chamber, index) => (String(index) === part ? { ...chamber, [field]: value } : chamber)))

@@ -105,6 +105,7 @@ function resolveSize(
 function resolveChamber(
   input: ChamberInput,
   index: number,
+  isAlone: boolean,
   insideHeightMm: number,
   waterLineMm: number,
   assume: Assume,
@@ -116,7 +117,7 @@ function resolveChamber(
   }
   return {
     id: input.id,
-    name: input.name ?? (index === 0 ? 'rear chamber' : `chamber ${input.id}`),
+    name: input.name ?? (isAlone ? 'rear chamber' : `chamber “${input.id}”`),
     lengthMm: input.lengthMm ?? assume(`${path}.lengthMm`, 100),
     widthMm: input.widthMm ?? assume(`${path}.widthMm`, 100),
     waterDepthMm: input.waterDepthMm ?? assume(`${path}.waterDepthMm`, waterLineMm),
@@ -163,7 +164,7 @@ export function resolveTank(
     chamberInputs.length > 0 ? 'rear-chambers' : sumpGiven ? 'sump' : 'none',
   )
   const chambers = chamberInputs.map((chamber, index) =>
-    resolveChamber(chamber, index, insideHeightMm, size.waterLineMm, assume),
+    resolveChamber(chamber, index, chamberInputs.length === 1, insideHeightMm, size.waterLineMm, assume),
   )
   const widest = Math.max(0, ...chambers.map((chamber) => chamber.widthMm))
   const main: WaterBox = {

@@ -209,7 +209,7 @@ describe('everything else in the setup', () => {
         kind: 'check',
         subject: 'heater',
         from: 'pass',
-        message: expect.stringMatching(/^heater: /) as string,
+        message: expect.stringMatching(/^Heater: /) as string,
       }),
     )
     const chamberless = fitCheck(setup, tank({ chambers: undefined, filtration: 'none', displayWidthMm: 400 }))
