@@ -63,9 +63,9 @@ function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
       asks: { need: 'plug-adaptor', amount: null, unit: null },
       say: () => {
         const plug = plugType === 'other' ? 'a plug of another type' : `a type ${plugType} plug`
-        const outlets = mains.plugType === 'other' ? 'of another type' : mains.plugType
-        const are = plan.assumed.has('mains.plugType') ? 'we assumed outlets' : 'your outlets are'
-        return `Has ${plug}, and ${are} ${outlets}: ask its maker before using an adaptor.`
+        const other = mains.plugType === 'other' ? 'of another type' : mains.plugType
+        const outlets = plan.assumed.has('mains.plugType') ? `we assumed ${other} outlets` : `your outlets are ${other}`
+        return `Has ${plug}, and ${outlets}: ask its maker before using an adaptor.`
       },
     }
   return { outcome: 'pass', measured: volts.map(String), say: () => `Made for ${mains.volts} V.` }

@@ -113,7 +113,7 @@ function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: 
   const isRoomy = hasCompany(basin, others, footprint, rod.quantity)
   const bounds = [...opening, ...boundAslant(rod, basin, fit.slackMm)]
   // A rod that need not be raised at all lies.
-  const shown = angleDeg > 0 ? position : 'flat'
+  const shown = fit.angleDeg === 0 ? 'flat' : position
   return settle(basin, { chamber: basin.id, position: shown, angleDeg }, bounds, isRoomy)
 }
 
