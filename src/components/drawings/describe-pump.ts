@@ -1,6 +1,9 @@
 import type { PumpCurveDrawing, PumpDrawing } from '#shared/engine/drawings/pump'
 import type { Printer } from '#shared/units/print'
 
+/** Less than this between two levels of water is not worth a word. */
+const leastLiftMm = 0.5
+
 export const isAtWork = (drawing: PumpCurveDrawing | PumpDrawing): drawing is PumpDrawing => 'system' in drawing
 
 export function printPoint({ flowLph, headM }: PumpDrawing['point'], printer: Printer): string {
@@ -15,7 +18,11 @@ export function printWanted({ turnoversPerHour, wantedLph }: PumpDrawing, printe
 }
 
 export function printPlumbing({ staticHeadM, boreMm }: PumpDrawing, printer: Printer): string {
-  return `what ${printer.length(staticHeadM * 1000)} of lift and a usual pipe, ${printer.length(boreMm)} wide, take`
+  const pipe = `a usual pipe, ${printer.length(boreMm)} wide`
+  const liftMm = staticHeadM * 1000
+  return liftMm < leastLiftMm
+    ? `what ${pipe}, takes without lift`
+    : `what ${printer.length(liftMm)} of lift and ${pipe}, take`
 }
 
 /** The text alternative of a pump's curve, alone or at work. */

@@ -89,7 +89,7 @@ export function LightPlan({ drawing, printer, isExample = false }: LightPlanProp
   return (
     <DrawingSheet
       frame={frame}
-      title={`${isExample ? 'Over an example tank' : 'Light'} half way down, ${printSetting(drawing, printer)}`}
+      title={`${isExample ? 'In an example tank' : 'Light half way down'}, ${printSetting(drawing, printer)}`}
       description={describeLight(drawing, printer)}
       widthPx={widthPx}
       heightPx={heightPx}

@@ -29,7 +29,7 @@ function LightDrawings({ piece, printer }: JudgedDrawingsProps) {
       </div>
       {light && (
         <p className="mt-2 max-w-prose text-sm text-ink-soft">
-          The tank is an example: {printer.volume(volumeL)} with soft and large-polyped corals, all else assumed. Check
+          The tank is an example: {printer.volume(volumeL)} with soft and large-polyp corals, all else assumed. Check
           the light against a setup to see it over yours.
         </p>
       )}
