@@ -5,7 +5,7 @@ import type { Item } from '../types'
 import { readMeasure, readNumber, readSet, readText } from '../values'
 import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
 import { sayUncounted } from '../counting'
-import { limitsOfMount, mountNames, suits } from './light-mounts'
+import { limitsOfMount, mountNames, mountRests, suits } from './light-mounts'
 
 const lightsOf = ({ others }: Scene): readonly Item[] => others.filter((item) => item.piece.kind === 'light')
 
@@ -47,7 +47,10 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
     limit: heaviest,
     probability: () =>
       probabilityAtLeast(load.value, heaviest, standardUncertainty(load.value, load.source, load.plusMinus, 'other')),
-    say: (words) => `Carries ${words.mass(load.value)}, and the light weighs ${words.mass(heaviest)}.`,
+    say: (words) => {
+      const [carried, weight] = words.apart(load.value, heaviest, 'kg')
+      return `Carries ${carried}, and the light weighs ${weight}.`
+    },
   }
 }
 
@@ -68,6 +71,7 @@ function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
   const isHung = type === 'hanging' || type === 'ceiling'
   const unknown = isHung ? lights.length - heights.length : 0
   return {
+    rests: () => mountRests[type] ?? [],
     cautions: unknown > 0 ? [sayUncounted(unknown, 'height')] : [],
     outcome: found ? 'pass' : 'fail',
     measured: type === 'arm' ? tank.wallMm : type === 'rim-legs' ? tank.outerLengthMm : room.ceilingMm,
@@ -116,14 +120,7 @@ export const lightMountRules: KindRules = {
       unit: 'mm',
       rule: 'Clamp around the wall, legs across the length or width, or height under the ceiling.',
       reads: ['type', 'rimMinMm', 'rimMaxMm', 'spanMinMm', 'spanMaxMm'],
-      uses: [
-        'tank.wallMm',
-        'tank.outerLengthMm',
-        'tank.outerWidthMm',
-        'room.ceilingMm',
-        'room.tankTopMm',
-        'tank.outerHeightMm',
-      ],
+      uses: [...new Set(Object.values(mountRests).flat())],
       failLabel: 'not made for this tank',
       judge: judgeTank,
     }),

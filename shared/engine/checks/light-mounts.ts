@@ -15,6 +15,16 @@ export const mountNames: Readonly<Record<string, string>> = {
   canopy: 'a canopy',
 }
 
+const ceilingRests = ['room.ceilingMm', 'room.tankTopMm', 'tank.outerHeightMm']
+
+/** Setup paths that it rests on whether a mount of a sort suits. */
+export const mountRests: Readonly<Record<string, readonly string[]>> = {
+  arm: ['tank.wallMm'],
+  'rim-legs': ['tank.outerLengthMm', 'tank.outerWidthMm'],
+  hanging: ceilingRests,
+  ceiling: ceilingRests,
+}
+
 interface Limits {
   readonly rimMinMm: number | undefined
   readonly rimMaxMm: number | undefined

@@ -4,7 +4,7 @@ import { practiceBasis, thresholds } from '../thresholds'
 import { isWithinMm, readGroups, readMeasure, readSet, readText } from '../values'
 import { probabilityAtMost, standardUncertainty } from '../physics/conformance'
 import { lightCoverage, lightIntensity, lightTargetReads, rankLight } from './light-beam'
-import { judgeMount } from './light-mounts'
+import { judgeMount, mountRests } from './light-mounts'
 
 const hangs = ['hanging', 'ceiling']
 
@@ -151,14 +151,7 @@ export const lightRules: KindRules = {
         'legSpanMaxMm',
         'heightMm',
       ],
-      uses: [
-        'tank.wallMm',
-        'tank.outerLengthMm',
-        'tank.outerWidthMm',
-        'room.ceilingMm',
-        'room.tankTopMm',
-        'tank.outerHeightMm',
-      ],
+      uses: [...new Set(Object.values(mountRests).flat())],
       failLabel: 'without a mount',
       judge: judgeMount,
     }),

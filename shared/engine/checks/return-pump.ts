@@ -62,16 +62,18 @@ const sayTurnover =
   (turnover: Turnover, judged: number, bands: Bands): Say =>
   (words) => {
     const { perHour, point } = turnover
-    const wanted = words.pair(bands.pass, '/h')
-    const times = (value: number) => `${words.number(value, '/h')} times the water an hour`
+    const [low, high] = bands.pass.map((value) => words.number(value, '/h'))
+    const wanted = `${low} to ${high} are wanted`
     const against = point.headM > 0 ? ` against ${words.measure(point.headM, 'm')} of head` : ''
-    const flow = `${words.flow(point.flowLph)}${against}, ${times(perHour)}`
+    const flow = `${words.flow(point.flowLph)}${against}, ${words.number(perHour, '/h')} times the tank’s water an hour`
     const outcome = decide(judged, bands)
     if (outcome === 'pass')
-      return judged < perHour ? `${flow}; its speed control brings that down to the ${wanted} wanted.` : `${flow}.`
-    if (judged < bands.pass[0]) return `${outcome === 'change' ? 'Low' : 'Too weak'}: ${flow}; ${wanted} are wanted.`
+      return judged < perHour
+        ? `${flow}; its speed control brings that down to the ${low} to ${high} that are wanted.`
+        : `${flow}.`
+    if (judged < bands.pass[0]) return `${outcome === 'change' ? 'Low' : 'Too weak'}: ${flow}; ${wanted}.`
     const slowest = judged < perHour ? `, and still ${words.number(judged, '/h')} at its slowest` : ''
-    return `${outcome === 'change' ? 'Throttle it' : 'Far too strong'}: ${flow}${slowest}; ${wanted} are wanted.`
+    return `${outcome === 'change' ? 'Throttle it' : 'Far too strong'}: ${flow}${slowest}; ${wanted}.`
   }
 
 function judgeFlow(scene: Scene, candidate: Candidate): Judgement {

@@ -101,10 +101,12 @@ export function rateStand(stand: Specs, filled: Plan, missing: readonly string[]
       outcome: isHeld ? 'pass' : 'fail',
       limit: rating.value,
       probability: () => probabilityAtLeast(rating.value, totalKg, uncertainty),
-      say: (words) =>
-        isHeld
-          ? `Filled, the tank weighs ${words.mass(totalKg)}; the stand is rated for ${words.mass(rating.value)}.`
-          : `Filled, the tank weighs ${words.mass(totalKg)}, and the stand is rated for only ${words.mass(rating.value)}.`,
+      say: (words) => {
+        const [weight, rated] = words.apart(totalKg, rating.value, 'kg')
+        return isHeld
+          ? `Filled, the tank weighs ${weight}; the stand is rated for ${rated}.`
+          : `Filled, the tank weighs ${weight}, and the stand is rated for only ${rated}.`
+      },
     }
   }
   const madeFor = readMadeFor(stand, filled)

@@ -59,7 +59,7 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const judged = Math.max(lowest, Math.min(highest(quantity), high))
   const base = { measured: judged, limit: [low, high] as const, cautions }
   const times = (words: Printer, perHour: number) => `${words.number(perHour, '/h')} times an hour`
-  const usual = (words: Printer) => `${words.pair([low, high], '/h')} are usual`
+  const usual = (words: Printer) => `${words.number(low, '/h')} to ${words.number(high, '/h')} are usual`
   const lead = mostLph > 0 ? 'With the others it' : 'It'
   if (highest(quantity) < low) {
     const counts = mayMultiply === false || isMultiplied(candidate) ? [] : listCounts(quantity)
