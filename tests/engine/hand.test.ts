@@ -5,7 +5,7 @@ import { report } from '#shared/engine/report'
 import { resolve } from '#shared/engine/setup/resolve'
 import type { Setup } from '#shared/engine/types'
 import { expectWithin, expectWithinShare } from '../standards/within'
-import { checkOf, heater, judge, tankValues, toPlain, toSpecs, wholeSetup } from './build'
+import { checkOf, heater, item, judge, piece, tankValues, toPlain, toSpecs, wholeSetup } from './build'
 
 // One tank and one heater, worked out here from the published formulas without the engine's own functions.
 // Outside 620 × 420 × 400 mm, glass of 10 mm all round, 350 mm of water; water 25 °C; room 18 °C at the coldest, 21 °C
@@ -98,6 +98,15 @@ describe('one tank and one heater, worked out by hand', () => {
       outcome: 'change',
       message: expect.stringContaining('Two of these') as string,
     })
+  })
+
+  it('needs less by what a pump in the water gives it, at both figures and for its strength', () => {
+    const setup = wholeSetup({}, { items: [item('pump', piece('return-pump', { powerW: 20 }))] })
+    const outcome = (powerW: number, id: string) => judge(setup, heater({ powerW }), id)
+    expectWithin(outcome(100, 'heater.power').limit as number, needUpperW - 20, 0.01)
+    expect(outcome(needW - 20 + 0.05, 'heater.power').message).toContain('no reserve')
+    expect(outcome(needW - 20 - 0.05, 'heater.power').message).toContain('Two of these')
+    expectWithin(outcome(100, 'heater.not-too-strong').limit as number, Math.max(2 * (needW - 20), 1.5 * litres), 0.01)
   })
 
   it('asks for a room that stays warmer where one covers only the usual room and two do not fit in', () => {

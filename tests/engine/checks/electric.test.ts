@@ -143,6 +143,8 @@ describe('outlets', () => {
   it('decide nothing where the piece states no plugs', () => {
     expect(judge(wholeSetup(), heater({ plugs: undefined }), 'heater.plugs').outcome).toBe('nodata')
     expect(fitCheck(wholeSetup(), heater({ plugs: undefined })).verdict).toBe('fits')
+    // Nor where every usual number of plugs would be too many: what is not known of a lesser check is listed, no more.
+    expect(fitCheck(setupWith({ outlets: 0 }), heater({ plugs: undefined })).verdict).toBe('fits')
   })
 })
 
