@@ -12,7 +12,9 @@ import type { Page } from '../page-route'
 function FindPage() {
   const { search } = useLocation()
   useEffect(() => {
-    keepLastSetup(new URLSearchParams(listSetupEntries(new URLSearchParams(search))).toString())
+    const setup = new URLSearchParams(listSetupEntries(new URLSearchParams(search))).toString()
+    // Spaces as the finder's own addresses spell them.
+    keepLastSetup(setup.replaceAll('+', '%20'))
   }, [search])
   return <Finder />
 }

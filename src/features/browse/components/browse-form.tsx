@@ -82,9 +82,8 @@ export function BrowseForm({ browse, children }: { readonly browse: Browse; read
       className="print:hidden"
     >
       <input type="hidden" name="of" value={kind ?? ''} />
-      <div className="grid items-end gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[14rem_minmax(0,1fr)_14rem_auto]">
-        <FormSelect name="kind" label="Kind of gear" value={kind ?? ''} options={kindOptions} />
-        <div className="min-w-0 max-lg:sm:col-span-2 max-lg:sm:row-start-1">
+      <div className="grid items-end gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[minmax(0,1fr)_14rem_14rem_auto]">
+        <div className="min-w-0 sm:max-lg:col-span-2">
           <label htmlFor="gear-search" className="block text-sm font-semibold">
             Search by brand, model or a telling number
           </label>
@@ -99,6 +98,7 @@ export function BrowseForm({ browse, children }: { readonly browse: Browse; read
             className={`${controlClass} mt-1`}
           />
         </div>
+        <FormSelect name="kind" label="Kind of gear" value={kind ?? ''} options={kindOptions} />
         <FormSelect
           name="sort"
           label="In order of"

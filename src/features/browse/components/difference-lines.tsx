@@ -38,7 +38,7 @@ export function DifferenceLines({ difference: { attribute, values }, pieces, pri
           const value = values[at] ?? null
           const share = ((shown[at] ?? least) - least) / span
           return (
-            <li key={piece.slug} className="grid grid-cols-[1.25rem_minmax(0,1fr)_6.5rem] items-center gap-2.5">
+            <li key={piece.slug} className="grid grid-cols-[1.25rem_minmax(0,1fr)_7.25rem] items-center gap-2.5">
               <PieceLetter at={at} />
               <svg width="100%" height="14" overflow="visible" aria-hidden="true" className="block stroke-ink">
                 {value === null ? (
