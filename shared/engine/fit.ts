@@ -11,7 +11,6 @@ import {
 } from './candidates'
 import { getRules } from './checks/index'
 import { listAssumptions } from './assumptions'
-import type { Judged } from './judge'
 import { presentKnockOns } from './knock-ons'
 import { groupByVerdict, sortGroup, takePage } from './ranking'
 import { presentCautions, presentCheck } from './present'
@@ -82,12 +81,6 @@ function tally(
     .sort((a, b) => b.count - a.count || (a.key < b.key ? -1 : 1))
 }
 
-/** Missing attributes that leave a piece unjudged. */
-const listMissing = (judged: readonly Judged[]): readonly string[] =>
-  judged
-    .filter(({ outcome, eitherWay, rule }) => outcome === 'nodata' && eitherWay === undefined && rule.worst === 'fail')
-    .flatMap(({ judgement }) => judgement.missing ?? [])
-
 /**
  * Every piece of a kind judged in a setup and put in order: verdict, fewer knock-ons, closeness to the kind's target,
  * backing, slug. `pieces` must be one kind's, and the same array from call to call where speed matters.
@@ -111,7 +104,7 @@ export function fit(
     ),
     options.offset,
     options.limit,
-    (indexes) => sortGroup(indexes, swept, pieces),
+    (indexes, needed) => sortGroup(indexes, swept, pieces, needed),
   )
   const rules = getRules(kind)
   const labels = new Map(rules.rules.map(({ id, failLabel }) => [id, failLabel]))
@@ -130,7 +123,7 @@ export function fit(
     answers,
     counts: { fits: fits.length, changes: changes.length, no: no.length, unknown: unknown.length },
     failedBy: swept.countFailures().map(({ check, count }) => ({ check, count, label: labels.get(check) ?? check })),
-    missingBy: tally(unknown, (index) => listMissing(swept.judgedOf(index))).map(({ key, count }) => ({
+    missingBy: tally(unknown, (index) => swept.tableOf(index).missingOf(index)).map(({ key, count }) => ({
       key,
       count,
       label: getAttribute(kind, key)?.label ?? key,

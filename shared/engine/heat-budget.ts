@@ -1,5 +1,5 @@
 import { findLast } from './physics/bisect'
-import { tankHeatLoss, type TankHeatLoss } from './physics/heat'
+import { tankHeatLoss, tankLossW, type TankHeatLoss } from './physics/heat'
 import { heatCapacityJK } from './physics/seawater'
 import { findEquilibriumC, stuckOn, type StuckOn } from './physics/stuck-on'
 import { once, onceFor, type Scene } from './scene'
@@ -24,11 +24,20 @@ export function sumGainW(plan: Plan, items: readonly Item[]): number {
   }, included)
 }
 
+const toHeatInput = ({ tank: { boxes, lid }, room }: Plan, waterC: number, roomC: number) => ({
+  boxes,
+  lid,
+  waterC,
+  roomC,
+  relativeHumidity: room.relativeHumidity,
+})
+
 /** Heat loss of the setup's water at a water and a room temperature, °C. */
-export function lossAt(plan: Plan, waterC: number, roomC: number): TankHeatLoss {
-  const { boxes, lid } = plan.tank
-  return tankHeatLoss({ boxes, lid, waterC, roomC, relativeHumidity: plan.room.relativeHumidity })
-}
+export const lossAt = (plan: Plan, waterC: number, roomC: number): TankHeatLoss =>
+  tankHeatLoss(toHeatInput(plan, waterC, roomC))
+
+/** The same, W by ASHRAE's evaporation alone. */
+const lossWAt = (plan: Plan, waterC: number, roomC: number): number => tankLossW(toHeatInput(plan, waterC, roomC))
 
 export interface HeaterNeed {
   /** Loss at the goal in the coldest room less the heat gained, floor 0, W: by ASHRAE's evaporation, and by Shah's. */
@@ -52,11 +61,11 @@ export const sumHeaterW = (items: readonly Item[]): number =>
 export function findHeaterNeed({ plan, others }: Scene): HeaterNeed {
   const gainW = sumGainW(plan, others)
   const cold = lossAt(plan, plan.goals.temperatureC, plan.room.coldestC)
-  const usual = lossAt(plan, plan.goals.temperatureC, plan.room.temperatureC)
+  const usualW = lossWAt(plan, plan.goals.temperatureC, plan.room.temperatureC)
   return {
     needW: Math.max(0, cold.totalW - gainW),
     needUpperW: Math.max(0, cold.totalUpperW - gainW),
-    usualNeedW: Math.max(0, usual.totalW - gainW),
+    usualNeedW: Math.max(0, usualW - gainW),
     gainW,
     otherHeatersW: sumHeaterW(others),
   }
@@ -66,7 +75,9 @@ function searchColdestC(scene: Scene, heaterW: number, figure: 'totalW' | 'total
   const { plan } = scene
   const { gainW } = once(scene, findHeaterNeed)
   const goalC = plan.goals.temperatureC
-  const fallsShort = (roomC: number) => lossAt(plan, goalC, roomC)[figure] > heaterW + gainW
+  const lossW = (roomC: number) =>
+    figure === 'totalW' ? lossWAt(plan, goalC, roomC) : lossAt(plan, goalC, roomC).totalUpperW
+  const fallsShort = (roomC: number) => lossW(roomC) > heaterW + gainW
   return findLast(fallsShort, -20, goalC + 20) ?? -20
 }
 
@@ -81,7 +92,7 @@ function integrateStuckOn(scene: Scene, heaterW: number): StuckOn {
   const { plan } = scene
   const { gainW } = once(scene, findHeaterNeed)
   const { temperatureC, salinityPpt } = plan.goals
-  const lossW = (waterC: number) => lossAt(plan, waterC, plan.room.warmestC).totalW
+  const lossW = (waterC: number) => lossWAt(plan, waterC, plan.room.warmestC)
   return stuckOn(
     { heatCapacityJK: heatCapacityJK(plan.tank.waterL, salinityPpt, temperatureC), inputW: heaterW + gainW, lossW },
     temperatureC,
@@ -93,6 +104,6 @@ export const findStuckOn = (scene: Scene, heaterW: number): StuckOn => onceFor(s
 
 /** Where the water settles in the warmest room with no heater on, °C. */
 export function findUnheatedC({ plan, others }: Scene): number {
-  const lossW = (waterC: number) => lossAt(plan, waterC, plan.room.warmestC).totalW
+  const lossW = (waterC: number) => lossWAt(plan, waterC, plan.room.warmestC)
   return findEquilibriumC({ inputW: sumGainW(plan, others), lossW })
 }

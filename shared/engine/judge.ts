@@ -1,9 +1,10 @@
-import { getAttribute } from '../kinds/index'
-import { findCondition, type Condition } from './conditions'
+import { getAttribute, type KindKey } from '../kinds/index'
+import { findCondition } from './conditions'
 import type { Candidate, Judgement, Rule } from './rule'
 import type { Scene } from './scene'
 import type { Outcome, Specs } from './types'
 import { listUsual } from './usual'
+import type { Condition } from './ways'
 
 /** A rule's finding once assumptions and missing numbers were given their due. */
 export interface Judged {
@@ -26,6 +27,29 @@ function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
   })
 }
 
+const grids = new Map<string, readonly Specs[]>()
+
+/** Every combination of the usual values of some attributes, the ends first: they are the likeliest to disagree. */
+function gridOf(kind: KindKey, keys: readonly string[]): readonly Specs[] {
+  const name = `${kind} ${keys.join(' ')}`
+  let grid = grids.get(name)
+  if (!grid) {
+    const all = keys.reduce<Specs[]>(
+      (rows, key) =>
+        rows.flatMap((row) =>
+          listUsual(getAttribute(kind, key)).map((value) => ({
+            ...row,
+            [key]: { value, source: 'estimate' as const },
+          })),
+        ),
+      [{}],
+    )
+    grid = [...all.slice(-1), ...all.slice(0, -1)]
+    grids.set(name, grid)
+  }
+  return grid
+}
+
 /**
  * What the check would say for every usual value of the missing attributes; undefined where they disagree, cannot be
  * tried, or would condemn the piece on an assumed value.
@@ -35,28 +59,25 @@ function tryMissing(
   rule: Rule,
   candidate: Candidate,
   missing: readonly string[],
-  isAssumed: boolean,
+  assumed: () => readonly string[],
 ): Outcome | undefined {
   if (rule.worst !== 'fail' || missing.length === 0 || missing.length > 2) return undefined
-  const grid = missing.reduce<Specs[]>(
-    (rows, key) =>
-      rows.flatMap((row) =>
-        listUsual(getAttribute(candidate.piece.kind, key)).map((value) => ({
-          ...row,
-          [key]: { value, source: 'estimate' as const },
-        })),
-      ),
-    [{}],
-  )
+  const grid = gridOf(candidate.piece.kind, missing)
   if (grid.length <= 1) return undefined
   let shared: Outcome | undefined
   for (const extra of grid) {
     const piece = { ...candidate.piece, specs: { ...candidate.piece.specs, ...extra } }
-    const outcome = rule.judge(scene, { ...candidate, piece })?.outcome
+    const outcome = findOutcome(scene, rule, { ...candidate, piece })
     if (outcome === undefined || outcome === 'nodata' || (shared !== undefined && outcome !== shared)) return undefined
     shared = outcome
   }
-  return shared === 'fail' && isAssumed ? undefined : shared
+  return shared === 'fail' && assumed().length > 0 ? undefined : shared
+}
+
+/** The bare outcome, assumptions not given their due; undefined where the rule does not apply. */
+export function findOutcome(scene: Scene, rule: Rule, candidate: Candidate): Outcome | undefined {
+  const glance = rule.glance?.look(scene, rule.glance.read(candidate.piece.specs), candidate)
+  return glance === 'never' ? 'fail' : (glance ?? rule.judge(scene, candidate)?.outcome)
 }
 
 /** Judges one rule for one candidate. Null where the rule does not apply. */
@@ -66,10 +87,10 @@ export function judge(scene: Scene, rule: Rule, candidate: Candidate): Judged | 
   const assumed = () => listAssumed(scene, judgement.rests?.() ?? rule.uses)
   const base = { rule, judgement, assumed }
   if (judgement.outcome === 'nodata') {
-    const eitherWay = tryMissing(scene, rule, candidate, judgement.missing ?? [], assumed().length > 0)
+    const eitherWay = tryMissing(scene, rule, candidate, judgement.missing ?? [], assumed)
     return { ...base, outcome: 'nodata', ...(eitherWay && { eitherWay }) }
   }
   if (judgement.outcome !== 'fail') return { ...base, outcome: judgement.outcome }
-  const condition = findCondition(scene, assumed(), (varied) => rule.judge(varied, candidate)?.outcome === 'pass')
+  const condition = findCondition(scene, assumed(), (varied) => findOutcome(varied, rule, candidate) === 'pass')
   return condition ? { ...base, outcome: 'change', condition } : { ...base, outcome: 'fail' }
 }

@@ -1,6 +1,6 @@
 import type { Sweep } from './sweep'
 import type { Piece, Verdict } from './types'
-import { rankConfidence, rateConfidence } from './verdict'
+import { rankLevel, rateSources } from './verdict'
 
 /** Indexes of the pieces with each verdict, in catalogue order. */
 export function groupByVerdict({ verdicts }: Sweep): Readonly<Record<Verdict, number[]>> {
@@ -9,25 +9,59 @@ export function groupByVerdict({ verdicts }: Sweep): Readonly<Record<Verdict, nu
   return groups
 }
 
-/** Pieces of one verdict in order: fewer demands, closeness to the target, backing, slug. */
-export function sortGroup(indexes: readonly number[], swept: Sweep, pieces: readonly Piece[]): number[] {
-  const backings = new Map<number, number>()
-  // Only ties ask how well the data is backed, which takes every probability of a piece to tell.
-  const backingOf = (index: number): number => {
-    const known = backings.get(index)
-    if (known !== undefined) return known
-    const rank = rankConfidence(rateConfidence(pieces[index]!, swept.judgedOf(index)))
-    backings.set(index, rank)
-    return rank
+function addTo<K>(lists: Map<K, number[]>, key: K, index: number): void {
+  const list = lists.get(key)
+  if (list) list.push(index)
+  else lists.set(key, [index])
+}
+
+/** Lists of pieces that are alike in demands and closeness to the target, the least demanding and closest first. */
+function groupTies(indexes: readonly number[], { demands, targetOf }: Sweep): readonly (readonly number[])[] {
+  const byDemands = new Map<number, Map<number, number[]>>()
+  for (const index of indexes) {
+    const asked = demands[index]!
+    let byTarget = byDemands.get(asked)
+    if (!byTarget) byDemands.set(asked, (byTarget = new Map<number, number[]>()))
+    addTo(byTarget, targetOf(index), index)
   }
+  const inOrder = <T>(map: ReadonlyMap<number, T>): readonly T[] =>
+    [...map].sort(([a], [b]) => a - b).map(([, value]) => value)
+  return inOrder(byDemands).flatMap(inOrder)
+}
+
+/**
+ * The first of some tied pieces: fewer close calls, then better backing, then slug. Close calls take every probability of
+ * a piece to tell, so they are counted only until enough pieces without one are found.
+ */
+function takeBest(tied: readonly number[], swept: Sweep, pieces: readonly Piece[], needed: number): readonly number[] {
+  if (tied.length < 2) return tied
   const slugOf = (index: number) => pieces[index]!.gear?.slug ?? ''
-  return [...indexes].sort(
-    (a, b) =>
-      swept.demands[a]! - swept.demands[b]! ||
-      swept.targets[a]! - swept.targets[b]! ||
-      backingOf(a) - backingOf(b) ||
-      (slugOf(a) < slugOf(b) ? -1 : slugOf(a) > slugOf(b) ? 1 : a - b),
+  const ranks = new Map(tied.map((index) => [index, rankLevel(rateSources(swept.tableOf(index).sourcesOf(index)))]))
+  const sorted = [...tied].sort(
+    (a, b) => ranks.get(a)! - ranks.get(b)! || (slugOf(a) < slugOf(b) ? -1 : slugOf(a) > slugOf(b) ? 1 : a - b),
   )
+  const byCloseCalls = new Map<number, number[]>()
+  for (const index of sorted) {
+    addTo(byCloseCalls, swept.tableOf(index).countCloseCalls(index), index)
+    const clear = byCloseCalls.get(0)
+    if (clear && clear.length >= needed) return clear
+  }
+  return [...byCloseCalls].sort(([a], [b]) => a - b).flatMap(([, list]) => list)
+}
+
+/** The first `needed` pieces of one verdict in order: fewer demands, closeness to the target, backing, slug. */
+export function sortGroup(
+  indexes: readonly number[],
+  swept: Sweep,
+  pieces: readonly Piece[],
+  needed: number,
+): readonly number[] {
+  const sorted: number[] = []
+  for (const tied of groupTies(indexes, swept)) {
+    if (sorted.length >= needed) break
+    sorted.push(...takeBest(tied, swept, pieces, needed - sorted.length))
+  }
+  return sorted
 }
 
 /** One page of several groups one after the other; only the groups that the page touches are put in order. */
@@ -35,14 +69,14 @@ export function takePage(
   groups: readonly (readonly number[])[],
   offset: number,
   limit: number,
-  sort: (group: readonly number[]) => readonly number[],
+  sort: (group: readonly number[], needed: number) => readonly number[],
 ): { indexes: readonly number[]; total: number } {
   const indexes: number[] = []
   let start = 0
   for (const group of groups) {
     const from = Math.max(0, offset + indexes.length - start)
-    if (indexes.length < limit && from < group.length)
-      indexes.push(...sort(group).slice(from, from + limit - indexes.length))
+    const to = from + limit - indexes.length
+    if (indexes.length < limit && from < group.length) indexes.push(...sort(group, to).slice(from, to))
     start += group.length
   }
   return { indexes, total: start }

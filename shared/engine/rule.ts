@@ -1,6 +1,6 @@
 import type { Printer } from '../units/print'
 import type { CanonicalUnit } from '../units/units'
-import type { Basis, Outcome, Piece, Place, Placement, Scale } from './types'
+import type { Basis, Outcome, Piece, Place, Placement, Scale, Specs } from './types'
 import type { Scene } from './scene'
 
 /** A sentence, made only where somebody reads it, in the reader's units. */
@@ -46,12 +46,33 @@ export interface Candidate {
   readonly mayMultiply?: boolean
 }
 
+/** How a piece is judged, the piece itself left out. */
+export type Way = Omit<Candidate, 'piece'>
+
 /** Whether more of the piece are judged than were asked about. */
-export const isMultiplied = ({ quantity, asked = quantity }: Candidate): boolean => quantity > asked
+export const isMultiplied = ({ quantity, asked = quantity }: Way): boolean => quantity > asked
 
 /** "Two of these" */
 export const countOfThese = (quantity: number): string =>
   `${['One', 'Two', 'Three', 'Four'][quantity - 1] ?? quantity} of these`
+
+/** `never`: fails, and would whatever else had been said instead of what was assumed. */
+export type Glance = 'pass' | 'change' | 'fail' | 'never'
+
+/**
+ * The outcome of `judge` without its reasons, where that can be told with next to no work: thousands of pieces are only
+ * counted, and need no more. What it goes by is read from the specs once per catalogue.
+ */
+export interface Glancer {
+  readonly read: (specs: Specs) => unknown
+  /** Undefined where it takes `judge` to tell. `facts` is what `read` made of the specs. */
+  readonly look: (scene: Scene, facts: unknown, way: Way) => Glance | undefined
+}
+
+export const glanceBy = <Facts>(
+  read: (specs: Specs) => Facts,
+  look: (scene: Scene, facts: Facts, way: Way) => Glance | undefined,
+): Glancer => ({ read, look: (scene, facts, way) => look(scene, facts as Facts, way) })
 
 /** One line of the rule table: data for the method page and the API, and the function that judges. */
 export interface Rule {
@@ -73,11 +94,7 @@ export interface Rule {
   readonly uses: readonly string[]
   /** As in "14 too long or too thick for the chamber". */
   readonly failLabel: string
-  /**
-   * The outcome without its reasons, where that can be told with next to no work; undefined where it cannot. Must agree
-   * with `judge`, assumptions given their due. Thousands of pieces are only counted, and need no more.
-   */
-  readonly glance?: (scene: Scene, candidate: Candidate) => 'pass' | 'fail' | undefined
+  readonly glance?: Glancer
   /** Null: does not apply to this piece in this setup. */
   readonly judge: (scene: Scene, candidate: Candidate) => Judgement | null
 }

@@ -1,6 +1,6 @@
 import { defaultPlusMinus, isCloseCall } from './physics/conformance'
 import type { Judged } from './judge'
-import type { Confidence, Piece, Source, Verdict } from './types'
+import type { Confidence, Piece, Source, Specs, Verdict } from './types'
 
 export const verdictOrder: readonly Verdict[] = ['fits', 'changes', 'unknown', 'no']
 
@@ -12,26 +12,33 @@ export function decideVerdict(judged: readonly Judged[]): Verdict {
   return outcomes.includes('change') ? 'changes' : 'fits'
 }
 
-const isClose = ({ judgement, outcome }: Judged) =>
+/** Whether a check could as well have gone the other way. */
+export const isCloseJudgement = ({ judgement, outcome }: Judged): boolean =>
   outcome !== 'nodata' && judgement.probability !== undefined && isCloseCall(judgement.probability())
 
+const bitOf: Readonly<Record<Source, number>> = { measured: 1, maker: 2, estimate: 4 }
+
+/** Where the values under some keys came from, one bit per source. */
+export const readSources = (specs: Specs, keys: readonly string[]): number =>
+  keys.reduce((bits, key) => {
+    const source = specs[key]?.source
+    return source ? bits | bitOf[source] : bits
+  }, 0)
+
+/** One source alone, or a mixture; nothing that is known counts as an estimate. */
+export function rateSources(bits: number): Confidence['level'] {
+  if (bits === bitOf.measured) return 'measured'
+  if (bits === bitOf.maker) return 'maker'
+  return bits === 0 || bits === bitOf.estimate ? 'estimate' : 'mixed'
+}
+
 /** Where the values that decided came from, and how many checks could as well have gone the other way. */
-export function rateConfidence(piece: Piece, judged: readonly Judged[]): Confidence {
-  const sources = new Set<Source>()
-  for (const { rule } of judged)
-    for (const key of rule.reads) {
-      const source = piece.specs[key]?.source
-      if (source) sources.add(source)
-    }
-  const [only] = sources
-  const level = sources.size === 1 && only ? only : sources.size === 0 ? 'estimate' : 'mixed'
-  return { level, closeCalls: judged.filter(isClose).length }
+export function rateConfidence({ specs }: Piece, judged: readonly Judged[]): Confidence {
+  const bits = judged.reduce((all, { rule }) => all | readSources(specs, rule.reads), 0)
+  return { level: rateSources(bits), closeCalls: judged.filter(isCloseJudgement).length }
 }
 
 const backing = Object.keys(defaultPlusMinus)
 
-/** For ordering: 0 all measured, then maker, mixed, estimates; close calls behind clear ones. */
-export function rankConfidence({ level, closeCalls }: Confidence): number {
-  const rank = level === 'mixed' ? 1.5 : backing.indexOf(level)
-  return rank + 10 * closeCalls
-}
+/** For ordering: 0 all measured, then maker, mixed, estimates. */
+export const rankLevel = (level: Confidence['level']): number => (level === 'mixed' ? 1.5 : backing.indexOf(level))

@@ -57,7 +57,7 @@ const printNumber = (shown: number, symbol: string, options: PrintOptions): stri
 /** A difference of temperatures has no offset, which is what kelvins are for; it is small, so tenths matter. */
 const differenceUnit = (unit: CanonicalUnit): CanonicalUnit => (unit === 'C' ? 'K' : unit)
 
-export const createPrinter = (system: UnitSystem): Printer => {
+const writePrinter = (system: UnitSystem): Printer => {
   const unitLabel = (unit: CanonicalUnit) => units[unit][system]
   const number = (value: number, unit: CanonicalUnit, options: PrintOptions = {}) =>
     printNumber(toShown(value, unit, system), unitLabel(unit), options)
@@ -95,3 +95,7 @@ export const createPrinter = (system: UnitSystem): Printer => {
     flow: helper('L/h'),
   }
 }
+
+const printers: Readonly<Record<UnitSystem, Printer>> = { us: writePrinter('us'), metric: writePrinter('metric') }
+
+export const createPrinter = (system: UnitSystem): Printer => printers[system]

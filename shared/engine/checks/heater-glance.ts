@@ -1,70 +1,166 @@
-import type { Candidate } from '../rule'
-import { once, type Scene } from '../scene'
-import { findBasins, findOccupants } from '../setup/places'
+import { findLongestMm } from '../physics/geometry'
+import { glanceBy } from '../rule'
+import { once, onceFor, type Scene } from '../scene'
+import { findBasins, findOccupants, type Basin } from '../setup/places'
 import { thresholds } from '../thresholds'
-import { readNumber, readText } from '../values'
+import type { Specs } from '../types'
+import { isWithinMm, readNumber, readText } from '../values'
 import { listBounds } from './rod-space'
 import { hasAreas } from './shape'
 
 export const findUsualBasins = ({ plan }: Scene) => findBasins(plan, undefined)
 
+const clearanceMm = thresholds.rodClearanceMm.value
+
+interface Water {
+  readonly basin: Basin
+  readonly acrossMm: number
+  readonly openingMm: number
+  readonly isFree: boolean
+}
+
 interface Reach {
-  /** Free basins without an opening to pass: water depth, height and narrower side of each, mm. */
-  readonly open: readonly { readonly waterMm: number; readonly heightMm: number; readonly acrossMm: number }[]
+  readonly waters: readonly Water[]
+  /** A size of theirs was assumed and might be another. */
+  readonly mayChange: boolean
   /** The most that could be stood, laid and leaned anywhere, mm; null where a size was assumed and might be more. */
   readonly most: { readonly uprightMm: number; readonly flatMm: number; readonly leaningMm: number } | null
 }
 
-const clearanceMm = 2 * thresholds.rodClearanceMm.value
-
 function findReach(scene: Scene): Reach {
   const basins = once(scene, findUsualBasins)
+  const assumed = basins.flatMap((basin) => listBounds(basin).filter((path) => scene.plan.assumed.has(path)))
+  // Whether there is a sump beside the display may be assumed too, and its water takes other rods.
   const mayHaveSump = scene.plan.assumed.has('tank.filtration') && scene.plan.tank.chambers.length === 0
-  const mayGrow = (path: string) => scene.plan.assumed.has(path) && !path.endsWith('.heightMm')
-  const most = (measure: (basin: (typeof basins)[number]) => number) => Math.max(...basins.map(measure))
+  const most = (measure: (basin: Basin) => number) => Math.max(...basins.map(measure))
   return {
-    open: basins
-      .filter(
-        ({ id, openingLengthMm, openingWidthMm }) =>
-          openingLengthMm === undefined && openingWidthMm === undefined && findOccupants(scene.others, id).length === 0,
-      )
-      .map(({ lengthMm, widthMm, waterDepthMm, heightMm }) => ({
-        waterMm: waterDepthMm,
-        heightMm,
-        acrossMm: Math.min(lengthMm, widthMm),
-      })),
+    waters: basins.map((basin) => ({
+      basin,
+      acrossMm: Math.min(basin.lengthMm, basin.widthMm),
+      openingMm: Math.min(basin.openingLengthMm ?? Infinity, basin.openingWidthMm ?? Infinity),
+      isFree: findOccupants(scene.others, basin.id).length === 0,
+    })),
+    mayChange: assumed.length > 0 || mayHaveSump,
     most:
-      mayHaveSump || basins.some((basin) => listBounds(basin).some(mayGrow))
+      mayHaveSump || assumed.some((path) => !path.endsWith('.heightMm'))
         ? null
         : {
             uprightMm: most(({ waterDepthMm }) => waterDepthMm),
-            flatMm: most(({ lengthMm, widthMm }) => Math.hypot(lengthMm - clearanceMm, widthMm - clearanceMm)),
+            flatMm: most(({ lengthMm, widthMm }) => Math.hypot(lengthMm - 2 * clearanceMm, widthMm - 2 * clearanceMm)),
             leaningMm: most(({ lengthMm, widthMm, waterDepthMm }) => Math.hypot(lengthMm, widthMm, waterDepthMm)),
           },
   }
 }
 
+/** The longest rod of a thickness that can lean or lie, mm, per basin: the same for every rod as thick. */
+function findLongest(scene: Scene, diameterMm: number) {
+  return once(scene, findReach).waters.map(({ basin: { lengthMm, widthMm, waterDepthMm } }) => {
+    const runMm = findLongestMm(diameterMm, [lengthMm - 2 * clearanceMm, widthMm - 2 * clearanceMm])
+    const flatMm = findLongestMm(diameterMm + 2 * clearanceMm, [lengthMm, widthMm])
+    return {
+      leaningMm: runMm === null ? null : findLongestMm(diameterMm, [runMm, waterDepthMm]),
+      flatMm: flatMm === null ? null : flatMm - 2 * clearanceMm,
+    }
+  })
+}
+
 /** Well past the 0.05 mm that comparisons of lengths allow. */
 const plainlyMm = 0.1
 
-/** Plainly standing free, or plainly too long for any place its maker allows; undefined: look closer. */
-export function glanceAtSpace(scene: Scene, { piece, quantity, place }: Candidate): 'pass' | 'fail' | undefined {
-  const { specs } = piece
-  const length = readNumber(specs, 'lengthMm')
-  const diameter = readNumber(specs, 'diameterMm')
-  if (length === undefined || diameter === undefined || place || quantity > 1) return undefined
-  if (readText(specs, 'form') === 'inline' || !hasAreas(scene.plan)) return undefined
-  const { open, most } = once(scene, findReach)
-  const orientation = readText(specs, 'orientation')
-  const immersed = readNumber(specs, 'minImmersionMm') ?? length
-  if (orientation !== 'horizontal') {
-    for (const { waterMm, heightMm, acrossMm } of open)
-      if (immersed <= waterMm && length <= heightMm && diameter + clearanceMm <= acrossMm) return 'pass'
-  }
-  if (most === null) return undefined
-  const isPast = (lengthMm: number, limitMm: number) => lengthMm > limitMm + plainlyMm
-  const upright = isPast(immersed, most.uprightMm)
-  if (orientation === 'vertical') return upright ? 'fail' : undefined
-  if (orientation === 'horizontal') return isPast(length, most.flatMm) ? 'fail' : undefined
-  return upright && isPast(length, most.leaningMm) ? 'fail' : undefined
+/** True or false only where it is plain. */
+const isPlainlyWithin = (mm: number, limitMm: number): boolean | undefined =>
+  mm <= limitMm ? true : mm > limitMm + plainlyMm ? false : undefined
+
+interface Sizes {
+  readonly lengthMm: number
+  readonly diameterMm: number
+  readonly immersedMm: number
 }
+
+/** Whether one rod can stand there, by the very limits that `judge` sets. */
+const canStand = ({ basin, acrossMm, openingMm }: Water, { lengthMm, diameterMm, immersedMm }: Sizes): boolean =>
+  isWithinMm(diameterMm + 2 * clearanceMm, acrossMm) &&
+  isWithinMm(diameterMm, openingMm) &&
+  isWithinMm(immersedMm, basin.waterDepthMm) &&
+  isWithinMm(lengthMm, basin.heightMm)
+
+/** Whether one rod can lean or lie there; undefined where that takes a closer look. */
+function canSlant(
+  scene: Scene,
+  { basin, acrossMm, openingMm }: Water,
+  index: number,
+  { lengthMm, diameterMm }: Sizes,
+  isLeaning: boolean,
+): boolean | undefined {
+  const passes = isPlainlyWithin(diameterMm, Math.min(openingMm, basin.waterDepthMm))
+  const isThin = isPlainlyWithin(diameterMm + 2 * clearanceMm, acrossMm)
+  if (passes === false || isThin === false) return false
+  const longest = onceFor(scene, findLongest, diameterMm)[index]
+  const longestMm = isLeaning ? longest?.leaningMm : longest?.flatMm
+  if (typeof longestMm !== 'number') return undefined
+  const isShort = isPlainlyWithin(lengthMm, longestMm)
+  if (isShort === false) return false
+  return passes && isThin && isShort
+}
+
+/** Whether a single rod fits anywhere in one of the positions; undefined where that takes a closer look. */
+function findRoom(scene: Scene, sizes: Sizes, orientation: 'vertical' | 'horizontal' | 'any'): boolean | undefined {
+  let isUnsure = false
+  for (const [index, water] of once(scene, findReach).waters.entries()) {
+    const found = [
+      orientation === 'horizontal' ? false : canStand(water, sizes),
+      orientation === 'any' && canSlant(scene, water, index, sizes, true),
+      orientation !== 'vertical' && canSlant(scene, water, index, sizes, false),
+    ]
+    if (found.includes(true) && water.isFree) return true
+    if (found.some((one) => one !== false)) isUnsure = true
+  }
+  return isUnsure ? undefined : false
+}
+
+/** Whether what the sizes were assumed to be could be to blame. */
+function isHopeless({ mayChange, most }: Reach, { lengthMm, immersedMm }: Sizes, orientation: string): boolean {
+  if (!mayChange) return true
+  if (most === null) return false
+  const isPast = (mm: number, limitMm: number) => mm > limitMm + plainlyMm
+  if (orientation === 'horizontal') return isPast(lengthMm, most.flatMm)
+  return isPast(immersedMm, most.uprightMm) && (orientation === 'vertical' || isPast(lengthMm, most.leaningMm))
+}
+
+/** Whether two rods as thick stand side by side there, squares as seen from above; undefined within a hair of it. */
+function canPair({ basin: { lengthMm, widthMm }, acrossMm }: Water, diameterMm: number): boolean | undefined {
+  const along = isPlainlyWithin(2 * diameterMm + 3 * clearanceMm, Math.max(lengthMm, widthMm))
+  const across = isPlainlyWithin(diameterMm + 2 * clearanceMm, acrossMm)
+  return along === false || across === false ? false : along && across
+}
+
+/** Two rods in one basin upright; a slanting one takes at least as much room, and several basins are for a closer look. */
+function findRoomForTwo(scene: Scene, sizes: Sizes, orientation: string | undefined): boolean | undefined {
+  const { waters } = once(scene, findReach)
+  const pairs = waters.map((water) => (water.isFree ? canPair(water, sizes.diameterMm) : undefined))
+  if (orientation !== 'horizontal' && waters.some((water, index) => pairs[index] && canStand(water, sizes))) return true
+  return waters.length === 1 && pairs[0] === false ? false : undefined
+}
+
+const readRod = (specs: Specs) => ({
+  lengthMm: readNumber(specs, 'lengthMm'),
+  diameterMm: readNumber(specs, 'diameterMm'),
+  minImmersionMm: readNumber(specs, 'minImmersionMm'),
+  orientation: readText(specs, 'orientation') as 'vertical' | 'horizontal' | 'any' | undefined,
+  isInline: readText(specs, 'form') === 'inline',
+})
+
+/** Whether there is room for the rod, or for two, where sizes alone tell that plainly. */
+export const glanceAtSpace = glanceBy(readRod, (scene, rod, { quantity, place }) => {
+  if (rod.isInline) return scene.plan.tank.filtration === 'sump' ? 'pass' : 'change'
+  const { lengthMm, diameterMm, orientation } = rod
+  if (lengthMm === undefined || diameterMm === undefined || place || quantity > 2) return undefined
+  if (!hasAreas(scene.plan)) return undefined
+  const sizes = { lengthMm, diameterMm, immersedMm: rod.minImmersionMm ?? lengthMm }
+  const alone = findRoom(scene, sizes, orientation ?? 'vertical')
+  const hasRoom = quantity === 2 && alone !== false ? findRoomForTwo(scene, sizes, orientation) : alone
+  if (hasRoom !== false) return hasRoom && 'pass'
+  // Of a rod that does not stand and may or may not lean or lie, nothing is known.
+  if (orientation === undefined && findRoom(scene, sizes, 'any') !== false) return undefined
+  return isHopeless(once(scene, findReach), sizes, orientation ?? 'vertical') ? 'never' : 'fail'
+})

@@ -1,12 +1,22 @@
 import { findColdestHeldC, findHeaterNeed, findStuckOn, findUnheatedC } from '../heat-budget'
 import { otherControllers } from '../mains-budget'
 import { probabilityAtLeast, probabilityAtMost, standardUncertainty } from '../physics/conformance'
-import { countOfThese, isMultiplied, lacking, type Candidate, type Judgement, type Rule, type Say } from '../rule'
+import {
+  countOfThese,
+  isMultiplied,
+  lacking,
+  glanceBy,
+  type Candidate,
+  type Judgement,
+  type Rule,
+  type Say,
+  type Way,
+} from '../rule'
 import { once, type Scene } from '../scene'
 import { hasAreas, noAreas } from './shape'
 import { thresholds } from '../thresholds'
-import type { Value } from '../types'
-import { readMeasure, readText } from '../values'
+import type { Specs, Value } from '../types'
+import { readMeasure, readNumber, readText } from '../values'
 
 const heatUses = [
   'room.coldestC',
@@ -33,62 +43,80 @@ const noPower = lacking(['powerW'], () => 'Nobody has recorded its power yet.')
 const uncertaintyW = (power: Value<number>, quantity: number) =>
   quantity * standardUncertainty(power.value, power.source, power.plusMinus, 'other')
 
+/** What all heaters together do: from more than is needed down to too little; `pair`: a second one like it would do. */
+type PowerGrade = 'unneeded' | 'holds' | 'several' | 'barely' | 'pair' | 'usually' | 'weak'
+
+const outcomeOf: Readonly<Record<PowerGrade, 'pass' | 'change' | 'fail'>> = {
+  unneeded: 'pass',
+  holds: 'pass',
+  several: 'change',
+  barely: 'change',
+  pair: 'change',
+  usually: 'change',
+  weak: 'fail',
+}
+
+function gradePower(scene: Scene, way: Way, powerW: number): PowerGrade {
+  const { needW, needUpperW, usualNeedW, otherHeatersW } = once(scene, findHeaterNeed)
+  const { quantity, mayMultiply } = way
+  const totalW = powerW * quantity + otherHeatersW
+  if (needUpperW === 0) return 'unneeded'
+  if (totalW >= needUpperW) return isMultiplied(way) ? 'several' : 'holds'
+  if (totalW >= needW) return 'barely'
+  if (mayMultiply !== false && quantity === 1 && totalW + powerW >= needW) return 'pair'
+  return totalW >= usualNeedW ? 'usually' : 'weak'
+}
+
+const glanceAtPower = glanceBy(
+  (specs) => readNumber(specs, 'powerW'),
+  (scene, powerW, way) => {
+    if (powerW === undefined || !hasAreas(scene.plan)) return undefined
+    const grade = gradePower(scene, way, powerW)
+    // That two would do is more than an outcome.
+    return grade === 'pair' ? undefined : outcomeOf[grade]
+  },
+)
+
 function judgePower(scene: Scene, candidate: Candidate): Judgement {
-  const { piece, quantity, mayMultiply } = candidate
+  const { piece, quantity } = candidate
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
   const { plan } = scene
   if (!hasAreas(plan)) return noAreas(plan)
-  const { needW, needUpperW, usualNeedW, otherHeatersW } = once(scene, findHeaterNeed)
+  const { needW, needUpperW, otherHeatersW } = once(scene, findHeaterNeed)
   const totalW = power.value * quantity + otherHeatersW
   const goalC = plan.goals.temperatureC
   const coldestC = plan.room.coldestC
   const probability = () => probabilityAtLeast(totalW, needUpperW, uncertaintyW(power, quantity))
-  const base = { measured: totalW, limit: needUpperW, probability }
-  if (needUpperW === 0) return { ...base, outcome: 'pass', say: () => 'No heater is needed at these temperatures.' }
-  const holdsTo = (figure: 'totalW' | 'totalUpperW') => findColdestHeldC(scene, totalW, figure)
-  if (totalW >= needUpperW && isMultiplied(candidate))
-    return {
-      ...base,
-      outcome: 'change',
-      say: (words) =>
-        `${countOfThese(quantity)}: one alone gives ${words.power(power.value)} of the ${words.pair([needW, needUpperW], 'W')} that hold ${words.temperature(goalC)}.`,
-    }
-  if (totalW >= needUpperW)
-    return {
-      ...base,
-      outcome: 'pass',
-      say: (words) =>
-        `Holds ${words.temperature(goalC)} with the room down to ${words.temperature(holdsTo('totalUpperW'))}.`,
-    }
-  if (totalW >= needW)
-    return {
-      ...base,
-      outcome: 'change',
-      say: (words) =>
-        `${isMultiplied(candidate) ? `${countOfThese(quantity)} just hold` : 'Just holds'} ${words.temperature(goalC)} with the room at ${words.temperature(coldestC)}: no reserve on the coldest night (${words.power(totalW)} against ${words.pair([needW, needUpperW], 'W')}).`,
-    }
-  const both = totalW + power.value * quantity
-  if (mayMultiply !== false && quantity === 1 && both >= needW)
-    return {
-      ...base,
-      outcome: 'change',
-      enough: 2,
-      say: (words) =>
-        `${countOfThese(2)}: one gives ${words.power(totalW)} of the ${words.pair([needW, needUpperW], 'W')} needed.`,
-    }
-  if (totalW >= usualNeedW)
-    return {
-      ...base,
-      outcome: 'change',
-      say: (words) =>
-        `Holds ${words.temperature(goalC)} only while the room stays above ${words.temperature(holdsTo('totalW'))}.`,
-    }
+  const grade = gradePower(scene, candidate, power.value)
   return {
-    ...base,
-    outcome: 'fail',
-    say: (words) =>
-      `Too weak: ${words.power(totalW)}, and with the room at ${words.temperature(coldestC)} it takes ${words.pair([needW, needUpperW], 'W')} to hold ${words.temperature(goalC)}.`,
+    outcome: outcomeOf[grade],
+    measured: totalW,
+    limit: needUpperW,
+    probability,
+    ...(grade === 'pair' && { enough: 2 }),
+    say: (words) => {
+      const goal = words.temperature(goalC)
+      const needed = () => words.pair([needW, needUpperW], 'W')
+      const coldest = () => words.temperature(coldestC)
+      const holdsTo = (figure: 'totalW' | 'totalUpperW') => words.temperature(findColdestHeldC(scene, totalW, figure))
+      switch (grade) {
+        case 'unneeded':
+          return 'No heater is needed at these temperatures.'
+        case 'holds':
+          return `Holds ${goal} with the room down to ${holdsTo('totalUpperW')}.`
+        case 'several':
+          return `${countOfThese(quantity)}: one alone gives ${words.power(power.value)} of the ${needed()} that hold ${goal}.`
+        case 'barely':
+          return `${isMultiplied(candidate) ? `${countOfThese(quantity)} just hold` : 'Just holds'} ${goal} with the room at ${coldest()}: no reserve on the coldest night (${words.power(totalW)} against ${needed()}).`
+        case 'pair':
+          return `${countOfThese(2)}: one gives ${words.power(totalW)} of the ${needed()} needed.`
+        case 'usually':
+          return `Holds ${goal} only while the room stays above ${holdsTo('totalW')}.`
+        case 'weak':
+          return `Too weak: ${words.power(totalW)}, and with the room at ${coldest()} it takes ${needed()} to hold ${goal}.`
+      }
+    },
   }
 }
 
@@ -107,6 +135,7 @@ export const heaterPower: Rule = {
   reads: ['powerW'],
   uses: heatUses,
   failLabel: 'too weak for the coldest room',
+  glance: glanceAtPower,
   judge: judgePower,
 }
 
@@ -142,18 +171,36 @@ const warnHot =
     return `With the room at ${words.temperature(scene.plan.room.warmestC)} the water settles near ${words.temperature(hotC)} without any heater: it needs a fan or a chiller.`
   }
 
-function judgeStrength(scene: Scene, { piece, quantity }: Candidate): Judgement {
+const readStrength = (specs: Specs) => ({
+  powerW: readNumber(specs, 'powerW'),
+  // A controller that is the heater's only thermostat is no second cut-off.
+  spoken: ['built-in', 'external-included'].includes(readText(specs, 'thermostat') ?? '') ? 0 : 1,
+})
+
+function gradeStrength(scene: Scene, { quantity }: Way, powerW: number, spoken: number) {
+  const totalW = powerW * quantity + once(scene, findHeaterNeed).otherHeatersW
+  const { passW, changeW } = once(scene, findStrengthLimits)
+  const hasCutOff = otherControllers(scene).count > spoken
+  const limit = hasCutOff ? changeW : passW
+  const outcome: 'pass' | 'change' | 'fail' = totalW <= limit ? 'pass' : totalW <= changeW ? 'change' : 'fail'
+  return { outcome, totalW, limit, changeW }
+}
+
+const glanceAtStrength = glanceBy(readStrength, (scene, { powerW, spoken }, way) =>
+  powerW === undefined || !hasAreas(scene.plan) ? undefined : gradeStrength(scene, way, powerW, spoken).outcome,
+)
+
+function judgeStrength(scene: Scene, candidate: Candidate): Judgement {
+  const { piece, quantity } = candidate
   const power = readMeasure(piece.specs, 'powerW')
   if (!power) return noPower
   if (!hasAreas(scene.plan)) return noAreas(scene.plan)
-  const totalW = power.value * quantity + once(scene, findHeaterNeed).otherHeatersW
-  const { passW, changeW } = once(scene, findStrengthLimits)
-  const thermostat = readText(piece.specs, 'thermostat')
-  // A controller that is the heater's only thermostat is no second cut-off.
-  const spoken = thermostat === 'built-in' || thermostat === 'external-included' ? 0 : 1
-  const hasCutOff = otherControllers(scene).count > spoken
-  const limit = hasCutOff ? changeW : passW
-  const outcome = totalW <= limit ? 'pass' : totalW <= changeW ? 'change' : 'fail'
+  const { outcome, totalW, limit, changeW } = gradeStrength(
+    scene,
+    candidate,
+    power.value,
+    readStrength(piece.specs).spoken,
+  )
   return {
     outcome,
     measured: totalW,
@@ -180,5 +227,6 @@ export const heaterStrength: Rule = {
   reads: ['powerW', 'thermostat'],
   uses: ['room.coldestC', ...heatUses.slice(2)],
   failLabel: 'far too strong for this much water',
+  glance: glanceAtStrength,
   judge: judgeStrength,
 }

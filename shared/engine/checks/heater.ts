@@ -1,25 +1,41 @@
 import { findColdestHeldC, findHeaterNeed } from '../heat-budget'
 import { otherControllers } from '../mains-budget'
-import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
+import { glanceBy, lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
 import { once, type Scene } from '../scene'
 import { practiceBasis, thresholds } from '../thresholds'
+import type { Specs } from '../types'
 import { readNumber, readText } from '../values'
 import { grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 import { heaterPower, heaterStrength } from './heater-power'
 import { scaleHeaters } from './heater-scales'
 import { heaterSpace } from './heater-space'
 
-function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
-  const min = readNumber(piece.specs, 'ratedVolumeMinL')
-  const max = readNumber(piece.specs, 'ratedVolumeMaxL')
-  if (min === undefined && max === undefined)
-    return lacking(['ratedVolumeMaxL'], () => 'Nobody has recorded the volumes its maker rates it for.')
+/** Which way the rated volume misses the tank's, and whether by more than a little. */
+function weighRating(ratedL: number, min: number | undefined, max: number | undefined) {
   const slack = thresholds.ratedVolumeSlack.value
-  const { ratedL } = plan.tank
-  if (!hasRatedVolume(plan)) return noAreas(plan)
   const below = min !== undefined && ratedL < min
   const above = max !== undefined && ratedL > max
   const far = (below && ratedL < min * (1 - slack)) || (above && ratedL > max * (1 + slack))
+  return { below, above, far }
+}
+
+const readRating = (specs: Specs) => ({
+  min: readNumber(specs, 'ratedVolumeMinL'),
+  max: readNumber(specs, 'ratedVolumeMaxL'),
+})
+
+const glanceAtRatedVolume = glanceBy(readRating, ({ plan }, { min, max }) => {
+  if ((min === undefined && max === undefined) || !hasRatedVolume(plan)) return undefined
+  return weighRating(plan.tank.ratedL, min, max).far ? 'change' : 'pass'
+})
+
+function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
+  const { min, max } = readRating(piece.specs)
+  if (min === undefined && max === undefined)
+    return lacking(['ratedVolumeMaxL'], () => 'Nobody has recorded the volumes its maker rates it for.')
+  const { ratedL } = plan.tank
+  if (!hasRatedVolume(plan)) return noAreas(plan)
+  const { below, above, far } = weighRating(ratedL, min, max)
   const limit = min !== undefined && max !== undefined ? ([min, max] as const) : (max ?? min ?? null)
   return {
     outcome: far ? 'change' : 'pass',
@@ -63,6 +79,7 @@ const ratedVolume: Rule = {
   reads: ['ratedVolumeMinL', 'ratedVolumeMaxL'],
   uses: grossUses,
   failLabel: 'rated for another size of tank',
+  glance: glanceAtRatedVolume,
   judge: judgeRatedVolume,
 }
 

@@ -12,7 +12,7 @@ export interface SurfaceAir {
 const activityFactor = 0.5
 
 function readPressures({ waterC, roomC, relativeHumidity }: SurfaceAir) {
-  requireFinite({ waterC, roomC, relativeHumidity })
+  if (!Number.isFinite(waterC + roomC + relativeHumidity)) requireFinite({ waterC, roomC, relativeHumidity })
   const humidity = Math.min(1, Math.max(0, relativeHumidity))
   return { water: saturationPressureKPa(waterC), room: humidity * saturationPressureKPa(roomC) }
 }
@@ -43,6 +43,6 @@ export function shahEvaporationKgM2H(air: SurfaceAir): number {
 
 /** Heat carried off by evaporation, W, at `kgPerHour` from water at `waterC`. RangeError for NaN. */
 export function evaporationHeatW(kgPerHour: number, waterC: number): number {
-  requireFinite({ kgPerHour })
+  if (!Number.isFinite(kgPerHour)) requireFinite({ kgPerHour })
   return (kgPerHour * latentHeatKJKg(waterC)) / 3.6
 }

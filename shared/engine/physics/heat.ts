@@ -48,8 +48,20 @@ export const evaporationShareUnder: Readonly<Record<Lid, number>> = { none: 1, m
 
 /** Heat through a wall per square metre and kelvin, W/(m² K): 1/(R + thickness/λ). RangeError for NaN. */
 export function wallTransmittanceWM2K(thicknessMm: number, material: WallMaterial, resistanceM2KW: number): number {
-  requireFinite({ thicknessMm, resistanceM2KW })
+  if (!Number.isFinite(thicknessMm + resistanceM2KW)) requireFinite({ thicknessMm, resistanceM2KW })
   return 1 / (resistanceM2KW + thicknessMm / 1000 / conductivityWMK[material])
+}
+
+const shareEvaporating = (index: number, lid: Lid): number => (index === 0 ? evaporationShareUnder[lid] : 1)
+
+/** Water that evaporates, L per day, by ASHRAE's model: the same figure as that of `tankHeatLoss`, without the rest. */
+export function evaporationLPerDay(input: TankHeatInput): number {
+  const evaporatingM2 = input.boxes.reduce(
+    (sum, { insideLengthMm, insideWidthMm }, index) =>
+      sum + ((insideLengthMm * insideWidthMm) / 1e6) * shareEvaporating(index, input.lid),
+    0,
+  )
+  return ashraeEvaporationKgM2H(input) * evaporatingM2 * 24
 }
 
 /**
@@ -60,22 +72,9 @@ export function wallTransmittanceWM2K(thicknessMm: number, material: WallMateria
  * water counts as a litre. RangeError for NaN.
  */
 export function tankHeatLoss(input: TankHeatInput): TankHeatLoss {
-  requireFinite({ waterC: input.waterC, roomC: input.roomC, relativeHumidity: input.relativeHumidity })
   const lower = ashraeEvaporationKgM2H(input)
   const upper = Math.max(lower, shahEvaporationKgM2H(input))
-  const liftK = input.waterC - input.roomC
-  const sum = { sidesW: 0, bottomW: 0, surfaceW: 0, evaporatingM2: 0 }
-  input.boxes.forEach((box, index) => {
-    const { insideLengthMm, insideWidthMm, waterDepthMm, wallMm, bottomMm, material } = box
-    requireFinite({ insideLengthMm, insideWidthMm, waterDepthMm, wallMm, bottomMm })
-    const floorM2 = (insideLengthMm * insideWidthMm) / 1e6
-    const sidesM2 = (2 * (insideLengthMm + insideWidthMm) * waterDepthMm) / 1e6
-    sum.sidesW += sidesM2 * wallTransmittanceWM2K(wallMm, material, surfaceResistanceM2KW.sides) * liftK
-    sum.bottomW += floorM2 * wallTransmittanceWM2K(bottomMm, material, surfaceResistanceM2KW.bottom) * liftK
-    sum.surfaceW += (floorM2 * liftK) / surfaceResistanceM2KW.surface
-    sum.evaporatingM2 += floorM2 * (index === 0 ? evaporationShareUnder[input.lid] : 1)
-  })
-  const { sidesW, bottomW, surfaceW, evaporatingM2 } = sum
+  const { sidesW, bottomW, surfaceW, evaporatingM2 } = sumBoxes(input)
   const evaporationW = evaporationHeatW(lower * evaporatingM2, input.waterC)
   const evaporationUpperW = evaporationHeatW(upper * evaporatingM2, input.waterC)
   const conductionW = sidesW + bottomW + surfaceW
@@ -90,4 +89,28 @@ export function tankHeatLoss(input: TankHeatInput): TankHeatLoss {
     evaporationLPerDay: lower * evaporatingM2 * 24,
     evaporationUpperLPerDay: upper * evaporatingM2 * 24,
   }
+}
+
+/** `totalW` of `tankHeatLoss`, W, without the rest: whoever searches for a temperature asks for it hundreds of times. */
+export function tankLossW(input: TankHeatInput): number {
+  const { sidesW, bottomW, surfaceW, evaporatingM2 } = sumBoxes(input)
+  return sidesW + bottomW + surfaceW + evaporationHeatW(ashraeEvaporationKgM2H(input) * evaporatingM2, input.waterC)
+}
+
+/** Conduction through all boxes, W, and the surface that evaporates, m². */
+function sumBoxes(input: TankHeatInput) {
+  const liftK = input.waterC - input.roomC
+  const sum = { sidesW: 0, bottomW: 0, surfaceW: 0, evaporatingM2: 0 }
+  input.boxes.forEach((box, index) => {
+    const { insideLengthMm, insideWidthMm, waterDepthMm, wallMm, bottomMm, material } = box
+    if (!Number.isFinite(insideLengthMm + insideWidthMm + waterDepthMm + wallMm + bottomMm))
+      requireFinite({ insideLengthMm, insideWidthMm, waterDepthMm, wallMm, bottomMm })
+    const floorM2 = (insideLengthMm * insideWidthMm) / 1e6
+    const sidesM2 = (2 * (insideLengthMm + insideWidthMm) * waterDepthMm) / 1e6
+    sum.sidesW += sidesM2 * wallTransmittanceWM2K(wallMm, material, surfaceResistanceM2KW.sides) * liftK
+    sum.bottomW += floorM2 * wallTransmittanceWM2K(bottomMm, material, surfaceResistanceM2KW.bottom) * liftK
+    sum.surfaceW += (floorM2 * liftK) / surfaceResistanceM2KW.surface
+    sum.evaporatingM2 += floorM2 * shareEvaporating(index, input.lid)
+  })
+  return sum
 }

@@ -71,8 +71,10 @@ function integrate(
  */
 export function timeToTemperatureH(tank: HeatedTank, startC: number, targetC: number): number | null {
   requireFinite({ startC, targetC, heatCapacityJK: tank.heatCapacityJK })
-  if (targetC === startC) return 0
-  const equilibriumC = findEquilibriumC(tank)
+  return targetC === startC ? 0 : timeOnTheWayH(tank, startC, targetC, findEquilibriumC(tank))
+}
+
+function timeOnTheWayH(tank: HeatedTank, startC: number, targetC: number, equilibriumC: number): number | null {
   const left = (equilibriumC - targetC) / (equilibriumC - startC)
   // Within a millionth of the way the time depends on how finely equilibrium itself is known.
   if (!(left > 1e-6 && left < 1)) return null
@@ -84,12 +86,15 @@ export function stuckOn(tank: HeatedTank, startC: number): StuckOn {
   requireFinite({ startC, heatCapacityJK: tank.heatCapacityJK })
   const equilibriumC = findEquilibriumC(tank)
   const settled = Math.abs(equilibriumC - startC) < 1e-6
-  const hoursTo = (limitC: number) => (startC >= limitC ? 0 : timeToTemperatureH(tank, startC, limitC))
+  const hoursTo = (limitC: number) => (startC >= limitC ? 0 : timeOnTheWayH(tank, startC, limitC, equilibriumC))
   return {
     equilibriumC,
     hoursTo30C: hoursTo(30),
     hoursTo34C: hoursTo(34),
-    series: settled ? [{ hours: 0, waterC: startC }] : integrate(tank, startC, equilibriumC, seriesSpan, panels),
+    // Only drawings ask for it.
+    get series() {
+      return settled ? [{ hours: 0, waterC: startC }] : integrate(tank, startC, equilibriumC, seriesSpan, panels)
+    },
   }
 }
 

@@ -11,7 +11,7 @@ const dryAirGasConstant = 287.042
  * temperature at or below absolute zero.
  */
 export function saturationPressureKPa(temperatureC: number): number {
-  requireFinite({ temperatureC })
+  if (!Number.isFinite(temperatureC)) requireFinite({ temperatureC })
   const kelvin = temperatureC + 273.15
   if (kelvin <= 0) throw new RangeError(`temperatureC must be above absolute zero, got ${temperatureC}`)
   const ln =
@@ -24,13 +24,13 @@ export function saturationPressureKPa(temperatureC: number): number {
 
 /** Humidity ratio, kg of vapour per kg of dry air (ASHRAE Fundamentals 2017, chapter 1, eq. 20). RangeError for NaN. */
 export function humidityRatio(vapourKPa: number, pressureKPa = standardPressureKPa): number {
-  requireFinite({ vapourKPa, pressureKPa })
+  if (!Number.isFinite(vapourKPa + pressureKPa)) requireFinite({ vapourKPa, pressureKPa })
   return (0.621945 * vapourKPa) / (pressureKPa - vapourKPa)
 }
 
 /** Mass of dry air in a cubic metre of moist air, kg/m³: the density that Shah's model is written in. RangeError for NaN. */
 export function dryAirDensityKgM3(temperatureC: number, vapourKPa: number, pressureKPa = standardPressureKPa): number {
-  requireFinite({ temperatureC, vapourKPa, pressureKPa })
+  if (!Number.isFinite(temperatureC + vapourKPa + pressureKPa)) requireFinite({ temperatureC, vapourKPa, pressureKPa })
   return ((pressureKPa - vapourKPa) * 1000) / (dryAirGasConstant * (temperatureC + 273.15))
 }
 
@@ -39,6 +39,6 @@ export function dryAirDensityKgM3(temperatureC: number, vapourKPa: number, press
  * memory, within 0.3 kJ/kg of IAPWS-IF97 at 25 °C). Range 0–50 °C. RangeError for NaN.
  */
 export function latentHeatKJKg(temperatureC: number): number {
-  requireFinite({ temperatureC })
+  if (!Number.isFinite(temperatureC)) requireFinite({ temperatureC })
   return 2501 - 2.361 * temperatureC
 }

@@ -3,10 +3,14 @@ import type { ChamberInput, Contradiction, Setup, Specs } from '../types'
 import { defaultPlusMinus } from '../physics/conformance'
 import { lengthToleranceMm } from '../physics/geometry'
 import type { TankPlan } from './plan'
-import { resolve } from './resolve'
+import { resolveTank } from './tank'
 import { createPrinter, type Printer } from '../../units/print'
 
 const toleranceMm = lengthToleranceMm
+
+/** What rock and sand displace contradicts no size. */
+const nothingDisplaced = () => 0
+const asIs = <T>(_key: string, value: T): T => value
 
 /**
  * What sizes may be apart without contradicting each other, mm. Sizes of one source were read together; a drawing and
@@ -176,7 +180,7 @@ export function findContradictions(setup: Setup): readonly Contradiction[] {
     return [{ path: 'tank', detail: 'Give the tank’s outside length, width and height, or its volume.' }]
   const shell = checkShell(setup, words)
   if (shell.length > 0) return [...shell, ...checkRoom(setup, words), ...checkItems(setup)]
-  const { tank } = resolve(setup)
+  const tank = resolveTank(setup.tank, nothingDisplaced, asIs)
   const line = readNumber(specs, 'waterLineMm')
   const inside: Contradiction[] = []
   const within = (path: string, value: number | undefined, limitMm: number, what: string) => {

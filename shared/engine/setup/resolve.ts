@@ -1,6 +1,6 @@
 import { readNumber } from '../values'
 import type { Goals, Item, Mains, Room, Setup, Water } from '../types'
-import { tankHeatLoss } from '../physics/heat'
+import { evaporationLPerDay } from '../physics/heat'
 import { chooseMains, defaults, hasKnownMains } from './defaults'
 import type { Plan, TankPlan } from './plan'
 import { resolveTank } from './tank'
@@ -42,14 +42,14 @@ function resolveWater(
   assume: <T extends Assumed>(key: string, value: T) => T,
 ): Water {
   const weekly = () => {
-    const loss = tankHeatLoss({
+    const evaporatedL = evaporationLPerDay({
       boxes: tank.boxes,
       lid: tank.lid,
       waterC: goals.temperatureC,
       roomC: room.temperatureC,
       relativeHumidity: room.relativeHumidity,
     })
-    return defaults.weeklyChangeShare * tank.waterL + 7 * loss.evaporationLPerDay
+    return defaults.weeklyChangeShare * tank.waterL + 7 * evaporatedL
   }
   return {
     feedKPa: given.feedKPa ?? assume('water.feedKPa', defaults.water.feedKPa),

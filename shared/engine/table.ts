@@ -1,0 +1,136 @@
+import { classifyForRule, type Classes } from './classes'
+import { judge, type Judged } from './judge'
+import type { Glance, KindRules, Rule, Way } from './rule'
+import type { Scene } from './scene'
+import type { Piece } from './types'
+import { isCloseJudgement } from './verdict'
+
+/** What one judgement does to the verdict; the worst of a piece's codes is its verdict. */
+export const codes = { nothing: 0, change: 1, unknown: 2, fail: 3 } as const
+
+/** Beside the code: several of the piece would do; the rule does not apply to it. */
+const severalWouldDo = 8
+const doesNotApply = 16
+const notAsked = -1
+
+export const toCode = (coded: number): number => coded & 7
+export const wouldSeveralDo = (coded: number): boolean => (coded & severalWouldDo) !== 0
+
+const codeOfGlance: Readonly<Record<Exclude<Glance, 'fail'>, number>> = {
+  pass: codes.nothing,
+  change: codes.change,
+  never: codes.fail,
+}
+
+function encode(judged: Judged | null): number {
+  if (!judged) return codes.nothing | doesNotApply
+  const outcome = judged.eitherWay ?? judged.outcome
+  if (outcome === 'fail') return codes.fail
+  if (outcome === 'nodata') return judged.rule.worst === 'fail' ? codes.unknown : codes.nothing
+  if (outcome === 'change') return codes.change | (judged.judgement.enough === undefined ? 0 : severalWouldDo)
+  return codes.nothing
+}
+
+/** One rule's answers, each asked for once per class of pieces that it cannot tell apart. */
+export class Column {
+  readonly classes: Classes
+  private readonly coded: Int8Array
+  private readonly judged = new Map<number, Judged | null>()
+  private readonly close = new Map<number, boolean>()
+
+  constructor(
+    readonly rule: Rule,
+    private readonly scene: Scene,
+    private readonly pieces: readonly Piece[],
+    private readonly way: Way,
+  ) {
+    this.classes = classifyForRule(pieces, rule)
+    this.coded = new Int8Array(this.classes.first.length).fill(notAsked)
+  }
+
+  codeOf(index: number): number {
+    const id = this.classes.ofPiece[index]!
+    const known = this.coded[id]!
+    return known === notAsked ? (this.coded[id] = this.ask(index)) : known
+  }
+
+  private ask(index: number): number {
+    const facts = this.classes.facts[this.classes.ofPiece[index]!]
+    const glance = this.rule.glance?.look(this.scene, facts, this.way)
+    // A failure may rest on something assumed, which takes a judgement to tell.
+    return glance && glance !== 'fail' ? codeOfGlance[glance] : encode(this.judgementOf(index))
+  }
+
+  judgementOf(index: number): Judged | null {
+    const id = this.classes.ofPiece[index]!
+    let judged = this.judged.get(id)
+    if (judged === undefined) {
+      judged = judge(this.scene, this.rule, { piece: this.pieces[index]!, ...this.way })
+      this.judged.set(id, judged)
+    }
+    return judged
+  }
+
+  isCloseCall(index: number): boolean {
+    const id = this.classes.ofPiece[index]!
+    let isClose = this.close.get(id)
+    if (isClose === undefined) {
+      const judged = this.judgementOf(index)
+      this.close.set(id, (isClose = judged !== null && isCloseJudgement(judged)))
+    }
+    return isClose
+  }
+
+  /** Bits of the sources of what the rule read, 0 where it does not apply. */
+  sourcesOf(index: number): number {
+    return this.codeOf(index) & doesNotApply ? 0 : this.classes.sources[this.classes.ofPiece[index]!]!
+  }
+}
+
+/** The rules of a kind over all pieces, for one way of judging them: so many of each. */
+export class Table {
+  readonly columns: readonly Column[]
+
+  constructor(
+    scene: Scene,
+    { rules }: KindRules,
+    pieces: readonly Piece[],
+    readonly way: Way,
+  ) {
+    this.columns = rules.map((rule) => new Column(rule, scene, pieces, way))
+  }
+
+  judgedOf(index: number): readonly Judged[] {
+    return this.columns.flatMap((column) => column.judgementOf(index) ?? [])
+  }
+
+  codeOf(index: number): number {
+    return this.columns.reduce<number>((worst, column) => Math.max(worst, toCode(column.codeOf(index))), codes.nothing)
+  }
+
+  countChanges(index: number): number {
+    return this.columns.filter((column) => toCode(column.codeOf(index)) === codes.change).length
+  }
+
+  /** How many of the piece would do, where one does not. */
+  findEnough(index: number): number | undefined {
+    for (const column of this.columns)
+      if (wouldSeveralDo(column.codeOf(index))) return column.judgementOf(index)?.judgement.enough
+    return undefined
+  }
+
+  countCloseCalls(index: number): number {
+    return this.columns.filter((column) => column.isCloseCall(index)).length
+  }
+
+  sourcesOf(index: number): number {
+    return this.columns.reduce((bits, column) => bits | column.sourcesOf(index), 0)
+  }
+
+  /** Missing attributes that leave the piece unjudged. */
+  missingOf(index: number): readonly string[] {
+    return this.columns.flatMap((column) =>
+      toCode(column.codeOf(index)) === codes.unknown ? (column.judgementOf(index)?.judgement.missing ?? []) : [],
+    )
+  }
+}
