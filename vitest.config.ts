@@ -10,7 +10,7 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/{api,client,e2e}/**'],
-          testTimeout: 20_000,
+          testTimeout: 60_000,
         },
       },
       {
@@ -19,8 +19,8 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/api/**/*.test.ts'],
           globalSetup: 'tests/support/test-cluster-setup.ts',
-          testTimeout: 20_000,
-          hookTimeout: 60_000,
+          testTimeout: 60_000,
+          hookTimeout: 180_000,
         },
       },
       {
@@ -30,7 +30,7 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['tests/client/**/*.test.{ts,tsx}'],
           setupFiles: 'tests/support/client-setup.ts',
-          testTimeout: 20_000,
+          testTimeout: 60_000,
           css: false,
         },
       },

@@ -7,7 +7,7 @@ import { anyCorePiece, anyPiece, anySetup } from './arbitraries'
 import { toPlain } from './build'
 
 /** These judge whole setups many times over. */
-const patienceMs = 60_000
+const patienceMs = 240_000
 
 const listOfAnswer = ({ summary, checks, knockOns, cautions }: Answer): readonly string[] => [
   summary,

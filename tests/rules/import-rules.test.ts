@@ -106,7 +106,7 @@ beforeAll(() => {
   const args = [cruiser, '--config', config, '--output-type', 'json', 'server', 'src', 'shared', 'scripts']
   const { stdout } = spawnSync(process.execPath, args, { cwd: folder, encoding: 'utf8', maxBuffer: 64e6 })
   violations = (JSON.parse(stdout) as { summary: { violations: Violation[] } }).summary.violations
-}, 60_000)
+}, 240_000)
 
 afterAll(() => rmSync(folder, { recursive: true, force: true }))
 
@@ -132,5 +132,5 @@ describe('the lint rules of the pure core', () => {
   test('refuse the clock and randomness', () => {
     const found = lint('export const a = (): number => Date.now() + Math.random()\n')
     expect(found).toEqual(expect.arrayContaining(['no-restricted-globals', 'no-restricted-properties']))
-  }, 60_000)
+  }, 240_000)
 })

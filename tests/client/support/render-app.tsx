@@ -16,7 +16,7 @@ import { createQueryClient } from '../../../src/lib/query-client'
 
 // Many tests share few processors.
 configure({ asyncUtilTimeout: 15_000 })
-vi.setConfig({ testTimeout: 60_000 })
+vi.setConfig({ testTimeout: 180_000 })
 
 class StillObserver implements ResizeObserver {
   observe(): void {}

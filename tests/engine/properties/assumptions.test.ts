@@ -26,7 +26,7 @@ function listUsual(path: string): readonly (number | string)[] {
 const sceneOf = (setup: Setup, others: Scene['others']) => createScene(resolve(setup), others)
 
 /** These judge many setups over. */
-const patienceMs = 60_000
+const patienceMs = 240_000
 
 describe('an assumed value', () => {
   it(

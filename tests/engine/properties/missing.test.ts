@@ -91,7 +91,7 @@ const isHarmless = ({ id }: Rule, key: string) =>
   (harmless[id]?.includes(key) ?? false) || key === 'plugType' || key === 'madeFor'
 
 /** These judge many setups over. */
-const patienceMs = 60_000
+const patienceMs = 240_000
 
 describe('what a rule reads of a piece', () => {
   it(

@@ -25,7 +25,7 @@ const named = (pieces: readonly Piece[]): readonly Piece[] =>
   }))
 
 /** These judge whole setups many times over. */
-const patienceMs = 60_000
+const patienceMs = 240_000
 
 const everything = { limit: 100, offset: 0 }
 
