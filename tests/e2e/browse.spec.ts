@@ -230,6 +230,26 @@ test('what is narrowed down is known to search engines by its kind alone', async
   await expect(page.locator('meta[name=robots]')).toHaveAttribute('content', 'noindex')
 })
 
+test('the longest names stay inside a narrow page, in the list and side by side', async ({ page }) => {
+  await page.setViewportSize({ width: 320, height: 800 })
+  await page.route('**/api/v1/gear?*', async (route) => {
+    const answer = await route.fetch()
+    const list = (await answer.json()) as { items: { brand: string; model: string }[] }
+    // As long as the API takes them (60 and 100 characters), without a space to break at.
+    for (const item of list.items) Object.assign(item, { brand: 'Inventedbrand'.repeat(4), model: 'Madeup'.repeat(16) })
+    await route.fulfill({ json: list })
+  })
+  await page.goto('/method')
+  await page.getByRole('navigation', { name: 'Pages' }).getByRole('link', { name: 'Gear' }).click()
+  await page.getByLabel('Kind of gear').selectOption('light')
+  await expect(page).toHaveURL(/kind=light$/)
+  for (const at of [0, 1]) await compareBoxes(page).nth(at).check()
+  await expect(
+    page.getByRole('region', { name: 'Side by side' }).getByText('What decides whether it fits'),
+  ).toBeVisible()
+  await expectNoSidewaysScroll(page)
+})
+
 test.describe('without scripts', () => {
   test.use({ javaScriptEnabled: false })
 

@@ -162,8 +162,10 @@ describe('the address of the catalogue', () => {
   })
 
   it('compares no more than four, and says so', () => {
-    const { state, problems } = read('compare=a,b,c,d,e')
+    const { state, problems, redirect } = read('compare=a,b,c,d,e')
     expect(state.compare).toEqual(['a', 'b', 'c', 'd'])
+    // Whoever is sent elsewhere would never read why.
+    expect(redirect).toBeUndefined()
     expect(problems.map(({ key }) => key)).toEqual(['compare'])
   })
 

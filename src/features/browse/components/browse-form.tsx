@@ -82,7 +82,7 @@ export function BrowseForm({ browse, children }: { readonly browse: Browse; read
       className="print:hidden"
     >
       <input type="hidden" name="of" value={kind ?? ''} />
-      <div className="grid items-end gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[minmax(0,1fr)_14rem_14rem_auto]">
+      <div className="grid grid-cols-1 items-end gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[minmax(0,1fr)_14rem_14rem_auto]">
         <div className="min-w-0 sm:max-lg:col-span-2">
           <label htmlFor="gear-search" className="block text-sm font-semibold">
             Search by brand, model or a telling number

@@ -10,7 +10,7 @@ export function ColumnChooser({ browse, kind }: { readonly browse: Browse; reado
   const shown = chooseColumns(kind, state.columns)
   const [density, setDensity] = useDraft(state.density)
   return (
-    <div className="grid gap-x-8 gap-y-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
+    <div className="grid grid-cols-1 gap-x-8 gap-y-4 sm:grid-cols-[minmax(0,1fr)_12rem]">
       <fieldset className="min-w-0">
         <legend className="text-sm font-semibold">Columns</legend>
         <div className="mt-1 gap-x-6 sm:columns-2 lg:columns-4">

@@ -42,7 +42,7 @@ function Differences({
     <section key={role} className="mt-6">
       <h3 className="border-b border-ink pb-1 text-base">{roleTitles[role]}</h3>
       {differences.length === 0 && <p className="mt-2 text-sm">No difference that is recorded.</p>}
-      <div className="mt-3 grid gap-x-10 gap-y-5 md:grid-cols-2">
+      <div className="mt-3 grid grid-cols-1 gap-x-10 gap-y-5 md:grid-cols-2">
         {differences.map((difference) =>
           difference.type === 'measure' ? (
             <DifferenceLines key={difference.attribute.key} difference={difference} pieces={pieces} printer={printer} />
@@ -78,7 +78,7 @@ export function Comparison({ browse, items }: ComparisonProps) {
           Put all back
         </Link>
       </div>
-      <ol className="mt-3 grid gap-x-8 gap-y-2 sm:grid-cols-2">
+      <ol className="mt-3 grid grid-cols-1 gap-x-8 gap-y-2 sm:grid-cols-2">
         {pieces.map((piece, at) => (
           <li key={piece.slug} className="flex items-baseline gap-2.5">
             <PieceLetter at={at} />

@@ -38,7 +38,7 @@ function AttributeFilter({
   return <OptionFilter name={key} label={label} options={listOptions(attribute)} facet={asOptions(facet)} {...shared} />
 }
 
-const grid = 'mt-3 grid gap-x-8 gap-y-5 sm:grid-cols-2 lg:grid-cols-4'
+const grid = 'mt-3 grid grid-cols-1 gap-x-8 gap-y-5 sm:grid-cols-2 lg:grid-cols-4'
 
 /** Every filter of the kind, those that decide first. */
 export function FilterFields({ browse, facets }: FilterFieldsProps) {

@@ -122,7 +122,7 @@ export function readVisit(params: URLSearchParams, system: UnitSystem): Visit {
       .filter(({ key }) => key !== 'compare')
       .map(({ key, end, text }): [string, string] => [end ? endKey(key, end) : key, text]),
   ).toString()
-  const address = [writeBrowseState(state), kept].filter(Boolean).join('&')
+  const address = [writeBrowseState({ ...state, compare }), kept].filter(Boolean).join('&')
   const spell = (query: string) => new URLSearchParams(query).toString()
   const isCanonical = spell(params.toString()) === spell(address)
   return { state, problems, ...(!isCanonical && { redirect: address }) }

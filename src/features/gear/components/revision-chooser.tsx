@@ -28,7 +28,7 @@ export function RevisionChooser({ slug, revisions, compared }: RevisionChooserPr
         event.preventDefault()
         void submit(event.currentTarget, { preventScrollReset: true })
       }}
-      className="mt-3 grid items-end gap-x-4 gap-y-3 sm:grid-cols-[minmax(0,16rem)_minmax(0,16rem)_auto] sm:justify-start print:hidden"
+      className="mt-3 grid grid-cols-1 items-end gap-x-4 gap-y-3 sm:grid-cols-[minmax(0,16rem)_minmax(0,16rem)_auto] sm:justify-start print:hidden"
     >
       <SelectField
         id="before"
