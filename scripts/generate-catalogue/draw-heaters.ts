@@ -2,12 +2,21 @@ import type { Random } from './random'
 
 const wattages = [25, 50, 75, 100, 150, 200, 250, 300, 400, 500] as const
 
-const bodies = [
+type Range = readonly [number, number]
+
+interface Body {
+  readonly form: string
+  readonly startMm: Range
+  readonly perW: Range
+  readonly thicknessMm: Range
+}
+
+const bodies: readonly Body[] = [
   { form: 'glass-rod', startMm: [110, 150], perW: [0.6, 1], thicknessMm: [16, 32] },
   { form: 'polymer-rod', startMm: [120, 170], perW: [0.5, 0.8], thicknessMm: [22, 40] },
   { form: 'titanium-rod', startMm: [110, 160], perW: [0.35, 0.7], thicknessMm: [13, 26] },
   { form: 'inline', startMm: [250, 300], perW: [0.1, 0.3], thicknessMm: [50, 80] },
-] as const
+]
 
 const cords = [
   { volts: [120], plugType: 'A/B' },
