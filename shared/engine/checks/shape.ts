@@ -28,12 +28,14 @@ export const grossUses: readonly string[] = [
   'tank.shape',
 ]
 
-/** The same for the water that is moved, salted and heated: the tank's own sizes, and rock and sand where both are known. */
+/** The same for the water that is moved and salted: less rock, and sand over the display, where both are known. */
 export const waterUses: readonly string[] = [
   'tank.outerLengthMm',
   'tank.outerWidthMm',
   'tank.outerHeightMm',
   ...grossUses,
+  'tank.displayLengthMm',
+  'tank.displayWidthMm',
 ]
 
 /** Setup paths of the display's size in plan. */

@@ -1,8 +1,9 @@
 import { describe, expect, it } from 'vitest'
+import { lightPlane } from '#shared/engine/checks/light-plane'
 import { fitCheck } from '#shared/engine/fit'
 import type { CandidateOptions } from '#shared/engine/candidates'
 import type { Setup } from '#shared/engine/types'
-import { item, judge, judgeOutcome, piece, toPlain, wholeSetup } from '../build'
+import { item, judge, judgeOutcome, piece, sceneFor, toPlain, wholeSetup } from '../build'
 
 type Values = Readonly<Record<string, unknown>>
 
@@ -162,6 +163,47 @@ describe('corals that nobody named', () => {
     })
     expect(brightness({ ppfdUmol: 1 }, at200, unnamed).outcome).toBe('fail')
   })
+})
+
+describe('the limits of brightness and coverage', () => {
+  const readings = Array.from({ length: 420 }, (_, index) => 20 * 1.006 ** index)
+
+  it('are half of the tank above the band for a light that cannot be dimmed', () => {
+    const shares = readings.map((ppfdUmol) => {
+      const values = { beamAngleDeg: 100, dimmable: false, ppfdUmol }
+      const { aboveShare, brightestUmol } = lightPlane(
+        sceneFor(wholeSetup(), 'light'),
+        lamp(values).specs,
+        4,
+        200,
+        [50, 150],
+      )
+      const { outcome } = brightness(values, { ...at200, quantity: 4 })
+      expect(outcome, String(aboveShare)).toBe(aboveShare > 0.5 || brightestUmol < 50 ? 'fail' : 'pass')
+      return aboveShare
+    })
+    expect(shares.some((share) => share > 0.45 && share <= 0.5)).toBe(true)
+    expect(shares.some((share) => share > 0.5 && share < 0.55)).toBe(true)
+  }, 60_000)
+
+  it('are 70 % and 50 % of the tank inside it, where no more of the light are tried', () => {
+    const shares = readings.map((ppfdUmol) => {
+      const found = coverage({ beamAngleDeg: 100, dimmable: false, ppfdUmol }, { ...at200, quantity: 4 })
+      const share = found.measured as number
+      expect(found.outcome, String(share)).toBe(share >= 0.7 ? 'pass' : share >= 0.5 ? 'change' : 'fail')
+      return share
+    })
+    for (const [low, high] of [
+      [0.48, 0.5],
+      [0.5, 0.52],
+      [0.68, 0.7],
+      [0.7, 0.72],
+    ] as const)
+      expect(
+        shares.some((share) => share >= low && share < high),
+        `${low}`,
+      ).toBe(true)
+  }, 60_000)
 })
 
 describe('the coverage of a light', () => {

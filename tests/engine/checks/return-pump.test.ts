@@ -102,6 +102,15 @@ describe('the turnover of a return pump', () => {
     )
   })
 
+  it('is set anywhere between full and slowest speed', () => {
+    const goals = { ...noGoal, turnoverPerHour: [8, 10] as const }
+    // 11 an hour at full speed, some 4 at its slowest.
+    expect(flow({ ...turning(11), dcControl: true }, wholeSetup({}, { goals }))).toMatchObject({
+      outcome: 'pass',
+      measured: 10,
+    })
+  })
+
   it('is no data where it turns on speed control that nobody recorded, and on nothing else', () => {
     expect(flow({ ...turning(20), dcControl: undefined })).toMatchObject({ outcome: 'nodata', missing: ['dcControl'] })
     expect(flow({ ...turning(8), dcControl: undefined }).outcome).toBe('pass')
@@ -138,6 +147,12 @@ describe('the turnover of a return pump', () => {
     expect(at(undefined, large)).toBe(at(20, large))
   })
 
+  it('rests on the level of a chamber that was assumed', () => {
+    expect(
+      flow({}, wholeSetup({ chambers: [{ id: 'rear', lengthMm: 120, widthMm: 100, heightMm: 390 }] })).assumed,
+    ).toEqual(['tank.chambers.0.waterDepthMm'])
+  })
+
   it('cannot be told for a tank whose areas cannot be computed', () => {
     expect(flow({}, wholeSetup({ shape: 'cylinder' })).outcome).toBe('nodata')
   })
@@ -170,8 +185,8 @@ describe('the room for a return pump', () => {
   })
 
   it('lets no slight excess hide behind one that counts as none', () => {
-    // 0.04 mm over in length counts as none, 0.3 mm of depth is too much, though the smaller part of its limit.
-    expect(space({ lengthMm: 110.04, widthMm: 60, heightMm: 60, minDepthMm: 330.3 }).outcome).toBe('fail')
+    // 0.045 mm over in length counts as none, 0.1 mm of depth is too much, though the smaller part of its limit.
+    expect(space({ lengthMm: 110.045, widthMm: 60, heightMm: 60, minDepthMm: 330.1 }).outcome).toBe('fail')
   })
 
   it('is in the chamber that has most of it', () => {
