@@ -38,6 +38,11 @@ const heatUses = [
   'tank.shape',
 ]
 
+const strengthUses = heatUses.filter((path) => path !== 'room.temperatureC')
+
+/** The bed of sand lies in the display; it counts where rock and sand were both given. */
+const sandUses = ['tank.displayLengthMm', 'tank.displayWidthMm']
+
 const noPower = lacking(['powerW'], () => 'Nobody has recorded its power yet.')
 
 const uncertaintyW = (power: Value<number>, quantity: number) =>
@@ -207,6 +212,7 @@ function judgeStrength(scene: Scene, candidate: Candidate): Judgement {
     limit,
     probability: () => probabilityAtMost(totalW, limit, uncertaintyW(power, quantity)),
     ...(outcome === 'change' && { asks: { need: 'second-cut-off', amount: null, unit: null } }),
+    rests: () => (scene.plan.tank.waterL < scene.plan.tank.grossL ? [...strengthUses, ...sandUses] : strengthUses),
     cautions: [warnStuckOn(scene, totalW, totalW === power.value), warnHot(scene)],
     say: (words) =>
       outcome === 'pass'
@@ -225,7 +231,7 @@ export const heaterStrength: Rule = {
   basis: thresholds.heaterPassWPerL.basis,
   rule: `All heaters together pass up to ${thresholds.heaterPassNeeds.value} × the heat needed or ${thresholds.heaterPassWPerL.value} W per litre, whichever is more; up to ${thresholds.heaterChangeNeeds.value} × or ${thresholds.heaterChangeWPerL.value} W per litre with a second, independent cut-off. The caution gives the temperature the water would reach if they stuck on in the warmest room.`,
   reads: ['powerW', 'thermostat'],
-  uses: ['room.coldestC', ...heatUses.slice(2)],
+  uses: [...strengthUses, ...sandUses],
   failLabel: 'far too strong for this much water',
   glance: glanceAtStrength,
   judge: judgeStrength,

@@ -23,6 +23,9 @@ function listUsual(path: string): readonly (number | string)[] {
   return Array.from({ length: steps }, (_, index) => low + ((high - low) * index) / (steps - 1))
 }
 
+/** Rock and sand count for the water only once both are said, so that saying them is a change of its own. */
+const isFilling = (path: string) => path === 'goals.rockKg' || path === 'goals.sandDepthMm'
+
 const sceneOf = (setup: Setup, others: Scene['others']) => createScene(resolve(setup), others)
 
 /** These judge many setups over. */
@@ -66,7 +69,7 @@ describe('an assumed value', () => {
           // Everything that was assumed is said, so that one thing at a time can be said differently.
           let whole = plan.setup
           for (const [path, value] of plan.assumed)
-            if (findSetupField(path) && !Array.isArray(value))
+            if (!isFilling(path) && findSetupField(path) && !Array.isArray(value))
               whole = giveValue(whole, path, value as string | number | boolean)
           const scene = sceneOf(whole, others)
           const rests = getRules(piece.kind).rules.flatMap((rule) => {
@@ -75,8 +78,7 @@ describe('an assumed value', () => {
             return unsaid && unsaid.outcome === before ? [{ rule, before, named: new Set(unsaid.assumed()) }] : []
           })
           for (const path of plan.assumed.keys()) {
-            // Rock and sand count for the water only once both are said, so that saying them is a change of its own.
-            if (path === 'goals.rockKg' || path === 'goals.sandDepthMm') continue
+            if (isFilling(path)) continue
             for (const value of listUsual(path)) {
               const said = giveValue(whole, path, value)
               if (findContradictions(said).length > 0) continue
