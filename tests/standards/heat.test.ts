@@ -5,11 +5,11 @@ import {
   tankHeatLoss,
   wallTransmittanceWM2K,
   type TankHeatInput,
-  type WaterBox,
+  type WaterTub,
 } from '#shared/engine/physics/heat'
 import { expectWithin, expectWithinShare } from './within'
 
-const box: WaterBox = {
+const box: WaterTub = {
   insideLengthMm: 1200,
   insideWidthMm: 600,
   waterDepthMm: 550,

@@ -5,7 +5,7 @@ export type WallMaterial = 'glass' | 'acrylic'
 export type Lid = 'none' | 'mesh' | 'solid'
 
 /** A body of water behind walls: the display with its chambers, or a sump. Inside measures. */
-export interface WaterBox {
+export interface WaterTub {
   readonly insideLengthMm: number
   readonly insideWidthMm: number
   readonly waterDepthMm: number
@@ -15,7 +15,7 @@ export interface WaterBox {
 }
 
 export interface TankHeatInput {
-  readonly boxes: readonly WaterBox[]
+  readonly boxes: readonly WaterTub[]
   /** Lies on the first box; the others are open. */
   readonly lid: Lid
   readonly waterC: number

@@ -14,7 +14,7 @@ export interface Chamber {
 }
 
 /** One open box of water that loses heat and weighs: the tank itself, or its sump. */
-export interface WaterBox {
+export interface WaterTub {
   readonly insideLengthMm: number
   readonly insideWidthMm: number
   readonly waterDepthMm: number
@@ -46,7 +46,7 @@ export interface TankPlan {
   readonly displayLengthMm: number
   readonly displayWidthMm: number
   readonly chambers: readonly Chamber[]
-  readonly boxes: readonly WaterBox[]
+  readonly boxes: readonly WaterTub[]
   /** Inside length × inside width × water line, with the sump. */
   readonly grossL: number
   /** Nominal where stated, else gross: what makers' ratings speak of. */

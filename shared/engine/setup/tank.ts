@@ -1,6 +1,6 @@
 import { readGroup, readGroups, readNumber, readText } from '../values'
 import type { ChamberInput, Specs, TankInput } from '../types'
-import type { Chamber, IncludedPump, TankPlan, WaterBox } from './plan'
+import type { Chamber, IncludedPump, TankPlan, WaterTub } from './plan'
 
 type Assume = <T extends number | string>(key: string, value: T) => T
 
@@ -127,9 +127,9 @@ function resolveChamber(
 }
 
 /** Litres in a box of water. */
-const boxVolumeL = (box: WaterBox): number => (box.insideLengthMm * box.insideWidthMm * box.waterDepthMm) / 1e6
+const boxVolumeL = (box: WaterTub): number => (box.insideLengthMm * box.insideWidthMm * box.waterDepthMm) / 1e6
 
-function resolveSump(specs: Specs, size: Size, assume: Assume): WaterBox {
+function resolveSump(specs: Specs, size: Size, assume: Assume): WaterTub {
   const sump = readGroup<{ lengthMm?: number; widthMm?: number; waterDepthMm?: number }>(specs, 'sump') ?? {}
   return {
     insideLengthMm: sump.lengthMm ?? assume('tank.sump.lengthMm', 0.6 * size.outerLengthMm),
@@ -167,7 +167,7 @@ export function resolveTank(
     resolveChamber(chamber, index, chamberInputs.length === 1, insideHeightMm, size.waterLineMm, assume),
   )
   const widest = Math.max(0, ...chambers.map((chamber) => chamber.widthMm))
-  const main: WaterBox = {
+  const main: WaterTub = {
     insideLengthMm,
     insideWidthMm,
     waterDepthMm: size.waterLineMm,
