@@ -230,7 +230,7 @@ export const openQueries: QueryTable = {
     ёлка: {},
     水槽加熱器: {},
     مضخة: {},
-    'lorem ipsum dolor sit amet': {},
+    'quibble xanthor dolor sit amet': {},
     'hydraulic excavator': {},
     'pizza margherita': {},
   },
