@@ -119,6 +119,12 @@ export const thresholds = {
     text: 'Share from which a light passes with dim ends',
     basis: practice,
   },
+  lightBrightMost: {
+    value: 0.5,
+    unit: 'fraction',
+    text: 'Share of the target plane that a light which cannot be dimmed may put above the band',
+    basis: practice,
+  },
   lightMostUnits: {
     value: 4,
     unit: 'count',
@@ -191,6 +197,12 @@ export const thresholds = {
   scraperReachMm: { value: 50, unit: 'mm', text: 'Handle left above the tank', basis: practice },
   siphonDryMm: { value: 50, unit: 'mm', text: 'How far a hand goes below the rim with a siphon', basis: practice },
   netShare: { value: 0.5, unit: 'fraction', text: 'Share of the display’s width that a net may open', basis: practice },
+  sumpRimMm: {
+    value: 100,
+    unit: 'mm',
+    text: 'From a sump’s water to the rim that water is lifted over',
+    basis: practice,
+  },
   reservoirDays: { value: 3, unit: 'count', text: 'Days of evaporation that a reservoir should hold', basis: practice },
 } as const satisfies Record<string, Threshold>
 

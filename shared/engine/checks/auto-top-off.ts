@@ -13,9 +13,6 @@ import { hasAreas } from './shape'
 
 const nothing: Value<number> = { value: 0, source: 'measured' }
 
-/** From a sump's water to its rim, mm: what water has to be lifted over (common practice). */
-const sumpRimMm = 100
-
 function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
   const length = readMeasure(specs, 'lengthMm')
@@ -47,7 +44,7 @@ function judgeLift(scene: Scene, candidate: Candidate): Judgement {
   if (!head) return lacking(['pumpHeadM'], () => 'Nobody has recorded how high its pump lifts.')
   const basin = findPumpBasins(scene, candidate)[0]
   const isSump = basin?.id === 'sump'
-  const liftM = (isSump ? basin.waterDepthMm + sumpRimMm : scene.plan.room.tankTopMm) / 1000
+  const liftM = (isSump ? basin.waterDepthMm + thresholds.sumpRimMm.value : scene.plan.room.tankTopMm) / 1000
   const u = standardUncertainty(head.value, head.source, head.plusMinus, 'other')
   return {
     outcome: head.value >= liftM ? 'pass' : 'fail',
@@ -80,7 +77,7 @@ export const autoTopOffRules: KindRules = {
       worst: 'fail',
       unit: 'm',
       limitIs: 'least',
-      rule: `Its pump lifts water from the floor over the tank’s rim, or over a sump’s, taken as ${sumpRimMm} mm above its water; a reservoir for less than ${thresholds.reservoirDays.value} days of evaporation is a caution.`,
+      rule: `Its pump lifts water from the floor over the tank’s rim, or over a sump’s, taken as ${thresholds.sumpRimMm.value} mm above its water; a reservoir for less than ${thresholds.reservoirDays.value} days of evaporation is a caution.`,
       reads: ['pumpHeadM', 'reservoirL'],
       uses: ['room.tankTopMm', 'tank.outerHeightMm', 'tank.sump.waterDepthMm', 'tank.filtration'],
       failLabel: 'too weak to lift water over the rim',

@@ -23,6 +23,7 @@ const judgeIntensity = (scene: Scene, candidate: Candidate): Judgement | null =>
     const count = findEnough(lit, dimmable) ?? lit.count
     const { brightestUmol, aboveShare } = lit.at(count, lit.heightMm)
     const [low, high] = lit.band
+    const brightMost = thresholds.lightBrightMost.value
     const reading = readMeasure(specs, 'ppfdUmol') ?? readMeasure(specs, 'photonFluxUmolS')
     const probability = () => {
       if (!reading || reading.value === 0) return brightestUmol >= low ? 1 : 0
@@ -48,9 +49,6 @@ const judgeIntensity = (scene: Scene, candidate: Candidate): Judgement | null =>
       }
     return { ...base, outcome: 'pass', say: (words) => `Up to ${brightest(words)}; ${wants(words)}.` }
   })
-
-/** Share of the plane that a light which cannot be dimmed may put above the band. */
-const brightMost = 0.5
 
 const judgeCoverage = (scene: Scene, candidate: Candidate): Judgement | null =>
   judgeLit(scene, candidate, (lit, dimmable) => {

@@ -99,7 +99,7 @@ export function judgeMount(scene: Scene, { piece, mountHeightMm }: Candidate): J
     return {
       outcome: 'pass',
       measured: included ?? [],
-      say: () => `Comes with ${mountNames[suiting.type]} that suits the tank.`,
+      say: () => `Suits the tank with what it comes with: ${mountNames[suiting.type]}.`,
     }
   const sold: readonly string[] = possible ?? []
   const there = scene.others.find(
