@@ -150,7 +150,8 @@ export function chooseStand(
 
 const sizesOf: Readonly<Record<Stand['tight'] | 'any', readonly string[]>> = {
   water: ['waterDepthMm'],
-  height: ['heightMm'],
+  // Of a tank known by its volume the height follows from its deepest water.
+  height: ['heightMm', 'waterDepthMm'],
   plan: ['lengthMm', 'widthMm'],
   run: ['lengthMm', 'widthMm', 'waterDepthMm'],
   opening: [],

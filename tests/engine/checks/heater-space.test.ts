@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest'
 import { fitCheck } from '#shared/engine/fit'
 import type { CandidateOptions } from '#shared/engine/candidates'
-import type { Item } from '#shared/engine/types'
+import { resolve } from '#shared/engine/setup/resolve'
+import type { Item, Setup } from '#shared/engine/types'
 import { expectWithin } from '../../standards/within'
-import { checkOf, heater, item, judge, piece, toPlain, wholeSetup } from '../build'
+import { checkOf, heater, item, judge, piece, toPlain, toSpecs, wholeSetup } from '../build'
 
 interface Chamber {
   readonly id?: string
@@ -296,5 +297,25 @@ describe('an inline heater', () => {
     expect(judge(wholeSetup(), inline, 'heater.space').outcome).toBe('change')
     expect(judge(wholeSetup({ filtration: 'sump' }), inline, 'heater.space').outcome).toBe('pass')
     expect(fitCheck(wholeSetup(), inline).place).toBeUndefined()
+  })
+})
+
+describe('a chamber of which nothing is known but that it is there', () => {
+  it('keeps no rod out that usual sizes would let in', () => {
+    const setup: Setup = {
+      units: 'metric',
+      tank: { specs: toSpecs({ chambers: [{ id: 'rear' }] }), volumeL: 20 },
+      items: [],
+    }
+    const { chambers } = resolve(setup).tank
+    const [rear] = chambers
+    // A hair too long for the water and for the height at once; both follow from the volume.
+    const rod = {
+      orientation: 'vertical',
+      minImmersionMm: (rear?.waterDepthMm ?? 0) + 0.06,
+      lengthMm: (rear?.heightMm ?? 0) + 0.5,
+    }
+    expect(judge(setup, heater(rod), 'heater.space').outcome).toBe('change')
+    expect(judge(setup, heater({ ...rod, minImmersionMm: 700, lengthMm: 710 }), 'heater.space').outcome).toBe('fail')
   })
 })
