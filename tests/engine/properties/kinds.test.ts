@@ -154,7 +154,7 @@ describe('a rule of any kind', () => {
             }
           }
         }),
-        { numRuns: 60 },
+        { numRuns: 200 },
       )
     },
     patienceMs,
