@@ -77,7 +77,9 @@ function tryMissing(
 /** The bare outcome, assumptions not given their due; undefined where the rule does not apply. */
 export function findOutcome(scene: Scene, rule: Rule, candidate: Candidate): Outcome | undefined {
   const glance = rule.glance?.look(scene, rule.glance.read(candidate.piece.specs), candidate)
-  return glance === 'never' ? 'fail' : (glance ?? rule.judge(scene, candidate)?.outcome)
+  if (glance === 'never') return 'fail'
+  if (glance === 'unknown') return 'nodata'
+  return glance ?? rule.judge(scene, candidate)?.outcome
 }
 
 /** Judges one rule for one candidate. Null where the rule does not apply. */

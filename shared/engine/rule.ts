@@ -56,8 +56,11 @@ export const isMultiplied = ({ quantity, asked = quantity }: Way): boolean => qu
 export const countOfThese = (quantity: number): string =>
   `${['One', 'Two', 'Three', 'Four'][quantity - 1] ?? quantity} of these`
 
-/** `never`: fails, and would whatever else had been said instead of what was assumed. */
-export type Glance = 'pass' | 'change' | 'fail' | 'never'
+/**
+ * `pass`: also where a size is missing that makes no difference. `never`: fails, and would whatever else had been said
+ * instead of what was assumed. `unknown`: no data, and usual values of what is missing would not all give one outcome.
+ */
+export type Glance = 'pass' | 'change' | 'fail' | 'never' | 'unknown'
 
 /**
  * The outcome of `judge` without its reasons, where that can be told with next to no work: thousands of pieces are only

@@ -89,16 +89,20 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
 
 /** Fills in each piece's worst code and its changes, rule by rule; answers the pieces of which several would do. */
 function addUp(first: Table, own: Int8Array, demands: Int32Array): readonly number[] {
-  const several = new Set<number>()
+  const several = new Uint8Array(own.length)
   for (const column of first.columns)
     for (let index = 0; index < own.length; index += 1) {
       const coded = column.codeOf(index)
       const code = toCode(coded)
       if (code > own[index]!) own[index] = code
       if (code === codes.change) demands[index]! += 1
-      if (wouldSeveralDo(coded)) several.add(index)
+      if (wouldSeveralDo(coded)) several[index] = 1
     }
-  return [...several].filter((index) => own[index] !== codes.fail)
+  const found: number[] = []
+  several.forEach((would, index) => {
+    if (would === 1 && own[index] !== codes.fail) found.push(index)
+  })
+  return found
 }
 
 /** Judges so many of a piece as would do; if that fails elsewhere (no room), one of it without that way out. */

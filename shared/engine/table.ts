@@ -20,6 +20,7 @@ const codeOfGlance: Readonly<Record<Exclude<Glance, 'fail'>, number>> = {
   pass: codes.nothing,
   change: codes.change,
   never: codes.fail,
+  unknown: codes.unknown,
 }
 
 function encode(judged: Judged | null): number {
@@ -37,6 +38,7 @@ export class Column {
   private readonly coded: Int8Array
   private readonly judged = new Map<number, Judged | null>()
   private readonly close = new Map<number, boolean>()
+  private readonly missing = new Map<number, readonly string[]>()
 
   constructor(
     readonly rule: Rule,
@@ -69,6 +71,19 @@ export class Column {
       this.judged.set(id, judged)
     }
     return judged
+  }
+
+  /** Attributes without which the rule leaves the piece unjudged. */
+  missingOf(index: number): readonly string[] {
+    if (toCode(this.codeOf(index)) !== codes.unknown) return []
+    const id = this.classes.ofPiece[index]!
+    let missing = this.missing.get(id)
+    if (!missing) {
+      // Asked of the rule itself: what the usual values of the missing would give is known by now.
+      const judgement = this.rule.judge(this.scene, { piece: this.pieces[index]!, ...this.way })
+      this.missing.set(id, (missing = judgement?.missing ?? []))
+    }
+    return missing
   }
 
   isCloseCall(index: number): boolean {
@@ -105,11 +120,15 @@ export class Table {
   }
 
   codeOf(index: number): number {
-    return this.columns.reduce<number>((worst, column) => Math.max(worst, toCode(column.codeOf(index))), codes.nothing)
+    let worst: number = codes.nothing
+    for (const column of this.columns) worst = Math.max(worst, toCode(column.codeOf(index)))
+    return worst
   }
 
   countChanges(index: number): number {
-    return this.columns.filter((column) => toCode(column.codeOf(index)) === codes.change).length
+    let count = 0
+    for (const column of this.columns) if (toCode(column.codeOf(index)) === codes.change) count += 1
+    return count
   }
 
   /** How many of the piece would do, where one does not. */
@@ -129,8 +148,6 @@ export class Table {
 
   /** Missing attributes that leave the piece unjudged. */
   missingOf(index: number): readonly string[] {
-    return this.columns.flatMap((column) =>
-      toCode(column.codeOf(index)) === codes.unknown ? (column.judgementOf(index)?.judgement.missing ?? []) : [],
-    )
+    return this.columns.flatMap((column) => column.missingOf(index))
   }
 }

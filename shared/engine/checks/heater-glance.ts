@@ -1,5 +1,6 @@
+import { getAttribute } from '../../kinds/index'
 import { findLongestMm } from '../physics/geometry'
-import { glanceBy } from '../rule'
+import { glanceBy, type Glance, type Way } from '../rule'
 import { once, onceFor, type Scene } from '../scene'
 import { findBasins, findOccupants, type Basin } from '../setup/places'
 import { thresholds } from '../thresholds'
@@ -103,17 +104,27 @@ function canSlant(
   return passes && isThin && isShort
 }
 
-/** Whether a single rod fits anywhere in one of the positions; undefined where that takes a closer look. */
-function findRoom(scene: Scene, sizes: Sizes, orientation: 'vertical' | 'horizontal' | 'any'): boolean | undefined {
+type Orientation = 'vertical' | 'horizontal' | 'any'
+
+/** Whether a single rod fits there in one of the positions; undefined where that takes a closer look. */
+function canBeIn(scene: Scene, water: Water, index: number, sizes: Sizes, orientation: Orientation) {
+  if (orientation !== 'horizontal' && canStand(water, sizes)) return true
+  if (orientation === 'vertical') return false
+  const leans = orientation === 'any' && canSlant(scene, water, index, sizes, true)
+  if (leans === true) return true
+  const lies = canSlant(scene, water, index, sizes, false)
+  return lies === true ? true : lies === false && leans === false ? false : undefined
+}
+
+/** The same anywhere. */
+function findRoom(scene: Scene, sizes: Sizes, orientation: Orientation): boolean | undefined {
+  const { waters } = once(scene, findReach)
   let isUnsure = false
-  for (const [index, water] of once(scene, findReach).waters.entries()) {
-    const found = [
-      orientation === 'horizontal' ? false : canStand(water, sizes),
-      orientation === 'any' && canSlant(scene, water, index, sizes, true),
-      orientation !== 'vertical' && canSlant(scene, water, index, sizes, false),
-    ]
-    if (found.includes(true) && water.isFree) return true
-    if (found.some((one) => one !== false)) isUnsure = true
+  for (let index = 0; index < waters.length; index += 1) {
+    const water = waters[index]
+    const can = water && canBeIn(scene, water, index, sizes, orientation)
+    if (can && water.isFree) return true
+    if (can !== false) isUnsure = true
   }
   return isUnsure ? undefined : false
 }
@@ -146,21 +157,47 @@ const readRod = (specs: Specs) => ({
   lengthMm: readNumber(specs, 'lengthMm'),
   diameterMm: readNumber(specs, 'diameterMm'),
   minImmersionMm: readNumber(specs, 'minImmersionMm'),
-  orientation: readText(specs, 'orientation') as 'vertical' | 'horizontal' | 'any' | undefined,
+  orientation: readText(specs, 'orientation') as Orientation | undefined,
   isInline: readText(specs, 'form') === 'inline',
 })
 
-/** Whether there is room for the rod, or for two, where sizes alone tell that plainly. */
-export const glanceAtSpace = glanceBy(readRod, (scene, rod, { quantity, place }) => {
-  if (rod.isInline) return scene.plan.tank.filtration === 'sump' ? 'pass' : 'change'
-  const { lengthMm, diameterMm, orientation } = rod
-  if (lengthMm === undefined || diameterMm === undefined || place || quantity > 2) return undefined
-  if (!hasAreas(scene.plan)) return undefined
+type RodFacts = ReturnType<typeof readRod>
+
+function lookForRoom(scene: Scene, rod: RodFacts, lengthMm: number, diameterMm: number, way: Way): Glance | undefined {
+  const { orientation } = rod
   const sizes = { lengthMm, diameterMm, immersedMm: rod.minImmersionMm ?? lengthMm }
   const alone = findRoom(scene, sizes, orientation ?? 'vertical')
-  const hasRoom = quantity === 2 && alone !== false ? findRoomForTwo(scene, sizes, orientation) : alone
+  const hasRoom = way.quantity === 2 && alone !== false ? findRoomForTwo(scene, sizes, orientation) : alone
   if (hasRoom !== false) return hasRoom && 'pass'
   // Of a rod that does not stand and may or may not lean or lie, nothing is known.
   if (orientation === undefined && findRoom(scene, sizes, 'any') !== false) return undefined
   return isHopeless(once(scene, findReach), sizes, orientation ?? 'vertical') ? 'never' : 'fail'
+}
+
+const usualOf = (key: string): readonly [number, number] => {
+  const attribute = getAttribute('heater', key)
+  if (attribute?.type !== 'measure') throw new Error(`A heater has no measure ${key}`)
+  return attribute.usual
+}
+
+const usualLengthMm = usualOf('lengthMm')
+const usualDiameterMm = usualOf('diameterMm')
+
+/** How the smallest and the largest usual rod fare: a rod fits wherever a larger one does. */
+function lookWithoutSize(scene: Scene, rod: RodFacts, way: Way): Glance | undefined {
+  const [small, large] = ([0, 1] as const).map((end) =>
+    lookForRoom(scene, rod, rod.lengthMm ?? usualLengthMm[end], rod.diameterMm ?? usualDiameterMm[end], way),
+  )
+  if (small !== 'pass') return undefined
+  return large === 'pass' ? 'pass' : large === 'fail' || large === 'never' ? 'unknown' : undefined
+}
+
+/** Whether there is room for the rod, or for two, where sizes alone tell that plainly. */
+export const glanceAtSpace = glanceBy(readRod, (scene, rod, way) => {
+  if (rod.isInline) return scene.plan.tank.filtration === 'sump' ? 'pass' : 'change'
+  if (way.place || way.quantity > 2 || !hasAreas(scene.plan)) return undefined
+  const { lengthMm, diameterMm } = rod
+  return lengthMm === undefined || diameterMm === undefined
+    ? lookWithoutSize(scene, rod, way)
+    : lookForRoom(scene, rod, lengthMm, diameterMm, way)
 })

@@ -75,7 +75,8 @@ function gradePower(scene: Scene, way: Way, powerW: number): PowerGrade {
 const glanceAtPower = glanceBy(
   (specs) => readNumber(specs, 'powerW'),
   (scene, powerW, way) => {
-    if (powerW === undefined || !hasAreas(scene.plan)) return undefined
+    if (powerW === undefined) return undefined
+    if (!hasAreas(scene.plan)) return 'unknown'
     const grade = gradePower(scene, way, powerW)
     // That two would do is more than an outcome.
     return grade === 'pair' ? undefined : outcomeOf[grade]
@@ -191,9 +192,10 @@ function gradeStrength(scene: Scene, { quantity }: Way, powerW: number, spoken: 
   return { outcome, totalW, limit, changeW }
 }
 
-const glanceAtStrength = glanceBy(readStrength, (scene, { powerW, spoken }, way) =>
-  powerW === undefined || !hasAreas(scene.plan) ? undefined : gradeStrength(scene, way, powerW, spoken).outcome,
-)
+const glanceAtStrength = glanceBy(readStrength, (scene, { powerW, spoken }, way) => {
+  if (powerW === undefined) return undefined
+  return hasAreas(scene.plan) ? gradeStrength(scene, way, powerW, spoken).outcome : 'unknown'
+})
 
 function judgeStrength(scene: Scene, candidate: Candidate): Judgement {
   const { piece, quantity } = candidate
