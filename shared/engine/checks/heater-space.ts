@@ -16,6 +16,15 @@ const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = 
 
 const restsOnFiltration = () => ['tank.filtration']
 
+/** What the sizes of a chamber follow from where nobody said them. */
+const tankSizes = ['waterLineMm', 'outerHeightMm', 'bottomMm', 'wallMm', 'outerLengthMm', 'outerWidthMm'].map(
+  (key) => `tank.${key}`,
+)
+
+const listDerived = ({ plan }: Scene, sizes: readonly string[]): readonly string[] => [
+  ...new Set(sizes.some((path) => plan.assumed.has(path)) ? [...sizes, ...tankSizes] : sizes),
+]
+
 /** Without chambers, whether there is a sump decides which water it is. */
 const restsOnPlace = ({ plan }: Scene, { path }: Basin): readonly string[] =>
   plan.tank.chambers.length === 0 && path !== 'tank.sump' ? ['tank.filtration'] : []
@@ -90,7 +99,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     ...(stand.tight !== 'company' && { measured: stand.measuredMm, limit: stand.limitMm }),
     probability: stand.probability,
     ...(stand.fits && { placement: stand.placement }),
-    rests: () => [...new Set([...stands.flatMap(listSizes), ...restsOnPlace(scene, stand.basin)])],
+    rests: () => [...listDerived(scene, stands.flatMap(listSizes)), ...restsOnPlace(scene, stand.basin)],
     say: describeStand(stand),
     cautions,
   }
@@ -120,6 +129,7 @@ export const heaterSpace: Rule = {
     'tank.outerLengthMm',
     'tank.outerWidthMm',
     'tank.bottomMm',
+    'tank.wallMm',
     'tank.sump.lengthMm',
     'tank.sump.widthMm',
     'tank.sump.waterDepthMm',

@@ -316,6 +316,16 @@ describe('a chamber of which nothing is known but that it is there', () => {
       lengthMm: (rear?.heightMm ?? 0) + 0.5,
     }
     expect(judge(setup, heater(rod), 'heater.space').outcome).toBe('change')
-    expect(judge(setup, heater({ ...rod, minImmersionMm: 700, lengthMm: 710 }), 'heater.space').outcome).toBe('fail')
+    expect(judge(setup, heater({ ...rod, minImmersionMm: 770, lengthMm: 780 }), 'heater.space').outcome).toBe('fail')
+  })
+
+  it('is as high as the tank inside, whose bottom may be thinner than we assumed', () => {
+    // 300 mm outside less a bottom of 6 mm, as thick as the wall that is usual at that height; 4 mm is usual too.
+    const tank = { outerLengthMm: 400, outerWidthMm: 300, outerHeightMm: 300, chambers: [{ id: 'rear' }] }
+    const setup: Setup = { units: 'metric', tank: { specs: toSpecs(tank) }, items: [] }
+    const rod = { orientation: 'vertical', minImmersionMm: 60 }
+    expect(judge(setup, heater({ ...rod, lengthMm: 294 }), 'heater.space').outcome).toBe('pass')
+    expect(judge(setup, heater({ ...rod, lengthMm: 295 }), 'heater.space').outcome).toBe('change')
+    expect(judge(setup, heater({ ...rod, lengthMm: 297 }), 'heater.space').outcome).toBe('fail')
   })
 })
