@@ -22,7 +22,8 @@ const chooseWallMm = (outerHeightMm: number): number =>
 
 /**
  * Inside length, width and water line (mm) of a tank of which only the volume (L) and perhaps a size or two are known:
- * length 1.5 × width and water line 0.9 × width, stretched where the chambers that were given need more.
+ * length 1.5 × width and water line 0.9 × width, stretched where the chambers that were given need more; no shorter than
+ * half its width, however wide that is said to be.
  */
 function guessInside(
   volumeL: number,
@@ -37,7 +38,7 @@ function guessInside(
   if (line === undefined) {
     if (lengthMm && widthMm) line = volume / (lengthMm * widthMm)
     else if (lengthMm) line = Math.max(linePerWidth * Math.sqrt(volume / (lengthMm * linePerWidth)), deepest)
-    else if (widthMm) line = Math.max(linePerWidth * widthMm, deepest)
+    else if (widthMm) line = Math.max(Math.min(linePerWidth * widthMm, (2 * volume) / widthMm ** 2), deepest)
     else line = Math.max(linePerWidth * cubeWidth, deepest)
   }
   const floor = volume / line
