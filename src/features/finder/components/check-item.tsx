@@ -1,3 +1,4 @@
+import { isCloseCall } from '#shared/engine/physics/conformance'
 import { labelSetupPath } from '#shared/engine/assumptions'
 import type { Check } from '#shared/engine/types'
 import { Gauge } from '../../../components/drawings/gauge'
@@ -43,8 +44,8 @@ export function CheckItem({ check, finder, hasGauge }: CheckItemProps) {
           <p className="mt-1 font-mono text-xs text-ink-soft">
             measured {printer.measure(measured, canonical)} · limit {limitText}
             {probability !== undefined &&
-              probability < 0.95 &&
-              ` · close call, ${Math.round(probability * 100)} % sure`}
+              isCloseCall(probability) &&
+              ` · close call, ${Math.round(probability * 100)} % sure to keep the limit`}
           </p>
         )}
         <p className="mt-1 text-xs text-ink-soft">
