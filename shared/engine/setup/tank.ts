@@ -2,6 +2,8 @@ import { readGroup, readGroups, readNumber, readText } from '../values'
 import type { ChamberInput, Specs, TankInput } from '../types'
 import type { Chamber, IncludedPump, TankPlan, WaterTub } from './plan'
 
+type Writable<T> = { -readonly [K in keyof T]: T[K] }
+
 type Assume = <T extends number | string>(key: string, value: T) => T
 
 interface Size {
@@ -27,7 +29,7 @@ const chooseWallMm = (outerHeightMm: number): number =>
  */
 function guessInside(
   volumeL: number,
-  known: { lengthMm?: number; widthMm?: number; lineMm?: number },
+  known: { lengthMm: number | undefined; widthMm: number | undefined; lineMm: number | undefined },
   chambers: readonly ChamberInput[],
 ) {
   const volume = volumeL * 1e6
@@ -84,9 +86,9 @@ function resolveSize(
   const inside = guessInside(
     volumeL,
     {
-      ...(length && { lengthMm: length - 2 * provisional }),
-      ...(width && { widthMm: width - 2 * provisional }),
-      ...(lineGiven && { lineMm: lineGiven }),
+      lengthMm: length ? length - 2 * provisional : undefined,
+      widthMm: width ? width - 2 * provisional : undefined,
+      lineMm: lineGiven || undefined,
     },
     chambers,
   )
@@ -94,13 +96,13 @@ function resolveSize(
   const bottomMm = given('bottomMm') ?? thickness(tallest + thickness(Infinity))
   const outerHeightMm = height ?? Math.max(inside.line / lineShareOfHeight, tallest > 0 ? tallest + bottomMm : 0)
   const wallMm = thickness(outerHeightMm)
-  const size = {
+  return {
     outerLengthMm: length ?? assume('tank.outerLengthMm', inside.length + 2 * wallMm),
     outerWidthMm: width ?? assume('tank.outerWidthMm', inside.width + 2 * wallMm),
     outerHeightMm: height ?? assume('tank.outerHeightMm', outerHeightMm),
     wallMm: wallGiven ?? assume('tank.wallMm', wallMm),
+    waterLineMm: given('waterLineMm') ?? assume('tank.waterLineMm', inside.line),
   }
-  return { ...size, waterLineMm: given('waterLineMm') ?? assume('tank.waterLineMm', inside.line) }
 }
 
 function resolveChamber(
@@ -112,19 +114,17 @@ function resolveChamber(
   assume: Assume,
 ): Chamber {
   const path = `tank.chambers.${index}`
-  const openings = {
-    ...(input.openingLengthMm !== undefined && { openingLengthMm: input.openingLengthMm }),
-    ...(input.openingWidthMm !== undefined && { openingWidthMm: input.openingWidthMm }),
-  }
-  return {
+  const chamber: Writable<Chamber> = {
     id: input.id,
     name: input.name ?? (isAlone ? 'rear chamber' : `chamber “${input.id}”`),
     lengthMm: input.lengthMm ?? assume(`${path}.lengthMm`, 100),
     widthMm: input.widthMm ?? assume(`${path}.widthMm`, 100),
     waterDepthMm: input.waterDepthMm ?? assume(`${path}.waterDepthMm`, waterLineMm),
     heightMm: input.heightMm ?? assume(`${path}.heightMm`, insideHeightMm),
-    ...openings,
   }
+  if (input.openingLengthMm !== undefined) chamber.openingLengthMm = input.openingLengthMm
+  if (input.openingWidthMm !== undefined) chamber.openingWidthMm = input.openingWidthMm
+  return chamber
 }
 
 /** Litres in a box of water. */
@@ -184,16 +184,13 @@ export function resolveTank(
   const dims = specs['outerLengthMm'] ?? specs['chambers']
   const returnBoreMm = readNumber(specs, 'returnBoreMm')
   const dryMassKg = readNumber(specs, 'dryMassKg')
-  const optional = {
-    ...(input.gear && { gear: input.gear }),
-    ...(dims?.plusMinus !== undefined && { plusMinus: dims.plusMinus }),
-    ...(includedPump && { includedPump }),
-    ...(returnBoreMm !== undefined && { returnBoreMm }),
-    ...(dryMassKg !== undefined && { dryMassKg }),
-  }
-  return {
-    ...size,
-    ...optional,
+  // Written out: spreading what may be there takes longer than all the rest, and a search resolves hundreds of tanks.
+  const plan: Writable<TankPlan> = {
+    outerLengthMm: size.outerLengthMm,
+    outerWidthMm: size.outerWidthMm,
+    outerHeightMm: size.outerHeightMm,
+    waterLineMm: size.waterLineMm,
+    wallMm: size.wallMm,
     bottomMm,
     source: dims?.source ?? 'estimate',
     material,
@@ -212,4 +209,10 @@ export function resolveTank(
     ratedL: nominalL ?? grossL,
     waterL: Math.max(0, grossL - displaced({ displayLengthMm, displayWidthMm })),
   }
+  if (input.gear) plan.gear = input.gear
+  if (dims?.plusMinus !== undefined) plan.plusMinus = dims.plusMinus
+  if (includedPump) plan.includedPump = includedPump
+  if (returnBoreMm !== undefined) plan.returnBoreMm = returnBoreMm
+  if (dryMassKg !== undefined) plan.dryMassKg = dryMassKg
+  return plan
 }
