@@ -4,7 +4,7 @@ import { throwFailure } from '../../lib/loading'
 import { fitCheckQuery } from './api/fit-check'
 import { isRefusal } from './api/fit'
 import { answersQuery, canAsk } from './api/requests'
-import { tankEntryQuery } from './api/tank-entry'
+import { tankEntryQuery } from '../../components/setup/tank-entry'
 import { readVisit, type Visit } from './link/read-visit'
 
 /** Starts everything that the page shows. */

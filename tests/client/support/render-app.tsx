@@ -8,7 +8,7 @@ import { Providers } from '../../../src/app/providers'
 import { createRoutes } from '../../../src/app/router'
 // Imported here, so that no test waits for a page to be compiled when its route first asks for it.
 import '../../../src/app/routes/find'
-import { toEngineSetup } from '../../../src/features/finder/model/to-engine-setup'
+import { toEngineSetup } from '../../../src/components/setup/to-engine-setup'
 import { createApiClient, type ApiInit } from '../../../src/lib/api-client'
 import type { App } from '../../../src/lib/app-context'
 import { createPreferenceStore, type Preferences } from '../../../src/lib/preferences'

@@ -8,10 +8,10 @@ import { paths } from '../../../config/paths'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { Finder } from '../hooks/use-finder'
-import { findDecidingCheck } from '../model/deciding-check'
-import { CheckItem } from './check-item'
-import { DecidingGauge } from './deciding-gauge'
-import { LazyAnswerDrawing } from './lazy-answer-drawing'
+import { findDecidingCheck } from '../../../components/setup/deciding-check'
+import { CheckItem } from '../../../components/setup/check-item'
+import { DecidingGauge } from '../../../components/setup/deciding-gauge'
+import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
 
 export interface AnswerCardProps {
   readonly answer: Answer
@@ -35,7 +35,7 @@ function countKnockOns(count: number): string {
 export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], onPoint }: AnswerCardProps) {
   const [isOpen, setIsOpen] = useState(false)
   const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence } = answer
-  const { printer, hrefOf } = finder
+  const { printer, plan, given, hrefOf } = finder
   const deciding = findDecidingCheck(checks)
   const cautions = answer.cautions.filter((caution) => !saidAbove.includes(caution))
   const quantity = pieces[0]?.quantity ?? 1
@@ -125,10 +125,10 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
             isOpen={isOpen}
             onToggle={setIsOpen}
           >
-            {isOpen && <LazyAnswerDrawing answer={answer} finder={finder} />}
+            {isOpen && <LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
             <ul>
               {checks.map((check) => (
-                <CheckItem key={check.id} check={check} finder={finder} hasGauge={isOpen} />
+                <CheckItem key={check.id} check={check} plan={plan} printer={printer} hasGauge={isOpen} />
               ))}
             </ul>
           </Disclosure>

@@ -10,11 +10,11 @@ import { fitCheckQuery } from '../api/fit-check'
 import { canAsk } from '../api/requests'
 import { useAnswers, type Answers } from '../hooks/use-answers'
 import { useFinder } from '../hooks/use-finder'
-import { findEditTarget } from '../model/edit-target'
-import { toRod } from '../model/to-drawing'
+import { findEditTarget } from '../../../components/setup/edit-target'
+import { toRod } from '../../../components/setup/to-drawing'
 import { AnswerGroups } from './answer-groups'
 import { AnswersFailed } from './answer-list'
-import { EditFields } from './edit-fields'
+import { EditFields } from '../../../components/setup/edit-fields'
 import { HiddenFields } from './hidden-fields'
 import { KindHeading } from './kind-heading'
 import { PlainForm, ProblemSummary } from './plain-form'
@@ -130,7 +130,15 @@ export function Finder() {
       </div>
       {target && (
         <Popover anchor={editing.anchor} onClose={() => setEditing(null)} label={target.title}>
-          <EditFields key={editing.path} finder={finder} target={target} onDone={() => setEditing(null)} />
+          <EditFields
+            key={editing.path}
+            raw={state.raw}
+            plan={plan}
+            printer={printer}
+            target={target}
+            onChange={(raw) => finder.go({ raw })}
+            onDone={() => setEditing(null)}
+          />
         </Popover>
       )}
       {/* Printed or read aloud, a page says in whose units it speaks. */}

@@ -6,12 +6,11 @@ import { kindKeys, kinds } from '#shared/kinds/index'
 import { SelectField } from '../../../components/ui/select-field'
 import { paths } from '../../../config/paths'
 import type { Finder } from '../hooks/use-finder'
-import { countChambers } from '../link/edit-raw'
-import type { RawSetup } from '../link/finder-state'
-import { readAssumed } from '../model/assumed'
-import { checkField, explainProblem } from '../model/check-field'
-import { fieldId, listFieldGroups } from '../model/field-groups'
-import { FieldControl } from './field-control'
+import { countChambers, type RawSetup } from '../../../components/setup/edit-raw'
+import { readAssumed } from '../../../components/setup/assumed'
+import { checkField, explainProblem } from '../../../components/setup/check-field'
+import { fieldId, listFieldGroups } from '../../../components/setup/field-groups'
+import { FieldControl } from '../../../components/setup/field-control'
 
 export interface PlainFormProps {
   readonly finder: Finder

@@ -2,7 +2,7 @@ import { useMemo } from 'react'
 import { readQuestion } from '#shared/engine/ask/read-question'
 import { kinds } from '#shared/kinds/index'
 import type { Finder } from '../hooks/use-finder'
-import { fieldId } from '../model/field-groups'
+import { fieldId } from '../../../components/setup/field-groups'
 
 export interface ReadingChipsProps {
   readonly finder: Finder

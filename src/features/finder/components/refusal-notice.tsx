@@ -2,7 +2,7 @@ import { labelSetupPath } from '#shared/engine/assumptions'
 import { ErrorSummary } from '../../../components/ui/error-summary'
 import type { Refusal } from '../api/fit'
 import type { Finder } from '../hooks/use-finder'
-import { fieldId } from '../model/field-groups'
+import { fieldId } from '../../../components/setup/field-groups'
 
 const toPath = (pointer: string): string => pointer.replace(/^#\/(setup\/)?/, '').replaceAll('/', '.')
 

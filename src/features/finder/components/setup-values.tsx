@@ -2,10 +2,10 @@ import { labelSetupPath } from '#shared/engine/assumptions'
 import { findSetupField } from '#shared/kinds/setup-fields'
 import { Disclosure } from '../../../components/ui/disclosure'
 import type { Finder } from '../hooks/use-finder'
-import { listAssumed } from '../model/assumed'
-import { fieldId } from '../model/field-groups'
+import { listAssumed } from '../../../components/setup/assumed'
+import { fieldId } from '../../../components/setup/field-groups'
 import { showTyped } from '../model/show-typed'
-import { ValueList, type ValueLine } from './value-list'
+import { ValueList, type ValueLine } from '../../../components/setup/value-list'
 
 export interface SetupValuesProps {
   readonly finder: Finder

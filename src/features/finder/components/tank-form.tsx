@@ -3,8 +3,8 @@ import { TankSection } from '../../../components/drawings/tank-section'
 import type { RodDrawing } from '../../../components/drawings/tank-drawing'
 import { buttonClass } from '../../../components/ui/button-class'
 import type { Finder } from '../hooks/use-finder'
-import { fieldId } from '../model/field-groups'
-import { toDrawing } from '../model/to-drawing'
+import { fieldId } from '../../../components/setup/field-groups'
+import { toDrawing } from '../../../components/setup/to-drawing'
 import { RoomStrip } from './room-strip'
 
 export interface TankFormProps {

@@ -6,11 +6,11 @@ import type { Printer } from '#shared/units/print'
 import { paths } from '../../../config/paths'
 import { useApp, usePreferences } from '../../../lib/app-context'
 import { usePrinter } from '../../../lib/use-printer'
-import { tankEntryQuery } from '../api/tank-entry'
+import { tankEntryQuery } from '../../../components/setup/tank-entry'
 import { writeFinderState, type FinderState } from '../link/finder-state'
 import { readVisit, type Visit } from '../link/read-visit'
-import { findPlan } from '../model/find-plan'
-import { toEngineSetup } from '../model/to-engine-setup'
+import { findPlan } from '../../../components/setup/find-plan'
+import { toEngineSetup } from '../../../components/setup/to-engine-setup'
 
 export interface Finder {
   readonly visit: Visit

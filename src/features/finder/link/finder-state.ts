@@ -1,11 +1,8 @@
 import type { Verdict } from '#shared/engine/types'
 import { isKindKey, type KindKey } from '#shared/kinds/index'
-import { isSetupKey } from '#shared/schemas/setup-link-keys'
 import { writeSetupLink } from '#shared/schemas/setup-link'
 import type { UnitSystem } from '#shared/units/systems'
-
-/** The setup as typed: texts by dotted path, chambers by their place. */
-export type RawSetup = Readonly<Record<string, string>>
+import type { RawSetup } from '../../../components/setup/edit-raw'
 
 /** Which answers beside those that fit are shown: a whole verdict, or those that one check decides. */
 export interface Opened {
@@ -78,9 +75,4 @@ export function writeFinderState(state: FinderState, system: UnitSystem): string
   }
   const setup = writeSetupLink(Object.entries(state.raw), system)
   return [own.toString(), setup, view.toString()].filter(Boolean).join('&')
-}
-
-/** The entries of a query that belong to the setup, and the key that says how a form's bare numbers were meant. */
-export function listSetupEntries(params: URLSearchParams): [string, string][] {
-  return [...params].filter(([key]) => (isSetupKey(key) && key !== 'units') || key === 'typed')
 }

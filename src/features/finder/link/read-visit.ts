@@ -2,14 +2,8 @@ import { readQuestion } from '#shared/engine/ask/read-question'
 import { readSetupLink, writeSetupLink, type LinkProblem } from '#shared/schemas/setup-link'
 import type { SetupRequest } from '#shared/schemas/setup'
 import type { UnitSystem } from '#shared/units/systems'
-import {
-  listSetupEntries,
-  longestQuestion,
-  readFinderState,
-  writeFinderState,
-  type FinderState,
-  type RawSetup,
-} from './finder-state'
+import { listSetupEntries, type RawSetup } from '../../../components/setup/edit-raw'
+import { longestQuestion, readFinderState, writeFinderState, type FinderState } from './finder-state'
 
 export interface Visit {
   readonly state: FinderState

@@ -1,10 +1,10 @@
 import type { Check } from '#shared/engine/types'
-import { Gauge } from '../../../components/drawings/gauge'
-import { findScaleUnit } from '../../../components/drawings/scale-unit'
-import type { Finder } from '../hooks/use-finder'
+import type { Printer } from '#shared/units/print'
+import { Gauge } from '../drawings/gauge'
+import { findScaleUnit } from '../drawings/scale-unit'
 
 /** The check that decides for a piece, named, on its small gauge; in words where it has no numbers. */
-export function DecidingGauge({ check, printer }: { readonly check: Check; readonly printer: Finder['printer'] }) {
+export function DecidingGauge({ check, printer }: { readonly check: Check; readonly printer: Printer }) {
   const { label, measured, limit, unit, margin, outcome } = check
   if (typeof measured !== 'number' || limit === null)
     return (

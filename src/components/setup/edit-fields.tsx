@@ -1,37 +1,39 @@
 import { useState, type FormEvent } from 'react'
-import { Button } from '../../../components/ui/button'
-import type { Finder } from '../hooks/use-finder'
-import { changeRaw, removeChamber, spellOut } from '../link/edit-raw'
-import type { RawSetup } from '../link/finder-state'
-import { checkField } from '../model/check-field'
-import type { EditTarget } from '../model/edit-target'
-import { fieldId } from '../model/field-groups'
-import { readAssumed } from '../model/assumed'
+import { Button } from '../ui/button'
+import type { Plan } from '#shared/engine/setup/plan'
+import type { Printer } from '#shared/units/print'
+import { changeRaw, removeChamber, spellOut, type RawSetup } from './edit-raw'
+import { checkField } from './check-field'
+import type { EditTarget } from './edit-target'
+import { fieldId } from './field-groups'
+import { readAssumed } from './assumed'
 import { FieldControl } from './field-control'
 
 export interface EditFieldsProps {
-  readonly finder: Finder
+  readonly raw: RawSetup
+  readonly plan: Plan
+  readonly printer: Printer
   readonly target: EditTarget
+  readonly onChange: (raw: RawSetup) => void
   readonly onDone: () => void
 }
 
 /** A few fields on their own: Enter applies, what cannot be read stays and says why. */
-export function EditFields({ finder, target, onDone }: EditFieldsProps) {
-  const { state, plan, printer, go } = finder
+export function EditFields({ raw, plan, printer, target, onChange, onDone }: EditFieldsProps) {
   const { fields, title, chamber } = target
   const { system } = printer
   const [texts, setTexts] = useState<RawSetup>(() =>
-    Object.fromEntries(fields.map(({ path }) => [path, state.raw[path] ?? ''])),
+    Object.fromEntries(fields.map(({ path }) => [path, raw[path] ?? ''])),
   )
   const [hasTried, setHasTried] = useState(false)
-  const assumedOf = (path: string) => (state.raw[path] === undefined ? readAssumed(path, plan, printer) : undefined)
+  const assumedOf = (path: string) => (raw[path] === undefined ? readAssumed(path, plan, printer) : undefined)
   const errorOf = ({ path, attribute }: (typeof fields)[number]) => checkField(texts[path] ?? '', attribute, system)
-  const hasSaid = fields.some(({ path }) => state.raw[path] !== undefined)
+  const hasSaid = fields.some(({ path }) => raw[path] !== undefined)
   const only = fields.length === 1 ? fields[0] : undefined
   const assumed = only && assumedOf(only.path)
 
-  const apply = (raw: RawSetup) => {
-    go({ raw })
+  const apply = (next: RawSetup) => {
+    onChange(next)
     onDone()
   }
   const submit = (event: FormEvent) => {
@@ -43,7 +45,7 @@ export function EditFields({ finder, target, onDone }: EditFieldsProps) {
       const text = texts[path] ?? ''
       return [path, attribute.type === 'measure' && text.trim() !== '' ? spellOut(text, attribute, system) : text]
     })
-    apply(changeRaw(state.raw, Object.fromEntries(spelt) as Record<string, string>))
+    apply(changeRaw(raw, Object.fromEntries(spelt) as Record<string, string>))
   }
 
   return (
@@ -67,20 +69,20 @@ export function EditFields({ finder, target, onDone }: EditFieldsProps) {
           Apply
         </Button>
         {only && assumed && (
-          <Button size="sm" onClick={() => apply(changeRaw(state.raw, { [only.path]: assumed.exact }))}>
+          <Button size="sm" onClick={() => apply(changeRaw(raw, { [only.path]: assumed.exact }))}>
             Yes, {assumed.shown}
           </Button>
         )}
         {hasSaid && chamber === undefined && (
           <Button
             size="sm"
-            onClick={() => apply(changeRaw(state.raw, Object.fromEntries(fields.map(({ path }) => [path, '']))))}
+            onClick={() => apply(changeRaw(raw, Object.fromEntries(fields.map(({ path }) => [path, '']))))}
           >
             Leave it open
           </Button>
         )}
         {chamber !== undefined && (
-          <Button size="sm" onClick={() => apply(removeChamber(state.raw, chamber))}>
+          <Button size="sm" onClick={() => apply(removeChamber(raw, chamber))}>
             Take the chamber out
           </Button>
         )}

@@ -1,15 +1,17 @@
 import { isCloseCall } from '#shared/engine/physics/conformance'
 import { labelSetupPath } from '#shared/engine/assumptions'
+import type { Plan } from '#shared/engine/setup/plan'
 import type { Check } from '#shared/engine/types'
-import { Gauge } from '../../../components/drawings/gauge'
-import { findScaleUnit } from '../../../components/drawings/scale-unit'
-import { VerdictIcon } from '../../../components/ui/verdict-icon'
-import { outcomeVerdicts, verdictTextClasses } from '../../../lib/verdicts'
-import type { Finder } from '../hooks/use-finder'
+import type { Printer } from '#shared/units/print'
+import { Gauge } from '../drawings/gauge'
+import { findScaleUnit } from '../drawings/scale-unit'
+import { VerdictIcon } from '../ui/verdict-icon'
+import { outcomeVerdicts, verdictTextClasses } from '../../lib/verdicts'
 
 export interface CheckItemProps {
   readonly check: Check
-  readonly finder: Finder
+  readonly plan: Plan
+  readonly printer: Printer
   /** Drawn once its list is open: a closed list of gauges weighs more than the page around it. */
   readonly hasGauge: boolean
 }
@@ -18,8 +20,7 @@ const bases = { physics: 'Computed', standard: 'Standard', practice: 'Practice' 
 const outcomeWords = { pass: 'passes', change: 'needs a change', fail: 'fails', nodata: 'not enough data' } as const
 
 /** One check in full: what was measured, the limit, where the rule is from, and what it rests on. */
-export function CheckItem({ check, finder, hasGauge }: CheckItemProps) {
-  const { printer, plan } = finder
+export function CheckItem({ check, plan, printer, hasGauge }: CheckItemProps) {
   const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [], probability } = check
   const canonical = findScaleUnit(unit)
   const isDrawn = typeof measured === 'number' && limit !== null

@@ -3,9 +3,8 @@ import { describe, expect, it, vi } from 'vitest'
 import { fitCheck } from '#shared/engine/fit'
 import type { Piece } from '#shared/engine/types'
 import { createPrinter } from '#shared/units/print'
-import { AnswerDrawing } from '../../../src/features/finder/components/answer-drawing'
-import type { Finder } from '../../../src/features/finder/hooks/use-finder'
-import { findPlan } from '../../../src/features/finder/model/find-plan'
+import { AnswerDrawing } from '../../../src/components/setup/answer-drawing'
+import { findPlan } from '../../../src/components/setup/find-plan'
 import { cluster, pumps, setups, stands } from '../specimen/invented-gear'
 
 class StillObserver implements ResizeObserver {
@@ -21,8 +20,8 @@ function draw(piece: Piece) {
   vi.stubGlobal('ResizeObserver', StillObserver)
   const answer = fitCheck(setups.cube, piece)
   const printer = createPrinter('metric')
-  const finder = { ...findPlan(setups.cube), given: new Set<string>(), printer } as unknown as Finder
-  return render(<AnswerDrawing answer={answer} finder={finder} />)
+  const { plan } = findPlan(setups.cube)
+  return render(<AnswerDrawing answer={answer} plan={plan} given={new Set()} printer={printer} />)
 }
 
 describe('the drawing of an answer', () => {

@@ -1,6 +1,6 @@
 import type { Plan } from '#shared/engine/setup/plan'
 import type { Answer } from '#shared/engine/types'
-import type { RodDrawing, TankDrawing } from '../../../components/drawings/tank-drawing'
+import type { RodDrawing, TankDrawing } from '../drawings/tank-drawing'
 
 /** A rod is drawn where its answer says it goes; one that fits nowhere stands in the first chamber, too long or not. */
 export function toRod(answer: Answer, plan: Plan): RodDrawing | undefined {

@@ -2,7 +2,15 @@ import type { MeasureAttribute } from '#shared/kinds/types'
 import { findShownUnit } from '#shared/units/convert'
 import { readMeasure } from '#shared/units/read'
 import type { UnitSystem } from '#shared/units/systems'
-import type { RawSetup } from './finder-state'
+import { isSetupKey } from '#shared/schemas/setup-link-keys'
+
+/** The setup as typed: texts by dotted path, chambers by their place. */
+export type RawSetup = Readonly<Record<string, string>>
+
+/** The entries of a query that belong to the setup, and the key that says how a form's bare numbers were meant. */
+export function listSetupEntries(params: URLSearchParams): [string, string][] {
+  return [...params].filter(([key]) => (isSetupKey(key) && key !== 'units') || key === 'typed')
+}
 
 /** Sets or (with an empty text) clears fields. */
 export function changeRaw(raw: RawSetup, changes: Readonly<Record<string, string>>): RawSetup {

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { Check } from '#shared/engine/types'
-import { findDecidingCheck } from '../../../src/features/finder/model/deciding-check'
+import { findDecidingCheck } from '../../../src/components/setup/deciding-check'
 
 const check = (id: string, part: Partial<Check>): Check => ({
   id,

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { findSetupField } from '#shared/kinds/setup-fields'
 import type { MeasureAttribute } from '#shared/kinds/types'
-import { changeRaw, countChambers, removeChamber, spellOut } from '../../../src/features/finder/link/edit-raw'
+import { changeRaw, countChambers, removeChamber, spellOut } from '../../../src/components/setup/edit-raw'
 
 const measure = (path: string) => findSetupField(path)?.attribute as MeasureAttribute
 

@@ -1,6 +1,6 @@
 import { queryOptions } from '@tanstack/react-query'
 import type { Gear } from '#shared/schemas/gear'
-import type { ApiClient } from '../../../lib/api-client'
+import type { ApiClient } from '../../lib/api-client'
 
 async function fetchTank(api: ApiClient, slug: string, signal: AbortSignal): Promise<Gear> {
   const [answer, { gearSchema }] = await Promise.all([

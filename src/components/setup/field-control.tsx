@@ -1,10 +1,10 @@
 import type { FieldAttribute, Option } from '#shared/kinds/types'
 import { describeExample } from '#shared/units/examples'
 import type { UnitSystem } from '#shared/units/systems'
-import { MeasureField } from '../../../components/ui/measure-field'
-import { SelectField } from '../../../components/ui/select-field'
-import { TextField } from '../../../components/ui/text-field'
-import { echoField } from '../model/check-field'
+import { MeasureField } from '../ui/measure-field'
+import { SelectField } from '../ui/select-field'
+import { TextField } from '../ui/text-field'
+import { echoField } from './check-field'
 
 export interface FieldControlProps {
   readonly id: string
