@@ -6,7 +6,7 @@ const numberOrNull = z.number().nullable()
 const outcomeSchema = z.enum(['pass', 'change', 'fail', 'nodata'])
 export const verdictSchema = z.enum(['fits', 'changes', 'no', 'unknown'])
 
-const gearRefSchema = z.object({ slug: z.string(), brand: z.string(), model: z.string() })
+export const gearRefSchema = z.object({ slug: z.string(), brand: z.string(), model: z.string() })
 
 const valueSchema = z.object({
   value: z.unknown(),
@@ -100,6 +100,9 @@ export const reportSchema = z.object({
     z.object({
       id: z.string(),
       kind: z.string(),
+      gear: gearRefSchema.nullable(),
+      specs: z.record(z.string(), valueSchema),
+      quantity: z.number().int(),
       verdict: verdictSchema,
       checks: z.array(checkSchema),
       cautions: z.array(z.string()),
