@@ -63,6 +63,9 @@ function presentItem({ item, judged, verdict, placement }: AssessedItem, words: 
   return {
     id: item.id,
     kind: item.piece.kind,
+    gear: item.piece.gear ?? null,
+    specs: item.piece.specs,
+    quantity: item.quantity,
     verdict,
     checks: judged.map((one) => presentCheck(one, words)),
     cautions: presentCautions(judged, words),

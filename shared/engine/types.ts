@@ -210,6 +210,9 @@ export interface Budget {
 export interface ItemReport {
   readonly id: string
   readonly kind: KindKey
+  readonly gear: GearRef | null
+  readonly specs: Specs
+  readonly quantity: number
   readonly verdict: Verdict
   readonly checks: readonly Check[]
   readonly cautions: readonly string[]

@@ -3,7 +3,7 @@ import type { FieldAttribute } from '../kinds/types'
 import { limits } from '../limits'
 import { unitSystems, type UnitSystem } from '../units/systems'
 import type { SetupRequest } from './setup'
-import { findItemField, readItemPlace } from './setup-link-items'
+import { findItemField, readItemPlace, toItemSpecs } from './setup-link-items'
 import { isSetupKey, numberChambers, sortPaths } from './setup-link-keys'
 import { readLinkValue } from './setup-link-values'
 
@@ -76,11 +76,15 @@ function toSetup(tree: Tree, system: UnitSystem): SetupRequest {
   const { turnoverPerHour, ...ownGoals } = (goals ?? {}) as Tree
   const turnover = turnoverPerHour as { 0?: number; 1?: number } | undefined
   const [from = turnover?.[1], to = turnover?.[0]] = [turnover?.[0], turnover?.[1]]
-  const itemList = Object.entries(items as Record<string, Tree>).map(([id, item]) => ({
-    id,
-    ...item,
-    ...(typeof item.place === 'string' && { place: readItemPlace(item.place) }),
-  }))
+  const itemList = Object.entries(items as Record<string, Tree>).map(([id, item]) => {
+    const specs = toItemSpecs(item)
+    return {
+      id,
+      ...item,
+      ...(specs !== undefined && { specs }),
+      ...(typeof item.place === 'string' && { place: readItemPlace(item.place) }),
+    }
+  })
   return {
     ...rest,
     units,

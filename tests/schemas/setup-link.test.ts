@@ -68,6 +68,30 @@ describe('reading a link', () => {
     expect(read('goals.coral=soft&goals.coral=sps').setup.goals).toEqual({ coral: ['soft', 'sps'] })
   })
 
+  it('reads a piece of which only the kind is told, and groups of its numbers by place', () => {
+    const { setup, problems } = read(
+      'items.net.kind=net&items.pump.kind=return-pump&items.pump.specs.flowCurve.0.headM=0&items.pump.specs.flowCurve.0.flowLph=2000L/h&items.pump.specs.flowCurve.1.headM=6ft&items.pump.specs.flowCurve.1.flowLph=0',
+    )
+    expect(problems).toEqual([])
+    expect(setup.items).toEqual([
+      { id: 'net', kind: 'net', specs: {} },
+      {
+        id: 'pump',
+        kind: 'return-pump',
+        // The foot is 0.3048 m (NIST SP 811 B.8).
+        specs: {
+          flowCurve: [
+            { headM: 0, flowLph: 2000 },
+            { headM: 1.8288, flowLph: 0 },
+          ],
+        },
+      },
+    ])
+    expect(setupSchema.safeParse({ ...setup, tank: { volumeL: 75 } }).success).toBe(true)
+    expect(read('items.pump.kind=return-pump&items.pump.specs.flowCurve.headM=1').problems).toHaveLength(1)
+    expect(read('items.pump.kind=return-pump&items.pump.specs.flowCurve.0=1').problems).toHaveLength(1)
+  })
+
   it('reads items with their gear or their specs', () => {
     const { setup, problems } = read(
       'items.heater.gear=some-heater&items.heater.place=rear&items.light.kind=light&items.light.specs.powerW=60W&items.light.mountHeightMm=8in&items.light.state=planned&items.kits.kind=test-kit&items.kits.specs.parameters=ammonia,nitrite&items.kits.quantity=2&items.kits.place=cabinet',
