@@ -1,4 +1,5 @@
 import './styles/app.css'
+import { useLayoutEffect, type ReactNode } from 'react'
 import { hydrate } from '@tanstack/react-query'
 import { createRoot, hydrateRoot } from 'react-dom/client'
 import { createBrowserRouter, matchRoutes, RouterProvider, type RouteObject } from 'react-router-dom'
@@ -11,6 +12,7 @@ import type { App } from './lib/app-context'
 import { applyHead } from './lib/head'
 import { createPreferenceStore, readPreferences } from './lib/preferences'
 import { createQueryClient } from './lib/query-client'
+import { noticeEarlyInput } from './lib/early-input'
 
 /** Absent where the page was served without being rendered, as while developing. */
 function readState(): PageState | null {
@@ -25,6 +27,17 @@ async function loadMatched(routes: RouteObject[]): Promise<void> {
     if (typeof route.lazy !== 'function') continue
     Object.assign(route, await route.lazy(), { lazy: undefined })
   }
+}
+
+/** What was typed while the scripts were on their way counts as if it were typed now. */
+function EarlyInput({ children }: { readonly children: ReactNode }) {
+  useLayoutEffect(() => {
+    const replay = noticeEarlyInput(document)
+    // Not within the effect: React would set the fields back before it heard of what they hold.
+    const timer = setTimeout(replay)
+    return () => clearTimeout(timer)
+  }, [])
+  return children
 }
 
 async function start(root: HTMLElement): Promise<void> {
@@ -51,7 +64,7 @@ async function start(root: HTMLElement): Promise<void> {
       <RouterProvider router={router} />
     </Providers>
   )
-  if (state) hydrateRoot(root, page)
+  if (state) hydrateRoot(root, <EarlyInput>{page}</EarlyInput>)
   else createRoot(root).render(page)
 }
 

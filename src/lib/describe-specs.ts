@@ -1,6 +1,6 @@
 import { getAttribute, type KindKey } from '#shared/kinds/index'
 import type { Printer } from '#shared/units/print'
-import { printValue } from './print-value'
+import { printValue } from '#shared/kinds/print-value'
 
 type BareSpecs = Readonly<Record<string, unknown>>
 

@@ -111,6 +111,32 @@ test('typing takes no steps in the history, and each choice takes one', async ({
   await expect(page.getByLabel('Kind of gear')).toHaveValue('')
 })
 
+/** Holds the page's own scripts back, as a slow connection does, until it is told to let them go. */
+async function holdScripts(page: Page): Promise<() => void> {
+  let release = (): void => undefined
+  const gate = new Promise<void>((resolve) => {
+    release = resolve
+  })
+  await page.route(/\/assets\/.*\.js$/, async (route) => {
+    await gate
+    await route.continue()
+  })
+  return release
+}
+
+test('what is chosen and typed before the scripts arrive counts once they do', async ({ page }) => {
+  const release = await holdScripts(page)
+  await page.goto('/gear', { waitUntil: 'commit' })
+  await page.getByLabel('Kind of gear').selectOption('heater')
+  const field = page.getByLabel(/^Search by brand/)
+  await field.pressSequentially('ember')
+  release()
+  await expect(page).toHaveURL(/q=ember.*kind=heater|kind=heater.*q=ember/)
+  await expect(field).toHaveValue('ember')
+  await expect(page.getByLabel('Kind of gear')).toHaveValue('heater')
+  await expect(page.getByRole('listbox', { name: 'Suggestions' })).toBeVisible()
+})
+
 test('marks what was searched for in the names', async ({ page }) => {
   await page.goto('/gear?kind=heater')
   const name = (await page.getByRole('rowheader').first().getByRole('link').textContent()) ?? ''
@@ -207,6 +233,17 @@ test('a sentence is answered as ever, suggestions or not', async ({ page }) => {
   await expect(page.getByRole('listbox', { name: 'Suggestions' })).toBeVisible()
   await page.keyboard.press('Enter')
   await expect(page).toHaveURL(/\/find\?kind=heater&asked=heater/)
+})
+
+test('suggests to somebody who typed before the scripts arrived', async ({ page }) => {
+  const release = await holdScripts(page)
+  await page.goto('/', { waitUntil: 'commit' })
+  const field = page.getByLabel('Ask in your own words')
+  await field.pressSequentially('heater')
+  release()
+  await expect(page.getByRole('listbox', { name: 'Suggestions' })).toBeVisible()
+  await expect(field).toHaveValue('heater')
+  await expect(field).toBeFocused()
 })
 
 test('history sets any two revisions side by side', async ({ page }) => {

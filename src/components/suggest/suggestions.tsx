@@ -9,6 +9,8 @@ import { useFieldText, useRested } from './use-field-text'
 
 export interface SuggestionsProps {
   readonly field: HTMLInputElement
+  /** What the field held when somebody turned to it: they may have typed on while this was fetched. */
+  readonly before: string
   readonly scope: SuggestScope
 }
 
@@ -23,7 +25,7 @@ function ask(field: HTMLInputElement, text: string): void {
 }
 
 /** What the text in a field may mean, as a list under it. */
-export default function Suggestions({ field, scope }: SuggestionsProps) {
+export default function Suggestions({ field, before, scope }: SuggestionsProps) {
   const { api } = useApp()
   const navigate = useNavigate()
   const id = useId()
@@ -50,6 +52,7 @@ export default function Suggestions({ field, scope }: SuggestionsProps) {
   const optionId = (at: number) => `${id}-${at}`
   const { isOpen, active, setActive, close } = useCombobox({
     field,
+    before,
     listId: `${id}-list`,
     count: suggestions.length,
     optionId,

@@ -9,6 +9,8 @@ interface Combobox {
 
 export interface ComboboxOptions {
   readonly field: HTMLInputElement
+  /** A field that holds something else by now is being typed in. */
+  readonly before: string
   readonly listId: string
   readonly count: number
   readonly optionId: (at: number) => string
@@ -21,8 +23,8 @@ const none = -1
  * Makes a text field the editable combobox of the WAI-ARIA Authoring Practices (list autocomplete, manual selection):
  * focus stays in the field, arrows walk the options, Enter takes the active one or sends the form as ever, Escape closes.
  */
-export function useCombobox({ field, listId, count, optionId, onChoose }: ComboboxOptions): Combobox {
-  const [isWanted, setIsWanted] = useState(false)
+export function useCombobox({ field, before, listId, count, optionId, onChoose }: ComboboxOptions): Combobox {
+  const [isWanted, setIsWanted] = useState(() => field.value !== before && field === document.activeElement)
   const [active, setActive] = useState(none)
   const isOpen = isWanted && count > 0
   const shown = isOpen && active < count ? active : none
