@@ -1,6 +1,6 @@
 import type { FieldAttribute } from '#shared/kinds/types'
 import type { Printer } from '#shared/units/print'
-import { printValue } from '../../../lib/print-value'
+import { printValue } from '#shared/kinds/print-value'
 
 export const unknownText = 'not recorded yet'
 

@@ -2,7 +2,7 @@ import { getKind, type KindKey } from '#shared/kinds/index'
 import type { Attribute, MeasureAttribute, Role } from '#shared/kinds/types'
 import type { GearItem } from '#shared/schemas/gear'
 import type { Printer } from '#shared/units/print'
-import { printValue } from '../../../lib/print-value'
+import { printValue } from '#shared/kinds/print-value'
 
 /** A number of each piece, to be drawn to one scale; null: nobody has recorded it. */
 export interface MeasureDifference {

@@ -1,6 +1,6 @@
 import type { Attribute } from '#shared/kinds/types'
 import type { Printer } from '#shared/units/print'
-import { printValue } from '../../../lib/print-value'
+import { printValue } from '#shared/kinds/print-value'
 import type { Recorded, RevisionChange } from '../find-revision-changes'
 import { printPlusMinus, SpecSource } from './spec-source'
 

@@ -1,7 +1,7 @@
 import type { Attribute, Role } from '#shared/kinds/types'
 import type { Gear } from '#shared/schemas/gear'
 import type { Printer } from '#shared/units/print'
-import { printValue } from '../../../lib/print-value'
+import { printValue } from '#shared/kinds/print-value'
 import { roleTitles } from '../../../lib/role-titles'
 import { printPlusMinus, SpecSource } from './spec-source'
 
