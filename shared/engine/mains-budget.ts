@@ -30,7 +30,7 @@ function sum(items: readonly Item[], key: string): { total: number; unknown: str
 }
 
 /** Kinds that plug in; a strip's own plug is counted with the wall outlet it takes, not here. */
-const pluggedIn: ReadonlySet<string> = new Set([
+export const pluggedIn: ReadonlySet<string> = new Set([
   'light',
   'light-controller',
   'heater',

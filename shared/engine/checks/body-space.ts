@@ -46,10 +46,10 @@ const ratio = ({ measuredMm, limitMm }: Pick<Bound, 'measuredMm' | 'limitMm'>) =
 const isKept = ({ measuredMm, limitMm }: Bound) => isWithinMm(measuredMm, limitMm)
 
 /** Kinds that take room where they stand. */
-const bodied: ReadonlySet<string> = new Set(['heater', 'return-pump', 'wavemaker', 'skimmer', 'auto-top-off'])
+export const bodied: ReadonlySet<string> = new Set(['heater', 'return-pump', 'wavemaker', 'skimmer', 'auto-top-off'])
 
 /** Sides in plan of what stands in a chamber; undefined where it states none. */
-function footprintOf({ piece }: Item): Rectangle | undefined {
+export function footprintOf({ piece }: Item): Rectangle | undefined {
   const length = readNumber(piece.specs, 'lengthMm')
   const width = readNumber(piece.specs, 'widthMm')
   const diameter = readNumber(piece.specs, 'diameterMm')
