@@ -5,7 +5,9 @@ import { rankLevel, rateSources } from './verdict'
 /** Indexes of the pieces with each verdict, in catalogue order. */
 export function groupByVerdict({ verdicts }: Sweep): Readonly<Record<Verdict, number[]>> {
   const groups: Record<Verdict, number[]> = { fits: [], changes: [], unknown: [], no: [] }
-  verdicts.forEach((verdict, index) => groups[verdict].push(index))
+  verdicts.forEach((verdict, index) => {
+    if (verdict) groups[verdict].push(index)
+  })
   return groups
 }
 

@@ -110,6 +110,11 @@ export interface KindRules {
   readonly targetReads?: readonly string[]
   /** The attributes through which a piece can matter to other pieces' checks and to the setup's needs; by default all. */
   readonly feltThrough?: readonly string[]
+  /**
+   * For kinds of which several pieces together can do what none does alone: the set attribute in which they add up, and
+   * what of it the setup wants.
+   */
+  readonly joint?: { readonly key: string; readonly findWanted: (scene: Scene) => readonly string[] }
   /** The whole answer in a sentence, where the checks in `covers` pass. */
   readonly summary?: {
     readonly covers: readonly string[]

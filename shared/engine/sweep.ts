@@ -1,20 +1,31 @@
-import { getKind, type KindKey } from '../kinds/index'
-import { describeWay, findRestKnockOns, setBench, weighKnockOns, type Bench, type CandidateOptions } from './candidates'
+import { getKind } from '../kinds/index'
+import { findRestKnockOns, isConceded, type Bench } from './bench'
+import { describeWay, weighKnockOns, type CandidateOptions } from './candidates'
 import { getRules } from './checks/index'
 import { classify } from './classes'
 import type { Judged } from './judge'
 import type { Candidate } from './rule'
 import { codes, Table, toCode, wouldSeveralDo } from './table'
-import type { Piece, Setup, Verdict } from './types'
+import type { Piece, Verdict } from './types'
 
-const verdictOfCode: readonly Verdict[] = ['fits', 'changes', 'unknown', 'no']
+const verdictOfCode: readonly (Verdict | null)[] = ['fits', 'changes', 'unknown', 'no', null]
+/** Instead of a code: not among the candidates. */
+const leftOut = 4
+
+export interface SweepOptions extends CandidateOptions {
+  /** How many of a piece are judged, where that is not alike for all. */
+  readonly countOf?: (piece: Piece) => number
+  /** Not to be judged, although it is of the kind: what is gone itself. */
+  readonly isLeftOut?: (piece: Piece) => boolean
+}
 
 const sizeKeys = ['lengthMm', 'widthMm', 'heightMm', 'diameterMm']
 
 /** Of each piece of a catalogue, as numbers: its verdict, what it asks of the setup, and how near it is to the target. */
 export interface Sweep {
   readonly bench: Bench
-  readonly verdicts: readonly Verdict[]
+  /** Null: left out. */
+  readonly verdicts: readonly (Verdict | null)[]
   /** Own changes and those of the rest of the setup. */
   readonly demands: Int32Array
   readonly targetOf: (index: number) => number
@@ -32,14 +43,14 @@ export interface Sweep {
 class Tables {
   readonly all: Table[] = []
   private readonly numbers = new Map<string, number>()
-  readonly ofPiece: Int8Array
+  readonly ofPiece: Uint8Array
 
   constructor(
     private readonly bench: Bench,
     private readonly pieces: readonly Piece[],
     private readonly options: CandidateOptions,
   ) {
-    this.ofPiece = new Int8Array(pieces.length)
+    this.ofPiece = new Uint8Array(pieces.length)
   }
 
   /** The number of the table for so many of each piece. */
@@ -59,15 +70,28 @@ class Tables {
   }
 }
 
-/** Judges every piece by every rule of its kind. See `fit` for what is asked of `pieces`. */
-export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], options: CandidateOptions): Sweep {
-  const bench = setBench(setup, kind, options)
+/** Judges every piece by every rule of the bench's kind. See `fit` for what is asked of `pieces`. */
+export function sweep(bench: Bench, pieces: readonly Piece[], options: SweepOptions): Sweep {
   const tables = new Tables(bench, pieces, options)
-  const first = tables.all[tables.require(options.quantity ?? 1, true)]!
+  const start = options.quantity ?? options.there ?? 1
+  const first = tables.all[tables.require(start, true)]!
+  const { countOf, isLeftOut } = options
+  if (countOf)
+    pieces.forEach((piece, index) => {
+      const count = countOf(piece)
+      if (count !== start) tables.ofPiece[index] = tables.require(count, true)
+    })
   const own = new Int8Array(pieces.length)
   const demands = new Int32Array(pieces.length)
-  const several = addUp(first, own, demands)
-  if (options.quantity === undefined) settleSeveral(tables, several, own, demands)
+  const several = addUp(bench, tables, first, own, demands)
+  if (options.quantity === undefined) {
+    settleSeveral(bench, tables, several, start, own, demands)
+    if (start > 1 && !countOf) settleFewer(bench, tables, own, demands)
+  }
+  if (isLeftOut)
+    pieces.forEach((piece, index) => {
+      if (isLeftOut(piece)) own[index] = leftOut
+    })
   const candidateOf = (index: number): Candidate => ({ piece: pieces[index]!, ...tables.of(index).way })
   addRestDemands(bench, pieces, own, demands, candidateOf)
   return {
@@ -88,16 +112,19 @@ export function sweep(setup: Setup, kind: KindKey, pieces: readonly Piece[], opt
 }
 
 /** Fills in each piece's worst code and its changes, rule by rule; answers the pieces of which several would do. */
-function addUp(first: Table, own: Int8Array, demands: Int32Array): readonly number[] {
+function addUp(bench: Bench, tables: Tables, first: Table, own: Int8Array, demands: Int32Array): readonly number[] {
   const several = new Uint8Array(own.length)
-  for (const column of first.columns)
+  const isUniform = tables.all.length === 1
+  first.columns.forEach((column, at) => {
+    const demand = isConceded(bench, column.rule.id) ? 0 : 1
     for (let index = 0; index < own.length; index += 1) {
-      const coded = column.codeOf(index)
+      const coded = (isUniform ? column : tables.of(index).columns[at]!).codeOf(index)
       const code = toCode(coded)
       if (code > own[index]!) own[index] = code
-      if (code === codes.change) demands[index]! += 1
+      if (code === codes.change) demands[index]! += demand
       if (wouldSeveralDo(coded)) several[index] = 1
     }
+  })
   const found: number[] = []
   several.forEach((would, index) => {
     if (would === 1 && own[index] !== codes.fail) found.push(index)
@@ -105,17 +132,40 @@ function addUp(first: Table, own: Int8Array, demands: Int32Array): readonly numb
   return found
 }
 
+function settleOn(bench: Bench, tables: Tables, index: number, number: number, own: Int8Array, demands: Int32Array) {
+  tables.ofPiece[index] = number
+  const table = tables.all[number]!
+  own[index] = table.codeOf(index)
+  demands[index] = table.countChanges(index, (ruleId) => isConceded(bench, ruleId))
+}
+
 /** Judges so many of a piece as would do; if that fails elsewhere (no room), one of it without that way out. */
-function settleSeveral(tables: Tables, several: readonly number[], own: Int8Array, demands: Int32Array): void {
+function settleSeveral(
+  bench: Bench,
+  tables: Tables,
+  several: readonly number[],
+  start: number,
+  own: Int8Array,
+  demands: Int32Array,
+): void {
   for (const index of several) {
-    const enough = tables.of(index).findEnough(index) ?? 1
+    const enough = tables.of(index).findEnough(index) ?? start
     let number = tables.require(enough, true)
-    if (tables.all[number]!.codeOf(index) === codes.fail) number = tables.require(1, false)
-    tables.ofPiece[index] = number
-    const table = tables.all[number]!
-    own[index] = table.codeOf(index)
-    demands[index] = table.countChanges(index)
+    if (tables.all[number]!.codeOf(index) === codes.fail) number = tables.require(start, false)
+    settleOn(bench, tables, index, number, own, demands)
   }
+}
+
+/** One of a piece where so many as there were do not fit: one strong heater in place of two weak ones. */
+function settleFewer(bench: Bench, tables: Tables, own: Int8Array, demands: Int32Array): void {
+  const failed = [...own.keys()].filter((index) => own[index] === codes.fail)
+  if (failed.length === 0) return
+  const single = tables.require(1, true)
+  const table = tables.all[single]!
+  const better = failed.filter((index) => table.codeOf(index) !== codes.fail)
+  for (const index of better) settleOn(bench, tables, index, single, own, demands)
+  const several = better.filter((index) => table.findEnough(index) !== undefined)
+  settleSeveral(bench, tables, several, 1, own, demands)
 }
 
 function countFailures(tables: Tables, first: Table, own: Int8Array) {
@@ -138,7 +188,7 @@ function addRestDemands(
   demands: Int32Array,
   candidateOf: (index: number) => Candidate,
 ) {
-  if (bench.scene.others.length === 0) return
+  if (bench.scene.others.length === 0 && !bench.gone) return
   const { feltThrough } = getRules(bench.kind)
   const all = getKind(bench.kind).attributes.map(({ key }) => key)
   // A piece that was told where to stand takes room from what else stands there.
@@ -147,7 +197,7 @@ function addRestDemands(
   const classes = classify(pieces, `${bench.kind} felt${isPlaced ? ' in place' : ''}`, felt)
   const known = new Map<string, number>()
   for (let index = 0; index < pieces.length; index += 1) {
-    if (own[index] === codes.fail) continue
+    if (own[index]! >= codes.fail) continue
     const candidate = candidateOf(index)
     const key = `${classes.ofPiece[index]!} ${candidate.quantity}`
     let count = known.get(key)
@@ -169,7 +219,7 @@ function measureTargets(
   const classes = classify(pieces, `${bench.kind} target`, targetReads)
   const known = new Map<number, number>()
   return (index) => {
-    const key = classes.ofPiece[index]! * 8 + tables.ofPiece[index]!
+    const key = classes.ofPiece[index]! * 256 + tables.ofPiece[index]!
     let distance = known.get(key)
     if (distance === undefined) known.set(key, (distance = target(bench.scene, candidateOf(index)) ?? Number.MAX_VALUE))
     return distance

@@ -125,9 +125,10 @@ export class Table {
     return worst
   }
 
-  countChanges(index: number): number {
+  countChanges(index: number, isConceded: (ruleId: string) => boolean): number {
     let count = 0
-    for (const column of this.columns) if (toCode(column.codeOf(index)) === codes.change) count += 1
+    for (const column of this.columns)
+      if (toCode(column.codeOf(index)) === codes.change && !isConceded(column.rule.id)) count += 1
     return count
   }
 

@@ -175,5 +175,5 @@ export const sandRules: KindRules = {
       judge: judgeState,
     }),
   ],
-  feltThrough: ['grainMinMm'],
+  feltThrough: ['grainMinMm', 'packKg'],
 }

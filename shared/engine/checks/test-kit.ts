@@ -2,6 +2,7 @@ import { getAttribute } from '../../kinds/index'
 import { joinNames, sayUncounted } from '../counting'
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
+import type { Item } from '../types'
 import { readSet } from '../values'
 import { createRuleMaker } from './build-rule'
 
@@ -15,13 +16,20 @@ function nameParameters(parameters: readonly string[]): string {
   return joinNames(parameters.map((one) => options.find(({ value }) => value === one)?.label ?? one))
 }
 
-function judgeCoverage({ others }: Scene, { piece }: Candidate): Judgement {
+const listKits = (others: readonly Item[]) =>
+  others.filter((item) => item.piece.kind === 'test-kit').map((item) => item.piece.specs)
+
+/** What the cycle is followed by and no kit of the setup measures. */
+function findWanted({ others }: Scene): readonly string[] {
+  const there = listKits(others).flatMap((specs) => readSet<string>(specs, 'parameters') ?? [])
+  return cycleParameters.filter((parameter) => !there.includes(parameter))
+}
+
+function judgeCoverage(scene: Scene, { piece }: Candidate): Judgement {
   const own = readSet<string>(piece.specs, 'parameters')
   if (own === undefined) return lacking(['parameters'], () => 'Nobody has recorded what it measures.')
-  const kits = others.filter((item) => item.piece.kind === 'test-kit').map((item) => item.piece.specs)
-  const there = kits.flatMap((specs) => readSet<string>(specs, 'parameters') ?? [])
-  const unknown = kits.filter((specs) => specs['parameters'] === undefined).length
-  const missing = cycleParameters.filter((parameter) => !own.includes(parameter) && !there.includes(parameter))
+  const unknown = listKits(scene.others).filter((specs) => specs['parameters'] === undefined).length
+  const missing = findWanted(scene).filter((parameter) => !own.includes(parameter))
   const isAlone = cycleParameters.every((parameter) => own.includes(parameter))
   return {
     outcome: missing.length > 0 ? 'change' : 'pass',
@@ -51,4 +59,5 @@ export const testKitRules: KindRules = {
     }),
   ],
   feltThrough: ['parameters'],
+  joint: { key: 'parameters', findWanted },
 }

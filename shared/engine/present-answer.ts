@@ -1,0 +1,51 @@
+import type { Printer } from '../units/print'
+import type { AssessedCandidate } from './candidates'
+import { getRules } from './checks/index'
+import { presentKnockOns } from './knock-ons'
+import { presentCautions, presentCheck } from './present'
+import type { Scene } from './scene'
+import type { Answer } from './types'
+import { rateConfidence } from './verdict'
+
+/** The answer in one sentence: what is wrong, what is not known, what must change, or how it fits. */
+function summarise(
+  scene: Scene,
+  { candidate, judged, verdict, placement, knockOns }: AssessedCandidate,
+  words: Printer,
+): string {
+  const findFirst = (outcome: string) => judged.find((one) => (one.eitherWay ?? one.outcome) === outcome)
+  const decisive =
+    verdict === 'no'
+      ? findFirst('fail')
+      : verdict === 'unknown'
+        ? judged.find((one) => one.outcome === 'nodata' && one.rule.worst === 'fail')
+        : undefined
+  if (decisive) return presentCheck(decisive, words).message
+  const summary = getRules(candidate.piece.kind).summary
+  const covered = judged.filter(({ rule }) => summary?.covers.includes(rule.id))
+  if (summary && covered.length > 0 && covered.every(({ outcome }) => outcome === 'pass'))
+    return summary.write(scene, candidate, placement)(words)
+  const changed = findFirst('change')
+  if (changed) return presentCheck(changed, words).message
+  if (knockOns[0]) return knockOns[0].say(words)
+  return judged[0] ? presentCheck(judged[0], words).message : 'Nothing about it could be checked yet.'
+}
+
+export function presentAnswer(scene: Scene, assessed: AssessedCandidate, words: Printer): Answer {
+  const { candidate, judged, verdict, placement, knockOns } = assessed
+  const { piece, quantity } = candidate
+  const gear = piece.gear ?? null
+  return {
+    gear,
+    kind: piece.kind,
+    specs: piece.specs,
+    pieces: [{ gear, quantity }],
+    verdict,
+    summary: summarise(scene, assessed, words),
+    checks: judged.map((one) => presentCheck(one, words)),
+    knockOns: presentKnockOns(knockOns, words),
+    cautions: presentCautions(judged, words),
+    confidence: rateConfidence(piece, judged),
+    ...(placement && { place: placement }),
+  }
+}
