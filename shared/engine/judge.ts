@@ -1,7 +1,7 @@
 import { getAttribute, type KindKey } from '../kinds/index'
 import { findCondition } from './conditions'
 import type { Candidate, Judgement, Rule } from './rule'
-import type { Scene } from './scene'
+import { listAssumed, type Scene } from './scene'
 import type { Outcome, Specs } from './types'
 import { listUsual } from './usual'
 import type { Condition } from './ways'
@@ -15,16 +15,6 @@ export interface Judged {
   /** For no data: the outcome that every usual value of what is missing would give, if they all agree. */
   readonly eitherWay?: Outcome
   readonly condition?: () => Condition
-}
-
-/** Setup paths with their defaults in use that match a rule's `uses`, the most telling first. */
-function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
-  const { assumed } = scene.plan
-  return uses.flatMap((path) => {
-    if (!path.includes('*')) return assumed.has(path) ? [path] : []
-    const [head, tail] = path.split('*') as [string, string]
-    return [...assumed.keys()].filter((key) => key.startsWith(head) && key.endsWith(tail))
-  })
 }
 
 const grids = new Map<string, readonly Specs[]>()

@@ -41,3 +41,13 @@ export function vary(scene: Scene, path: string, value: number | string | boolea
 
 /** The setup with other items, and with its tank replaced where asked. */
 export const withItems = (setup: Setup, items: readonly Item[], tank = setup.tank): Setup => ({ ...setup, items, tank })
+
+/** Setup paths with their defaults in use that match a rule's `uses`, the most telling first. */
+export function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
+  const { assumed } = scene.plan
+  return uses.flatMap((path) => {
+    if (!path.includes('*')) return assumed.has(path) ? [path] : []
+    const [head, tail] = path.split('*') as [string, string]
+    return [...assumed.keys()].filter((key) => key.startsWith(head) && key.endsWith(tail))
+  })
+}

@@ -1,7 +1,7 @@
 import { getAttribute } from '../../kinds/index'
 import { findLongestMm } from '../physics/geometry'
 import { glanceBy, type Glance, type Way } from '../rule'
-import { once, onceFor, type Scene } from '../scene'
+import { listAssumed, once, onceFor, type Scene } from '../scene'
 import { findBasins, findOccupants, type Basin } from '../setup/places'
 import { thresholds } from '../thresholds'
 import type { Specs } from '../types'
@@ -10,6 +10,27 @@ import { listBounds } from './rod-space'
 import { hasAreas } from './shape'
 
 export const findUsualBasins = ({ plan }: Scene) => findBasins(plan, undefined)
+
+/** Setup paths that the room for a rod rests on. */
+export const spaceUses: readonly string[] = [
+  'tank.chambers.*.waterDepthMm',
+  'tank.chambers.*.heightMm',
+  'tank.chambers.*.lengthMm',
+  'tank.chambers.*.widthMm',
+  'tank.waterLineMm',
+  'tank.outerHeightMm',
+  'tank.displayLengthMm',
+  'tank.displayWidthMm',
+  'tank.outerLengthMm',
+  'tank.outerWidthMm',
+  'tank.bottomMm',
+  'tank.wallMm',
+  'tank.sump.lengthMm',
+  'tank.sump.widthMm',
+  'tank.sump.waterDepthMm',
+  'tank.filtration',
+  'tank.shape',
+]
 
 const clearanceMm = thresholds.rodClearanceMm.value
 
@@ -24,8 +45,10 @@ interface Reach {
   readonly waters: readonly Water[]
   /** A size of theirs was assumed and might be another. */
   readonly mayChange: boolean
-  /** The most that could be stood, laid and leaned anywhere, mm; null where a size was assumed and might be more. */
-  readonly most: { readonly uprightMm: number; readonly flatMm: number; readonly leaningMm: number } | null
+  /** Something that the rule rests on was assumed. */
+  readonly isAssumed: boolean
+  /** The deepest water, mm; null where a size that more than a height follows from was assumed. */
+  readonly deepestMm: number | null
 }
 
 function findReach(scene: Scene): Reach {
@@ -33,7 +56,6 @@ function findReach(scene: Scene): Reach {
   const assumed = basins.flatMap((basin) => listBounds(basin).filter((path) => scene.plan.assumed.has(path)))
   // Whether there is a sump beside the display may be assumed too, and its water takes other rods.
   const mayHaveSump = scene.plan.assumed.has('tank.filtration') && scene.plan.tank.chambers.length === 0
-  const most = (measure: (basin: Basin) => number) => Math.max(...basins.map(measure))
   return {
     waters: basins.map((basin) => ({
       basin,
@@ -42,14 +64,11 @@ function findReach(scene: Scene): Reach {
       isFree: findOccupants(scene.others, basin.id).length === 0,
     })),
     mayChange: assumed.length > 0 || mayHaveSump,
-    most:
+    isAssumed: listAssumed(scene, spaceUses).length > 0,
+    deepestMm:
       mayHaveSump || assumed.some((path) => !path.endsWith('.heightMm'))
         ? null
-        : {
-            uprightMm: most(({ waterDepthMm }) => waterDepthMm),
-            flatMm: most(({ lengthMm, widthMm }) => Math.hypot(lengthMm - 2 * clearanceMm, widthMm - 2 * clearanceMm)),
-            leaningMm: most(({ lengthMm, widthMm, waterDepthMm }) => Math.hypot(lengthMm, widthMm, waterDepthMm)),
-          },
+        : Math.max(...basins.map(({ waterDepthMm }) => waterDepthMm)),
   }
 }
 
@@ -129,13 +148,12 @@ function findRoom(scene: Scene, sizes: Sizes, orientation: Orientation): boolean
   return isUnsure ? undefined : false
 }
 
-/** Whether what the sizes were assumed to be could be to blame. */
-function isHopeless({ mayChange, most }: Reach, { lengthMm, immersedMm }: Sizes, orientation: string): boolean {
+/** Whether no other size than the assumed ones would help a rod that has room nowhere. */
+function isHopeless({ mayChange, deepestMm }: Reach, { immersedMm }: Sizes, orientation: string): boolean {
   if (!mayChange) return true
-  if (most === null) return false
-  const isPast = (mm: number, limitMm: number) => mm > limitMm + plainlyMm
-  if (orientation === 'horizontal') return isPast(lengthMm, most.flatMm)
-  return isPast(immersedMm, most.uprightMm) && (orientation === 'vertical' || isPast(lengthMm, most.leaningMm))
+  if (deepestMm === null) return false
+  // Only heights were assumed, and they matter to nothing but a rod that stands.
+  return orientation === 'horizontal' || immersedMm > deepestMm + plainlyMm
 }
 
 /** Whether two rods as thick stand side by side there, squares as seen from above; undefined within a hair of it. */
@@ -188,6 +206,8 @@ function lookWithoutSize(scene: Scene, rod: RodFacts, way: Way): Glance | undefi
   const [small, large] = ([0, 1] as const).map((end) =>
     lookForRoom(scene, rod, rod.lengthMm ?? usualLengthMm[end], rod.diameterMm ?? usualDiameterMm[end], way),
   )
+  // Where the smallest has no room no other has, but what rests on an assumption condemns nothing that is not known.
+  if (small === 'never' || small === 'fail') return once(scene, findReach).isAssumed ? 'unknown' : 'never'
   if (small !== 'pass') return undefined
   return large === 'pass' ? 'pass' : large === 'fail' || large === 'never' ? 'unknown' : undefined
 }

@@ -3,7 +3,7 @@ import { once, type Scene } from '../scene'
 import { findBasins, type Basin } from '../setup/places'
 import type { Placement } from '../types'
 import { readMeasure, readText } from '../values'
-import { findUsualBasins, glanceAtSpace } from './heater-glance'
+import { findUsualBasins, glanceAtSpace, spaceUses } from './heater-glance'
 import { hasAreas, noAreas } from './shape'
 import { describeShares, shareOut } from './rod-shares'
 import { chooseStand, describeStand, listSizes } from './rod-space'
@@ -117,25 +117,7 @@ export const heaterSpace: Rule = {
   },
   rule: 'The rod must stand, lean or lie in its place, as its maker allows, with water around it seen from above. Standing: the length that must be under water within the water depth, the whole rod within the height. Leaning and lying: the whole rod under water.',
   reads: ['lengthMm', 'diameterMm', 'minImmersionMm', 'orientation', 'form'],
-  uses: [
-    'tank.chambers.*.waterDepthMm',
-    'tank.chambers.*.heightMm',
-    'tank.chambers.*.lengthMm',
-    'tank.chambers.*.widthMm',
-    'tank.waterLineMm',
-    'tank.outerHeightMm',
-    'tank.displayLengthMm',
-    'tank.displayWidthMm',
-    'tank.outerLengthMm',
-    'tank.outerWidthMm',
-    'tank.bottomMm',
-    'tank.wallMm',
-    'tank.sump.lengthMm',
-    'tank.sump.widthMm',
-    'tank.sump.waterDepthMm',
-    'tank.filtration',
-    'tank.shape',
-  ],
+  uses: spaceUses,
   failLabel: 'too long or too thick for the place',
   glance: glanceAtSpace,
   judge: judgeSpace,
