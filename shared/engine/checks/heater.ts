@@ -133,6 +133,12 @@ function judgeThermostat(scene: Scene, { piece, quantity }: Candidate): Judgemen
   }
 }
 
+/** Most heaters have their own: then nothing else matters. */
+const glanceAtThermostat = glanceBy(
+  (specs) => readText(specs, 'thermostat'),
+  (_scene, found) => (found === undefined || found === 'external-needed' ? undefined : 'pass'),
+)
+
 const thermostat: Rule = {
   id: 'heater.thermostat',
   label: 'Thermostat',
@@ -143,6 +149,7 @@ const thermostat: Rule = {
   reads: ['thermostat', 'powerW', 'plugs'],
   uses: [],
   failLabel: 'without a thermostat',
+  glance: glanceAtThermostat,
   judge: judgeThermostat,
 }
 
