@@ -8,7 +8,8 @@ import { hasAreas, noAreas } from './shape'
 import { describeShares, shareOut } from './rod-shares'
 import { chooseStand, describeStand, listSizes } from './rod-space'
 
-const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = {
+/** Positions to try, in order, by what its maker allows. */
+export const positionsBy: Readonly<Record<string, readonly Placement['position'][]>> = {
   vertical: ['upright'],
   horizontal: ['flat'],
   any: ['upright', 'leaning', 'flat'],

@@ -15,6 +15,8 @@ export interface Rod {
   /** Length from the lower end that must be under water; the whole rod where its maker states none. */
   readonly immersed: Value<number>
   readonly quantity: number
+  /** Water to leave around it, seen from above; not given: what the checks ask for. */
+  readonly clearanceMm?: number
 }
 
 /** The tightest of the limits that one position in one basin sets. */
@@ -31,13 +33,13 @@ export interface Stand {
 
 type Bound = Pick<Stand, 'measuredMm' | 'limitMm' | 'tight'> & { readonly of: Value<number> }
 
-const clearance = thresholds.rodClearanceMm.value
+const clearanceOf = ({ clearanceMm = thresholds.rodClearanceMm.value }: Rod): number => clearanceMm
 const ratio = ({ measuredMm, limitMm }: { measuredMm: number; limitMm: number }) =>
   (limitMm - measuredMm) / Math.abs(limitMm || 1)
 
 /** Whether the rods, with the given footprint each, can stand beside what is already in the basin. */
-const hasCompany = (basin: Basin, others: readonly Item[], footprint: Rectangle, quantity: number): boolean =>
-  hasCompanyRoom(basin, others, footprint, quantity, clearance)
+const hasCompany = (basin: Basin, others: readonly Item[], footprint: Rectangle, rod: Rod): boolean =>
+  hasCompanyRoom(basin, others, footprint, rod.quantity, clearanceOf(rod))
 
 function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
   const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))
@@ -60,19 +62,20 @@ function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], is
   }
 }
 
-function boundUpright({ length, diameter, immersed }: Rod, basin: Basin): Bound[] {
+function boundUpright(rod: Rod, basin: Basin): Bound[] {
+  const { length, immersed } = rod
   return [
-    boundPlan(diameter, basin),
+    boundPlan(rod, basin),
     { measuredMm: immersed.value, limitMm: basin.waterDepthMm, tight: 'water', of: immersed },
     { measuredMm: length.value, limitMm: basin.heightMm, tight: 'height', of: length },
   ]
 }
 
-const boundPlan = (diameter: Value<number>, basin: Basin): Bound => ({
-  measuredMm: diameter.value + 2 * clearance,
+const boundPlan = (rod: Rod, basin: Basin): Bound => ({
+  measuredMm: rod.diameter.value + 2 * clearanceOf(rod),
   limitMm: Math.min(basin.lengthMm, basin.widthMm),
   tight: 'plan',
-  of: diameter,
+  of: rod.diameter,
 })
 
 /** A rod goes in end first, so each side of an opening that is known has to let its thickness pass. */
@@ -83,18 +86,20 @@ function boundOpening(diameter: Value<number>, { openingLengthMm, openingWidthMm
 }
 
 /** A rod leaning or lying: wholly under water, clear of the walls in plan. */
-function boundAslant({ length, diameter }: Rod, basin: Basin, slackMm: number | null): Bound[] {
+function boundAslant(rod: Rod, basin: Basin, slackMm: number | null): Bound[] {
+  const { length, diameter } = rod
   const under: Bound = { measuredMm: diameter.value, limitMm: basin.waterDepthMm, tight: 'water', of: diameter }
-  if (slackMm === null) return [boundPlan(diameter, basin), under]
+  if (slackMm === null) return [boundPlan(rod, basin), under]
   return [{ measuredMm: length.value, limitMm: length.value + slackMm, tight: 'run', of: length }, under]
 }
 
 /** One position in one basin with its tightest limit. See "Rod in a chamber" on the method page. */
 function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: Placement['position']): Stand {
   const d = rod.diameter.value
+  const clearance = clearanceOf(rod)
   const opening = boundOpening(rod.diameter, basin)
   if (position === 'upright') {
-    const isRoomy = hasCompany(basin, others, [d, d], rod.quantity)
+    const isRoomy = hasCompany(basin, others, [d, d], rod)
     const placement = { chamber: basin.id, position, angleDeg: 90 }
     return settle(basin, placement, [...opening, ...boundUpright(rod, basin)], isRoomy)
   }
@@ -110,7 +115,7 @@ function tryPosition(rod: Rod, basin: Basin, others: readonly Item[], position: 
   const angleDeg = fit.angleDeg ?? 0
   const runMm = size.lengthMm * Math.cos((angleDeg * Math.PI) / 180) + d
   const footprint: Rectangle = [Math.min(runMm, Math.max(clear.lengthMm, clear.widthMm)), d]
-  const isRoomy = hasCompany(basin, others, footprint, rod.quantity)
+  const isRoomy = hasCompany(basin, others, footprint, rod)
   const bounds = [...opening, ...boundAslant(rod, basin, fit.slackMm)]
   // A rod that need not be raised at all lies.
   const shown = fit.angleDeg === 0 ? 'flat' : position

@@ -18,6 +18,8 @@ export interface LightOptions {
   readonly quantity?: number
   /** Lens to water; by default the usual height of its mount. */
   readonly heightMm?: number
+  /** Water above the plane; by default half of it all. */
+  readonly depthMm?: number
 }
 
 /** A light's outline over the tank. `xMm` and `yMm` are its middle, from the middle of the display, y towards the front. */
@@ -26,7 +28,7 @@ export interface Fixture extends Point {
   readonly widthMm: number
 }
 
-/** The light on the plane half way down the water, as it is best set. Shares are 0 to 1. */
+/** The light on the plane half way down the water, or at the depth asked for, as it is best set. Shares are 0 to 1. */
 export interface LightDrawing {
   /** At full power. */
   readonly map: LightMap
@@ -47,6 +49,7 @@ export interface LightDrawing {
   readonly isHeightGiven: boolean
   /** Water above the plane. */
   readonly depthMm: number
+  readonly isDepthGiven: boolean
   readonly display: { readonly lengthMm: number; readonly widthMm: number }
   /** Of the display, the sizes that nobody said. */
   readonly assumed: { readonly length: boolean; readonly width: boolean }
@@ -62,7 +65,8 @@ export function drawLight(setup: Setup, piece: Piece, options: LightOptions = {}
   const band = chooseBand(plan.goals.coral)
   if (!band || listMissing(piece).length > 0 || !hasAreas(plan)) return null
   const { quantity = 1, heightMm = chooseHeightMm(piece.specs) } = options
-  const lit = describeLightScene(scene, piece.specs, quantity, heightMm)
+  const half = describeLightScene(scene, piece.specs, quantity, heightMm)
+  const lit = { ...half, depthMm: options.depthMm ?? half.depthMm }
   const map = mapLight(lit)
   const percent = isDimmable(piece.specs) === true ? findBestDimming(map, band).powerPercent : 100
   const share = shareInBand(map, band, percent)
@@ -86,6 +90,7 @@ export function drawLight(setup: Setup, piece: Piece, options: LightOptions = {}
     heightMm,
     isHeightGiven: options.heightMm !== undefined,
     depthMm: lit.depthMm,
+    isDepthGiven: options.depthMm !== undefined,
     display,
     assumed: { length: isAssumed('Length'), width: isAssumed('Width') },
   }

@@ -1,5 +1,5 @@
 import { choosePumpBasin } from '../checks/return-pump'
-import { chooseBands, describePlumbing, findPoint, readCurve } from '../checks/pump-flow'
+import { chooseBands, describePlumbing, findPoint, readCurve, type Plumbing } from '../checks/pump-flow'
 import { systemHeadM } from '../physics/flow'
 import { pumpHeadM, slowPump, type CurvePoint, type OperatingPoint, type PumpCurve } from '../physics/pump'
 import { thresholds } from '../thresholds'
@@ -24,9 +24,11 @@ export interface PumpDrawing extends PumpCurveDrawing {
   readonly system: readonly CurvePoint[]
   /** Where both cross. Flow 0: the pump does not lift the water. */
   readonly point: OperatingPoint
-  /** Flows of one pump at which the water is turned over as often as wanted. */
-  readonly wantedLph: readonly [number, number]
-  readonly turnoversPerHour: readonly [number, number]
+  /** Flows of one pump at which the water is turned over as often as wanted; null where nobody wants anything. */
+  readonly wanted: {
+    readonly lph: readonly [number, number]
+    readonly turnoversPerHour: readonly [number, number]
+  } | null
   /** Throttled as far as its speed control goes; null without one. */
   readonly slowest: {
     readonly speedShare: number
@@ -35,6 +37,8 @@ export interface PumpDrawing extends PumpCurveDrawing {
   } | null
   readonly staticHeadM: number
   readonly boreMm: number
+  /** Its length and fittings were said, not taken as usual. */
+  readonly isPipeGiven: boolean
 }
 
 const samples = 40
@@ -71,23 +75,35 @@ export function drawPump(setup: Setup, piece: Piece, options: PumpOptions = {}):
   const basin = choosePumpBasin(scene, { piece, quantity, ...(place && { place }) })
   if (!recorded || !basin) return null
   const plumbing = describePlumbing(scene, piece.specs, basin)
-  const { staticHeadM, pipe } = plumbing
   const { pass } = chooseBands(scene)
   const toFlow = (perHour: number) => (perHour * scene.plan.tank.waterL) / quantity
-  const wantedLph = [toFlow(pass[0]), toFlow(pass[1])] as const
   const speedShare = thresholds.pumpSlowest.value
   const slow = readFlag(piece.specs, 'dcControl') === true ? slowPump(recorded, speedShare) : null
   return {
+    ...drawWorking(recorded, plumbing, { lph: [toFlow(pass[0]), toFlow(pass[1])], turnoversPerHour: pass }),
+    slowest: slow && { speedShare, curve: sample(slow), point: findPoint(slow, plumbing) },
+  }
+}
+
+function drawWorking(recorded: PumpCurve, plumbing: Plumbing, wanted: PumpDrawing['wanted']): PumpDrawing {
+  const { staticHeadM, pipe } = plumbing
+  return {
     curve: sample(recorded),
     recorded,
-    system: spread(Math.max(recorded.at(-1)?.flowLph ?? 0, wantedLph[1]), (flowLph) =>
+    system: spread(Math.max(recorded.at(-1)?.flowLph ?? 0, wanted?.lph[1] ?? 0), (flowLph) =>
       systemHeadM(flowLph, staticHeadM, pipe),
     ),
     point: findPoint(recorded, plumbing),
-    wantedLph,
-    turnoversPerHour: pass,
-    slowest: slow && { speedShare, curve: sample(slow), point: findPoint(slow, plumbing) },
+    wanted,
+    slowest: null,
     staticHeadM,
     boreMm: pipe.boreMm,
+    isPipeGiven: false,
   }
 }
+
+/** A pump on a pipe that somebody described, whatever tank it feeds. */
+export const drawPumpOnPipe = (recorded: PumpCurve, plumbing: Plumbing): PumpDrawing => ({
+  ...drawWorking(recorded, plumbing, null),
+  isPipeGiven: true,
+})

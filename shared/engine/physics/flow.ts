@@ -49,10 +49,13 @@ export function roughFrictionFactor(relativeRoughness: number): number {
   return 0.25 / Math.log10(relativeRoughness / 3.7) ** 2
 }
 
-/** Loss coefficient of entry, exit and standard 90° elbows at 30 f_T each (Flow of Fluids, TP-410M). RangeError for NaN. */
-export function fittingsK(elbows: number, boreMm: number, roughnessMm = plasticRoughnessMm): number {
-  requireFinite({ elbows, boreMm, roughnessMm })
-  return entryK + exitK + elbows * 30 * roughFrictionFactor(roughnessMm / boreMm)
+/**
+ * Loss coefficient of entry, exit and standard elbows, 30 f_T for each of 90° and 16 f_T for each of 45° (Flow of Fluids,
+ * TP-410M). RangeError for NaN.
+ */
+export function fittingsK(elbows90: number, boreMm: number, roughnessMm = plasticRoughnessMm, elbows45 = 0): number {
+  requireFinite({ elbows90, elbows45, boreMm, roughnessMm })
+  return entryK + exitK + (elbows90 * 30 + elbows45 * 16) * roughFrictionFactor(roughnessMm / boreMm)
 }
 
 /**

@@ -14,6 +14,9 @@ export interface OperatingPoint {
   readonly headM: number
 }
 
+/** Closer together than this two points are one, L/h. */
+const sameFlowLph = 1e-6
+
 /**
  * Puts a pump's points in order. Where a point claims more head than one at a lesser flow it is brought down to that, so
  * that a slip in one number cannot give a pump two operating points. Null with fewer than two flows. RangeError for NaN.
@@ -24,7 +27,7 @@ export function readPumpCurve(points: readonly CurvePoint[]): PumpCurve | null {
   const curve: CurvePoint[] = []
   for (const { headM, flowLph } of points.toSorted((a, b) => a.flowLph - b.flowLph || b.headM - a.headM)) {
     requireFinite({ headM, flowLph })
-    if (flowLph === flow) continue
+    if (flowLph - flow < sameFlowLph) continue
     ceiling = Math.min(ceiling, headM)
     flow = flowLph
     curve.push({ headM: ceiling, flowLph })

@@ -8,6 +8,10 @@ export function splitPlane({ share, aboveShare }: LightDrawing) {
   return { within, above, below: 100 - within - above }
 }
 
+export function printPlane({ depthMm, isDepthGiven }: LightDrawing, printer: Printer): string {
+  return isDepthGiven ? `Light ${printer.length(depthMm)} down` : 'Light half way down'
+}
+
 export function printSetting({ percent }: LightDrawing, printer: Printer): string {
   return percent === 100 ? 'at full power' : `at ${printer.measure(percent / 100, 'fraction')} power`
 }

@@ -12,13 +12,13 @@ export function printPoint({ flowLph, headM }: PumpDrawing['point'], printer: Pr
     : 'nothing: it does not lift the water'
 }
 
-export function printWanted({ turnoversPerHour, wantedLph }: PumpDrawing, printer: Printer): string {
+export function printWanted({ turnoversPerHour, lph }: NonNullable<PumpDrawing['wanted']>, printer: Printer): string {
   const [low, high] = turnoversPerHour.map((value) => printer.number(value, '/h'))
-  return `wanted: ${printer.pair(wantedLph, 'L/h')}, the water ${low} to ${high} times an hour`
+  return `wanted: ${printer.pair(lph, 'L/h')}, the water ${low} to ${high} times an hour`
 }
 
-export function printPlumbing({ staticHeadM, boreMm }: PumpDrawing, printer: Printer): string {
-  const pipe = `a usual pipe, ${printer.length(boreMm)} wide`
+export function printPlumbing({ staticHeadM, boreMm, isPipeGiven }: PumpDrawing, printer: Printer): string {
+  const pipe = `${isPipeGiven ? 'the' : 'a usual'} pipe, ${printer.length(boreMm)} wide`
   const liftMm = staticHeadM * 1000
   return liftMm < leastLiftMm
     ? `what ${pipe}, takes without lift`
@@ -32,11 +32,10 @@ export function describePump(drawing: PumpCurveDrawing | PumpDrawing, printer: P
   )
   const curve = `Flow against head as recorded: ${recorded.join(', ')}.`
   if (!isAtWork(drawing)) return curve
-  const { point, slowest } = drawing
+  const { point, slowest, wanted } = drawing
   return [
     curve,
-    `It meets ${printPlumbing(drawing, printer)}, at ${printPoint(point, printer)};`,
-    `${printWanted(drawing, printer)}.`,
+    `It meets ${printPlumbing(drawing, printer)}, at ${printPoint(point, printer)}${wanted ? `; ${printWanted(wanted, printer)}` : ''}.`,
     slowest &&
       `At ${printer.measure(slowest.speedShare, 'fraction')} speed it gives ${printPoint(slowest.point, printer)}.`,
   ]

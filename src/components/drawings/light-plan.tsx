@@ -4,7 +4,7 @@ import type { Printer } from '#shared/units/print'
 import { labelContours } from './contour-labels'
 import { writeArea, writeLines } from './contour-path'
 import { traceLevel } from './contours'
-import { describeLight, printLights, printSetting, printSpill, splitPlane } from './describe-light'
+import { describeLight, printLights, printPlane, printSetting, printSpill, splitPlane } from './describe-light'
 import { besideEdge, labelPx } from './dimension-layout'
 import { DimensionLine } from './dimension-line'
 import { DrawingSheet } from './drawing-sheet'
@@ -89,7 +89,7 @@ export function LightPlan({ drawing, printer, isExample = false }: LightPlanProp
   return (
     <DrawingSheet
       frame={frame}
-      title={`${isExample ? 'In an example tank' : 'Light half way down'}, ${printSetting(drawing, printer)}`}
+      title={`${isExample ? 'In an example tank' : printPlane(drawing, printer)}, ${printSetting(drawing, printer)}`}
       description={describeLight(drawing, printer)}
       widthPx={widthPx}
       heightPx={heightPx}

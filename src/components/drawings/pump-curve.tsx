@@ -35,7 +35,7 @@ export function PumpCurve({ drawing, printer }: PumpCurveProps) {
   const id = useId()
   const [frame, widthPx] = useContainerWidth<HTMLDivElement>(sheet.defaultPx)
   const work = isAtWork(drawing) ? drawing : null
-  const mostLph = air * Math.max(endOf(drawing.curve), work?.wantedLph[1] ?? 0)
+  const mostLph = air * Math.max(endOf(drawing.curve), work?.wanted?.lph[1] ?? 0)
   const mostM = air * Math.max(topOf(drawing.curve), work?.staticHeadM ?? 0)
   const plot = {
     x: sheet.leftPx,
@@ -64,11 +64,15 @@ export function PumpCurve({ drawing, printer }: PumpCurveProps) {
     ...(work
       ? [
           line('system', printPlumbing(work, printer)),
-          {
-            key: 'wanted',
-            swatch: <rect x="1" y="1" width="20" height="12" className="fill-fits" opacity="0.24" />,
-            text: printWanted(work, printer),
-          },
+          ...(work.wanted
+            ? [
+                {
+                  key: 'wanted',
+                  swatch: <rect x="1" y="1" width="20" height="12" className="fill-fits" opacity="0.24" />,
+                  text: printWanted(work.wanted, printer),
+                },
+              ]
+            : []),
           {
             key: 'point',
             swatch: <circle cx="11" cy="7" r="5" className="fill-ink" />,
@@ -107,11 +111,11 @@ export function PumpCurve({ drawing, printer }: PumpCurveProps) {
         <text x={widthPx - 12} y={sheet.heightPx - 8} textAnchor="end" fontSize={labelPx} className="fill-ink-soft">
           flow, {printer.unitLabel('L/h')}
         </text>
-        {work && (
+        {work?.wanted && (
           <rect
-            x={xOf(work.wantedLph[0])}
+            x={xOf(work.wanted.lph[0])}
             y={plot.y}
-            width={xOf(work.wantedLph[1]) - xOf(work.wantedLph[0])}
+            width={xOf(work.wanted.lph[1]) - xOf(work.wanted.lph[0])}
             height={plot.height}
             className="fill-fits"
             opacity="0.24"

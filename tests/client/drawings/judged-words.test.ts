@@ -24,6 +24,7 @@ const light: LightDrawing = {
   heightMm: 200,
   isHeightGiven: false,
   depthMm: 180,
+  isDepthGiven: false,
   display: { lengthMm: 508, widthMm: 254 },
   assumed: { length: false, width: false },
 }
@@ -36,8 +37,8 @@ const pump: PumpDrawing = {
   ],
   system: [],
   point: { flowLph: 757.0824, headM: 0.6096 },
-  wantedLph: [300, 900],
-  turnoversPerHour: [4, 12],
+  wanted: { lph: [300, 900], turnoversPerHour: [4, 12] },
+  isPipeGiven: false,
   slowest: null,
   staticHeadM: 0.3048,
   boreMm: 12.7,

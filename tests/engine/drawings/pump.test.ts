@@ -42,13 +42,13 @@ describe('a return pump at work, drawn', () => {
   })
 
   it('wants 4 to 12 times 84 L an hour: 336 to 1008 L/h', () => {
-    expect(drawn.wantedLph[0]).toBeCloseTo(336, 6)
-    expect(drawn.wantedLph[1]).toBeCloseTo(1008, 6)
+    expect(drawn.wanted!.lph[0]).toBeCloseTo(336, 6)
+    expect(drawn.wanted!.lph[1]).toBeCloseTo(1008, 6)
     expect(judge(wholeSetup(), pump(), 'return-pump.flow').measured).toBeCloseTo(drawn.point.flowLph / 84, 9)
   })
 
   it('asks half of each of two pumps', () => {
-    expect(drawPump(wholeSetup(), pump(), { quantity: 2 })!.wantedLph[0]).toBeCloseTo(168, 6)
+    expect(drawPump(wholeSetup(), pump(), { quantity: 2 })!.wanted!.lph[0]).toBeCloseTo(168, 6)
   })
 
   it('throttles by the affinity laws: 40 % of the speed, 40 % of the flow, 16 % of the head', () => {

@@ -1,0 +1,16 @@
+import type { Coral, Piece, Specs } from '../types'
+
+export interface LightValues {
+  readonly light: Readonly<Record<string, unknown>>
+  readonly quantity?: number
+  readonly mountHeightMm?: number
+  readonly depthMm?: number
+  readonly coral?: readonly Coral[]
+}
+
+/** The light as the checks read it. One that nobody said cannot be dimmed is taken to dim. */
+export function toLight({ light }: LightValues): Piece {
+  const specs: Record<string, Specs[string]> = { dimmable: { value: true, source: 'estimate' } }
+  for (const [key, value] of Object.entries(light)) specs[key] = { value, source: 'measured' }
+  return { kind: 'light', specs }
+}
