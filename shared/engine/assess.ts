@@ -33,7 +33,7 @@ export function judgeAll(scene: Scene, candidate: Candidate): readonly Judged[] 
 export const findPlacement = (judged: readonly Judged[]): Placement | undefined =>
   judged.find(({ judgement }) => judgement.placement)?.judgement.placement
 
-const toCandidate = ({ piece, quantity, place, mountHeightMm }: Item): Candidate => ({
+export const toCandidate = ({ piece, quantity, place, mountHeightMm }: Item): Candidate => ({
   piece,
   quantity,
   ...(place && { place }),
@@ -50,13 +50,16 @@ export function assessItem(plan: Plan, items: readonly Item[], item: Item): Asse
   return { item, judged, verdict: decideVerdict(judged), ...(placement && { placement }) }
 }
 
+/** Items judged against each other in a setup that is planned; they need not be those of the plan. */
+export const assessAll = (plan: Plan, items: readonly Item[]): Assessment => ({
+  plan,
+  items: items.map((item) => assessItem(plan, items, item)),
+  essentials: checkEssentials(plan, items),
+  budgets: addUp(plan, items),
+})
+
 /** Judges every piece that counts against the rest. RangeError where the tank has neither size nor volume. */
 export function assess(setup: Setup): Assessment {
   const plan = resolve(setup)
-  return {
-    plan,
-    items: plan.items.map((item) => assessItem(plan, plan.items, item)),
-    essentials: checkEssentials(plan, plan.items),
-    budgets: addUp(plan, plan.items),
-  }
+  return assessAll(plan, plan.items)
 }

@@ -1,5 +1,6 @@
-import { assessItem, judgeAll, type Assessment } from './assess'
+import { assessAll, assessItem, judgeAll, type Assessment } from './assess'
 import { addUp } from './budgets'
+import type { Judged } from './judge'
 import { diff, isDemand, type RawKnockOn } from './knock-ons'
 import { checkEssentials } from './needs'
 import type { Candidate } from './rule'
@@ -7,7 +8,7 @@ import { createScene, withItems, type Scene } from './scene'
 import type { Plan } from './setup/plan'
 import { resolve } from './setup/resolve'
 import { hasSize } from './setup/tank'
-import type { Item, Outcome, Piece, Setup } from './types'
+import type { Item, Piece, Setup } from './types'
 import { getKind, type KindKey } from '../kinds/index'
 
 /** What a piece takes the place of, or that it takes no place. */
@@ -19,8 +20,10 @@ export interface Seat {
 /** A piece that is gone, which `before` counts as if it were there. */
 export interface GonePiece {
   readonly item: Item
-  /** What its own checks said. */
-  readonly outcomes: ReadonlyMap<string, Outcome>
+  /** By every rule of its kind, in its place. */
+  readonly judged: readonly Judged[]
+  /** Rules that it did not simply pass: its replacement is not charged with them. */
+  readonly conceded: ReadonlySet<string>
 }
 
 /** The setup a candidate joins: what is left when it takes the place of its kind's pieces, or of the one that is gone. */
@@ -42,13 +45,6 @@ function keepItems(plan: Plan, kind: KindKey, options: Seat): readonly Item[] {
   return plan.items.filter((item) => item.piece.kind !== kind)
 }
 
-const assessAll = (plan: Plan, items: readonly Item[]): Assessment => ({
-  plan,
-  items: items.map((item) => assessItem(plan, items, item)),
-  essentials: checkEssentials(plan, items),
-  budgets: addUp(plan, items),
-})
-
 /** Prepares a setup for judging pieces of one kind. RangeError where the tank has neither size nor volume. */
 export function setBench(setup: Setup, kind: KindKey, options: Seat = {}): Bench {
   const whole = resolve(setup)
@@ -59,8 +55,13 @@ export function setBench(setup: Setup, kind: KindKey, options: Seat = {}): Bench
   return { scene: createScene(plan, others), before: assessAll(plan, others), kind }
 }
 
-const findOutcomes = (judged: ReturnType<typeof judgeAll>): ReadonlyMap<string, Outcome> =>
-  new Map(judged.map(({ rule, outcome }) => [rule.id, outcome]))
+const describeGone = (item: Item, judged: readonly Judged[]): GonePiece => ({
+  item,
+  judged,
+  conceded: new Set(
+    judged.flatMap(({ rule, outcome }) => (outcome === 'change' || outcome === 'fail' ? [rule.id] : [])),
+  ),
+})
 
 function setTankBench(setup: Setup): Bench {
   const plan = resolve(setup)
@@ -68,8 +69,8 @@ function setTankBench(setup: Setup): Bench {
   const piece: Piece = { kind: 'tank', specs, ...(gear && { gear }) }
   const scene = createScene(plan, plan.items)
   const item: Item = { id: tankId, piece, quantity: 1, state: 'have' }
-  const outcomes = findOutcomes(judgeAll(scene, { piece, quantity: 1 }))
-  return { scene, before: assessAll(plan, plan.items), kind: 'tank', gone: { item, outcomes } }
+  const gone = describeGone(item, judgeAll(scene, { piece, quantity: 1 }))
+  return { scene, before: assessAll(plan, plan.items), kind: 'tank', gone }
 }
 
 /**
@@ -92,7 +93,7 @@ export function setSwapBench(setup: Setup, goneId: string): Bench | undefined {
     plan,
     plan.items.filter((other) => other !== item),
   )
-  return { scene, before, kind: item.piece.kind, gone: { item, outcomes: findOutcomes(judged) } }
+  return { scene, before, kind: item.piece.kind, gone: describeGone(item, judged) }
 }
 
 /** The setup's items with the candidate among them, where what is gone stood, else last. */
@@ -110,7 +111,7 @@ export function seatCandidate({ scene, before, gone }: Bench, candidate: Candida
   return before.plan.items.map((one) => (one === gone.item ? item : one))
 }
 
-function planAfter({ scene, before, kind, gone }: Bench, { piece }: Candidate, items: readonly Item[]): Plan {
+export function planAfter({ scene, before, kind, gone }: Bench, { piece }: Candidate, items: readonly Item[]): Plan {
   const { setup } = scene.plan
   if (kind === 'tank')
     return resolve(withItems(setup, items, { specs: piece.specs, ...(piece.gear && { gear: piece.gear }) }))
@@ -143,8 +144,5 @@ export function findRestKnockOns(bench: Bench, candidate: Candidate): readonly R
   return findRestChanges(bench, candidate).filter(isDemand)
 }
 
-/** Whether what is gone already asked this much: its replacement is not charged with it. */
-export const isConceded = ({ gone }: Bench, ruleId: string): boolean => {
-  const was = gone?.outcomes.get(ruleId)
-  return was === 'change' || was === 'fail'
-}
+/** Whether what is gone did not simply pass either. */
+export const isConceded = ({ gone }: Bench, ruleId: string): boolean => gone?.conceded.has(ruleId) ?? false

@@ -8,6 +8,7 @@ import { createScene, once } from './scene'
 import type { Plan } from './setup/plan'
 import type { Item } from './types'
 import { readNumber } from './values'
+import { addUpSupplies } from './supplies-budget'
 import { findFloorPressureKPa, weighFilled } from './weight-budget'
 
 export interface RawBudget {
@@ -65,7 +66,7 @@ function addUpWeight(plan: Plan, items: readonly Item[]): { massKg: RawBudget; f
   }
 }
 
-/** What the whole setup uses of what it has: outlets and watts; weight, floor pressure and heat where the shape tells them. */
+/** What the whole setup uses of what it has: outlets and watts; weight, floor pressure, heat and supplies where the shape tells them. */
 export function addUp(plan: Plan, items: readonly Item[]): Readonly<Record<string, RawBudget>> {
   const plugs = countPlugs(plan, items)
   const load = sumLoad(plan, items)
@@ -84,5 +85,6 @@ export function addUp(plan: Plan, items: readonly Item[]): Readonly<Record<strin
       say: (words) => `${words.power(load.watts)} of ${words.power(continuousW)} that may run without pause.`,
     },
   }
-  return hasAreas(plan) ? { ...mains, ...addUpWeight(plan, items), heatW: addUpHeat(plan, items) } : mains
+  if (!hasAreas(plan)) return mains
+  return { ...mains, ...addUpWeight(plan, items), heatW: addUpHeat(plan, items), ...addUpSupplies(plan, items) }
 }

@@ -4,11 +4,13 @@ import type { Assessment, AssessedItem } from './assess'
 import { describeCondition } from './conditions'
 import type { Judged } from './judge'
 import type { Say } from './rule'
-import type { KnockOn, Outcome } from './types'
+import type { Item, KnockOn, Outcome } from './types'
 
 /** A knock-on before anybody asks for words. */
 export interface RawKnockOn extends Omit<KnockOn, 'message'> {
   readonly say: Say
+  /** What is asked for, where something that can be got would do. */
+  readonly need?: string
 }
 
 const severity: Readonly<Record<Outcome, number>> = { pass: 0, nodata: 0, change: 1, fail: 2 }
@@ -16,8 +18,8 @@ const severity: Readonly<Record<Outcome, number>> = { pass: 0, nodata: 0, change
 const sayOf = ({ judgement, condition }: Judged): Say =>
   condition ? (words) => `${judgement.say(words)} ${describeCondition(condition())(words)}` : judgement.say
 
-const nameOf = ({ item }: AssessedItem): string => {
-  const { gear, kind } = item.piece
+export const nameOf = ({ piece }: Item): string => {
+  const { gear, kind } = piece
   const { label } = getKind(kind)
   return gear ? `${gear.brand} ${gear.model}` : `${label[0]?.toUpperCase()}${label.slice(1)}`
 }
@@ -34,6 +36,7 @@ export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
         from: null,
         to: one.outcome,
         say: sayOf(one),
+        ...(asks && { need: asks.need }),
       },
     ]
   })
@@ -58,7 +61,8 @@ function worsenedKnockOns(before: AssessedItem, after: AssessedItem, said: Set<s
         subject: after.item.id,
         from,
         to: one.outcome,
-        say: (words) => `${nameOf(after)}: ${say(words)}`,
+        say: (words) => `${nameOf(after.item)}: ${say(words)}`,
+        ...(need !== undefined && { need }),
       },
     ]
   })
@@ -93,9 +97,8 @@ export function diff(before: Assessment, after: Assessment): readonly RawKnockOn
     const wasMet = met.get(essential.need) ?? true
     if (wasMet === essential.isMet) return []
     const kind = essential.isMet ? 'freed' : 'missing'
-    return [
-      { kind, subject: essential.need, from: null, to: null, say: essential.isMet ? essential.sayMet : essential.say },
-    ]
+    const { need, isMet, say, sayMet } = essential
+    return [{ kind, subject: need, from: null, to: null, ...(isMet ? { say: sayMet } : { say, need }) }]
   })
   const all = [...items, ...essentials, ...budgetKnockOns(before, after)]
   return all.sort((a, b) => weight[a.kind] - weight[b.kind] || rankOf(b) - rankOf(a))
@@ -116,4 +119,4 @@ function replacedKnockOns(before: AssessedItem, after: AssessedItem): readonly R
 export const isDemand = ({ kind }: RawKnockOn): boolean => kind === 'need' || kind === 'check' || kind === 'missing'
 
 export const presentKnockOns = (knockOns: readonly RawKnockOn[], words: Printer): readonly KnockOn[] =>
-  knockOns.map(({ say, ...rest }) => ({ ...rest, message: say(words) }))
+  knockOns.map(({ say, need: _, ...rest }) => ({ ...rest, message: say(words) }))

@@ -1,7 +1,7 @@
 import type { Printer } from '../units/print'
 import type { AssessedCandidate } from './candidates'
 import { getRules } from './checks/index'
-import { presentKnockOns } from './knock-ons'
+import { isDemand, presentKnockOns } from './knock-ons'
 import { presentCautions, presentCheck } from './present'
 import type { Scene } from './scene'
 import type { Answer } from './types'
@@ -27,7 +27,8 @@ function summarise(
     return summary.write(scene, candidate, placement)(words)
   const changed = findFirst('change')
   if (changed) return presentCheck(changed, words).message
-  if (knockOns[0]) return knockOns[0].say(words)
+  const demand = knockOns.find(isDemand)
+  if (demand) return demand.say(words)
   return judged[0] ? presentCheck(judged[0], words).message : 'Nothing about it could be checked yet.'
 }
 

@@ -17,18 +17,19 @@ function addTo<K>(lists: Map<K, number[]>, key: K, index: number): void {
   else lists.set(key, [index])
 }
 
-/** Lists of pieces that are alike in demands and closeness to the target, the least demanding and closest first. */
-function groupTies(indexes: readonly number[], { demands, targetOf }: Sweep): readonly (readonly number[])[] {
-  const byDemands = new Map<number, Map<number, number[]>>()
-  for (const index of indexes) {
-    const asked = demands[index]!
-    let byTarget = byDemands.get(asked)
-    if (!byTarget) byDemands.set(asked, (byTarget = new Map<number, number[]>()))
-    addTo(byTarget, targetOf(index), index)
-  }
-  const inOrder = <T>(map: ReadonlyMap<number, T>): readonly T[] =>
-    [...map].sort(([a], [b]) => a - b).map(([, value]) => value)
-  return inOrder(byDemands).flatMap(inOrder)
+const inOrder = <T>(map: ReadonlyMap<number, T>): readonly T[] =>
+  [...map].sort(([a], [b]) => a - b).map(([, value]) => value)
+
+function splitBy(indexes: readonly number[], numberOf: (index: number) => number): readonly (readonly number[])[] {
+  const lists = new Map<number, number[]>()
+  for (const index of indexes) addTo(lists, numberOf(index), index)
+  return inOrder(lists)
+}
+
+/** Lists of pieces that are alike in demands, extra pieces and closeness to the target, the best first. */
+function* groupTies(indexes: readonly number[], { demands, extrasOf, targetOf }: Sweep): Generator<readonly number[]> {
+  for (const alike of splitBy(indexes, (index) => demands[index]!))
+    for (const cheap of splitBy(alike, extrasOf)) yield* splitBy(cheap, targetOf)
 }
 
 /**
@@ -51,7 +52,7 @@ function takeBest(tied: readonly number[], swept: Sweep, pieces: readonly Piece[
   return [...byCloseCalls].sort(([a], [b]) => a - b).flatMap(([, list]) => list)
 }
 
-/** The first `needed` pieces of one verdict in order: fewer demands, closeness to the target, backing, slug. */
+/** The first `needed` pieces of one verdict in order: fewer demands, fewer extra pieces, closeness to the target, backing, slug. */
 export function sortGroup(
   indexes: readonly number[],
   swept: Sweep,

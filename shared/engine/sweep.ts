@@ -5,6 +5,8 @@ import { getRules } from './checks/index'
 import { classify } from './classes'
 import type { Judged } from './judge'
 import type { Candidate } from './rule'
+import { countDifferences } from './swap/differences'
+import { countExtraPieces } from './swap/meeting-kinds'
 import { codes, Table, toCode, wouldSeveralDo } from './table'
 import type { Piece, Verdict } from './types'
 
@@ -28,6 +30,8 @@ export interface Sweep {
   readonly verdicts: readonly (Verdict | null)[]
   /** Own changes and those of the rest of the setup. */
   readonly demands: Int32Array
+  /** Pieces that have to be got beside it, by kind; 0 where nothing is gone. */
+  readonly extrasOf: (index: number) => number
   readonly targetOf: (index: number) => number
   readonly candidateOf: (index: number) => Candidate
   /** The rules at the quantity that was settled on for the piece. */
@@ -93,12 +97,13 @@ export function sweep(bench: Bench, pieces: readonly Piece[], options: SweepOpti
       if (isLeftOut(piece)) own[index] = leftOut
     })
   const candidateOf = (index: number): Candidate => ({ piece: pieces[index]!, ...tables.of(index).way })
-  addRestDemands(bench, pieces, own, demands, candidateOf)
+  const restNeedsOf = addRestDemands(bench, pieces, own, demands, candidateOf)
   return {
     bench,
     demands,
     candidateOf,
     verdicts: Array.from(own, (code) => verdictOfCode[code]!),
+    extrasOf: bench.gone ? countExtras(bench, tables, restNeedsOf) : () => 0,
     targetOf: measureTargets(bench, pieces, tables, candidateOf),
     tableOf: (index) => tables.of(index),
     judgedOf: (index) => tables.of(index).judgedOf(index),
@@ -180,34 +185,60 @@ function countFailures(tables: Tables, first: Table, own: Int8Array) {
     .sort((a, b) => b.count - a.count)
 }
 
-/** Adds what each piece makes the rest of the setup ask, found once per class of pieces that the rest cannot tell apart. */
+/**
+ * Adds what each piece makes the rest of the setup ask, found once per class of pieces that the rest cannot tell apart;
+ * answers the needs among that.
+ */
 function addRestDemands(
   bench: Bench,
   pieces: readonly Piece[],
   own: Int8Array,
   demands: Int32Array,
   candidateOf: (index: number) => Candidate,
-) {
-  if (bench.scene.others.length === 0 && !bench.gone) return
+): (index: number) => readonly string[] {
+  if (bench.scene.others.length === 0 && !bench.gone) return () => []
   const { feltThrough } = getRules(bench.kind)
   const all = getKind(bench.kind).attributes.map(({ key }) => key)
   // A piece that was told where to stand takes room from what else stands there.
   const isPlaced = pieces.length > 0 && candidateOf(0).place !== undefined
   const felt = feltThrough && isPlaced ? [...new Set([...feltThrough, ...sizeKeys])] : (feltThrough ?? all)
   const classes = classify(pieces, `${bench.kind} felt${isPlaced ? ' in place' : ''}`, felt)
-  const known = new Map<string, number>()
+  const known = new Map<string, { readonly count: number; readonly needs: readonly string[] }>()
+  const keyOf = (index: number, { quantity }: Candidate) => `${classes.ofPiece[index]!} ${quantity}`
   for (let index = 0; index < pieces.length; index += 1) {
     if (own[index]! >= codes.fail) continue
     const candidate = candidateOf(index)
-    const key = `${classes.ofPiece[index]!} ${candidate.quantity}`
-    let count = known.get(key)
-    if (count === undefined) known.set(key, (count = findRestKnockOns(bench, candidate).length))
-    demands[index]! += count
-    if (weighKnockOns(verdictOfCode[own[index]!]!, count) === 'changes') own[index] = codes.change
+    const key = keyOf(index, candidate)
+    let felt = known.get(key)
+    if (felt === undefined) {
+      const found = findRestKnockOns(bench, candidate)
+      known.set(key, (felt = { count: found.length, needs: found.flatMap(({ need }) => need ?? []) }))
+    }
+    demands[index]! += felt.count
+    if (weighKnockOns(verdictOfCode[own[index]!]!, felt.count) === 'changes') own[index] = codes.change
+  }
+  return (index) => known.get(keyOf(index, candidateOf(index)))?.needs ?? []
+}
+
+/** What the pieces' own checks ask for, which what is gone did not, and what they make the rest ask for. */
+function countExtras(
+  bench: Bench,
+  tables: Tables,
+  restNeedsOf: (index: number) => readonly string[],
+): (index: number) => number {
+  return (index) => {
+    const needs = tables
+      .of(index)
+      .columns.filter((column) => toCode(column.codeOf(index)) === codes.change && !isConceded(bench, column.rule.id))
+      .flatMap((column) => column.judgementOf(index)?.judgement.asks?.need ?? [])
+    return countExtraPieces(new Set([...needs, ...restNeedsOf(index)]))
   }
 }
 
-/** A piece's distance from the kind's target, found once per class of pieces and quantity. */
+/**
+ * A piece's distance from the kind's target, found once per class of pieces and quantity; for kinds without one, how many
+ * differences there are from what is gone.
+ */
 function measureTargets(
   bench: Bench,
   pieces: readonly Piece[],
@@ -215,7 +246,8 @@ function measureTargets(
   candidateOf: (index: number) => Candidate,
 ): (index: number) => number {
   const { target, targetReads = [] } = getRules(bench.kind)
-  if (!target) return () => 0
+  const { kind, gone } = bench
+  if (!target) return gone ? (index) => countDifferences(kind, gone.item.piece.specs, pieces[index]!.specs) : () => 0
   const classes = classify(pieces, `${bench.kind} target`, targetReads)
   const known = new Map<number, number>()
   return (index) => {

@@ -1,0 +1,36 @@
+import type { Bench } from '../bench'
+import { assessAll, judgeAll } from '../assess'
+import { nameOf, type RawKnockOn } from '../knock-ons'
+import { createScene } from '../scene'
+import type { Item } from '../types'
+import { isHelperKind } from './meeting-kinds'
+import { assessOutfit, changeItems, describeState, findNew, type Outfit, type State } from './outfit'
+
+/** Whether something would be asked for, or fail, that is not in `state`. */
+const isWorse = (state: State, than: State): boolean =>
+  findNew(state.unmet, than.unmet).length > 0 || [...state.failing].some((id) => !than.failing.has(id))
+
+/** The setup as it was, what is gone still there, without one of its items. */
+function assessWithout({ before, kind, gone }: Bench, item: Item): State {
+  const { plan } = before
+  const items = plan.items.filter((other) => other !== item)
+  const tank = kind === 'tank' && gone ? judgeAll(createScene(plan, items), gone.item) : []
+  return describeState(assessAll(plan, items), tank)
+}
+
+/** Items that something needed before, and nothing needs with the replacement: a controller for a heater that has its own. */
+export function findFreed(outfit: Outfit, before: State, after: State): readonly RawKnockOn[] {
+  const { bench, items } = outfit
+  const helpers = bench.scene.others.filter(({ piece }) => isHelperKind(piece.kind))
+  return helpers.flatMap((item): RawKnockOn[] => {
+    if (!isWorse(assessWithout(bench, item), before)) return []
+    const without = changeItems(
+      outfit,
+      items.filter((other) => other !== item),
+    )
+    if (isWorse(assessOutfit(without), after)) return []
+    return [
+      { kind: 'freed', subject: item.id, from: null, to: null, say: () => `${nameOf(item)} is no longer needed.` },
+    ]
+  })
+}
