@@ -62,7 +62,8 @@ function joinRepeated(query: LinkQuery): [string, string][] {
   return [...texts]
 }
 
-function findField(path: string, raw: ReadonlyMap<string, string>): FieldAttribute | undefined {
+/** The field that a path of a link names; the specs of a piece are those of its kind. */
+export function findLinkField(path: string, raw: ReadonlyMap<string, string>): FieldAttribute | undefined {
   const [section, id, ...rest] = path.split('.')
   if (section !== 'items') return findSetupField(path)?.attribute
   if (id === undefined || !/^[A-Za-z0-9][\w-]*$/.test(id)) return undefined
@@ -104,7 +105,7 @@ function readEntries(query: LinkQuery, system: UnitSystem) {
   const canonical: [string, string][] = []
   for (const path of sortPaths([...raw.keys()])) {
     const text = raw.get(path) ?? ''
-    const field = findField(path, raw)
+    const field = findLinkField(path, raw)
     const read = field === undefined ? undefined : readLinkValue(text, field, system, typedIn)
     canonical.push([path, read?.ok ? read.text : text])
     if (read?.ok) found.push({ path, value: read.value })

@@ -23,6 +23,8 @@ function useFreshStart(pathname: string): void {
     if (shown.current === pathname) return
     shown.current = pathname
     window.scrollTo(0, 0)
+    // What went wrong with the form that led here has taken it already.
+    if (document.activeElement?.closest('[role="alert"]')) return
     document.getElementById('main')?.focus({ preventScroll: true })
   }, [pathname])
 }

@@ -32,6 +32,8 @@ export function createRoutes(app: App): RouteObject[] {
               lazy: createLazy(app, () => import('./routes/gear-history')),
             },
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
+            { id: 'setup-new', path: paths.setupNew, lazy: createLazy(app, () => import('./routes/setup-new')) },
+            { id: 'setup', path: paths.setup, lazy: createLazy(app, () => import('./routes/setup-link')) },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],

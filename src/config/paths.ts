@@ -5,5 +5,10 @@ export const paths = {
   method: '/method',
   gearList: '/gear',
   gear: (slug: string) => `/gear/${encodeURIComponent(slug)}`,
+  setupNew: '/setups/new',
+  /** A setup that lives in its address alone. */
+  setup: '/setups/link',
+  swap: (itemId: string) => `/setups/link/swap/${encodeURIComponent(itemId)}`,
+  measuringSheet: '/setups/measuring-sheet',
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

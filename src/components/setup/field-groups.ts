@@ -6,13 +6,13 @@ export interface FieldGroup {
   readonly fields: readonly SetupField[]
 }
 
-const list = (paths: readonly string[]): SetupField[] =>
+export const listFields = (paths: readonly string[]): SetupField[] =>
   paths.flatMap((path) => {
     const field = findSetupField(path)
     return field ? [{ ...field, path }] : []
   })
 
-const under = (section: string): SetupField[] =>
+export const listSection = (section: string): SetupField[] =>
   setupFields.filter(({ path }) => path.startsWith(`${section}.`) && !path.includes('*'))
 
 const size = ['volumeL', 'outerLengthMm', 'outerWidthMm', 'outerHeightMm', 'waterLineMm', 'wallMm', 'bottomMm']
@@ -44,15 +44,15 @@ export function listFieldGroups(kind: KindKey, chambers: number): readonly Field
   ]
   const count = Math.max(1, chambers)
   return [
-    { title: 'Tank size', fields: list(size.map((key) => `tank.${key}`)) },
+    { title: 'Tank size', fields: listFields(size.map((key) => `tank.${key}`)) },
     ...Array.from({ length: count }, (_, at) => ({
       title: chamberTitle(at, count),
-      fields: list(chamber.map((key) => `tank.chambers.${at}.${key}`)),
+      fields: listFields(chamber.map((key) => `tank.chambers.${at}.${key}`)),
     })),
-    { title: 'How the tank is built', fields: list(build.map((key) => `tank.${key}`)) },
+    { title: 'How the tank is built', fields: listFields(build.map((key) => `tank.${key}`)) },
     ...wanted.map((section) => ({
       title: sections[section] ?? section,
-      fields: [...(section === 'mains' ? list(['country']) : []), ...under(section)],
+      fields: [...(section === 'mains' ? listFields(['country']) : []), ...listSection(section)],
     })),
   ]
 }

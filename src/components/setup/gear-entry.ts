@@ -2,7 +2,7 @@ import { queryOptions } from '@tanstack/react-query'
 import type { Gear } from '#shared/schemas/gear'
 import type { ApiClient } from '../../lib/api-client'
 
-async function fetchTank(api: ApiClient, slug: string, signal: AbortSignal): Promise<Gear> {
+async function fetchEntry(api: ApiClient, slug: string, signal: AbortSignal): Promise<Gear> {
   const [answer, { gearSchema }] = await Promise.all([
     api.get(`/gear/${encodeURIComponent(slug)}`, signal),
     import('#shared/schemas/gear'),
@@ -10,9 +10,9 @@ async function fetchTank(api: ApiClient, slug: string, signal: AbortSignal): Pro
   return gearSchema.parse(answer)
 }
 
-/** The catalogue's tank that a setup names, to draw it. */
-export const tankEntryQuery = (api: ApiClient, slug: string) =>
+/** A piece of the catalogue that a setup names, to name and draw it. */
+export const gearEntryQuery = (api: ApiClient, slug: string) =>
   queryOptions({
     queryKey: ['gear', slug],
-    queryFn: ({ signal }) => fetchTank(api, slug, signal),
+    queryFn: ({ signal }) => fetchEntry(api, slug, signal),
   })

@@ -1,4 +1,4 @@
-import type { GearRef, Setup, Specs } from '#shared/engine/types'
+import type { GearRef, Item, Setup, Specs } from '#shared/engine/types'
 import type { SetupParsed, SetupRequest } from '#shared/schemas/setup'
 
 export interface TankEntry extends GearRef {
@@ -9,7 +9,7 @@ const isSourced = (value: unknown): value is Specs[string] =>
   typeof value === 'object' && value !== null && 'value' in value
 
 /** The setup as the engine takes it, for drawing: the person's own numbers count as measured. */
-export function toEngineSetup(request: SetupRequest, entry?: TankEntry): Setup {
+export function toEngineSetup(request: SetupRequest, entry?: TankEntry, items: readonly Item[] = []): Setup {
   // What a link holds was held to the very schema that parses it.
   const parsed = request as SetupParsed
   const { gear: _slug, volumeL, ...own } = parsed.tank
@@ -26,6 +26,6 @@ export function toEngineSetup(request: SetupRequest, entry?: TankEntry): Setup {
     ...(mains && { mains }),
     ...(water && { water }),
     ...(goals && { goals }),
-    items: [],
+    items,
   }
 }

@@ -4,8 +4,8 @@ import type { GearItem } from '#shared/schemas/gear'
 import { paths } from '../../config/paths'
 
 export interface SuggestScope {
-  /** `question`: a kind is asked about, keeping the setup; `gear`: its list is opened. */
-  readonly page: 'question' | 'gear'
+  /** `question`: a kind is asked about, keeping the setup; `gear`: its list is opened; `piece`: one is named, to be sent. */
+  readonly page: 'question' | 'gear' | 'piece'
   readonly kind: KindKey | null
 }
 
@@ -55,6 +55,15 @@ function suggestBrands(text: string, brands: readonly Brand[]): Suggestion[] {
   }))
 }
 
+const labelKind = (kind: string): string => (kind in kinds ? kinds[kind as KindKey].label : kind)
+
+const toNamed = ({ slug, brand, model, kind }: GearItem): Suggestion => ({
+  id: `piece-${slug}`,
+  label: `${brand} ${model}`,
+  detail: labelKind(kind),
+  text: `${brand} ${model}`,
+})
+
 /** Kinds and brands that are called like the text, then pieces that a search found. */
 export function findSuggestions(
   typed: string,
@@ -64,13 +73,14 @@ export function findSuggestions(
 ): readonly Suggestion[] {
   const text = typed.trim()
   if (text.length < 2 || text.length > longestName) return []
+  if (scope.page === 'piece') return pieces.map(toNamed)
   return [
     ...suggestKinds(text, scope),
     ...suggestBrands(text, brands),
     ...pieces.map(({ slug, brand, model, kind }) => ({
       id: `piece-${slug}`,
       label: `${brand} ${model}`,
-      detail: kind in kinds ? kinds[kind as KindKey].label : kind,
+      detail: labelKind(kind),
       href: paths.gear(slug),
     })),
   ]

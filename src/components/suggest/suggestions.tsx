@@ -34,7 +34,7 @@ export default function Suggestions({ field, before, scope }: SuggestionsProps) 
   const brands = useQuery(brandsQuery(api)).data
   const isNaming = couldName(rested)
   const { data: pieces } = useQuery({
-    ...namedPiecesQuery(api, rested, scope.page === 'gear' ? scope.kind : null),
+    ...namedPiecesQuery(api, rested, scope.page === 'question' ? null : scope.kind),
     enabled: isNaming,
     placeholderData: keepPreviousData,
   })

@@ -4,14 +4,14 @@ import { throwFailure } from '../../lib/loading'
 import { fitCheckQuery } from './api/fit-check'
 import { isRefusal } from './api/fit'
 import { answersQuery, canAsk } from './api/requests'
-import { tankEntryQuery } from '../../components/setup/tank-entry'
+import { gearEntryQuery } from '../../components/setup/gear-entry'
 import { readVisit, type Visit } from './link/read-visit'
 
 /** Starts everything that the page shows. */
 function startQueries({ api, queryClient }: App, visit: Visit): Promise<unknown>[] {
   const { state, setup } = visit
   const slug = state.raw['tank.gear']
-  const tank = slug === undefined ? [] : [queryClient.prefetchQuery(tankEntryQuery(api, slug))]
+  const tank = slug === undefined ? [] : [queryClient.prefetchQuery(gearEntryQuery(api, slug))]
   if (!canAsk(visit)) return tank
   const verdicts = ['changes', ...(state.opened ? [state.opened.verdict] : [])] as const
   return [

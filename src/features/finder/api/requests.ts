@@ -1,5 +1,6 @@
 import type { Verdict } from '#shared/engine/types'
 import type { FitRequest } from '#shared/schemas/fit'
+import { hasTankSize } from '../../../components/setup/has-tank-size'
 import type { ApiClient } from '../../../lib/api-client'
 import type { Visit } from '../link/read-visit'
 import { fitPagesQuery } from './fit'
@@ -7,11 +8,7 @@ import { fitPagesQuery } from './fit'
 const pageSize = 6
 
 /** Whether there is anything to ask: without a size or volume of the tank nothing can be judged. */
-export function canAsk({ setup }: Visit): boolean {
-  const tank = setup.tank as Readonly<Record<string, unknown>>
-  const hasSize = ['outerLengthMm', 'outerWidthMm', 'outerHeightMm'].every((key) => tank[key] !== undefined)
-  return hasSize || ['volumeL', 'nominalVolumeL', 'gear'].some((key) => tank[key] !== undefined)
-}
+export const canAsk = ({ setup }: Visit): boolean => hasTankSize(setup)
 
 /** The list of one verdict; that of those that fit also brings scales, counts and assumptions. */
 export function answersQuery(api: ApiClient, { setup, state }: Visit, verdict: Verdict) {

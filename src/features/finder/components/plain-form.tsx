@@ -8,6 +8,7 @@ import { paths } from '../../../config/paths'
 import type { Finder } from '../hooks/use-finder'
 import { countChambers, type RawSetup } from '../../../components/setup/edit-raw'
 import { readAssumed } from '../../../components/setup/assumed'
+import { spellBare } from '../../../components/setup/spell-bare'
 import { checkField, explainProblem } from '../../../components/setup/check-field'
 import { fieldId, listFieldGroups } from '../../../components/setup/field-groups'
 import { FieldControl } from '../../../components/setup/field-control'
@@ -39,12 +40,13 @@ export function ProblemSummary({ finder }: PlainFormProps) {
 export function PlainForm({ finder }: PlainFormProps) {
   const { state, plan, printer, visit } = finder
   const { system } = printer
-  const [texts, setTexts] = useState<RawSetup>(state.raw)
-  const wrong = new Map(visit.problems.map((problem) => [problem.path, problem.text]))
+  const [sent] = useState<RawSetup>(() => spellBare(state.raw, printer))
+  const [texts, setTexts] = useState<RawSetup>(sent)
+  const wrong = new Set(visit.problems.map(({ path }) => path))
   const chambers = countChambers(state.raw)
   const groups = listFieldGroups(state.kind, chambers)
   const asked = new Set(groups.flatMap(({ fields }) => fields.map(({ path }) => path)))
-  const kept = Object.entries(state.raw).filter(([path]) => !asked.has(path))
+  const kept = Object.entries(sent).filter(([path]) => !asked.has(path))
   return (
     <Form action={paths.find} method="get" preventScrollReset noValidate className="space-y-8">
       <input type="hidden" name="typed" value={system} />
@@ -67,7 +69,7 @@ export function PlainForm({ finder }: PlainFormProps) {
           <div className="mt-2 grid gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
             {fields.map(({ path, attribute }) => {
               const text = texts[path] ?? ''
-              const isAsSent = wrong.get(path) === text
+              const isAsSent = wrong.has(path) && sent[path] === text
               return (
                 <FieldControl
                   key={path}

@@ -6,7 +6,7 @@ import type { Printer } from '#shared/units/print'
 import { paths } from '../../../config/paths'
 import { useApp, usePreferences } from '../../../lib/app-context'
 import { usePrinter } from '../../../lib/use-printer'
-import { tankEntryQuery } from '../../../components/setup/tank-entry'
+import { gearEntryQuery } from '../../../components/setup/gear-entry'
 import { writeFinderState, type FinderState } from '../link/finder-state'
 import { readVisit, type Visit } from '../link/read-visit'
 import { findPlan } from '../../../components/setup/find-plan'
@@ -42,7 +42,7 @@ export function useFinder(): Finder {
   const visit = useMemo(() => readVisit(new URLSearchParams(search), system), [search, system])
   const { state, setup } = visit
   const slug = state.raw['tank.gear']
-  const tank = useQuery({ ...tankEntryQuery(api, slug ?? ''), enabled: slug !== undefined }).data
+  const tank = useQuery({ ...gearEntryQuery(api, slug ?? ''), enabled: slug !== undefined }).data
   const drawn = useMemo(() => findPlan(toEngineSetup(setup, tank)), [setup, tank])
   const given = useMemo(() => listGiven(visit, tank?.specs ?? {}), [visit, tank])
 
