@@ -8,6 +8,7 @@ import { presentAnswer } from './present-answer'
 import { groupByVerdict } from './ranking'
 import { drawScales } from './scales'
 import { sweep } from './sweep'
+import type { JudgeAnew } from './turns/find-turn'
 import type { Answer, FitOptions, FitResult, Piece, Setup } from './types'
 import { verdictOrder } from './verdict'
 
@@ -17,8 +18,15 @@ import { verdictOrder } from './verdict'
  */
 export function fitCheck(setup: Setup, piece: Piece, options: CandidateOptions = {}): Answer {
   const bench = setBench(setup, piece.kind, options)
-  return presentAnswer(bench.scene, assessCandidate(bench, piece, options), createPrinter(setup.units))
+  const assessed = assessCandidate(bench, piece, options)
+  return presentAnswer(bench.scene, assessed, createPrinter(setup.units), judgeInChanged(setup, piece, options))
 }
+
+/** The piece judged in the setup with one of its numbers changed. */
+const judgeInChanged =
+  (setup: Setup, piece: Piece, options: CandidateOptions): JudgeAnew =>
+  (change) =>
+    assessCandidate(setBench(change(setup), piece.kind, options), piece, options).verdict
 
 /**
  * Every piece of a kind judged in a setup and put in order: verdict, fewer knock-ons, closeness to the kind's target,
@@ -37,8 +45,8 @@ export function fit(
   const findRest = (candidate: Parameters<typeof findRestKnockOns>[1]) => findRestKnockOns(bench, candidate)
   const { found, ...listed } = listAnswers(swept, pieces, options, findRest, words)
   const answers = found.map(({ assessed, pieces: joined }) => {
-    const answer = presentAnswer(bench.scene, assessed, words)
-    return joined ? nameTogether(answer, joined) : answer
+    if (joined) return nameTogether(presentAnswer(bench.scene, assessed, words), joined)
+    return presentAnswer(bench.scene, assessed, words, judgeInChanged(setup, assessed.candidate.piece, options))
   })
   if (!options.scales) return { ...listed, answers }
   const groups = groupByVerdict(swept)

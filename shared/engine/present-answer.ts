@@ -4,6 +4,8 @@ import { getRules } from './checks/index'
 import { isDemand, presentKnockOns } from './knock-ons'
 import { presentCautions, presentCheck } from './present'
 import type { Scene } from './scene'
+import { findTurn, type JudgeAnew } from './turns/find-turn'
+import { presentTurn } from './turns/present-turn'
 import type { Answer } from './types'
 import { rateConfidence } from './verdict'
 
@@ -32,10 +34,17 @@ function summarise(
   return judged[0] ? presentCheck(judged[0], words).message : 'Nothing about it could be checked yet.'
 }
 
-export function presentAnswer(scene: Scene, assessed: AssessedCandidate, words: Printer): Answer {
+/** An answer in words; with `judgeAnew` also what would turn it. */
+export function presentAnswer(
+  scene: Scene,
+  assessed: AssessedCandidate,
+  words: Printer,
+  judgeAnew?: JudgeAnew,
+): Answer {
   const { candidate, judged, verdict, placement, knockOns } = assessed
   const { piece, quantity } = candidate
   const gear = piece.gear ?? null
+  const turn = judgeAnew && findTurn(scene, assessed, judgeAnew)
   return {
     gear,
     kind: piece.kind,
@@ -48,5 +57,6 @@ export function presentAnswer(scene: Scene, assessed: AssessedCandidate, words: 
     cautions: presentCautions(judged, words),
     confidence: rateConfidence(piece, judged),
     ...(placement && { place: placement }),
+    ...(turn && { turnsBy: presentTurn(turn, verdict, words) }),
   }
 }

@@ -176,6 +176,19 @@ export interface Placement {
   readonly angleDeg: number
 }
 
+/** The smallest change to one number of the setup that would turn a verdict. */
+export interface Turn {
+  /** Dotted path as in links: `tank.chambers.0.lengthMm`, `items.stand.specs.loadRatingKg`. */
+  readonly path: string
+  readonly from: number
+  readonly to: number
+  readonly unit: UcumCode
+  /** What the piece would then do. */
+  readonly verdict: 'fits' | 'changes'
+  /** "It would fit if the rear chamber were 12 mm longer." */
+  readonly message: string
+}
+
 export interface Answer {
   readonly gear: GearRef | null
   readonly kind: KindKey
@@ -189,6 +202,7 @@ export interface Answer {
   readonly cautions: readonly string[]
   readonly confidence: Confidence
   readonly place?: Placement
+  readonly turnsBy?: Turn
 }
 
 export interface Need {

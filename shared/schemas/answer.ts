@@ -45,6 +45,15 @@ const placementSchema = z.object({
   angleDeg: z.number(),
 })
 
+const turnSchema = z.object({
+  path: z.string(),
+  from: z.number(),
+  to: z.number(),
+  unit: z.string(),
+  verdict: z.enum(['fits', 'changes']),
+  message: z.string(),
+})
+
 export const answerSchema = z.object({
   gear: gearRefSchema.nullable(),
   kind: z.string(),
@@ -57,6 +66,8 @@ export const answerSchema = z.object({
   cautions: z.array(z.string()),
   confidence: z.object({ level: z.enum(['measured', 'maker', 'estimate', 'mixed']), closeCalls: z.number().int() }),
   place: placementSchema.optional(),
+  /** The smallest change to one number of the setup that would turn the verdict; absent where none would. */
+  turnsBy: turnSchema.optional(),
 })
 
 const assumptionSchema = z.object({

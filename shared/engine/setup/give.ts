@@ -20,6 +20,8 @@ function giveTank(tank: TankInput, [key = '', part = '', field = '']: readonly s
 export function giveValue(setup: Setup, path: string, value: Given): Setup {
   const [section = '', key = '', ...rest] = path.split('.')
   if (section === 'tank') return { ...setup, tank: giveTank(setup.tank, [key, ...rest], value) }
-  const was = setup[section as 'room' | 'mains' | 'water' | 'goals'] ?? {}
-  return { ...setup, [section]: { ...was, [key]: value } }
+  const was: Readonly<Record<string, unknown>> =
+    setup[section as 'room' | 'mains' | 'water' | 'goals' | 'support'] ?? {}
+  const whole = rest[0] === undefined ? value : (was[key] as readonly number[]).with(Number(rest[0]), value as number)
+  return { ...setup, [section]: { ...was, [key]: whole } }
 }
