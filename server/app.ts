@@ -21,6 +21,7 @@ import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
 import { createSetupRoutes } from './modules/setups/setups.routes'
 import { createSystemRoutes } from './modules/system/system.routes'
+import { createWorksheetRoutes } from './modules/worksheets/worksheets.routes'
 
 export interface AppDependencies {
   readonly db: Database
@@ -48,9 +49,13 @@ export function createApp(dependencies: AppDependencies): Express {
 
   const api = Router()
   api.use(refuseRepeatedKeys)
-  api.use(['/ask', '/fit', '/setups'], createRateLimit('calculations', rateLimits.calculationsPerMinute))
+  api.use(
+    ['/ask', '/fit', '/setups', '/worksheets'],
+    createRateLimit('calculations', rateLimits.calculationsPerMinute),
+  )
   api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
+  api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)

@@ -35,7 +35,8 @@ function createTextSchema(maxLength: number, word: true | undefined): z.ZodType<
   const schema = z
     .string({ error })
     .max(maxLength, { error })
-    .regex(/^[^\p{Cc}]*$/u, { error })
+    // Not a pattern: the API document would write its flag into it.
+    .refine((text) => !/\p{Cc}/u.test(text), { error })
     .refine((text) => text.trim() !== '', { error: 'must not be empty' })
   return word ? schema.regex(/^[\w-]+$/, { error: 'must be letters, digits, dashes and underscores only' }) : schema
 }

@@ -1,6 +1,7 @@
 import { Ajv2020 } from 'ajv/dist/2020.js'
 import request from 'supertest'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { worksheets } from '../../shared/engine/worksheets/registry'
 import { kindKeys } from '../../shared/kinds/index'
 import { kindListSchema } from '../../shared/schemas/kinds'
 import { startApp, type TestApp } from '../support/app'
@@ -70,12 +71,14 @@ describe('the OpenAPI document', () => {
       'get /api/v1/gear/{slug}/revisions',
       'get /api/v1/gear/{slug}/revisions/{number}',
       'get /api/v1/kinds',
+      'get /api/v1/worksheets',
       'get /health',
       'get /ready',
       'post /api/v1/ask',
       'post /api/v1/fit',
       'post /api/v1/fit/check',
       'post /api/v1/setups/report',
+      ...worksheets.map(({ name }) => `post /api/v1/worksheets/${name}`).sort(),
     ])
   })
 
@@ -104,7 +107,7 @@ describe('the OpenAPI document', () => {
 
   it('gives examples that work and fit their own schemas, as do the answers', async () => {
     const posts = operations().filter(({ method }) => method === 'post')
-    expect(posts).toHaveLength(4)
+    expect(posts).toHaveLength(4 + worksheets.length)
     for (const { path, operation } of posts) {
       const example = operation.requestBody?.content['application/json']?.example
       expectValid(example, 'paths', path, 'post', 'requestBody', 'content', 'application/json', 'schema')

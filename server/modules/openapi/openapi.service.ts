@@ -15,6 +15,7 @@ import { kindDescriptionSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
 import { setupSchema } from '#shared/schemas/setup'
 import { tankInputSchema } from '#shared/schemas/tank-input'
+import { workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
 import { hoistNamed } from './hoist-named'
 import { paths } from './paths'
 
@@ -46,6 +47,8 @@ const named = {
   Revision: revisionSchema,
   Setup: setupSchema,
   Tank: tankInputSchema,
+  Working: workingSchema,
+  WorksheetList: worksheetListSchema,
 }
 
 /** The library's own JSON for one schema: it only writes whole documents, so the schema is put into one and taken out. */

@@ -5,8 +5,10 @@ import { askRequestSchema, questionSchema } from '#shared/schemas/ask'
 import { fitCheckRequestSchema, fitRequestSchema, reportRequestSchema } from '#shared/schemas/fit'
 import { gearListSchema, gearSchema, revisionListSchema, revisionSchema, slugSchema } from '#shared/schemas/gear'
 import { describedGearQuerySchema } from './gear-query-description'
+import { worksheets } from '#shared/engine/worksheets/registry'
 import { kindListSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
+import { createWorksheetSchema, workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
 import { examples } from './examples'
 
 const problemTexts = {
@@ -120,6 +122,18 @@ export const paths: readonly RouteConfig[] = [
     examples.report,
     reportSchema,
   ]),
+  describeRead(
+    '/api/v1/worksheets',
+    'All calculations that can be worked out by themselves, what each is sent and what comes out of it',
+    worksheetListSchema,
+  ),
+  ...worksheets.map((sheet) =>
+    describeCalculation(`/api/v1/worksheets/${sheet.name}`, sheet.intro, [
+      createWorksheetSchema(sheet),
+      sheet.example,
+      workingSchema,
+    ]),
+  ),
   describeState('/health', 'Whether the process lives; asks nobody else'),
   describeState('/ready', 'Whether the process can answer: not while the database is away or it shuts down', 503),
 ]
