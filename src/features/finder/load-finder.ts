@@ -1,11 +1,15 @@
 import { data, redirect } from 'react-router-dom'
+import type { UnitSystem } from '#shared/units/systems'
 import type { App } from '../../lib/app-context'
 import { throwFailure } from '../../lib/loading'
+import { readingQuery } from './api/ask'
 import { fitCheckQuery } from './api/fit-check'
 import { isRefusal } from './api/fit'
 import { answersQuery, canAsk } from './api/requests'
 import { gearEntryQuery } from '../../components/setup/gear-entry'
-import { readVisit, type Visit } from './link/read-visit'
+import { writeFinderState } from './link/finder-state'
+import { readTypedQuestion, readVisit, type Visit } from './link/read-visit'
+import { toWishes } from './link/wishes'
 
 /** Starts everything that the page shows. */
 function startQueries({ api, queryClient }: App, visit: Visit): Promise<unknown>[] {
@@ -27,10 +31,25 @@ function isRefused({ api, queryClient }: App, visit: Visit): boolean {
   return first !== undefined && isRefusal(first)
 }
 
+/** The address that a question leads to. A piece that it names is lit, which takes the catalogue to tell. */
+async function followQuestion({ api, queryClient }: App, question: string, visit: Visit, system: UnitSystem) {
+  const { redirect: address } = visit
+  const read = await queryClient.fetchQuery(readingQuery(api, question, system)).catch(() => null)
+  if (!read?.gear) return address
+  const { slug } = read.gear
+  const kind = read.kind ?? visit.state.kind
+  return writeFinderState({ ...visit.state, kind, wishes: toWishes(read.filters), picked: slug }, system)
+}
+
 /** On the server the answers are waited for; in a browser the drawing changes at once and the answers follow. */
 export async function loadFinder(app: App, url: URL, path: string): Promise<unknown> {
-  const visit = readVisit(url.searchParams, app.preferences.get().system)
-  if (visit.redirect !== undefined) return redirect(`${path}?${visit.redirect}`)
+  const { system } = app.preferences.get()
+  const visit = readVisit(url.searchParams, system)
+  if (visit.redirect !== undefined) {
+    const question = readTypedQuestion(url.searchParams)
+    const address = question === '' ? visit.redirect : await followQuestion(app, question, visit, system)
+    return redirect(`${path}?${address}`)
+  }
   const started = startQueries(app, visit)
   if (!app.isServer) {
     // The page itself says what went wrong, beside what it could show.

@@ -46,6 +46,32 @@ describe('the address of the finder', () => {
     expect(Object.keys(state.raw).some((path) => path.startsWith('tank.chambers.1.'))).toBe(false)
   })
 
+  it('keeps what a question asks of the piece itself as wishes, which the answers are narrowed by', () => {
+    const { redirect } = read('q=titanium heater under 200 W for a 20 gallon')
+    const { state, filters, problems } = read(redirect!)
+    expect(redirect).toContain('wish.powerW=..200')
+    expect(state.wishes).toMatchObject({ powerW: '..200' })
+    expect(filters).toMatchObject({ powerW: [null, 200], form: 'titanium-rod' })
+    expect(problems).toEqual([])
+  })
+
+  it('drops the wishes for one kind where a form asks for another, and keeps them otherwise', () => {
+    expect(read('kind=light&of=heater&wish.powerW=..200').state.wishes).toEqual({})
+    expect(read('kind=heater&of=heater&wish.powerW=..200').filters).toEqual({ powerW: [null, 200] })
+  })
+
+  it.each([
+    ['wish.powerW=lots', /power.*must be a range/],
+    ['wish.powerW=200..100', /power.*lower end/],
+    ['wish.shininess=high', /shininess.*is not a filter/],
+    ['wish.brand=Anyone', /brand.*is no measure/],
+    ['wish.form=titanium-rod,glass-rod', /must be one value/],
+  ])('names a wish that cannot be granted: %s', (query, words) => {
+    const { problems, filters } = read(`kind=heater&${query}`)
+    expect(problems.map(({ path, detail }) => `${path} ${detail}`).join()).toMatch(words)
+    expect(filters).toEqual({})
+  })
+
   it('falls back to heaters for an unknown kind and passes over a forged view', () => {
     const { state } = read('kind=dragon&show=everything&check=DROP TABLE&picked=../../etc')
     expect(state).toMatchObject({ kind: 'heater', opened: null, picked: null })
@@ -54,7 +80,23 @@ describe('the address of the finder', () => {
   it('comes to rest after one redirect whatever the address holds', () => {
     const keys = fc.constantFrom(
       ...setupFields.map(({ path }) => path.replace('*', '0')),
-      ...['q', 'kind', 'asked', 'show', 'check', 'picked', 'more', 'cursor', 'typed', 'units', 'utm', 'tank.nope'],
+      ...[
+        'q',
+        'kind',
+        'asked',
+        'show',
+        'check',
+        'picked',
+        'more',
+        'cursor',
+        'typed',
+        'units',
+        'utm',
+        'tank.nope',
+        'of',
+        'wish.powerW',
+        'wish.nope',
+      ],
     )
     const texts = fc.oneof(
       fc.constantFrom('20 gal', '4 1/2 in', '60F', 'us', 'metric', 'heater', 'no', 'soft,lps', '50%', '<b>', '1e99'),

@@ -1,7 +1,8 @@
 import { Link } from 'react-router-dom'
+import { LetGoLink } from '../../../components/ui/let-go-link'
 import type { Browse } from '../hooks/use-browse'
 import { withoutFilter } from '../link/browse-state'
-import { describeFilter } from '../model/describe-filter'
+import { describeFilter } from '../../../lib/describe-filter'
 
 /** What the list is narrowed by, each with a way to let go of it. */
 export function ActiveFilters({ browse }: { readonly browse: Browse }) {
@@ -15,23 +16,7 @@ export function ActiveFilters({ browse }: { readonly browse: Browse }) {
         const words = describeFilter(kind, key, text, printer)
         return (
           <li key={key} className="max-w-full">
-            <Link
-              to={hrefOf(withoutFilter(state, key))}
-              preventScrollReset
-              className="inline-flex min-h-8 max-w-full items-center gap-2 rounded-ui border-[1.5px] border-action bg-action-soft px-2.5 hover:border-ink"
-            >
-              <span className="min-w-0 truncate">{words}</span>
-              <svg
-                width="10"
-                height="10"
-                viewBox="0 0 10 10"
-                role="img"
-                aria-label="remove"
-                className="flex-none stroke-current"
-              >
-                <path d="m1 1 8 8m0-8-8 8" strokeWidth="1.5" />
-              </svg>
-            </Link>
+            <LetGoLink to={hrefOf(withoutFilter(state, key))}>{words}</LetGoLink>
           </li>
         )
       })}

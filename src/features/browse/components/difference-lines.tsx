@@ -3,7 +3,7 @@ import type { GearItem } from '#shared/schemas/gear'
 import { toShown } from '#shared/units/convert'
 import type { Printer } from '#shared/units/print'
 import type { MeasureDifference } from '../model/compare-pieces'
-import { unknownText } from '../model/cell-text'
+import { unknownText } from '../../../lib/describe-filter'
 import { PieceLetter } from './piece-letter'
 
 export interface DifferenceLinesProps {

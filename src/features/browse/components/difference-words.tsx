@@ -1,6 +1,6 @@
 import type { GearItem } from '#shared/schemas/gear'
 import type { WordDifference } from '../model/compare-pieces'
-import { unknownText } from '../model/cell-text'
+import { unknownText } from '../../../lib/describe-filter'
 import { PieceLetter } from './piece-letter'
 
 export interface DifferenceWordsProps {

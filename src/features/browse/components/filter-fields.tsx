@@ -3,7 +3,7 @@ import type { Facet, GearList } from '#shared/schemas/gear'
 import { listFilterable, type FilterableAttribute } from '#shared/schemas/gear-filters'
 import { roleTitles } from '../../../lib/role-titles'
 import type { Browse } from '../hooks/use-browse'
-import { listOptions } from '../model/describe-filter'
+import { listOptions } from '../../../lib/describe-filter'
 import { OptionFilter } from './option-filter'
 import { RangeFilter } from './range-filter'
 

@@ -5,7 +5,7 @@ import { buttonClass } from '../../../components/ui/button-class'
 import { EmptyState } from '../../../components/ui/empty-state'
 import type { Browse } from '../hooks/use-browse'
 import { withoutFilter } from '../link/browse-state'
-import { describeFilter } from '../model/describe-filter'
+import { describeFilter } from '../../../lib/describe-filter'
 
 const mostOffered = 3
 

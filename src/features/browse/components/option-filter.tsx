@@ -1,7 +1,7 @@
 import type { Facet } from '#shared/schemas/gear'
 import type { Option } from '#shared/kinds/types'
 import type { FilterProblem } from '../link/read-ranges'
-import { unknownText } from '../model/cell-text'
+import { unknownText } from '../../../lib/describe-filter'
 import { FilterCheck } from './filter-check'
 
 export interface OptionFilterProps {

@@ -1,6 +1,6 @@
 import { Link } from 'react-router-dom'
 import type { Browse } from '../hooks/use-browse'
-import { findFilterable } from '../model/describe-filter'
+import { findFilterable } from '../../../lib/describe-filter'
 
 const names: Readonly<Record<string, string>> = { kind: 'Kind', sort: 'Order', compare: 'Comparison', brand: 'Brand' }
 

@@ -1,7 +1,7 @@
 import { percent, placePercent } from '../../../components/drawings/scale-domain'
 import type { Printer } from '#shared/units/print'
 import type { CanonicalUnit } from '#shared/units/units'
-import type { Range } from '../link/read-ranges'
+import type { Range } from '../../../lib/ranges'
 
 export interface RangeLineProps {
   readonly bounds: readonly [number | null, number | null]

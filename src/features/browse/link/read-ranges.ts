@@ -3,6 +3,7 @@ import type { KindKey } from '#shared/kinds/index'
 import type { MeasureAttribute } from '#shared/kinds/types'
 import { readMeasure } from '#shared/units/read'
 import type { UnitSystem } from '#shared/units/systems'
+import { parseRange, writeRange } from '../../../lib/ranges'
 
 export type End = 'from' | 'to'
 
@@ -13,27 +14,6 @@ export interface FilterProblem {
   readonly end?: End
   readonly text: string
   readonly detail: string
-}
-
-export interface Range {
-  readonly from: number | null
-  readonly to: number | null
-}
-
-const rangePattern = /^(-?\d+(?:\.\d+)?)?\.\.(-?\d+(?:\.\d+)?)?$/
-
-/** `50..150`, `50..`, `..150` as numbers; null for anything else. */
-export function parseRange(text: string | undefined): Range | null {
-  const [whole, from, to] = rangePattern.exec(text ?? '') ?? []
-  if (whole === undefined) return null
-  return { from: from === undefined ? null : Number(from), to: to === undefined ? null : Number(to) }
-}
-
-// Nine decimals are as many as the API reads; a millionth of a millimetre is finer than any tape.
-const writeNumber = (value: number): string => String(Number(value.toFixed(9)))
-
-export function writeRange({ from, to }: Range): string {
-  return `${from === null ? '' : writeNumber(from)}..${to === null ? '' : writeNumber(to)}`
 }
 
 export const endKey = (key: string, end: End): string => `${key}.${end}`

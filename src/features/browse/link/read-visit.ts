@@ -5,7 +5,8 @@ import { createPrinter } from '#shared/units/print'
 import type { UnitSystem } from '#shared/units/systems'
 import { defaultColumns, listColumns } from '../model/columns'
 import { mostCompared, ownKeys, writeBrowseState, type BrowseState } from './browse-state'
-import { endKey, parseRange, readRanges, type FilterProblem } from './read-ranges'
+import { parseRange } from '../../../lib/ranges'
+import { endKey, readRanges, type FilterProblem } from './read-ranges'
 
 export interface Visit {
   readonly state: BrowseState

@@ -2,8 +2,6 @@ import type { FieldAttribute } from '#shared/kinds/types'
 import type { Printer } from '#shared/units/print'
 import { printValue } from '#shared/kinds/print-value'
 
-export const unknownText = 'not recorded yet'
-
 /** A value under a header that already says its unit; null where nobody has recorded it. */
 export function printCell(attribute: FieldAttribute, value: unknown, printer: Printer): string | null {
   if (value === undefined) return null

@@ -1,5 +1,5 @@
 import type { KindKey } from '#shared/kinds/index'
-import { findFilterable } from './describe-filter'
+import { findFilterable } from '../../../lib/describe-filter'
 
 const plain: Readonly<Record<string, string>> = {
   relevance: 'how well it matches',

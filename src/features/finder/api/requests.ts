@@ -11,12 +11,13 @@ const pageSize = 6
 export const canAsk = ({ setup }: Visit): boolean => hasTankSize(setup)
 
 /** The list of one verdict; that of those that fit also brings scales, counts and assumptions. */
-export function answersQuery(api: ApiClient, { setup, state }: Visit, verdict: Verdict) {
+export function answersQuery(api: ApiClient, { setup, filters, state }: Visit, verdict: Verdict) {
   const { kind, opened, from } = state
   const check = opened?.verdict === verdict ? opened.check : undefined
   const request: FitRequest = {
     setup,
     kind,
+    ...(Object.keys(filters).length > 0 && { filters }),
     verdict,
     limit: pageSize,
     ...(check !== undefined && { check }),

@@ -24,6 +24,7 @@ import { RefusalNotice } from './refusal-notice'
 import { Scales } from './scales'
 import { SetupValues } from './setup-values'
 import { TankForm } from './tank-form'
+import { WishChips } from './wish-chips'
 
 interface Editing {
   readonly path: string
@@ -71,10 +72,11 @@ export function Finder() {
           asked={state.asked}
           example="heater for a 20 gallon with a 4 x 5 x 12 inch rear chamber, room gets down to 60 F"
         >
-          <HiddenFields state={state} without={['asked']} />
+          <HiddenFields state={state} without={['asked', 'wishes']} />
         </QuestionBox>
       </div>
       <ReadingChips finder={finder} onEdit={edit} />
+      <WishChips finder={finder} />
       <div className="mt-4 space-y-4">
         <ProblemSummary finder={finder} />
         {refusal && <RefusalNotice refusal={refusal} finder={finder} />}
@@ -111,6 +113,7 @@ export function Finder() {
               fits={fits}
               changes={changes}
               openedList={openedList}
+              apart={isPickedListed ? null : chosen}
               lit={pointed ?? state.picked}
               onPoint={setPointed}
             />

@@ -12,6 +12,7 @@ import { spellBare } from '../../../components/setup/spell-bare'
 import { checkField, explainProblem } from '../../../components/setup/check-field'
 import { fieldId, listFieldGroups } from '../../../components/setup/field-groups'
 import { FieldControl } from '../../../components/setup/field-control'
+import { HiddenFields } from './hidden-fields'
 
 export interface PlainFormProps {
   readonly finder: Finder
@@ -50,7 +51,7 @@ export function PlainForm({ finder }: PlainFormProps) {
   return (
     <Form action={paths.find} method="get" preventScrollReset noValidate className="space-y-8">
       <input type="hidden" name="typed" value={system} />
-      {state.asked && <input type="hidden" name="asked" value={state.asked} />}
+      <HiddenFields state={state} without={['kind', 'setup']} />
       {kept.map(([path, text]) => (
         <input key={path} type="hidden" name={path} value={text} />
       ))}

@@ -14,9 +14,8 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
   const { state, printer } = finder
   const question = useMemo(() => readQuestion(state.asked, printer.system), [state.asked, printer.system])
   if (state.asked === '') return null
-  const { understood, ignored, filters } = question
+  const { understood, ignored } = question
   const isOtherKind = question.kind !== null && question.kind !== state.kind
-  const isFiltered = Object.keys(filters).length > 0
   // A chamber is one thing in a question, whichever of its sizes comes first.
   const groupOf = (path: string) => (/^tank\.chambers\.\d+\./.test(path) ? path.split('.').slice(0, 3).join('.') : path)
   return (
@@ -65,11 +64,6 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
           {ignored.length === 0 ? 'nothing left over' : `not used: ${ignored.map((word) => `“${word}”`).join(', ')}`}
         </li>
       </ul>
-      {isFiltered && (
-        <p className="mt-1 text-ink-soft">
-          Wishes about the piece itself are read but do not narrow the answers yet; look for them in each answer.
-        </p>
-      )}
       {question.intent === 'missing' && (
         <p className="mt-1 text-ink-soft">
           What a whole setup lacks is not answered yet. Meanwhile each kind can be asked for by itself, in the heading.

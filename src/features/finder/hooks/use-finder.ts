@@ -46,8 +46,11 @@ export function useFinder(): Finder {
   const drawn = useMemo(() => findPlan(toEngineSetup(setup, tank)), [setup, tank])
   const given = useMemo(() => listGiven(visit, tank?.specs ?? {}), [visit, tank])
 
-  const hrefOf = (change: Partial<FinderState>) =>
-    `${paths.find}?${writeFinderState({ ...state, from: null, ...change }, system)}`
+  const hrefOf = (change: Partial<FinderState>) => {
+    // Another kind has other attributes to wish for.
+    const wishes = change.kind === undefined || change.kind === state.kind ? state.wishes : {}
+    return `${paths.find}?${writeFinderState({ ...state, wishes, from: null, ...change }, system)}`
+  }
   return {
     visit,
     state,

@@ -3,6 +3,7 @@ import { isKindKey, type KindKey } from '#shared/kinds/index'
 import { writeSetupLink } from '#shared/schemas/setup-link'
 import type { UnitSystem } from '#shared/units/systems'
 import type { RawSetup } from '../../../components/setup/edit-raw'
+import { listWishEntries, readWishes, type Wishes } from './wishes'
 
 /** Which answers beside those that fit are shown: a whole verdict, or those that one check decides. */
 export interface Opened {
@@ -22,6 +23,7 @@ export interface FinderState {
   /** The question that was last read, as typed; empty if none. */
   readonly asked: string
   readonly raw: RawSetup
+  readonly wishes: Wishes
   readonly opened: Opened | null
   /** Slug of the piece that is drawn and lit. */
   readonly picked: string | null
@@ -49,22 +51,25 @@ function readFrom(params: URLSearchParams): From | null {
 }
 
 export function readFinderState(params: URLSearchParams, raw: RawSetup): FinderState {
-  const kind = params.get('kind') ?? ''
+  const text = params.get('kind') ?? ''
+  const kind = isKindKey(text) ? text : startingKind
   const picked = params.get('picked')
   return {
-    kind: isKindKey(kind) ? kind : startingKind,
+    kind,
     asked: (params.get('asked') ?? '').slice(0, longestQuestion),
     raw,
+    wishes: readWishes(params, kind),
     opened: readOpened(params),
     picked: picked !== null && /^[a-z0-9-]{1,120}$/.test(picked) ? picked : null,
     from: readFrom(params),
   }
 }
 
-/** The one address of a state, without its path: kind, question, setup, then what is opened. */
+/** The one address of a state, without its path: kind, question, wishes, setup, then what is opened. */
 export function writeFinderState(state: FinderState, system: UnitSystem): string {
   const own = new URLSearchParams({ kind: state.kind })
   if (state.asked) own.set('asked', state.asked)
+  for (const [key, wish] of listWishEntries(state.wishes)) own.set(key, wish)
   const view = new URLSearchParams()
   if (state.opened) view.set('show', state.opened.verdict)
   if (state.opened?.check) view.set('check', state.opened.check)

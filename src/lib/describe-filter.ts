@@ -5,8 +5,9 @@ import { listFilterable, type FilterableAttribute } from '#shared/schemas/gear-f
 import { toShown } from '#shared/units/convert'
 import { createPrinter, type Printer } from '#shared/units/print'
 import { readMeasure } from '#shared/units/read'
-import { parseRange } from '../link/read-ranges'
-import { unknownText } from './cell-text'
+import { parseRange } from './ranges'
+
+export const unknownText = 'not recorded yet'
 
 const exact = { exact: true } as const
 const metric = createPrinter('metric')
