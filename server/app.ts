@@ -50,7 +50,7 @@ export function createApp(dependencies: AppDependencies): Express {
   const api = Router()
   api.use(refuseRepeatedKeys)
   api.use(
-    ['/ask', '/fit', '/setups', '/worksheets'],
+    ['/ask', '/fit', '/replacements', '/setups', '/worksheets'],
     createRateLimit('calculations', rateLimits.calculationsPerMinute),
   )
   api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))

@@ -77,6 +77,7 @@ describe('the OpenAPI document', () => {
       'post /api/v1/ask',
       'post /api/v1/fit',
       'post /api/v1/fit/check',
+      'post /api/v1/replacements',
       'post /api/v1/setups/report',
       ...worksheets.map(({ name }) => `post /api/v1/worksheets/${name}`).sort(),
     ])
@@ -107,7 +108,7 @@ describe('the OpenAPI document', () => {
 
   it('gives examples that work and fit their own schemas, as do the answers', async () => {
     const posts = operations().filter(({ method }) => method === 'post')
-    expect(posts).toHaveLength(4 + worksheets.length)
+    expect(posts).toHaveLength(5 + worksheets.length)
     for (const { path, operation } of posts) {
       const example = operation.requestBody?.content['application/json']?.example
       expectValid(example, 'paths', path, 'post', 'requestBody', 'content', 'application/json', 'schema')

@@ -24,5 +24,20 @@ export const examples = {
       specs: { powerW: 100, lengthMm: { value: 240, source: 'measured', plusMinus: 1 }, diameterMm: 24 },
     },
   },
+  replacements: {
+    setup: {
+      ...setup,
+      items: [
+        {
+          id: 'heater',
+          kind: 'heater',
+          specs: { form: 'titanium-rod', powerW: 100, lengthMm: 210, diameterMm: 19, thermostat: 'external-included' },
+          state: 'gone',
+        },
+      ],
+    },
+    itemId: 'heater',
+    limit: 5,
+  },
   report: { setup },
 } as const

@@ -13,6 +13,7 @@ import {
 } from '#shared/schemas/gear'
 import { kindDescriptionSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
+import { replacementSchema, replacementsRequestSchema, replacementsSchema } from '#shared/schemas/replacements'
 import { setupSchema } from '#shared/schemas/setup'
 import { tankInputSchema } from '#shared/schemas/tank-input'
 import { workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
@@ -43,6 +44,9 @@ const named = {
   Problem: problemSchema,
   Provenance: provenanceSchema,
   Question: questionSchema,
+  Replacement: replacementSchema,
+  Replacements: replacementsSchema,
+  ReplacementsRequest: replacementsRequestSchema,
   Report: reportSchema,
   Revision: revisionSchema,
   Setup: setupSchema,

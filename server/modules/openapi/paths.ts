@@ -9,6 +9,7 @@ import { worksheets } from '#shared/engine/worksheets/registry'
 import { kindListSchema } from '#shared/schemas/kinds'
 import { problemSchema } from '#shared/schemas/problem'
 import { createWorksheetSchema, workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
+import { replacementsRequestSchema, replacementsSchema } from '#shared/schemas/replacements'
 import { examples } from './examples'
 
 const problemTexts = {
@@ -117,6 +118,11 @@ export const paths: readonly RouteConfig[] = [
     examples.fitCheck,
     answerSchema,
   ]),
+  describeCalculation(
+    '/api/v1/replacements',
+    'What can take the place of an item that is gone, what changes with it, and what has to be added',
+    [replacementsRequestSchema, examples.replacements, replacementsSchema],
+  ),
   describeCalculation('/api/v1/setups/report', 'Every check, need and budget of a whole setup', [
     reportRequestSchema,
     examples.report,
