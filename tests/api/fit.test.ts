@@ -62,6 +62,22 @@ describe('POST /api/v1/fit', () => {
     expect(unknown?.checks.find(({ id }) => id === 'heater.power')?.missing).toContain('powerW')
   })
 
+  it('says with which one number of the setup changed a piece would fit, and keeps that word', async () => {
+    const check = async (asked: object) =>
+      answerSchema.parse((await post('/fit/check', { setup: asked, piece: rod }).expect(200)).body)
+    const rod = { kind: 'heater', specs: { ...wholeHeater, lengthMm: 310, orientation: 'vertical' } }
+    const { chambers, ...tank } = { ...setup.tank, outerHeightMm: 500 }
+    const deep = (waterDepthMm: number) => ({
+      ...setup,
+      tank: { ...tank, chambers: [{ ...chambers[0], waterDepthMm }] },
+    })
+    const { verdict, turnsBy } = await check(deep(290))
+    expect(verdict).toBe('no')
+    expect(turnsBy).toMatchObject({ path: 'tank.chambers.0.waterDepthMm', from: 290, unit: 'mm' })
+    expect((await check(deep(turnsBy?.to ?? 0))).verdict).toBe(turnsBy?.verdict)
+    expect((await check(deep(309))).verdict).toBe('no')
+  })
+
   it('keeps to one verdict, or to those that one check fails, and counts over all', async () => {
     const all = await findAll({})
     const no = await findAll({ verdict: 'no' })

@@ -81,6 +81,21 @@ describe('the finder page', () => {
     expect(view.address()).toContain('show=no&check=heater.space')
   })
 
+  it('says what would make a piece fit, and tries it with one press', async () => {
+    // A heater of 520 mm stands in no 12 in of water, and this tank is 24 in high.
+    const sizes = 'tank.outerLengthMm=16%20in&tank.outerWidthMm=12%20in&tank.outerHeightMm=24%20in'
+    const view = renderApp(`${address.replace('tank.volumeL=20%20gal', sizes)}&show=no`, createFakeServer())
+    await screen.findByText('Invented · Long 100')
+    const line = screen.getByText(/It would fit/)
+    expect(line.textContent?.replaceAll('\u00a0', ' ')).toMatch(
+      /^It would fit( with changes)? if the water in the rear chamber were 8.5 in deeper. Try it$/,
+    )
+    fireEvent.click(within(line).getByRole('link', { name: 'Try it' }))
+    // 12 in and 8.5 in are 520.7 mm.
+    await waitFor(() => expect(view.address()).toContain('tank.chambers.0.waterDepthMm=20.5%20in'))
+    await screen.findByText(/, 0 do not fit, 1 lack data/)
+  })
+
   it('picks a piece on the scales by keyboard and shows its answer beside them', async () => {
     const view = renderApp(address, createFakeServer())
     await findShort()

@@ -11,7 +11,9 @@ import type { Finder } from '../hooks/use-finder'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { CheckItem } from '../../../components/setup/check-item'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
+import { findTrial } from '../../../components/setup/find-trial'
 import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
+import { TurnLine } from '../../../components/setup/turn-line'
 
 export interface AnswerCardProps {
   readonly answer: Answer
@@ -34,12 +36,13 @@ function countKnockOns(count: number): string {
 /** One piece with its verdict, the sentence, what else changes, and every check behind it. */
 export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], onPoint }: AnswerCardProps) {
   const [isOpen, setIsOpen] = useState(false)
-  const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence } = answer
-  const { printer, plan, given, hrefOf } = finder
+  const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence, turnsBy } = answer
+  const { printer, plan, given, hrefOf, state } = finder
   const deciding = findDecidingCheck(checks)
   const cautions = answer.cautions.filter((caution) => !saidAbove.includes(caution))
   const quantity = pieces[0]?.quantity ?? 1
   const slug = gear?.slug ?? null
+  const trial = turnsBy && findTrial(turnsBy, state.raw, printer)
   return (
     <li
       id={slug === null ? undefined : `answer-${slug}`}
@@ -69,6 +72,7 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
           </h4>
           <p className="text-sm text-ink-soft">{describeSpecs(kind, bareSpecs(answer), printer)}</p>
           <p className="mt-1">{summary}</p>
+          {turnsBy && <TurnLine turn={turnsBy} href={trial && hrefOf({ raw: trial, picked: slug })} />}
           <p className="mt-1 flex flex-wrap gap-x-4 text-sm text-ink-soft">
             <span className={`font-semibold ${verdictTextClasses[verdict]}`}>{verdictWords[verdict]}</span>
             {confidence.closeCalls > 0 && (
