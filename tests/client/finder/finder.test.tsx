@@ -93,7 +93,7 @@ describe('the finder page', () => {
     fireEvent.click(within(line).getByRole('link', { name: 'Try it' }))
     // 12 in and 8.5 in are 520.7 mm.
     await waitFor(() => expect(view.address()).toContain('tank.chambers.0.waterDepthMm=20.5%20in'))
-    await screen.findByText(/, 0 do not fit, 1 lack data/)
+    await screen.findByText('3 fit, 0 with changes, 0 do not fit, 0 lack data.')
   })
 
   it('picks a piece on the scales by keyboard and shows its answer beside them', async () => {
