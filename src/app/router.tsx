@@ -34,6 +34,7 @@ export function createRoutes(app: App): RouteObject[] {
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
             { id: 'setup-new', path: paths.setupNew, lazy: createLazy(app, () => import('./routes/setup-new')) },
             { id: 'setup', path: paths.setup, lazy: createLazy(app, () => import('./routes/setup-link')) },
+            { id: 'swap', path: '/setups/link/swap/:itemId', lazy: createLazy(app, () => import('./routes/swap')) },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],

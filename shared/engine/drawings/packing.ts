@@ -1,4 +1,5 @@
 import { bodied, footprintOf } from '../checks/body-space'
+import type { KindKey } from '../../kinds/index'
 import type { Rectangle } from '../physics/geometry'
 import { packRectangles, type Packing } from '../physics/packing'
 import { describeDisplay, findBasins, type Basin } from '../setup/places'
@@ -69,6 +70,13 @@ function standBody(item: Item, placements: Placements): Standing | undefined {
   return sides && { item, sides, heightMm: readNumber(item.piece.specs, 'heightMm') ?? null }
 }
 
+/** Chambers are often called by what is meant to stand in them. */
+const kindWords: Readonly<Partial<Record<KindKey, string>>> = {
+  heater: 'heater',
+  'return-pump': 'pump',
+  skimmer: 'skimmer',
+}
+
 const expand = (standing: readonly Standing[]): readonly Standing[] =>
   standing.flatMap((one) => Array.from({ length: one.item.quantity }, () => one))
 
@@ -122,7 +130,9 @@ function shareOut(plan: Plan, basins: readonly Basin[], placements: Placements):
       const company = [...(shares.get(id) ?? []), item].flatMap((one) => standBody(one, placements) ?? [])
       return pack(expand(company), sides).outcome === 'fits'
     }
-    const usual = item.piece.kind === 'wavemaker' ? 'display' : (basins.find(hasRoom) ?? basins[0])?.id
+    const named = basins.filter(({ name }) => name.toLowerCase().includes(kindWords[item.piece.kind] ?? ''))
+    const usual =
+      item.piece.kind === 'wavemaker' ? 'display' : (named.find(hasRoom) ?? basins.find(hasRoom) ?? basins[0])?.id
     const id = judged ?? usual
     if (id !== undefined) add(id, item)
   }

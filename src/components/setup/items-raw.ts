@@ -45,10 +45,10 @@ export const dropItem = (raw: RawSetup, id: string): RawSetup =>
   Object.fromEntries(Object.entries(raw).filter(([path]) => !isOf(path, id)))
 
 /** A free id that says what it is: `heater`, `heater-2`. */
-function chooseId(raw: RawSetup, kind: KindKey): string {
+function chooseId(raw: RawSetup, word: string): string {
   const taken = new Set(listItems(raw).map(({ id }) => id))
-  let id: string = kind
-  for (let number = 2; taken.has(id); number += 1) id = `${kind}-${number}`
+  let id = word
+  for (let number = 2; taken.has(id); number += 1) id = `${word}-${number}`
   return id
 }
 
@@ -68,6 +68,21 @@ export function addItem(raw: RawSetup, kind: KindKey, slug: string | null, quant
       [`items.${id}.kind`]: kind,
       ...(slug !== null && { [`items.${id}.gear`]: slug }),
       ...(quantity > 1 && { [`items.${id}.quantity`]: String(quantity) }),
+    },
+  }
+}
+
+/** Puts a piece in that is yet to be bought; `word` says what it is for where its kind is not at hand. */
+export function planItem(raw: RawSetup, word: string, kind: KindKey | null, slug: string, quantity: number): Added {
+  const id = chooseId(raw, word)
+  return {
+    id,
+    raw: {
+      ...raw,
+      ...(kind !== null && { [`items.${id}.kind`]: kind }),
+      [`items.${id}.gear`]: slug,
+      ...(quantity > 1 && { [`items.${id}.quantity`]: String(quantity) }),
+      [`items.${id}.state`]: 'planned',
     },
   }
 }
