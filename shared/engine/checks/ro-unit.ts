@@ -37,7 +37,7 @@ interface Feed {
 }
 
 /** Pressure at the membrane, kPa: its rated one behind a booster of its own, a booster's outlet, else the tap's. */
-function findPressureKPa({ plan }: Scene, specs: Specs, { hasOwnBooster, others }: Feed): number {
+export function findPressureKPa({ plan }: Scene, specs: Specs, { hasOwnBooster, others }: Feed): number {
   const { feedKPa } = plan.water
   if (hasOwnBooster) return Math.max(feedKPa, readNumber(specs, 'testPressureKPa') ?? feedKPa)
   const booster = findBooster(others)

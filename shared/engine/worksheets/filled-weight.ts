@@ -11,6 +11,7 @@ import type { Step, Worksheet, WorksheetField } from './types'
 
 interface Values {
   readonly salinityPpt?: number
+  readonly temperatureC?: number
   readonly rockKg?: number
   readonly sandDepthMm?: number
   readonly standKg?: number
@@ -18,9 +19,10 @@ interface Values {
   readonly standWidthMm?: number
 }
 
-function withGoals(setup: Setup, { salinityPpt, rockKg, sandDepthMm }: Values): Setup {
+function withGoals(setup: Setup, { salinityPpt, temperatureC, rockKg, sandDepthMm }: Values): Setup {
   const said = {
     ...(salinityPpt !== undefined && { salinityPpt }),
+    ...(temperatureC !== undefined && { temperatureC }),
     ...(rockKg !== undefined && { rockKg }),
     ...(sandDepthMm !== undefined && { sandDepthMm }),
   }
@@ -72,6 +74,7 @@ function listWeightSteps({ tank, goals }: Plan, weight: FilledWeight): readonly 
 
 const fields: readonly WorksheetField[] = [
   fromSetupField('salinityPpt', 'goals.salinityPpt'),
+  fromSetupField('temperatureC', 'goals.temperatureC'),
   fromSetupField('rockKg', 'goals.rockKg'),
   fromSetupField('sandDepthMm', 'goals.sandDepthMm'),
   fromKind('standKg', 'stand', 'massKg', { label: 'mass of the stand' }),

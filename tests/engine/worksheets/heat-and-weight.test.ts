@@ -108,7 +108,7 @@ describe('the worksheet of a filled tank', () => {
       waterLineMm: 0.95 * 588,
       material: 'glass',
     },
-    goals: { temperatureC: 25 },
+    temperatureC: 25,
     salinityPpt: 35,
     rockKg: 0,
     sandDepthMm: 0,
