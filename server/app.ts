@@ -45,7 +45,7 @@ export function createApp(dependencies: AppDependencies): Express {
   app.set('trust proxy', env.TRUST_PROXY)
   app.use(assignNonce, createRequestLog(logger), createSecurityHeaders(isHttps), refuseOddMethods, refuseDotFiles)
   app.use(compression())
-  app.use(createSystemRoutes(db, lifecycle))
+  app.use(createSystemRoutes(db, catalogue, lifecycle))
 
   const api = Router()
   api.use(refuseRepeatedKeys)

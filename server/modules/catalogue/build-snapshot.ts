@@ -21,31 +21,49 @@ export interface Snapshot {
   readonly entries: readonly CatalogueEntry[]
 }
 
-function toEntry(row: PieceRow, kind: KindKey): CatalogueEntry {
+/** Gives the same object for equal values: thousands of pieces are alike in most of what is known of them. */
+function createSharer(): (value: unknown, source: Value['source'], plusMinus: number | undefined) => Value {
+  const known = new Map<string, Value>()
+  return (value, source, plusMinus) => {
+    const key = JSON.stringify([value, source, plusMinus])
+    let shared = known.get(key)
+    if (!shared) {
+      shared = { value, source, ...(plusMinus !== undefined && { plusMinus }) }
+      known.set(key, shared)
+    }
+    return shared
+  }
+}
+
+type Share = ReturnType<typeof createSharer>
+
+function toEntry(row: PieceRow, kind: KindKey, share: Share): CatalogueEntry {
   const specs: Record<string, Value> = {}
   for (const [key, value] of Object.entries(row.specs)) {
     const backing = row.provenance[key]
-    specs[key] = {
-      value,
-      source: backing?.source ?? 'estimate',
-      ...(backing?.plusMinus !== undefined && { plusMinus: backing.plusMinus }),
-    }
+    specs[key] = share(value, backing?.source ?? 'estimate', backing?.plusMinus)
   }
   const { id, slug, brand, model, status } = row
   const gear = { slug, brand, model }
   return { id, kind, piece: { kind, specs, gear }, gear, status, updatedAt: row.updatedAt.getTime() }
 }
 
-export function buildSnapshot(version: number, rows: readonly PieceRow[]): Snapshot {
+/** Takes rows as they come, in the order of their ids. */
+export function createSnapshotBuilder() {
   const byKind = Object.fromEntries(kindKeys.map((key) => [key, [] as Piece[]])) as Record<KindKey, Piece[]>
   const bySlug = new Map<string, Piece>()
   const entries: CatalogueEntry[] = []
-  for (const row of rows) {
-    if (!isKindKey(row.kind)) continue
-    const entry = toEntry(row, row.kind)
-    entries.push(entry)
-    byKind[row.kind].push(entry.piece)
-    bySlug.set(row.slug, entry.piece)
+  const share = createSharer()
+  return {
+    add(rows: readonly PieceRow[]): void {
+      for (const row of rows) {
+        if (!isKindKey(row.kind)) continue
+        const entry = toEntry(row, row.kind, share)
+        entries.push(entry)
+        byKind[row.kind].push(entry.piece)
+        bySlug.set(row.slug, entry.piece)
+      }
+    },
+    finish: (version: number): Snapshot => ({ version, byKind, bySlug, entries }),
   }
-  return { version, byKind, bySlug, entries }
 }

@@ -1,4 +1,4 @@
-import { asc, eq, sql } from 'drizzle-orm'
+import { asc, eq, gt, sql } from 'drizzle-orm'
 import type { Database } from '../../db/database'
 import { catalogueVersion, gear } from '../../db/schema/index'
 
@@ -23,17 +23,28 @@ const pieceColumns = {
   provenance: gear.provenance,
 }
 
-export type PieceRow = Awaited<ReturnType<typeof readCatalogue>>['rows'][number]
+/** So many rows are in memory at once as they come, beside what is made of them. */
+const rowsAtOnce = 5000
 
-/** All gear and the version that it makes, seen at one moment. */
-export async function readCatalogue(db: Database) {
+const listRows = (db: Database, after: number) =>
+  db.select(pieceColumns).from(gear).where(gt(gear.id, after)).orderBy(asc(gear.id)).limit(rowsAtOnce)
+
+export type PieceRow = Awaited<ReturnType<typeof listRows>>[number]
+
+/** All gear, some at a time, and the version that it makes: seen at one moment. */
+export async function readCatalogue(db: Database, take: (rows: readonly PieceRow[]) => void): Promise<number> {
   return db.transaction(
     async (tx) => {
       // Reading everything may take longer than a visitor's query is allowed to.
       await tx.execute(sql`set local statement_timeout = '60s'`)
       const version = await readVersion(tx)
-      const rows = await tx.select(pieceColumns).from(gear).orderBy(asc(gear.id))
-      return { version, rows }
+      for (let after = 0; ;) {
+        const rows = await listRows(tx, after)
+        take(rows)
+        const last = rows.at(-1)
+        if (last === undefined || rows.length < rowsAtOnce) return version
+        after = last.id
+      }
     },
     { isolationLevel: 'repeatable read', accessMode: 'read only' },
   )

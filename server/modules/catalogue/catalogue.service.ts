@@ -1,5 +1,5 @@
 import type { Database } from '../../db/database'
-import { buildSnapshot, type Snapshot } from './build-snapshot'
+import { createSnapshotBuilder, type Snapshot } from './build-snapshot'
 import { readCatalogue, readVersion } from './catalogue.queries'
 
 export interface Catalogue {
@@ -16,8 +16,8 @@ export function createCatalogue(db: Database, now: () => number = Date.now): Cat
   let pending: Promise<Snapshot> | null = null
 
   async function load(): Promise<Snapshot> {
-    const { version, rows } = await readCatalogue(db)
-    return buildSnapshot(version, rows)
+    const builder = createSnapshotBuilder()
+    return builder.finish(await readCatalogue(db, (rows) => builder.add(rows)))
   }
 
   async function refresh(): Promise<Snapshot> {
