@@ -35,6 +35,11 @@ export function createRoutes(app: App): RouteObject[] {
             { id: 'setup-new', path: paths.setupNew, lazy: createLazy(app, () => import('./routes/setup-new')) },
             { id: 'setup', path: paths.setup, lazy: createLazy(app, () => import('./routes/setup-link')) },
             { id: 'swap', path: '/setups/link/swap/:itemId', lazy: createLazy(app, () => import('./routes/swap')) },
+            {
+              id: 'setup-sheet',
+              path: paths.measuringSheet,
+              lazy: createLazy(app, () => import('./routes/setup-sheet')),
+            },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],

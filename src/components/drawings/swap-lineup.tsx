@@ -1,34 +1,10 @@
-import type { Specs, Verdict } from '#shared/engine/types'
 import type { KindKey } from '#shared/kinds/index'
 import type { Printer } from '#shared/units/print'
-import { placeRod } from './place-rod'
-import { RodShape } from './rod-shape'
 import { DrawingSheet } from './drawing-sheet'
-import { labelPx } from './dimension-layout'
+import { SwapCell } from './swap-cell'
+import { frontOf, type LinedUp, type Surrounding } from './swap-layout'
 import { gridStepMm } from './tank-layout'
-import type { RodDrawing } from './tank-drawing'
-import { longestThatFits } from './text-width'
 import { useContainerWidth } from './use-container-width'
-
-/** One of those that are drawn side by side. */
-export interface LinedUp {
-  readonly letter: string
-  readonly name: string
-  readonly specs: Specs
-  /** Null: what is gone. */
-  readonly verdict: Verdict | null
-  readonly place?: Pick<RodDrawing, 'chamber' | 'position' | 'angleDeg'> | undefined
-}
-
-/** What all of them have to do with, seen from the front: water of a chamber around them, or a length over or under them. */
-export interface Surrounding {
-  readonly name: string
-  readonly lengthMm: number
-  /** Left out: a length alone, drawn under the pieces. */
-  readonly heightMm?: number
-  /** Front to back, for rods that lean that way. */
-  readonly widthMm?: number
-}
 
 export interface SwapLineupProps {
   readonly kind: KindKey
@@ -42,27 +18,6 @@ const belowPx = 34
 const gapPx = 22
 const tallestPx = 230
 const edgePx = 12
-
-const frontKeys: Readonly<Partial<Record<KindKey, readonly [string, string]>>> = {
-  tank: ['outerLengthMm', 'outerHeightMm'],
-  stand: ['topLengthMm', 'heightMm'],
-  heater: ['diameterMm', 'lengthMm'],
-}
-
-const read = (specs: Specs, key: string): number | null => {
-  const value = specs[key]?.value
-  return typeof value === 'number' ? value : null
-}
-
-interface Front {
-  readonly lengthMm: number | null
-  readonly heightMm: number | null
-}
-
-function frontOf(kind: KindKey, specs: Specs): Front {
-  const [across, up] = frontKeys[kind] ?? ['lengthMm', 'heightMm']
-  return { lengthMm: read(specs, across), heightMm: read(specs, up) }
-}
 
 /** Whether any of them has a size that can be drawn from the front. */
 export const canLineUp = (kind: KindKey, pieces: readonly LinedUp[]): boolean =>
@@ -82,8 +37,6 @@ export function describeLineup({ kind, pieces, surrounding, printer }: SwapLineu
       : `Around each, the water of the ${surrounding.name}: ${printer.size([surrounding.lengthMm, surrounding.heightMm])}.`)
   return [...lines, around].filter(Boolean).join(' ')
 }
-
-const outlines = { fits: 'stroke-fits', changes: 'stroke-changes', no: 'stroke-no', unknown: 'stroke-unknown' } as const
 
 /** What is gone and what could take its place, from the front, side by side to one scale, each where it would stand. */
 export function SwapLineup(props: SwapLineupProps) {
@@ -109,88 +62,16 @@ export function SwapLineup(props: SwapLineupProps) {
       isInteractive={false}
     >
       <g aria-hidden="true">
-        {pieces.map(({ letter, verdict, place }, at) => {
-          const front = fronts[at] ?? { lengthMm: null, heightMm: null }
-          const x = startX + at * (cellPx + gapPx)
-          const middle = x + cellPx / 2
-          const around = surrounding && {
-            x: middle - (surrounding.lengthMm * pxPerMm) / 2,
-            width: surrounding.lengthMm * pxPerMm,
-          }
-          const width = (front.lengthMm ?? 0) * pxPerMm
-          const height = (front.heightMm ?? highMm / 4) * pxPerMm
-          const stroke = verdict === null ? 'stroke-ink-soft' : outlines[verdict]
-          const rod: RodDrawing | null =
-            kind === 'heater' && front.lengthMm !== null && front.heightMm !== null
-              ? {
-                  chamber: place?.chamber ?? '',
-                  position: place?.position ?? 'upright',
-                  angleDeg: place?.angleDeg ?? 90,
-                  lengthMm: front.heightMm,
-                  diameterMm: front.lengthMm,
-                  ...(verdict !== null && { verdict }),
-                }
-              : null
-          const seen =
-            rod && placeRod(rod, { lengthMm: surrounding?.lengthMm ?? cellMm, widthMm: surrounding?.widthMm ?? cellMm })
-          const word = longestThatFits(verdict === null ? ['gone', '×'] : [letter], cellPx + gapPx - 4, labelPx + 2)
+        {pieces.map((piece, at) => {
+          const middle = startX + at * (cellPx + gapPx) + cellPx / 2
           return (
-            <g key={letter}>
-              {around && surrounding.heightMm !== undefined && (
-                <>
-                  <rect
-                    {...around}
-                    y={floorY - surrounding.heightMm * pxPerMm}
-                    height={surrounding.heightMm * pxPerMm}
-                    className="fill-water"
-                  />
-                  <path
-                    d={`M${around.x} ${floorY - surrounding.heightMm * pxPerMm - 8}V${floorY}h${around.width}V${floorY - surrounding.heightMm * pxPerMm - 8}`}
-                    fill="none"
-                    strokeWidth="1.5"
-                    className="stroke-ink"
-                  />
-                </>
-              )}
-              {around && surrounding.heightMm === undefined && (
-                <path d={`M${around.x} ${floorY + 6}h${around.width}`} strokeWidth="3" className="stroke-action" />
-              )}
-              {rod && seen ? (
-                <RodShape
-                  x={middle}
-                  y={floorY - (seen.heightMm / 2) * pxPerMm}
-                  lengthPx={seen.seenLengthMm * pxPerMm}
-                  thickPx={rod.diameterMm * pxPerMm}
-                  angleDeg={seen.seenAngleDeg}
-                  {...(verdict !== null && { verdict })}
-                />
-              ) : front.lengthMm === null ? (
-                <text x={middle} y={floorY - 12} textAnchor="middle" fontSize={labelPx} className="fill-ink-soft">
-                  ?
-                </text>
-              ) : (
-                <rect
-                  x={middle - width / 2}
-                  y={floorY - height}
-                  width={Math.max(2, width)}
-                  height={Math.max(2, height)}
-                  strokeWidth="2"
-                  fillOpacity="0.75"
-                  strokeDasharray={verdict === null || front.heightMm === null ? '5 4' : undefined}
-                  className={`fill-sheet ${stroke}`}
-                />
-              )}
-              <text
-                x={middle}
-                y={floorY + 24}
-                textAnchor="middle"
-                fontSize={labelPx + 2}
-                fontWeight="700"
-                className={verdict === null ? 'fill-ink-soft' : 'fill-ink'}
-              >
-                {word}
-              </text>
-            </g>
+            <SwapCell
+              key={piece.letter}
+              kind={kind}
+              piece={piece}
+              surrounding={surrounding}
+              space={{ middle, floorY, pxPerMm, cellPx: cellPx + gapPx, cellMm, highMm }}
+            />
           )
         })}
       </g>

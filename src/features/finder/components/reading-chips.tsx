@@ -1,6 +1,9 @@
 import { useMemo } from 'react'
+import { Link } from 'react-router-dom'
 import { readQuestion } from '#shared/engine/ask/read-question'
 import { kinds } from '#shared/kinds/index'
+import { writeSetupHref } from '../../../components/setup/setup-href'
+import { paths } from '../../../config/paths'
 import type { Finder } from '../hooks/use-finder'
 import { fieldId } from '../../../components/setup/field-groups'
 
@@ -66,7 +69,11 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
       </ul>
       {question.intent === 'missing' && (
         <p className="mt-1 text-ink-soft">
-          What a whole setup lacks is not answered yet. Meanwhile each kind can be asked for by itself, in the heading.
+          What a whole setup lacks is told by{' '}
+          <Link to={writeSetupHref(paths.setup, state.raw, printer.system)} className="link">
+            the report on it
+          </Link>
+          .
         </p>
       )}
       {question.intent === 'replace' && (

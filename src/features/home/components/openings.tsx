@@ -11,19 +11,19 @@ const openings = [
   },
   {
     title: 'What replaces it?',
-    text: 'Say what the gone piece was and what it stood in. Everything that could take its place comes ranked, with what else would have to change.',
-    href: `${paths.find}?${new URLSearchParams({ q: 'replacement heater for a 20 gallon tank' }).toString()}`,
-    action: 'Try it with a heater',
+    text: 'Describe the setup and mark the piece as gone. Everything that could take its place comes ranked, with what else would have to change.',
+    href: `${paths.setupNew}#gear`,
+    action: 'Name what is gone',
   },
   {
     title: 'What is missing?',
-    text: 'A report on a whole setup is on the way. Until it is here, ask for one kind at a time: a heater without a thermostat already says what it still needs.',
-    href: `${paths.find}?kind=temperature-controller`,
-    action: 'Start with a controller',
+    text: 'List what you have. The report on the whole setup names the essentials it lacks, adds up plugs, watts, heat and weight, and is a link to share.',
+    href: paths.setupNew,
+    action: 'Describe my setup',
   },
 ] as const
 
-/** The three questions, each a dimension line leading to where it is answered today. */
+/** The three questions, each a dimension line leading to where it is answered. */
 export function Openings() {
   return (
     <ul className="mt-12 grid gap-x-8 gap-y-10 md:grid-cols-3">

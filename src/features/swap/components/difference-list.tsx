@@ -4,6 +4,21 @@ import { DifferenceLine } from '../../../components/drawings/difference-line'
 const senseWords = { better: 'better', worse: 'worse', different: 'different' } as const
 const senseClasses = { better: 'text-fits', worse: 'text-changes', different: 'text-ink-soft' } as const
 
+const longest = 160
+
+/** The message begins with the label, which stands over it already; chambers one by one are for whoever asks. */
+function Words({ label, message }: Pick<Difference, 'label' | 'message'>) {
+  const start = `${label}: `.toLowerCase()
+  const text = message.toLowerCase().startsWith(start) ? message.slice(start.length) : message
+  if (text.length <= longest) return <p className="text-ink-soft">{text}</p>
+  return (
+    <details className="text-ink-soft">
+      <summary className="min-h-6 text-action">Read both</summary>
+      {text}
+    </details>
+  )
+}
+
 /** In what a candidate is not like what is gone, each on a line of its own where it is a number. */
 export function DifferenceList({ differences }: { readonly differences: readonly Difference[] }) {
   if (differences.length === 0) return <p className="text-sm">The same in everything that is recorded of both.</p>
@@ -20,7 +35,7 @@ export function DifferenceList({ differences }: { readonly differences: readonly
               <DifferenceLine from={from} to={to} sense={sense} />
             </div>
           )}
-          <p className="text-ink-soft">{message}</p>
+          <Words label={label} message={message} />
         </li>
       ))}
     </ul>

@@ -1,7 +1,7 @@
 import type { Plan } from '#shared/engine/setup/plan'
 import type { Placement } from '#shared/engine/types'
 import type { KindKey } from '#shared/kinds/index'
-import type { Surrounding } from '../../../components/drawings/swap-lineup'
+import type { Surrounding } from '../../../components/drawings/swap-layout'
 
 const inChamber: ReadonlySet<KindKey> = new Set<KindKey>(['heater', 'return-pump', 'skimmer', 'auto-top-off'])
 
