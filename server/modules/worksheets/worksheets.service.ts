@@ -7,7 +7,7 @@ import { createPrinter } from '#shared/units/print'
 import type { UnitSystem } from '#shared/units/systems'
 import { AppError, createInvalidError } from '../../lib/errors'
 import { toPointer } from '../../lib/to-issues'
-import { buildSnapshot } from '../catalogue/build-snapshot'
+import { createSnapshotBuilder } from '../catalogue/build-snapshot'
 import type { Catalogue } from '../catalogue/catalogue.service'
 import { expandSetup } from '../setups/expand-setup'
 import { presentWorking, presentWorksheet } from './worksheets.presenter'
@@ -22,7 +22,7 @@ export function requireWorksheet(name: string): Worksheet {
   throw new AppError('not-found', `There is no worksheet by that name. There are: ${names}.`)
 }
 
-const emptyCatalogue = buildSnapshot(0, [])
+const emptyCatalogue = createSnapshotBuilder().finish(0)
 
 /** The parts of a setup among the inputs as the engine reads them; the catalogue is asked only for a tank named by slug. */
 async function readParts(catalogue: Catalogue, parts: Partial<SetupParsed>, units: UnitSystem): Promise<Setup> {
