@@ -79,6 +79,9 @@ export function assessCandidate(bench: Bench, piece: Piece, options: CandidateOp
   return complete(bench, candidate, judged, verdict, rest)
 }
 
+/** Where the tank itself is replaced, all else can follow it: also of one that its stand does not carry that is told. */
+export const isFrame = ({ kind, gone }: Bench): boolean => kind === 'tank' && gone !== undefined
+
 export function complete(
   bench: Bench,
   candidate: Candidate,
@@ -88,7 +91,7 @@ export function complete(
 ): AssessedCandidate {
   const placement = findPlacement(judged)
   const asked = judged.filter(({ rule }) => !isConceded(bench, rule.id))
-  const knockOns = own === 'no' ? [] : [...listDemands(asked), ...rest]
+  const knockOns = own === 'no' && !isFrame(bench) ? [] : [...listDemands(asked), ...rest]
   const verdict = weighKnockOns(own, rest.filter(isDemand).length)
   return { candidate, judged, verdict, knockOns, ...(placement && { placement }) }
 }

@@ -1,7 +1,7 @@
 import { getAttribute } from '../kinds/index'
 import type { Printer } from '../units/print'
 import { listAssumptions } from './assumptions'
-import { complete } from './candidates'
+import { complete, isFrame } from './candidates'
 import { getRules } from './checks/index'
 import { assessJoint, type Joint } from './joint'
 import type { RawKnockOn } from './knock-ons'
@@ -58,7 +58,9 @@ export function listAnswers(
     const candidate = swept.candidateOf(index)
     const judged = swept.judgedOf(index)
     const own = decideVerdict(judged)
-    return { assessed: complete(bench, candidate, judged, own, own === 'no' ? [] : findRest(candidate)) }
+    return {
+      assessed: complete(bench, candidate, judged, own, own === 'no' && !isFrame(bench) ? [] : findRest(candidate)),
+    }
   })
   const { kind } = bench
   const labels = new Map(getRules(kind).rules.map(({ id, failLabel }) => [id, failLabel]))

@@ -1,6 +1,6 @@
 import type { Catalogue } from '#shared/engine/swap/add-ons'
 import type { Piece } from '#shared/engine/types'
-import { kindKeys } from '#shared/kinds/index'
+import { kindKeys, type KindKey } from '#shared/kinds/index'
 import { seedPieces } from '../../seeds/gear/index'
 import { createSlug } from '../../server/modules/gear/slug'
 import { listStates } from '../seeds/merge'
@@ -13,17 +13,18 @@ const demoPieces: readonly Piece[] = seedPieces.map((piece) => {
   return { kind, specs, gear: { slug: slug ?? createSlug(brand, model), brand, model } }
 })
 
+/** A catalogue of these pieces alone. */
+export const catalogueOf = (...pieces: readonly Piece[]): Catalogue =>
+  Object.fromEntries(kindKeys.map((key) => [key, pieces.filter(({ kind }) => kind === key)])) as Record<
+    KindKey,
+    Piece[]
+  >
+
 /** The newest state of every piece of the demo catalogue, as the engine reads it. */
-export const demoCatalogue = Object.fromEntries(
-  kindKeys.map((key) => [key, demoPieces.filter(({ kind }) => kind === key)]),
-) as Catalogue
+export const demoCatalogue = catalogueOf(...demoPieces)
 
 export function findDemo(slug: string): Piece {
   const found = demoPieces.find(({ gear }) => gear?.slug === slug)
   if (!found) throw new Error(`the demo catalogue has no ${slug}`)
   return found
 }
-
-/** A catalogue of these pieces alone. */
-export const catalogueOf = (...pieces: readonly Piece[]): Catalogue =>
-  Object.fromEntries(kindKeys.map((key) => [key, pieces.filter(({ kind }) => kind === key)])) as Catalogue

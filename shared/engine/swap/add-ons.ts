@@ -17,8 +17,8 @@ export type Extras = readonly Item[]
 const mostOptions = 3
 /** Pieces that meet a need at a glance and are looked at closely together. */
 const batch = 12
-/** Several of one piece, where a need has an amount. */
-const mostAlike = 4
+/** Several of one piece: two (one controller to switch a heater, another to cut it off), more where a need has an amount. */
+const mostAlike = { plain: 2, amount: 4 }
 /** An add-on may ask for another (a booster pump for an outlet), and that for a third. */
 const mostSteps = 3
 
@@ -128,8 +128,8 @@ class Search {
   }
 
   run(): readonly Extras[] {
-    const hasAmount = this.asked.some(({ amount }) => amount !== null)
-    for (let quantity = 1; quantity <= (hasAmount ? mostAlike : 1) && quantity < this.fewest; quantity += 1) {
+    const most = this.asked.some(({ amount }) => amount !== null) ? mostAlike.amount : mostAlike.plain
+    for (let quantity = 1; quantity <= most && quantity < this.fewest; quantity += 1) {
       const later = this.findAlone(quantity)
       if (this.options.length > 0 || this.step >= mostSteps) continue
       for (const first of later) {

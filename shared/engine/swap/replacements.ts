@@ -1,11 +1,12 @@
 import { createPrinter, type Printer } from '../../units/print'
 import { canSeat, findRestChanges, setSwapBench, type Bench, type GonePiece } from '../bench'
-import type { AssessedCandidate } from '../candidates'
+import { assessCandidate, isFrame, type AssessedCandidate, type CandidateOptions } from '../candidates'
 import { nameTogether } from '../joint'
 import { listAnswers } from '../list-answers'
 import { presentAnswer } from '../present-answer'
 import type { Candidate } from '../rule'
 import { sweep, type SweepOptions } from '../sweep'
+import type { JudgeAnew } from '../turns/find-turn'
 import type { FitOptions, Piece, Setup } from '../types'
 import { findOptions, groupNeeds, type Catalogue } from './add-ons'
 import { findDifferences } from './differences'
@@ -14,15 +15,19 @@ import { assessBefore, assessOutfit, createOutfit, findNew, type Outfit, type St
 import { findPackCount } from './quantity'
 import type { AddOn, GearCount, Gone, Replacement, ReplacementsResult } from './types'
 
+const describeSeat = ({ item: { place, mountHeightMm } }: GonePiece): CandidateOptions => ({
+  ...(place && { place }),
+  ...(mountHeightMm !== undefined && { mountHeightMm }),
+})
+
 /** In the place of what is gone, so many of it as there were; the gone piece itself is no replacement. */
-function describeSweep({ item }: GonePiece): SweepOptions {
-  const { piece, quantity, place, mountHeightMm } = item
-  const countOf = findPackCount(item)
+function describeSweep(gone: GonePiece): SweepOptions {
+  const { piece, quantity } = gone.item
+  const countOf = findPackCount(gone.item)
   const slug = piece.gear?.slug
   return {
+    ...describeSeat(gone),
     there: quantity,
-    ...(place && { place }),
-    ...(mountHeightMm !== undefined && { mountHeightMm }),
     ...(countOf && { countOf }),
     ...(slug !== undefined && { isLeftOut: ({ gear }: Piece) => gear?.slug === slug }),
   }
@@ -33,6 +38,7 @@ const toGearCounts = (extras: readonly { piece: Piece; quantity: number }[]): re
 
 /** What every answer on a page is told against. */
 interface Told {
+  readonly setup: Setup
   readonly bench: Bench
   readonly gone: GonePiece
   readonly before: State
@@ -49,18 +55,28 @@ function findAddOns(outfit: Outfit, after: State, { before, catalogue, words }: 
   }))
 }
 
-function presentReplacement(assessed: AssessedCandidate, told: Told): Replacement {
+/** The piece judged in the same place of the setup with one of its numbers changed. */
+function judgeInChanged({ setup, gone }: Told, { piece, quantity }: Candidate): JudgeAnew {
+  const options = { ...describeSeat(gone), quantity }
+  return (change) => {
+    const bench = setSwapBench(change(setup), gone.item.id)
+    return bench ? assessCandidate(bench, piece, options).verdict : 'unknown'
+  }
+}
+
+function presentReplacement(assessed: AssessedCandidate, told: Told, isJoint: boolean): Replacement {
   const { bench, gone, before, words } = told
-  const { candidate, knockOns, verdict } = assessed
   const { scene, kind } = bench
+  const { candidate, knockOns, verdict } = assessed
+  const judgeAnew = isJoint ? undefined : judgeInChanged(told, candidate)
   const differences = findDifferences(kind, gone.item.piece.specs, candidate.piece.specs, words)
-  if (verdict === 'no' || !canSeat(bench, candidate))
-    return { ...presentAnswer(scene, assessed, words), addOns: [], differences }
+  if ((verdict === 'no' && !isFrame(bench)) || !canSeat(bench, candidate))
+    return { ...presentAnswer(scene, assessed, words, judgeAnew), addOns: [], differences }
   const outfit = createOutfit(bench, candidate)
   const after = assessOutfit(outfit)
   const all = [...knockOns, ...findFreed(outfit, before, after)]
   return {
-    ...presentAnswer(scene, { ...assessed, knockOns: all }, words),
+    ...presentAnswer(scene, { ...assessed, knockOns: all }, words, judgeAnew),
     addOns: findAddOns(outfit, after, told),
     differences,
   }
@@ -91,9 +107,9 @@ export function replacements(
   const swept = sweep(bench, pieces, describeSweep(gone))
   const findRest = (candidate: Candidate) => findRestChanges(bench, candidate)
   const { found, ...listed } = listAnswers(swept, pieces, options, findRest, words)
-  const told: Told = { bench, gone, before: assessBefore(bench), catalogue, words }
+  const told: Told = { setup, bench, gone, before: assessBefore(bench), catalogue, words }
   const answers = found.map(({ assessed, pieces: joined }) => {
-    const answer = presentReplacement(assessed, told)
+    const answer = presentReplacement(assessed, told, joined !== undefined)
     return joined ? { ...answer, ...nameTogether(answer, joined) } : answer
   })
   return { gone: describeGone(gone), ...listed, answers }
