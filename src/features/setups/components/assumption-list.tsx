@@ -50,12 +50,10 @@ export function AssumptionList({ shown, onEdit, editHref }: AssumptionListProps)
         <Link
           to={hrefOf(changeRaw(visit.raw, confirmed))}
           preventScrollReset
+          aria-label={`That is right: ${label}, ${text}`}
           className="link col-start-2 min-h-6 justify-self-end print:hidden"
         >
           That is right
-          <span className="sr-only">
-            : {label}, {text}
-          </span>
         </Link>
       </li>
     )

@@ -1,6 +1,5 @@
 import { Link } from 'react-router-dom'
-import { listItems } from '../../../components/setup/items-raw'
-import { dropItem } from '../../../components/setup/items-raw'
+import { dropItem, listItems } from '../../../components/setup/items-raw'
 import { writeSetupHref } from '../../../components/setup/setup-href'
 import { buttonClass } from '../../../components/ui/button-class'
 import { paths } from '../../../config/paths'
@@ -23,10 +22,10 @@ export function GoneList({ shown }: { readonly shown: SetupReport }) {
             <span className="flex flex-wrap gap-2 print:hidden">
               <Link
                 to={writeSetupHref(paths.swap(id), visit.raw, printer.system)}
+                aria-label={`What replaces it? ${nameOf(id)}`}
                 className={buttonClass({ size: 'sm', variant: 'primary' })}
               >
                 What replaces it?
-                <span className="sr-only"> {nameOf(id)}</span>
               </Link>
               <Link to={hrefOf(withoutState(id))} className={buttonClass({ size: 'sm' })}>
                 It is there after all

@@ -75,8 +75,16 @@ export function ItemFields({ item, name, about, chambers, form }: ItemFieldsProp
           )}
         </>
       )}
-      <Button type="submit" size="sm" className="mt-4" formAction={paths.setupNew} name="drop" value={id}>
-        Take it out<span className="sr-only">: {name}</span>
+      <Button
+        type="submit"
+        size="sm"
+        className="mt-4"
+        formAction={paths.setupNew}
+        name="drop"
+        value={id}
+        aria-label={`Take it out: ${name}`}
+      >
+        Take it out
       </Button>
     </fieldset>
   )

@@ -64,11 +64,15 @@ export function PieceSearch({ name, label, hint, text, kind, found, addLabel }: 
                     {isKindKey(own) ? describeSpecs(own, specs, printer) : own}
                   </span>
                 </span>
-                <Button type="submit" size="sm" formAction={paths.setupNew} name="add" value={`${own}.${slug}`}>
+                <Button
+                  type="submit"
+                  size="sm"
+                  formAction={paths.setupNew}
+                  name="add"
+                  value={`${own}.${slug}`}
+                  aria-label={`${addLabel}: ${brand} ${model}`}
+                >
                   {addLabel}
-                  <span className="sr-only">
-                    : {brand} {model}
-                  </span>
                 </Button>
               </li>
             ))}

@@ -28,8 +28,12 @@ function Option({ addOn, pieces, answer, swap }: AddOnListProps & { addOn: AddOn
         ))}
       </span>
       {href !== null && (
-        <Link to={href} className={buttonClass({ size: 'sm' })}>
-          Put both in<span className="sr-only">, with {pieces.map(nameOf).join(' and ')}</span>
+        <Link
+          to={href}
+          aria-label={`Put both in, with ${pieces.map(nameOf).join(' and ')}`}
+          className={buttonClass({ size: 'sm' })}
+        >
+          Put both in
         </Link>
       )}
     </li>

@@ -83,9 +83,12 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
             </div>
           )}
           {href !== null && (
-            <Link to={href} className={`print:hidden ${buttonClass({ variant: 'primary' })}`}>
+            <Link
+              to={href}
+              aria-label={['Put this one in', gear && `${gear.brand} ${gear.model}`].filter(Boolean).join(': ')}
+              className={`print:hidden ${buttonClass({ variant: 'primary' })}`}
+            >
               Put this one in
-              <span className="sr-only">{gear ? `: ${gear.brand} ${gear.model}` : ''}</span>
             </Link>
           )}
         </div>
