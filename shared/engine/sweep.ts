@@ -127,7 +127,8 @@ function addUp(bench: Bench, tables: Tables, first: Table, own: Int8Array, deman
       const code = toCode(coded)
       if (code > own[index]!) own[index] = code
       if (code === codes.change) demands[index]! += demand
-      if (wouldSeveralDo(coded)) several[index] = 1
+      // Of what is gone more would have been better too: its replacement takes its place one for one.
+      if (wouldSeveralDo(coded) && demand === 1) several[index] = 1
     }
   })
   const found: number[] = []
