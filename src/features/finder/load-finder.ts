@@ -12,14 +12,17 @@ import { readTypedQuestion, readVisit, type Visit } from './link/read-visit'
 import { toWishes } from './link/wishes'
 
 /** Starts everything that the page shows. */
-function startQueries({ api, queryClient }: App, visit: Visit): Promise<unknown>[] {
+function startQueries({ api, queryClient, preferences }: App, visit: Visit): Promise<unknown>[] {
   const { state, setup } = visit
   const slug = state.raw['tank.gear']
   const tank = slug === undefined ? [] : [queryClient.prefetchQuery(gearEntryQuery(api, slug))]
-  if (!canAsk(visit)) return tank
+  const { system } = preferences.get()
+  const reading = state.asked === '' ? [] : [queryClient.prefetchQuery(readingQuery(api, state.asked, system))]
+  if (!canAsk(visit)) return [...tank, ...reading]
   const verdicts = ['changes', ...(state.opened ? [state.opened.verdict] : [])] as const
   return [
     ...tank,
+    ...reading,
     queryClient.fetchInfiniteQuery(answersQuery(api, visit, 'fits')),
     ...verdicts.map((verdict) => queryClient.fetchInfiniteQuery(answersQuery(api, visit, verdict))),
     ...(state.picked === null ? [] : [queryClient.fetchQuery(fitCheckQuery(api, setup, state.picked))]),

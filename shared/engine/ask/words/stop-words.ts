@@ -14,7 +14,7 @@ export const stopWords: ReadonlySet<string> = new Set(
     'temperatures degrees degree reef marine saltwater salt-water aquarium aquariums tank tanks piece unit gear equipment come comes coming ' +
     'run runs running set setting setup system my build building start starting started currently now today soon hobby beginner newbie first ' +
     'near nearly almost within more less much many lot lots bit little other another else both such own same too enough option options ' +
-    'available around sits sit sitting stand-alone stands holds hold holding keep keeps keeping kept after before because since while ' +
+    'available around sits sit sitting stand-alone stands holds hold holding carry carries carrying bear bears keep keeps keeping kept after before because since while ' +
     'during whenever until though although however well oh um er lol btw fyi imo ty tia place location area spot space room possible ideally ' +
     "ideal perfect proper correct year years time times day days week weeks month months gets got's lets wondering wonder curious try trying tried give given gives " +
     "show me am pm give people person friend every always usually normally typically x vs versus eg ie etc ones there'll cost decide choose pick choosing " +

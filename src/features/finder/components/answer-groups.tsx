@@ -1,5 +1,4 @@
 import { Link } from 'react-router-dom'
-import type { Answer } from '#shared/engine/types'
 import type { FitAnswer } from '#shared/schemas/answer'
 import { getKind } from '#shared/kinds/index'
 import { CautionBox } from '../../../components/ui/caution-box'
@@ -8,7 +7,6 @@ import type { Answers } from '../hooks/use-answers'
 import type { Finder } from '../hooks/use-finder'
 import type { Opened } from '../link/finder-state'
 import { findSharedCautions } from '../model/shared-cautions'
-import { AnswerCard } from './answer-card'
 import { AnswerList } from './answer-list'
 import { GroupHeading } from './group-heading'
 import { ReasonChips, type Reason } from './reason-chips'
@@ -18,8 +16,6 @@ export interface AnswerGroupsProps {
   readonly fits: Answers
   readonly changes: Answers
   readonly openedList: Answers
-  /** The piece that was asked about, where no group lists it. */
-  readonly apart: Answer | null
   readonly lit: string | null
   readonly onPoint: (slug: string | null) => void
 }
@@ -84,7 +80,7 @@ function Nothing({ finder, first }: { readonly finder: Finder; readonly first: F
 }
 
 /** The answers in four groups, the best first; what does not fit is counted by reason and opens. */
-export function AnswerGroups({ finder, fits, changes, openedList, apart, lit, onPoint }: AnswerGroupsProps) {
+export function AnswerGroups({ finder, fits, changes, openedList, lit, onPoint }: AnswerGroupsProps) {
   const { first } = fits
   const { opened } = finder.state
   const saidAbove = findSharedCautions([...fits.answers, ...changes.answers])
@@ -93,16 +89,6 @@ export function AnswerGroups({ finder, fits, changes, openedList, apart, lit, on
   return (
     <div className="mt-10 space-y-10">
       {saidAbove.length > 0 && <CautionBox title="For every answer that fits:">{saidAbove.join(' ')}</CautionBox>}
-      {apart && (
-        <section className={groupClass} aria-labelledby="asked-about">
-          <h3 id="asked-about" className="font-heading text-lg font-bold">
-            The piece you asked about
-          </h3>
-          <ol>
-            <AnswerCard answer={apart} isLit isPicked {...{ finder, saidAbove, onPoint }} />
-          </ol>
-        </section>
-      )}
       {first && isNothing && <Nothing finder={finder} first={first} />}
       {!isNothing && (
         <section className={groupClass}>

@@ -113,7 +113,6 @@ export function Finder() {
               fits={fits}
               changes={changes}
               openedList={openedList}
-              apart={isPickedListed ? null : chosen}
               lit={pointed ?? state.picked}
               onPoint={setPointed}
             />

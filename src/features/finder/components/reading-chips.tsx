@@ -1,9 +1,15 @@
 import { useMemo } from 'react'
+import { useQuery } from '@tanstack/react-query'
 import { Link } from 'react-router-dom'
 import { readQuestion } from '#shared/engine/ask/read-question'
 import { kinds } from '#shared/kinds/index'
+import type { AskAnswer } from '#shared/schemas/ask'
+import type { RawSetup } from '../../../components/setup/edit-raw'
+import { addItem } from '../../../components/setup/items-raw'
 import { writeSetupHref } from '../../../components/setup/setup-href'
 import { paths } from '../../../config/paths'
+import { useApp } from '../../../lib/app-context'
+import { readingQuery } from '../api/ask'
 import type { Finder } from '../hooks/use-finder'
 import { fieldId } from '../../../components/setup/field-groups'
 
@@ -12,12 +18,25 @@ export interface ReadingChipsProps {
   readonly onEdit: (path: string, target: Element) => void
 }
 
+/** Where the replacements of a named piece are, in the setup that is drawn. */
+function writeSwapHref({ gear, kind }: AskAnswer, { state, printer }: Finder): string | null {
+  if (!gear || kind === null) return null
+  const { raw, id } = addItem(state.raw, kind, gear.slug)
+  const gone: RawSetup = id === 'tank' ? raw : { ...raw, [`items.${id}.state`]: 'gone' }
+  return writeSetupHref(paths.swap(id), gone, printer.system)
+}
+
 /** What was understood of the question, piece by piece and correctable, and what was left over. */
 export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
   const { state, printer } = finder
+  const { api } = useApp()
+  const isAsked = state.asked !== ''
   const question = useMemo(() => readQuestion(state.asked, printer.system), [state.asked, printer.system])
-  if (state.asked === '') return null
-  const { understood, ignored } = question
+  // The server knows the names of the catalogue, and tells a piece's from words that are not used.
+  const named = useQuery({ ...readingQuery(api, state.asked, printer.system), enabled: isAsked }).data
+  if (!isAsked) return null
+  const { understood, ignored } = named ?? question
+  const gone = named?.gear ? writeSwapHref(named, finder) : null
   const isOtherKind = question.kind !== null && question.kind !== state.kind
   // A chamber is one thing in a question, whichever of its sizes comes first.
   const groupOf = (path: string) => (/^tank\.chambers\.\d+\./.test(path) ? path.split('.').slice(0, 3).join('.') : path)
@@ -79,6 +98,16 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
       {question.intent === 'replace' && (
         <p className="mt-1 text-ink-soft">
           Every answer below could take the place of the piece that is gone, in the setup that is drawn.
+          {gone !== null && (
+            <>
+              {' '}
+              What else would change with each is on{' '}
+              <Link to={gone} className="link">
+                the page of its replacements
+              </Link>
+              .
+            </>
+          )}
         </p>
       )}
     </div>
