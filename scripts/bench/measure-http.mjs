@@ -2,7 +2,7 @@ import { writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { say, Trouble } from '../lib/say.mjs'
 import { loadInTurns } from './load.mjs'
-import { misspell } from './questions.mjs'
+import { askForHeaterAmongItems, askForReplacement, misspell } from './questions.mjs'
 import { startBareServer } from './servers.mjs'
 
 /** @typedef {import('./load.mjs').Load} Load */
@@ -45,6 +45,19 @@ export async function measureFit({ origin, describe, seconds, folder, defer }) {
   await bare.stop()
   say(`  ${fit.requests} requests, ${(answer.length / 1024).toFixed(1)} kB each`)
   return { fit, bytes, json, answerKb: answer.length / 1024 }
+}
+
+/** Replacements and the fit of the same kind in the same tank, in turns. */
+export async function measureReplacements(/** @type {string} */ origin, /** @type {number} */ seconds) {
+  const [swap, fit] = await loadInTurns(
+    [
+      { origin, describe: askForReplacement, connections },
+      { origin, describe: askForHeaterAmongItems, connections },
+    ],
+    seconds,
+  )
+  if (!swap || !fit) throw new Trouble('A load is missing.')
+  return { swap, fit }
 }
 
 /** Names of pieces from all over the catalogue. @returns {Promise<{ slug: string, name: string }[]>} */

@@ -4,6 +4,7 @@ export const measureNames = /** @type {const} */ ([
   'fit',
   'heaters',
   'items',
+  'replacements',
   'search',
   'memory',
   'javascript',

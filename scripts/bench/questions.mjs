@@ -22,20 +22,39 @@ export const askForHeater = (/** @type {number} */ index) => ({
   body: JSON.stringify({ setup: describeSetup(index), kind: 'heater' }),
 })
 
+const furniture = [
+  { id: 'strip', kind: 'power-strip', specs: { outlets: 6, ratedA: 15 } },
+  { id: 'lamp', kind: 'light', specs: { powerW: 60, plugs: 1 } },
+  { id: 'pump', kind: 'return-pump', specs: { powerW: 20, plugs: 1 } },
+]
+
 /** The same where the tank is furnished, so that every candidate is weighed against what is there. */
-export const askForHeaterAmongItems = (/** @type {number} */ index) => {
-  const sourced = (/** @type {string} */ kind, /** @type {Record<string, unknown>} */ specs) => ({ kind, specs })
-  const items = [
-    { id: 'strip', ...sourced('power-strip', { outlets: 6, ratedA: 15 }) },
-    { id: 'lamp', ...sourced('light', { powerW: 60, plugs: 1 }) },
-    { id: 'pump', ...sourced('return-pump', { powerW: 20, plugs: 1 }) },
-  ]
-  return {
-    method: 'POST',
-    path: '/api/v1/fit',
-    body: JSON.stringify({ setup: { ...describeSetup(index), items }, kind: 'heater' }),
-  }
+export const askForHeaterAmongItems = (/** @type {number} */ index) => ({
+  method: 'POST',
+  path: '/api/v1/fit',
+  body: JSON.stringify({ setup: { ...describeSetup(index), items: furniture }, kind: 'heater' }),
+})
+
+const goneHeater = {
+  id: 'heater',
+  kind: 'heater',
+  specs: {
+    form: 'titanium-rod',
+    powerW: 100,
+    lengthMm: 220,
+    diameterMm: 20,
+    thermostat: 'external-included',
+    plugs: 1,
+  },
+  state: 'gone',
 }
+
+/** What can take the place of a heater that is gone from that tank. */
+export const askForReplacement = (/** @type {number} */ index) => ({
+  method: 'POST',
+  path: '/api/v1/replacements',
+  body: JSON.stringify({ setup: { ...describeSetup(index), items: [...furniture, goneHeater] }, itemId: 'heater' }),
+})
 
 /** A name with two letters swapped, as fingers do. */
 export function misspell(/** @type {string} */ name, /** @type {number} */ index) {

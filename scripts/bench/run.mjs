@@ -6,7 +6,7 @@ import { runQuietly } from '../lib/processes.mjs'
 import { say, Trouble } from '../lib/say.mjs'
 import { createCatalogue, startBenchCluster } from './cluster.mjs'
 import { measureFirstVisit } from './measure-javascript.mjs'
-import { measureFit, measureSearch } from './measure-http.mjs'
+import { measureFit, measureReplacements, measureSearch } from './measure-http.mjs'
 import { readOptions } from './options.mjs'
 import { askForHeater, askForHeaterAmongItems } from './questions.mjs'
 import { readMemoryMb, startBuiltServer } from './servers.mjs'
@@ -88,6 +88,37 @@ async function searchRows(/** @type {string} */ name, /** @type {string} */ orig
   ]
 }
 
+/** @returns {Promise<Row[]>} */
+async function replacementRows(
+  /** @type {number} */ size,
+  /** @type {string} */ origin,
+  /** @type {Context} */ context,
+) {
+  const name = `replacements among ${size}`
+  say(`${name} …`)
+  const { swap, fit } = await measureReplacements(origin, context.options.seconds)
+  return [
+    {
+      name: `${name}, requests/s`,
+      unit: 'ms',
+      figures: swap.ms,
+      value: swap.perSecond,
+      ratio: swap.ms.p95 / fit.ms.p95,
+      yardstick: 'p95 of fit in the same tank',
+      target: size === targetSize ? { of: 'ratio', most: 4 } : null,
+    },
+    {
+      name: '  fit in the same tank',
+      unit: 'ms',
+      figures: fit.ms,
+      value: fit.perSecond,
+      ratio: null,
+      yardstick: '',
+      target: null,
+    },
+  ]
+}
+
 /**
  * Everything that is measured on one catalogue, in one server.
  * @returns {Promise<Row[]>}
@@ -110,6 +141,7 @@ async function measureSize(
     rows.push(
       ...(await fitRows(`fit of ${size} in a furnished tank`, server.origin, askForHeaterAmongItems, context, false)),
     )
+  if (isLargest && only.has('replacements')) rows.push(...(await replacementRows(size, server.origin, context)))
   if (isLargest && only.has('memory')) {
     const { now, highest } = readMemoryMb(server.pid)
     const target = isTarget ? /** @type {const} */ ({ of: 'value', most: 600 }) : null
