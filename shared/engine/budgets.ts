@@ -1,22 +1,14 @@
-import type { CanonicalUnit } from '../units/units'
 import { hasAreas } from './checks/shape'
 import { countOf } from './counting'
 import { findColdestHeldC, findHeaterNeed, sumHeaterW } from './heat-budget'
 import { countPlugs, findLimits, sumLoad } from './mains-budget'
-import type { Say } from './rule'
+import type { RawBudget } from './raw-budget'
 import { createScene, once } from './scene'
 import type { Plan } from './setup/plan'
 import type { Item } from './types'
 import { readNumber } from './values'
 import { addUpSupplies } from './supplies-budget'
 import { findFloorPressureKPa, weighFilled } from './weight-budget'
-
-export interface RawBudget {
-  readonly used: number
-  readonly limit: number | null
-  readonly unit: CanonicalUnit
-  readonly say: Say
-}
 
 /** The heat that the coldest room takes, and the heaters that are there to give it. */
 function addUpHeat(plan: Plan, items: readonly Item[]): RawBudget {

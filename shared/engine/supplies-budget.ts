@@ -1,5 +1,5 @@
-import type { RawBudget } from './budgets'
 import { saltPacks } from './physics/salt'
+import type { RawBudget } from './raw-budget'
 import { sandMassKg } from './setup/resolve'
 import type { Plan } from './setup/plan'
 import type { Item } from './types'
