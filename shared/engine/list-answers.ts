@@ -37,7 +37,7 @@ export interface AnswerPage extends Listed {
 export function listAnswers(
   swept: Sweep,
   pieces: readonly Piece[],
-  { verdict: wanted, check, offset, limit }: FitOptions,
+  { verdict: wanted, check, missing, offset, limit }: FitOptions,
   findRest: (candidate: Candidate) => readonly RawKnockOn[],
   words: Printer,
 ): AnswerPage {
@@ -47,8 +47,12 @@ export function listAnswers(
   const lists = verdictOrder
     .filter((verdict) => !wanted || verdict === wanted)
     .flatMap((verdict) => {
-      const group = check ? groups[verdict].filter((index) => swept.isDecidedBy(index, check)) : groups[verdict]
-      return joint?.assessed.verdict === verdict && !check ? [[together], group] : [group]
+      const isNarrowed = check !== undefined || missing !== undefined
+      const isAsked = (index: number) =>
+        (check === undefined || swept.isDecidedBy(index, check)) &&
+        (missing === undefined || (verdict === 'unknown' && swept.tableOf(index).missingOf(index).includes(missing)))
+      const group = isNarrowed ? groups[verdict].filter(isAsked) : groups[verdict]
+      return joint?.assessed.verdict === verdict && !isNarrowed ? [[together], group] : [group]
     })
   const page = takePage(lists, offset, limit, (indexes, needed) =>
     indexes[0] === together ? indexes : sortGroup(indexes, swept, pieces, needed),

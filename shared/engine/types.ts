@@ -273,9 +273,13 @@ export interface FitOptions {
   readonly limit: number
   /** Answers to skip. */
   readonly offset: number
-  /** Only answers with this verdict; `check`: only those that fail it, or lack data for it. */
+  /**
+   * Only answers with this verdict; `check`: only those that fail it, or lack data for it; `missing`: only those that
+   * cannot be judged for lack of this attribute.
+   */
   readonly verdict?: Verdict
   readonly check?: string
+  readonly missing?: string
   /** Also return the scales and a mark per candidate (at most `limits.marks`). */
   readonly scales?: boolean
 }
@@ -288,7 +292,7 @@ export interface FitResult {
   /** Candidates that cannot be judged, by the attribute that is missing. */
   readonly missingBy: readonly { readonly key: string; readonly count: number; readonly label: string }[]
   readonly assumptions: readonly Assumption[]
-  /** Matching `verdict` and `check`, over all pages. */
+  /** Matching `verdict`, `check` and `missing`, over all pages. */
   readonly total: number
   readonly scales?: readonly Scale[]
   readonly marks?: readonly Mark[]

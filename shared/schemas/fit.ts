@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { getAttribute } from '../kinds/index'
 import { limits } from '../limits'
 import { verdictSchema } from './answer'
 import { checkFilters, filtersSchema } from './filters'
@@ -24,10 +25,16 @@ export const fitRequestSchema = z
       .max(80)
       .regex(/^[a-z-]+\.[a-z-]+$/, 'must be the id of a check, such as heater.space')
       .optional(),
+    /** Only pieces that cannot be judged because nobody has recorded this attribute of theirs. */
+    missing: z.string({ error: 'must be the key of an attribute, such as lengthMm' }).max(80).optional(),
     /** Also the shared scales, and where every candidate stands on them. */
     scales: z.boolean({ error: 'must be true or false' }).default(false),
   })
   .superRefine(checkFilters)
+  .superRefine(({ kind, missing }, context) => {
+    if (missing !== undefined && !getAttribute(kind, missing))
+      context.addIssue({ code: 'custom', path: ['missing'], message: 'is not an attribute of this kind' })
+  })
 
 export const fitCheckRequestSchema = z.strictObject({
   setup: setupSchema,

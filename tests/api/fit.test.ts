@@ -89,6 +89,20 @@ describe('POST /api/v1/fit', () => {
     expect(new Set(outcomes)).toEqual(new Set(['fail', 'nodata']))
   })
 
+  it('keeps to those that one missing attribute leaves unjudged, as many as it counts', async () => {
+    const { missingBy } = fitResultSchema.parse((await post('/fit', { setup, kind: 'heater' }).expect(200)).body)
+    const { key = '', count } = missingBy.find((each) => each.key === 'powerW') ?? {}
+    const unjudged = await findAll({ missing: key })
+    expect(unjudged).toHaveLength(count ?? NaN)
+    expect(unjudged.map(({ gear }) => gear?.slug)).toContain(slugOf('rod-c'))
+    for (const { verdict, specs } of unjudged) {
+      expect(verdict).toBe('unknown')
+      expect(specs).not.toHaveProperty(key)
+    }
+    const response = await post('/fit', { setup, kind: 'heater', missing: 'shininess' })
+    expect(listPointers(expectProblem(response, 422))).toEqual(['#/missing'])
+  })
+
   it('keeps to what was asked for, and takes nothing unknown for a match', async () => {
     const slugs = async (filters: object) => (await findAll({ filters })).map(({ gear }) => gear?.slug)
     const exact = await slugs({ lengthMm: [220, 220], powerW: [150, null], form: 'titanium-rod', volts: '120' })

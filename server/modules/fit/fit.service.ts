@@ -15,12 +15,19 @@ const placeSchema = z.strictObject({ offset: z.int().min(1).max(10_000_000) })
 
 /** Everything of a kind in the catalogue, judged in place of the setup's own. */
 export async function findFits(catalogue: Catalogue, request: FitParsed): Promise<FitAnswer> {
-  const { setup: parsed, kind, filters, limit, cursor, verdict, check, scales } = request
-  const question = JSON.stringify(['fit', parsed, kind, filters, verdict, check])
+  const { setup: parsed, kind, filters, limit, cursor, verdict, check, missing, scales } = request
+  const question = JSON.stringify(['fit', parsed, kind, filters, verdict, check, missing])
   const offset = cursor === undefined ? 0 : readCursor(cursor, question, placeSchema).offset
   const snapshot = await catalogue.snapshot()
   const setup = readSetup(snapshot, parsed)
-  const options = { limit, offset, scales, ...(verdict && { verdict }), ...(check !== undefined && { check }) }
+  const options = {
+    limit,
+    offset,
+    scales,
+    ...(verdict && { verdict }),
+    ...(check !== undefined && { check }),
+    ...(missing !== undefined && { missing }),
+  }
   const result = fit(setup, kind, filterPieces(snapshot.byKind[kind], filters), options)
   const end = offset + result.answers.length
   const hasMore = result.answers.length > 0 && end < result.total

@@ -81,6 +81,14 @@ describe('the finder page', () => {
     expect(view.address()).toContain('show=no&check=heater.space')
   })
 
+  it('opens the pieces that one missing number leaves unjudged', async () => {
+    const view = renderApp(address, createFakeServer())
+    await findShort()
+    fireEvent.click(screen.getByText('without a recorded length'))
+    await waitFor(() => expect(view.address()).toContain('show=unknown&missing=lengthMm'))
+    await screen.findByText('Invented · Unmeasured 100')
+  })
+
   it('says what would make a piece fit, and tries it with one press', async () => {
     // A heater of 520 mm stands in no 12 in of water, and this tank is 24 in high.
     const sizes = 'tank.outerLengthMm=16%20in&tank.outerWidthMm=12%20in&tank.outerHeightMm=24%20in'

@@ -13,7 +13,7 @@ export const canAsk = ({ setup }: Visit): boolean => hasTankSize(setup)
 /** The list of one verdict; that of those that fit also brings scales, counts and assumptions. */
 export function answersQuery(api: ApiClient, { setup, filters, state }: Visit, verdict: Verdict) {
   const { kind, opened, from } = state
-  const check = opened?.verdict === verdict ? opened.check : undefined
+  const { check, missing } = opened?.verdict === verdict ? opened : {}
   const request: FitRequest = {
     setup,
     kind,
@@ -21,6 +21,7 @@ export function answersQuery(api: ApiClient, { setup, filters, state }: Visit, v
     verdict,
     limit: pageSize,
     ...(check !== undefined && { check }),
+    ...(missing !== undefined && { missing }),
     ...(verdict === 'fits' && { scales: true }),
   }
   return fitPagesQuery(api, request, from?.verdict === verdict ? from.cursor : null)

@@ -25,24 +25,26 @@ const groupClass = 'border-t border-ink pt-3'
 function listReasons(finder: Finder, first: FitAnswer, verdict: Opened['verdict']): readonly Reason[] {
   const { state, hrefOf } = finder
   const total = first.counts[verdict]
-  const isOpen = (check?: string) => state.opened?.verdict === verdict && state.opened.check === check
-  const toggle = (check?: string) =>
-    hrefOf({ opened: isOpen(check) ? null : { verdict, ...(check !== undefined && { check }) } })
-  const all = { key: 'all', count: total, label: 'all of them', href: toggle(), isOpen: isOpen() }
-  if (verdict === 'unknown')
-    return first.missingBy.map(({ key, count, label }) => ({
+  const open = (narrow: Pick<Opened, 'check' | 'missing'>) => {
+    const { check, missing } = state.opened?.verdict === verdict ? state.opened : { check: null, missing: null }
+    const isOpen = check === narrow.check && missing === narrow.missing
+    return { isOpen, href: hrefOf({ opened: isOpen ? null : { verdict, ...narrow } }) }
+  }
+  const all = { key: 'all', count: total, label: 'all of them', ...open({}) }
+  if (verdict === 'unknown') {
+    const reasons = first.missingBy.map(({ key, count, label }) => ({
       key,
       count,
       label: `without a recorded ${label}`,
-      href: toggle(),
-      isOpen: isOpen(),
+      ...open({ missing: key }),
     }))
+    return reasons.length > 1 ? [...reasons, all] : reasons
+  }
   const reasons = first.failedBy.map(({ check, count, label }) => ({
     key: check,
     count,
     label,
-    href: toggle(check),
-    isOpen: isOpen(check),
+    ...open({ check }),
   }))
   return total > 0 ? [...reasons, all] : reasons
 }

@@ -1,14 +1,15 @@
 import type { Verdict } from '#shared/engine/types'
-import { isKindKey, type KindKey } from '#shared/kinds/index'
+import { getAttribute, isKindKey, type KindKey } from '#shared/kinds/index'
 import { writeSetupLink } from '#shared/schemas/setup-link'
 import type { UnitSystem } from '#shared/units/systems'
 import type { RawSetup } from '../../../components/setup/edit-raw'
 import { listWishEntries, readWishes, type Wishes } from './wishes'
 
-/** Which answers beside those that fit are shown: a whole verdict, or those that one check decides. */
+/** Which answers beside those that fit are shown: a whole verdict, or those that one check, or one missing number, decides. */
 export interface Opened {
   readonly verdict: 'no' | 'unknown'
   readonly check?: string
+  readonly missing?: string
 }
 
 /** Where a list of answers goes on, for visitors without scripts. */
@@ -34,11 +35,13 @@ const startingKind: KindKey = 'heater'
 export const longestQuestion = 400
 const longestCursor = 400
 
-function readOpened(params: URLSearchParams): Opened | null {
+function readOpened(params: URLSearchParams, kind: KindKey): Opened | null {
   const verdict = params.get('show')
   if (verdict !== 'no' && verdict !== 'unknown') return null
   const check = params.get('check')
-  return check !== null && /^[a-z-]{1,40}\.[a-z-]{1,40}$/.test(check) ? { verdict, check } : { verdict }
+  if (check !== null && /^[a-z-]{1,40}\.[a-z-]{1,40}$/.test(check)) return { verdict, check }
+  const missing = params.get('missing')
+  return missing !== null && verdict === 'unknown' && getAttribute(kind, missing) ? { verdict, missing } : { verdict }
 }
 
 function readFrom(params: URLSearchParams): From | null {
@@ -59,7 +62,7 @@ export function readFinderState(params: URLSearchParams, raw: RawSetup): FinderS
     asked: (params.get('asked') ?? '').slice(0, longestQuestion),
     raw,
     wishes: readWishes(params, kind),
-    opened: readOpened(params),
+    opened: readOpened(params, kind),
     picked: picked !== null && /^[a-z0-9-]{1,120}$/.test(picked) ? picked : null,
     from: readFrom(params),
   }
@@ -73,6 +76,7 @@ export function writeFinderState(state: FinderState, system: UnitSystem): string
   const view = new URLSearchParams()
   if (state.opened) view.set('show', state.opened.verdict)
   if (state.opened?.check) view.set('check', state.opened.check)
+  if (state.opened?.missing) view.set('missing', state.opened.missing)
   if (state.picked) view.set('picked', state.picked)
   if (state.from) {
     view.set('more', state.from.verdict)
