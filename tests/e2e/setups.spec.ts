@@ -65,6 +65,7 @@ for (const width of [360, 1280]) {
 
 test('an assumption is confirmed with a press and changed by keyboard, and both are in the link', async ({ page }) => {
   await page.goto(report)
+  await page.getByText(/^\d+ more$/).click()
   await page.getByRole('link', { name: /That is right: humidity/i }).click()
   await expect(page).toHaveURL(/room\.relativeHumidity=50%25/)
   const warmest = page.getByRole('button', { name: /^Warmest room, .*assumed/ })

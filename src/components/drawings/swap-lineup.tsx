@@ -14,7 +14,7 @@ export interface SwapLineupProps {
 }
 
 const abovePx = 30
-const belowPx = 34
+const belowPx = 50
 const gapPx = 22
 const tallestPx = 230
 const edgePx = 12
