@@ -4,7 +4,7 @@ import type { Candidate, Judgement, Rule } from './rule'
 import { listAssumed, type Scene } from './scene'
 import type { Outcome, Specs } from './types'
 import { listUsual } from './usual'
-import type { Condition } from './ways'
+import type { Asked, Condition } from './ways'
 
 /** A rule's finding once assumptions and missing numbers were given their due. */
 export interface Judged {
@@ -51,7 +51,7 @@ function tryMissing(
   missing: readonly string[],
   assumed: () => readonly string[],
 ): Outcome | undefined {
-  if (rule.worst !== 'fail' || missing.length === 0 || missing.length > 2) return undefined
+  if (rule.worst !== 'fail' || rule.isModelled || missing.length === 0 || missing.length > 2) return undefined
   const grid = gridOf(candidate.piece.kind, missing)
   if (grid.length <= 1) return undefined
   let shared: Outcome | undefined
@@ -83,6 +83,13 @@ export function judge(scene: Scene, rule: Rule, candidate: Candidate): Judged | 
     return { ...base, outcome: 'nodata', ...(eitherWay && { eitherWay }) }
   }
   if (judgement.outcome !== 'fail') return { ...base, outcome: judgement.outcome }
-  const condition = findCondition(scene, assumed(), (varied) => findOutcome(varied, rule, candidate) === 'pass')
+  const plain = rule.asPlain?.(candidate) ?? candidate
+  const asked: Asked = {
+    isKept: (varied) => findOutcome(varied, rule, plain) === 'pass',
+    look: (varied) => rule.judge(varied, candidate),
+    rule,
+    judgement,
+  }
+  const condition = findCondition(scene, assumed(), asked)
   return condition ? { ...base, outcome: 'change', condition } : { ...base, outcome: 'fail' }
 }

@@ -4,19 +4,9 @@ import type { Assessment, AssessedItem } from './assess'
 import { listAssumptions } from './assumptions'
 import { describeCondition } from './conditions'
 import type { Judged } from './judge'
+import { findMargin } from './margin'
 import { isCloseCall } from './physics/conformance'
 import type { Check, ItemReport, Need, Report, Verdict } from './types'
-
-/** Signed, positive = to spare: distance to a limit over its size, or to the nearer end of an interval over its width. */
-function findMargin({ rule, judgement }: Judged): number | null {
-  const { margin, measured, limit } = judgement
-  if (margin !== undefined) return margin
-  if (typeof measured !== 'number' || limit === undefined || limit === null || limit === 0) return null
-  if (typeof limit === 'number')
-    return (rule.limitIs === 'least' ? measured - limit : limit - measured) / Math.abs(limit)
-  const width = limit[1] - limit[0]
-  return width > 0 ? Math.min(measured - limit[0], limit[1] - measured) / width : null
-}
 
 const closeness = (probability: number): string =>
   ` A close call: the chance that it keeps to the limit is ${Math.round(probability * 100)} %; measure before buying.`
@@ -40,7 +30,7 @@ export function presentCheck(judged: Judged, words: Printer): Check {
     measured: judgement.measured ?? null,
     limit: judgement.limit ?? null,
     unit: rule.unit ? units[rule.unit].ucum : null,
-    margin: findMargin(judged),
+    margin: findMargin(rule, judgement),
     message: message.join(''),
     basis: rule.basis,
     ...(missing && missing.length > 0 && { missing }),

@@ -98,6 +98,10 @@ export interface Rule {
   /** As in "14 too long or too thick for the chamber". */
   readonly failLabel: string
   readonly glance?: Glancer
+  /** It takes a model of the whole tank, too much to ask for every usual value of what is missing. */
+  readonly isModelled?: true
+  /** The candidate as it is asked about in other setups: without looking for what else might do there. */
+  readonly asPlain?: (candidate: Candidate) => Candidate
   /** Null: does not apply to this piece in this setup. */
   readonly judge: (scene: Scene, candidate: Candidate) => Judgement | null
 }

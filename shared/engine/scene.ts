@@ -42,12 +42,24 @@ export function vary(scene: Scene, path: string, value: number | string | boolea
 /** The setup with other items, and with its tank replaced where asked. */
 export const withItems = (setup: Setup, items: readonly Item[], tank = setup.tank): Setup => ({ ...setup, items, tank })
 
+const tradingSizes = ['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm', 'tank.waterLineMm']
+const followingSizes = ['tank.displayLengthMm', 'tank.displayWidthMm']
+
+/** Of a tank that is known by its volume, the sizes that were assumed: one is larger where another is smaller. */
+export const listTrading = ({ plan: { assumed } }: Scene): readonly string[] => {
+  const open = tradingSizes.filter((path) => assumed.has(path))
+  return open.length > 1 ? open : []
+}
+
 /** Setup paths with their defaults in use that match a rule's `uses`, the most telling first. */
 export function listAssumed(scene: Scene, uses: readonly string[]): readonly string[] {
   const { assumed } = scene.plan
-  return uses.flatMap((path) => {
+  const found = uses.flatMap((path) => {
     if (!path.includes('*')) return assumed.has(path) ? [path] : []
     const [head, tail] = path.split('*') as [string, string]
     return [...assumed.keys()].filter((key) => key.startsWith(head) && key.endsWith(tail))
   })
+  const trading = listTrading(scene)
+  const isTraded = found.some((path) => trading.includes(path) || followingSizes.includes(path))
+  return isTraded ? [...new Set([...found, ...trading])] : found
 }

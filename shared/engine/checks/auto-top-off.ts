@@ -38,6 +38,9 @@ function warnReservoir(scene: Scene, reservoirL: number | undefined): readonly S
   ]
 }
 
+/** Of a tank known by its volume the height follows from the other sides. */
+const topRests = ['room.tankTopMm', 'tank.outerHeightMm', 'tank.outerLengthMm', 'tank.outerWidthMm', 'tank.waterLineMm']
+
 function judgeLift(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
   const head = readMeasure(specs, 'pumpHeadM')
@@ -51,7 +54,7 @@ function judgeLift(scene: Scene, candidate: Candidate): Judgement {
     measured: head.value,
     limit: liftM,
     probability: () => probabilityAtLeast(head.value, liftM, u),
-    rests: () => (isSump ? ['tank.sump.waterDepthMm', 'tank.filtration'] : ['room.tankTopMm', 'tank.outerHeightMm']),
+    rests: () => [...(isSump ? ['tank.sump.waterDepthMm'] : topRests), 'tank.filtration'],
     cautions: warnReservoir(scene, readNumber(specs, 'reservoirL')),
     say: (words) =>
       `Lifts water ${words.measure(head.value, 'm')}, and the rim of the ${isSump ? 'sump' : 'tank'} is ${words.measure(liftM, 'm')} above the floor.`,

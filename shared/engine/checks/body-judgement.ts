@@ -17,6 +17,26 @@ export function lackWater(place: Place | undefined): Judgement {
   return { outcome: 'nodata', missing: [], say: () => 'What is outside the tank’s water cannot be checked here.' }
 }
 
+const outside = ['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm', 'tank.wallMm']
+
+/**
+ * Setup paths that could bring another size of the water that a body does not fit in, or other water: a chamber's depth
+ * follows from the tank's line, a sump's and the display's sizes from its outside, where nobody said them.
+ */
+export function listBodyTurns({ path, id }: BodyFit['basin']): readonly string[] {
+  if (path.startsWith('tank.chambers.'))
+    return [
+      ...['lengthMm', 'widthMm', 'waterDepthMm'].map((key) => `tank.chambers.*.${key}`),
+      'tank.waterLineMm',
+      ...outside,
+    ]
+  const own =
+    id === 'sump'
+      ? ['lengthMm', 'widthMm', 'waterDepthMm'].map((key) => `${path}.${key}`)
+      : ['tank.displayLengthMm', 'tank.displayWidthMm', 'tank.waterLineMm']
+  return [...own, ...outside, 'tank.filtration']
+}
+
 /** A body's fit as a judgement; `subject` as in `describeBody`. */
 export function judgeBody(fit: BodyFit, plan: Plan, subject?: string): Judgement {
   if (fit.basin.path === 'tank' && !hasAreas(plan)) return noAreas(plan)
@@ -28,7 +48,7 @@ export function judgeBody(fit: BodyFit, plan: Plan, subject?: string): Judgement
     outcome: fit.fits ? 'pass' : 'fail',
     ...(isBySize && { measured: fit.measuredMm, limit: fit.limitMm, probability: fit.probability }),
     ...(fit.fits && { placement: { chamber: fit.basin.id, position: 'upright' as const, angleDeg: 90 } }),
-    rests: () => listBodySizes(fit),
+    rests: () => (fit.fits ? listBodySizes(fit) : listBodyTurns(fit.basin)),
     cautions: [...inDisplay, ...fit.cautions],
     say: describeBody(fit, subject),
   }

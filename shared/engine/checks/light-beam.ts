@@ -4,7 +4,7 @@ import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
 import { readMeasure } from '../values'
 import { findEnough, findLit, isLit, judgeLit, planeUses, sayHeight } from './light-lit'
-import { findLowerMm, findSpill, isDimmable, shareOf } from './light-plane'
+import { chooseHeightMm, findLowerMm, findSpill, isDimmable, shareOf } from './light-plane'
 
 const lampReads = [
   'layout',
@@ -80,11 +80,12 @@ const judgeCoverage = (scene: Scene, candidate: Candidate): Judgement | null =>
     return { ...base, outcome: 'fail', cautions: [], say: (words) => `Lights only ${covers(words)}.` }
   })
 
+/** Said only where much light misses; told by whoever reads the cautions, since it takes a model of its own. */
 function warnSpill(scene: Scene, { piece }: Candidate, count: number, heightMm: number): readonly Say[] {
-  const spill = findSpill(scene, piece.specs, count, heightMm)
-  if (spill <= thresholds.lightSpill.value) return []
   return [
     (words) => {
+      const spill = findSpill(scene, piece.specs, count, heightMm)
+      if (spill <= thresholds.lightSpill.value) return ''
       const lower = findLowerMm(scene, piece.specs, count, heightMm)
       const limit = `${thresholds.lightSpill.value * 100} %`
       const cure =
@@ -113,6 +114,12 @@ const model = {
     'Generalised Lambertian beam (Kahn & Barry 1997, Proceedings of the IEEE 85:265), refraction by Snell’s law, attenuation 0.14 per metre (Pope & Fry 1997, Applied Optics 36:8710); bands are common practice',
 }
 
+/** Other heights than the usual one are a change anyway. */
+const atUsualHeight = (candidate: Candidate): Candidate => ({
+  ...candidate,
+  mountHeightMm: candidate.mountHeightMm ?? chooseHeightMm(candidate.piece.specs),
+})
+
 export const lightIntensity: Rule = {
   id: 'light.intensity',
   label: 'Brightness',
@@ -124,6 +131,8 @@ export const lightIntensity: Rule = {
   reads: lampReads,
   uses: planeUses,
   failLabel: 'too dim or too bright',
+  isModelled: true,
+  asPlain: atUsualHeight,
   judge: judgeIntensity,
 }
 
@@ -138,5 +147,8 @@ export const lightCoverage: Rule = {
   reads: lampReads,
   uses: planeUses,
   failLabel: 'covering too little of the tank',
+  isModelled: true,
+  // More than one is a change anyway.
+  asPlain: (candidate) => ({ ...atUsualHeight(candidate), mayMultiply: false }),
   judge: judgeCoverage,
 }

@@ -19,6 +19,8 @@ import { displayUses, hasAreas, noAreas } from './shape'
 export const planeUses = ['goals.coral', 'tank.waterLineMm', ...displayUses, 'tank.outerHeightMm']
 /** What may turn out otherwise: the display follows from the tank's outside and its chambers, which somebody measured or not. */
 const planeTurns = [
+  'tank.displayLengthMm',
+  'tank.displayWidthMm',
   'goals.coral',
   'tank.waterLineMm',
   'tank.outerLengthMm',

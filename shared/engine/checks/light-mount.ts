@@ -54,6 +54,21 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
   }
 }
 
+/** What a mount has to suit, and its own range where both ends are known; of a tank the side that is nearer to it. */
+function measureMount(
+  { plan: { tank, room } }: Scene,
+  type: string,
+  { rimMinMm, rimMaxMm, spanMinMm, spanMaxMm }: ReturnType<typeof limitsOfMount>,
+): Pick<Judgement, 'measured' | 'limit'> {
+  if (type !== 'arm' && type !== 'rim-legs') return { measured: room.ceilingMm }
+  const [min, max] = type === 'arm' ? [rimMinMm, rimMaxMm] : [spanMinMm, spanMaxMm]
+  const sides = type === 'arm' ? [tank.wallMm] : [tank.outerLengthMm, tank.outerWidthMm]
+  if (min === undefined || max === undefined || min > max) return { measured: sides[0] ?? null }
+  const miss = (side: number) => Math.max(min - side, side - max)
+  const measured = sides.reduce((best, side) => (miss(side) < miss(best) ? side : best))
+  return { measured, limit: [min, max] }
+}
+
 function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
   const type = readText(piece.specs, 'type')
   if (type === undefined) return lacking(['type'], () => 'Nobody has recorded what sort of mount it is.')
@@ -67,14 +82,14 @@ function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
     const missing = keys.filter((key) => readNumber(piece.specs, key) === undefined)
     return lacking(missing, () => `Nobody has recorded the ${type === 'arm' ? 'rims' : 'spans'} that it fits.`)
   }
-  const { tank, room } = scene.plan
+  const { tank } = scene.plan
   const isHung = type === 'hanging' || type === 'ceiling'
   const unknown = isHung ? lights.length - heights.length : 0
   return {
     rests: () => mountRests[type] ?? [],
     cautions: unknown > 0 ? [sayUncounted(unknown, 'height')] : [],
     outcome: found ? 'pass' : 'fail',
-    measured: type === 'arm' ? tank.wallMm : type === 'rim-legs' ? tank.outerLengthMm : room.ceilingMm,
+    ...measureMount(scene, type, limitsOfMount(piece.specs)),
     say: (words) => {
       if (type === 'arm')
         return found

@@ -5,7 +5,7 @@ import { combineUncertainties, probabilityWithin, standardUncertainty } from '..
 import type { Basin } from '../setup/places'
 import type { Specs } from '../types'
 import { isWithinMm, readMeasure, readNumber } from '../values'
-import { bodyUses, judgeBody, lackWater } from './body-judgement'
+import { bodyUses, judgeBody, lackWater, listBodyTurns } from './body-judgement'
 import { chooseBasin, tryBody, type BodyFit } from './body-space'
 import { createRuleMaker } from './build-rule'
 import { findPumpBasins } from './pump-flow'
@@ -50,6 +50,12 @@ function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
   return judgeBody(found, scene.plan)
 }
 
+/** What could bring another depth; of several chambers also what could make it another one's. */
+const listDepthTurns = ({ plan }: Scene, basin: Basin): readonly string[] =>
+  listBodyTurns(basin).filter(
+    (path) => plan.tank.chambers.length > 1 || !/(length|width)Mm$/.test(path) || path.startsWith('tank.outer'),
+  )
+
 function judgeDepth(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
   const [min, max] = readDepths(specs)
@@ -68,7 +74,10 @@ function judgeDepth(scene: Scene, candidate: Candidate): Judgement {
     measured: depth,
     limit: [min.value, max.value],
     probability: () => probabilityWithin(depth, min.value, max.value, u),
-    rests: () => [basin.path === 'tank' ? 'tank.waterLineMm' : `${basin.path}.waterDepthMm`],
+    rests: () =>
+      isDeepEnough(specs, basin)
+        ? [basin.path === 'tank' ? 'tank.waterLineMm' : `${basin.path}.waterDepthMm`]
+        : listDepthTurns(scene, basin),
     say: (words) =>
       `Works in ${words.pair([min.value, max.value], 'mm')} of water, and the ${basin.name} has ${words.length(depth)}.`,
   }

@@ -119,7 +119,8 @@ function resolveChamber(
     name: input.name ?? (isAlone ? 'rear chamber' : `chamber “${input.id}”`),
     lengthMm: input.lengthMm ?? assume(`${path}.lengthMm`, 100),
     widthMm: input.widthMm ?? assume(`${path}.widthMm`, 100),
-    waterDepthMm: input.waterDepthMm ?? assume(`${path}.waterDepthMm`, waterLineMm),
+    waterDepthMm:
+      input.waterDepthMm ?? assume(`${path}.waterDepthMm`, Math.min(waterLineMm, input.heightMm ?? Infinity)),
     heightMm: input.heightMm ?? assume(`${path}.heightMm`, insideHeightMm),
   }
   if (input.openingLengthMm !== undefined) chamber.openingLengthMm = input.openingLengthMm
