@@ -40,6 +40,12 @@ export function createRoutes(app: App): RouteObject[] {
               path: paths.measuringSheet,
               lazy: createLazy(app, () => import('./routes/setup-sheet')),
             },
+            { id: 'worksheets', path: paths.worksheets, lazy: createLazy(app, () => import('./routes/worksheets')) },
+            {
+              id: 'worksheet',
+              path: '/worksheets/:name',
+              lazy: createLazy(app, () => import('./routes/worksheets-sheet')),
+            },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],

@@ -10,5 +10,7 @@ export const paths = {
   setup: '/setups/link',
   swap: (itemId: string) => `/setups/link/swap/${encodeURIComponent(itemId)}`,
   measuringSheet: '/setups/measuring-sheet',
+  worksheets: '/worksheets',
+  worksheet: (name: string) => `/worksheets/${encodeURIComponent(name)}`,
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

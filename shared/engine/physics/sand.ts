@@ -4,7 +4,8 @@ import { seawaterDensityKgM3, seawaterKinematicViscosityM2S } from './seawater'
 /** As in the source of the formulas below, m/s². */
 const gravity = 9.81
 
-const classes = [
+/** Each class of grains ends below its size, mm. Source: Wentworth 1922, d = 2^−φ mm. */
+export const grainClasses = [
   [0.0625, 'silt'],
   [0.125, 'very fine sand'],
   [0.25, 'fine sand'],
@@ -15,10 +16,10 @@ const classes = [
   [64, 'pebbles'],
 ] as const
 
-/** Name of a grain size; a limit belongs to the coarser class. Source: Wentworth 1922, d = 2^−φ mm. RangeError for NaN. */
+/** Name of a grain size; a limit belongs to the coarser class. RangeError for NaN. */
 export function classifyGrain(grainMm: number): string {
   requireFinite({ grainMm })
-  return classes.find(([below]) => grainMm < below)?.[1] ?? 'cobbles'
+  return grainClasses.find(([below]) => grainMm < below)?.[1] ?? 'cobbles'
 }
 
 /** Middle of a range of grain sizes on Wentworth's scale, mm: the geometric mean. RangeError for NaN. */

@@ -12,6 +12,8 @@ export interface Subject {
   readonly quantity: number
   readonly place?: Place
   readonly mountHeightMm?: number
+  /** It counts beside the setup's own pieces of its kind, not in their place. */
+  readonly isBeside?: true
 }
 
 /** The setup without what the subject takes the place of, and with it. */

@@ -69,7 +69,8 @@ const toItem = ({ piece, quantity, place, mountHeightMm }: Subject): Item => ({
 export function fillWorksheet({ name, setup: parts }: Worksheet, setup: Setup, given?: Subject): Filled {
   const counted = setup.items.filter(({ state }) => state !== 'gone')
   const subject = given ?? counted.find(({ piece }) => piece.kind === subjectKinds[name])
-  const others = subject ? counted.filter(({ piece }) => piece.kind !== subject.piece.kind) : counted
+  const isInPlace = subject !== undefined && !('isBeside' in subject)
+  const others = isInPlace ? counted.filter(({ piece }) => piece.kind !== subject.piece.kind) : counted
   const items = subject ? [...others, toItem(subject)] : counted
   const scene = createScene(resolve({ ...setup, items: others }), others)
   const own = fillers[name]?.({ scene, items, subject }) ?? {}

@@ -123,7 +123,7 @@ export const lightMap: Worksheet = {
   },
   example: {
     tank: { outerLengthMm: 610, outerWidthMm: 406, outerHeightMm: 406 },
-    light: { layout: 'panel', lengthMm: 300, widthMm: 150, ppfdUmol: 320, ppfdAtMm: 300, beamAngleDeg: 120 },
+    light: { layout: 'panel', lengthMm: 200, widthMm: 120, ppfdUmol: 420, ppfdAtMm: 300, beamAngleDeg: 80 },
     quantity: 1,
     mountHeightMm: 200,
     coral: ['soft', 'lps'],

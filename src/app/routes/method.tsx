@@ -1,4 +1,6 @@
+import { Link } from 'react-router-dom'
 import { getRules } from '#shared/engine/checks/index'
+import { worksheets } from '#shared/engine/worksheets/registry'
 import { getKind, kindKeys } from '#shared/kinds/index'
 import { CautionBox } from '../../components/ui/caution-box'
 import { paths } from '../../config/paths'
@@ -29,6 +31,21 @@ function MethodPage() {
             </div>
           </section>
         ))}
+      </section>
+      <section className="mt-12">
+        <h2>Worksheets</h2>
+        <p className="mt-2 max-w-prose">
+          Every calculation by itself, with the formula, your numbers put in, and its source.
+        </p>
+        <ul className="mt-2 list-disc space-y-1 pl-5">
+          {worksheets.map(({ name, title }) => (
+            <li key={name}>
+              <Link to={paths.worksheet(name)} className="link">
+                {title}
+              </Link>
+            </li>
+          ))}
+        </ul>
       </section>
       <section className="mt-12">
         <h2>Numbers that decide</h2>

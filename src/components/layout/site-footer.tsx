@@ -1,3 +1,6 @@
+import { Link } from 'react-router-dom'
+import { paths } from '../../config/paths'
+
 export interface SiteFooterProps {
   /** True where the catalogue holds demo data. */
   readonly isDemo: boolean
@@ -19,6 +22,12 @@ export function SiteFooter({ isDemo }: SiteFooterProps) {
         <div className="space-y-2">
           {isDemo && <p className="text-ink">Demo data: every brand and product here is invented.</p>}
           <p>Nobody pays for a place in the answers.</p>
+          <p className="print:hidden">
+            <Link to={paths.worksheets} className="link inline-block min-h-6">
+              Worksheets
+            </Link>
+            : every calculation by itself.
+          </p>
         </div>
       </div>
     </footer>

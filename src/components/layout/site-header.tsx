@@ -3,7 +3,8 @@ import { Link, NavLink } from 'react-router-dom'
 import { Wordmark } from './wordmark'
 
 export interface SiteHeaderProps {
-  readonly links: readonly { readonly href: string; readonly label: string }[]
+  /** Those for wide screens alone are in the footer too. */
+  readonly links: readonly { readonly href: string; readonly label: string; readonly isWideOnly?: true }[]
   readonly unitSwitch: ReactNode
   readonly themeSwitch: ReactNode
 }
@@ -19,8 +20,8 @@ export function SiteHeader({ links, unitSwitch, themeSwitch }: SiteHeaderProps) 
         <div className="justify-self-end md:order-3 print:hidden">{unitSwitch}</div>
         <nav aria-label="Pages" className="self-stretch overflow-x-auto md:order-2 print:hidden">
           <ul className="flex h-full gap-x-5">
-            {links.map(({ href, label }) => (
-              <li key={href} className="flex">
+            {links.map(({ href, label, isWideOnly }) => (
+              <li key={href} className={isWideOnly ? 'hidden md:flex' : 'flex'}>
                 <NavLink
                   to={href}
                   className="flex min-h-11 items-center border-y-[3px] border-transparent text-ink-soft -outline-offset-2 hover:text-action aria-[current=page]:border-b-action aria-[current=page]:font-semibold aria-[current=page]:text-ink"

@@ -1,3 +1,4 @@
+import { Link } from 'react-router-dom'
 import { isCloseCall } from '#shared/engine/physics/conformance'
 import { labelSetupPath } from '#shared/engine/assumptions'
 import type { Plan } from '#shared/engine/setup/plan'
@@ -14,13 +15,15 @@ export interface CheckItemProps {
   readonly printer: Printer
   /** Drawn once its list is open: a closed list of gauges weighs more than the page around it. */
   readonly hasGauge: boolean
+  /** Where its numbers are worked out, if they are. */
+  readonly workingHref?: string | undefined
 }
 
 const bases = { physics: 'Computed', standard: 'Standard', practice: 'Practice' } as const
 const outcomeWords = { pass: 'passes', change: 'needs a change', fail: 'fails', nodata: 'not enough data' } as const
 
 /** One check in full: what was measured, the limit, where the rule is from, and what it rests on. */
-export function CheckItem({ check, plan, printer, hasGauge }: CheckItemProps) {
+export function CheckItem({ check, plan, printer, hasGauge, workingHref }: CheckItemProps) {
   const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [], probability } = check
   const canonical = findScaleUnit(unit)
   const isDrawn = typeof measured === 'number' && limit !== null
@@ -52,6 +55,17 @@ export function CheckItem({ check, plan, printer, hasGauge }: CheckItemProps) {
         <p className="mt-1 text-xs text-ink-soft">
           {bases[basis.type]}: {basis.source}
         </p>
+        {workingHref !== undefined && outcome !== 'nodata' && (
+          <p className="mt-1 text-xs print:hidden">
+            <Link
+              to={workingHref}
+              aria-label={`Show the working: ${label}`}
+              className="link inline-block min-h-6 py-0.5"
+            >
+              Show the working
+            </Link>
+          </p>
+        )}
         {assumed.length > 0 && (
           <p className="mt-1 text-xs text-ink-soft">
             Rests on what is assumed: {assumed.map((path) => labelSetupPath(path, plan)).join(', ')}.

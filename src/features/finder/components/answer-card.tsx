@@ -10,6 +10,7 @@ import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { Finder } from '../hooks/use-finder'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { CheckItem } from '../../../components/setup/check-item'
+import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findTrial } from '../../../components/setup/find-trial'
 import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
@@ -132,7 +133,18 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
             {isOpen && <LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
             <ul>
               {checks.map((check) => (
-                <CheckItem key={check.id} check={check} plan={plan} printer={printer} hasGauge={isOpen} />
+                <CheckItem
+                  key={check.id}
+                  check={check}
+                  plan={plan}
+                  printer={printer}
+                  hasGauge={isOpen}
+                  workingHref={
+                    slug === null
+                      ? undefined
+                      : writeWorkingHref(check.id, state.raw, printer.system, { piece: slug, quantity })
+                  }
+                />
               ))}
             </ul>
           </Disclosure>

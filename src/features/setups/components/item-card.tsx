@@ -3,6 +3,7 @@ import { Link } from 'react-router-dom'
 import type { ItemReport } from '#shared/engine/types'
 import { getKind } from '#shared/kinds/index'
 import { CheckItem } from '../../../components/setup/check-item'
+import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { writeSetupHref } from '../../../components/setup/setup-href'
@@ -90,7 +91,14 @@ export function ItemCard({ item, shown, saidAbove }: ItemCardProps) {
           >
             <ul>
               {checks.map((check) => (
-                <CheckItem key={check.id} check={check} plan={plan} printer={printer} hasGauge={isOpen} />
+                <CheckItem
+                  key={check.id}
+                  check={check}
+                  plan={plan}
+                  printer={printer}
+                  hasGauge={isOpen}
+                  workingHref={writeWorkingHref(check.id, visit.raw, printer.system, { item: id })}
+                />
               ))}
             </ul>
           </Disclosure>
