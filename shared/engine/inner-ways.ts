@@ -9,26 +9,39 @@ export const listInnerShares = ({ isModelled }: Rule): readonly number[] => (isM
 const points = [0, ...innerShares, 1]
 /** Further from its limit than this no point between two neighbours keeps it. */
 const hopeless = -0.35
+/** The same where nothing tried is better than what is there. */
+const hopelessHere = -0.1
 const golden = (Math.sqrt(5) - 1) / 2
-const narrowings = 14
+const narrowings = 10
 
 /**
  * The share of a direction at which a margin is greatest, between the neighbours of the best of a few points, by golden
- * section. Undefined where it is far from enough at all of them. `at` is asked for the few points, `near` for the rest.
+ * section. Undefined where nothing turns on the direction, or it is far from enough at all of them. `at` is asked for the
+ * few points, `near` for the rest.
  */
 export function findPeak(
   at: (share: number) => number | null,
   near: (share: number) => number | null,
 ): number | undefined {
   const margins = points.map((share) => at(share) ?? -Infinity)
-  const best = margins.indexOf(Math.max(...margins))
-  if ((margins[best] ?? -Infinity) < hopeless) return undefined
+  const most = Math.max(...margins)
+  const best = margins.indexOf(most)
+  if (most < (best === 0 ? hopelessHere : hopeless) || margins.every((margin) => margin === most)) return undefined
   let low = points[Math.max(0, best - 1)] ?? 0
   let high = points[Math.min(points.length - 1, best + 1)] ?? 1
+  const probe = (share: number) => ({ share, margin: near(share) ?? -Infinity })
+  let left = probe(high - golden * (high - low))
+  let right = probe(low + golden * (high - low))
   for (let step = 0; step < narrowings; step += 1) {
-    const [left, right] = [high - golden * (high - low), low + golden * (high - low)]
-    if ((near(left) ?? -Infinity) > (near(right) ?? -Infinity)) high = right
-    else low = left
+    if (left.margin > right.margin) {
+      high = right.share
+      right = left
+      left = probe(high - golden * (high - low))
+    } else {
+      low = left.share
+      left = right
+      right = probe(low + golden * (high - low))
+    }
   }
-  return (low + high) / 2
+  return left.margin > right.margin ? left.share : right.share
 }

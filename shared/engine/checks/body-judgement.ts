@@ -23,13 +23,12 @@ const outside = ['tank.outerLengthMm', 'tank.outerWidthMm', 'tank.outerHeightMm'
  * Setup paths that could bring another size of the water that a body does not fit in, or other water: a chamber's depth
  * follows from the tank's line, a sump's and the display's sizes from its outside, where nobody said them.
  */
-export function listBodyTurns({ path, id }: BodyFit['basin']): readonly string[] {
-  if (path.startsWith('tank.chambers.'))
-    return [
-      ...['lengthMm', 'widthMm', 'waterDepthMm'].map((key) => `tank.chambers.*.${key}`),
-      'tank.waterLineMm',
-      ...outside,
-    ]
+export function listBodyTurns({ assumed, tank }: Plan, { path, id }: BodyFit['basin']): readonly string[] {
+  if (path.startsWith('tank.chambers.')) {
+    const isDepthAssumed = tank.chambers.some((_, index) => assumed.has(`tank.chambers.${index}.waterDepthMm`))
+    const own = ['lengthMm', 'widthMm', 'waterDepthMm'].map((key) => `tank.chambers.*.${key}`)
+    return isDepthAssumed ? [...own, 'tank.waterLineMm', ...outside] : own
+  }
   const own =
     id === 'sump'
       ? ['lengthMm', 'widthMm', 'waterDepthMm'].map((key) => `${path}.${key}`)
@@ -48,7 +47,7 @@ export function judgeBody(fit: BodyFit, plan: Plan, subject?: string): Judgement
     outcome: fit.fits ? 'pass' : 'fail',
     ...(isBySize && { measured: fit.measuredMm, limit: fit.limitMm, probability: fit.probability }),
     ...(fit.fits && { placement: { chamber: fit.basin.id, position: 'upright' as const, angleDeg: 90 } }),
-    rests: () => (fit.fits ? listBodySizes(fit) : listBodyTurns(fit.basin)),
+    rests: () => (fit.fits ? listBodySizes(fit) : listBodyTurns(plan, fit.basin)),
     cautions: [...inDisplay, ...fit.cautions],
     say: describeBody(fit, subject),
   }
