@@ -14,11 +14,11 @@ export interface SandScaleProps {
 
 const sheet = {
   sidePx: 30,
-  grainsPx: 104,
-  bandPx: 116,
+  grainsPx: 62,
+  bandPx: 74,
   bandTallPx: 34,
-  axisPx: 150,
-  heightPx: 196,
+  axisPx: 108,
+  heightPx: 154,
   defaultPx: 480,
 } as const
 /** The largest grain that is drawn, and how large; all others to its scale. */

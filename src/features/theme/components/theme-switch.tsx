@@ -1,6 +1,6 @@
-import { Monitor, Moon, Sun } from 'lucide-react'
 import { PreferenceSwitch } from '../../../components/layout/preference-switch'
 import type { Theme } from '../theme'
+import { ThemeIcon } from './theme-icon'
 
 export interface ThemeSwitchProps {
   readonly theme: Theme
@@ -10,9 +10,9 @@ export interface ThemeSwitchProps {
 }
 
 const options = [
-  { value: 'light', label: <Sun size={15} aria-hidden="true" />, name: 'Light paper' },
-  { value: 'dark', label: <Moon size={15} aria-hidden="true" />, name: 'Dark water' },
-  { value: 'system', label: <Monitor size={15} aria-hidden="true" />, name: 'Light or dark as the system has it' },
+  { value: 'light', label: <ThemeIcon theme="light" />, name: 'Light paper' },
+  { value: 'dark', label: <ThemeIcon theme="dark" />, name: 'Dark water' },
+  { value: 'system', label: <ThemeIcon theme="system" />, name: 'Light or dark as the system has it' },
 ] as const
 
 export function ThemeSwitch({ theme, next, onChange }: ThemeSwitchProps) {
