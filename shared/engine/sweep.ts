@@ -7,7 +7,7 @@ import type { Judged } from './judge'
 import type { Candidate } from './rule'
 import { countDifferences } from './swap/differences'
 import { countExtraPieces } from './swap/meeting-kinds'
-import { codes, Table, toCode, wouldSeveralDo } from './table'
+import { codes, isDemand, Table, toCode, wouldSeveralDo } from './table'
 import type { Piece, Verdict } from './types'
 
 const verdictOfCode: readonly (Verdict | null)[] = ['fits', 'changes', 'unknown', 'no', null]
@@ -28,7 +28,7 @@ export interface Sweep {
   readonly bench: Bench
   /** Null: left out. */
   readonly verdicts: readonly (Verdict | null)[]
-  /** Own changes and those of the rest of the setup. */
+  /** Own changes, those that for all that is known are some, and those of the rest of the setup. */
   readonly demands: Int32Array
   /** Pieces that have to be got beside it, by kind; 0 where nothing is gone. */
   readonly extrasOf: (index: number) => number
@@ -126,7 +126,7 @@ function addUp(bench: Bench, tables: Tables, first: Table, own: Int8Array, deman
       const coded = (isUniform ? column : tables.of(index).columns[at]!).codeOf(index)
       const code = toCode(coded)
       if (code > own[index]!) own[index] = code
-      if (code === codes.change) demands[index]! += demand
+      if (isDemand(coded)) demands[index]! += demand
       // Of what is gone more would have been better too: its replacement takes its place one for one.
       if (wouldSeveralDo(coded) && demand === 1) several[index] = 1
     }
@@ -142,7 +142,7 @@ function settleOn(bench: Bench, tables: Tables, index: number, number: number, o
   tables.ofPiece[index] = number
   const table = tables.all[number]!
   own[index] = table.codeOf(index)
-  demands[index] = table.countChanges(index, (ruleId) => isConceded(bench, ruleId))
+  demands[index] = table.countDemands(index, (ruleId) => isConceded(bench, ruleId))
 }
 
 /** Judges so many of a piece as would do; if that fails elsewhere (no room), one of it without that way out. */

@@ -8,12 +8,15 @@ import { isCloseJudgement } from './verdict'
 /** What one judgement does to the verdict; the worst of a piece's codes is its verdict. */
 export const codes = { nothing: 0, change: 1, unknown: 2, fail: 3 } as const
 
-/** Beside the code: several of the piece would do; the rule does not apply to it. */
+/** Beside the code: several of the piece would do; the rule does not apply to it; for want of a number it may be a change. */
 const severalWouldDo = 8
 const doesNotApply = 16
+const mayBeChange = 32
 const notAsked = -1
 
 export const toCode = (coded: number): number => coded & 7
+/** A change, or for all that is known one: what is certain to need nothing comes first. */
+export const isDemand = (coded: number): boolean => toCode(coded) === codes.change || (coded & mayBeChange) !== 0
 export const wouldSeveralDo = (coded: number): boolean => (coded & severalWouldDo) !== 0
 
 const codeOfGlance: Readonly<Record<Exclude<Glance, 'fail'>, number>> = {
@@ -27,7 +30,7 @@ function encode(judged: Judged | null): number {
   if (!judged) return codes.nothing | doesNotApply
   const outcome = judged.eitherWay ?? judged.outcome
   if (outcome === 'fail') return codes.fail
-  if (outcome === 'nodata') return judged.rule.worst === 'fail' ? codes.unknown : codes.nothing
+  if (outcome === 'nodata') return judged.rule.worst === 'fail' ? codes.unknown : codes.nothing | mayBeChange
   if (outcome === 'change') return codes.change | (judged.judgement.enough === undefined ? 0 : severalWouldDo)
   return codes.nothing
 }
@@ -125,10 +128,9 @@ export class Table {
     return worst
   }
 
-  countChanges(index: number, isConceded: (ruleId: string) => boolean): number {
+  countDemands(index: number, isConceded: (ruleId: string) => boolean): number {
     let count = 0
-    for (const column of this.columns)
-      if (toCode(column.codeOf(index)) === codes.change && !isConceded(column.rule.id)) count += 1
+    for (const column of this.columns) if (isDemand(column.codeOf(index)) && !isConceded(column.rule.id)) count += 1
     return count
   }
 

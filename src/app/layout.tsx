@@ -12,6 +12,7 @@ import { keepPreferences, type Preferences } from '../lib/preferences'
 
 const links = [
   { href: paths.find, label: 'Find' },
+  { href: paths.setupNew, label: 'Setups' },
   { href: paths.gearList, label: 'Gear' },
   { href: paths.worksheets, label: 'Worksheets', isWideOnly: true as const },
   { href: paths.method, label: 'Method' },

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { replacements } from '#shared/engine/swap/replacements'
 import { countDifferences, findDifferences } from '#shared/engine/swap/differences'
+import type { Piece } from '#shared/engine/types'
 import { createPrinter } from '#shared/units/print'
 import { heater, item, piece, toPlain, toSpecs, wholeSetup } from './build'
 import { catalogueOf, demoCatalogue } from './demo-catalogue'
@@ -52,7 +53,7 @@ describe('the differences from what is gone', () => {
 })
 
 describe('how many of a replacement there are', () => {
-  const counts = (gone: Parameters<typeof item>[1], quantity: number, ...pieces: Parameters<typeof catalogueOf>) => {
+  const counts = (gone: Parameters<typeof item>[1], quantity: number, ...pieces: readonly Piece[]) => {
     const setup = wholeSetup({}, { items: [item('gone', gone, { quantity })] })
     const { answers } = replacements(setup, 'gone', catalogueOf(...pieces), { limit: 10, offset: 0 })!
     return Object.fromEntries(answers.map(({ pieces: [first] }) => [first?.gear?.slug, first?.quantity]))

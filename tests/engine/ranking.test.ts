@@ -28,6 +28,19 @@ describe('the order of answers', () => {
     expect(order(wholeSetup(), pieces)).toEqual(['b-one', 'a-two'])
   })
 
+  it('then by what is certain to need nothing, before what may need something for all that is known', () => {
+    const pieces = [heater({ powerW: 160, plugs: undefined }, 'a-unknown-plugs'), heater({ powerW: 125 }, 'b-known')]
+    expect(order(wholeSetup(), pieces)).toEqual(['b-known', 'a-unknown-plugs'])
+    const kits = [
+      piece('test-kit', {}, 'a-unknown'),
+      piece('test-kit', { parameters: ['ammonia', 'nitrite', 'nitrate'] }, 'b-known'),
+    ]
+    expect(fit(wholeSetup(), 'test-kit', kits, page).answers.map(({ gear }) => gear?.slug)).toEqual([
+      'b-known',
+      'a-unknown',
+    ])
+  })
+
   it('then by the duty nearest to half on the coldest night, not by power', () => {
     // The need is some 84 W by ASHRAE's figure, so that 160 W run a little more than half of the time.
     const pieces = [100, 160, 125, 140].map((powerW) => heater({ powerW }, `w${powerW}`))

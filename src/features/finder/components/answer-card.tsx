@@ -13,6 +13,7 @@ import { CheckItem } from '../../../components/setup/check-item'
 import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findTrial } from '../../../components/setup/find-trial'
+import { PieceNames } from '../../../components/setup/piece-names'
 import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
 import { TurnLine } from '../../../components/setup/turn-line'
 
@@ -41,7 +42,6 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
   const { printer, plan, given, hrefOf, state } = finder
   const deciding = findDecidingCheck(checks)
   const cautions = answer.cautions.filter((caution) => !saidAbove.includes(caution))
-  const quantity = pieces[0]?.quantity ?? 1
   const slug = gear?.slug ?? null
   const trial = turnsBy && findTrial(turnsBy, state.raw, printer)
   return (
@@ -59,19 +59,11 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
         <VerdictIcon verdict={verdict} size={28} />
         <div className="min-w-0">
           <h4 className="font-heading text-lg leading-snug font-bold">
-            {quantity > 1 && <span>{quantity} × </span>}
-            {gear ? (
-              <Link
-                to={paths.gear(gear.slug)}
-                className="decoration-1 underline-offset-4 hover:text-action hover:underline"
-              >
-                {gear.brand} · {gear.model}
-              </Link>
-            ) : (
-              'This piece'
-            )}
+            <PieceNames pieces={pieces} />
           </h4>
-          <p className="text-sm text-ink-soft">{describeSpecs(kind, bareSpecs(answer), printer)}</p>
+          {pieces.length === 1 && (
+            <p className="text-sm text-ink-soft">{describeSpecs(kind, bareSpecs(answer), printer)}</p>
+          )}
           <p className="mt-1">{summary}</p>
           {turnsBy && <TurnLine turn={turnsBy} href={trial && hrefOf({ raw: trial, picked: slug })} />}
           <p className="mt-1 flex flex-wrap gap-x-4 text-sm text-ink-soft">
