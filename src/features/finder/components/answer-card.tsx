@@ -4,7 +4,6 @@ import { Link } from 'react-router-dom'
 import type { Answer } from '#shared/engine/types'
 import { Disclosure } from '../../../components/ui/disclosure'
 import { VerdictIcon } from '../../../components/ui/verdict-icon'
-import { paths } from '../../../config/paths'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { Finder } from '../hooks/use-finder'
@@ -39,6 +38,7 @@ function countKnockOns(count: number): string {
 export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], onPoint }: AnswerCardProps) {
   const [isOpen, setIsOpen] = useState(false)
   const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence, turnsBy } = answer
+  const quantity = pieces[0]?.quantity ?? 1
   const { printer, plan, given, hrefOf, state } = finder
   const deciding = findDecidingCheck(checks)
   const cautions = answer.cautions.filter((caution) => !saidAbove.includes(caution))
