@@ -8,8 +8,13 @@ import { findMargin } from './margin'
 import { isCloseCall } from './physics/conformance'
 import type { Check, ItemReport, Need, Report, Verdict } from './types'
 
-const closeness = (probability: number): string =>
-  ` A close call: the chance that it keeps to the limit is ${Math.round(probability * 100)} %; measure before buying.`
+/** "A close call, 93 % sure: measure the rear chamber before buying." */
+function sayClose(probability: number, settle: string): string {
+  const percent = Math.round(probability * 100)
+  return probability >= 0.5
+    ? ` A close call, ${percent} % sure: ${settle} before buying.`
+    : ` A close call: it may keep to the limit all the same, ${percent} % sure; ${settle} before ruling it out.`
+}
 
 /** One check in words, in the reader's units. */
 export function presentCheck(judged: Judged, words: Printer): Check {
@@ -17,11 +22,11 @@ export function presentCheck(judged: Judged, words: Printer): Check {
   const { missing } = judgement
   const assumed = judged.assumed()
   const probability = outcome === 'nodata' ? undefined : judgement.probability?.()
-  const close = probability !== undefined && isCloseCall(probability)
+  const settle = probability !== undefined && isCloseCall(probability) ? (judgement.settle?.() ?? 'measure') : undefined
   const message = [
     judgement.say(words),
     condition ? ` ${describeCondition(condition())(words)}` : '',
-    close ? closeness(probability) : '',
+    probability !== undefined && settle !== undefined ? sayClose(probability, settle) : '',
   ]
   return {
     id: rule.id,
@@ -36,6 +41,7 @@ export function presentCheck(judged: Judged, words: Printer): Check {
     ...(missing && missing.length > 0 && { missing }),
     ...(assumed.length > 0 && { assumed }),
     ...(probability !== undefined && { probability }),
+    ...(settle !== undefined && { closeCall: settle }),
   }
 }
 

@@ -23,6 +23,8 @@ export interface Judgement {
   readonly say: Say
   /** Probability that the limit is kept; asked for only where somebody reads it. */
   readonly probability?: () => number
+  /** What to measure or check first where that is a close call: "measure the rear chamber". */
+  readonly settle?: () => string | undefined
   readonly missing?: readonly string[]
   readonly asks?: Ask
   readonly placement?: Placement

@@ -151,6 +151,8 @@ export interface Check {
   readonly assumed?: readonly string[]
   /** Probability that the limit is kept, from the sources' ± (JCGM 106). */
   readonly probability?: number
+  /** Where it could as well go the other way (5 to 95 %): what to do first, as in "measure the rear chamber". */
+  readonly closeCall?: string
 }
 
 export interface KnockOn {

@@ -27,6 +27,8 @@ export const checkSchema = z.object({
   missing: z.array(z.string()).optional(),
   assumed: z.array(z.string()).optional(),
   probability: z.number().min(0).max(1).optional(),
+  /** Where it could as well go the other way (5 to 95 %): what to measure or check first. */
+  closeCall: z.string().optional(),
 })
 
 const knockOnSideSchema = z.union([outcomeSchema, z.number(), z.null()])

@@ -245,9 +245,7 @@ describe('the probability that a limit is kept', () => {
     const rod = heater({ lengthMm: 329, orientation: 'vertical' })
     const answer = fitCheck(wholeSetup(), rod)
     expect(answer.confidence.closeCalls).toBe(1)
-    expect(checkOf(answer, 'heater.space').message).toMatch(
-      /close call: the chance that it keeps to the limit is \d\d %/,
-    )
+    expect(checkOf(answer, 'heater.space').message).toMatch(/A close call, \d\d % sure: /)
     expect(fitCheck(wholeSetup(), heater()).confidence.closeCalls).toBe(0)
   })
 })

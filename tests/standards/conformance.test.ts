@@ -7,6 +7,7 @@ import {
   normalCdf,
   probabilityAtLeast,
   probabilityAtMost,
+  probabilityReaches,
   probabilityWithin,
   standardUncertainty,
 } from '#shared/engine/physics/conformance'
@@ -56,6 +57,13 @@ describe('how sure a fit is', () => {
   it('lies between two limits by what is below the one and not below the other', () => {
     // One standard deviation either side: 0.84134 − 0.15866.
     expectWithin(probabilityWithin(10, 8, 12, 2), 0.68268, 2e-5)
+  })
+
+  it('of what can be set is that of the end of its range that is less sure', () => {
+    // 10 to 14 with u = 1 reaches 13 to 20: 14 is at least 13 with Φ(1) = 0.84134, 10 is at most 20 with Φ(10) = 1.
+    expectWithin(probabilityReaches([10, 14], 13, 20, 1), 0.84134, 1e-5)
+    // 22 to 30 reaches 10 to 20 with Φ(−2) = 1 − 0.97725.
+    expectWithin(probabilityReaches([22, 30], 10, 20, 1), 0.02275, 1e-5)
   })
 
   it('is certain where nothing is uncertain, and a value on the limit keeps it', () => {

@@ -3,7 +3,8 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Say } fro
 import { once, type Scene } from '../scene'
 import { thresholds } from '../thresholds'
 import type { Value } from '../types'
-import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
 import { readMeasure, readNumber } from '../values'
 import { bodyUses, judgeBody, lackWater } from './body-judgement'
 import { chooseBasin, tryBody } from './body-space'
@@ -48,12 +49,14 @@ function judgeLift(scene: Scene, candidate: Candidate): Judgement {
   const basin = findPumpBasins(scene, candidate)[0]
   const isSump = basin?.id === 'sump'
   const liftM = (isSump ? basin.waterDepthMm + thresholds.sumpRimMm.value : scene.plan.room.tankTopMm) / 1000
-  const u = standardUncertainty(head.value, head.source, head.plusMinus, 'other')
   return {
     outcome: head.value >= liftM ? 'pass' : 'fail',
     measured: head.value,
     limit: liftM,
-    probability: () => probabilityAtLeast(head.value, liftM, u),
+    ...beSure(
+      (u) => probabilityAtLeast(head.value, liftM, u),
+      () => [doubt(head, 'other', 'check how high its pump lifts')],
+    ),
     rests: () => [...(isSump ? ['tank.sump.waterDepthMm'] : topRests), 'tank.filtration'],
     cautions: warnReservoir(scene, readNumber(specs, 'reservoirL')),
     say: (words) =>

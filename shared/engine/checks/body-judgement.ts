@@ -45,7 +45,7 @@ export function judgeBody(fit: BodyFit, plan: Plan, subject?: string): Judgement
     fit.basin.id === 'display' && fit.fits ? [() => 'No chamber or sump for it: it stands in the display.'] : []
   return {
     outcome: fit.fits ? 'pass' : 'fail',
-    ...(isBySize && { measured: fit.measuredMm, limit: fit.limitMm, probability: fit.probability }),
+    ...(isBySize && { measured: fit.measuredMm, limit: fit.limitMm, probability: fit.probability, settle: fit.settle }),
     ...(fit.fits && { placement: { chamber: fit.basin.id, position: 'upright' as const, angleDeg: 90 } }),
     rests: () => (fit.fits ? listBodySizes(fit) : listBodyTurns(plan, fit.basin)),
     cautions: [...inDisplay, ...fit.cautions],

@@ -1,5 +1,6 @@
 import { sayUncounted } from '../counting'
-import { combineUncertainties, probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt, doubtBasin } from '../doubt'
+import { probabilityAtMost } from '../physics/conformance'
 import { passesOpening, type Rectangle } from '../physics/geometry'
 import { packRectangles, type Packing } from '../physics/packing'
 import { findOccupants, type Basin } from '../setup/places'
@@ -28,6 +29,7 @@ export interface BodyFit {
   /** So many stand together that no arrangement was found, and none was ruled out. */
   readonly isUnsure: boolean
   readonly probability: () => number
+  readonly settle: () => string | undefined
   readonly cautions: readonly Say[]
 }
 
@@ -111,10 +113,6 @@ export function tryBody(body: Body, basin: Basin, others: readonly Item[]): Body
   const isThrough = passes(body, basin)
   const company = findCompany(basin, others, [body.length.value, body.width.value], body.quantity, body.clearanceMm)
   const isAlone = isKept(tight) && isThrough
-  const u = combineUncertainties(
-    standardUncertainty(tight.of.value, tight.of.source, tight.of.plusMinus, 'length'),
-    standardUncertainty(tight.limitMm, basin.source, basin.plusMinus, 'length'),
-  )
   return {
     basin,
     fits: isAlone && company === 'fits',
@@ -122,7 +120,10 @@ export function tryBody(body: Body, basin: Basin, others: readonly Item[]): Body
     limitMm: tight.limitMm,
     tight: !isKept(tight) ? tight.tight : !isThrough ? 'opening' : company !== 'fits' ? 'company' : tight.tight,
     isUnsure: isAlone && company === 'unknown',
-    probability: () => probabilityAtMost(tight.measuredMm, tight.limitMm, u),
+    ...beSure(
+      (u) => probabilityAtMost(tight.measuredMm, tight.limitMm, u),
+      () => [doubt(tight.of, 'length', 'check its size'), doubtBasin(basin, tight.limitMm)],
+    ),
     cautions: warnUncounted(basin, others),
   }
 }

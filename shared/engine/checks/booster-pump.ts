@@ -1,8 +1,10 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
-import { readFlag, readNumber } from '../values'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
+import { readFlag, readMeasure, readNumber } from '../values'
 import { createRuleMaker } from './build-rule'
-import { findOutputLpd } from './ro-unit'
+import { doubtFeed, doubtOutput, findOutputLpd } from './ro-unit'
 
 const findUnit = ({ others }: Scene) => others.find((item) => item.piece.kind === 'ro-unit')
 
@@ -13,45 +15,55 @@ const noUnit: Judgement = {
 }
 
 function judgeInlet({ plan }: Scene, { piece }: Candidate): Judgement {
-  const least = readNumber(piece.specs, 'inletMinKPa')
-  if (least === undefined) return lacking(['inletMinKPa'], () => 'Nobody has recorded the inlet pressure it needs.')
+  const needed = readMeasure(piece.specs, 'inletMinKPa')
+  if (!needed) return lacking(['inletMinKPa'], () => 'Nobody has recorded the inlet pressure it needs.')
   const { feedKPa } = plan.water
+  const least = needed.value
   return {
     outcome: feedKPa >= least ? 'pass' : 'fail',
     measured: feedKPa,
     limit: least,
+    ...beSure(
+      (u) => probabilityAtLeast(feedKPa, least, u),
+      () => [doubtFeed(plan), doubt(needed, 'other', 'check the pressure it needs')],
+    ),
     say: (words) =>
       `Needs ${words.measure(least, 'kPa')} at its inlet, and your tap has ${words.measure(feedKPa, 'kPa')}.`,
   }
 }
 
 function judgePressure(scene: Scene, { piece }: Candidate): Judgement {
-  const outlet = readNumber(piece.specs, 'outletKPa')
-  if (outlet === undefined) return lacking(['outletKPa'], () => 'Nobody has recorded the pressure it gives.')
+  const given = readMeasure(piece.specs, 'outletKPa')
+  if (!given) return lacking(['outletKPa'], () => 'Nobody has recorded the pressure it gives.')
   const unit = findUnit(scene)
   if (!unit) return noUnit
-  const least = readNumber(unit.piece.specs, 'minFeedKPa')
-  if (least === undefined)
+  const needed = readMeasure(unit.piece.specs, 'minFeedKPa')
+  if (!needed)
     return { outcome: 'nodata', missing: [], say: () => 'Nobody has recorded the pressure that the RO/DI unit needs.' }
+  const [outlet, least] = [given.value, needed.value]
   return {
     outcome: outlet >= least ? 'pass' : 'fail',
     measured: outlet,
     limit: least,
+    ...beSure(
+      (u) => probabilityAtLeast(outlet, least, u),
+      () => [
+        doubt(given, 'other', 'check the pressure it gives'),
+        doubt(needed, 'other', 'check the pressure that the RO/DI unit needs'),
+      ],
+    ),
     say: (words) => `Gives ${words.measure(outlet, 'kPa')}, and the RO/DI unit needs ${words.measure(least, 'kPa')}.`,
   }
 }
 
 function judgeFlow(scene: Scene, { piece, quantity }: Candidate): Judgement {
-  const most = readNumber(piece.specs, 'maxLpd')
+  const most = readMeasure(piece.specs, 'maxLpd')
   const missing = [
-    ...(most === undefined ? ['maxLpd'] : []),
+    ...(most ? [] : ['maxLpd']),
     ...(readNumber(piece.specs, 'outletKPa') === undefined ? ['outletKPa'] : []),
   ]
-  if (most === undefined || missing.length > 0)
-    return lacking(
-      missing,
-      () => `Nobody has recorded the ${most === undefined ? 'flow it delivers' : 'pressure it gives'}.`,
-    )
+  if (!most || missing.length > 0)
+    return lacking(missing, () => `Nobody has recorded the ${most ? 'pressure it gives' : 'flow it delivers'}.`)
   const unit = findUnit(scene)
   if (!unit) return noUnit
   const hasOwnBooster = readFlag(unit.piece.specs, 'boosterIncluded') ?? false
@@ -64,12 +76,16 @@ function judgeFlow(scene: Scene, { piece, quantity }: Candidate): Judgement {
       missing: [],
       say: () => 'Nobody has recorded all that the RO/DI unit’s output is computed from.',
     }
-  const deliveredLpd = most * quantity
+  const deliveredLpd = most.value * quantity
   const neededLpd = output * unit.quantity * (1 + waste)
   return {
     outcome: deliveredLpd >= neededLpd ? 'pass' : 'fail',
     measured: deliveredLpd,
     limit: neededLpd,
+    ...beSure(
+      (u) => probabilityAtLeast(deliveredLpd, neededLpd, u),
+      () => [doubt(most, 'other', 'check the flow it delivers', quantity), doubtOutput(unit.piece.specs, neededLpd)],
+    ),
     say: (words) =>
       `Delivers ${words.measure(deliveredLpd, 'L/d')}, and the RO/DI unit takes ${words.measure(neededLpd, 'L/d')} with its waste.`,
   }

@@ -1,4 +1,6 @@
 import type { KindKey } from '../../kinds/index'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtMost } from '../physics/conformance'
 import { continuousShare } from '../physics/loads'
 import { otherControllers, otherLimits, otherLoad, otherPlugs } from '../mains-budget'
 import { countOf, sayFree, sayUncounted } from '../counting'
@@ -124,6 +126,10 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
     outcome: totalW <= continuousW ? 'pass' : 'change',
     measured: totalW,
     limit: continuousW,
+    ...beSure(
+      (u) => probabilityAtMost(totalW, continuousW, u),
+      () => [doubt(power, 'other', 'check the power on its rating plate', quantity)],
+    ),
     cautions,
     ...(totalW > continuousW && { asks: { need: 'circuit', amount: totalW - continuousW, unit: 'W' as const } }),
     say: (words) =>

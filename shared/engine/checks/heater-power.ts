@@ -1,6 +1,7 @@
 import { findColdestHeldC, findHeaterNeed, findStuckOn, findUnheatedC } from '../heat-budget'
 import { otherControllers } from '../mains-budget'
-import { probabilityAtLeast, probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast, probabilityAtMost } from '../physics/conformance'
 import {
   countOfThese,
   isMultiplied,
@@ -45,8 +46,9 @@ const sandUses = ['tank.displayLengthMm', 'tank.displayWidthMm']
 
 const noPower = lacking(['powerW'], () => 'Nobody has recorded its power yet.')
 
-const uncertaintyW = (power: Value<number>, quantity: number) =>
-  quantity * standardUncertainty(power.value, power.source, power.plusMinus, 'other')
+const doubtPower = (power: Value<number>, quantity: number) => [
+  doubt(power, 'other', 'check the power on its rating plate', quantity),
+]
 
 /** What all heaters together do: from more than is needed down to too little; `pair`: a second one like it would do. */
 type PowerGrade = 'unneeded' | 'holds' | 'several' | 'barely' | 'pair' | 'usually' | 'weak'
@@ -93,13 +95,15 @@ function judgePower(scene: Scene, candidate: Candidate): Judgement {
   const totalW = power.value * quantity + otherHeatersW
   const goalC = plan.goals.temperatureC
   const coldestC = plan.room.coldestC
-  const probability = () => probabilityAtLeast(totalW, needUpperW, uncertaintyW(power, quantity))
   const grade = gradePower(scene, candidate, power.value)
   return {
     outcome: outcomeOf[grade],
     measured: totalW,
     limit: needUpperW,
-    probability,
+    ...beSure(
+      (u) => probabilityAtLeast(totalW, needUpperW, u),
+      () => doubtPower(power, quantity),
+    ),
     ...(grade === 'pair' && { enough: 2 }),
     say: (words) => {
       const goal = words.temperature(goalC)
@@ -212,7 +216,10 @@ function judgeStrength(scene: Scene, candidate: Candidate): Judgement {
     outcome,
     measured: totalW,
     limit,
-    probability: () => probabilityAtMost(totalW, limit, uncertaintyW(power, quantity)),
+    ...beSure(
+      (u) => probabilityAtMost(totalW, limit, u),
+      () => doubtPower(power, quantity),
+    ),
     ...(outcome === 'change' && { asks: { need: 'second-cut-off', amount: null, unit: null } }),
     rests: () => (scene.plan.tank.waterL < scene.plan.tank.grossL ? [...strengthUses, ...sandUses] : strengthUses),
     cautions: [warnStuckOn(scene, totalW, totalW === power.value), warnHot(scene)],

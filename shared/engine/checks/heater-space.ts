@@ -77,6 +77,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     return {
       outcome: 'pass',
       probability: () => Math.min(...shares.map((share) => share.stand.probability())),
+      settle: shares[0].stand.settle,
       placement: shares[0].stand.placement,
       rests: () => [...new Set(shares.flatMap((share) => listSizes(share.stand)))],
       say: describeShares(shares),
@@ -99,6 +100,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     outcome: stand.fits ? 'pass' : 'fail',
     ...(stand.tight !== 'company' && { measured: stand.measuredMm, limit: stand.limitMm }),
     probability: stand.probability,
+    settle: stand.settle,
     ...(stand.fits && { placement: stand.placement }),
     rests: () => [...listDerived(scene, stands.flatMap(listSizes)), ...restsOnPlace(scene, stand.basin)],
     say: describeStand(stand),

@@ -2,10 +2,12 @@ import { findColdestHeldC, findHeaterNeed } from '../heat-budget'
 import { otherControllers } from '../mains-budget'
 import { glanceBy, lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
 import { once, type Scene } from '../scene'
+import { beSure } from '../doubt'
+import { probabilityAtLeast, probabilityAtMost } from '../physics/conformance'
 import { practiceBasis, thresholds } from '../thresholds'
 import type { Specs } from '../types'
 import { readNumber, readText } from '../values'
-import { grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
+import { doubtRated, grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 import { heaterPower, heaterStrength } from './heater-power'
 import { scaleHeaters } from './heater-scales'
 import { heaterSpace } from './heater-space'
@@ -42,6 +44,11 @@ function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
     measured: ratedL,
     limit,
     margin: measureMargin(ratedL, min, max),
+    ...beSure(
+      (u) =>
+        Math.min(probabilityAtLeast(ratedL, min ?? 0, u), max === undefined ? 1 : probabilityAtMost(ratedL, max, u)),
+      () => doubtRated(plan),
+    ),
     cautions:
       !far && (below || above)
         ? [

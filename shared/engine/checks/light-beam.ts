@@ -1,4 +1,5 @@
-import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
 import { countOfThese, isMultiplied, type Candidate, type Judgement, type Rule, type Say } from '../rule'
 import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
@@ -25,13 +26,14 @@ const judgeIntensity = (scene: Scene, candidate: Candidate): Judgement | null =>
     const [low, high] = lit.band
     const brightMost = thresholds.lightBrightMost.value
     const reading = readMeasure(specs, 'ppfdUmol') ?? readMeasure(specs, 'photonFluxUmolS')
-    const probability = () => {
-      if (!reading || reading.value === 0) return brightestUmol >= low ? 1 : 0
-      const { value, source, plusMinus } = reading
-      const u = (brightestUmol * standardUncertainty(value, source, plusMinus, 'other')) / value
-      return probabilityAtLeast(brightestUmol, low, u)
-    }
-    const base = { measured: brightestUmol, limit: low, probability }
+    const sureness = beSure(
+      (u) => probabilityAtLeast(brightestUmol, low, u),
+      () =>
+        reading && reading.value > 0
+          ? [doubt(reading, 'other', 'have its light measured', brightestUmol / reading.value)]
+          : [],
+    )
+    const base = { measured: brightestUmol, limit: low, ...sureness }
     const height = sayHeight(lit.heightMm, lit.isHeightGiven)
     const wants: Say = (words) => `${lit.whose} want ${words.pair([low, high], 'umol/m2/s')}`
     const brightest: Say = (words) =>
@@ -59,7 +61,13 @@ const judgeCoverage = (scene: Scene, candidate: Candidate): Judgement | null =>
     const covers: Say = (words) => `${Math.round(share * 100)} % of the tank${setting}${height(words)}`
     const enough = findEnough(lit, dimmable)
     const cautions = warnSpill(scene, candidate, enough ?? lit.count, lit.heightMm)
-    const base = { measured: share, limit: thresholds.lightCoverPass.value, cautions }
+    const least = thresholds.lightCoverPass.value
+    // The share is a model's, whoever measured the light.
+    const sureness = beSure(
+      (u) => probabilityAtLeast(share, least, u),
+      () => [doubt({ value: share, source: 'estimate' }, 'other', 'have its light measured over a tank')],
+    )
+    const base = { measured: share, limit: least, cautions, ...sureness }
     if (enough === lit.count && isMultiplied(candidate))
       return {
         ...base,

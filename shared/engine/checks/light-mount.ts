@@ -3,7 +3,8 @@ import type { Scene } from '../scene'
 import { practiceBasis } from '../thresholds'
 import type { Item } from '../types'
 import { readMeasure, readNumber, readSet, readText } from '../values'
-import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast, probabilityWithin } from '../physics/conformance'
 import { sayUncounted } from '../counting'
 import { limitsOfMount, mountNames, mountRests, suits } from './light-mounts'
 
@@ -45,8 +46,10 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
     outcome: load.value >= heaviest ? 'pass' : 'fail',
     measured: load.value,
     limit: heaviest,
-    probability: () =>
-      probabilityAtLeast(load.value, heaviest, standardUncertainty(load.value, load.source, load.plusMinus, 'other')),
+    ...beSure(
+      (u) => probabilityAtLeast(load.value, heaviest, u),
+      () => [doubt(load, 'other', 'check the load it carries')],
+    ),
     say: (words) => {
       const [carried, weight] = words.apart(load.value, heaviest, 'kg')
       return `Carries ${carried}, and the light weighs ${weight}.`
@@ -59,14 +62,23 @@ function measureMount(
   { plan: { tank, room } }: Scene,
   type: string,
   { rimMinMm, rimMaxMm, spanMinMm, spanMaxMm }: ReturnType<typeof limitsOfMount>,
-): Pick<Judgement, 'measured' | 'limit'> {
+): Partial<Judgement> {
   if (type !== 'arm' && type !== 'rim-legs') return { measured: room.ceilingMm }
   const [min, max] = type === 'arm' ? [rimMinMm, rimMaxMm] : [spanMinMm, spanMaxMm]
   const sides = type === 'arm' ? [tank.wallMm] : [tank.outerLengthMm, tank.outerWidthMm]
   if (min === undefined || max === undefined || min > max) return { measured: sides[0] ?? null }
   const miss = (side: number) => Math.max(min - side, side - max)
   const measured = sides.reduce((best, side) => (miss(side) < miss(best) ? side : best))
-  return { measured, limit: [min, max] }
+  const { source } = tank
+  const ofSide = () =>
+    type === 'arm'
+      ? doubt({ value: measured, source }, 'other', 'measure the wall')
+      : doubt({ value: measured, source }, 'length', 'measure the tank')
+  const sureness = beSure(
+    (u) => probabilityWithin(measured, min, max, u),
+    () => [ofSide()],
+  )
+  return { measured, limit: [min, max], ...sureness }
 }
 
 function judgeTank(scene: Scene, { piece }: Candidate): Judgement {

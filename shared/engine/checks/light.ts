@@ -2,9 +2,11 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Rule } fr
 import type { Scene } from '../scene'
 import { practiceBasis, thresholds } from '../thresholds'
 import { isWithinMm, readGroups, readMeasure, readSet, readText } from '../values'
-import { probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast, probabilityAtMost } from '../physics/conformance'
 import { lightCoverage, lightIntensity, lightTargetReads, rankLight } from './light-beam'
 import { judgeMount, mountRests } from './light-mounts'
+import { findTankSize } from './tank-size'
 
 const hangs = ['hanging', 'ceiling']
 
@@ -19,12 +21,13 @@ function judgeBody({ plan }: Scene, { piece }: Candidate): Judgement {
   const base = {
     measured: length.value,
     limit: limitMm,
-    probability: () =>
-      probabilityAtMost(
-        length.value,
-        limitMm,
-        standardUncertainty(length.value, length.source, length.plusMinus, 'length'),
-      ),
+    ...beSure(
+      (u) => probabilityAtMost(length.value, limitMm, u),
+      () => [
+        doubt(length, 'length', 'check its length'),
+        doubt(findTankSize(plan, 'outerLengthMm'), 'length', 'measure the tank'),
+      ],
+    ),
   }
   if (isWithinMm(length.value, limitMm))
     return {
@@ -72,6 +75,16 @@ function judgeSpectrum(_scene: Scene, { piece }: Candidate): Judgement {
     outcome: isBlue ? 'pass' : 'change',
     measured: share,
     limit: thresholds.blueShare.value,
+    ...beSure(
+      (u) => probabilityAtLeast(share, thresholds.blueShare.value, u),
+      () => [
+        doubt(
+          { value: share, source: piece.specs['bands']?.source ?? 'estimate' },
+          'other',
+          'ask for a plot of its spectrum',
+        ),
+      ],
+    ),
     say: () => `${Math.round(share * 100)} % of its photons are blue${isBlue ? '' : ': warmer than corals prefer'}.`,
   }
 }

@@ -1,26 +1,21 @@
-import { combineUncertainties, probabilityWithin, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityWithin } from '../physics/conformance'
 import { lacking, type Judgement } from '../rule'
 import type { Value } from '../types'
 import { isWithinMm } from '../values'
 
 type Side = Value<number> | undefined
 
-/** Panes come in sizes: a length's usual ± 3 mm would make every wall a close call. */
-const uncertaintyOf = ({ value, source, plusMinus }: Value<number>) =>
-  standardUncertainty(value, source, plusMinus, 'other')
-
 function measureWall(wall: Value<number>, min: Side, max: Side): Partial<Judgement> {
   if (!min || !max) return { measured: wall.value }
   return {
     measured: wall.value,
     limit: [min.value, max.value],
-    probability: () =>
-      probabilityWithin(
-        wall.value,
-        min.value,
-        max.value,
-        combineUncertainties(uncertaintyOf(wall), uncertaintyOf(max)),
-      ),
+    // Panes come in sizes: a length's usual ± 3 mm would make every wall a close call.
+    ...beSure(
+      (u) => probabilityWithin(wall.value, min.value, max.value, u),
+      () => [doubt(wall, 'other', 'measure the wall'), doubt(max, 'other', 'check the walls its magnet is made for')],
+    ),
   }
 }
 

@@ -1,5 +1,7 @@
 import { countOf, sayFree, sayUncounted } from '../counting'
 import { countOutlets, otherLoad, otherPlugs } from '../mains-budget'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtMost } from '../physics/conformance'
 import { findLoadLimits } from '../physics/loads'
 import { lacking, type Candidate, type Judgement, type KindRules, type Rule } from '../rule'
 import type { Scene } from '../scene'
@@ -55,6 +57,10 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
     outcome: watts <= continuousW ? 'pass' : watts <= ratedW ? 'change' : 'fail',
     measured: watts,
     limit: continuousW,
+    ...beSure(
+      (u) => probabilityAtMost(watts, continuousW, u),
+      () => [doubt({ value: watts, source: 'maker' }, 'other', 'add up what the rating plates say')],
+    ),
     cautions,
     ...(watts > continuousW && { asks: { need: 'circuit', amount: watts - continuousW, unit: 'W' as const } }),
     say: (words) =>

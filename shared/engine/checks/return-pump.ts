@@ -1,5 +1,7 @@
 import { lacking, type Candidate, type Judgement, type KindRules, type Rule, type Say } from '../rule'
 import { type Scene } from '../scene'
+import { beSure, doubt, doubtTank } from '../doubt'
+import { probabilityReaches, probabilityWithin } from '../physics/conformance'
 import type { Basin } from '../setup/places'
 import { practiceBasis, thresholds } from '../thresholds'
 import type { Value } from '../types'
@@ -88,7 +90,19 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
     if (!turnover) return null
     const judged = findJudged(turnover, bands, isControlled)
     const say = sayTurnover(turnover, judged, bands)
-    return { outcome: decide(judged, bands), measured: judged, limit: bands.pass, say }
+    const { tank } = scene.plan
+    const sureness = beSure(
+      (u) => probabilityReaches([turnover.slowestPerHour, turnover.perHour], bands.pass[0], bands.pass[1], u),
+      () => [
+        doubt(
+          { value: judged, source: specs['flowCurve']?.source ?? 'estimate' },
+          'other',
+          'have its flow measured at that height',
+        ),
+        doubtTank(judged, tank),
+      ],
+    )
+    return { outcome: decide(judged, bands), measured: judged, limit: bands.pass, say, ...sureness }
   }
   const isControlled = readFlag(specs, 'dcControl')
   const plain = judgeAs(isControlled ?? false)
@@ -103,13 +117,19 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
 function judgeBore({ plan }: Scene, { piece }: Candidate): Judgement | null {
   const built = plan.tank.returnBoreMm
   if (built === undefined) return null
-  const bore = readNumber(piece.specs, 'boreMm')
-  if (bore === undefined) return lacking(['boreMm'], () => 'Nobody has recorded its bore yet.')
+  const own = readMeasure(piece.specs, 'boreMm')
+  if (!own) return lacking(['boreMm'], () => 'Nobody has recorded its bore yet.')
+  const bore = own.value
   const isSame = Math.abs(bore - built) <= thresholds.pumpBoreMm.value
   return {
     outcome: isSame ? 'pass' : 'change',
     measured: bore,
     limit: [built - thresholds.pumpBoreMm.value, built + thresholds.pumpBoreMm.value],
+    // Bores come in sizes, as panes do: a share of the bore, not the ± 3 mm of a length.
+    ...beSure(
+      (u) => probabilityWithin(bore, built - thresholds.pumpBoreMm.value, built + thresholds.pumpBoreMm.value, u),
+      () => [doubt(own, 'other', 'check its bore')],
+    ),
     ...(!isSame && { asks: { need: 'hose-adaptor', amount: null, unit: null } }),
     say: (words) =>
       isSame

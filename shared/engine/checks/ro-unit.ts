@@ -3,7 +3,10 @@ import { lacking, type Candidate, type Judgement, type KindRules, type Say } fro
 import type { Scene } from '../scene'
 import { membraneFlowLpd } from '../physics/membrane'
 import type { Item, Specs } from '../types'
-import { readFlag, readNumber, readSet } from '../values'
+import { beSure, doubt, type Doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
+import type { Plan } from '../setup/plan'
+import { readFlag, readMeasure, readNumber, readSet } from '../values'
 import { joinNames } from '../counting'
 import { createRuleMaker } from './build-rule'
 import { hasAreas, noAreas } from './shape'
@@ -59,6 +62,22 @@ export function findOutputLpd(scene: Scene, specs: Specs, feed: Feed): number | 
   )
 }
 
+/** Of the tap's pressure, which its owner read on a gauge or which was assumed. */
+export const doubtFeed = ({ assumed, water }: Plan): Doubt =>
+  doubt(
+    { value: water.feedKPa, source: assumed.has('water.feedKPa') ? 'estimate' : 'measured' },
+    'other',
+    'measure the pressure at your tap',
+  )
+
+/** Of an output in litres a day that follows from what the membrane is rated for. */
+export const doubtOutput = (specs: Specs, lpd: number): Doubt =>
+  doubt(
+    { value: lpd, source: readMeasure(specs, 'membraneLpd')?.source ?? 'estimate' },
+    'other',
+    'check what its membrane is rated for',
+  )
+
 /** "3 days", "less than a day" */
 const sayDays = (days: number, words: Printer) => {
   const printed = words.number(days, 'count')
@@ -89,6 +108,13 @@ function judgeOutput(scene: Scene, { piece, quantity }: Candidate): Judgement {
     outcome: isEnough ? 'pass' : 'fail',
     measured: outputLpd,
     limit: needLpd,
+    ...beSure(
+      (u) => probabilityAtLeast(outputLpd, needLpd, u),
+      () => [
+        doubtOutput(piece.specs, outputLpd),
+        { ...doubtFeed(plan), u: (doubtFeed(plan).u * outputLpd) / Math.max(plan.water.feedKPa, 1) },
+      ],
+    ),
     say: (words) => {
       const fill = fillDays === undefined ? '' : `; the first fill takes ${sayDays(fillDays, words)}`
       const [made, needed] = [words.measure(outputLpd, 'L/d'), words.measure(needLpd, 'L/d')]
@@ -102,10 +128,18 @@ function judgeOutput(scene: Scene, { piece, quantity }: Candidate): Judgement {
 function judgePressure({ plan, others }: Scene, { piece }: Candidate): Judgement {
   const hasOwnBooster = readFlag(piece.specs, 'boosterIncluded')
   if (hasOwnBooster) return { outcome: 'pass', say: () => 'Comes with a booster pump.' }
-  const least = readNumber(piece.specs, 'minFeedKPa')
-  if (least === undefined) return lacking(['minFeedKPa'], () => 'Nobody has recorded the pressure it needs.')
+  const required = readMeasure(piece.specs, 'minFeedKPa')
+  if (!required) return lacking(['minFeedKPa'], () => 'Nobody has recorded the pressure it needs.')
+  const least = required.value
   const { feedKPa } = plan.water
-  const base = { measured: feedKPa, limit: least }
+  const base = {
+    measured: feedKPa,
+    limit: least,
+    ...beSure(
+      (u) => probabilityAtLeast(feedKPa, least, u),
+      () => [doubtFeed(plan), doubt(required, 'other', 'check the pressure it needs')],
+    ),
+  }
   const needs: Say = (words) =>
     `Needs ${words.measure(least, 'kPa')}, and your tap has ${words.measure(feedKPa, 'kPa')}`
   if (feedKPa >= least) return { ...base, outcome: 'pass', say: (words) => `${needs(words)}.` }

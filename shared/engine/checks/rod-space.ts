@@ -1,4 +1,5 @@
-import { combineUncertainties, probabilityAtMost, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt, doubtBasin } from '../doubt'
+import { probabilityAtMost } from '../physics/conformance'
 import type { Rectangle } from '../physics/geometry'
 import { layRodFlat, leanRod } from '../physics/rod'
 import type { Say } from '../rule'
@@ -27,6 +28,7 @@ export interface Stand {
   readonly measuredMm: number
   readonly limitMm: number
   readonly probability: () => number
+  readonly settle: () => string | undefined
   /** What is tight: water, height, plan, run, opening or company. */
   readonly tight: 'water' | 'height' | 'plan' | 'run' | 'opening' | 'company'
 }
@@ -43,12 +45,15 @@ const hasCompany = (basin: Basin, others: readonly Item[], footprint: Rectangle,
 
 function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], isRoomy: boolean): Stand {
   const tight = bounds.reduce((worst, bound) => (ratio(bound) < ratio(worst) ? bound : worst))
-  const probabilityOf = (bound: Bound): number => {
-    if (!Number.isFinite(bound.limitMm)) return 1
-    const limitU = standardUncertainty(bound.limitMm, basin.source, basin.plusMinus, 'length')
-    const pieceU = standardUncertainty(bound.of.value, bound.of.source, bound.of.plusMinus, 'length')
-    return probabilityAtMost(bound.measuredMm, bound.limitMm, combineUncertainties(limitU, pieceU))
-  }
+  const surenessOf = ({ measuredMm: mm, limitMm: most, of, tight: side }: Bound) =>
+    beSure(
+      (u) => probabilityAtMost(mm, most, u),
+      () => [
+        doubt(of, 'length', `check its ${side === 'plan' || side === 'opening' ? 'thickness' : 'length'}`),
+        doubtBasin(basin, most),
+      ],
+    )
+  const finite = bounds.filter(({ limitMm: most }) => Number.isFinite(most)).map(surenessOf)
   const fits = bounds.every((bound) => isWithinMm(bound.measuredMm, bound.limitMm))
   const { measuredMm, limitMm } = tight
   return {
@@ -58,7 +63,8 @@ function settle(basin: Basin, placement: Placement, bounds: readonly Bound[], is
     limitMm,
     fits: fits && isRoomy,
     tight: fits && !isRoomy ? 'company' : tight.tight,
-    probability: () => (isRoomy ? Math.min(...bounds.map(probabilityOf)) : 0),
+    probability: () => (isRoomy ? Math.min(1, ...finite.map(({ probability }) => probability())) : 0),
+    settle: () => finite.toSorted((a, b) => a.probability() - b.probability())[0]?.settle(),
   }
 }
 

@@ -4,7 +4,9 @@ import { countPacks } from '../physics/salt'
 import { middleGrainMm, sandBedKg } from '../physics/sand'
 import { defaults } from '../setup/defaults'
 import { thresholds } from '../thresholds'
-import { readFlag, readNumber, readSet, readText } from '../values'
+import { beSure, doubt } from '../doubt'
+import { probabilityWithin } from '../physics/conformance'
+import { readFlag, readMeasure, readNumber, readSet, readText } from '../values'
 import { createRuleMaker } from './build-rule'
 import { countOf } from '../counting'
 import { isLiveLost } from './rock'
@@ -60,16 +62,24 @@ function judgeMagnetic({ others }: Scene, { piece }: Candidate): Judgement | nul
 }
 
 function judgeGrain(_scene: Scene, { piece }: Candidate): Judgement {
-  const min = readNumber(piece.specs, 'grainMinMm')
-  const max = readNumber(piece.specs, 'grainMaxMm')
-  const missing = [...(min === undefined ? ['grainMinMm'] : []), ...(max === undefined ? ['grainMaxMm'] : [])]
-  if (min === undefined || max === undefined) return lacking(missing, () => 'Nobody has recorded its grain size yet.')
-  const middle = middleGrainMm(min, max)
+  const min = readMeasure(piece.specs, 'grainMinMm')
+  const max = readMeasure(piece.specs, 'grainMaxMm')
+  const missing = [...(min ? [] : ['grainMinMm']), ...(max ? [] : ['grainMaxMm'])]
+  if (!min || !max) return lacking(missing, () => 'Nobody has recorded its grain size yet.')
+  const middle = middleGrainMm(min.value, max.value)
   const [low, high] = [thresholds.grainLowMm.value, thresholds.grainHighMm.value]
   return {
     outcome: middle < low || middle > high ? 'change' : 'pass',
     measured: middle,
     limit: [low, high],
+    ...beSure(
+      (u) => probabilityWithin(middle, low, high, u),
+      // Of the root of two numbers half of either's share counts.
+      () =>
+        [min, max].map((end) =>
+          doubt(end, 'other', 'look at its grains beside a ruler', middle / (2 * end.value || 1)),
+        ),
+    ),
     say: (words) =>
       middle < low
         ? `Grains around ${words.measure(middle, 'mm')}: they blow about in strong flow.`

@@ -1,6 +1,8 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
 import { isWithinMm, readFlag, readMeasure, readSet, readText } from '../values'
 import { createRuleMaker } from './build-rule'
 import { judgeMagnetWall } from './magnet-wall'
@@ -56,6 +58,13 @@ function judgeReach({ plan }: Scene, { piece }: Candidate): Judgement | null {
     outcome: reaches ? 'pass' : 'change',
     measured: length.value,
     limit: neededMm,
+    ...beSure(
+      (u) => probabilityAtLeast(length.value, neededMm, u),
+      () => [
+        doubt(length, 'length', 'check its length'),
+        doubt(findTankSize(plan, 'outerHeightMm'), 'length', 'measure the tank'),
+      ],
+    ),
     say: (words) =>
       reaches
         ? 'It reaches the bottom without wetting your hand.'

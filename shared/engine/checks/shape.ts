@@ -1,3 +1,4 @@
+import { doubtTank, type Doubt } from '../doubt'
 import type { Judgement } from '../rule'
 import type { Plan } from '../setup/plan'
 import { readNumber } from '../values'
@@ -14,6 +15,10 @@ export const noAreas = ({ tank }: Plan): Judgement => ({
 /** Whether somebody stated the tank's volume; otherwise it follows from the sizes in `grossUses`. */
 export const isVolumeStated = ({ setup }: Plan): boolean =>
   setup.tank.volumeL !== undefined || readNumber(setup.tank.specs, 'nominalVolumeL') !== undefined
+
+/** A volume that somebody stated is what makers' ratings speak of and no measurement; one that was computed has its doubts. */
+export const doubtRated = (plan: Plan): readonly Doubt[] =>
+  isVolumeStated(plan) ? [] : [doubtTank(plan.tank.ratedL, plan.tank)]
 
 export const hasRatedVolume = (plan: Plan): boolean => isVolumeStated(plan) || hasAreas(plan)
 

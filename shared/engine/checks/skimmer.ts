@@ -1,7 +1,8 @@
 import { lacking, type Candidate, type Judgement, type KindRules } from '../rule'
 import type { Scene } from '../scene'
 import { thresholds } from '../thresholds'
-import { combineUncertainties, probabilityWithin, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt, doubtBasin } from '../doubt'
+import { probabilityAtLeast, probabilityWithin } from '../physics/conformance'
 import type { Basin } from '../setup/places'
 import type { Specs } from '../types'
 import { isWithinMm, readMeasure, readNumber } from '../values'
@@ -9,7 +10,7 @@ import { bodyUses, judgeBody, lackWater, listBodyTurns } from './body-judgement'
 import { chooseBasin, tryBody, type BodyFit } from './body-space'
 import { createRuleMaker } from './build-rule'
 import { findPumpBasins } from './pump-flow'
-import { grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
+import { doubtRated, grossUses, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 
 const bodyKeys = ['lengthMm', 'widthMm', 'heightMm'] as const
 
@@ -65,15 +66,14 @@ function judgeDepth(scene: Scene, candidate: Candidate): Judgement {
   const basin = isFit(found) ? found.basin : findPumpBasins(scene, candidate)[0]
   if (!basin) return lackWater(candidate.place)
   const depth = basin.waterDepthMm
-  const u = combineUncertainties(
-    standardUncertainty(depth, basin.source, basin.plusMinus, 'length'),
-    standardUncertainty(min.value, min.source, min.plusMinus, 'length'),
-  )
   return {
     outcome: isDeepEnough(specs, basin) ? 'pass' : 'fail',
     measured: depth,
     limit: [min.value, max.value],
-    probability: () => probabilityWithin(depth, min.value, max.value, u),
+    ...beSure(
+      (u) => probabilityWithin(depth, min.value, max.value, u),
+      () => [doubtBasin(basin, depth), doubt(min, 'length', 'check the depths it works in')],
+    ),
     rests: () =>
       isDeepEnough(specs, basin)
         ? [basin.path === 'tank' ? 'tank.waterLineMm' : `${basin.path}.waterDepthMm`]
@@ -92,6 +92,10 @@ function judgeRating({ plan }: Scene, { piece }: Candidate): Judgement {
     outcome: rated >= ratedL ? 'pass' : 'change',
     measured: rated,
     limit: ratedL,
+    ...beSure(
+      (u) => probabilityAtLeast(rated, ratedL, u),
+      () => doubtRated(plan),
+    ),
     rests: () => (isVolumeStated(plan) ? [] : grossUses),
     say: (words) => `Its maker rates it for ${words.volume(rated)}; the tank holds ${words.volume(ratedL)}.`,
   }

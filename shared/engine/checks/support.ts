@@ -1,4 +1,5 @@
-import { combineUncertainties, probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
 import type { Judgement, Say } from '../rule'
 import type { Plan } from '../setup/plan'
 import { thresholds } from '../thresholds'
@@ -49,7 +50,6 @@ export function compareFootprints(tank: Sides, top: Sides): Footprints {
 /** Whether the footprint stands wholly on the top of what is named. */
 export function describeFootprint({ spareMm, widestMm, tankSide, topSide }: Footprints, name: string): Judgement {
   const fits = isWithinMm(0, spareMm)
-  const of = ({ value, source, plusMinus }: Value<number>) => standardUncertainty(value, source, plusMinus, 'length')
   const cautions: Say[] =
     fits && widestMm > thresholds.standOverhangMm.value
       ? [
@@ -61,8 +61,10 @@ export function describeFootprint({ spareMm, widestMm, tankSide, topSide }: Foot
     outcome: fits ? 'pass' : 'fail',
     measured: tankSide.value,
     limit: topSide.value,
-    probability: () =>
-      probabilityAtLeast(topSide.value, tankSide.value, combineUncertainties(of(tankSide), of(topSide))),
+    ...beSure(
+      (u) => probabilityAtLeast(topSide.value, tankSide.value, u),
+      () => [doubt(tankSide, 'length', 'measure the tank'), doubt(topSide, 'length', `measure the top of the ${name}`)],
+    ),
     cautions,
     say: (words) =>
       fits
@@ -95,12 +97,14 @@ export function rateStand(stand: Specs, filled: Plan, missing: readonly string[]
   const base = { measured: totalKg, cautions: [warnWeight(totalKg)] }
   if (rating) {
     const isHeld = rating.value >= totalKg
-    const uncertainty = standardUncertainty(rating.value, rating.source, rating.plusMinus, 'other')
     return {
       ...base,
       outcome: isHeld ? 'pass' : 'fail',
       limit: rating.value,
-      probability: () => probabilityAtLeast(rating.value, totalKg, uncertainty),
+      ...beSure(
+        (u) => probabilityAtLeast(rating.value, totalKg, u),
+        () => [doubt(rating, 'other', 'ask its maker for the load it is rated for')],
+      ),
       say: (words) => {
         const [weight, rated] = words.apart(totalKg, rating.value, 'kg')
         return isHeld

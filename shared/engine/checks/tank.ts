@@ -6,7 +6,8 @@ import { resolve } from '../setup/resolve'
 import { practiceBasis, thresholds } from '../thresholds'
 import type { Piece } from '../types'
 import { readGroup, readMeasure, readNumber, readText } from '../values'
-import { probabilityWithin, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityWithin } from '../physics/conformance'
 import { grossUses, hasAreas, hasRatedVolume, isVolumeStated, noAreas } from './shape'
 import { isCarried, judgeFootprint, judgeLoad } from './tank-support'
 
@@ -75,14 +76,16 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
   const change = thresholds.tankVolumeChange.value
   const rounding = 1e-9
   const off = Math.abs(offered - now) / now - rounding
-  const u = standardUncertainty(offered, nominal?.source ?? 'maker', nominal?.plusMinus, 'other')
   const wording = (words: Printer) => `${words.volume(offered)} in place of ${words.volume(now)}`
   return {
     outcome: off <= pass ? 'pass' : off <= change ? 'change' : 'fail',
     measured: offered,
     limit: [now * (1 - pass), now * (1 + pass)],
     rests: () => (isVolumeStated(scene.plan) ? [] : grossUses),
-    probability: () => probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
+    ...beSure(
+      (u) => probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
+      () => [doubt(nominal ?? { value: offered, source: 'maker' }, 'other', 'check its volume')],
+    ),
     say: (words) =>
       off <= pass
         ? `${wording(words)}: about the same.`

@@ -4,7 +4,8 @@ import type { Scene } from '../scene'
 import { practiceBasis } from '../thresholds'
 import { readMeasure, readNumber } from '../values'
 import { countOf } from '../counting'
-import { probabilityAtLeast, standardUncertainty } from '../physics/conformance'
+import { beSure, doubt } from '../doubt'
+import { probabilityAtLeast } from '../physics/conformance'
 
 const heatersOf = ({ others }: Scene) => others.filter((item) => item.piece.kind === 'heater')
 
@@ -20,6 +21,10 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
       outcome: 'fail',
       measured: load.value,
       limit: strongestW,
+      ...beSure(
+        (u) => probabilityAtLeast(load.value, strongestW, u),
+        () => [doubt(load, 'other', 'check the load it can switch')],
+      ),
       say: (words) => `Switches ${words.power(load.value)}, too little for a heater of ${words.power(strongestW)}.`,
     }
   if (capacityW >= fedW && powers.includes(undefined))
@@ -28,12 +33,10 @@ function judgeLoad(scene: Scene, { piece, quantity }: Candidate): Judgement {
     outcome: capacityW >= fedW ? 'pass' : 'fail',
     measured: capacityW,
     limit: fedW,
-    probability: () =>
-      probabilityAtLeast(
-        capacityW,
-        fedW,
-        quantity * standardUncertainty(load.value, load.source, load.plusMinus, 'other'),
-      ),
+    ...beSure(
+      (u) => probabilityAtLeast(capacityW, fedW, u),
+      () => [doubt(load, 'other', 'check the load it can switch', quantity)],
+    ),
     say: (words) =>
       fedW === 0
         ? `Switches up to ${words.power(capacityW)}; there is no heater in the setup to hold against it.`

@@ -11,7 +11,9 @@ import {
 import type { Scene } from '../scene'
 import { defaults } from '../setup/defaults'
 import { practiceBasis, thresholds } from '../thresholds'
-import type { Item } from '../types'
+import type { Item, Piece } from '../types'
+import { beSure, doubt, doubtTank } from '../doubt'
+import { probabilityAtMost, probabilityReaches } from '../physics/conformance'
 import type { Printer } from '../../units/print'
 import { sayUncounted } from '../counting'
 import { readMeasure, readNumber } from '../values'
@@ -45,6 +47,13 @@ function sumOthers(others: readonly Item[]): Others {
 const chooseBand = ({ plan }: Scene): readonly [number, number] =>
   defaults.circulationPerHour[plan.goals.coral.includes('sps') ? 'sps' : 'usual']
 
+const doubtFlow = ({ specs }: Piece, perHour: number) =>
+  doubt(
+    { value: perHour, source: (specs['flowMaxLph'] ?? specs['flowMinLph'])?.source ?? 'estimate' },
+    'other',
+    'check its flow',
+  )
+
 function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const { piece, quantity, mayMultiply } = candidate
   const most = readNumber(piece.specs, 'flowMaxLph')
@@ -57,7 +66,11 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const highest = (count: number) => (mostLph + most * count) / litres
   const lowest = (leastLph + (least ?? most) * quantity) / litres
   const judged = Math.max(lowest, Math.min(highest(quantity), high))
-  const base = { measured: judged, limit: [low, high] as const, cautions }
+  const sureness = beSure(
+    (u) => probabilityReaches([lowest, highest(quantity)], low, high, u),
+    () => [doubtFlow(piece, judged), doubtTank(judged, scene.plan.tank)],
+  )
+  const base = { measured: judged, limit: [low, high] as const, cautions, ...sureness }
   const times = (words: Printer, perHour: number) => `${words.number(perHour, '/h')} times an hour`
   const usual = (words: Printer) => `${words.number(low, '/h')} to ${words.number(high, '/h')} are usual`
   const lead = mostLph > 0 ? 'With the others it' : 'It'
@@ -138,6 +151,10 @@ function judgeSand(scene: Scene, { piece, quantity }: Candidate): Judgement | nu
     outcome: perHour > limit ? 'change' : 'pass',
     measured: perHour,
     limit,
+    ...beSure(
+      (u) => probabilityAtMost(perHour, limit, u),
+      () => [doubtFlow(piece, perHour), doubtTank(perHour, scene.plan.tank)],
+    ),
     cautions,
     say: (words) =>
       perHour > limit

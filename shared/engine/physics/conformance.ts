@@ -70,6 +70,19 @@ export function probabilityWithin(value: number, lower: number, upper: number, u
   return Math.max(0, probabilityAtMost(value, upper, uncertainty) - above)
 }
 
+/**
+ * Probability that something which can be set from `least` to `most`, both as uncertain, reaches an interval: that the most
+ * is at least its lower end and the least at most its upper one, whichever is less sure.
+ */
+export function probabilityReaches(
+  [least, most]: readonly [number, number],
+  lower: number,
+  upper: number,
+  uncertainty: number,
+): number {
+  return Math.min(probabilityAtLeast(most, lower, uncertainty), probabilityAtMost(least, upper, uncertainty))
+}
+
 /** Neither clearly kept nor clearly broken: a probability between 5 and 95 % (common practice). */
 export function isCloseCall(probability: number): boolean {
   return probability > 0.05 && probability < 0.95

@@ -18,6 +18,8 @@ export interface GaugeProps {
   readonly limit: Check['limit']
   readonly margin: number | null
   readonly outcome: Outcome
+  /** "a close call, 93 % sure" */
+  readonly note?: string | undefined
   /** Without them the far side of the limit is hatched. */
   readonly zones?: readonly Zone[]
   readonly min?: number
@@ -34,7 +36,7 @@ function anchorAt(share: number): 'start' | 'middle' | 'end' {
 
 /** One check as a tick scale: the limit marked, the value placed on it, the margin between them shaded. */
 export function Gauge(props: GaugeProps) {
-  const { label, unit, printer, value, limit, margin, outcome, size = 'large' } = props
+  const { label, unit, printer, value, limit, margin, outcome, note, size = 'large' } = props
   const id = useId()
   const [box, widthPx] = useContainerWidth<HTMLDivElement>(size === 'small' ? 200 : 480)
   const limits = limit === null ? [] : typeof limit === 'number' ? [limit] : limit
@@ -56,6 +58,7 @@ export function Gauge(props: GaugeProps) {
     `${label}: ${valueText}`,
     limitWords && `limit ${limitWords}`,
     verdictWords[outcomeVerdicts[outcome]].toLowerCase(),
+    note,
   ]
   return (
     <div ref={box} className="px-4">

@@ -1,11 +1,11 @@
 import { Link } from 'react-router-dom'
-import { isCloseCall } from '#shared/engine/physics/conformance'
 import { labelSetupPath } from '#shared/engine/assumptions'
 import type { Plan } from '#shared/engine/setup/plan'
 import type { Check } from '#shared/engine/types'
 import type { Printer } from '#shared/units/print'
 import { Gauge } from '../drawings/gauge'
 import { findScaleUnit } from '../drawings/scale-unit'
+import { sayCloseCall } from './say-close-call'
 import { VerdictIcon } from '../ui/verdict-icon'
 import { outcomeVerdicts, verdictTextClasses } from '../../lib/verdicts'
 
@@ -24,7 +24,8 @@ const outcomeWords = { pass: 'passes', change: 'needs a change', fail: 'fails', 
 
 /** One check in full: what was measured, the limit, where the rule is from, and what it rests on. */
 export function CheckItem({ check, plan, printer, hasGauge, workingHref }: CheckItemProps) {
-  const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [], probability } = check
+  const { label, outcome, measured, limit, unit, margin, message, basis, assumed = [] } = check
+  const note = sayCloseCall(check)
   const canonical = findScaleUnit(unit)
   const isDrawn = typeof measured === 'number' && limit !== null
   const limitText =
@@ -47,9 +48,7 @@ export function CheckItem({ check, plan, printer, hasGauge, workingHref }: Check
         {isDrawn && (
           <p className="mt-1 font-mono text-xs text-ink-soft">
             measured {printer.measure(measured, canonical)} · limit {limitText}
-            {probability !== undefined &&
-              isCloseCall(probability) &&
-              ` · close call, ${Math.round(probability * 100)} % sure to keep the limit`}
+            {note !== undefined && ` · ${note}`}
           </p>
         )}
         <p className="mt-1 text-xs text-ink-soft">
@@ -81,6 +80,7 @@ export function CheckItem({ check, plan, printer, hasGauge, workingHref }: Check
           limit={limit}
           margin={margin}
           outcome={outcome}
+          note={note}
         />
       )}
     </li>
