@@ -18,6 +18,8 @@ export interface Judgement {
   readonly outcome: Outcome
   readonly measured?: number | string | readonly string[] | null
   readonly limit?: number | readonly [number, number] | null
+  /** Beyond the limit and up to this it is a change rather than a failure. */
+  readonly changeLimit?: number | readonly [number, number]
   /** Signed distance to the limit in the rule's unit, positive = to spare; by default taken from measured and limit. */
   readonly margin?: number | null
   readonly say: Say

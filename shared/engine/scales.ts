@@ -12,34 +12,44 @@ const mostMarks = 400
 const mostScales = 3
 const far = 1e9
 
+type Limit = number | readonly [number, number]
+
 interface Reading {
   readonly measured: number
-  readonly limit: number | readonly [number, number]
+  readonly limit: Limit
+  readonly changeLimit?: Limit
 }
 
 const readJudged = (judged: Judged | undefined): Reading | undefined => {
-  const { measured, limit } = judged?.judgement ?? {}
-  return typeof measured === 'number' && limit !== undefined && limit !== null ? { measured, limit } : undefined
+  const { measured, limit, changeLimit } = judged?.judgement ?? {}
+  if (typeof measured !== 'number' || limit === undefined || limit === null) return undefined
+  return { measured, limit, ...(changeLimit !== undefined && { changeLimit }) }
 }
 
 const isAlike = (values: readonly number[]) => values.every((value) => Math.abs(value - values[0]!) < 1e-6)
 
-function zonesOf(limit: number | readonly [number, number], isLeast: boolean, miss: Zone['outcome']): readonly Zone[] {
-  if (typeof limit !== 'number')
-    return [
-      { from: 0, to: limit[0], outcome: miss },
-      { from: limit[0], to: limit[1], outcome: 'pass' },
-      { from: limit[1], to: far, outcome: miss },
-    ]
-  return isLeast
-    ? [
-        { from: 0, to: limit, outcome: miss },
-        { from: limit, to: far, outcome: 'pass' },
-      ]
-    : [
-        { from: 0, to: limit, outcome: 'pass' },
-        { from: limit, to: far, outcome: miss },
-      ]
+const toEnds = (limit: Limit, isLeast: boolean): readonly [number, number] =>
+  typeof limit !== 'number' ? limit : isLeast ? [limit, far] : [0, limit]
+
+/** From the limit on what misses it; between, where it is a change first, that. */
+function zonesOf(limit: Limit, change: Limit, isLeast: boolean, miss: Zone['outcome']): readonly Zone[] {
+  const [low, high] = toEnds(limit, isLeast)
+  const [lowest, highest] = toEnds(change, isLeast)
+  const zones: readonly Zone[] = [
+    { from: 0, to: lowest, outcome: miss },
+    { from: lowest, to: low, outcome: 'change' },
+    { from: low, to: high, outcome: 'pass' },
+    { from: high, to: highest, outcome: 'change' },
+    { from: highest, to: far, outcome: miss },
+  ]
+  return zones.filter(({ from, to }) => to > from)
+}
+
+/** The change band that all readings share, else none beyond the limit itself. */
+function findChangeLimit(list: readonly Reading[], limit: Limit): Limit {
+  const ends = list.map(({ changeLimit }) => (changeLimit === undefined ? [] : [changeLimit].flat()))
+  const isShared = [0, 1].every((end) => isAlike(ends.map((pair) => pair[end] ?? 0)))
+  return (isShared && list[0]?.changeLimit) || limit
 }
 
 /**
@@ -78,7 +88,7 @@ function deriveScale(
       unit,
       limitText: printed,
       limits: typeof limit === 'number' ? [limit] : [...limit],
-      zones: zonesOf(limit, isLeast, miss),
+      zones: zonesOf(limit, hasOneLimit ? findChangeLimit(list, limit) : limit, isLeast, miss),
     },
   }
 }

@@ -67,7 +67,13 @@ const judgeCoverage = (scene: Scene, candidate: Candidate): Judgement | null =>
       (u) => probabilityAtLeast(share, least, u),
       () => [doubt({ value: share, source: 'estimate' }, 'other', 'have its light measured over a tank')],
     )
-    const base = { measured: share, limit: least, cautions, ...sureness }
+    const base = {
+      measured: share,
+      limit: least,
+      changeLimit: thresholds.lightCoverChange.value,
+      cautions,
+      ...sureness,
+    }
     if (enough === lit.count && isMultiplied(candidate))
       return {
         ...base,

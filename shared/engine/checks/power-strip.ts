@@ -57,6 +57,7 @@ function judgeLoad(scene: Scene, { piece }: Candidate): Judgement {
     outcome: watts <= continuousW ? 'pass' : watts <= ratedW ? 'change' : 'fail',
     measured: watts,
     limit: continuousW,
+    changeLimit: ratedW,
     ...beSure(
       (u) => probabilityAtMost(watts, continuousW, u),
       () => [doubt({ value: watts, source: 'maker' }, 'other', 'add up what the rating plates say')],

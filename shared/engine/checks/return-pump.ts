@@ -102,7 +102,14 @@ function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
         doubtTank(judged, tank),
       ],
     )
-    return { outcome: decide(judged, bands), measured: judged, limit: bands.pass, say, ...sureness }
+    return {
+      outcome: decide(judged, bands),
+      measured: judged,
+      limit: bands.pass,
+      changeLimit: bands.change,
+      say,
+      ...sureness,
+    }
   }
   const isControlled = readFlag(specs, 'dcControl')
   const plain = judgeAs(isControlled ?? false)

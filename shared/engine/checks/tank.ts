@@ -81,6 +81,7 @@ function judgeVolume(scene: Scene, { piece }: Candidate): Judgement {
     outcome: off <= pass ? 'pass' : off <= change ? 'change' : 'fail',
     measured: offered,
     limit: [now * (1 - pass), now * (1 + pass)],
+    changeLimit: [now * (1 - change), now * (1 + change)],
     rests: () => (isVolumeStated(scene.plan) ? [] : grossUses),
     ...beSure(
       (u) => probabilityWithin(offered, now * (1 - pass), now * (1 + pass), u),
