@@ -6,7 +6,8 @@ import type { Rule } from '#shared/engine/rule'
 import type { Scene } from '#shared/engine/scene'
 import type { Piece } from '#shared/engine/types'
 import { createPrinter } from '#shared/units/print'
-import { anyCorePiece, anyPiece, anySetup } from '../arbitraries'
+import { kindKeys } from '#shared/kinds/index'
+import { anyCorePiece, anyPiece, anySetup, pieceOf } from '../arbitraries'
 import { sceneFor } from '../build'
 
 const words = createPrinter('metric')
@@ -33,6 +34,8 @@ const keep = ({ specs, ...piece }: Piece, isKept: (key: string) => boolean): Pie
   specs: Object.fromEntries(Object.entries(specs).filter(([key]) => isKept(key))),
 })
 
+const lampMayLack = ['ppfdUmol', 'ppfdAtMm', 'photonFluxUmolS', 'beamAngleDeg', 'mountsIncluded', 'widthMm']
+
 /** Attributes whose absence a rule takes for something harmless, on purpose; each with why. */
 const harmless: Readonly<Record<string, readonly string[]>> = {
   // No immersion stated: the whole rod has to be under water. No position stated: it must stand, and a caution says so.
@@ -58,6 +61,22 @@ const harmless: Readonly<Record<string, readonly string[]>> = {
     'sump',
     'shape',
   ],
+  // A reading and all its photons stand in for each other; a beam angle and a height have usual ones, which are said.
+  'light.coverage': lampMayLack,
+  'light.intensity': lampMayLack,
+  // What its maker asks for goes before the depth that is taken otherwise.
+  'return-pump.space': ['minDepthMm'],
+  // Not stated: what membranes are usually tested at.
+  'ro-unit.output': ['testTdsPpm'],
+  // What its maker says of acrylic and what its blades are stand in for each other.
+  'scraper.acrylic': ['acrylicSafe', 'blades'],
+  // Of several chambers its size chooses one; whether there is room for it is another check's.
+  'skimmer.depth': ['lengthMm', 'widthMm', 'heightMm'],
+  // A rating and what its maker says it is made for stand in for each other.
+  'stand.load': ['loadRatingKg', 'madeForTanks', 'madeForVolumeL'],
+  // One that states no least flow runs at its only speed, or nobody knows.
+  'wavemaker.flow': ['flowMinLph'],
+  'wavemaker.sand': ['flowMinLph', 'flowMaxLph'],
   'tank.return-pump': ['includedPump', 'filtration', 'returnBoreMm'],
   'tank.support-load': [
     'dryMassKg',
@@ -74,6 +93,11 @@ const harmless: Readonly<Record<string, readonly string[]>> = {
 
 const isHarmless = ({ id }: Rule, key: string) =>
   (harmless[id]?.includes(key) ?? false) || key === 'plugType' || key === 'madeFor'
+
+/** Of all kinds; a light takes a model of the whole tank each time it is asked about. */
+const anyKind = fc.oneof(
+  ...kindKeys.map((kind) => ({ weight: kind === 'light' ? 1 : 8, arbitrary: pieceOf(kind, 10) })),
+)
 
 /** These judge many setups over. */
 const patienceMs = 240_000
@@ -114,6 +138,25 @@ describe('what a rule reads of a piece', () => {
             }
         }),
         { numRuns: 120 },
+      )
+    },
+    patienceMs,
+  )
+
+  it(
+    'is not passed over where it is missing, whatever the kind',
+    () => {
+      fc.assert(
+        fc.property(anySetup, anyKind, (setup, piece) => {
+          const scene = sceneFor(setup, piece.kind)
+          for (const rule of getRules(piece.kind).rules)
+            for (const key of rule.reads.filter((one) => piece.specs[one] && !isHarmless(rule, one))) {
+              const without = keep(piece, (one) => one !== key)
+              if (judgeIn(scene, rule, without)?.outcome !== 'pass') continue
+              expect(judgeIn(scene, rule, piece)?.outcome, `${rule.id} without ${key}`).toBe('pass')
+            }
+        }),
+        { numRuns: 400 },
       )
     },
     patienceMs,
