@@ -1,3 +1,4 @@
+import { EditLink } from './edit-link'
 import type { ReactNode } from 'react'
 
 export interface ValueLine {
@@ -24,24 +25,15 @@ export function ValueList({ lines, look, onEdit, children }: ValueListProps) {
       {lines.map(({ path, label, shown, href }) => (
         <li key={path} className="flex items-baseline justify-between gap-3 border-b border-rule py-1.5 text-sm">
           <span className="min-w-0">{capitalise(label)}</span>
-          <a
+          <EditLink
             href={href}
-            role="button"
-            aria-label={`${capitalise(label)}, ${shown}, ${look}: change`}
-            data-path={path}
-            onClick={(event) => {
-              event.preventDefault()
-              onEdit(path, event.currentTarget)
-            }}
-            onKeyDown={(event) => {
-              if (event.key !== ' ') return
-              event.preventDefault()
-              onEdit(path, event.currentTarget)
-            }}
+            name={`${capitalise(label)}, ${shown}, ${look}: change`}
+            path={path}
+            onEdit={(anchor) => onEdit(path, anchor)}
             className={`min-h-6 flex-none text-right font-mono text-[0.94em] text-action ${look}`}
           >
             {shown}
-          </a>
+          </EditLink>
         </li>
       ))}
       {children}

@@ -7,6 +7,7 @@ import { VerdictIcon } from '../../../components/ui/verdict-icon'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { Finder } from '../hooks/use-finder'
+import { CautionList } from '../../../components/setup/caution-list'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { CheckItem } from '../../../components/setup/check-item'
 import { writeWorkingHref } from '../../../components/setup/working-href'
@@ -101,15 +102,7 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
               ))}
             </ul>
           )}
-          {cautions.length > 0 && (
-            <ul className="mt-1 space-y-0.5 text-ink-soft">
-              {cautions.map((caution) => (
-                <li key={caution}>
-                  <strong className="font-semibold">Caution:</strong> {caution}
-                </li>
-              ))}
-            </ul>
-          )}
+          <CautionList cautions={cautions} />
         </div>
         <div className="col-start-2 min-w-0 md:col-start-auto">
           {deciding && <DecidingGauge check={deciding} printer={printer} />}

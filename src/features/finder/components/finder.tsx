@@ -1,7 +1,6 @@
 import { useState } from 'react'
 import { useQuery } from '@tanstack/react-query'
 import { getKind } from '#shared/kinds/index'
-import { CautionBox } from '../../../components/ui/caution-box'
 import { Disclosure } from '../../../components/ui/disclosure'
 import { LiveStatus } from '../../../components/ui/live-status'
 import { Popover } from '../../../components/ui/popover'
@@ -10,6 +9,7 @@ import { fitCheckQuery } from '../api/fit-check'
 import { canAsk } from '../api/requests'
 import { useAnswers, type Answers } from '../hooks/use-answers'
 import { useFinder } from '../hooks/use-finder'
+import { StandingCautions } from '../../../components/setup/standing-cautions'
 import { findEditTarget } from '../../../components/setup/edit-target'
 import { toRod } from '../../../components/setup/to-drawing'
 import { AnswerGroups } from './answer-groups'
@@ -119,17 +119,7 @@ export function Finder() {
           )}
         </section>
       )}
-      <div className="mt-12 space-y-3">
-        <CautionBox title="Mains and salt water.">
-          Use a residual-current (ground-fault) protected outlet and drip loops, overload no strip, and let a licensed
-          electrician decide where local codes ask for one.
-        </CautionBox>
-        <CautionBox title="Weight, heat and light.">
-          A filled tank is heavy: a structural engineer decides for anything large or upstairs. Heaters fail: a second,
-          independent cut-off protects what lives here. Heat and light figures are estimates from stated models; measure
-          before trusting livestock to them.
-        </CautionBox>
-      </div>
+      <StandingCautions />
       {target && (
         <Popover anchor={editing.anchor} onClose={() => setEditing(null)} label={target.title}>
           <EditFields

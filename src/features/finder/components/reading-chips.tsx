@@ -4,6 +4,7 @@ import { Link } from 'react-router-dom'
 import { readQuestion } from '#shared/engine/ask/read-question'
 import { kinds } from '#shared/kinds/index'
 import type { AskAnswer } from '#shared/schemas/ask'
+import { EditLink } from '../../../components/setup/edit-link'
 import type { RawSetup } from '../../../components/setup/edit-raw'
 import { addItem } from '../../../components/setup/items-raw'
 import { writeSetupHref } from '../../../components/setup/setup-href'
@@ -59,24 +60,15 @@ export function ReadingChips({ finder, onEdit }: ReadingChipsProps) {
                   {meaning}
                 </span>
               ) : (
-                <a
+                <EditLink
                   href={`#${fieldId(path)}`}
-                  role="button"
                   title={`from “${text}”`}
+                  onEdit={(anchor) => onEdit(groupOf(path), anchor)}
                   className={`inline-flex min-h-7 items-center hover:text-action ${look}`}
-                  onClick={(event) => {
-                    event.preventDefault()
-                    onEdit(groupOf(path), event.currentTarget)
-                  }}
-                  onKeyDown={(event) => {
-                    if (event.key !== ' ') return
-                    event.preventDefault()
-                    onEdit(groupOf(path), event.currentTarget)
-                  }}
                 >
                   {meaning}
                   {isChanged && <span className="sr-only">, changed since</span>}
-                </a>
+                </EditLink>
               )}
             </li>
           )

@@ -3,6 +3,7 @@ import { TankSection } from '../../../components/drawings/tank-section'
 import type { RodDrawing } from '../../../components/drawings/tank-drawing'
 import { buttonClass } from '../../../components/ui/button-class'
 import type { Finder } from '../hooks/use-finder'
+import { EditLink } from '../../../components/setup/edit-link'
 import { fieldId } from '../../../components/setup/field-groups'
 import { toDrawing } from '../../../components/setup/to-drawing'
 import { RoomStrip } from './room-strip'
@@ -41,23 +42,14 @@ export function TankForm({ finder, rod, onEdit }: TankFormProps) {
       <RoomStrip finder={finder} onEdit={onEdit} editHref={editHref} />
       <div className="mt-3 flex flex-wrap gap-2 print:hidden">
         {actions.map(({ path, label, field }) => (
-          <a
+          <EditLink
             key={path}
             href={field === undefined ? editHref(path) : `#${fieldId(field)}`}
-            role="button"
+            onEdit={(anchor) => onEdit(path, anchor)}
             className={buttonClass({ size: 'sm', variant: isExample && path === 'tank.volumeL' ? 'primary' : 'plain' })}
-            onClick={(event) => {
-              event.preventDefault()
-              onEdit(path, event.currentTarget)
-            }}
-            onKeyDown={(event) => {
-              if (event.key !== ' ') return
-              event.preventDefault()
-              onEdit(path, event.currentTarget)
-            }}
           >
             {label}
-          </a>
+          </EditLink>
         ))}
       </div>
       <p className="mt-2 text-sm text-ink-soft">

@@ -1,4 +1,5 @@
 import { Link } from 'react-router-dom'
+import { EditLink } from '../../../components/setup/edit-link'
 import { listAssumed } from '../../../components/setup/assumed'
 import { changeRaw } from '../../../components/setup/edit-raw'
 import { Disclosure } from '../../../components/ui/disclosure'
@@ -29,24 +30,15 @@ export function AssumptionList({ shown, onEdit, editHref }: AssumptionListProps)
         className="grid grid-cols-[minmax(0,1fr)_auto] items-baseline gap-x-3 border-b border-rule py-1.5 text-sm"
       >
         <span className="min-w-0">{capitalise(label)}</span>
-        <a
+        <EditLink
           href={editHref(path)}
-          role="button"
-          aria-label={`${capitalise(label)}, ${text}, assumed: change`}
-          data-path={path}
-          onClick={(event) => {
-            event.preventDefault()
-            onEdit(path, event.currentTarget)
-          }}
-          onKeyDown={(event) => {
-            if (event.key !== ' ') return
-            event.preventDefault()
-            onEdit(path, event.currentTarget)
-          }}
+          name={`${capitalise(label)}, ${text}, assumed: change`}
+          path={path}
+          onEdit={(anchor) => onEdit(path, anchor)}
           className="assumed min-h-6 text-right font-mono text-[0.94em] text-action"
         >
           {text}
-        </a>
+        </EditLink>
         <Link
           to={hrefOf(changeRaw(visit.raw, confirmed))}
           preventScrollReset

@@ -2,6 +2,7 @@ import { useState } from 'react'
 import { Link } from 'react-router-dom'
 import type { ItemReport } from '#shared/engine/types'
 import { getKind } from '#shared/kinds/index'
+import { CautionList } from '../../../components/setup/caution-list'
 import { CheckItem } from '../../../components/setup/check-item'
 import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
@@ -60,15 +61,7 @@ export function ItemCard({ item, shown, saidAbove }: ItemCardProps) {
               ))}
             </ul>
           )}
-          {cautions.length > 0 && (
-            <ul className="mt-1 space-y-0.5 text-sm text-ink-soft">
-              {cautions.map((caution) => (
-                <li key={caution}>
-                  <strong className="font-semibold">Caution:</strong> {caution}
-                </li>
-              ))}
-            </ul>
-          )}
+          <CautionList cautions={cautions} />
           <MissingMeasures kind={kind} checks={asks.filter(({ outcome }) => outcome === 'nodata')} />
         </div>
         <div className="flex min-w-0 flex-col items-start gap-3">

@@ -3,6 +3,7 @@ import { Link, useLocation, useNavigate } from 'react-router-dom'
 import { CautionBox } from '../../../components/ui/caution-box'
 import { Popover } from '../../../components/ui/popover'
 import { VerdictIcon } from '../../../components/ui/verdict-icon'
+import { StandingCautions } from '../../../components/setup/standing-cautions'
 import { EditFields } from '../../../components/setup/edit-fields'
 import { findEditTarget } from '../../../components/setup/edit-target'
 import { fieldId } from '../../../components/setup/field-groups'
@@ -126,17 +127,7 @@ export function ReportView({ shown }: { readonly shown: SetupReport }) {
           <ShoppingList shown={shown} />
         </div>
       </section>
-      <div className="mt-12 space-y-3">
-        <CautionBox title="Mains and salt water.">
-          Use a residual-current (ground-fault) protected outlet and drip loops, overload no strip, and let a licensed
-          electrician decide where local codes ask for one.
-        </CautionBox>
-        <CautionBox title="Weight, heat and light.">
-          A filled tank is heavy: a structural engineer decides for anything large or upstairs. Heaters fail: a second,
-          independent cut-off protects what lives here. Heat and light figures are estimates from stated models; measure
-          before trusting livestock to them. Livestock welfare comes first.
-        </CautionBox>
-      </div>
+      <StandingCautions />
       {target && (
         <Popover anchor={editing.anchor} onClose={() => setEditing(null)} label={target.title}>
           <EditFields

@@ -1,6 +1,7 @@
 import { useState } from 'react'
 import { Link } from 'react-router-dom'
 import type { Replacement } from '#shared/engine/swap/types'
+import { CautionList } from '../../../components/setup/caution-list'
 import { CheckItem } from '../../../components/setup/check-item'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
@@ -66,15 +67,7 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
             </ul>
           )}
           <AddOnList answer={answer} swap={swap} />
-          {cautions.length > 0 && (
-            <ul className="mt-2 space-y-0.5 text-sm text-ink-soft">
-              {cautions.map((caution) => (
-                <li key={caution}>
-                  <strong className="font-semibold">Caution:</strong> {caution}
-                </li>
-              ))}
-            </ul>
-          )}
+          <CautionList cautions={cautions} />
         </div>
         <div className="flex min-w-0 flex-col items-start gap-3">
           {deciding && (
