@@ -15,7 +15,7 @@ const links = [
   { href: paths.setupNew, label: 'Setups' },
   { href: paths.gearList, label: 'Gear' },
   { href: paths.worksheets, label: 'Worksheets', isWideOnly: true as const },
-  { href: paths.method, label: 'Method' },
+  { href: paths.method, label: 'Method', isWideOnly: true as const },
 ]
 
 /** A page of its own begins at the top, with focus on its content; a changed query of the same page moves nothing. */

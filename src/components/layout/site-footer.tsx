@@ -28,6 +28,12 @@ export function SiteFooter({ isDemo }: SiteFooterProps) {
             </Link>
             : every calculation by itself.
           </p>
+          <p className="print:hidden">
+            <Link to={paths.method} className="link inline-block min-h-6">
+              Method
+            </Link>
+            : every check, threshold and source.
+          </p>
         </div>
       </div>
     </footer>
