@@ -9,9 +9,9 @@ import { isCloseCall } from './physics/conformance'
 import type { Check, ItemReport, Need, Report, Verdict } from './types'
 
 /** "A close call, 93 % sure: measure the rear chamber before buying." */
-function sayClose(probability: number, settle: string): string {
+function sayClose(isKept: boolean, probability: number, settle: string): string {
   const percent = Math.round(probability * 100)
-  return probability >= 0.5
+  return isKept || probability >= 0.5
     ? ` A close call, ${percent} % sure: ${settle} before buying.`
     : ` A close call: it may keep to the limit all the same, ${percent} % sure; ${settle} before ruling it out.`
 }
@@ -26,7 +26,7 @@ export function presentCheck(judged: Judged, words: Printer): Check {
   const message = [
     judgement.say(words),
     condition ? ` ${describeCondition(condition())(words)}` : '',
-    probability !== undefined && settle !== undefined ? sayClose(probability, settle) : '',
+    probability !== undefined && settle !== undefined ? sayClose(outcome === 'pass', probability, settle) : '',
   ]
   return {
     id: rule.id,

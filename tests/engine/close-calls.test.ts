@@ -43,6 +43,20 @@ describe('a close call', () => {
     )
   })
 
+  it('is told of what just keeps to the end of a range as of what passes', () => {
+    // A wall of 8 mm for 8 to 12 mm: as likely under the end as over it, so even odds less what the far end takes.
+    const check = judge(
+      wholeSetup({ wallMm: 8 }),
+      piece('scraper', { form: 'magnet', wallMinMm: 8, wallMaxMm: 12 }),
+      'scraper.wall',
+    )
+    expect(check.outcome).toBe('pass')
+    expect(check.probability).toBeLessThanOrEqual(0.5)
+    expect(toPlain(check.message)).toMatch(
+      /A close call, 50 % sure: check the walls its magnet is made for before buying\.$/,
+    )
+  })
+
   it('is none where 5 mm are to spare between readings that good', () => {
     // z = 5/2.0817 = 2.40, Φ = 0.992.
     const check = judgeRod(295, 3, 2)

@@ -19,6 +19,8 @@ export interface Changeable {
   /** Of the tank and what it stands on: changed for room alone, and for weight where that is said. */
   readonly isBuilt?: true
   readonly bearsOnWeight?: true
+  /** What animals live in: never said further than they are usually kept. */
+  readonly isLivedIn?: true
   /** Counted from what it is ("12 mm longer") rather than named itself ("at least 20 °C"). */
   readonly isRelative?: true
   /** What would have to hold, to stand after "It would fit if". */
@@ -92,7 +94,7 @@ export const changeables: readonly Changeable[] = [
   sized('goals.sandDepthMm', () => 'the sand', down, {}),
   stated('room.coldestC', (amount) => `the room never fell below ${amount}`, 'C', 'more'),
   stated('room.warmestC', (amount) => `the room never rose above ${amount}`, 'C', 'less'),
-  stated('goals.temperatureC', (amount) => `the water were kept at ${amount}`, 'C'),
+  { ...stated('goals.temperatureC', (amount) => `the water were kept at ${amount}`, 'C'), isLivedIn: true },
   stated('goals.rockKg', (amount, isMore) => `there were ${least(isMore)} ${amount} of rock`, 'kg'),
   stated('goals.turnoverPerHour.0', (amount) => `a turnover of ${amount} were enough`, '/h', 'less'),
   stated('goals.turnoverPerHour.1', (amount) => `a turnover of up to ${amount} were wanted`, '/h', 'more'),

@@ -100,7 +100,7 @@ function findMost(scene: Scene, knob: Knob, isMore: boolean, valueAt: (count: nu
   const key = `turns ${knob.path} ${isMore}`
   const known = scene.kept.get(key)
   if (typeof known === 'number') return known
-  const [low, high] = knob.attribute.plausible
+  const [low, high] = knob.range
   const isPossible = (count: number) => {
     const value = valueAt(count)
     return value >= low && value <= high && findContradictions(knob.give(scene.plan.setup, value)).length === 0

@@ -19,6 +19,8 @@ export interface Knob {
   readonly path: string
   readonly attribute: MeasureAttribute
   readonly from: number
+  /** Between what it may be said to be. */
+  readonly range: readonly [number, number]
   readonly only?: 'more' | 'less'
   readonly isRelative: boolean
   readonly give: (setup: Setup, value: number) => Setup
@@ -59,6 +61,7 @@ function listSetupKnobs({ plan }: Scene, failing: readonly Judged[], candidate: 
         path,
         attribute,
         from,
+        range: changeable.isLivedIn ? attribute.usual : attribute.plausible,
         isRelative: changeable.isRelative === true,
         give: (setup, value) => giveValue(setup, path, value),
         say: (to, words) => changeable.say({ path, from, to, plan }, words),
@@ -92,6 +95,7 @@ function listItemKnobs({ others }: Scene, failing: readonly Judged[]): readonly 
           path: `items.${item.id}.specs.${own.key}`,
           attribute,
           from,
+          range: attribute.plausible,
           isRelative: false,
           give: (setup, value) => giveSpec(setup, item.id, own.key, value),
           say: (to, words) => `${name} were at ${to > from ? 'least' : 'most'} ${words.measure(to, attribute.unit)}`,

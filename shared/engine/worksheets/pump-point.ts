@@ -22,7 +22,7 @@ const usualElbows90 = 2
 /** The pipe of a worksheet, and the curve; null where its points name fewer than two flows. */
 export function readPumpValues(values: PumpValues): { curve: PumpCurve | null; pipe: Pipe } {
   const { boreMm, pipeLengthM, fittings = {} } = values
-  const { elbows90 = values.fittings === undefined ? usualElbows90 : 0, elbows45 = 0 } = fittings
+  const { elbows90 = usualElbows90, elbows45 = 0 } = fittings
   return {
     curve: readPumpCurve(values.flowCurve),
     pipe: { boreMm, lengthMm: pipeLengthM * 1000, fittingsK: fittingsK(elbows90, boreMm, undefined, elbows45) },
@@ -145,7 +145,7 @@ export const pumpPoint: Worksheet = {
         'Makers’ curves are measured with clean pumps and short hoses. Catch the outlet with a bucket and a stopwatch to be sure.',
       ],
       assumptions:
-        values.fittings === undefined
+        values.fittings?.elbows90 === undefined
           ? [assume('fittings.elbows90', usualElbows90, '90° elbows', words.number(usualElbows90, 'count'))]
           : [],
     }

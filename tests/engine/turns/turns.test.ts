@@ -49,6 +49,15 @@ describe('what would make a heater fit', () => {
     expect(turnOf(wholeSetup(), heater({ powerW: 900 }))?.path).not.toBe('room.coldestC')
   })
 
+  it('is never water warmer or colder than 23 to 28 °C, as corals are kept (common practice)', () => {
+    const waters = [25, 75, 220, 260, 300, 400].flatMap((powerW) => {
+      const turn = turnOf(wholeSetup(), heater({ powerW }))
+      return turn?.path === 'goals.temperatureC' ? [turn.to] : []
+    })
+    expect(waters.length).toBeGreaterThan(0)
+    for (const waterC of waters) expect(Math.abs(waterC - 25.5)).toBeLessThanOrEqual(2.5)
+  })
+
   it('is nothing where two things are wrong that no one number turns', () => {
     expect(turnOf(wholeSetup(), heater({ lengthMm: 345, orientation: 'vertical', volts: [230] }))).toBeUndefined()
     expect(turnOf(wholeSetup(), heater({ madeFor: ['freshwater'] }))).toBeUndefined()

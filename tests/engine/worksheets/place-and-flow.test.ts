@@ -129,6 +129,8 @@ describe('the worksheet of a pump', () => {
     const { fittings: _, ...bare } = wide
     const found = work('pump-point', { ...bare, flowCurve, staticHeadM: 1 })
     expect(found.assumptions).toEqual([expect.objectContaining({ key: 'fittings.elbows90', value: 2 })])
+    const slanted = work('pump-point', { ...bare, fittings: { elbows45: 1 }, flowCurve, staticHeadM: 1 })
+    expect(slanted.assumptions).toEqual(found.assumptions)
     const same = [flowCurve[0], flowCurve[0]]
     expect(refusals('pump-point', { ...wide, flowCurve: same, staticHeadM: 1 })).toEqual(['flowCurve'])
   })
