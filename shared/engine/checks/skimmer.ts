@@ -121,7 +121,8 @@ export const skimmerRules: KindRules = {
       unit: 'mm',
       rule: 'The water in its place within the depths that it works in.',
       reads: ['waterDepthMinMm', 'waterDepthMaxMm', ...bodyKeys],
-      uses: ['tank.chambers.*.waterDepthMm', 'tank.sump.waterDepthMm', 'tank.waterLineMm', 'tank.filtration'],
+      // Of several chambers its size chooses one.
+      uses: bodyUses,
       failLabel: 'made for another depth',
       judge: judgeDepth,
     }),
