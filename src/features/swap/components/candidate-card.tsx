@@ -31,6 +31,8 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
   const href = swap.putInHref(answer, [])
   const quantity = pieces[0]?.quantity ?? 1
   const isSeveral = pieces.length > 1
+  // What does not fit is not followed any further: it cannot be said to change nothing.
+  const isFollowed = knockOns.length > 0 || verdict !== 'no'
   return (
     <li className="border-b border-rule py-6">
       <article className="grid gap-x-6 gap-y-4 md:grid-cols-[2rem_minmax(0,1fr)_13rem]">
@@ -54,9 +56,11 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
             <VerdictBadge verdict={verdict} />
           </p>
           <p className="mt-1">{summary}</p>
-          <h4 className="mt-3 text-sm font-semibold">
-            {knockOns.length === 0 ? 'Nothing else changes' : 'What else would change'}
-          </h4>
+          {isFollowed && (
+            <h4 className="mt-3 text-sm font-semibold">
+              {knockOns.length === 0 ? 'Nothing else changes' : 'What else would change'}
+            </h4>
+          )}
           {knockOns.length > 0 && (
             <ul className="list-disc space-y-0.5 pl-5 text-sm">
               {knockOns.map(({ message, subject, kind: sort }) => (

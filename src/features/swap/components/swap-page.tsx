@@ -4,7 +4,7 @@ import type { ReplacementsAnswer } from '#shared/schemas/replacements'
 import type { LinedUp } from '../../../components/drawings/swap-layout'
 import { canLineUp, SwapLineup } from '../../../components/drawings/swap-lineup'
 import { writeSetupHref } from '../../../components/setup/setup-href'
-import { CautionBox } from '../../../components/ui/caution-box'
+import { StandingCautions } from '../../../components/setup/standing-cautions'
 import { EmptyState } from '../../../components/ui/empty-state'
 import { ErrorState } from '../../../components/ui/error-state'
 import { LiveStatus } from '../../../components/ui/live-status'
@@ -130,13 +130,7 @@ function Found({ swap, found }: { readonly swap: Swap; readonly found: Replaceme
           </ul>
         </section>
       )}
-      <div className="mt-10">
-        <CautionBox title="Before you buy.">
-          Verdicts rest on the numbers that are recorded and on what you said. Mains electricity beside salt water wants
-          residual-current (ground-fault) protection and drip loops; heat and light figures are estimates. Livestock
-          welfare comes first.
-        </CautionBox>
-      </div>
+      <StandingCautions />
     </>
   )
 }
