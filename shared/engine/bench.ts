@@ -5,6 +5,7 @@ import { diff, isDemand, type RawKnockOn } from './knock-ons'
 import { checkEssentials } from './needs'
 import type { Candidate } from './rule'
 import { createScene, withItems, type Scene } from './scene'
+import { listChamberIds } from './setup/chamber-ids'
 import type { Plan } from './setup/plan'
 import { resolve } from './setup/resolve'
 import { hasSize } from './setup/tank'
@@ -97,7 +98,7 @@ export function setSwapBench(setup: Setup, goneId: string): Bench | undefined {
 }
 
 /** The setup's items with the candidate among them, where what is gone stood, else last. */
-export function seatCandidate({ scene, before, gone }: Bench, candidate: Candidate): readonly Item[] {
+function seatCandidate({ scene, before, gone }: Bench, candidate: Candidate): readonly Item[] {
   const { piece, quantity, place, mountHeightMm } = candidate
   const item: Item = {
     id: gone?.item.id ?? candidateId,
@@ -111,6 +112,19 @@ export function seatCandidate({ scene, before, gone }: Bench, candidate: Candida
   return before.plan.items.map((one) => (one === gone.item ? item : one))
 }
 
+/** What stays, in another tank: what was said to stand in a chamber that it does not have may stand anywhere. */
+function moveInto(tank: Piece, items: readonly Item[]): readonly Item[] {
+  const ids = listChamberIds(tank.specs)
+  return items.map((item) => {
+    const { place, ...rest } = item
+    return place && 'chamber' in place && !ids.has(place.chamber) ? rest : item
+  })
+}
+
+/** The setup's items once the candidate has come; the tank itself is none. */
+export const listAfter = (bench: Bench, candidate: Candidate): readonly Item[] =>
+  bench.kind === 'tank' ? moveInto(candidate.piece, bench.scene.others) : seatCandidate(bench, candidate)
+
 export function planAfter({ scene, before, kind, gone }: Bench, { piece }: Candidate, items: readonly Item[]): Plan {
   const { setup } = scene.plan
   if (kind === 'tank')
@@ -120,8 +134,8 @@ export function planAfter({ scene, before, kind, gone }: Bench, { piece }: Candi
 
 /** The whole setup with the candidate in it, judged but for the candidate itself. */
 export function assessAfter(bench: Bench, candidate: Candidate): Assessment {
-  const { others } = bench.scene
-  const items = bench.kind === 'tank' ? others : seatCandidate(bench, candidate)
+  const items = listAfter(bench, candidate)
+  const others = bench.kind === 'tank' ? items : bench.scene.others
   const plan = planAfter(bench, candidate, items)
   return {
     plan,

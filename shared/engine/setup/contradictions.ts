@@ -1,7 +1,8 @@
-import { readGroup, readGroups, readNumber, readText } from '../values'
+import { readGroups, readNumber, readText } from '../values'
 import type { ChamberInput, Contradiction, Setup, Specs } from '../types'
 import { defaultPlusMinus } from '../physics/conformance'
 import { lengthToleranceMm } from '../physics/geometry'
+import { listChamberIds } from './chamber-ids'
 import type { TankPlan } from './plan'
 import { resolveTank } from './tank'
 import { createPrinter, type Printer } from '../../units/print'
@@ -137,13 +138,7 @@ function checkRoom({ room }: Setup, words: Printer): Contradiction[] {
 
 function checkItems(setup: Setup): Contradiction[] {
   if (setup.items.length === 0) return []
-  const { specs } = setup.tank
-  const hasSump = readText(specs, 'filtration') === 'sump' || readGroup(specs, 'sump') !== undefined
-  const chambers = new Set([
-    ...(readGroups<ChamberInput>(specs, 'chambers') ?? []).map(({ id }) => id),
-    'display',
-    ...(hasSump ? ['sump'] : []),
-  ])
+  const chambers = listChamberIds(setup.tank.specs)
   const ids = setup.items.map(({ id }) => id)
   return setup.items.flatMap(({ id, place }, index): Contradiction[] => [
     ...(ids.indexOf(id) < index ? [{ path: `items.${index}.id`, detail: `Two items have the id “${id}”.` }] : []),

@@ -26,7 +26,7 @@ export function findFreed(outfit: Outfit, before: State, after: State): readonly
     if (!isWorse(assessWithout(bench, item), before)) return []
     const without = changeItems(
       outfit,
-      items.filter((other) => other !== item),
+      items.filter(({ id }) => id !== item.id),
     )
     if (isWorse(assessOutfit(without), after)) return []
     return [

@@ -1,5 +1,5 @@
 import { assessAll, judgeAll, toCandidate, type Assessment } from '../assess'
-import { planAfter, seatCandidate, type Bench } from '../bench'
+import { listAfter, planAfter, type Bench } from '../bench'
 import { judge, type Judged } from '../judge'
 import { checkEssentials } from '../needs'
 import type { Candidate, Rule, Say } from '../rule'
@@ -56,7 +56,7 @@ export function describeState({ items, essentials }: Assessment, tank: readonly 
 }
 
 export function createOutfit(bench: Bench, candidate: Candidate): Outfit {
-  const items = bench.kind === 'tank' ? bench.scene.others : seatCandidate(bench, candidate)
+  const items = listAfter(bench, candidate)
   return { bench, candidate, items, plan: planAfter(bench, candidate, items) }
 }
 

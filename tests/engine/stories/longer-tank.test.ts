@@ -182,6 +182,21 @@ describe('a tank of 170 L that is gone, and a longer one', () => {
   })
 })
 
+describe('a tank whose chambers have other names', () => {
+  it('has what stood in the old ones put anywhere it has room', () => {
+    const named = (id: string) => piece('tank', { ...old, chambers: [{ ...chambers[0], id }] }, `with-${id}`)
+    const placed = setup.items.map((one) => (one.id === 'heater' ? { ...one, place: { chamber: 'rear' } } : one))
+    const catalogue = catalogueOf(named('back'), named('rear'))
+    const result = replacements({ ...setup, items: placed }, 'tank', catalogue, { limit: 10, offset: 0 })!
+    expect(result.answers.map(({ knockOns }) => knockOns)).toEqual([[], []])
+    // Nor is a rod that has room in none of its chambers forgotten.
+    const small = { ...chambers[0], id: 'back', lengthMm: 30, widthMm: 30 }
+    const narrow = catalogueOf(piece('tank', { ...old, chambers: [small] }, 'narrow'))
+    const [answer] = replacements({ ...setup, items: placed }, 'tank', narrow, { limit: 1, offset: 0 })!.answers
+    expect(answer && tellKnockOns(answer)).toContainEqual(['check', 'heater', 'pass', 'fail'])
+  })
+})
+
 describe('the same longer tank where nothing was said of what carries it', () => {
   it('fits with changes', () => {
     const onFloor = { ...setup, items: setup.items.filter(({ id }) => id !== 'stand') }
