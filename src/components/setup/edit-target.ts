@@ -1,5 +1,6 @@
 import { findSetupField, type SetupField } from '#shared/kinds/setup-fields'
 import type { Plan } from '#shared/engine/setup/plan'
+import { capitalise } from '../../lib/capitalise'
 
 /** What a press in the drawing or list opens: one field, or a few that belong together. */
 export interface EditTarget {
@@ -14,8 +15,6 @@ const pick = (paths: readonly string[]): SetupField[] =>
     const field = findSetupField(path)
     return field ? [{ ...field, path }] : []
   })
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 const chamberSizes = ['lengthMm', 'widthMm', 'waterDepthMm'] as const
 
 /** What a path stands for in the interface; `tank.chambers` adds one, `tank.size` is the outside in three. */

@@ -5,6 +5,7 @@ import { MeasureField } from '../ui/measure-field'
 import { SelectField } from '../ui/select-field'
 import { TextField } from '../ui/text-field'
 import { echoField } from './check-field'
+import { capitalise } from '../../lib/capitalise'
 
 export interface FieldControlProps {
   readonly id: string
@@ -28,8 +29,6 @@ const keepTyped = (options: readonly Option[], text: string): readonly Option[] 
   text === '' || options.some(({ value }) => value === text)
     ? options
     : [...options, { value: text, label: `“${text}”` }]
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 
 /** One thing to say of a setup, asked for as its sort demands. The text stays as it was typed. */
 export function FieldControl(props: FieldControlProps) {

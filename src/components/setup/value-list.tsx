@@ -1,5 +1,6 @@
 import { EditLink } from './edit-link'
 import type { ReactNode } from 'react'
+import { capitalise } from '../../lib/capitalise'
 
 export interface ValueLine {
   readonly path: string
@@ -15,8 +16,6 @@ export interface ValueListProps {
   readonly onEdit: (path: string, target: Element) => void
   readonly children?: ReactNode
 }
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 
 /** Labels with their values, each of which opens to be changed. Solid: given. Dashed: assumed. */
 export function ValueList({ lines, look, onEdit, children }: ValueListProps) {

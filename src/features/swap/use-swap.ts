@@ -1,12 +1,16 @@
 import { useMemo } from 'react'
-import { keepPreviousData, useQuery } from '@tanstack/react-query'
+import { useQuery } from '@tanstack/react-query'
 import { useLocation, useParams } from 'react-router-dom'
 import type { Plan } from '#shared/engine/setup/plan'
+import type { Turn } from '#shared/engine/types'
 import type { GearCount, Replacement } from '#shared/engine/swap/types'
 import type { Printer } from '#shared/units/print'
 import type { ReplacementsAnswer } from '#shared/schemas/replacements'
 import { findPlan } from '../../components/setup/find-plan'
 import { gearEntryQuery } from '../../components/setup/gear-entry'
+import { findTrial } from '../../components/setup/find-trial'
+import { writeSetupHref } from '../../components/setup/setup-href'
+import { paths } from '../../config/paths'
 import { toEngineSetup } from '../../components/setup/to-engine-setup'
 import { useApp, usePreferences } from '../../lib/app-context'
 import { usePrinter } from '../../lib/use-printer'
@@ -23,11 +27,17 @@ export interface Swap {
   readonly printer: Printer
   readonly plan: Plan
   readonly given: ReadonlySet<string>
+  /** The same question in the setup with that number changed. */
+  readonly tryHref: (turn: Turn) => string | undefined
   readonly putInHref: (
     answer: Replacement,
     extras: readonly { readonly need: string; readonly pieces: readonly GearCount[] }[],
   ) => string | null
 }
+
+/** What was found for another piece must not be put in this one's place while the page waits. */
+const isFor = (answer: ReplacementsAnswer | Unanswered, itemId: string): boolean =>
+  !isUnanswered(answer) && answer.gone.id === itemId
 
 /** The swap page's state is its address; this reads it, and what was found for it. */
 export function useSwap(): Swap {
@@ -37,7 +47,10 @@ export function useSwap(): Swap {
   const { itemId = '' } = useParams()
   const { search } = useLocation()
   const visit = useMemo(() => readSwapVisit(new URLSearchParams(search), itemId, system), [search, itemId, system])
-  const query = useQuery({ ...replacementsQuery(api, visit.request), placeholderData: keepPreviousData })
+  const query = useQuery({
+    ...replacementsQuery(api, visit.request),
+    placeholderData: (before) => (before && isFor(before, itemId) ? before : undefined),
+  })
   const { raw, setup } = visit.visit
   const slug = raw['tank.gear']
   const tank = useQuery({ ...gearEntryQuery(api, slug ?? ''), enabled: slug !== undefined }).data
@@ -52,6 +65,10 @@ export function useSwap(): Swap {
     printer,
     plan,
     given: new Set([...Object.keys(raw), ...Object.keys(tank?.specs ?? {}).map((key) => `tank.${key}`)]),
+    tryHref: (turn) => {
+      const changed = findTrial(turn, raw, printer)
+      return changed && writeSetupHref(paths.swap(itemId), changed, system)
+    },
     putInHref: (chosen, extras) => writePutInHref(raw, { itemId, answer: chosen, extras }, system),
   }
 }

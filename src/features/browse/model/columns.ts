@@ -2,6 +2,7 @@ import { getKind, type KindKey } from '#shared/kinds/index'
 import type { FieldAttribute } from '#shared/kinds/types'
 import type { Printer } from '#shared/units/print'
 import { firstColumns } from './first-columns'
+import { capitalise } from '../../../lib/capitalise'
 
 /** Attributes that a table can show; groups, such as chambers or a pump's curve, are read on the piece's own page. */
 export function listColumns(kind: KindKey): readonly FieldAttribute[] {
@@ -19,8 +20,6 @@ export function chooseColumns(kind: KindKey, chosen: readonly string[] | null): 
   const keys = chosen ?? firstColumns[kind]
   return keys.flatMap((key) => columns.find((column) => column.key === key) ?? [])
 }
-
-const capitalise = (text: string): string => text.slice(0, 1).toUpperCase() + text.slice(1)
 
 /** "Length (in)" */
 export function printHeader(attribute: FieldAttribute, printer: Printer): string {

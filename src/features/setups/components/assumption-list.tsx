@@ -4,6 +4,7 @@ import { listAssumed } from '../../../components/setup/assumed'
 import { changeRaw } from '../../../components/setup/edit-raw'
 import { Disclosure } from '../../../components/ui/disclosure'
 import type { SetupReport } from '../hooks/use-setup-report'
+import { capitalise } from '../../../lib/capitalise'
 
 export interface AssumptionListProps {
   readonly shown: SetupReport
@@ -12,8 +13,6 @@ export interface AssumptionListProps {
 }
 
 const shownAtOnce = 8
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
-
 /** Everything that was assumed, what verdicts rest on first; each is confirmed or changed with one press. */
 export function AssumptionList({ shown, onEdit, editHref }: AssumptionListProps) {
   const { plan, printer, report, visit, hrefOf } = shown

@@ -7,6 +7,7 @@ import { listItems } from '../../../components/setup/items-raw'
 import { useApp } from '../../../lib/app-context'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { usePrinter } from '../../../lib/use-printer'
+import { capitalise } from '../../../lib/capitalise'
 
 export interface NamedItem {
   readonly name: string
@@ -17,8 +18,6 @@ export interface NamedItems {
   readonly of: (id: string) => NamedItem
   readonly tank: Gear | undefined
 }
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 
 /** Slugs that a setup's link names, its tank's with them. */
 export const listSlugs = (raw: RawSetup): readonly string[] => [

@@ -18,6 +18,7 @@ import { paths } from '../../../config/paths'
 import { useApp, usePreferences } from '../../../lib/app-context'
 import { usePrinter } from '../../../lib/use-printer'
 import { useNamedItems } from './use-named-items'
+import { capitalise } from '../../../lib/capitalise'
 
 /** A report and what its page needs to draw, name and change the setup. */
 export interface SetupReport {
@@ -42,8 +43,6 @@ export interface ReportVisit {
 
 /** Whether there is a whole setup to be judged: all of it could be read, and the tank has a size. */
 export const canReport = ({ problems, setup }: SetupVisit): boolean => problems.length === 0 && hasTankSize(setup)
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
 
 function toItems({ items }: Report, { setup }: SetupVisit): readonly Item[] {
   const asked = new Map(((setup as SetupParsed).items ?? []).map((item) => [item.id, item]))

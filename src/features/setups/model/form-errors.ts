@@ -10,8 +10,7 @@ import { hasTankSize } from '../../../components/setup/has-tank-size'
 import { listItems } from '../../../components/setup/items-raw'
 import type { SetupVisit } from '../../../components/setup/read-setup-visit'
 import type { Refused } from '../../../components/setup/report-query'
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
+import { capitalise } from '../../../lib/capitalise'
 
 /** `#/setup/items/0/specs/powerW` as the link spells it: `items.heater.specs.powerW`. */
 export function toLinkPath(pointer: string, { items = [] }: SetupRequest): string {

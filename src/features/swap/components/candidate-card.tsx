@@ -5,11 +5,12 @@ import { CautionList } from '../../../components/setup/caution-list'
 import { CheckItem } from '../../../components/setup/check-item'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
+import { PieceNames } from '../../../components/setup/piece-names'
+import { TurnLine } from '../../../components/setup/turn-line'
 import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
 import { Disclosure } from '../../../components/ui/disclosure'
 import { VerdictBadge } from '../../../components/ui/verdict-badge'
 import { buttonClass } from '../../../components/ui/button-class'
-import { paths } from '../../../config/paths'
 import { describeSpecs } from '../../../lib/describe-specs'
 import type { Swap } from '../use-swap'
 import { AddOnList } from './add-on-list'
@@ -24,12 +25,11 @@ export interface CandidateCardProps {
 /** One candidate: its verdict, what else would change, what it needs besides, and how it differs from what is gone. */
 export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
   const [isOpen, setIsOpen] = useState(false)
-  const { gear, kind, specs, verdict, summary, knockOns, cautions, checks, pieces, differences } = answer
+  const { gear, kind, specs, verdict, summary, knockOns, cautions, checks, pieces, differences, turnsBy } = answer
   const { printer, plan, given } = swap
   const deciding = findDecidingCheck(checks)
   const bare = Object.fromEntries(Object.entries(specs).map(([key, value]) => [key, value?.value]))
   const href = swap.putInHref(answer, [])
-  const quantity = pieces[0]?.quantity ?? 1
   const isSeveral = pieces.length > 1
   // What does not fit is not followed any further: it cannot be said to change nothing.
   const isFollowed = knockOns.length > 0 || verdict !== 'no'
@@ -42,20 +42,14 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
         <div className="min-w-0">
           <h3 className="font-heading text-lg leading-snug font-bold">
             <span className="sr-only">{letter}: </span>
-            {quantity > 1 && !isSeveral && `${quantity} × `}
-            {isSeveral
-              ? pieces.map((piece) => piece.gear && `${piece.gear.brand} · ${piece.gear.model}`).join(' and ')
-              : gear && (
-                  <Link to={paths.gear(gear.slug)} className="underline-offset-4 hover:text-action hover:underline">
-                    {gear.brand} · {gear.model}
-                  </Link>
-                )}
+            <PieceNames pieces={pieces} />
           </h3>
           {!isSeveral && <p className="text-sm text-ink-soft">{describeSpecs(kind, bare, printer)}</p>}
           <p className="mt-1">
             <VerdictBadge verdict={verdict} />
           </p>
           <p className="mt-1">{summary}</p>
+          {turnsBy && <TurnLine turn={turnsBy} href={swap.tryHref(turnsBy)} />}
           {isFollowed && (
             <h4 className="mt-3 text-sm font-semibold">
               {knockOns.length === 0 ? 'Nothing else changes' : 'What else would change'}

@@ -89,7 +89,9 @@ function Found({ swap, found }: { readonly swap: Swap; readonly found: Replaceme
           >
             {failedBy[0]
               ? `Most are turned away for one reason: ${failedBy[0].count} are ${failedBy[0].label}. A second look with a tape often opens the list.`
-              : 'For all of them a number is missing that the verdict turns on.'}
+              : counts.unknown > 0
+                ? 'For all of them a number is missing that the verdict turns on.'
+                : `Nobody has recorded any other ${getKind(kind).label} yet.`}
           </EmptyState>
         </div>
       )}

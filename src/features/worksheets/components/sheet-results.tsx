@@ -4,8 +4,7 @@ import { LiveStatus } from '../../../components/ui/live-status'
 import type { Sheet } from '../hooks/use-sheet'
 import { sheetFieldId } from '../model/group-fields'
 import { printLabel, printResult } from '../model/print-result'
-
-const capitalise = (text: string): string => `${text[0]?.toUpperCase() ?? ''}${text.slice(1)}`
+import { capitalise } from '../../../lib/capitalise'
 
 /** What came out, the first two large; or what is still to be typed. */
 export function SheetResults({ sheet: shown }: { readonly sheet: Sheet }) {
