@@ -12,50 +12,64 @@ import { heaterPower, heaterStrength } from './heater-power'
 import { scaleHeaters } from './heater-scales'
 import { heaterSpace } from './heater-space'
 
-/** Which way the rated volume misses the tank's, and whether by more than a little. */
-function weighRating(ratedL: number, min: number | undefined, max: number | undefined) {
-  const slack = thresholds.ratedVolumeSlack.value
-  const below = min !== undefined && ratedL < min
-  const above = max !== undefined && ratedL > max
-  const far = (below && ratedL < min * (1 - slack)) || (above && ratedL > max * (1 + slack))
-  return { below, above, far }
-}
-
 const readRating = (specs: Specs) => ({
   min: readNumber(specs, 'ratedVolumeMinL'),
   max: readNumber(specs, 'ratedVolumeMaxL'),
 })
 
-const glanceAtRatedVolume = glanceBy(readRating, ({ plan }, { min, max }) => {
-  if ((min === undefined && max === undefined) || !hasRatedVolume(plan)) return undefined
-  return weighRating(plan.tank.ratedL, min, max).far ? 'change' : 'pass'
+type Rating = ReturnType<typeof readRating>
+
+/** The volumes that pass: its maker's rating and a little to either side, since a watt heats alike in any tube. */
+function widenRating({ min, max }: Rating): Rating {
+  const slack = thresholds.ratedVolumeSlack.value
+  return {
+    min: min === undefined ? undefined : min * (1 - slack),
+    max: max === undefined ? undefined : max * (1 + slack),
+  }
+}
+
+const isBelow = (ratedL: number, { min }: Rating) => min !== undefined && ratedL < min
+const isAbove = (ratedL: number, { max }: Rating) => max !== undefined && ratedL > max
+const isOutside = (ratedL: number, rating: Rating) => isBelow(ratedL, rating) || isAbove(ratedL, rating)
+
+const glanceAtRatedVolume = glanceBy(readRating, ({ plan }, rating) => {
+  if ((rating.min === undefined && rating.max === undefined) || !hasRatedVolume(plan)) return undefined
+  return isOutside(plan.tank.ratedL, widenRating(rating)) ? 'change' : 'pass'
 })
 
 function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
-  const { min, max } = readRating(piece.specs)
+  const rating = readRating(piece.specs)
+  const { min, max } = rating
   if (min === undefined && max === undefined)
     return lacking(['ratedVolumeMaxL'], () => 'Nobody has recorded the volumes its maker rates it for.')
   const { ratedL } = plan.tank
   if (!hasRatedVolume(plan)) return noAreas(plan)
-  const { below, above, far } = weighRating(ratedL, min, max)
-  const limit = min !== undefined && max !== undefined ? ([min, max] as const) : (max ?? min ?? null)
+  // Outcome, limit, margin and probability all go by the widened rating: what passes has something to spare.
+  const passes = widenRating(rating)
+  const isFar = isOutside(ratedL, passes)
+  const isBarelyOutside = !isFar && isOutside(ratedL, rating)
   return {
-    outcome: far ? 'change' : 'pass',
+    outcome: isFar ? 'change' : 'pass',
     measured: ratedL,
-    limit,
-    margin: measureMargin(ratedL, min, max),
+    limit:
+      passes.min !== undefined && passes.max !== undefined
+        ? [passes.min, passes.max]
+        : (passes.max ?? passes.min ?? null),
+    margin: measureMargin(ratedL, passes),
     ...beSure(
       (u) =>
-        Math.min(probabilityAtLeast(ratedL, min ?? 0, u), max === undefined ? 1 : probabilityAtMost(ratedL, max, u)),
+        Math.min(
+          probabilityAtLeast(ratedL, passes.min ?? 0, u),
+          passes.max === undefined ? 1 : probabilityAtMost(ratedL, passes.max, u),
+        ),
       () => doubtRated(plan),
     ),
-    cautions:
-      !far && (below || above)
-        ? [
-            (words) =>
-              `Its maker’s rating ${below ? 'starts just above' : 'stops just short of'} this tank’s ${words.volume(ratedL)}.`,
-          ]
-        : [],
+    cautions: isBarelyOutside
+      ? [
+          (words) =>
+            `Its maker’s rating ${isBelow(ratedL, rating) ? 'starts just above' : 'stops just short of'} this tank’s ${words.volume(ratedL)}.`,
+        ]
+      : [],
     rests: () => (isVolumeStated(plan) ? [] : grossUses),
     say: (words) => {
       const range =
@@ -64,13 +78,14 @@ function judgeRatedVolume({ plan }: Scene, { piece }: Candidate): Judgement {
           : max !== undefined
             ? `up to ${words.volume(max)}`
             : `from ${words.volume(min ?? 0)}`
-      if (far) return `Its maker rates it for a ${below ? 'larger' : 'smaller'} tank: ${range}.`
+      if (isFar) return `Its maker rates it for a ${isBelow(ratedL, rating) ? 'larger' : 'smaller'} tank: ${range}.`
+      if (isBarelyOutside) return `Its maker rates it for ${range}, and this tank is only a little off that.`
       return `Its maker rates it for ${range}.`
     },
   }
 }
 
-function measureMargin(value: number, min: number | undefined, max: number | undefined): number | null {
+function measureMargin(value: number, { min, max }: Rating): number | null {
   if (min !== undefined && max !== undefined) return max > min ? Math.min(value - min, max - value) / (max - min) : null
   if (max !== undefined) return max === 0 ? null : (max - value) / max
   return min ? (value - min) / min : null
@@ -82,7 +97,7 @@ const ratedVolume: Rule = {
   worst: 'change',
   unit: 'L',
   basis: practiceBasis,
-  rule: 'The tank’s nominal volume within its maker’s rating passes; a little outside is a caution, further a change. Makers’ ratings differ between tube types though a watt heats alike in any.',
+  rule: `The tank’s nominal volume passes within its maker’s rating and ${100 * thresholds.ratedVolumeSlack.value} % to either side of it, outside of the rating itself with a caution; further is a change. Makers’ ratings differ between tube types though a watt heats alike in any.`,
   reads: ['ratedVolumeMinL', 'ratedVolumeMaxL'],
   uses: grossUses,
   failLabel: 'rated for another size of tank',

@@ -188,11 +188,23 @@ describe('rated volume', () => {
     expect(toPlain(rated(200, undefined).message)).toBe('Its maker rates it for a larger tank: from 200 L.')
   })
 
-  it('has a margin that is negative outside and positive inside', () => {
-    expect(rated(undefined, 50).margin).toBeCloseTo((50 - 84) / 50, 9)
-    expect(rated(200, undefined).margin).toBeCloseTo((84 - 200) / 200, 9)
-    expect(rated(60, 100).margin).toBeCloseTo(16 / 40, 9)
-    expect(rated(100, 200).margin).toBeCloseTo(-16 / 100, 9)
+  it('has a margin that is negative outside of what passes and positive inside', () => {
+    // 15 % to either side of the rating (common practice).
+    expect(rated(undefined, 50).margin).toBeCloseTo((57.5 - 84) / 57.5, 9)
+    expect(rated(200, undefined).margin).toBeCloseTo((84 - 170) / 170, 9)
+    expect(rated(60, 100).margin).toBeCloseTo((115 - 84) / (115 - 51), 9)
+    expect(rated(100, 200).margin).toBeCloseTo((84 - 85) / (230 - 85), 9)
+  })
+
+  it('is as sure as it is far from where a change begins, and says when it passes outside of the rating', () => {
+    const outside = rated(94.6, 170.3)
+    expect(outside).toMatchObject({ outcome: 'pass' })
+    expect(outside.margin).toBeGreaterThan(0)
+    expect(outside.probability).toBeGreaterThan(0.5)
+    expect(toPlain(outside.message)).toContain(
+      'Its maker rates it for 94.6–170 L, and this tank is only a little off that.',
+    )
+    expect(toPlain(rated(80, 170).message)).toBe('Its maker rates it for 80–170 L.')
   })
 
   it('goes by the nominal volume where there is one', () => {
