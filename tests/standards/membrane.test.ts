@@ -2,6 +2,7 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
   concentrationFactor,
+  findRatedDriveKPa,
   membraneFlowLpd,
   osmoticPressureKPa,
   recoveryShare,
@@ -108,5 +109,12 @@ describe('the output of a membrane', () => {
       ),
     )
     expect(membraneFlowLpd(rating, { ...feed, feedKPa: 100, feedTdsPpm: 19000, wasteRatio: 3 })).toBe(0)
+  })
+
+  it('is no number where the test’s own pressure does not overcome osmosis', () => {
+    // 60 kPa against 2000 ppm at 25 °C, which take C (T + 320)/491000 bar: 140.53 kPa.
+    const impossible = { ...rating, testPressureKPa: 60, testTdsPpm: 2000 }
+    expectWithin(findRatedDriveKPa(impossible, 1e9), 60 - 140.53, 1e-2)
+    expect(() => membraneFlowLpd(impossible, feed)).toThrow(RangeError)
   })
 })

@@ -74,7 +74,7 @@ function judgeFlow(scene: Scene, { piece, quantity }: Candidate): Judgement {
     return {
       outcome: 'nodata',
       missing: [],
-      say: () => 'Nobody has recorded all that the RO/DI unit’s output is computed from.',
+      say: () => 'The RO/DI unit’s output cannot be computed from what is recorded of it.',
     }
   const deliveredLpd = most.value * quantity
   const neededLpd = output * unit.quantity * (1 + waste)

@@ -1,3 +1,4 @@
+import { findCurveFaults } from '../../kinds/consistency-lists'
 import { fittingsK, systemHeadM, type Pipe } from '../physics/flow'
 import {
   findOperatingPoint,
@@ -49,9 +50,14 @@ export function describePlumbing(scene: Scene, specs: Specs, basin: Basin): Plum
   }
 }
 
+/** What is wrong with the curve that was recorded; undefined where nothing is, or nobody recorded one. */
+export const findCurveFault = (specs: Specs): string | undefined =>
+  findCurveFaults({ flowCurve: readGroups<CurvePoint>(specs, 'flowCurve') })[0]?.detail
+
+/** Null where nobody recorded a curve, or one that no pump has. */
 export const readCurve = (specs: Specs): PumpCurve | null => {
   const points = readGroups<CurvePoint>(specs, 'flowCurve')
-  return points ? readPumpCurve(points) : null
+  return points && findCurveFault(specs) === undefined ? readPumpCurve(points) : null
 }
 
 export const findPoint = (curve: PumpCurve, { staticHeadM, pipe }: Plumbing): OperatingPoint =>

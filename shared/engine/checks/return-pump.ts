@@ -8,7 +8,7 @@ import type { Value } from '../types'
 import { readFlag, readMeasure, readNumber } from '../values'
 import { bodyUses, judgeBody, lackWater } from './body-judgement'
 import { chooseBasin, tryBody, type BodyFit } from './body-space'
-import { chooseBands, findPumpBasins, findTurnover, readCurve, type Turnover } from './pump-flow'
+import { chooseBands, findCurveFault, findPumpBasins, findTurnover, readCurve, type Turnover } from './pump-flow'
 import { hasAreas, noAreas, waterUses } from './shape'
 
 /** The roomiest place for the pump, or what its size lacks. */
@@ -80,6 +80,8 @@ const sayTurnover =
 
 function judgeFlow(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece
+  const fault = findCurveFault(specs)
+  if (fault !== undefined) return lacking(['flowCurve'], () => `Its flow curve cannot be right: ${fault}.`)
   if (!readCurve(specs)) return lacking(['flowCurve'], () => 'Nobody has recorded how its flow falls with height yet.')
   const basin = choosePumpBasin(scene, candidate)
   if (!basin) return lackWater(candidate.place)
@@ -137,7 +139,7 @@ function judgeBore({ plan }: Scene, { piece }: Candidate): Judgement | null {
       (u) => probabilityWithin(bore, built - thresholds.pumpBoreMm.value, built + thresholds.pumpBoreMm.value, u),
       () => [doubt(own, 'other', 'check its bore')],
     ),
-    ...(!isSame && { asks: { need: 'hose-adaptor', amount: null, unit: null } }),
+    ...(!isSame && { asks: { need: 'hose-adaptor', amount: null, unit: null, lacks: [`${bore}`] } }),
     say: (words) =>
       isSame
         ? `Its ${words.length(bore)} bore takes the tank’s hose.`

@@ -1,7 +1,7 @@
 import type { Printer } from '../../units/print'
 import { lacking, type Candidate, type Judgement, type KindRules, type Say } from '../rule'
 import type { Scene } from '../scene'
-import { membraneFlowLpd } from '../physics/membrane'
+import { findRatedDriveKPa, membraneFlowLpd } from '../physics/membrane'
 import type { Item, Specs } from '../types'
 import { beSure, doubt, type Doubt } from '../doubt'
 import { probabilityAtLeast } from '../physics/conformance'
@@ -22,7 +22,9 @@ function judgeStages(_scene: Scene, { piece }: Candidate): Judgement {
   return {
     outcome: missing.length > 0 ? 'change' : 'pass',
     measured: stages,
-    ...(missing.length > 0 && { asks: { need: 'filter-stage', amount: missing.length, unit: 'count' as const } }),
+    ...(missing.length > 0 && {
+      asks: { need: 'filter-stage', amount: missing.length, unit: 'count' as const, lacks: missing },
+    }),
     say: () =>
       missing.length > 0
         ? `It lacks ${joinNames(missing)}: add ${missing.length === 1 ? 'that stage' : 'those stages'}.`
@@ -49,17 +51,25 @@ export function findPressureKPa({ plan }: Scene, specs: Specs, { hasOwnBooster, 
 
 const outputKeys = ['membraneLpd', 'testPressureKPa', 'testTempC', 'wasteRatio']
 
-/** Litres a day that the unit makes on a feed; the attributes it lacks where that cannot be told. */
-export function findOutputLpd(scene: Scene, specs: Specs, feed: Feed): number | readonly string[] {
+/** Litres a day that the unit makes on a feed; no data, and why, where that cannot be told. */
+export function findOutputLpd(scene: Scene, specs: Specs, feed: Feed): number | Judgement {
   const [ratedLpd, testPressureKPa, testTempC, wasteRatio] = outputKeys.map((key) => readNumber(specs, key))
   if (ratedLpd === undefined || testPressureKPa === undefined || testTempC === undefined || wasteRatio === undefined)
-    return outputKeys.filter((key) => readNumber(specs, key) === undefined)
+    return lacking(
+      outputKeys.filter((key) => readNumber(specs, key) === undefined),
+      () => 'Nobody has recorded all that its output is computed from.',
+    )
   const testTdsPpm = readNumber(specs, 'testTdsPpm')
+  const rating = { ratedLpd, testPressureKPa, testTempC, ...(testTdsPpm !== undefined && { testTdsPpm }) }
+  if (findRatedDriveKPa(rating, wasteRatio) <= 0)
+    return lacking(
+      ['testPressureKPa'],
+      (words) =>
+        `Its maker’s test pressure of ${words.measure(testPressureKPa, 'kPa')} cannot be right: it does not overcome osmosis.`,
+    )
   const { feedTempC, feedTdsPpm } = scene.plan.water
-  return membraneFlowLpd(
-    { ratedLpd, testPressureKPa, testTempC, ...(testTdsPpm !== undefined && { testTdsPpm }) },
-    { feedKPa: findPressureKPa(scene, specs, feed), feedTempC, feedTdsPpm, wasteRatio },
-  )
+  const feedKPa = findPressureKPa(scene, specs, feed)
+  return membraneFlowLpd(rating, { feedKPa, feedTempC, feedTdsPpm, wasteRatio })
 }
 
 /** Of the tap's pressure, which its owner read on a gauge or which was assumed. */
@@ -88,8 +98,7 @@ function judgeOutput(scene: Scene, { piece, quantity }: Candidate): Judgement {
   const { plan, others } = scene
   const hasOwnBooster = readFlag(piece.specs, 'boosterIncluded')
   const found = findOutputLpd(scene, piece.specs, { hasOwnBooster: hasOwnBooster ?? false, others })
-  if (typeof found !== 'number')
-    return lacking(found, () => 'Nobody has recorded all that its output is computed from.')
+  if (typeof found !== 'number') return found
   if (plan.assumed.has('water.litresPerWeek') && !hasAreas(plan)) return noAreas(plan)
   const outputLpd = found * quantity
   const needLpd = plan.water.litresPerWeek / 7

@@ -53,17 +53,31 @@ export function concentrationFactor(recovery: number): number {
 }
 
 /**
+ * Pressure that drove the membrane when it was rated, kPa: the test's less the osmotic pressure along it. Not above 0: the
+ * test cannot have given any product, so that one of its numbers is wrong. RangeError for NaN.
+ */
+export function findRatedDriveKPa(
+  { testPressureKPa, testTempC, testTdsPpm = defaultTestTdsPpm }: Omit<MembraneRating, 'ratedLpd'>,
+  wasteRatio: number,
+): number {
+  requireFinite({ testPressureKPa })
+  const stronger = concentrationFactor(recoveryShare(wasteRatio))
+  return testPressureKPa - osmoticPressureKPa(testTdsPpm * stronger, testTempC)
+}
+
+/**
  * Product of a membrane on a feed, L/day: rated × NDP / rated NDP × temperature factor, where NDP is the feed's pressure
  * less the osmotic pressure along the membrane. Pressure drop along it and the product's own pressure are left out. A
- * rating at another temperature than 25 °C is brought to it first. 0 where the pressure does not overcome osmosis.
- * RangeError for NaN.
+ * rating at another temperature than 25 °C is brought to it first. 0 where the feed's pressure does not overcome osmosis.
+ * RangeError for NaN, and for a rating whose own pressure does not (see `findRatedDriveKPa`).
  */
 export function membraneFlowLpd(rating: MembraneRating, feed: MembraneFeed): number {
-  const { ratedLpd, testPressureKPa, testTempC, testTdsPpm = defaultTestTdsPpm } = rating
-  requireFinite({ ratedLpd, testPressureKPa, feedKPa: feed.feedKPa })
+  const { ratedLpd, testTempC } = rating
+  requireFinite({ ratedLpd, feedKPa: feed.feedKPa })
   const stronger = concentrationFactor(recoveryShare(feed.wasteRatio))
-  const ratedDrive = testPressureKPa - osmoticPressureKPa(testTdsPpm * stronger, testTempC)
+  const ratedDrive = findRatedDriveKPa(rating, feed.wasteRatio)
+  if (ratedDrive <= 0) throw new RangeError('the test pressure must overcome osmosis')
   const drive = feed.feedKPa - osmoticPressureKPa(feed.feedTdsPpm * stronger, feed.feedTempC)
-  if (drive <= 0 || ratedDrive <= 0) return 0
+  if (drive <= 0) return 0
   return ((ratedLpd * drive) / ratedDrive) * (temperatureFactor(feed.feedTempC) / temperatureFactor(testTempC))
 }

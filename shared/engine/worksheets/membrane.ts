@@ -1,6 +1,7 @@
 import {
   concentrationFactor,
   defaultTestTdsPpm,
+  findRatedDriveKPa,
   membraneFlowLpd,
   osmoticPressureKPa,
   recoveryShare,
@@ -62,10 +63,23 @@ export const membrane: Worksheet = {
   work(values: Values, _setup, words) {
     const { membraneLpd, testPressureKPa, testTempC, testTdsPpm = defaultTestTdsPpm, ...feed } = values
     const { feedKPa, feedTempC, feedTdsPpm, rejectionFraction, wasteRatio } = feed
-    const litresPerDay = membraneFlowLpd({ ratedLpd: membraneLpd, testPressureKPa, testTempC, testTdsPpm }, feed)
+    const rating = { ratedLpd: membraneLpd, testPressureKPa, testTempC, testTdsPpm }
+    const ratedKPa = findRatedDriveKPa(rating, wasteRatio)
+    if (ratedKPa <= 0) {
+      const osmosisKPa = words.measure(testPressureKPa - ratedKPa, 'kPa')
+      return {
+        ok: false,
+        problems: [
+          {
+            path: 'testPressureKPa',
+            detail: `${words.measure(testPressureKPa, 'kPa')} cannot be right: osmosis alone takes ${osmosisKPa} at that salt content, so that nothing would have come through in the test.`,
+          },
+        ],
+      }
+    }
+    const litresPerDay = membraneFlowLpd(rating, feed)
     const recovery = recoveryShare(wasteRatio)
     const stronger = concentrationFactor(recovery)
-    const ratedKPa = testPressureKPa - osmoticPressureKPa(testTdsPpm * stronger, testTempC)
     const driveKPa = feedKPa - osmoticPressureKPa(feedTdsPpm * stronger, feedTempC)
     const warmth = temperatureFactor(feedTempC) / temperatureFactor(testTempC)
     const productTdsPpm = feedTdsPpm * (1 - rejectionFraction)
@@ -132,7 +146,6 @@ export const membrane: Worksheet = {
       ],
       cautions: [
         ...(driveKPa <= 0 ? ['The pressure at your tap does not overcome osmosis: nothing comes through.'] : []),
-        ...(ratedKPa <= 0 ? ['The test pressure does not overcome osmosis: check the rating.'] : []),
         ...(feedTempC < 5 || feedTempC > 35 || testTempC < 5 || testTempC > 35
           ? [`The temperature factor is made for ${words.pair([5, 35], 'C')}.`]
           : []),

@@ -1,4 +1,5 @@
 import { measure } from '../../kinds/build'
+import { findCurveFaults } from '../../kinds/consistency-lists'
 import { listLossSteps } from './pump-steps'
 import { fittingsK, systemHeadM, type Pipe } from '../physics/flow'
 import { findOperatingPoint, readPumpCurve, type CurvePoint, type PumpCurve } from '../physics/pump'
@@ -98,6 +99,12 @@ export const pumpPoint: Worksheet = {
     volumeL: 75,
   },
   work(values: PumpValues, _setup, words) {
+    const faults = findCurveFaults({ flowCurve: values.flowCurve })
+    if (faults.length > 0)
+      return {
+        ok: false,
+        problems: faults.map(({ path, detail }) => ({ path, detail: `A curve no pump has: ${detail}.` })),
+      }
     const { curve, pipe } = readPumpValues(values)
     if (curve === null)
       return {

@@ -75,11 +75,22 @@ export const rodInChamber: Worksheet = {
     chamber: { lengthMm: 100, widthMm: 120, waterDepthMm: 300 },
   },
   work(values: RodValues, _setup, words) {
+    const { lengthMm, minImmersionMm } = values
+    if (minImmersionMm !== undefined && minImmersionMm > lengthMm)
+      return {
+        ok: false,
+        problems: [
+          {
+            path: 'minImmersionMm',
+            detail: `${words.length(minImmersionMm)} is more than the ${words.length(lengthMm)} of the rod.`,
+          },
+        ],
+      }
     const stand = standRod(values)
     if (stand === undefined)
       return { ok: false, problems: [{ path: 'orientation', detail: 'No position is allowed.' }] }
     const { fits, placement, limitMm, measuredMm } = stand
-    const { clearanceMm = usualClearanceMm, orientation, chamber, minImmersionMm } = values
+    const { clearanceMm = usualClearanceMm, orientation, chamber } = values
     return {
       ok: true,
       result: {
@@ -101,7 +112,7 @@ export const rodInChamber: Worksheet = {
           : []),
         ...(orientation === undefined ? [assume('orientation', 'any', 'May be placed', 'any')] : []),
         ...(minImmersionMm === undefined
-          ? [assume('minImmersionMm', values.lengthMm, 'Least immersion', 'the whole rod')]
+          ? [assume('minImmersionMm', lengthMm, 'Least immersion', 'the whole rod')]
           : []),
         ...(chamber.heightMm === undefined
           ? [assume('chamber.heightMm', 'open', 'Chamber height', 'nothing above it')]

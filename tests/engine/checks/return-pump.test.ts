@@ -119,6 +119,15 @@ describe('the turnover of a return pump', () => {
 
   it('is no data without a curve, and nothing where the pump does not lift the water', () => {
     expect(flow({ flowCurve: undefined })).toMatchObject({ outcome: 'nodata', missing: ['flowCurve'] })
+    const rising = [
+      { headM: 0.5, flowLph: 0 },
+      { headM: 2, flowLph: 900 },
+    ]
+    expect(flow({ flowCurve: rising })).toMatchObject({
+      outcome: 'nodata',
+      missing: ['flowCurve'],
+      message: 'Its flow curve cannot be right: flow must fall as head rises.',
+    })
     const short = [
       { headM: 0.01, flowLph: 0 },
       { headM: 0, flowLph: 2000 },

@@ -83,6 +83,16 @@ describe('the output of an RO/DI unit', () => {
     expect(ofUnit('output', {}, unknown).outcome).toBe('nodata')
   })
 
+  it('is no data where its maker’s test cannot have given anything', () => {
+    // 2000 ppm at 25 °C take 140 kPa (membrane maker’s technical manual, form 45-D01504-en), and more along the membrane.
+    const wrong = { testPressureKPa: 60, testTdsPpm: 2000 }
+    expect(ofUnit('output', wrong)).toMatchObject({ outcome: 'nodata', missing: ['testPressureKPa'] })
+    expect(ofUnit('output', wrong).message).toContain('test pressure of 60\u00a0kPa cannot be right')
+    expect(fitCheck(tap(), unit(wrong)).verdict).not.toBe('no')
+    const there = tap({}, item('unit', unit(wrong)))
+    expect(judge(there, booster(), 'booster-pump.flow').outcome).toBe('nodata')
+  })
+
   it('tells the days of the first fill', () => {
     // 84 L at 50 L a day and less.
     const days = (membraneLpd: number) => ofUnit('output', { membraneLpd }).message

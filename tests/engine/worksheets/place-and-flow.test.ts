@@ -45,6 +45,12 @@ describe('the worksheet of a rod in a chamber', () => {
     expect(work('rod-in-chamber', low).result).toMatchObject({ position: 'none', slackMm: -10 })
   })
 
+  it('refuses more of the rod under water than there is of the rod', () => {
+    const body = { lengthMm: 250, diameterMm: 24, chamber: { lengthMm: 100, widthMm: 120, waterDepthMm: 300 } }
+    expect(refusals('rod-in-chamber', { ...body, minImmersionMm: 251 })).toEqual(['minImmersionMm'])
+    expect(refusals('rod-in-chamber', { ...body, minImmersionMm: 250 })).toEqual([])
+  })
+
   it('keeps the clearance that was asked for', () => {
     const body = {
       lengthMm: 250,
@@ -96,9 +102,10 @@ describe('the worksheet of a pump', () => {
   it('loses 0.635 m in 3 m of 25 mm pipe at 4000 L/h', () => {
     // Worked loop by hand: sea water at 25 °C, v 2.2635 m/s, Re 60 400, f 0.02024, ε 0.0015 mm; entry and exit 1.5 v²/2g.
     const headM = 1.2 + 0.635 + (1.5 * 2.2635 ** 2) / (2 * 9.80665)
+    // As good as level, since no pump gives the same head at two flows.
     const flat = [
-      { flowLph: 0, headM },
-      { flowLph: 8000, headM },
+      { flowLph: 0, headM: headM + 1e-6 },
+      { flowLph: 8000, headM: headM - 1e-6 },
     ]
     const body = {
       flowCurve: flat,
@@ -132,7 +139,12 @@ describe('the worksheet of a pump', () => {
     const slanted = work('pump-point', { ...bare, fittings: { elbows45: 1 }, flowCurve, staticHeadM: 1 })
     expect(slanted.assumptions).toEqual(found.assumptions)
     const same = [flowCurve[0], flowCurve[0]]
-    expect(refusals('pump-point', { ...wide, flowCurve: same, staticHeadM: 1 })).toEqual(['flowCurve'])
+    expect(refusals('pump-point', { ...wide, flowCurve: same, staticHeadM: 1 })).toEqual(['flowCurve.1.headM'])
+  })
+
+  it('refuses a curve that rises with the flow, by the point that does', () => {
+    const rising = [...flowCurve, { flowLph: 8000, headM: 5 }]
+    expect(refusals('pump-point', { ...wide, flowCurve: rising, staticHeadM: 1 })).toEqual(['flowCurve.2.flowLph'])
   })
 })
 

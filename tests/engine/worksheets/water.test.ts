@@ -85,6 +85,14 @@ describe('the worksheet of a membrane', () => {
     expect(found.cautions.join(' ')).toMatch(/nothing comes through/)
   })
 
+  it('refuses a test pressure that does not overcome osmosis, however strong the tap is', () => {
+    // The manual’s C (T + 320)/491000 bar: 2000 ppm at 25 °C take 140.5 kPa.
+    const body = { ...rated, testTdsPpm: 2000, feedKPa: 400, feedTempC: 25 }
+    expect(refusals('membrane', { ...body, testPressureKPa: 60 })).toEqual(['testPressureKPa'])
+    expect(refusals('membrane', { ...body, testPressureKPa: 140 })).toEqual(['testPressureKPa'])
+    expect(refusals('membrane', { ...body, testPressureKPa: 141 })).toEqual([])
+  })
+
   it('names the test salt content that it took', () => {
     const { testTdsPpm: _, ...unsaid } = rated
     const found = work('membrane', { ...unsaid, feedKPa: 300, feedTempC: 15 })
