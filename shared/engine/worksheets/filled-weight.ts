@@ -1,11 +1,12 @@
+import type { Printer } from '../../units/print'
 import { shellDensityKgM3, solidDensityKgL } from '../physics/weight'
 import { seawaterDensityKgM3 } from '../physics/seawater'
 import { defaults } from '../setup/defaults'
 import type { Plan } from '../setup/plan'
-import type { Setup } from '../types'
+import type { Assumption, Setup } from '../types'
 import { findFloorPressureKPa, weighFilled, type FilledWeight } from '../weight-budget'
 import { fromKind, fromSetupField } from './fields'
-import { isPlan, listUsed, planInputs } from './plan-inputs'
+import { assume, isPlan, listUsed, planInputs } from './plan-inputs'
 import { put } from './quantities'
 import type { Step, Worksheet, WorksheetField } from './types'
 
@@ -94,6 +95,25 @@ const weightUses: readonly string[] = [
   'goals.sandDepthMm',
 ]
 
+/** What was taken for what nobody said of the stand. */
+function listStandAssumed(values: Values, { tank }: Plan, words: Printer): readonly Assumption[] {
+  const assumed = (key: 'standKg' | 'standLengthMm' | 'standWidthMm', value: number, label: string, printed: string) =>
+    values[key] === undefined ? [assume(key, value, label, printed)] : []
+  const { outerLengthMm, outerWidthMm } = tank
+  return [
+    ...assumed('standKg', 0, 'Mass of the stand', words.mass(0)),
+    ...assumed('standLengthMm', outerLengthMm, 'Length of what presses on the floor', words.length(outerLengthMm)),
+    ...assumed('standWidthMm', outerWidthMm, 'Width of what presses on the floor', words.length(outerWidthMm)),
+  ]
+}
+
+/** Which of the tank's own sides stand in for what presses on the floor. */
+function warnOfFootprint({ standLengthMm, standWidthMm }: Values): readonly string[] {
+  if (standLengthMm !== undefined && standWidthMm !== undefined) return []
+  const own = standLengthMm !== undefined ? 'width' : standWidthMm !== undefined ? 'length' : 'footprint'
+  return [`The tank’s own ${own} was taken; feet press harder than a full base.`]
+}
+
 export const filledWeight: Worksheet = {
   name: 'filled-weight',
   title: 'What a filled tank weighs',
@@ -136,7 +156,6 @@ export const filledWeight: Worksheet = {
     const { standKg = 0, standLengthMm = outerLengthMm, standWidthMm = outerWidthMm } = values
     const floorKPa = findFloorPressureKPa(plan, standKg, { lengthMm: standLengthMm, widthMm: standWidthMm })
     const { totalKg, ...parts } = weight
-    const isOnStand = values.standLengthMm !== undefined && values.standWidthMm !== undefined
     return {
       ok: true,
       result: { ...parts, totalKg, floorKPa },
@@ -152,10 +171,10 @@ export const filledWeight: Worksheet = {
       ],
       cautions: [
         'Weight and pressure are information, not a verdict. Floors are designed for an evenly spread load: a structural engineer and local building rules decide for anything large or upstairs.',
-        ...(isOnStand ? [] : ['The tank’s own footprint was taken; feet press harder than a full base.']),
+        ...warnOfFootprint(values),
         ...(plan.tank.boxes.length > 1 ? ['A sump stands on its own and is left out.'] : []),
       ],
-      assumptions: listUsed(plan, weightUses, words, fields),
+      assumptions: [...listUsed(plan, weightUses, words, fields), ...listStandAssumed(values, plan, words)],
     }
   },
 }

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { expectWithin, expectWithinShare } from '../../standards/within'
-import { refusals, result, stepValue, work } from './work'
+import { refusals, result, stepValue, work, type Body } from './work'
 
 describe('the worksheet of a heat balance', () => {
   // Inside 1.20 × 0.60 m with 0.55 m of water, 12 mm glass, open top, water 26 °C, room 22 °C, humidity 50 %.
@@ -130,6 +130,19 @@ describe('the worksheet of a filled tank', () => {
   it('presses less on the floor under a larger stand, in proportion', () => {
     const wide = { ...body, standLengthMm: 1400, standWidthMm: 720 }
     expectWithinShare(result('filled-weight', wide, 'floorKPa'), (7.1 * 1200 * 600) / (1400 * 720), 1e-3)
+  })
+
+  it('names what it took where nobody said what the stand weighs or how large it is', () => {
+    const { standKg: _, ...unsaid } = body
+    const taken = (more: Body) => {
+      const { assumptions, cautions } = work('filled-weight', { ...unsaid, ...more })
+      const own = assumptions.filter(({ key }) => key.startsWith('stand')).map(({ key, value }) => [key, value])
+      return [Object.fromEntries(own), /The tank’s own (\w+) was taken/.exec(cautions.join(' '))?.[1]]
+    }
+    expect(taken({})).toEqual([{ standKg: 0, standLengthMm: 1200, standWidthMm: 600 }, 'footprint'])
+    expect(taken({ standKg: 50, standLengthMm: 1400 })).toEqual([{ standWidthMm: 600 }, 'width'])
+    expect(taken({ standKg: 50, standWidthMm: 720 })).toEqual([{ standLengthMm: 1200 }, 'length'])
+    expect(taken({ standKg: 50, standLengthMm: 1400, standWidthMm: 720 })).toEqual([{}, undefined])
   })
 
   it('counts rock and sand, and takes the water away that they displace', () => {
