@@ -23,16 +23,16 @@ const emptySet = 'none'
  */
 function readLinkMeasure(
   text: string,
-  { unit }: MeasureAttribute,
+  attribute: MeasureAttribute,
   system: UnitSystem,
   typedIn: UnitSystem | undefined,
 ): LinkValue {
+  const { unit } = attribute
   if (typedIn === undefined && bareNumber.test(text)) return { ok: true, value: Number(text), text }
   const reading = readMeasure(text, unit, typedIn ?? system)
   if (!reading.ok) return { ok: false, detail: reading.reason }
   if (!reading.assumedUnit) return { ok: true, value: reading.value, text }
-  if (typedIn !== undefined)
-    return { ok: true, value: reading.value, text: `${text} ${findShownUnit(unit, typedIn).symbol}`.trim() }
+  if (typedIn !== undefined) return { ok: true, value: reading.value, text: spellUnit(text, attribute, typedIn) }
   const canonical = readMeasure(text, unit, 'metric')
   return canonical.ok ? { ok: true, value: canonical.value, text } : { ok: false, detail: canonical.reason }
 }
@@ -87,6 +87,13 @@ function getFieldSchema(attribute: FieldAttribute): z.ZodType {
   const schema = schemas.get(attribute) ?? createFieldSchema(attribute)
   schemas.set(attribute, schema)
   return schema
+}
+
+/** A bare number of a form with the unit that it was meant in; anything else as it is. */
+export function spellUnit(text: string, { unit }: MeasureAttribute, typedIn: UnitSystem | undefined): string {
+  if (typedIn === undefined) return text
+  const reading = readMeasure(text, unit, typedIn)
+  return reading.ok && reading.assumedUnit ? `${text.trim()} ${findShownUnit(unit, typedIn).symbol}`.trim() : text
 }
 
 /** Reads what was typed for one field, and holds it to the field's own limits. Never throws. */

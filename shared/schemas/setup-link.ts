@@ -1,3 +1,4 @@
+import { findCountryCode } from '../kinds/countries'
 import { findSetupField } from '../kinds/setup-fields'
 import type { FieldAttribute } from '../kinds/types'
 import { limits } from '../limits'
@@ -5,7 +6,7 @@ import { unitSystems, type UnitSystem } from '../units/systems'
 import type { SetupRequest } from './setup'
 import { findItemField, readItemPlace, toItemSpecs } from './setup-link-items'
 import { isSetupKey, numberChambers, sortPaths } from './setup-link-keys'
-import { readLinkValue } from './setup-link-values'
+import { readLinkValue, spellUnit, type LinkValue } from './setup-link-values'
 
 /** A text in a link that could not be read: where it stands, as it was typed, and why not. */
 export interface LinkProblem {
@@ -95,6 +96,14 @@ function toSetup(tree: Tree, system: UnitSystem): SetupRequest {
   } as SetupRequest
 }
 
+/** The country that is meant, however it is written. */
+function readCountry(text: string): LinkValue {
+  const code = findCountryCode(text)
+  return code === undefined
+    ? { ok: false, detail: 'must be the two letters of a country, such as US or GB' }
+    : { ok: true, value: code, text: code }
+}
+
 /** Every text of the link in canonical order and spelling, with what it means. */
 function readEntries(query: LinkQuery, system: UnitSystem) {
   const given = findText(query, typedInKey)
@@ -106,10 +115,18 @@ function readEntries(query: LinkQuery, system: UnitSystem) {
   for (const path of sortPaths([...raw.keys()])) {
     const text = raw.get(path) ?? ''
     const field = findLinkField(path, raw)
-    const read = field === undefined ? undefined : readLinkValue(text, field, system, typedIn)
-    canonical.push([path, read?.ok ? read.text : text])
+    const read =
+      path === 'country'
+        ? readCountry(text)
+        : field === undefined
+          ? undefined
+          : readLinkValue(text, field, system, typedIn)
+    // What is out of the question keeps the unit it was meant in too.
+    const meant = field?.type === 'measure' ? spellUnit(text, field, typedIn) : text
+    if (!read?.ok) raw.set(path, meant)
+    canonical.push([path, read?.ok ? read.text : meant])
     if (read?.ok) found.push({ path, value: read.value })
-    else problems.push({ path, text, detail: read?.detail ?? 'is not a known field' })
+    else problems.push({ path, text: meant, detail: read?.detail ?? 'is not a known field' })
   }
   return { raw, read: found, problems, canonical }
 }

@@ -1,3 +1,4 @@
+import { findCountryCode } from '../kinds/countries'
 import { z } from 'zod'
 import { setupFields } from '../kinds/setup-fields'
 import { limits } from '../limits'
@@ -78,14 +79,16 @@ const itemsSchema = z
     })
   })
 
+const countryError = 'must be the two capital letters of a country (ISO 3166-1), such as US or GB'
+
 /** What somebody says of their setup. Every number is in the unit that its key names; what is left out is assumed and named. */
 export const setupSchema = z.strictObject(
   {
     name: lineSchema(limits.setupName).optional(),
     units: z.enum(unitSystems as ['us', 'metric'], { error: 'must be us or metric' }).default('metric'),
     country: z
-      .string({ error: 'must be two capital letters, such as US' })
-      .regex(/^[A-Z]{2}$/, 'must be two capital letters, such as US')
+      .string({ error: countryError })
+      .refine((text) => findCountryCode(text) === text, countryError)
       .optional(),
     tank: tankInputSchema,
     support: supportSchema.optional(),

@@ -21,6 +21,25 @@ const report = `/setups/link?${setup}`
 
 const sideways = (page: Page) => page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)
 
+test('what was typed is there again after Back, a reload and a switch of units', async ({ page }) => {
+  await page.goto('/setups/new')
+  await page.getByLabel('Tank volume').fill('20')
+  await page.getByLabel('Outside height').fill('16')
+  await page.getByRole('button', { name: /^Millimetres/ }).click()
+  await expect(page.getByLabel('Tank volume')).toHaveValue('20 gal')
+  await expect(page.getByLabel('Outside height')).toHaveValue('16 in')
+  await page.getByLabel('Coldest room').fill('17')
+  await expect(page).toHaveURL(/room\.coldestC=17/)
+  await page.reload()
+  await expect(page.getByLabel('Coldest room')).toHaveValue(/^17/)
+  await page.getByRole('button', { name: 'Show the report' }).last().click()
+  await expect(page).toHaveURL(/\/setups\/link\?/)
+  await page.goBack()
+  await expect(page).toHaveURL(/\/setups\/new\?/)
+  await expect(page.getByLabel('Tank volume')).toHaveValue('20 gal')
+  await expect(page.getByLabel('Coldest room')).toHaveValue(/^17/)
+})
+
 for (const width of [360, 1280]) {
   test.describe(`a setup at ${width} px`, () => {
     test.use({ viewport: { width, height: 900 } })

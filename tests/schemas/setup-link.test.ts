@@ -130,6 +130,25 @@ describe('reading a link', () => {
     expect(problems[0]?.detail).toMatch(/between 100 and 6000 mm/)
   })
 
+  it('keeps the unit that a form’s number was meant in, also where the number is out of the question', () => {
+    const typed = 'typed=us&tank.outerHeightMm=3&tank.outerWidthMm=-12'
+    const { raw, problems } = read(typed)
+    expect(problems.map(({ path }) => path)).toEqual(['tank.outerWidthMm', 'tank.outerHeightMm'])
+    expect(raw['tank.outerHeightMm']).toBe('3 in')
+    expect(writeSetupLink(new URLSearchParams(typed), 'us')).toContain('tank.outerHeightMm=3%20in')
+  })
+
+  it('knows countries however they are written, and refuses what is none (ISO 3166-1)', () => {
+    expect(read('country=gb').setup).toMatchObject({ country: 'GB' })
+    expect(read('country=UK').setup).toMatchObject({ country: 'GB' })
+    expect(read('country=usa').setup).toMatchObject({ country: 'US' })
+    for (const none of ['ZZ', 'EU', 'XX', 'England'])
+      expect(
+        read(`country=${none}`).problems.map(({ path }) => path),
+        none,
+      ).toEqual(['country'])
+  })
+
   it('passes over keys of the page and empty fields', () => {
     const link = read('kind=heater&verdict=fits&utm=1&tank.wallMm=&tank.volumeL=75')
     expect(link.raw).toEqual({ 'tank.volumeL': '75' })

@@ -3,15 +3,12 @@ import { findWorksheet } from '#shared/engine/worksheets/registry'
 import { WorksheetPage } from '../../features/worksheets/components/worksheet-page'
 import { loadWorksheet } from '../../features/worksheets/load-worksheet'
 import { paths } from '../../config/paths'
-import { usePreferences } from '../../lib/app-context'
 import type { Page } from '../page-route'
 
 function WorksheetRoute() {
   const { name = '' } = useParams()
-  const { system } = usePreferences()
   const sheet = findWorksheet(name)
-  // Other units are another form: what was typed is read anew.
-  return sheet ? <WorksheetPage key={`${name} ${system}`} sheet={sheet} /> : null
+  return sheet ? <WorksheetPage key={name} sheet={sheet} /> : null
 }
 
 export const page: Page = {

@@ -21,7 +21,7 @@ export function SiteHeader({ links, unitSwitch, themeSwitch }: SiteHeaderProps) 
         <nav aria-label="Pages" className="self-stretch overflow-x-auto md:order-2 print:hidden">
           <ul className="flex h-full gap-x-5">
             {links.map(({ href, label, isWideOnly }) => (
-              <li key={href} className={isWideOnly ? 'hidden md:flex' : 'flex'}>
+              <li key={href} className={isWideOnly ? 'hidden lg:flex' : 'flex'}>
                 <NavLink
                   to={href}
                   className="flex min-h-11 items-center border-y-[3px] border-transparent text-ink-soft -outline-offset-2 hover:text-action aria-[current=page]:border-b-action aria-[current=page]:font-semibold aria-[current=page]:text-ink"

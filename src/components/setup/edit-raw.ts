@@ -1,8 +1,7 @@
 import type { MeasureAttribute } from '#shared/kinds/types'
-import { findShownUnit } from '#shared/units/convert'
-import { readMeasure } from '#shared/units/read'
 import type { UnitSystem } from '#shared/units/systems'
 import { isSetupKey } from '#shared/schemas/setup-link-keys'
+import { spellUnit } from '#shared/schemas/setup-link-values'
 
 /** The setup as typed: texts by dotted path, chambers by their place. */
 export type RawSetup = Readonly<Record<string, string>>
@@ -41,8 +40,5 @@ export function removeChamber(raw: RawSetup, at: number): RawSetup {
 }
 
 /** As typed, with the unit that was meant: in a link a bare number is canonical, on the page it is in the person's own unit. */
-export function spellOut(text: string, { unit }: MeasureAttribute, system: UnitSystem): string {
-  const reading = readMeasure(text, unit, system)
-  if (!reading.ok || !reading.assumedUnit) return text.trim()
-  return `${text.trim()} ${findShownUnit(unit, system).symbol}`.trim()
-}
+export const spellOut = (text: string, attribute: MeasureAttribute, system: UnitSystem): string =>
+  spellUnit(text.trim(), attribute, system)

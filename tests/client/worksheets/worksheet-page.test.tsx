@@ -1,4 +1,4 @@
-import { cleanup, fireEvent, screen, waitFor, within } from '@testing-library/react'
+import { act, cleanup, fireEvent, screen, waitFor, within } from '@testing-library/react'
 import { afterEach, describe, expect, it } from 'vitest'
 // Imported here, so that no test waits for a page to be compiled when its route first asks for it.
 import '../../../src/app/routes/worksheets'
@@ -61,6 +61,15 @@ describe('the page of a worksheet', () => {
     expect(screen.queryByText('An example.')).toBeNull()
     await waitFor(() => expect(address()).toContain('volumeL=190%20L'))
     expect(screen.getByRole<HTMLInputElement>('textbox', { name: 'Water to mix' }).value).toBe('190')
+  })
+
+  it('keeps the unit of what was typed when the other system is switched to', async () => {
+    const { app } = renderApp('/worksheets/salt-mix', server, { system: 'us' })
+    await screen.findByText('An example.')
+    type('Water to mix', '20')
+    act(() => app.preferences.set({ system: 'metric' }))
+    const field = screen.getByRole<HTMLInputElement>('textbox', { name: 'Water to mix' })
+    await waitFor(() => expect(field.value).toBe('20 gal'))
   })
 
   it('keeps a wrong text, names it beside its field, and shows no result of it', async () => {

@@ -12,6 +12,7 @@ import { spellBare } from '../../../components/setup/spell-bare'
 import { checkField, explainProblem } from '../../../components/setup/check-field'
 import { fieldId, listFieldGroups } from '../../../components/setup/field-groups'
 import { FieldControl } from '../../../components/setup/field-control'
+import { useTypedTexts } from '../../../components/setup/use-typed-texts'
 import { HiddenFields } from './hidden-fields'
 
 export interface PlainFormProps {
@@ -42,7 +43,7 @@ export function PlainForm({ finder }: PlainFormProps) {
   const { state, plan, printer, visit } = finder
   const { system } = printer
   const [sent] = useState<RawSetup>(() => spellBare(state.raw, printer))
-  const [texts, setTexts] = useState<RawSetup>(sent)
+  const { texts, onType } = useTypedTexts(sent, system)
   const wrong = new Set(visit.problems.map(({ path }) => path))
   const chambers = countChambers(state.raw)
   const groups = listFieldGroups(state.kind, chambers)
@@ -79,7 +80,7 @@ export function PlainForm({ finder }: PlainFormProps) {
                   attribute={attribute}
                   text={text}
                   system={system}
-                  onChange={(next) => setTexts((earlier) => ({ ...earlier, [path]: next }))}
+                  onChange={(next) => onType(path, next)}
                   error={isAsSent ? checkField(text, attribute, system) : undefined}
                   assumed={readAssumed(path, plan, printer)?.shown}
                 />

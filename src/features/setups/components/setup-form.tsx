@@ -6,6 +6,7 @@ import { spellBare } from '../../../components/setup/spell-bare'
 import { readAssumed } from '../../../components/setup/assumed'
 import { listItems } from '../../../components/setup/items-raw'
 import { findPlan } from '../../../components/setup/find-plan'
+import { useTypedTexts } from '../../../components/setup/use-typed-texts'
 import { toEngineSetup } from '../../../components/setup/to-engine-setup'
 import { Button } from '../../../components/ui/button'
 import { ErrorSummary } from '../../../components/ui/error-summary'
@@ -13,6 +14,7 @@ import { TextField } from '../../../components/ui/text-field'
 import type { Refused } from '../../../components/setup/report-query'
 import { paths } from '../../../config/paths'
 import { usePrinter } from '../../../lib/use-printer'
+import { useKeptAddress } from '../hooks/use-kept-address'
 import { useNamedItems } from '../hooks/use-named-items'
 import type { FormVisit } from '../link/read-form-visit'
 import { aroundParts, chamberPart, sizePart, sumpPart } from '../model/form-sections'
@@ -53,14 +55,15 @@ export function SetupForm({ form, refused, isSent, foundTanks, foundPieces }: Se
   const { system } = printer
   const named = useNamedItems(raw)
   const [sent] = useState<RawSetup>(() => spellBare(raw, printer))
-  const [texts, setTexts] = useState<RawSetup>(sent)
+  const { texts, onType } = useTypedTexts(sent, system)
+  useKeptAddress(sent, texts, system, chambers)
   useFragmentFocus()
   const { plan, isExample } = findPlan(toEngineSetup(visit.setup, named.tank))
   const errors = [...listUnread(visit, plan, system), ...(isSent ? listUnjudged(visit, refused, plan) : [])]
   const places = plan.tank.chambers.map(({ id, name }) => ({ id, name }))
   const typed: FormTexts = {
     texts,
-    onType: (path, text) => setTexts((earlier) => ({ ...earlier, [path]: text })),
+    onType,
     system,
     errors: new Map(
       visit.problems.flatMap(({ path, detail }): [string, string][] =>

@@ -6,7 +6,7 @@ import { paths } from '../../../config/paths'
 import { usePrinter } from '../../../lib/use-printer'
 import { readVisit } from '../link/read-visit'
 import { readSheet, type SheetTexts } from '../link/read-sheet'
-import { spellBareNumbers } from '../link/spell-values'
+import { spellBareNumbers, spellTyped } from '../link/spell-values'
 import { solveSheet, type Solved } from '../model/solve-sheet'
 import { writeExample } from '../model/write-example'
 
@@ -43,7 +43,13 @@ export function useSheet(sheet: Worksheet): Sheet {
     ...readTexts(sheet, search, printer),
     isTyping: false,
     hasTyped: false,
+    typedIn: printer.system,
   }))
+  // Switched to the other system, what was typed keeps its unit; the example is anybody's, and is told anew.
+  if (state.typedIn !== printer.system) {
+    const texts = state.isExample ? writeExample(sheet, printer) : spellTyped(sheet, state.texts, state.typedIn)
+    setState({ ...state, texts, typedIn: printer.system })
+  }
   const shown = useDeferredValue(state.texts)
   const solved = useMemo(() => solveSheet(sheet, shown, printer), [sheet, shown, printer])
   const typedQuery = useMemo(() => {
@@ -54,7 +60,7 @@ export function useSheet(sheet: Worksheet): Sheet {
   // An address that somebody else wrote, such as the browser's way back, brings its own inputs.
   if (state.search !== search) {
     const isOurs = search === (typedQuery === '' ? '?clear=yes' : `?${typedQuery}`)
-    const next = isOurs ? state : { ...readTexts(sheet, search, printer), hasTyped: false }
+    const next = isOurs ? state : { ...state, ...readTexts(sheet, search, printer), hasTyped: false }
     setState({ ...next, search, isTyping: false })
   }
 

@@ -2,7 +2,9 @@ import { findSetupField } from '#shared/kinds/setup-fields'
 import type { FieldAttribute } from '#shared/kinds/types'
 import type { Filled, FilledValue } from '#shared/engine/worksheets/fill-types'
 import type { Worksheet } from '#shared/engine/worksheets/types'
+import { spellUnit } from '#shared/schemas/setup-link-values'
 import type { Printer } from '#shared/units/print'
+import type { UnitSystem } from '#shared/units/systems'
 import { findField, type SheetTexts } from './read-sheet'
 
 export const findAttribute = (sheet: Worksheet, path: string): FieldAttribute | undefined =>
@@ -34,6 +36,16 @@ export function spellBareNumbers(sheet: Worksheet, texts: SheetTexts, printer: P
     Object.entries(texts).map(([path, text]) => {
       const attribute = bareNumber.test(text) ? findAttribute(sheet, path) : undefined
       return [path, attribute?.type === 'measure' ? spell(Number(text), attribute, printer, true) : text]
+    }),
+  )
+}
+
+/** Bare numbers with the unit that they were typed in. */
+export function spellTyped(sheet: Worksheet, texts: SheetTexts, system: UnitSystem): SheetTexts {
+  return Object.fromEntries(
+    Object.entries(texts).map(([path, text]) => {
+      const attribute = findAttribute(sheet, path)
+      return [path, attribute?.type === 'measure' && text.trim() !== '' ? spellUnit(text, attribute, system) : text]
     }),
   )
 }
