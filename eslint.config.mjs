@@ -49,7 +49,7 @@ export default tseslint.config(
   },
   {
     // Loops over typed arrays and their indexes: the index comes from the array itself, and a check would cost the sweep.
-    files: ['shared/engine/{classes,list-answers,ranking,scales,sweep,table}.ts'],
+    files: ['shared/engine/{classes,list-answers,ranking,scales,settle-quantity,sweep,table}.ts'],
     rules: { '@typescript-eslint/no-non-null-assertion': 'off' },
   },
   {

@@ -1,6 +1,7 @@
 import { assessAll, assessItem, judgeAll, type Assessment } from './assess'
 import { addUp } from './budgets'
 import type { Judged } from './judge'
+import { isConcededBy, isOpen } from './concession'
 import { diff, isDemand, type RawKnockOn } from './knock-ons'
 import { checkEssentials } from './needs'
 import type { Candidate } from './rule'
@@ -23,8 +24,8 @@ export interface GonePiece {
   readonly item: Item
   /** By every rule of its kind, in its place. */
   readonly judged: readonly Judged[]
-  /** Rules that it did not simply pass: its replacement is not charged with them. */
-  readonly conceded: ReadonlySet<string>
+  /** The same by rule: what it asked already, its replacement is not charged with. */
+  readonly byRule: ReadonlyMap<string, Judged>
 }
 
 /** The setup a candidate joins: what is left when it takes the place of its kind's pieces, or of the one that is gone. */
@@ -46,22 +47,40 @@ function keepItems(plan: Plan, kind: KindKey, options: Seat): readonly Item[] {
   return plan.items.filter((item) => item.piece.kind !== kind)
 }
 
+/**
+ * What could not be judged only because the kind's pieces were taken out, as it was with them there: a mount is held
+ * against the light that the setup has until another takes its place.
+ */
+function judgeOpenWith(whole: Plan, left: Assessment): Assessment {
+  if (!left.items.some(({ judged }) => judged.some(isOpen))) return left
+  const items = left.items.map((one) => {
+    if (!one.judged.some(isOpen)) return one
+    const before = new Map(assessItem(whole, whole.items, one.item).judged.map((judged) => [judged.rule.id, judged]))
+    const judged = one.judged.map((now) => {
+      const was = before.get(now.rule.id)
+      return isOpen(now) && was && was.outcome !== 'fail' ? was : now
+    })
+    return { ...one, judged }
+  })
+  return { ...left, items }
+}
+
 /** Prepares a setup for judging pieces of one kind. RangeError where the tank has neither size nor volume. */
 export function setBench(setup: Setup, kind: KindKey, options: Seat = {}): Bench {
   const whole = resolve(setup)
   const others = keepItems(whole, kind, options)
   // What makes room stays listed as gone: what was planned tells what the piece has to live up to.
   const left = setup.items.map((item) => (others.includes(item) ? item : { ...item, state: 'gone' as const }))
-  const plan = others.length === whole.items.length ? whole : resolve(withItems(setup, left))
-  return { scene: createScene(plan, others), before: assessAll(plan, others), kind }
+  const isWhole = others.length === whole.items.length
+  const plan = isWhole ? whole : resolve(withItems(setup, left))
+  const before = assessAll(plan, others)
+  return { scene: createScene(plan, others), before: isWhole ? before : judgeOpenWith(whole, before), kind }
 }
 
 const describeGone = (item: Item, judged: readonly Judged[]): GonePiece => ({
   item,
   judged,
-  conceded: new Set(
-    judged.flatMap(({ rule, outcome }) => (outcome === 'change' || outcome === 'fail' ? [rule.id] : [])),
-  ),
+  byRule: new Map(judged.map((one) => [one.rule.id, one])),
 })
 
 function setTankBench(setup: Setup): Bench {
@@ -158,5 +177,6 @@ export function findRestKnockOns(bench: Bench, candidate: Candidate): readonly R
   return findRestChanges(bench, candidate).filter(isDemand)
 }
 
-/** Whether what is gone did not simply pass either. */
-export const isConceded = ({ gone }: Bench, ruleId: string): boolean => gone?.conceded.has(ruleId) ?? false
+/** Whether what is gone asked for all of that already. */
+export const isConceded = ({ gone }: Bench, judged: Judged): boolean =>
+  isConcededBy(gone?.byRule.get(judged.rule.id), judged)

@@ -90,7 +90,7 @@ export function complete(
   rest: readonly RawKnockOn[],
 ): AssessedCandidate {
   const placement = findPlacement(judged)
-  const asked = judged.filter(({ rule }) => !isConceded(bench, rule.id))
+  const asked = judged.filter((one) => !isConceded(bench, one))
   const knockOns = own === 'no' && !isFrame(bench) ? [] : [...listDemands(asked), ...rest]
   const verdict = weighKnockOns(own, rest.filter(isDemand).length)
   return { candidate, judged, verdict, knockOns, ...(placement && { placement }) }

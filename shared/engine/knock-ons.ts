@@ -1,8 +1,10 @@
 import { getKind } from '../kinds/index'
 import type { Printer } from '../units/print'
 import type { Assessment, AssessedItem } from './assess'
+import { isConcededBy, isCovered, isOpen, outcomeOf } from './concession'
 import { describeCondition } from './conditions'
 import type { Judged } from './judge'
+import { lackOf } from './needs'
 import type { Say } from './rule'
 import type { Item, KnockOn, Outcome } from './types'
 
@@ -13,10 +15,26 @@ export interface RawKnockOn extends Omit<KnockOn, 'message'> {
   readonly need?: string
 }
 
-const severity: Readonly<Record<Outcome, number>> = { pass: 0, nodata: 0, change: 1, fail: 2 }
+/** Of no data only what leaves a piece unjudged becomes a knock-on. */
+const severity: Readonly<Record<Outcome, number>> = { pass: 0, change: 1, nodata: 2, fail: 3 }
+
+const weigh = (judged: Judged): number =>
+  outcomeOf(judged) === 'nodata' && !isOpen(judged) ? severity.pass : severity[outcomeOf(judged)]
+
+/** What could not be judged and now needs a change is no worse a verdict, but something to be done. */
+const isWorse = (was: Judged | undefined, now: Judged): boolean =>
+  weigh(now) > (was ? weigh(was) : severity.pass) || (was !== undefined && isOpen(was) && outcomeOf(now) === 'change')
 
 const sayOf = ({ judgement, condition }: Judged): Say =>
   condition ? (words) => `${judgement.say(words)} ${describeCondition(condition())(words)}` : judgement.say
+
+const sayOpen =
+  ({ judgement }: Judged): Say =>
+  (words) =>
+    `can no longer be judged. ${judgement.say(words)}`
+
+const mapByRule = (judged: readonly Judged[]): ReadonlyMap<string, Judged> =>
+  new Map(judged.map((one) => [one.rule.id, one]))
 
 export const nameOf = ({ piece }: Item): string => {
   const { gear, kind } = piece
@@ -46,21 +64,21 @@ export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
  * Checks of a piece that stayed and that got worse. Too few outlets and too much load are every piece's trouble alike:
  * the setup's own need for outlets says the one, the first piece that finds it the other.
  */
-function worsenedKnockOns(before: AssessedItem, after: AssessedItem, said: Set<string>): RawKnockOn[] {
-  const was = new Map(before.judged.map((one) => [one.rule.id, one.outcome]))
+function worsenedKnockOns({ judged }: AssessedItem, after: AssessedItem, said: Set<string>): RawKnockOn[] {
+  const before = mapByRule(judged)
   return after.judged.flatMap((one): RawKnockOn[] => {
-    const from = was.get(one.rule.id) ?? 'pass'
-    if (severity[one.outcome] <= severity[from]) return []
+    const was = before.get(one.rule.id)
+    if (!isWorse(was, one)) return []
     const need = one.judgement.asks?.need
     if (need === 'outlets' || (need === 'circuit' && said.has(need))) return []
     if (need) said.add(need)
-    const say = sayOf(one)
+    const say = isOpen(one) ? sayOpen(one) : sayOf(one)
     return [
       {
         kind: 'check',
         subject: after.item.id,
-        from,
-        to: one.outcome,
+        from: was ? outcomeOf(was) : 'pass',
+        to: outcomeOf(one),
         say: (words) => `${nameOf(after.item)}: ${say(words)}`,
         ...(need !== undefined && { need }),
       },
@@ -92,10 +110,11 @@ export function diff(before: Assessment, after: Assessment): readonly RawKnockOn
         ? replacedKnockOns(was, one)
         : listDemands(one.judged)
   })
-  const met = new Map(before.essentials.map((essential) => [essential.need, essential.isMet]))
+  const known = new Map(before.essentials.map((essential) => [essential.need, essential]))
   const essentials = after.essentials.flatMap((essential): RawKnockOn[] => {
-    const wasMet = met.get(essential.need) ?? true
-    if (wasMet === essential.isMet) return []
+    const was = known.get(essential.need)
+    if (essential.isMet ? (was?.isMet ?? true) : was && !was.isMet && isCovered(lackOf(essential), lackOf(was)))
+      return []
     const kind = essential.isMet ? 'freed' : 'missing'
     const { need, isMet, say, sayMet } = essential
     return [{ kind, subject: need, from: null, to: null, ...(isMet ? { say: sayMet } : { say, need }) }]
@@ -110,9 +129,24 @@ const weight: Readonly<Record<KnockOn['kind'], number>> = { need: 0, check: 1, m
 const rankOf = ({ to }: RawKnockOn): number => (typeof to === 'string' ? severity[to] : 0)
 
 /** A piece in the place of another of its id: only what it asks beyond what that one asked. */
-function replacedKnockOns(before: AssessedItem, after: AssessedItem): readonly RawKnockOn[] {
-  const was = new Map(before.judged.map((one) => [one.rule.id, one.outcome]))
-  return listDemands(after.judged.filter((one) => severity[one.outcome] > severity[was.get(one.rule.id) ?? 'pass']))
+function replacedKnockOns({ judged }: AssessedItem, after: AssessedItem): readonly RawKnockOn[] {
+  const before = mapByRule(judged)
+  const asked = listDemands(after.judged.filter((one) => !isConcededBy(before.get(one.rule.id), one)))
+  const opened = after.judged.flatMap((one): RawKnockOn[] => {
+    const was = before.get(one.rule.id)
+    if (!isOpen(one) || !isWorse(was, one)) return []
+    const say = sayOpen(one)
+    return [
+      {
+        kind: 'check',
+        subject: one.rule.id,
+        from: was ? outcomeOf(was) : 'pass',
+        to: 'nodata',
+        say: (words) => `${nameOf(after.item)}: ${say(words)}`,
+      },
+    ]
+  })
+  return [...asked, ...opened]
 }
 
 /** Knock-ons that ask something to be done, as against what merely moves or is freed. */

@@ -1,5 +1,6 @@
 import type { KindKey } from '../kinds/index'
 import { hasAreas } from './checks/shape'
+import type { Lack } from './concession'
 import { findHeaterNeed } from './heat-budget'
 import { countPlugs } from './mains-budget'
 import { countOf } from './counting'
@@ -17,6 +18,8 @@ export interface Essential {
   readonly unit: CanonicalUnit | null
   readonly metBy: readonly string[]
   readonly isMet: boolean
+  /** How much of it is lacking and what exactly, where part of it may be there. */
+  readonly short?: Omit<Lack, 'need'>
   /** What is missing, in a sentence. */
   readonly say: Say
   /** What was needed and is there. */
@@ -81,6 +84,7 @@ function checkTests(items: readonly Item[]): Essential {
     unit: 'count',
     metBy: kits.map(({ id }) => id),
     isMet: lacking.length === 0,
+    short: { amount: lacking.length, lacks: lacking },
     say: () => `Tests are missing for ${lacking.join(', ')}: without them the cycle cannot be followed.`,
     sayMet: () => 'Ammonia, nitrite and nitrate can be tested.',
   }
@@ -121,11 +125,15 @@ function checkOutlets(plan: Plan, items: readonly Item[]): Essential {
     unit: 'count',
     metBy: strips.map(({ id }) => id),
     isMet: used <= capacity,
+    short: { amount: used - capacity },
     say: () =>
       `${countOf(used, 'plug')} for ${countOf(capacity, 'outlet')}: ${strips.length > 0 ? 'another' : 'a'} power strip is missing.`,
     sayMet: () => `${countOf(used, 'plug')} for ${countOf(capacity, 'outlet')}.`,
   }
 }
+
+/** How much of what a setup cannot do without is lacking. */
+export const lackOf = ({ need, short }: Essential): Lack => ({ need, amount: null, ...short })
 
 /** Every essential of a setup, met or not, in the order in which people buy them. */
 export function checkEssentials(plan: Plan, items: readonly Item[]): readonly Essential[] {

@@ -11,6 +11,8 @@ export interface Ask {
   readonly need: string
   readonly amount: number | null
   readonly unit: CanonicalUnit | null
+  /** What exactly is lacking, where the need can be about different things: the stages, the parameters. */
+  readonly lacks?: readonly string[]
 }
 
 /** What a rule finds before anybody asks for words. Numbers are in the rule's unit. */

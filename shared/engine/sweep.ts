@@ -1,13 +1,14 @@
 import { getKind } from '../kinds/index'
-import { findRestKnockOns, isConceded, type Bench } from './bench'
-import { describeWay, weighKnockOns, type CandidateOptions } from './candidates'
+import { findRestKnockOns, type Bench } from './bench'
+import { weighKnockOns, type CandidateOptions } from './candidates'
 import { getRules } from './checks/index'
 import { classify } from './classes'
 import type { Judged } from './judge'
 import type { Candidate } from './rule'
 import { countDifferences } from './swap/differences'
 import { countExtraPieces } from './swap/meeting-kinds'
-import { codes, isDemand, Table, toCode, wouldSeveralDo } from './table'
+import { settleFewer, settleSeveral, Tables } from './settle-quantity'
+import { codes, toCode, wouldSeveralDo, type Table } from './table'
 import type { Piece, Verdict } from './types'
 
 const verdictOfCode: readonly (Verdict | null)[] = ['fits', 'changes', 'unknown', 'no', null]
@@ -43,37 +44,6 @@ export interface Sweep {
   readonly countFailures: () => readonly { readonly check: string; readonly count: number }[]
 }
 
-/** The tables that were needed, and by number which of them each piece is judged by: at first all by the first. */
-class Tables {
-  readonly all: Table[] = []
-  private readonly numbers = new Map<string, number>()
-  readonly ofPiece: Uint8Array
-
-  constructor(
-    private readonly bench: Bench,
-    private readonly pieces: readonly Piece[],
-    private readonly options: CandidateOptions,
-  ) {
-    this.ofPiece = new Uint8Array(pieces.length)
-  }
-
-  /** The number of the table for so many of each piece. */
-  require(quantity: number, mayMultiply: boolean): number {
-    const key = `${quantity} ${mayMultiply}`
-    let number = this.numbers.get(key)
-    if (number === undefined) {
-      const way = describeWay(this.options, quantity, mayMultiply)
-      number = this.all.push(new Table(this.bench.scene, getRules(this.bench.kind), this.pieces, way)) - 1
-      this.numbers.set(key, number)
-    }
-    return number
-  }
-
-  of(index: number): Table {
-    return this.all[this.ofPiece[index]!]!
-  }
-}
-
 /** Judges every piece by every rule of the bench's kind. See `fit` for what is asked of `pieces`. */
 export function sweep(bench: Bench, pieces: readonly Piece[], options: SweepOptions): Sweep {
   const tables = new Tables(bench, pieces, options)
@@ -87,23 +57,31 @@ export function sweep(bench: Bench, pieces: readonly Piece[], options: SweepOpti
     })
   const own = new Int8Array(pieces.length)
   const demands = new Int32Array(pieces.length)
-  const several = addUp(bench, tables, first, own, demands)
+  const several = addUp(tables, first, own, demands)
+  const restOf = createRest(bench, pieces, first)
   if (options.quantity === undefined) {
-    settleSeveral(bench, tables, several, start, own, demands)
-    if (start > 1 && !countOf) settleFewer(bench, tables, own, demands)
+    const tally = { own, demands }
+    settleSeveral(tables, several, start, tally)
+    if (start > 1 && !countOf) settleFewer(tables, start, tally, (index, table) => restOf(index, table).count)
   }
   if (isLeftOut)
     pieces.forEach((piece, index) => {
       if (isLeftOut(piece)) own[index] = leftOut
     })
   const candidateOf = (index: number): Candidate => ({ piece: pieces[index]!, ...tables.of(index).way })
-  const restNeedsOf = addRestDemands(bench, pieces, own, demands, candidateOf)
+  for (let index = 0; index < pieces.length; index += 1) {
+    if (own[index]! >= codes.fail) continue
+    const { count } = restOf(index, tables.of(index))
+    demands[index]! += count
+    if (weighKnockOns(verdictOfCode[own[index]!]!, count) === 'changes') own[index] = codes.change
+  }
+  const restNeedsOf = (index: number) => (own[index]! >= codes.fail ? [] : restOf(index, tables.of(index)).needs)
   return {
     bench,
     demands,
     candidateOf,
     verdicts: Array.from(own, (code) => verdictOfCode[code]!),
-    extrasOf: bench.gone ? countExtras(bench, tables, restNeedsOf) : () => 0,
+    extrasOf: bench.gone ? countExtras(tables, restNeedsOf) : () => 0,
     targetOf: measureTargets(bench, pieces, tables, candidateOf),
     tableOf: (index) => tables.of(index),
     judgedOf: (index) => tables.of(index).judgedOf(index),
@@ -117,18 +95,19 @@ export function sweep(bench: Bench, pieces: readonly Piece[], options: SweepOpti
 }
 
 /** Fills in each piece's worst code and its changes, rule by rule; answers the pieces of which several would do. */
-function addUp(bench: Bench, tables: Tables, first: Table, own: Int8Array, demands: Int32Array): readonly number[] {
+function addUp(tables: Tables, first: Table, own: Int8Array, demands: Int32Array): readonly number[] {
   const several = new Uint8Array(own.length)
   const isUniform = tables.all.length === 1
   first.columns.forEach((column, at) => {
-    const demand = isConceded(bench, column.rule.id) ? 0 : 1
     for (let index = 0; index < own.length; index += 1) {
-      const coded = (isUniform ? column : tables.of(index).columns[at]!).codeOf(index)
+      const asked = isUniform ? column : tables.of(index).columns[at]!
+      const coded = asked.codeOf(index)
       const code = toCode(coded)
       if (code > own[index]!) own[index] = code
-      if (isDemand(coded)) demands[index]! += demand
-      // Of what is gone more would have been better too: its replacement takes its place one for one.
-      if (wouldSeveralDo(coded) && demand === 1) several[index] = 1
+      if (!asked.isCharged(index)) continue
+      demands[index]! += 1
+      // Where of what is gone more would have been better too, its replacement takes its place one for one.
+      if (wouldSeveralDo(coded)) several[index] = 1
     }
   })
   const found: number[] = []
@@ -136,42 +115,6 @@ function addUp(bench: Bench, tables: Tables, first: Table, own: Int8Array, deman
     if (would === 1 && own[index] !== codes.fail) found.push(index)
   })
   return found
-}
-
-function settleOn(bench: Bench, tables: Tables, index: number, number: number, own: Int8Array, demands: Int32Array) {
-  tables.ofPiece[index] = number
-  const table = tables.all[number]!
-  own[index] = table.codeOf(index)
-  demands[index] = table.countDemands(index, (ruleId) => isConceded(bench, ruleId))
-}
-
-/** Judges so many of a piece as would do; if that fails elsewhere (no room), one of it without that way out. */
-function settleSeveral(
-  bench: Bench,
-  tables: Tables,
-  several: readonly number[],
-  start: number,
-  own: Int8Array,
-  demands: Int32Array,
-): void {
-  for (const index of several) {
-    const enough = tables.of(index).findEnough(index) ?? start
-    let number = tables.require(enough, true)
-    if (tables.all[number]!.codeOf(index) === codes.fail) number = tables.require(start, false)
-    settleOn(bench, tables, index, number, own, demands)
-  }
-}
-
-/** One of a piece where so many as there were do not fit: one strong heater in place of two weak ones. */
-function settleFewer(bench: Bench, tables: Tables, own: Int8Array, demands: Int32Array): void {
-  const failed = [...own.keys()].filter((index) => own[index] === codes.fail)
-  if (failed.length === 0) return
-  const single = tables.require(1, true)
-  const table = tables.all[single]!
-  const better = failed.filter((index) => table.codeOf(index) !== codes.fail)
-  for (const index of better) settleOn(bench, tables, index, single, own, demands)
-  const several = better.filter((index) => table.findEnough(index) !== undefined)
-  settleSeveral(bench, tables, several, 1, own, demands)
 }
 
 function countFailures(tables: Tables, first: Table, own: Int8Array) {
@@ -186,51 +129,43 @@ function countFailures(tables: Tables, first: Table, own: Int8Array) {
     .sort((a, b) => b.count - a.count)
 }
 
+interface Rest {
+  readonly count: number
+  readonly needs: readonly string[]
+}
+
+const nothing: Rest = { count: 0, needs: [] }
+
 /**
- * Adds what each piece makes the rest of the setup ask, found once per class of pieces that the rest cannot tell apart;
- * answers the needs among that.
+ * What a piece makes the rest of the setup ask, and the needs among that: found once per class of pieces that the rest
+ * cannot tell apart.
  */
-function addRestDemands(
-  bench: Bench,
-  pieces: readonly Piece[],
-  own: Int8Array,
-  demands: Int32Array,
-  candidateOf: (index: number) => Candidate,
-): (index: number) => readonly string[] {
-  if (bench.scene.others.length === 0 && !bench.gone) return () => []
+function createRest(bench: Bench, pieces: readonly Piece[], { way }: Table): (index: number, table: Table) => Rest {
+  if (bench.scene.others.length === 0 && !bench.gone) return () => nothing
   const { feltThrough } = getRules(bench.kind)
   const all = getKind(bench.kind).attributes.map(({ key }) => key)
   // A piece that was told where to stand takes room from what else stands there.
-  const isPlaced = pieces.length > 0 && candidateOf(0).place !== undefined
+  const isPlaced = way.place !== undefined
   const felt = feltThrough && isPlaced ? [...new Set([...feltThrough, ...sizeKeys])] : (feltThrough ?? all)
   const classes = classify(pieces, `${bench.kind} felt${isPlaced ? ' in place' : ''}`, felt)
-  const known = new Map<string, { readonly count: number; readonly needs: readonly string[] }>()
-  const keyOf = (index: number, { quantity }: Candidate) => `${classes.ofPiece[index]!} ${quantity}`
-  for (let index = 0; index < pieces.length; index += 1) {
-    if (own[index]! >= codes.fail) continue
-    const candidate = candidateOf(index)
-    const key = keyOf(index, candidate)
-    let felt = known.get(key)
-    if (felt === undefined) {
-      const found = findRestKnockOns(bench, candidate)
-      known.set(key, (felt = { count: found.length, needs: found.flatMap(({ need }) => need ?? []) }))
+  const known = new Map<string, Rest>()
+  return (index, table) => {
+    const key = `${classes.ofPiece[index]!} ${table.way.quantity}`
+    let rest = known.get(key)
+    if (rest === undefined) {
+      const found = findRestKnockOns(bench, { piece: pieces[index]!, ...table.way })
+      known.set(key, (rest = { count: found.length, needs: found.flatMap(({ need }) => need ?? []) }))
     }
-    demands[index]! += felt.count
-    if (weighKnockOns(verdictOfCode[own[index]!]!, felt.count) === 'changes') own[index] = codes.change
+    return rest
   }
-  return (index) => known.get(keyOf(index, candidateOf(index)))?.needs ?? []
 }
 
 /** What the pieces' own checks ask for, which what is gone did not, and what they make the rest ask for. */
-function countExtras(
-  bench: Bench,
-  tables: Tables,
-  restNeedsOf: (index: number) => readonly string[],
-): (index: number) => number {
+function countExtras(tables: Tables, restNeedsOf: (index: number) => readonly string[]): (index: number) => number {
   return (index) => {
     const needs = tables
       .of(index)
-      .columns.filter((column) => toCode(column.codeOf(index)) === codes.change && !isConceded(bench, column.rule.id))
+      .columns.filter((column) => toCode(column.codeOf(index)) === codes.change && column.isCharged(index))
       .flatMap((column) => column.judgementOf(index)?.judgement.asks?.need ?? [])
     return countExtraPieces(new Set([...needs, ...restNeedsOf(index)]))
   }

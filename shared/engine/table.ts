@@ -1,4 +1,5 @@
 import { classifyForRule, type Classes } from './classes'
+import { isConcededBy } from './concession'
 import { judge, type Judged } from './judge'
 import type { Glance, KindRules, Rule, Way } from './rule'
 import type { Scene } from './scene'
@@ -40,6 +41,7 @@ export class Column {
   readonly classes: Classes
   private readonly coded: Int8Array
   private readonly judged = new Map<number, Judged | null>()
+  private readonly conceded = new Map<number, boolean>()
   private readonly close = new Map<number, boolean>()
   private readonly missing = new Map<number, readonly string[]>()
 
@@ -48,6 +50,8 @@ export class Column {
     private readonly scene: Scene,
     private readonly pieces: readonly Piece[],
     private readonly way: Way,
+    /** How what is gone was judged by the rule. */
+    private readonly was: Judged | undefined,
   ) {
     this.classes = classifyForRule(pieces, rule)
     this.coded = new Int8Array(this.classes.first.length).fill(notAsked)
@@ -89,6 +93,23 @@ export class Column {
     return missing
   }
 
+  /** A change, or for all that is known one, that what is gone did not ask for. */
+  isCharged(index: number): boolean {
+    const coded = this.codeOf(index)
+    return isDemand(coded) && !(toCode(coded) === codes.change && this.isConceded(index))
+  }
+
+  private isConceded(index: number): boolean {
+    if (!this.was) return false
+    const id = this.classes.ofPiece[index]!
+    let isConceded = this.conceded.get(id)
+    if (isConceded === undefined) {
+      const judged = this.judgementOf(index)
+      this.conceded.set(id, (isConceded = judged !== null && isConcededBy(this.was, judged)))
+    }
+    return isConceded
+  }
+
   isCloseCall(index: number): boolean {
     const id = this.classes.ofPiece[index]!
     let isClose = this.close.get(id)
@@ -114,8 +135,9 @@ export class Table {
     { rules }: KindRules,
     pieces: readonly Piece[],
     readonly way: Way,
+    byRule?: ReadonlyMap<string, Judged>,
   ) {
-    this.columns = rules.map((rule) => new Column(rule, scene, pieces, way))
+    this.columns = rules.map((rule) => new Column(rule, scene, pieces, way, byRule?.get(rule.id)))
   }
 
   judgedOf(index: number): readonly Judged[] {
@@ -128,9 +150,9 @@ export class Table {
     return worst
   }
 
-  countDemands(index: number, isConceded: (ruleId: string) => boolean): number {
+  countDemands(index: number): number {
     let count = 0
-    for (const column of this.columns) if (isDemand(column.codeOf(index)) && !isConceded(column.rule.id)) count += 1
+    for (const column of this.columns) if (column.isCharged(index)) count += 1
     return count
   }
 

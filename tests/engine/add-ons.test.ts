@@ -2,7 +2,14 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { setSwapBench } from '#shared/engine/bench'
 import { countPieces, findOptions, type Extras } from '#shared/engine/swap/add-ons'
-import { assessOutfit, changeItems, createOutfit, findNew, type Outfit, type State } from '#shared/engine/swap/outfit'
+import {
+  assessOutfit,
+  changeItems,
+  createOutfit,
+  findUnasked,
+  type Outfit,
+  type State,
+} from '#shared/engine/swap/outfit'
 import type { Item, Piece } from '#shared/engine/types'
 import { heater, item, piece, wholeSetup } from './build'
 import { catalogueOf } from './demo-catalogue'
@@ -30,7 +37,7 @@ function isComplete(outfit: Outfit, state: State, extras: Extras): boolean {
   const after = assessOutfit(changeItems(outfit, [...outfit.items, ...extras]))
   return (
     after.unmet.every((one) => one.need !== need) &&
-    findNew(after.unmet, state.unmet).length === 0 &&
+    findUnasked(after.unmet, state.unmet).length === 0 &&
     [...after.failing].every((id) => state.failing.has(id))
   )
 }

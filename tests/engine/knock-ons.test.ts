@@ -1,10 +1,12 @@
 import { describe, expect, it } from 'vitest'
 import { assess } from '#shared/engine/assess'
-import { fitCheck } from '#shared/engine/fit'
+import { fit, fitCheck } from '#shared/engine/fit'
 import { diff } from '#shared/engine/knock-ons'
 import { report } from '#shared/engine/report'
-import type { Setup } from '#shared/engine/types'
-import { heater, item, piece, wholeSetup } from './build'
+import { replacements } from '#shared/engine/swap/replacements'
+import type { KnockOn, Setup } from '#shared/engine/types'
+import { heater, item, piece, tankValues, toPlain, wholeSetup } from './build'
+import { catalogueOf } from './demo-catalogue'
 
 type Values = Readonly<Record<string, unknown>>
 
@@ -67,6 +69,102 @@ describe('the knock-ons of a candidate', () => {
       heater({ lengthMm: 500, thermostat: 'external-needed' }),
     )
     expect(answer).toMatchObject({ verdict: 'no', knockOns: [] })
+  })
+})
+
+describe('what could be judged and no longer can', () => {
+  const mount = (values: Values = {}) =>
+    piece('light-mount', { type: 'arm', maxLoadKg: 3, rimMinMm: 5, rimMaxMm: 15, ...values })
+  const light = (values: Values = {}, slug?: string) =>
+    piece(
+      'light',
+      {
+        powerW: 60,
+        plugs: 1,
+        volts: [120],
+        plugType: 'A/B',
+        massKg: 2,
+        mountsIncluded: [],
+        mountsPossible: ['arm'],
+        ...values,
+      },
+      slug,
+    )
+  const unit = (values: Values = {}, slug?: string) =>
+    piece(
+      'ro-unit',
+      {
+        stages: ['sediment', 'carbon', 'membrane', 'deionisation'],
+        membraneLpd: 280,
+        testPressureKPa: 350,
+        testTempC: 25,
+        testTdsPpm: 250,
+        minFeedKPa: 280,
+        wasteRatio: 3,
+        boosterIncluded: false,
+        ...values,
+      },
+      slug,
+    )
+  const booster = piece('booster-pump', {
+    inletMinKPa: 70,
+    outletKPa: 550,
+    maxLpd: 1500,
+    powerW: 28,
+    plugs: 1,
+    volts: [120],
+    plugType: 'A/B',
+  })
+  const lost = (knockOns: readonly KnockOn[]) => knockOns.filter(({ to }) => to === 'nodata')
+  const others = (setup: Setup) => report(setup).items.map(({ id, verdict }) => [id, verdict])
+
+  it('is told of a tank of a shape whose areas are not computed', () => {
+    const setup = setupWith(4, item('heater', heater()))
+    const bowed = piece('tank', { ...tankValues, shape: 'bow-front', includedPump: {}, nominalVolumeL: 84 })
+    const answer = fitCheck(setup, bowed)
+    expect(others({ ...setup, tank: { specs: bowed.specs } })).toEqual([['heater', 'unknown']])
+    expect(answer.verdict).toBe('changes')
+    const [first] = lost(answer.knockOns)
+    expect(first).toMatchObject({ kind: 'check', subject: 'heater', from: 'pass' })
+    expect(toPlain(first?.message)).toContain('can no longer be judged. Areas and volumes of a bow front tank')
+  })
+
+  it('is told of a light of unknown mass over a mount, swapped or fitted', () => {
+    const setup = setupWith(4, item('mount', mount()), item('light', light()))
+    const heavy = light({ massKg: undefined }, 'unweighed')
+    const swapped = replacements(setup, 'light', catalogueOf(heavy), { limit: 1, offset: 0 })!.answers[0]!
+    for (const { verdict, knockOns } of [swapped, fitCheck(setup, heavy)]) {
+      expect(verdict).not.toBe('fits')
+      expect(lost(knockOns).map(tell)).toEqual([['check', 'mount', 'pass', 'nodata']])
+      expect(lost(knockOns)[0]?.message).toContain('Nobody has recorded what the light weighs.')
+    }
+  })
+
+  it('is told of an RO/DI unit beside a booster pump that is chosen by its numbers, swapped or fitted', () => {
+    const setup = setupWith(4, item('booster', booster), item('unit', unit()))
+    expect(others(setup)).toEqual([
+      ['booster', 'fits'],
+      ['unit', 'fits'],
+    ])
+    const silent = unit({ minFeedKPa: undefined }, 'silent')
+    const swapped = replacements(setup, 'unit', catalogueOf(silent), { limit: 1, offset: 0 })!
+    expect(swapped.counts).toMatchObject({ fits: 0, changes: 1 })
+    for (const { verdict, knockOns } of [swapped.answers[0]!, fitCheck(setup, silent)]) {
+      expect(verdict).toBe('changes')
+      expect(lost(knockOns).map(tell)).toEqual([['check', 'booster', 'pass', 'nodata']])
+    }
+    expect(fit(setup, 'ro-unit', [silent], { limit: 1, offset: 0 }).counts).toMatchObject({ fits: 0, changes: 1 })
+  })
+
+  it('is not charged to what comes where it could not be judged before', () => {
+    const setup = setupWith(4, item('booster', booster))
+    expect(lost(fitCheck(setup, unit({ minFeedKPa: undefined })).knockOns)).toEqual([])
+  })
+
+  it('is told of a piece in the place of another in a setup', () => {
+    const setup = (what: Values) => setupWith(4, item('heater', heater(what)))
+    const found = diff(assess(setup({})), assess(setup({ volts: undefined })))
+    expect(found.map(tell)).toContainEqual(['check', 'heater.mains', 'pass', 'nodata'])
   })
 })
 

@@ -62,7 +62,7 @@ function judgeMains({ plan }: Scene, { piece }: Candidate): Judgement {
     return {
       outcome: 'change',
       measured: volts.map(String),
-      asks: { need: 'plug-adaptor', amount: null, unit: null },
+      asks: { need: 'plug-adaptor', amount: null, unit: null, lacks: [plugType] },
       say: () => {
         const plug = plugType === 'other' ? 'a plug of another type' : `a type ${plugType} plug`
         const other = mains.plugType === 'other' ? 'of another type' : mains.plugType

@@ -34,7 +34,9 @@ function judgeCoverage(scene: Scene, { piece }: Candidate): Judgement {
   return {
     outcome: missing.length > 0 ? 'change' : 'pass',
     measured: own,
-    ...(missing.length > 0 && { asks: { need: 'cycle-tests', amount: missing.length, unit: 'count' as const } }),
+    ...(missing.length > 0 && {
+      asks: { need: 'cycle-tests', amount: missing.length, unit: 'count' as const, lacks: missing },
+    }),
     cautions: unknown > 0 ? [sayUncounted(unknown, 'parameters')] : [],
     say: () => {
       const measures = own.length > 0 ? `Measures ${nameParameters(own)}` : 'Measures nothing that is asked for'

@@ -7,7 +7,18 @@ import { readSet } from '../values'
 import { decideVerdict } from '../verdict'
 import type { KindKey } from '../../kinds/index'
 import { listMeetingKinds } from './meeting-kinds'
-import { assessOutfit, changeItems, findNew, listAsked, meets, type Outfit, type State, type Unmet } from './outfit'
+import {
+  assessOutfit,
+  changeItems,
+  findUnasked,
+  isWorseOff,
+  listAsked,
+  listStill,
+  meets,
+  type Outfit,
+  type State,
+  type Unmet,
+} from './outfit'
 
 export type Catalogue = Readonly<Record<KindKey, readonly Piece[]>>
 
@@ -37,7 +48,7 @@ function tryPiece(outfit: Outfit, state: State, asked: readonly Unmet[], extra: 
   const judged = judgeAll(createScene(outfit.plan, outfit.items), extra)
   const verdict = decideVerdict(judged)
   if (verdict === 'no' || verdict === 'unknown') return undefined
-  const asks = findNew(listAsked(extra, judged), state.unmet).map(({ need }) => need)
+  const asks = findUnasked(listAsked(extra, judged), state.unmet).map(({ need }) => need)
   return { extra, asks, changes: judged.filter(({ outcome }) => outcome === 'change').length }
 }
 
@@ -47,8 +58,8 @@ const bySlug = (a: Item, b: Item): number => (slugOf(a) < slugOf(b) ? -1 : slugO
 /** Whether with the extras nothing is asked for, and nothing fails, that was not before. */
 function findLeft(outfit: Outfit, state: State, extras: Extras): readonly Unmet[] | null {
   const after = assessOutfit(changeItems(outfit, [...outfit.items, ...extras]))
-  if ([...after.failing].some((id) => !state.failing.has(id))) return null
-  return findNew(after.unmet, state.unmet)
+  if (isWorseOff(after, state)) return null
+  return findUnasked(after.unmet, state.unmet)
 }
 
 /** Search for what meets one need in an outfit. */
@@ -161,7 +172,7 @@ function meetAll(outfit: Outfit, needs: readonly Unmet[], catalogue: Catalogue, 
   const furnished = changeItems(outfit, [...outfit.items, ...best])
   const others = needs.filter(({ need }) => need !== first.need)
   const still = assessOutfit(furnished).unmet
-  const left = others.filter((one) => findNew([one], still).length === 0)
+  const left = listStill(others, still)
   const more = meetAll(furnished, left, catalogue, step + 1)
   return more && [...best, ...more]
 }

@@ -4,11 +4,11 @@ import { nameOf, type RawKnockOn } from '../knock-ons'
 import { createScene } from '../scene'
 import type { Item } from '../types'
 import { isHelperKind } from './meeting-kinds'
-import { assessOutfit, changeItems, describeState, findNew, type Outfit, type State } from './outfit'
+import { assessOutfit, changeItems, describeState, findNew, isWorseOff, type Outfit, type State } from './outfit'
 
-/** Whether something would be asked for, or fail, that is not in `state`. */
+/** Whether something would be asked for, or fail or stay unjudged, that is not so in the other state. */
 const isWorse = (state: State, than: State): boolean =>
-  findNew(state.unmet, than.unmet).length > 0 || [...state.failing].some((id) => !than.failing.has(id))
+  findNew(state.unmet, than.unmet).length > 0 || isWorseOff(state, than)
 
 /** The setup as it was, what is gone still there, without one of its items. */
 function assessWithout({ before, kind, gone }: Bench, item: Item): State {

@@ -2,8 +2,10 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { assess } from '#shared/engine/assess'
 import { diff } from '#shared/engine/knock-ons'
+import { report } from '#shared/engine/report'
+import type { Catalogue } from '#shared/engine/swap/add-ons'
 import { replacements } from '#shared/engine/swap/replacements'
-import type { Piece, Setup } from '#shared/engine/types'
+import type { Item, Piece, Setup } from '#shared/engine/types'
 import { kindKeys, type KindKey } from '#shared/kinds/index'
 import { anySetup } from '../arbitraries'
 import { heater, item, piece, wholeSetup } from '../build'
@@ -47,6 +49,111 @@ describe('a piece swapped for itself', () => {
         }),
         { numRuns: 12 },
       )
+    },
+    patienceMs,
+  )
+})
+
+const severity = ['fits', 'changes', 'unknown', 'no'] as const
+
+/** Items other than the candidate that a report finds worse off than another did. */
+function findWorse(before: Setup, after: Setup, id: string): readonly unknown[] {
+  const was = new Map(report(before).items.map((one) => [one.id, one.verdict]))
+  return report(after).items.flatMap((one) => {
+    const from = was.get(one.id)
+    if (one.id === id || from === undefined || severity.indexOf(one.verdict) <= severity.indexOf(from)) return []
+    return [[one.id, one.kind, from, one.verdict]]
+  })
+}
+
+/** The setup with an answer's piece where the gone one, or the tank, was. */
+function takePlace(setup: Setup, id: string, candidate: Piece, quantity: number): Setup {
+  if (id === 'tank')
+    return { ...setup, tank: { specs: candidate.specs, ...(candidate.gear && { gear: candidate.gear }) } }
+  const put = (one: Item): Item => (one.id === id ? { ...one, piece: candidate, quantity, state: 'planned' } : one)
+  return { ...setup, items: setup.items.map(put) }
+}
+
+const present = (setup: Setup): Setup => ({
+  ...setup,
+  items: setup.items.map((one): Item => (one.id === 'gone' ? { ...one, state: 'have' } : one)),
+})
+
+/** Answers that fit and leave something else worse off. */
+function findSilent(setup: Setup, id: string, catalogue: Catalogue, kind: KindKey) {
+  const { answers } = replacements(setup, id, catalogue, { ...page, verdict: 'fits' })!
+  const before = present(setup)
+  const silent = answers.flatMap(({ gear, pieces }) => {
+    const candidate = catalogue[kind].find((one) => one.gear?.slug === gear?.slug)
+    if (!candidate || pieces.length > 1) return []
+    const worse = findWorse(before, takePlace(before, id, candidate, pieces[0]?.quantity ?? 1), id)
+    return worse.length > 0 ? [[gear?.slug, worse]] : []
+  })
+  return { silent, fitting: answers.length }
+}
+
+/** A setup with a piece of every kind that others are judged with. */
+const crowded = wholeSetup(
+  { rim: 'framed' },
+  {
+    items: (
+      [
+        'light',
+        'light-mount',
+        'ro-unit',
+        'booster-pump',
+        'heater',
+        'temperature-controller',
+        'power-strip',
+        'wavemaker',
+        'stand',
+        'sand',
+        'scraper',
+        'light-controller',
+      ] as const
+    ).map((kind) => item(kind, demoCatalogue[kind][0]!)),
+  },
+)
+
+/** The pieces of a catalogue with now one, now another of their numbers not recorded. */
+const withGaps = (pieces: readonly Piece[]): readonly Piece[] =>
+  pieces.flatMap((one, at) => {
+    const keys = Object.keys(one.specs)
+    const lost = keys[at % Math.max(1, keys.length)]
+    const specs = Object.fromEntries(Object.entries(one.specs).filter(([key]) => key !== lost))
+    const gear = { brand: 'Inventmark', model: `gap ${at}`, slug: `gap-${at}` }
+    return [one, { ...one, specs, gear }]
+  })
+
+describe('an answer that fits', () => {
+  const kinds = ['tank', ...new Set(crowded.items.map(({ piece: { kind } }) => kind))] as const
+
+  it.each(kinds)(
+    'leaves no other piece of a full setup worse off: %s',
+    (kind) => {
+      const catalogue = { ...demoCatalogue, [kind]: withGaps(demoCatalogue[kind]) }
+      const items = crowded.items.map((one): Item => (one.id === kind ? { ...one, id: 'gone', state: 'gone' } : one))
+      expect(findSilent({ ...crowded, items }, kind === 'tank' ? 'tank' : 'gone', catalogue, kind).silent).toEqual([])
+    },
+    patienceMs,
+  )
+
+  it(
+    'leaves no other piece worse off, whatever else is in the setup',
+    () => {
+      let fitting = 0
+      const kindsFelt = ['heater', 'temperature-controller', 'power-strip', 'wavemaker', 'return-pump'] as const
+      fc.assert(
+        fc.property(anySetup, fc.constantFrom(...kindsFelt), fc.nat(), (setup, kind, at) => {
+          const pieces = demoCatalogue[kind]
+          const items = [...setup.items, item('gone', pieces[at % pieces.length]!, { state: 'gone' })]
+          const found = findSilent({ ...setup, items }, 'gone', { ...demoCatalogue, [kind]: withGaps(pieces) }, kind)
+          expect(found.silent).toEqual([])
+          fitting += found.fitting
+        }),
+        { numRuns: 40 },
+      )
+      expect(fitting).toBeGreaterThan(20)
     },
     patienceMs,
   )
