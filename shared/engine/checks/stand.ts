@@ -27,9 +27,27 @@ function judgeFootprint(scene: Scene, { piece }: Candidate): Judgement {
   return { ...found, cautions: [...(found.cautions ?? []), ...level] }
 }
 
+const loadUses: readonly string[] = [
+  'goals.rockKg',
+  'goals.sandDepthMm',
+  'tank.waterLineMm',
+  'tank.outerHeightMm',
+  'tank.bottomMm',
+  'tank.material',
+  ...displayUses,
+  'goals.salinityPpt',
+  'goals.temperatureC',
+]
+
+/** A stand that is too weak is not made strong by filling the tank less: nobody can be relied on to. */
+const restsOfOverload = (): readonly string[] => loadUses.filter((path) => path !== 'tank.waterLineMm')
+
 /** The filled weight follows from areas; a stand that is made for this very tank holds it whatever it weighs. */
 function judgeLoad({ plan }: Scene, { piece }: Candidate): Judgement {
-  if (hasAreas(plan)) return rateStand(piece.specs, plan, ['loadRatingKg'])
+  if (hasAreas(plan)) {
+    const rated = rateStand(piece.specs, plan, ['loadRatingKg'])
+    return rated.outcome === 'fail' ? { ...rated, rests: restsOfOverload } : rated
+  }
   if (!isMadeForTank(piece.specs, plan)) return noAreas(plan)
   return { outcome: 'pass', say: () => 'The stand is made for this tank.' }
 }
@@ -58,17 +76,7 @@ export const standRules: KindRules = {
       basis: massBasis,
       rule: 'Its rating is at least the filled weight of the tank: shell, water, rock and sand. Without a rating, what its maker says it is made for; else nobody can tell.',
       reads: ['loadRatingKg', 'madeForTanks', 'madeForVolumeL'],
-      uses: [
-        'goals.rockKg',
-        'goals.sandDepthMm',
-        'tank.waterLineMm',
-        'tank.outerHeightMm',
-        'tank.bottomMm',
-        'tank.material',
-        ...displayUses,
-        'goals.salinityPpt',
-        'goals.temperatureC',
-      ],
+      uses: loadUses,
       failLabel: 'rated for less weight',
       judge: judgeLoad,
     }),

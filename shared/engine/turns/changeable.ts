@@ -16,9 +16,8 @@ export interface Changeable {
   readonly path: string
   /** The only way that makes sense, where not both do: nobody cools a room to need a stronger heater. */
   readonly only?: 'more' | 'less'
-  /** Of the tank and what it stands on: changed for room alone, and for weight where that is said. */
+  /** Of the tank and what it stands on: changed for room alone: a tank is not filled less for a weak stand. */
   readonly isBuilt?: true
-  readonly bearsOnWeight?: true
   /** What animals live in: never said further than they are usually kept. */
   readonly isLivedIn?: true
   /** Counted from what it is ("12 mm longer") rather than named itself ("at least 20 °C"). */
@@ -84,7 +83,7 @@ export const changeables: readonly Changeable[] = [
   sized('tank.outerHeightMm', tank, up),
   sized('tank.displayLengthMm', display, along),
   sized('tank.displayWidthMm', display, across),
-  sized('tank.waterLineMm', () => 'the water line', up, { isBuilt: true, bearsOnWeight: true }),
+  sized('tank.waterLineMm', () => 'the water line', up),
   sized('tank.sump.lengthMm', sump, along),
   sized('tank.sump.widthMm', sump, across),
   sized('tank.sump.waterDepthMm', () => 'the water in the sump', down),

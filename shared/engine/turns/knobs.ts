@@ -38,8 +38,7 @@ const isUsed = ({ uses }: Rule, { path }: Changeable): boolean =>
 const measuresLength = ({ unit }: Rule): boolean => unit !== null && units[unit].quantity === 'length'
 
 /** Whether somebody would change this to keep that check: nobody builds another tank to need a weaker heater. */
-const isSensible = (rule: Rule, { isBuilt, bearsOnWeight }: Changeable): boolean =>
-  !isBuilt || measuresLength(rule) || (bearsOnWeight === true && rule.unit === 'kg')
+const isSensible = (rule: Rule, { isBuilt }: Changeable): boolean => !isBuilt || measuresLength(rule)
 
 /** What carries the tank is a limit by itself; no rule has to assume it. */
 const isLimit = ({ judgement: { limit } }: Judged, value: number | undefined): boolean =>

@@ -78,6 +78,17 @@ describe('the load of a stand', () => {
     expect(outcome({ loadRatingKg: weight - 0.01 })).toBe('fail')
   })
 
+  it('is not talked down by filling the tank less, where only the water line was assumed', () => {
+    // 762 × 304.8 × 317.5 mm of glass weighs some 92 kg as usually filled; a stand for 72 kg would hold it two thirds full.
+    const sizes = { outerLengthMm: 762, outerWidthMm: 304.8, outerHeightMm: 317.5 }
+    const bare: Setup = { units: 'metric', tank: { specs: toSpecs(sizes, 'measured') }, items: [] }
+    const weak = stand({ topLengthMm: 800, topWidthMm: 320, loadRatingKg: 72 })
+    const { verdict, checks, turnsBy } = fitCheck(bare, weak)
+    expect(verdict).toBe('no')
+    expect(checks.find(({ id }) => id === 'stand.load')?.outcome).toBe('fail')
+    expect(turnsBy?.path).not.toBe('tank.waterLineMm')
+  })
+
   it('is without a rating what its maker makes it for, as a caution', () => {
     const enough = stand({ loadRatingKg: undefined, madeForVolumeL: weight / 1.4 + 0.01 })
     expect(judgeOutcome(setup(), enough, 'stand.load')).toBe('pass')

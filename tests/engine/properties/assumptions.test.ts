@@ -27,6 +27,9 @@ function listUsual(path: string): readonly (number | string)[] {
 /** Rock and sand count for the water only once both are said, so that saying them is a change of its own. */
 const isFilling = (path: string) => path === 'goals.rockKg' || path === 'goals.sandDepthMm'
 
+/** A stand that is too weak for the tank as it is usually filled is refused, however little water somebody might mean. */
+const isOverload = (ruleId: string, path: string) => ruleId === 'stand.load' && path === 'tank.waterLineMm'
+
 const sceneOf = (setup: Setup, others: Scene['others']) => createScene(resolve(setup), others)
 
 /** These judge many setups over. */
@@ -50,7 +53,9 @@ function listCondemned(setup: Setup, piece: Piece, valuesOf: (path: string) => r
       if (findContradictions(said).length > 0) return []
       const varied = sceneOf(said, others)
       return failing.flatMap((rule) =>
-        rule.judge(varied, candidate)?.outcome === 'pass' ? [`${rule.id} with ${path} ${value}`] : [],
+        !isOverload(rule.id, path) && rule.judge(varied, candidate)?.outcome === 'pass'
+          ? [`${rule.id} with ${path} ${value}`]
+          : [],
       )
     }),
   )
