@@ -93,7 +93,8 @@ export const changeables: readonly Changeable[] = [
   sized('goals.sandDepthMm', () => 'the sand', down, {}),
   stated('room.coldestC', (amount) => `the room never fell below ${amount}`, 'C', 'more'),
   stated('room.warmestC', (amount) => `the room never rose above ${amount}`, 'C', 'less'),
-  { ...stated('goals.temperatureC', (amount) => `the water were kept at ${amount}`, 'C'), isLivedIn: true },
+  // Cooler water asks less of a heater; nobody warms it up because one is too strong.
+  { ...stated('goals.temperatureC', (amount) => `the water were kept at ${amount}`, 'C', 'less'), isLivedIn: true },
   stated('goals.rockKg', (amount, isMore) => `there were ${least(isMore)} ${amount} of rock`, 'kg'),
   stated('goals.turnoverPerHour.0', (amount) => `a turnover of ${amount} were enough`, '/h', 'less'),
   stated('goals.turnoverPerHour.1', (amount) => `a turnover of up to ${amount} were wanted`, '/h', 'more'),

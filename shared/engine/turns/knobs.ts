@@ -80,6 +80,9 @@ const giveSpec = (setup: Setup, id: string, key: string, value: number): Setup =
   }),
 })
 
+/** What a piece measures and weighs is the piece itself: saying it otherwise names nothing to look for. */
+const isOfBody = ({ key, unit }: MeasureAttribute): boolean => units[unit].quantity === 'length' || key === 'massKg'
+
 /** A number of another piece that is the very limit which is broken: the stand's rating, the pressure the RO/DI unit needs. */
 function listItemKnobs({ others }: Scene, failing: readonly Judged[]): readonly Knob[] {
   return others.flatMap((item: Item) =>
@@ -87,6 +90,7 @@ function listItemKnobs({ others }: Scene, failing: readonly Judged[]): readonly 
       const attribute = getAttribute(item.piece.kind, own.key)
       const from = readNumber(item.piece.specs, own.key)
       if (attribute?.type !== 'measure' || attribute.role !== 'check' || from === undefined) return []
+      if (isOfBody(attribute)) return []
       if (!failing.every((one) => one.rule.unit === attribute.unit && isLimit(one, from))) return []
       const name = `the ${getKind(item.piece.kind).label}’s ${attribute.label}`
       return [

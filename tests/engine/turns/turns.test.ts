@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { fit, fitCheck } from '#shared/engine/fit'
 import { giveValue } from '#shared/engine/setup/give'
 import type { Piece, Setup } from '#shared/engine/types'
-import { heater, item, piece, toPlain, wholeSetup } from '../build'
+import { checkOf, heater, item, piece, toPlain, wholeSetup } from '../build'
 
 const turnOf = (setup: Setup, what: Piece) => fitCheck(setup, what).turnsBy
 const sayTurn = (setup: Setup, what: Piece) => toPlain(turnOf(setup, what)?.message)
@@ -49,13 +49,26 @@ describe('what would make a heater fit', () => {
     expect(turnOf(wholeSetup(), heater({ powerW: 900 }))?.path).not.toBe('room.coldestC')
   })
 
-  it('is never water warmer or colder than 23 to 28 °C, as corals are kept (common practice)', () => {
-    const waters = [25, 75, 220, 260, 300, 400].flatMap((powerW) => {
-      const turn = turnOf(wholeSetup(), heater({ powerW }))
+  it('is cooler water for one that is too weak, never colder than the 23 °C that corals are kept at (common practice)', () => {
+    const { room, goals } = wholeSetup()
+    const cold = wholeSetup({}, { room: { ...room, coldestC: 10 }, goals: { ...goals, temperatureC: 27 } })
+    const waters = [40, 45, 50, 55, 60, 65].flatMap((powerW) => {
+      const turn = turnOf(cold, heater({ powerW }))
       return turn?.path === 'goals.temperatureC' ? [turn.to] : []
     })
-    expect(waters.length).toBeGreaterThan(0)
-    for (const waterC of waters) expect(Math.abs(waterC - 25.5)).toBeLessThanOrEqual(2.5)
+    expect(waters.length).toBeGreaterThan(1)
+    for (const waterC of waters) {
+      expect(waterC).toBeGreaterThanOrEqual(23)
+      expect(waterC).toBeLessThan(27)
+    }
+  })
+
+  it('is never warmer water for one that is too strong', () => {
+    for (const powerW of [220, 240, 260, 280, 300, 400]) {
+      const { verdict, turnsBy } = fitCheck(wholeSetup(), heater({ powerW }))
+      expect(verdict).toBe('no')
+      expect(turnsBy?.path).not.toBe('goals.temperatureC')
+    }
   })
 
   it('is nothing where two things are wrong that no one number turns', () => {
@@ -114,6 +127,21 @@ describe('what would make another piece fit', () => {
       plugs: 1,
     })
     expect(sayTurn(setup, what)).toMatch(/^It would fit( with changes)? if the heater’s power were at most 250 W\.$/)
+  })
+
+  it('is not another piece’s own size or mass: that is another piece', () => {
+    const lamp = piece('light', { mountsIncluded: [], mountsPossible: ['arm'], massKg: 2 })
+    const arm = piece('light-mount', { type: 'arm', maxLoadKg: 1, rimMinMm: 4, rimMaxMm: 12 })
+    const mounted = wholeSetup({}, { items: [item('lamp', lamp)] })
+    const load = checkOf(fitCheck(mounted, arm), 'light-mount.load')
+    expect(load).toMatchObject({ outcome: 'fail', limit: 2 })
+    expect(turnOf(mounted, arm)).toBeUndefined()
+    const stand = piece('stand', { topLengthMm: 600, topWidthMm: 500, loadRatingKg: 400 })
+    const tank = { outerLengthMm: 625, outerWidthMm: 420, outerHeightMm: 400, wallMm: 10, bottomMm: 10 }
+    const rest = { material: 'glass', waterLineMm: 350, filtration: 'rear-chambers', includedPump: { flowLph: 600 } }
+    expect(
+      turnOf(wholeSetup({}, { items: [item('stand', stand)] }), piece('tank', { ...tank, ...rest })),
+    ).toBeUndefined()
   })
 
   it('is shallower water for a skimmer that works in less', () => {
