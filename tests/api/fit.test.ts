@@ -208,6 +208,24 @@ describe('POST /api/v1/fit', () => {
     ])
   })
 
+  it('refuses a tank among the items, typed or by its slug: the tank is the setup’s own', async () => {
+    const items = [
+      { id: 'a', gear: slugOf('rod-a') },
+      { id: 'b', kind: 'tank', specs: { outerLengthMm: 600 } },
+      { id: 'c', gear: slugOf('tank') },
+    ]
+    const pointers = ['#/setup/items/1/kind', '#/setup/items/2/kind']
+    for (const [path, more] of [
+      ['/setups/report', {}],
+      ['/fit', { kind: 'heater' }],
+      ['/fit/check', { piece: { gear: slugOf('rod-a') } }],
+      ['/replacements', { itemId: 'a' }],
+    ] as const)
+      expect(listPointers(expectProblem(await post(path, { setup: { ...setup, items }, ...more }), 422))).toEqual(
+        pointers,
+      )
+  })
+
   it('names every unknown slug at its place', async () => {
     const items = [
       { id: 'a', gear: 'no-such-heater' },
@@ -319,6 +337,20 @@ describe('POST /api/v1/fit/check', () => {
     [
       '#/piece/specs/lengthMm/source',
       { piece: { kind: 'heater', specs: { lengthMm: { value: 200, source: 'hearsay' } } } },
+    ],
+    [
+      '#/piece/specs/flowCurve/1/flowLph',
+      {
+        piece: {
+          kind: 'return-pump',
+          specs: {
+            flowCurve: [
+              { headM: 0, flowLph: 500 },
+              { headM: 2, flowLph: 900 },
+            ],
+          },
+        },
+      },
     ],
     ['#/quantity', { piece: { gear: 'quillmoor-testworks-rod-a' }, quantity: 1.5 }],
     ['#/place', { piece: { gear: 'quillmoor-testworks-rod-a' }, place: { in: 'attic' } }],

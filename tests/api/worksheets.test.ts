@@ -122,6 +122,20 @@ describe('POST /api/v1/worksheets/:name', () => {
     const deep = await post('filled-weight', { tank: size, sandDepthMm: 400 })
     expect(listPointers(expectProblem(deep, 422))).toEqual(['#/sandDepthMm'])
     expect(listPointers(expectProblem(await post('heat-balance', { tank: {} }), 422))).toEqual(['#/tank'])
+    const dry = { lengthMm: 250, diameterMm: 24, minImmersionMm: 300 }
+    const chamber = { lengthMm: 100, widthMm: 120, waterDepthMm: 300 }
+    expect(listPointers(expectProblem(await post('rod-in-chamber', { ...dry, chamber }), 422))).toEqual([
+      '#/minImmersionMm',
+    ])
+    const membrane = worksheets.find(({ name }) => name === 'membrane')?.example
+    const weak = await post('membrane', { ...membrane, testPressureKPa: 60, testTdsPpm: 2000 })
+    expect(listPointers(expectProblem(weak, 422))).toEqual(['#/testPressureKPa'])
+    const flowCurve = [
+      { flowLph: 0, headM: 1 },
+      { flowLph: 1600, headM: 2 },
+    ]
+    const rising = await post('pump-point', { flowCurve, staticHeadM: 0.9, boreMm: 16, pipeLengthM: 1.8 })
+    expect(listPointers(expectProblem(rising, 422))).toEqual(['#/flowCurve/1/flowLph'])
     const named = await post('filled-weight', { tank: { gear: 'no-such-tank' } })
     expect(listPointers(expectProblem(named, 422))).toEqual(['#/tank/gear'])
   })

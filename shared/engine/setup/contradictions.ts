@@ -140,7 +140,10 @@ function checkItems(setup: Setup): Contradiction[] {
   if (setup.items.length === 0) return []
   const chambers = listChamberIds(setup.tank.specs)
   const ids = setup.items.map(({ id }) => id)
-  return setup.items.flatMap(({ id, place }, index): Contradiction[] => [
+  return setup.items.flatMap(({ id, piece, place }, index): Contradiction[] => [
+    ...(piece.kind === 'tank'
+      ? [{ path: `items.${index}.kind`, detail: 'A tank is no item of a setup: say it as the setup’s tank.' }]
+      : []),
     ...(ids.indexOf(id) < index ? [{ path: `items.${index}.id`, detail: `Two items have the id “${id}”.` }] : []),
     ...(place && 'chamber' in place && !chambers.has(place.chamber)
       ? [{ path: `items.${index}.place.chamber`, detail: `The tank has no chamber “${place.chamber}”.` }]
