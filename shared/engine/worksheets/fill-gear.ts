@@ -10,6 +10,7 @@ import type { CurvePoint } from '../physics/pump'
 import { findBasins, type Basin } from '../setup/places'
 import { readGroups, readMeasure, readNumber, readText } from '../values'
 import { pickSpecs, type Filled, type FillInput } from './fill-types'
+import { lightKeys } from './light-values'
 
 export function fillHeat({ scene, items }: FillInput): Filled {
   const heaterW = sumHeaterW(items)
@@ -44,17 +45,6 @@ export function fillRod(input: FillInput): Filled {
     }),
   }
 }
-
-const lightKeys = [
-  'layout',
-  'lengthMm',
-  'widthMm',
-  'ppfdUmol',
-  'ppfdAtMm',
-  'photonFluxUmolS',
-  'beamAngleDeg',
-  'dimmable',
-]
 
 export function fillLight({ scene, subject }: FillInput): Filled {
   if (!subject) return { coral: scene.plan.goals.coral }

@@ -16,7 +16,7 @@ import { thresholds } from '../thresholds'
 import type { Setup } from '../types'
 import { fromKind, fromSetupField, ownField, required } from './fields'
 import { listLightSteps } from './light-steps'
-import { toLight, type LightValues } from './light-values'
+import { lightKeys, toLight, type LightValues } from './light-values'
 import { assume, isPlan, listUsed, planInputs } from './plan-inputs'
 import type { Refused, Worksheet } from './types'
 
@@ -37,17 +37,6 @@ function refuseLight(values: LightValues): Refused | null {
 }
 
 const coralField = fromSetupField('coral', 'goals.coral')
-
-const lightKeys = [
-  'layout',
-  'lengthMm',
-  'widthMm',
-  'ppfdUmol',
-  'ppfdAtMm',
-  'photonFluxUmolS',
-  'beamAngleDeg',
-  'dimmable',
-]
 
 const lightUses = [
   'outerLengthMm',

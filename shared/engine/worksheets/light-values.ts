@@ -1,5 +1,17 @@
 import type { Coral, Piece, Specs } from '../types'
 
+/** What the sheet asks of a light, by the keys of its kind. */
+export const lightKeys = [
+  'layout',
+  'lengthMm',
+  'widthMm',
+  'ppfdUmol',
+  'ppfdAtMm',
+  'photonFluxUmolS',
+  'beamAngleDeg',
+  'dimmable',
+]
+
 export interface LightValues {
   readonly light: Readonly<Record<string, unknown>>
   readonly quantity?: number
