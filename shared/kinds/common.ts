@@ -135,16 +135,17 @@ export function bodyAttributes(plausible: Range, usual: Range): readonly Attribu
   ]
 }
 
-/** A rod: longest straight length and thickest diameter. */
+/** A rod, or a body as round: longest straight length and thickest diameter. */
 export function rodAttributes(
   length: { plausible: Range; usual: Range },
   diameter: { plausible: Range; usual: Range },
+  lengthGuide = 'From the lower tip to the top of the cap, without the cord.',
 ): readonly Attribute[] {
   return [
     measure('lengthMm', 'length', 'mm', {
       ...length,
       role: 'check',
-      guide: 'From the lower tip to the top of the cap, without the cord.',
+      guide: lengthGuide,
     }),
     measure('diameterMm', 'diameter', 'mm', {
       ...diameter,

@@ -39,7 +39,11 @@ export const wavemaker: Kind = {
       role: 'difference',
       guide: 'Calipers across the opening that the water leaves by.',
     }),
-    ...rodAttributes({ plausible: [15, 500], usual: [40, 200] }, { plausible: [15, 400], usual: [35, 150] }),
+    ...rodAttributes(
+      { plausible: [15, 500], usual: [40, 200] },
+      { plausible: [15, 400], usual: [35, 150] },
+      'From its magnet, where it meets the glass, to the front of its guard.',
+    ),
     madeFor,
     ...electricAttributes([0.5, 500], [2, 80]),
   ],
