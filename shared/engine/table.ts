@@ -1,5 +1,5 @@
 import { classifyForRule, type Classes } from './classes'
-import { isConcededBy } from './concession'
+import { isConcededBy, outcomeOf } from './concession'
 import { judge, type Judged } from './judge'
 import type { Glance, KindRules, Rule, Way } from './rule'
 import type { Scene } from './scene'
@@ -100,7 +100,7 @@ export class Column {
   }
 
   private isConceded(index: number): boolean {
-    if (!this.was) return false
+    if (!this.was || outcomeOf(this.was) !== 'change') return false
     const id = this.classes.ofPiece[index]!
     let isConceded = this.conceded.get(id)
     if (isConceded === undefined) {

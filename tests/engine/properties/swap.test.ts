@@ -82,6 +82,7 @@ const present = (setup: Setup): Setup => ({
 /** Answers that fit and leave something else worse off. */
 function findSilent(setup: Setup, id: string, catalogue: Catalogue, kind: KindKey) {
   const { answers } = replacements(setup, id, catalogue, { ...page, verdict: 'fits' })!
+  expect(answers.every(({ verdict }) => verdict === 'fits')).toBe(true)
   const before = present(setup)
   const silent = answers.flatMap(({ gear, pieces }) => {
     const candidate = catalogue[kind].find((one) => one.gear?.slug === gear?.slug)
