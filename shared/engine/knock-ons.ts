@@ -28,11 +28,6 @@ const isWorse = (was: Judged | undefined, now: Judged): boolean =>
 const sayOf = ({ judgement, condition }: Judged): Say =>
   condition ? (words) => `${judgement.say(words)} ${describeCondition(condition())(words)}` : judgement.say
 
-const sayOpen =
-  ({ judgement }: Judged): Say =>
-  (words) =>
-    `can no longer be judged. ${judgement.say(words)}`
-
 const mapByRule = (judged: readonly Judged[]): ReadonlyMap<string, Judged> =>
   new Map(judged.map((one) => [one.rule.id, one]))
 
@@ -60,19 +55,37 @@ export function listDemands(judged: readonly Judged[]): readonly RawKnockOn[] {
   })
 }
 
+/** A piece that was judged and no longer can be, with all that is now missing for it, each once. */
+function openedKnockOns(before: ReadonlyMap<string, Judged>, { item, judged }: AssessedItem): RawKnockOn[] {
+  const opened = judged.filter((one) => isOpen(one) && isWorse(before.get(one.rule.id), one))
+  const [first] = opened
+  if (!first) return []
+  const was = before.get(first.rule.id)
+  const listWhy: Say = (words) => [...new Set(opened.map(({ judgement }) => judgement.say(words)))].join(' ')
+  return [
+    {
+      kind: 'check',
+      subject: item.id,
+      from: was ? outcomeOf(was) : 'pass',
+      to: 'nodata',
+      say: (words) => `${nameOf(item)}: can no longer be judged. ${listWhy(words)}`,
+    },
+  ]
+}
+
 /**
  * Checks of a piece that stayed and that got worse. Too few outlets and too much load are every piece's trouble alike:
  * the setup's own need for outlets says the one, the first piece that finds it the other.
  */
 function worsenedKnockOns({ judged }: AssessedItem, after: AssessedItem, said: Set<string>): RawKnockOn[] {
   const before = mapByRule(judged)
-  return after.judged.flatMap((one): RawKnockOn[] => {
+  const worsened = after.judged.flatMap((one): RawKnockOn[] => {
     const was = before.get(one.rule.id)
-    if (!isWorse(was, one)) return []
+    if (isOpen(one) || !isWorse(was, one)) return []
     const need = one.judgement.asks?.need
     if (need === 'outlets' || (need === 'circuit' && said.has(need))) return []
     if (need) said.add(need)
-    const say = isOpen(one) ? sayOpen(one) : sayOf(one)
+    const say = sayOf(one)
     return [
       {
         kind: 'check',
@@ -84,6 +97,7 @@ function worsenedKnockOns({ judged }: AssessedItem, after: AssessedItem, said: S
       },
     ]
   })
+  return [...worsened, ...openedKnockOns(before, after)]
 }
 
 function budgetKnockOns(before: Assessment, after: Assessment): RawKnockOn[] {
@@ -132,21 +146,7 @@ const rankOf = ({ to }: RawKnockOn): number => (typeof to === 'string' ? severit
 function replacedKnockOns({ judged }: AssessedItem, after: AssessedItem): readonly RawKnockOn[] {
   const before = mapByRule(judged)
   const asked = listDemands(after.judged.filter((one) => !isConcededBy(before.get(one.rule.id), one)))
-  const opened = after.judged.flatMap((one): RawKnockOn[] => {
-    const was = before.get(one.rule.id)
-    if (!isOpen(one) || !isWorse(was, one)) return []
-    const say = sayOpen(one)
-    return [
-      {
-        kind: 'check',
-        subject: one.rule.id,
-        from: was ? outcomeOf(was) : 'pass',
-        to: 'nodata',
-        say: (words) => `${nameOf(after.item)}: ${say(words)}`,
-      },
-    ]
-  })
-  return [...asked, ...opened]
+  return [...asked, ...openedKnockOns(before, after)]
 }
 
 /** Knock-ons that ask something to be done, as against what merely moves or is freed. */
