@@ -31,6 +31,11 @@ const isBesidePiece = ({ landmarkAt, kind, tokens }: Reading, from: number, to: 
   return false
 }
 
+const denials: ReadonlySet<string> = new Set(['no', 'not', 'without', 'never', 'nor', "don't", 'dont'])
+
+/** "no hob filter": what is ruled out is not what is meant, and is left to be seen as not used. */
+const isDenied = ({ tokens }: Reading, from: number): boolean => denials.has(tokens[from - 1]?.text ?? '')
+
 const ofTankToo: ReadonlySet<string> = new Set(['glass', 'hood', 'canopy', 'bar', 'strip', 'live', 'dry', 'base'])
 
 /** Reads words that pick an option of the piece: "titanium", "dry", "with a thermostat". */
@@ -42,6 +47,7 @@ export const readFilterChoices = (reading: Reading): void => {
     const isInName = landmarkAt.get(from)?.kind === kind
     if (
       choice === undefined ||
+      isDenied(reading, from) ||
       (draft.isUsed(from) && !isInName) ||
       (to - from === 1 && ofTankToo.has(word) && !isBesidePiece(reading, from, to))
     )
@@ -75,11 +81,13 @@ const alwaysRead: ReadonlySet<string> = new Set([
 ])
 
 /** Reads words that say something of the setup: "rimless", "acrylic", "no lid". */
-export const readFieldChoices = ({ tokens, draft, landmarkAt }: Reading): void => {
+export const readFieldChoices = (reading: Reading): void => {
+  const { tokens, draft, landmarkAt } = reading
   for (const { from, to, means } of findPhrases(fields, tokens)) {
     const landmark = landmarkAt.get(from)
     const isOfPiece = landmark?.kind !== undefined && landmark.kind !== 'tank'
-    if (isOfPiece || (draft.isUsed(from) && !alwaysRead.has(tokens[from]?.text ?? ''))) continue
+    if (isOfPiece || isDenied(reading, from) || (draft.isUsed(from) && !alwaysRead.has(tokens[from]?.text ?? '')))
+      continue
     if (!draft.setField(means.path, means.value, asTyped(means.value))) continue
     draft.note({ meaning: means.meaning, path: means.path }, { from, to })
   }

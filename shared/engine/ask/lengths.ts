@@ -42,12 +42,16 @@ const withBound = (measure: Measure, bound: { readonly from: number; readonly to
     ? measure
     : { ...measure, from: Math.min(measure.from, bound.from), to: Math.max(measure.to, bound.to) }
 
+/** How high a pump lifts is the length of nothing: what a pump gives at a head is its curve's to tell. */
+const liftWords: ReadonlySet<string> = new Set(['head', 'lift', 'rise'])
+
 /** Reads a length with a unit, or a bare number that a word of dimension stands beside. */
 export const readLength = (reading: Reading, measure: Measure): boolean => {
   const quantities = new Set(measure.amounts.map(({ quantity }) => quantity))
   if (measure.shape === 'size' || [...quantities].some((quantity) => quantity !== undefined && quantity !== 'length')) {
     return false
   }
+  if (liftWords.has(reading.tokens[measure.to]?.text ?? '')) return false
   const { draft } = reading
   const dimension = findDimension(reading, measure)
   const amounts =

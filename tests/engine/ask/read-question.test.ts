@@ -26,6 +26,22 @@ describe('what it says it understood', () => {
     ])
   })
 
+  it('takes what is ruled out for said of nothing, and shows it as not used', () => {
+    const hangOn = readQuestion('heater, 40 gal, no hob filter please', 'us')
+    expect(hangOn.fields).not.toHaveProperty(['tank.filtration'])
+    expect(hangOn.ignored.join(' ')).toContain('hob')
+    expect(readQuestion('light for a 24 x 12 x 12 in tank, not acrylic', 'us').fields).not.toHaveProperty([
+      'tank.material',
+    ])
+    expect(readQuestion('heater for a 40 gal tank with no lid', 'us').fields['tank.lid']?.value).toBe('none')
+  })
+
+  it('takes how high a pump lifts for the length of nothing', () => {
+    const { filters, ignored } = readQuestion('sump 30x12x16 return pump 4ft head', 'us')
+    expect(filters).toEqual({})
+    expect(ignored.join(' ')).toContain('4ft head')
+  })
+
   it('says which unit it took where none was typed', () => {
     expect(meanings('tank 60 x 45 x 40', 'metric')).toEqual(['tank 60 × 45 × 40 cm (no unit typed, taken as cm)'])
   })
