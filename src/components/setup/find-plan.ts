@@ -11,6 +11,24 @@ export interface DrawnPlan {
   readonly isExample: boolean
 }
 
+/** Of a tank of which one side is known: as wide and as high as this share of its length, and filled so far. */
+const usualShare = 0.4
+const filledShare = 0.85
+
+/** A volume that goes with what sizes are known, so that the drawing looks like a tank. */
+function chooseExampleVolumeL({ tank }: Setup): number {
+  const read = (key: string): number | undefined => {
+    const value = tank.specs[key]?.value
+    return typeof value === 'number' && value > 0 ? value : undefined
+  }
+  const [length, width, height] = [read('outerLengthMm'), read('outerWidthMm'), read('outerHeightMm')]
+  const across = width ?? height
+  const longest = length ?? (across === undefined ? undefined : across / usualShare)
+  if (longest === undefined) return exampleVolumeL
+  const usual = longest * usualShare
+  return (filledShare * longest * (width ?? usual) * (height ?? usual)) / 1e6
+}
+
 /** The setup with what is assumed filled in, as it is drawn; there is always something to draw. */
 export function findPlan(setup: Setup): DrawnPlan {
   try {
@@ -18,5 +36,5 @@ export function findPlan(setup: Setup): DrawnPlan {
   } catch (error) {
     if (!(error instanceof RangeError)) throw error
   }
-  return { plan: resolve({ ...setup, tank: { ...setup.tank, volumeL: exampleVolumeL } }), isExample: true }
+  return { plan: resolve({ ...setup, tank: { ...setup.tank, volumeL: chooseExampleVolumeL(setup) } }), isExample: true }
 }

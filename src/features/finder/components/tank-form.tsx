@@ -31,7 +31,7 @@ export function TankForm({ finder, rod, onEdit }: TankFormProps) {
     <section aria-label="Your tank, drawn to scale">
       {isExample && (
         <p className="mb-3 max-w-prose">
-          Drawn as a {printer.volume(75.7)} tank until you say. <strong>Give its volume or its outside size</strong>, or
+          Drawn as a {printer.volume(plan.tank.ratedL)} tank until you say. <strong>Give its volume or its outside size</strong>, or
           press any measure in the drawing.
         </p>
       )}
