@@ -106,7 +106,7 @@ function judgeTank(scene: Scene, { piece }: Candidate): Judgement {
       if (type === 'arm')
         return found
           ? `Clamps the ${words.length(tank.wallMm)} wall.`
-          : `Its clamp does not fit a ${words.length(tank.wallMm)} wall.`
+          : `Its clamp does not fit walls of ${words.length(tank.wallMm)}.`
       if (type === 'rim-legs')
         return found ? 'Its legs span the tank.' : 'Its legs span neither the tank’s length nor its width.'
       return found ? 'There is height for it under the ceiling.' : 'There is no height for it under the ceiling.'

@@ -109,7 +109,7 @@ function judgeReturnPump({ others }: Scene, { piece }: Candidate): Judgement {
     outcome: 'change',
     asks: { need: 'return-pump', amount: null, unit: null },
     say: (words) =>
-      `No return pump is stated to come with it: it needs one${bore === undefined ? '' : ` for a ${words.length(bore)} bore`}.`,
+      `No return pump is stated to come with it: it needs one${bore === undefined ? '' : ` for a bore of ${words.length(bore)}`}.`,
   }
 }
 
