@@ -98,7 +98,7 @@ describe('a return pump for another tank', () => {
     const message = (values: Values) =>
       toPlain(judge(wholeSetup({ returnBoreMm: 25 }), tank(values), 'tank.return-pump').message)
     expect(message({ returnBoreMm: 13 })).toBe(
-      'No return pump is stated to come with it: it needs one for a 13 mm bore.',
+      'No return pump is stated to come with it: it needs one for a bore of 13 mm.',
     )
     expect(message({})).toBe('No return pump is stated to come with it: it needs one.')
   })
