@@ -29,12 +29,15 @@ async function loadMatched(routes: RouteObject[]): Promise<void> {
   }
 }
 
-/** What was typed while the scripts were on their way counts as if it were typed now. */
+/** What was typed while the scripts were on their way counts as if it were typed now; from then on the page says that it listens. */
 function EarlyInput({ children }: { readonly children: ReactNode }) {
   useLayoutEffect(() => {
     const replay = noticeEarlyInput(document)
     // Not within the effect: React would set the fields back before it heard of what they hold.
-    const timer = setTimeout(replay)
+    const timer = setTimeout(() => {
+      replay()
+      document.documentElement.dataset.live = 'yes'
+    })
     return () => clearTimeout(timer)
   }, [])
   return children

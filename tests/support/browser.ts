@@ -9,6 +9,12 @@ interface Fixtures {
   allowConsole: (pattern: RegExp) => void
 }
 
+/** Until a page listens, a press on what is drawn follows the plain link that it is without scripts. */
+async function waitUntilLive(page: Page): Promise<void> {
+  const hasScripts = await page.evaluate(() => document.querySelector('script[type="module"]') !== null)
+  if (hasScripts) await page.locator('html[data-live]').waitFor({ state: 'attached' })
+}
+
 /** Playwright's test, on the built app; fails on a console error or warning, or an uncaught one, that it did not allow. */
 export const test = base.extend<Fixtures>({
   // Playwright reads a fixture's needs from this pattern: it must be written out, even when empty.
@@ -17,6 +23,16 @@ export const test = base.extend<Fixtures>({
     const origin = process.env[e2eOriginVariable]
     if (!origin) throw new Error('The built server was not started.')
     await use(origin)
+  },
+  page: async ({ page, javaScriptEnabled }, use) => {
+    const [goto, reload] = [page.goto.bind(page), page.reload.bind(page)]
+    const settle = async <T>(answer: T, waitUntil: string | undefined): Promise<T> => {
+      if (javaScriptEnabled && waitUntil !== 'commit') await waitUntilLive(page)
+      return answer
+    }
+    page.goto = async (url, options) => settle(await goto(url, options), options?.waitUntil)
+    page.reload = async (options) => settle(await reload(options), options?.waitUntil)
+    await use(page)
   },
   allowConsole: [
     async ({ context }, use) => {
