@@ -13,12 +13,14 @@ const restMs = 400
 export function useKeptAddress(sent: RawSetup, texts: RawSetup, system: UnitSystem, chambers: number): void {
   useEffect(() => {
     if (texts === sent) return
+    const { pathname } = window.location
     const keep = () => {
-      const query = new URLSearchParams(writeSetupLink([...Object.entries(texts), ['typed', system]], system))
-      if (chambers > 1) query.set('chambers', String(chambers))
-      const { pathname, hash } = window.location
-      const search = query.size === 0 ? '' : `?${query.toString()}`
-      window.history.replaceState(window.history.state, '', `${pathname}${search}${hash}`)
+      // Sent meanwhile, the form has led somewhere else.
+      if (window.location.pathname !== pathname) return
+      const setup = writeSetupLink([...Object.entries(texts), ['typed', system]], system)
+      const query = [setup, chambers > 1 && `chambers=${chambers}`].filter(Boolean).join('&')
+      const address = `${pathname}${query && `?${query}`}${window.location.hash}`
+      window.history.replaceState(window.history.state, '', address)
     }
     const timer = setTimeout(keep, restMs)
     return () => clearTimeout(timer)
