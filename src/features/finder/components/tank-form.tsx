@@ -31,8 +31,8 @@ export function TankForm({ finder, rod, onEdit }: TankFormProps) {
     <section aria-label="Your tank, drawn to scale">
       {isExample && (
         <p className="mb-3 max-w-prose">
-          Drawn as a {printer.volume(plan.tank.ratedL)} tank until you say. <strong>Give its volume or its outside size</strong>, or
-          press any measure in the drawing.
+          Drawn as a {printer.volume(plan.tank.ratedL)} tank until you say.{' '}
+          <strong>Give its volume or its outside size</strong>, or press any measure in the drawing.
         </p>
       )}
       <div className="grid gap-3 sm:grid-cols-2">
