@@ -19,10 +19,14 @@ const massOf = ({ piece, quantity }: Item): number | undefined => {
   return packKg === undefined ? undefined : packKg * quantity
 }
 
+/** As the sand in the setup has it, where its maker or somebody says so: the same bed as its own check asks for. */
+const findSandDensity = (items: readonly Item[]): number | undefined =>
+  items.flatMap(({ piece }) => (piece.kind === 'sand' ? (readNumber(piece.specs, 'bulkDensityKgL') ?? []) : []))[0]
+
 /** Sand, rock and salt water that the tank takes, and what the packs in the setup come to. */
 export function addUpSupplies(plan: Plan, items: readonly Item[]): Readonly<Record<string, RawBudget>> {
   const { tank, goals } = plan
-  const sandKg = sandMassKg(tank, goals.sandDepthMm)
+  const sandKg = sandMassKg(tank, goals.sandDepthMm, findSandDensity(items))
   const makes = (item: Item): number | undefined => {
     const makesL = readNumber(item.piece.specs, 'makesL')
     return makesL === undefined ? undefined : item.quantity / saltPacks(1, goals.salinityPpt, makesL)

@@ -45,6 +45,25 @@ export const heater = (values: Readonly<Record<string, unknown>> = {}, slug?: st
     slug,
   )
 
+/** An RO/DI unit with every stage, for a tap of ordinary pressure; each test changes what it is about. */
+export const roUnit = (values: Readonly<Record<string, unknown>> = {}, slug?: string): Piece =>
+  piece(
+    'ro-unit',
+    {
+      stages: ['sediment', 'carbon', 'membrane', 'deionisation'],
+      membraneLpd: 280,
+      testPressureKPa: 350,
+      testTempC: 25,
+      testTdsPpm: 250,
+      minFeedKPa: 280,
+      wasteRatio: 3,
+      boosterIncluded: false,
+      rejectionFraction: 0.97,
+      ...values,
+    },
+    slug,
+  )
+
 /** Inside 600 × 400, 350 mm of water: 84 L. One chamber of 120 × 100 × 330 mm, 390 mm high. */
 export const tankValues = {
   outerLengthMm: 620,

@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { replacements } from '#shared/engine/swap/replacements'
 import type { Replacement } from '#shared/engine/swap/types'
 import type { Piece, Setup } from '#shared/engine/types'
-import { heater, item, piece, wholeSetup } from './build'
+import { heater, item, piece, roUnit, wholeSetup } from './build'
 import { catalogueOf } from './demo-catalogue'
 import { findAnswer, slugsOf, tellKnockOns, tellOption } from './stories/tell'
 
@@ -14,22 +14,7 @@ const demandsOf = (answer: Replacement) =>
   tellKnockOns(answer).filter(([kind]) => kind === 'need' || kind === 'check' || kind === 'missing')
 
 describe('an RO/DI unit that lacked a stage, gone', () => {
-  const unit = (slug: string, ...stages: readonly string[]) =>
-    piece(
-      'ro-unit',
-      {
-        stages: ['membrane', ...stages],
-        membraneLpd: 280,
-        testPressureKPa: 350,
-        testTempC: 25,
-        testTdsPpm: 250,
-        minFeedKPa: 280,
-        wasteRatio: 3,
-        boosterIncluded: false,
-        rejectionFraction: 0.97,
-      },
-      slug,
-    )
+  const unit = (slug: string, ...stages: readonly string[]) => roUnit({ stages: ['membrane', ...stages] }, slug)
   const setup = wholeSetup({}, { items: [item('gone', unit('old', 'carbon', 'deionisation'), { state: 'gone' })] })
   const result = swap(
     setup,

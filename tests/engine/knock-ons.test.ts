@@ -5,7 +5,7 @@ import { diff } from '#shared/engine/knock-ons'
 import { report } from '#shared/engine/report'
 import { replacements } from '#shared/engine/swap/replacements'
 import type { KnockOn, Setup } from '#shared/engine/types'
-import { heater, item, piece, tankValues, toPlain, wholeSetup } from './build'
+import { heater, item, piece, roUnit, tankValues, toPlain, wholeSetup } from './build'
 import { catalogueOf } from './demo-catalogue'
 
 type Values = Readonly<Record<string, unknown>>
@@ -90,22 +90,6 @@ describe('what could be judged and no longer can', () => {
       },
       slug,
     )
-  const unit = (values: Values = {}, slug?: string) =>
-    piece(
-      'ro-unit',
-      {
-        stages: ['sediment', 'carbon', 'membrane', 'deionisation'],
-        membraneLpd: 280,
-        testPressureKPa: 350,
-        testTempC: 25,
-        testTdsPpm: 250,
-        minFeedKPa: 280,
-        wasteRatio: 3,
-        boosterIncluded: false,
-        ...values,
-      },
-      slug,
-    )
   const booster = piece('booster-pump', {
     inletMinKPa: 70,
     outletKPa: 550,
@@ -142,12 +126,12 @@ describe('what could be judged and no longer can', () => {
   })
 
   it('is told of an RO/DI unit beside a booster pump that is chosen by its numbers, swapped or fitted', () => {
-    const setup = setupWith(4, item('booster', booster), item('unit', unit()))
+    const setup = setupWith(4, item('booster', booster), item('unit', roUnit()))
     expect(others(setup)).toEqual([
       ['booster', 'fits'],
       ['unit', 'fits'],
     ])
-    const silent = unit({ minFeedKPa: undefined }, 'silent')
+    const silent = roUnit({ minFeedKPa: undefined }, 'silent')
     const swapped = replacements(setup, 'unit', catalogueOf(silent), { limit: 1, offset: 0 })!
     expect(swapped.counts).toMatchObject({ fits: 0, changes: 1 })
     for (const { verdict, knockOns } of [swapped.answers[0]!, fitCheck(setup, silent)]) {
@@ -159,7 +143,7 @@ describe('what could be judged and no longer can', () => {
 
   it('is not charged to what comes where it could not be judged before', () => {
     const setup = setupWith(4, item('booster', booster))
-    expect(lost(fitCheck(setup, unit({ minFeedKPa: undefined })).knockOns)).toEqual([])
+    expect(lost(fitCheck(setup, roUnit({ minFeedKPa: undefined })).knockOns)).toEqual([])
   })
 
   it('is told of a piece in the place of another in a setup', () => {

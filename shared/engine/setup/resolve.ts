@@ -17,9 +17,12 @@ function packMassKg(items: readonly Item[], kind: 'rock' | 'sand'): number | und
   }, 0)
 }
 
-/** Mass in kg of a sand bed over the display. */
-export const sandMassKg = (area: { displayLengthMm: number; displayWidthMm: number }, depthMm: number): number =>
-  ((area.displayLengthMm * area.displayWidthMm * depthMm) / 1e6) * defaults.sandBulkDensityKgL
+/** Mass in kg of a sand bed over the display, usual sand's unless its bulk density (kg/L) is told. */
+export const sandMassKg = (
+  area: { displayLengthMm: number; displayWidthMm: number },
+  depthMm: number,
+  bulkDensityKgL: number = defaults.sandBulkDensityKgL,
+): number => ((area.displayLengthMm * area.displayWidthMm * depthMm) / 1e6) * bulkDensityKgL
 
 /** Litres of water that rock and sand take the place of; 0 unless the person gave both. */
 function displacedL(

@@ -85,6 +85,7 @@ export const heatBalance: Worksheet = {
   ],
   results: [
     { key: 'needW', label: 'Heat needed on the coldest night', unit: 'W' },
+    { key: 'needUpperW', label: 'With a reserve, by the upper figure', unit: 'W' },
     { key: 'duty', label: 'Heater runs, then', unit: 'fraction', none: 'give its power' },
     { key: 'stuckOnC', label: 'Stuck on in the warmest room, the water goes to', unit: 'C', none: 'give its power' },
     { key: 'hoursTo30C', label: 'Stuck on: hours to 30 °C', unit: 'h', none: 'never' },
@@ -112,7 +113,7 @@ export const heatBalance: Worksheet = {
     const { heaterW, inTankW } = values
     const { goals, room, tank } = plan
     const scene = createHeatScene(plan, values)
-    const { needW, gainW } = once(scene, findHeaterNeed)
+    const { needW, needUpperW, gainW } = once(scene, findHeaterNeed)
     const loss = lossAt(plan, goals.temperatureC, room.coldestC)
     const stuck = heaterW === undefined ? null : findStuckOn(scene, heaterW)
     const duty = needW === 0 ? 0 : heaterW === undefined ? null : needW / heaterW
@@ -126,6 +127,7 @@ export const heatBalance: Worksheet = {
         lossUpperW: loss.totalUpperW,
         gainW,
         needW,
+        needUpperW,
         duty,
         stuckOnC: stuck?.equilibriumC ?? null,
         hoursTo30C: stuck?.hoursTo30C ?? null,
@@ -146,6 +148,13 @@ export const heatBalance: Worksheet = {
           formula: 'heat lost − given by other gear, not below 0',
           text: `${put(loss.totalW)} W − ${put(gainW)} W`,
           value: needW,
+          unit: 'W',
+        },
+        {
+          title: 'Heat needed with a reserve',
+          formula: 'the upper figure − given by other gear, not below 0: what a heater is asked for',
+          text: `${put(loss.totalUpperW)} W − ${put(gainW)} W`,
+          value: needUpperW,
           unit: 'W',
         },
         ...(heaterW === undefined
@@ -179,7 +188,7 @@ export const heatBalance: Worksheet = {
         ...(needW === 0 ? ['No heater is needed at these temperatures.'] : []),
         ...(duty !== null && duty > 1
           ? [`Too weak: it cannot hold ${goal} with the room at ${words.temperature(room.coldestC)}.`]
-          : heaterW !== undefined && heaterW + gainW < loss.totalUpperW
+          : heaterW !== undefined && heaterW < needUpperW
             ? ['No reserve: by the upper figure of evaporation it just falls short.']
             : []),
         'Heaters fail. A second, independent cut-off is advised whatever the temperature above.',

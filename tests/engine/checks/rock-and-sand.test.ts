@@ -83,6 +83,14 @@ describe('sand', () => {
     })
   const check = (id: string, values: Values, setup = withItems()) => judge(setup, sand(values), `sand.${id}`)
 
+  it('is one mass for one bed, in its own check and in the budget, whatever its bulk density', () => {
+    for (const bulkDensityKgL of [undefined, 1.2, 1.7]) {
+      const { items, budgets } = report(withItems(item('sand', sand({ bulkDensityKgL }))))
+      const checks = items.find(({ id }) => id === 'sand')?.checks ?? []
+      expect(budgets['sandKg']?.used).toBeCloseTo(checks.find(({ id }) => id === 'sand.amount')?.measured as number, 9)
+    }
+  })
+
   it('is aragonite or calcite; silica only where it is made for salt water, as a change', () => {
     expect(check('mineral', {}).outcome).toBe('pass')
     expect(check('mineral', { mineral: 'calcite' }).outcome).toBe('pass')

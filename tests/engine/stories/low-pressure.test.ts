@@ -1,29 +1,13 @@
 import { describe, expect, it } from 'vitest'
 import { replacements } from '#shared/engine/swap/replacements'
 import type { Item, Setup } from '#shared/engine/types'
-import { item, piece, wholeSetup } from '../build'
+import { item, piece, roUnit, wholeSetup } from '../build'
 import { catalogueOf } from '../demo-catalogue'
 import { findAnswer, slugsOf, tellKnockOns, tellOption } from './tell'
 
 type Values = Readonly<Record<string, unknown>>
 
-const unit = (slug: string, values: Values = {}) =>
-  piece(
-    'ro-unit',
-    {
-      stages: ['sediment', 'carbon', 'membrane', 'deionisation'],
-      membraneLpd: 280,
-      testPressureKPa: 350,
-      testTempC: 25,
-      testTdsPpm: 250,
-      minFeedKPa: 280,
-      wasteRatio: 3,
-      boosterIncluded: false,
-      rejectionFraction: 0.97,
-      ...values,
-    },
-    slug,
-  )
+const unit = (slug: string, values: Values = {}) => roUnit(values, slug)
 const booster = (slug: string, values: Values = {}) =>
   piece(
     'booster-pump',

@@ -37,6 +37,7 @@ describe('the worksheet of a heat balance', () => {
   it('runs the heater for the share of the time that the need is of its power', () => {
     const found = work('heat-balance', { ...body, inTankW: 40 }).result
     expectWithinShare(found['needW'] as number, 125.8, 5e-3)
+    expect(found['needUpperW']).toBeCloseTo((found['lossUpperW'] as number) - (found['gainW'] as number), 9)
     expectWithinShare(found['duty'] as number, 125.8 / 300, 5e-3)
     expect(found['gainW']).toBe(40)
   })

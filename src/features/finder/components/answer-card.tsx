@@ -1,15 +1,13 @@
-import { useState } from 'react'
 import clsx from 'clsx'
 import { Link } from 'react-router-dom'
 import type { Answer } from '#shared/engine/types'
-import { Disclosure } from '../../../components/ui/disclosure'
 import { VerdictIcon } from '../../../components/ui/verdict-icon'
 import { describeSpecs } from '../../../lib/describe-specs'
 import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { Finder } from '../hooks/use-finder'
 import { CautionList } from '../../../components/setup/caution-list'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
-import { CheckItem } from '../../../components/setup/check-item'
+import { CheckList } from '../../../components/setup/check-list'
 import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findTrial } from '../../../components/setup/find-trial'
@@ -37,7 +35,6 @@ function countKnockOns(count: number): string {
 
 /** One piece with its verdict, the sentence, what else changes, and every check behind it. */
 export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], onPoint }: AnswerCardProps) {
-  const [isOpen, setIsOpen] = useState(false)
   const { gear, verdict, summary, checks, knockOns, kind, pieces, confidence, turnsBy } = answer
   const quantity = pieces[0]?.quantity ?? 1
   const { printer, plan, given, hrefOf, state } = finder
@@ -108,33 +105,17 @@ export function AnswerCard({ answer, finder, isLit, isPicked, saidAbove = [], on
           {deciding && <DecidingGauge check={deciding} printer={printer} />}
         </div>
       </article>
-      {checks.length > 0 && (
-        <div className="mt-2 ml-10">
-          <Disclosure
-            summary={checks.length === 1 ? 'The check' : `All ${checks.length} checks`}
-            isOpen={isOpen}
-            onToggle={setIsOpen}
-          >
-            {isOpen && <LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
-            <ul>
-              {checks.map((check) => (
-                <CheckItem
-                  key={check.id}
-                  check={check}
-                  plan={plan}
-                  printer={printer}
-                  hasGauge={isOpen}
-                  workingHref={
-                    slug === null
-                      ? undefined
-                      : writeWorkingHref(check.id, state.raw, printer.system, { piece: slug, quantity })
-                  }
-                />
-              ))}
-            </ul>
-          </Disclosure>
-        </div>
-      )}
+      <div className="mt-2 ml-10">
+        <CheckList
+          checks={checks}
+          plan={plan}
+          printer={printer}
+          drawing={<LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
+          workingHrefOf={(check) =>
+            slug === null ? undefined : writeWorkingHref(check, state.raw, printer.system, { piece: slug, quantity })
+          }
+        />
+      </div>
     </li>
   )
 }

@@ -1,14 +1,12 @@
-import { useState } from 'react'
 import { Link } from 'react-router-dom'
 import type { ItemReport } from '#shared/engine/types'
 import { getKind } from '#shared/kinds/index'
 import { CautionList } from '../../../components/setup/caution-list'
-import { CheckItem } from '../../../components/setup/check-item'
+import { CheckList } from '../../../components/setup/check-list'
 import { writeWorkingHref } from '../../../components/setup/working-href'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { writeSetupHref } from '../../../components/setup/setup-href'
-import { Disclosure } from '../../../components/ui/disclosure'
 import { VerdictBadge } from '../../../components/ui/verdict-badge'
 import { buttonClass } from '../../../components/ui/button-class'
 import { paths } from '../../../config/paths'
@@ -25,7 +23,6 @@ export interface ItemCardProps {
 
 /** One piece with its verdict, what it asks for, and every check behind that. */
 export function ItemCard({ item, shown, saidAbove }: ItemCardProps) {
-  const [isOpen, setIsOpen] = useState(false)
   const { id, kind, gear, verdict, checks, quantity, specs } = item
   const { nameOf, plan, printer, visit } = shown
   const asks = checks.filter(({ outcome }) => outcome !== 'pass')
@@ -65,7 +62,11 @@ export function ItemCard({ item, shown, saidAbove }: ItemCardProps) {
           <MissingMeasures kind={kind} checks={asks.filter(({ outcome }) => outcome === 'nodata')} />
         </div>
         <div className="flex min-w-0 flex-col items-start gap-3">
-          {deciding && <div className="w-full">{<DecidingGauge check={deciding} printer={printer} />}</div>}
+          {deciding && (
+            <div className="w-full">
+              <DecidingGauge check={deciding} printer={printer} />
+            </div>
+          )}
           <Link
             to={goneHref}
             aria-label={`It is gone: what replaces ${nameOf(id)}?`}
@@ -75,28 +76,14 @@ export function ItemCard({ item, shown, saidAbove }: ItemCardProps) {
           </Link>
         </div>
       </article>
-      {checks.length > 0 && (
-        <div className="mt-3 print:hidden">
-          <Disclosure
-            summary={checks.length === 1 ? 'The check' : `All ${checks.length} checks`}
-            isOpen={isOpen}
-            onToggle={setIsOpen}
-          >
-            <ul>
-              {checks.map((check) => (
-                <CheckItem
-                  key={check.id}
-                  check={check}
-                  plan={plan}
-                  printer={printer}
-                  hasGauge={isOpen}
-                  workingHref={writeWorkingHref(check.id, visit.raw, printer.system, { item: id })}
-                />
-              ))}
-            </ul>
-          </Disclosure>
-        </div>
-      )}
+      <div className="mt-3 print:hidden">
+        <CheckList
+          checks={checks}
+          plan={plan}
+          printer={printer}
+          workingHrefOf={(check) => writeWorkingHref(check, visit.raw, printer.system, { item: id })}
+        />
+      </div>
     </li>
   )
 }

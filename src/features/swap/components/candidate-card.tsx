@@ -1,14 +1,12 @@
-import { useState } from 'react'
 import { Link } from 'react-router-dom'
 import type { Replacement } from '#shared/engine/swap/types'
 import { CautionList } from '../../../components/setup/caution-list'
-import { CheckItem } from '../../../components/setup/check-item'
+import { CheckList } from '../../../components/setup/check-list'
 import { DecidingGauge } from '../../../components/setup/deciding-gauge'
 import { findDecidingCheck } from '../../../components/setup/deciding-check'
 import { PieceNames } from '../../../components/setup/piece-names'
 import { TurnLine } from '../../../components/setup/turn-line'
 import { LazyAnswerDrawing } from '../../../components/setup/lazy-answer-drawing'
-import { Disclosure } from '../../../components/ui/disclosure'
 import { VerdictBadge } from '../../../components/ui/verdict-badge'
 import { buttonClass } from '../../../components/ui/button-class'
 import { describeSpecs } from '../../../lib/describe-specs'
@@ -24,7 +22,6 @@ export interface CandidateCardProps {
 
 /** One candidate: its verdict, what else would change, what it needs besides, and how it differs from what is gone. */
 export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
-  const [isOpen, setIsOpen] = useState(false)
   const { gear, kind, specs, verdict, summary, knockOns, cautions, checks, pieces, differences, turnsBy } = answer
   const { printer, plan, given } = swap
   const deciding = findDecidingCheck(checks)
@@ -89,18 +86,12 @@ export function CandidateCard({ answer, letter, swap }: CandidateCardProps) {
         </div>
       </article>
       <div className="mt-3 print:hidden">
-        <Disclosure
-          summary={checks.length === 1 ? 'The check' : `All ${checks.length} checks`}
-          isOpen={isOpen}
-          onToggle={setIsOpen}
-        >
-          {isOpen && <LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
-          <ul>
-            {checks.map((check) => (
-              <CheckItem key={check.id} check={check} plan={plan} printer={printer} hasGauge={isOpen} />
-            ))}
-          </ul>
-        </Disclosure>
+        <CheckList
+          checks={checks}
+          plan={plan}
+          printer={printer}
+          drawing={<LazyAnswerDrawing answer={answer} plan={plan} given={given} printer={printer} />}
+        />
       </div>
     </li>
   )
