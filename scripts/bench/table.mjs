@@ -10,7 +10,7 @@
  */
 
 const print = (/** @type {number | null | undefined} */ value) =>
-  value === null || value === undefined || Number.isNaN(value) ? '' : value.toPrecision(3).replace(/e\+\d+$/, (e) => e)
+  value === null || value === undefined || Number.isNaN(value) ? '' : value.toPrecision(3)
 
 const round = (/** @type {number | null | undefined} */ value) =>
   typeof value === 'number' && Math.abs(value) >= 100 ? String(Math.round(value)) : print(value)

@@ -2,7 +2,7 @@ import { findPlacement, judgeAll } from './assess'
 import { findRestKnockOns, isConceded, type Bench, type Seat } from './bench'
 import type { Judged } from './judge'
 import { isDemand, listDemands, type RawKnockOn } from './knock-ons'
-import type { Candidate } from './rule'
+import type { Candidate, Way } from './rule'
 import type { Scene } from './scene'
 import type { Piece, Place, Placement, Verdict } from './types'
 import { decideVerdict } from './verdict'
@@ -26,11 +26,7 @@ export interface AssessedCandidate {
 }
 
 /** How a candidate is judged, the piece itself left out. */
-export const describeWay = (
-  options: CandidateOptions,
-  quantity: number,
-  mayMultiply = true,
-): Omit<Candidate, 'piece'> => ({
+export const describeWay = (options: CandidateOptions, quantity: number, mayMultiply = true): Way => ({
   quantity,
   asked: options.quantity ?? options.there ?? 1,
   mayMultiply,
@@ -46,19 +42,13 @@ interface JudgedCandidate {
 
 /**
  * Judges one candidate. Where a rule finds that several of it would do, all rules are asked again for so many; if that
- * fails elsewhere (no room), one is judged without that way out. `judgeAs` judges it so many times over.
+ * fails elsewhere (no room), one is judged without that way out.
  */
-export function judgeCandidate(
-  scene: Scene,
-  piece: Piece,
-  options: CandidateOptions = {},
-  judgeAs?: (way: Omit<Candidate, 'piece'>) => readonly Judged[],
-): JudgedCandidate {
+function judgeCandidate(scene: Scene, piece: Piece, options: CandidateOptions = {}): JudgedCandidate {
   const asked = options.quantity ?? 1
   const attempt = (quantity: number, mayMultiply: boolean): JudgedCandidate => {
-    const way = describeWay(options, quantity, mayMultiply)
-    const candidate: Candidate = { piece, ...way }
-    const judged = judgeAs?.(way) ?? judgeAll(scene, candidate)
+    const candidate: Candidate = { piece, ...describeWay(options, quantity, mayMultiply) }
+    const judged = judgeAll(scene, candidate)
     return { candidate, judged, verdict: decideVerdict(judged) }
   }
   const first = attempt(asked, true)

@@ -1,3 +1,4 @@
+import { findIncludedPump } from './mains-budget'
 import { findLast } from './physics/bisect'
 import { tankHeatLoss, tankLossW, type TankHeatLoss } from './physics/heat'
 import { heatCapacityJK } from './physics/seawater'
@@ -15,8 +16,7 @@ const dcShare = 0.5
 
 /** Heat in W that the gear in the water gives it, heaters left out; what states no power counts nothing and is not guessed. */
 export function sumGainW(plan: Plan, items: readonly Item[]): number {
-  const hasPump = items.some((item) => item.piece.kind === 'return-pump')
-  const included = hasPump ? 0 : (plan.tank.includedPump?.powerW ?? 0)
+  const included = findIncludedPump(plan, items)?.powerW ?? 0
   return items.reduce((sum, { piece, quantity }) => {
     if (!inWater.has(piece.kind)) return sum
     const share = readFlag(piece.specs, 'dcControl') ? dcShare : 1
@@ -37,7 +37,8 @@ export const lossAt = (plan: Plan, waterC: number, roomC: number): TankHeatLoss 
   tankHeatLoss(toHeatInput(plan, waterC, roomC))
 
 /** The same, W by ASHRAE's evaporation alone. */
-const lossWAt = (plan: Plan, waterC: number, roomC: number): number => tankLossW(toHeatInput(plan, waterC, roomC))
+export const lossWAt = (plan: Plan, waterC: number, roomC: number): number =>
+  tankLossW(toHeatInput(plan, waterC, roomC))
 
 export interface HeaterNeed {
   /** Loss at the goal in the coldest room less the heat gained, floor 0, W: by ASHRAE's evaporation, and by Shah's. */

@@ -42,6 +42,10 @@ export const pluggedIn: ReadonlySet<string> = new Set([
   'booster-pump',
 ])
 
+/** The pump that came with the tank, until another takes its place. */
+export const findIncludedPump = ({ tank }: Plan, items: readonly Item[]) =>
+  ofKind(items, 'return-pump').length > 0 ? undefined : tank.includedPump
+
 /** Plugs that need an outlet of strip or wall: heaters on a controller's own outlets do not. */
 export function countPlugs(plan: Plan, items: readonly Item[]): Outlets {
   const plugs = sum(
@@ -52,8 +56,8 @@ export function countPlugs(plan: Plan, items: readonly Item[]): Outlets {
     sum(ofKind(items, 'temperature-controller'), 'outlets').total,
     sum(ofKind(items, 'heater'), 'plugs').total,
   )
-  const hasPump = ofKind(items, 'return-pump').length > 0
-  const included = hasPump || !plan.tank.includedPump ? 0 : (plan.tank.includedPump.plugs ?? 1)
+  const pump = findIncludedPump(plan, items)
+  const included = pump ? (pump.plugs ?? 1) : 0
   return {
     used: plugs.total - onControllers + included,
     capacity: countOutlets(plan, items),
@@ -79,8 +83,7 @@ export function sumLoad(plan: Plan, items: readonly Item[]): Load {
     items.filter((item) => pluggedIn.has(item.piece.kind)),
     'powerW',
   )
-  const hasPump = ofKind(items, 'return-pump').length > 0
-  return { watts: watts.total + (hasPump ? 0 : (plan.tank.includedPump?.powerW ?? 0)), unknown: watts.unknown }
+  return { watts: watts.total + (findIncludedPump(plan, items)?.powerW ?? 0), unknown: watts.unknown }
 }
 
 /** Rated and continuous load in W of the weakest strip and the circuit. */

@@ -1,12 +1,13 @@
 import type { Printer } from '../units/print'
 import type { AssessedCandidate } from './candidates'
 import { getRules } from './checks/index'
+import { isOpen, outcomeOf } from './concession'
 import { isDemand, presentKnockOns } from './knock-ons'
 import { presentCautions, presentCheck } from './present'
 import type { Scene } from './scene'
 import { findTurn, type JudgeAnew } from './turns/find-turn'
 import { presentTurn } from './turns/present-turn'
-import type { Answer } from './types'
+import type { Answer, Outcome } from './types'
 import { rateConfidence } from './verdict'
 
 /** The answer in one sentence: what is wrong, what is not known, what must change, or how it fits. */
@@ -15,13 +16,8 @@ function summarise(
   { candidate, judged, verdict, placement, knockOns }: AssessedCandidate,
   words: Printer,
 ): string {
-  const findFirst = (outcome: string) => judged.find((one) => (one.eitherWay ?? one.outcome) === outcome)
-  const decisive =
-    verdict === 'no'
-      ? findFirst('fail')
-      : verdict === 'unknown'
-        ? judged.find((one) => one.outcome === 'nodata' && one.rule.worst === 'fail')
-        : undefined
+  const findFirst = (outcome: Outcome) => judged.find((one) => outcomeOf(one) === outcome)
+  const decisive = verdict === 'no' ? findFirst('fail') : verdict === 'unknown' ? judged.find(isOpen) : undefined
   if (decisive) return presentCheck(decisive, words).message
   const summary = getRules(candidate.piece.kind).summary
   const covered = judged.filter(({ rule }) => summary?.covers.includes(rule.id))
@@ -31,7 +27,9 @@ function summarise(
   if (changed) return presentCheck(changed, words).message
   const demand = knockOns.find(isDemand)
   if (demand) return demand.say(words)
-  return judged[0] ? presentCheck(judged[0], words).message : 'Nothing about it could be checked yet.'
+  // What is not recorded and changes nothing is no way to say that a piece fits.
+  const told = judged.find(({ outcome }) => outcome === 'pass') ?? judged[0]
+  return told ? presentCheck(told, words).message : 'Nothing about it could be checked yet.'
 }
 
 /** An answer in words; with `judgeAnew` also what would turn it. */

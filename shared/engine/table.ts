@@ -29,7 +29,7 @@ const codeOfGlance: Readonly<Record<Exclude<Glance, 'fail'>, number>> = {
 
 function encode(judged: Judged | null): number {
   if (!judged) return codes.nothing | doesNotApply
-  const outcome = judged.eitherWay ?? judged.outcome
+  const outcome = outcomeOf(judged)
   if (outcome === 'fail') return codes.fail
   if (outcome === 'nodata') return judged.rule.worst === 'fail' ? codes.unknown : codes.nothing | mayBeChange
   if (outcome === 'change') return codes.change | (judged.judgement.enough === undefined ? 0 : severalWouldDo)

@@ -1,4 +1,5 @@
 import { defaultPlusMinus, isCloseCall } from './physics/conformance'
+import { outcomeOf } from './concession'
 import type { Judged } from './judge'
 import type { Confidence, Piece, Source, Specs, Verdict } from './types'
 
@@ -6,7 +7,7 @@ export const verdictOrder: readonly Verdict[] = ['fits', 'changes', 'unknown', '
 
 /** The verdict that checks add up to: see "Outcomes and verdicts" on the method page. */
 export function decideVerdict(judged: readonly Judged[]): Verdict {
-  const outcomes = judged.map(({ outcome, eitherWay }) => eitherWay ?? outcome)
+  const outcomes = judged.map(outcomeOf)
   if (outcomes.includes('fail')) return 'no'
   if (judged.some(({ rule }, index) => outcomes[index] === 'nodata' && rule.worst === 'fail')) return 'unknown'
   return outcomes.includes('change') ? 'changes' : 'fits'

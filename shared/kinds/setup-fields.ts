@@ -26,7 +26,7 @@ function expandTank(attribute: Attribute): SetupField[] {
 const own = [
   text('name', 'name of the setup', 80, { role: 'display' }),
   choice('units', 'units', { us: 'inches, gallons, °F', metric: 'millimetres, litres, °C' }, { role: 'display' }),
-  text('country', 'country', 2, {
+  text('country', 'country', 3, {
     role: 'check',
     guide: 'Two letters, such as US or GB; it decides the mains.',
   }),

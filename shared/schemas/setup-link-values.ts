@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { FieldAttribute, MeasureAttribute } from '../kinds/types'
+import { findCountryCode } from '../kinds/countries'
 import { readMeasure } from '../units/read'
 import { findShownUnit } from '../units/convert'
 import type { UnitSystem } from '../units/systems'
@@ -52,6 +53,14 @@ function readBoolean(text: string): LinkValue {
   return { ok: false, detail: 'must be yes or no' }
 }
 
+/** The country that is meant, however it is written. */
+function readCountry(text: string): LinkValue {
+  const code = findCountryCode(text)
+  return code === undefined
+    ? { ok: false, detail: 'must be the two letters of a country, such as US or GB' }
+    : { ok: true, value: code, text: code }
+}
+
 function readByType(
   text: string,
   attribute: FieldAttribute,
@@ -74,7 +83,7 @@ function readByType(
     case 'boolean':
       return readBoolean(text)
     case 'text':
-      return { ok: true, value: text, text }
+      return attribute.key === 'country' ? readCountry(text) : { ok: true, value: text, text }
     case 'texts':
       return { ok: true, value: splitList(text), text }
   }

@@ -1,4 +1,3 @@
-import { findCountryCode } from '../kinds/countries'
 import { findSetupField } from '../kinds/setup-fields'
 import type { FieldAttribute } from '../kinds/types'
 import { limits } from '../limits'
@@ -6,7 +5,7 @@ import { unitSystems, type UnitSystem } from '../units/systems'
 import type { SetupRequest } from './setup'
 import { findItemField, readItemPlace, toItemSpecs } from './setup-link-items'
 import { isSetupKey, numberChambers, sortPaths } from './setup-link-keys'
-import { readLinkValue, spellUnit, type LinkValue } from './setup-link-values'
+import { readLinkValue, spellUnit } from './setup-link-values'
 
 /** A text in a link that could not be read: where it stands, as it was typed, and why not. */
 export interface LinkProblem {
@@ -96,14 +95,6 @@ function toSetup(tree: Tree, system: UnitSystem): SetupRequest {
   } as SetupRequest
 }
 
-/** The country that is meant, however it is written. */
-function readCountry(text: string): LinkValue {
-  const code = findCountryCode(text)
-  return code === undefined
-    ? { ok: false, detail: 'must be the two letters of a country, such as US or GB' }
-    : { ok: true, value: code, text: code }
-}
-
 /** Every text of the link in canonical order and spelling, with what it means. */
 function readEntries(query: LinkQuery, system: UnitSystem) {
   const given = findText(query, typedInKey)
@@ -115,12 +106,7 @@ function readEntries(query: LinkQuery, system: UnitSystem) {
   for (const path of sortPaths([...raw.keys()])) {
     const text = raw.get(path) ?? ''
     const field = findLinkField(path, raw)
-    const read =
-      path === 'country'
-        ? readCountry(text)
-        : field === undefined
-          ? undefined
-          : readLinkValue(text, field, system, typedIn)
+    const read = field === undefined ? undefined : readLinkValue(text, field, system, typedIn)
     // What is out of the question keeps the unit it was meant in too.
     const meant = field?.type === 'measure' ? spellUnit(text, field, typedIn) : text
     if (!read?.ok) raw.set(path, meant)

@@ -1,7 +1,7 @@
 import { useSyncExternalStore } from 'react'
 
 const storageKey = 'stillfits.last-setup'
-/** Longer than any link that the finder writes. */
+/** Longer than any link that is written. */
 const longest = 8_192
 
 /** Storage can be full or forbidden; then the setup is simply not remembered. */
@@ -13,7 +13,7 @@ function attempt<T>(access: () => T): T | null {
   }
 }
 
-/** Remembers, in this browser alone, the setup that somebody last described: as the finder's address spells it. */
+/** Remembers, in this browser alone, the setup that somebody last described: as its link spells it. */
 export function keepLastSetup(query: string): void {
   if (query === '' || query.length > longest) return
   attempt(() => localStorage.setItem(storageKey, query))
@@ -29,7 +29,7 @@ function subscribe(listener: () => void): () => void {
   return () => window.removeEventListener('storage', listener)
 }
 
-/** The setup of the visitor's last finder address; null where there is none, and on the server. */
+/** The setup that the visitor last described; null where there is none, and on the server. */
 export function useLastSetup(): string | null {
   return useSyncExternalStore(subscribe, readLastSetup, () => null)
 }

@@ -17,6 +17,19 @@ export class ApiError extends Error {
   }
 }
 
+/** What was asked contradicts itself or names what is not there: as much an answer as any other, every part of it named. */
+export interface Refused {
+  readonly refused: ApiError['errors']
+}
+
+export const isRefused = (answer: object): answer is Refused => 'refused' in answer
+
+/** The refusal that an error is; any other error goes on. */
+export function takeRefusal(error: unknown): Refused {
+  if (error instanceof ApiError && error.status === 422) return { refused: error.errors }
+  throw error
+}
+
 /** Away for the moment: worth asking again without being told to. */
 export function isAway(error: unknown): boolean {
   return error instanceof ApiError && (error.status === 0 || error.status === 502 || error.status === 503)

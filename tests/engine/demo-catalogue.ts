@@ -5,7 +5,8 @@ import { seedPieces } from '../../seeds/gear/index'
 import { createSlug } from '../../server/modules/gear/slug'
 import { listStates } from '../seeds/merge'
 
-const demoPieces: readonly Piece[] = seedPieces.map((piece) => {
+/** The newest state of every piece of the demo catalogue, as the engine reads it. */
+export const demoPieces: readonly Piece[] = seedPieces.map((piece) => {
   const { slug, kind, brand, model } = piece
   const specs = Object.fromEntries(
     Object.entries(listStates(piece).at(-1) ?? {}).map(([key, { evidence: _, ...value }]) => [key, value]),
@@ -20,7 +21,7 @@ export const catalogueOf = (...pieces: readonly Piece[]): Catalogue =>
     Piece[]
   >
 
-/** The newest state of every piece of the demo catalogue, as the engine reads it. */
+/** The same by kind. */
 export const demoCatalogue = catalogueOf(...demoPieces)
 
 export function findDemo(slug: string): Piece {

@@ -77,7 +77,7 @@ function judgeSpace(scene: Scene, { piece, quantity, place }: Candidate): Judgem
     return {
       outcome: 'pass',
       probability: () => Math.min(...shares.map((share) => share.stand.probability())),
-      settle: shares[0].stand.settle,
+      settle: () => shares.toSorted((a, b) => a.stand.probability() - b.stand.probability())[0]?.stand.settle(),
       placement: shares[0].stand.placement,
       rests: () => [...new Set(shares.flatMap((share) => listSizes(share.stand)))],
       say: describeShares(shares),

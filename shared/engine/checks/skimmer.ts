@@ -53,9 +53,7 @@ function judgeSpace(scene: Scene, candidate: Candidate): Judgement {
 
 /** What could bring another depth; of several chambers also what could make it another one's. */
 const listDepthTurns = ({ plan }: Scene, basin: Basin): readonly string[] =>
-  listBodyTurns(plan, basin).filter(
-    (path) => plan.tank.chambers.length > 1 || !/(length|width)Mm$/.test(path) || path.startsWith('tank.outer'),
-  )
+  listBodyTurns(plan, basin).filter((path) => plan.tank.chambers.length > 1 || !/\.(length|width)Mm$/.test(path))
 
 function judgeDepth(scene: Scene, candidate: Candidate): Judgement {
   const { specs } = candidate.piece

@@ -1,4 +1,4 @@
-import { findHeaterNeed, lossAt } from '../heat-budget'
+import { findHeaterNeed, findStuckOn, lossWAt } from '../heat-budget'
 import { heatCapacityJK } from '../physics/seawater'
 import { stuckOn } from '../physics/stuck-on'
 import { once, type Scene } from '../scene'
@@ -27,7 +27,7 @@ export function drawHeatDay(scene: Scene, heaterW: number | undefined): HeatDayD
   const { coldestC, warmestC } = plan.room
   const capacityJK = heatCapacityJK(plan.tank.waterL, salinityPpt, goalC)
   const follow = (inputW: number, roomC: number): readonly HourlyPoint[] => {
-    const lossW = (waterC: number) => lossAt(plan, waterC, roomC).totalW
+    const lossW = (waterC: number) => lossWAt(plan, waterC, roomC)
     return readHourly(stuckOn({ heatCapacityJK: capacityJK, inputW, lossW }, goalC).series)
   }
   const off = follow(gainW, coldestC)
@@ -40,6 +40,6 @@ export function drawHeatDay(scene: Scene, heaterW: number | undefined): HeatDayD
     held: heaterW >= needW ? flat : follow(heaterW + gainW, coldestC),
     duty: needW / heaterW,
     off,
-    stuck: follow(heaterW + gainW, warmestC),
+    stuck: readHourly(findStuckOn(scene, heaterW).series),
   }
 }

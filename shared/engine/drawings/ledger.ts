@@ -1,4 +1,4 @@
-import { countPlugs, findLimits, pluggedIn, sumLoad } from '../mains-budget'
+import { countPlugs, findIncludedPump, findLimits, pluggedIn, sumLoad } from '../mains-budget'
 import { resolve } from '../setup/resolve'
 import type { Item, Setup } from '../types'
 import { readNumber } from '../values'
@@ -47,9 +47,8 @@ export function drawLedger(setup: Setup): LedgerDrawing {
   const { items } = plan
   const { used, capacity } = countPlugs(plan, items)
   const { continuousW, ratedW } = findLimits(plan, items)
-  const { includedPump } = plan.tank
-  const isIncludedUsed = includedPump !== undefined && !items.some(({ piece }) => piece.kind === 'return-pump')
-  const included: readonly LedgerRow[] = isIncludedUsed
+  const includedPump = findIncludedPump(plan, items)
+  const included: readonly LedgerRow[] = includedPump
     ? [
         {
           itemId: 'tank',

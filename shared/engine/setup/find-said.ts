@@ -7,12 +7,6 @@ export function findSaidNumber({ setup, assumed }: Plan, path: string): number |
   return typeof value === 'number' ? value : undefined
 }
 
-/** The choice at a dotted setup path, said or assumed. */
-export function findSaidChoice({ setup, assumed }: Plan, path: string): string | undefined {
-  const value = assumed.get(path) ?? findGiven(setup, path.split('.'))
-  return typeof value === 'string' ? value : undefined
-}
-
 function findGiven(setup: Plan['setup'], [section, key = '', ...rest]: readonly string[]): unknown {
   const { specs } = setup.tank
   if (section === 'tank' && rest.length === 0) return specs[key]?.value

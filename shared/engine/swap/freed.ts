@@ -18,15 +18,18 @@ function assessWithout({ before, kind, gone }: Bench, item: Item): State {
   return describeState(assessAll(plan, items), tank)
 }
 
-/** Items that something needed before, and nothing needs with the replacement: a controller for a heater that has its own. */
-export function findFreed(outfit: Outfit, before: State, after: State): readonly RawKnockOn[] {
-  const { bench, items } = outfit
-  const helpers = bench.scene.others.filter(({ piece }) => isHelperKind(piece.kind))
-  return helpers.flatMap((item): RawKnockOn[] => {
-    if (!isWorse(assessWithout(bench, item), before)) return []
+/** Items of the setup as it was, of kinds that serve others, without which something would have been asked for. */
+export const listNeeded = (bench: Bench, before: State): readonly Item[] =>
+  bench.scene.others
+    .filter(({ piece }) => isHelperKind(piece.kind))
+    .filter((item) => isWorse(assessWithout(bench, item), before))
+
+/** Of the items that something needed before, those that nothing needs with the replacement: a controller for a heater that has its own. */
+export function findFreed(outfit: Outfit, needed: readonly Item[], after: State): readonly RawKnockOn[] {
+  return needed.flatMap((item): RawKnockOn[] => {
     const without = changeItems(
       outfit,
-      items.filter(({ id }) => id !== item.id),
+      outfit.items.filter(({ id }) => id !== item.id),
     )
     if (isWorse(assessOutfit(without), after)) return []
     return [

@@ -7,10 +7,10 @@ import { presentAnswer } from '../present-answer'
 import type { Candidate } from '../rule'
 import { sweep, type SweepOptions } from '../sweep'
 import type { JudgeAnew } from '../turns/find-turn'
-import type { FitOptions, Piece, Setup } from '../types'
+import type { FitOptions, Item, Piece, Setup } from '../types'
 import { findOptions, groupNeeds, type Catalogue } from './add-ons'
 import { findDifferences } from './differences'
-import { findFreed } from './freed'
+import { findFreed, listNeeded } from './freed'
 import { assessBefore, assessOutfit, createOutfit, findNew, type Outfit, type State } from './outfit'
 import { findPackCount } from './quantity'
 import type { AddOn, GearCount, Gone, Replacement, ReplacementsResult } from './types'
@@ -42,6 +42,8 @@ interface Told {
   readonly bench: Bench
   readonly gone: GonePiece
   readonly before: State
+  /** What served something before; asked of the replacement only whether it still does. */
+  readonly needed: readonly Item[]
   readonly catalogue: Catalogue
   readonly words: Printer
 }
@@ -65,7 +67,7 @@ function judgeInChanged({ setup, gone }: Told, { piece, quantity }: Candidate): 
 }
 
 function presentReplacement(assessed: AssessedCandidate, told: Told, isJoint: boolean): Replacement {
-  const { bench, gone, before, words } = told
+  const { bench, gone, needed, words } = told
   const { scene, kind } = bench
   const { candidate, knockOns, verdict } = assessed
   const judgeAnew = isJoint ? undefined : judgeInChanged(told, candidate)
@@ -74,7 +76,7 @@ function presentReplacement(assessed: AssessedCandidate, told: Told, isJoint: bo
     return { ...presentAnswer(scene, assessed, words, judgeAnew), addOns: [], differences }
   const outfit = createOutfit(bench, candidate)
   const after = assessOutfit(outfit)
-  const all = [...knockOns, ...findFreed(outfit, before, after)]
+  const all = [...knockOns, ...findFreed(outfit, needed, after)]
   return {
     ...presentAnswer(scene, { ...assessed, knockOns: all }, words, judgeAnew),
     addOns: findAddOns(outfit, after, told),
@@ -107,7 +109,8 @@ export function replacements(
   const swept = sweep(bench, pieces, describeSweep(gone))
   const findRest = (candidate: Candidate) => findRestChanges(bench, candidate)
   const { found, ...listed } = listAnswers(swept, pieces, options, findRest, words)
-  const told: Told = { setup, bench, gone, before: assessBefore(bench), catalogue, words }
+  const before = assessBefore(bench)
+  const told: Told = { setup, bench, gone, before, needed: listNeeded(bench, before), catalogue, words }
   const answers = found.map(({ assessed, pieces: joined }) => {
     const answer = presentReplacement(assessed, told, joined !== undefined)
     return joined ? { ...answer, ...nameTogether(answer, joined) } : answer

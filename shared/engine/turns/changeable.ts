@@ -98,7 +98,11 @@ export const changeables: readonly Changeable[] = [
   stated('goals.rockKg', (amount, isMore) => `there were ${least(isMore)} ${amount} of rock`, 'kg'),
   stated('goals.turnoverPerHour.0', (amount) => `a turnover of ${amount} were enough`, '/h', 'less'),
   stated('goals.turnoverPerHour.1', (amount) => `a turnover of up to ${amount} were wanted`, '/h', 'more'),
-  stated('goals.switchedOutlets', (amount) => `you wanted no more than ${amount} switched outlets`, 'count', 'less'),
+  {
+    path: 'goals.switchedOutlets',
+    only: 'less',
+    say: ({ to }) => `you wanted no more than ${countOf(to, 'switched outlet')}`,
+  },
   { path: 'mains.outlets', only: 'more', say: ({ to }) => `${countOf(to, 'wall outlet')} were free` },
   stated('mains.circuitA', (amount) => `the circuit were rated for at least ${amount}`, 'A', 'more'),
   stated('water.feedKPa', (amount) => `the tap gave at least ${amount}`, 'kPa', 'more'),

@@ -2,7 +2,9 @@ import type { UnitSystem } from '../../units/systems'
 import { judgeAll } from '../assess'
 import type { AssessedCandidate } from '../candidates'
 import { getRules } from '../checks/index'
+import { outcomeOf } from '../concession'
 import { findOutcome } from '../judge'
+import { isDemand } from '../knock-ons'
 import type { Candidate, Rule } from '../rule'
 import { createScene, type Scene } from '../scene'
 import { findSide } from '../sides'
@@ -140,11 +142,11 @@ function weigh({ knob: { attribute, from }, to }: FoundTurn): number {
   return Math.abs(to - from) / Math.max(attribute.unit === 'C' ? high - low : Math.abs(from), 1e-9)
 }
 
-/** Whether there is a verdict to turn: a change that asks for something else to be bought or that states its condition is not. */
+/** Whether there is a verdict to turn: what the rest asks for as well, or a change that states its condition, is not. */
 function findWhatFails({ verdict, judged, knockOns }: AssessedCandidate) {
   if (verdict === 'no') return judged.filter((one) => one.outcome === 'fail' || one.eitherWay === 'fail')
-  const changes = judged.filter((one) => (one.eitherWay ?? one.outcome) === 'change')
-  const isOwn = verdict === 'changes' && knockOns.length === changes.length
+  const changes = judged.filter((one) => outcomeOf(one) === 'change')
+  const isOwn = verdict === 'changes' && knockOns.filter(isDemand).length === changes.length
   return isOwn && changes.every(({ condition }) => !condition) ? changes : []
 }
 

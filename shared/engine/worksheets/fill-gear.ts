@@ -5,7 +5,7 @@ import { describePlumbing } from '../checks/pump-flow'
 import { choosePumpBasin } from '../checks/return-pump'
 import { chooseStand } from '../checks/rod-space'
 import { sumGainW, sumHeaterW } from '../heat-budget'
-import { pluggedIn } from '../mains-budget'
+import { findIncludedPump, pluggedIn } from '../mains-budget'
 import type { CurvePoint } from '../physics/pump'
 import { findBasins, type Basin } from '../setup/places'
 import { readGroups, readMeasure, readNumber, readText } from '../values'
@@ -81,9 +81,8 @@ export function fillPump({ scene, subject }: FillInput): Filled {
 }
 
 export function fillPower({ scene, items }: FillInput): Filled {
-  const { mains, tank } = scene.plan
-  const hasPump = items.some(({ piece }) => piece.kind === 'return-pump')
-  const included = hasPump ? undefined : tank.includedPump
+  const { mains } = scene.plan
+  const included = findIncludedPump(scene.plan, items)
   const loads = [
     ...items
       .filter(({ piece }) => pluggedIn.has(piece.kind))

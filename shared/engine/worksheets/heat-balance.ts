@@ -1,6 +1,5 @@
 import { findHeaterNeed, findStuckOn, findUnheatedC, lossAt } from '../heat-budget'
 import { heatCapacityJK } from '../physics/seawater'
-import { evaporationLPerDay } from '../physics/heat'
 import { createScene, once, type Scene } from '../scene'
 import type { Plan } from '../setup/plan'
 import { thresholds } from '../thresholds'
@@ -88,8 +87,8 @@ export const heatBalance: Worksheet = {
     { key: 'needUpperW', label: 'With a reserve, by the upper figure', unit: 'W' },
     { key: 'duty', label: 'Heater runs, then', unit: 'fraction', none: 'give its power' },
     { key: 'stuckOnC', label: 'Stuck on in the warmest room, the water goes to', unit: 'C', none: 'give its power' },
-    { key: 'hoursTo30C', label: 'Stuck on: hours to 30 °C', unit: 'h', none: 'never' },
-    { key: 'hoursTo34C', label: 'Stuck on: hours to 34 °C', unit: 'h', none: 'never' },
+    { key: 'hoursTo30C', label: 'Stuck on: hours to 30 °C', unit: 'h', none: 'not with the power given' },
+    { key: 'hoursTo34C', label: 'Stuck on: hours to 34 °C', unit: 'h', none: 'not with the power given' },
     { key: 'lossW', label: 'Heat lost', unit: 'W' },
     { key: 'lossUpperW', label: 'Heat lost, upper figure', unit: 'W' },
     { key: 'gainW', label: 'Given by other gear', unit: 'W' },
@@ -132,13 +131,7 @@ export const heatBalance: Worksheet = {
         stuckOnC: stuck?.equilibriumC ?? null,
         hoursTo30C: stuck?.hoursTo30C ?? null,
         hoursTo34C: stuck?.hoursTo34C ?? null,
-        evaporationLPerDay: evaporationLPerDay({
-          boxes: tank.boxes,
-          lid: tank.lid,
-          waterC: goals.temperatureC,
-          roomC: room.coldestC,
-          relativeHumidity: room.relativeHumidity,
-        }),
+        evaporationLPerDay: loss.evaporationLPerDay,
         series: stuck === null ? [] : readHourly(stuck.series).map(({ hour, waterC }) => ({ hour, tempC: waterC })),
       },
       steps: [

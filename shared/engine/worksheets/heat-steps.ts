@@ -34,6 +34,10 @@ export function listLossSteps({ plan, loss }: Terms): readonly Step[] {
     room.relativeHumidity * saturationPressureKPa(room.coldestC),
   ]
   const latent = latentHeatKJKg(goals.temperatureC)
+  // A lid lies on the tank alone: a sump is open.
+  const sump = others.length > 0 ? ` + ${put(surfaceM2 - floorM2)} m²` : ''
+  const evaporating =
+    tank.lid === 'solid' ? `(${put(evaporationShareUnder.solid)} × ${put(floorM2)} m²${sump})` : `${put(surfaceM2)} m²`
   return [
     {
       title: 'Through the sides',
@@ -70,10 +74,7 @@ export function listLossSteps({ plan, loss }: Terms): readonly Step[] {
     {
       title: 'From the surface, by evaporation',
       formula: 'water per hour × heat of evaporation ÷ 3.6',
-      text:
-        tank.lid === 'solid'
-          ? `${put(surfaceM2)} m², ${put(evaporationShareUnder.solid)} of it under the lid, × ${put(evaporation)} kg/(m² h) × ${put(latent)} kJ/kg ÷ 3.6`
-          : `${put(surfaceM2)} m² × ${put(evaporation)} kg/(m² h) × ${put(latent)} kJ/kg ÷ 3.6`,
+      text: `${evaporating} × ${put(evaporation)} kg/(m² h) × ${put(latent)} kJ/kg ÷ 3.6`,
       value: loss.evaporationW,
       unit: 'W',
     },

@@ -109,7 +109,7 @@ export const seawater: Worksheet = {
         },
       ],
       cautions: [
-        'The same water spans 1.0234 to 1.0269 by convention of specific gravity alone: say which one a number is in.',
+        'Water of 35 ppt spans 1.0234 to 1.0269 by convention of specific gravity alone: say which one a number is in.',
         'A sugar scale squeezes 34 to 36 ppt into a quarter of a degree: too coarse to keep sea water by.',
         ...(t > 30 ? [`The refractive index is extrapolated above ${words.temperature(30)}.`] : []),
       ],

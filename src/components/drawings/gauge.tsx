@@ -57,7 +57,8 @@ export function Gauge(props: GaugeProps) {
   const words = [
     `${label}: ${valueText}`,
     limitWords && `limit ${limitWords}`,
-    verdictWords[outcomeVerdicts[outcome]].toLowerCase(),
+    // Where nothing limits it, nothing was judged.
+    (limit !== null || outcome !== 'pass') && verdictWords[outcomeVerdicts[outcome]].toLowerCase(),
     note,
   ]
   return (

@@ -14,7 +14,7 @@ const axisPx = 30
 const labelPx = 12
 
 /** The drawing in words. */
-export function describeHeat(drawing: HeatDrawing, printer: Printer): string {
+function describeHeat(drawing: HeatDrawing, printer: Printer): string {
   const { points, heaterW, heldC, goalC, coldestC, warmestC, unheatedC, stuckOnC } = drawing
   const [cold] = points
   const need = cold ? printer.pair([cold.needW, cold.needUpperW], 'W') : ''

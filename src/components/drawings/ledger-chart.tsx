@@ -82,7 +82,7 @@ export function LedgerChart({ ledger, printer, nameOf }: LedgerChartProps) {
                       width={share(row.watts)}
                       y="1"
                       height="10"
-                      className={from + row.watts > continuousW ? 'fill-no' : 'fill-action'}
+                      className={from + row.watts > continuousW ? 'fill-changes' : 'fill-action'}
                     />
                   )}
                   <line
@@ -106,10 +106,10 @@ export function LedgerChart({ ledger, printer, nameOf }: LedgerChartProps) {
             <th scope="row" className="text-left">
               Together
             </th>
-            <td className={plugs > outlets ? 'text-no' : undefined}>
+            <td className={plugs > outlets ? 'text-changes' : undefined}>
               {countOf(plugs, 'plug')} for {countOf(outlets, 'outlet')}
             </td>
-            <td className={`col-span-2 text-right font-mono ${isOver ? 'text-no' : ''}`}>
+            <td className={`col-span-2 text-right font-mono ${isOver ? 'text-changes' : ''}`}>
               {printer.power(watts)} of {printer.power(continuousW)}
             </td>
           </tr>

@@ -27,7 +27,7 @@ const outcomeWords = {
 } as const
 
 /** The drawing in words: each piece with its sides, and whether there is room for all. */
-export function describePacking(chamber: PackedChamber, printer: Printer, nameOf: (id: string) => string): string {
+function describePacking(chamber: PackedChamber, printer: Printer, nameOf: (id: string) => string): string {
   const { name, lengthMm, widthMm, waterDepthMm, pieces, outcome, unsized } = chamber
   const list = pieces.map(({ itemId, lengthMm: long, widthMm: wide, heightMm }) => {
     const sides =
@@ -60,7 +60,7 @@ export function PackingViews({ chamber, printer, nameOf }: PackingViewsProps) {
   const gridMm = gridStepMm(pxPerMm, printer.system)
   const order = [...new Set(pieces.map(({ itemId }) => itemId))]
   const letter = (itemId: string) => letterOf(order.indexOf(itemId))
-  const stroke = outcome === 'fits' ? 'stroke-ink' : 'stroke-no'
+  const stroke = { fits: 'stroke-ink', no: 'stroke-no', unknown: 'stroke-unknown' }[outcome]
   return (
     <DrawingSheet
       frame={frame}
@@ -89,7 +89,11 @@ export function PackingViews({ chamber, printer, nameOf }: PackingViewsProps) {
               {nameOf(itemId)}: not drawn, nobody recorded its size
             </li>
           ))}
-          {outcome !== 'fits' && <li className="font-semibold text-no">{outcomeWords[outcome]}</li>}
+          {outcome !== 'fits' && (
+            <li className={`font-semibold ${outcome === 'no' ? 'text-no' : 'text-unknown'}`}>
+              {outcomeWords[outcome]}
+            </li>
+          )}
           {order.length + unsized.length === 0 && <li className="text-ink-soft">Nothing stands in it.</li>}
         </ul>
       }

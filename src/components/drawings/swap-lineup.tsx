@@ -24,7 +24,7 @@ export const canLineUp = (kind: KindKey, pieces: readonly LinedUp[]): boolean =>
   pieces.some(({ specs }) => frontOf(kind, specs).lengthMm !== null)
 
 /** The drawing in words. */
-export function describeLineup({ kind, pieces, surrounding, printer }: SwapLineupProps): string {
+function describeLineup({ kind, pieces, surrounding, printer }: SwapLineupProps): string {
   const lines = pieces.map(({ letter, name, specs, verdict }) => {
     const { lengthMm, heightMm } = frontOf(kind, specs)
     const sides = [lengthMm, heightMm].map((side) => (side === null ? 'not recorded' : printer.length(side)))

@@ -2,14 +2,7 @@ import { queryOptions } from '@tanstack/react-query'
 import type { Report } from '#shared/engine/types'
 import type { SetupRequest } from '#shared/schemas/setup'
 import type { ApiClient } from '../../lib/api-client'
-import { ApiError } from '../../lib/problem'
-
-/** The setup contradicts itself or names what is not there: as much an answer as any other, every part of it named. */
-export interface Refused {
-  readonly refused: ApiError['errors']
-}
-
-export const isRefused = (answer: object): answer is Refused => 'refused' in answer
+import { takeRefusal, type Refused } from '../../lib/problem'
 
 async function fetchReport(api: ApiClient, setup: SetupRequest, signal: AbortSignal): Promise<Report | Refused> {
   try {
@@ -19,8 +12,7 @@ async function fetchReport(api: ApiClient, setup: SetupRequest, signal: AbortSig
     ])
     return reportSchema.parse(answer) as Report
   } catch (error) {
-    if (error instanceof ApiError && error.status === 422) return { refused: error.errors }
-    throw error
+    return takeRefusal(error)
   }
 }
 

@@ -4,7 +4,7 @@ import type { App } from '../../lib/app-context'
 import { throwFailure } from '../../lib/loading'
 import { readingQuery } from './api/ask'
 import { fitCheckQuery } from './api/fit-check'
-import { isRefusal } from './api/fit'
+import { isRefused } from '../../lib/problem'
 import { answersQuery, canAsk } from './api/requests'
 import { gearEntryQuery } from '../../components/setup/gear-entry'
 import { writeFinderState } from './link/finder-state'
@@ -29,9 +29,9 @@ function startQueries({ api, queryClient, preferences }: App, visit: Visit): Pro
   ]
 }
 
-function isRefused({ api, queryClient }: App, visit: Visit): boolean {
+function wasRefused({ api, queryClient }: App, visit: Visit): boolean {
   const first = queryClient.getQueryData(answersQuery(api, visit, 'fits').queryKey)?.pages[0]
-  return first !== undefined && isRefusal(first)
+  return first !== undefined && isRefused(first)
 }
 
 /** The address that a question leads to. A piece that it names is lit, which takes the catalogue to tell. */
@@ -60,5 +60,5 @@ export async function loadFinder(app: App, url: URL, path: string): Promise<unkn
     return null
   }
   await Promise.all(started).catch(throwFailure)
-  return isRefused(app, visit) || visit.problems.length > 0 ? data(null, { status: 422 }) : null
+  return wasRefused(app, visit) || visit.problems.length > 0 ? data(null, { status: 422 }) : null
 }

@@ -1,6 +1,7 @@
 import { data, redirect } from 'react-router-dom'
 import { readSetupVisit } from '../../components/setup/read-setup-visit'
-import { isRefused, reportQuery } from '../../components/setup/report-query'
+import { reportQuery } from '../../components/setup/report-query'
+import { isRefused } from '../../lib/problem'
 import { writeSetupHref } from '../../components/setup/setup-href'
 import { paths } from '../../config/paths'
 import type { App } from '../../lib/app-context'
@@ -31,6 +32,11 @@ export async function loadReport(app: App, url: URL): Promise<unknown> {
   if (!canReport(visit)) {
     await names
     return data(null, { status: 422 })
+  }
+  if (!app.isServer) {
+    // The page itself says what went wrong, and keeps the setup in sight.
+    await Promise.all([app.queryClient.prefetchQuery(reportQuery(app.api, visit.setup)), names])
+    return null
   }
   const [report] = await Promise.all([requireData(app, reportQuery(app.api, visit.setup)), names])
   return isRefused(report) ? data(null, { status: 422 }) : null

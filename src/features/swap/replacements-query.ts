@@ -1,20 +1,13 @@
 import { queryOptions } from '@tanstack/react-query'
 import type { ReplacementsAnswer, ReplacementsRequest } from '#shared/schemas/replacements'
 import type { ApiClient } from '../../lib/api-client'
-import { ApiError } from '../../lib/problem'
-
-/** There is no such piece in the setup, or the setup cannot be judged. */
-export interface Unanswered {
-  readonly refused: ApiError['errors']
-}
-
-export const isUnanswered = (answer: object): answer is Unanswered => 'refused' in answer
+import { takeRefusal, type Refused } from '../../lib/problem'
 
 async function fetchReplacements(
   api: ApiClient,
   request: ReplacementsRequest,
   signal: AbortSignal,
-): Promise<ReplacementsAnswer | Unanswered> {
+): Promise<ReplacementsAnswer | Refused> {
   try {
     const [answer, { replacementsSchema }] = await Promise.all([
       api.post('/replacements', request, signal),
@@ -22,8 +15,7 @@ async function fetchReplacements(
     ])
     return replacementsSchema.parse(answer) as ReplacementsAnswer
   } catch (error) {
-    if (error instanceof ApiError && error.status === 422) return { refused: error.errors }
-    throw error
+    return takeRefusal(error)
   }
 }
 

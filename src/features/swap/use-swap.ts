@@ -16,12 +16,13 @@ import { useApp, usePreferences } from '../../lib/app-context'
 import { usePrinter } from '../../lib/use-printer'
 import { writePutInHref } from './model/put-in'
 import { readSwapVisit, type SwapVisit } from './read-swap-visit'
-import { isUnanswered, replacementsQuery, type Unanswered } from './replacements-query'
+import { isRefused, type Refused } from '../../lib/problem'
+import { replacementsQuery } from './replacements-query'
 
 export interface Swap {
   readonly visit: SwapVisit
   readonly found: ReplacementsAnswer | null
-  readonly unanswered: Unanswered | null
+  readonly unanswered: Refused | null
   readonly error: Error | null
   readonly retry: () => void
   readonly printer: Printer
@@ -36,8 +37,8 @@ export interface Swap {
 }
 
 /** What was found for another piece must not be put in this one's place while the page waits. */
-const isFor = (answer: ReplacementsAnswer | Unanswered, itemId: string): boolean =>
-  !isUnanswered(answer) && answer.gone.id === itemId
+const isFor = (answer: ReplacementsAnswer | Refused, itemId: string): boolean =>
+  !isRefused(answer) && answer.gone.id === itemId
 
 /** The swap page's state is its address; this reads it, and what was found for it. */
 export function useSwap(): Swap {
@@ -58,8 +59,8 @@ export function useSwap(): Swap {
   const answer = query.data
   return {
     visit,
-    found: answer && !isUnanswered(answer) ? answer : null,
-    unanswered: answer && isUnanswered(answer) ? answer : null,
+    found: answer && !isRefused(answer) ? answer : null,
+    unanswered: answer && isRefused(answer) ? answer : null,
     error: query.error,
     retry: () => void query.refetch(),
     printer,

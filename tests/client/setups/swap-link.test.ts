@@ -64,6 +64,11 @@ describe('a piece put in the place of another', () => {
     })
   })
 
+  it('gives a tank its chambers again, and what stood in them its place', () => {
+    const swapped = replaceItem(raw, 'tank', 'tank', 'other-tank', 1)
+    expect(applyUndo(swapped, readUndo(writeUndo(raw, 'tank')!)!)).toEqual(raw)
+  })
+
   it('undoes nothing where the address is not what it wrote', () => {
     expect(readUndo(null)).toBeNull()
     expect(readUndo('heater')).toBeNull()

@@ -276,3 +276,17 @@ describe('thermostat', () => {
     })
   })
 })
+
+describe('the sentence that sums a heater up', () => {
+  const summary = (values: Readonly<Record<string, unknown>>) => fitCheck(wholeSetup(), heater(values)).summary
+
+  it('names the number that the verdict turns on, not another that is missing too', () => {
+    expect(fitCheck(wholeSetup(), heater({ diameterMm: undefined, powerW: undefined })).verdict).toBe('unknown')
+    expect(summary({ diameterMm: undefined, powerW: undefined })).toMatch(/power/)
+  })
+
+  it('tells how it fits, where what is missing changes nothing', () => {
+    expect(fitCheck(wholeSetup(), heater({ diameterMm: undefined })).verdict).toBe('fits')
+    expect(summary({ diameterMm: undefined })).not.toMatch(/Nobody has recorded/)
+  })
+})

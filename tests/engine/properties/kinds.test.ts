@@ -12,11 +12,9 @@ import type { Item, Outcome, Piece, Setup } from '#shared/engine/types'
 import { findSetupField } from '#shared/kinds/setup-fields'
 import { kindKeys, type KindKey } from '#shared/kinds/index'
 import { createPrinter } from '#shared/units/print'
-import { createSlug } from '../../../server/modules/gear/slug'
-import { seedPieces } from '../../../seeds/gear/index'
-import { listStates } from '../../seeds/merge'
 import { anySetup, pieceOf } from '../arbitraries'
 import { item, piece, sceneFor, wholeSetup } from '../build'
+import { demoPieces } from '../demo-catalogue'
 
 const rank: Readonly<Record<Outcome, number>> = { pass: 0, change: 1, nodata: 2, fail: 3 }
 const kinds = kindKeys.filter(
@@ -293,12 +291,7 @@ describe('more room', () => {
 })
 
 describe('the demo catalogue', () => {
-  const catalogue = seedPieces.map((seed): Piece => {
-    const specs = Object.entries(listStates(seed).at(-1) ?? {}).map(([key, { evidence: _, ...value }]) => [key, value])
-    const slug = seed.slug ?? createSlug(seed.brand, seed.model)
-    return { kind: seed.kind, specs: Object.fromEntries(specs), gear: { slug, brand: seed.brand, model: seed.model } }
-  })
-  const of = (kind: KindKey) => catalogue.filter((one) => one.kind === kind)
+  const of = (kind: KindKey) => demoPieces.filter((one) => one.kind === kind)
   const there = [
     ...(['return-pump', 'sand', 'scraper', 'ro-unit', 'light'] as const).map((kind) =>
       item(kind, of(kind)[1] ?? piece(kind, {})),

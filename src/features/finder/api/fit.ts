@@ -2,16 +2,9 @@ import { infiniteQueryOptions } from '@tanstack/react-query'
 import type { FitAnswer } from '#shared/schemas/answer'
 import type { FitRequest } from '#shared/schemas/fit'
 import type { ApiClient } from '../../../lib/api-client'
-import { ApiError } from '../../../lib/problem'
+import { isRefused, takeRefusal, type Refused } from '../../../lib/problem'
 
-/** The setup contradicts itself: as much an answer as any other, with every part of it named. */
-export interface Refusal {
-  readonly refused: readonly { readonly pointer: string; readonly detail: string }[]
-}
-
-export type FitPage = FitAnswer | Refusal
-
-export const isRefusal = (page: FitPage): page is Refusal => 'refused' in page
+export type FitPage = FitAnswer | Refused
 
 /** The schema is fetched beside the answer, so that it does not weigh on the first page. */
 async function fetchFit(api: ApiClient, request: FitRequest, signal: AbortSignal): Promise<FitPage> {
@@ -22,8 +15,7 @@ async function fetchFit(api: ApiClient, request: FitRequest, signal: AbortSignal
     ])
     return fitResultSchema.parse(answer) as FitAnswer
   } catch (error) {
-    if (error instanceof ApiError && error.status === 422) return { refused: error.errors }
-    throw error
+    return takeRefusal(error)
   }
 }
 
@@ -37,5 +29,5 @@ export const fitPagesQuery = (api: ApiClient, request: FitRequest, from: string 
       return fetchFit(api, { ...request, ...place, scales: isFirst && request.scales === true }, signal)
     },
     initialPageParam: from,
-    getNextPageParam: (page) => (isRefusal(page) ? null : page.next),
+    getNextPageParam: (page) => (isRefused(page) ? null : page.next),
   })

@@ -1,13 +1,13 @@
 import { labelSetupPath } from '#shared/engine/assumptions'
 import { ErrorSummary } from '../../../components/ui/error-summary'
-import type { Refusal } from '../api/fit'
+import type { Refused } from '../../../lib/problem'
 import type { Finder } from '../hooks/use-finder'
 import { fieldId } from '../../../components/setup/field-groups'
 
 const toPath = (pointer: string): string => pointer.replace(/^#\/(setup\/)?/, '').replaceAll('/', '.')
 
 /** The setup contradicts itself: which measures, and what about them. */
-export function RefusalNotice({ refusal, finder }: { readonly refusal: Refusal; readonly finder: Finder }) {
+export function RefusalNotice({ refusal, finder }: { readonly refusal: Refused; readonly finder: Finder }) {
   return (
     <ErrorSummary
       title="These measures cannot all be true, so nothing was judged"

@@ -2,7 +2,8 @@ import { useInfiniteQuery } from '@tanstack/react-query'
 import type { Answer, Verdict } from '#shared/engine/types'
 import type { FitAnswer } from '#shared/schemas/answer'
 import { useApp } from '../../../lib/app-context'
-import { isRefusal, type FitPage, type Refusal } from '../api/fit'
+import { isRefused, type Refused } from '../../../lib/problem'
+import type { FitPage } from '../api/fit'
 import { answersQuery, canAsk } from '../api/requests'
 import type { Visit } from '../link/read-visit'
 
@@ -10,7 +11,7 @@ export interface Answers {
   readonly answers: readonly Answer[]
   /** Counts, reasons and scales come with the first page. */
   readonly first: FitAnswer | undefined
-  readonly refusal: Refusal | undefined
+  readonly refusal: Refused | undefined
   readonly isPending: boolean
   /** What is shown belongs to the setup before the last change. */
   readonly isStale: boolean
@@ -21,7 +22,7 @@ export interface Answers {
   readonly retry: () => void
 }
 
-const isFit = (page: FitPage): page is FitAnswer => !isRefusal(page)
+const isFit = (page: FitPage): page is FitAnswer => !isRefused(page)
 
 /** The answers of one verdict. While a change is being answered the earlier ones of the same kind stay. */
 export function useAnswers(visit: Visit, verdict: Verdict, isWanted = true): Answers {
@@ -40,7 +41,7 @@ export function useAnswers(visit: Visit, verdict: Verdict, isWanted = true): Ans
   return {
     answers: fitPages.flatMap(({ answers }) => answers),
     first: fitPages[0],
-    refusal: pages.find(isRefusal),
+    refusal: pages.find(isRefused),
     isPending: query.isPending,
     isStale: query.isPlaceholderData,
     error: query.error,

@@ -12,8 +12,6 @@ const prefix = 'wish.'
 /** Which kind a form was made for: another kind has other attributes. */
 export const madeForKey = 'of'
 
-export const isWishKey = (key: string): boolean => key === madeForKey || key.startsWith(prefix)
-
 export function readWishes(params: URLSearchParams, kind: KindKey): Wishes {
   const madeFor = params.get(madeForKey)
   if (madeFor !== null && madeFor !== kind) return {}

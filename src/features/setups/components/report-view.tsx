@@ -1,5 +1,5 @@
-import { useState } from 'react'
-import { Link, useLocation, useNavigate } from 'react-router-dom'
+import { useEffect, useState } from 'react'
+import { Link, useNavigate } from 'react-router-dom'
 import { CautionBox } from '../../../components/ui/caution-box'
 import { Popover } from '../../../components/ui/popover'
 import { VerdictIcon } from '../../../components/ui/verdict-icon'
@@ -9,6 +9,8 @@ import { findEditTarget } from '../../../components/setup/edit-target'
 import { fieldId } from '../../../components/setup/field-groups'
 import { writeSetupHref } from '../../../components/setup/setup-href'
 import { paths } from '../../../config/paths'
+import { writeSetupLink } from '#shared/schemas/setup-link'
+import { keepLastSetup } from '../../../lib/last-setup'
 import { verdictTextClasses, verdictWords } from '../../../lib/verdicts'
 import type { SetupReport } from '../hooks/use-setup-report'
 import { writeFormHref } from '../link/read-form-visit'
@@ -37,11 +39,11 @@ function findRepeated(shown: SetupReport): ReadonlySet<string> {
 /** A whole setup judged: the verdict, what is missing, the drawings, the budgets, every piece, and what was assumed. */
 export function ReportView({ shown }: { readonly shown: SetupReport }) {
   const navigate = useNavigate()
-  const { search } = useLocation()
   const [editing, setEditing] = useState<Editing | null>(null)
   const { report, visit, plan, printer, hrefOf, nameOf } = shown
   const { raw } = visit
   const { system } = printer
+  useEffect(() => keepLastSetup(writeSetupLink(Object.entries(raw), system)), [raw, system])
   const target = editing && findEditTarget(editing.path, plan)
   const formHref = writeFormHref(raw, system)
   const editHref = (path: string) =>
@@ -58,7 +60,7 @@ export function ReportView({ shown }: { readonly shown: SetupReport }) {
           {describeReport(report)}
         </p>
       </div>
-      <ShareBar search={search} formHref={formHref} />
+      <ShareBar href={hrefOf(raw)} formHref={formHref} />
       <UndoNote shown={shown} />
       <section className="mt-10">
         <h2>What is missing</h2>

@@ -5,29 +5,32 @@ import { buttonClass } from '../../../components/ui/button-class'
 
 const never = () => () => undefined
 
-/** The page's whole address; none on the server, which is not where the visitor is. */
-const useAddress = (search: string): string | null =>
+/** The whole address of the setup; none on the server, which is not where the visitor is. */
+const useAddress = (href: string): string | null =>
   useSyncExternalStore(
     never,
-    () => `${location.origin}${location.pathname}${search}`,
+    () => `${location.origin}${href}`,
     () => null,
   )
 
 export interface ShareBarProps {
-  readonly search: string
+  readonly href: string
   readonly formHref: string
 }
 
 /** The setup is its link: copy it, print it, or go on describing. */
-export function ShareBar({ search, formHref }: ShareBarProps) {
-  const address = useAddress(search)
+export function ShareBar({ href, formHref }: ShareBarProps) {
+  const address = useAddress(href)
   const [said, setSaid] = useState('')
   const copy = () => {
     if (address === null) return
-    navigator.clipboard.writeText(address).then(
-      () => setSaid('Copied. Whoever opens it sees this setup, in their own units.'),
-      () => setSaid('Your browser did not allow it: copy the address of this page instead.'),
-    )
+    // Without a secure connection there is no clipboard to ask at all.
+    Promise.resolve()
+      .then(() => navigator.clipboard.writeText(address))
+      .then(
+        () => setSaid('Copied. Whoever opens it sees this setup, in their own units.'),
+        () => setSaid('Your browser did not allow it: copy the address of this page instead.'),
+      )
   }
   return (
     <>

@@ -9,9 +9,9 @@ import type { Printer } from '#shared/units/print'
 import type { RawSetup } from '../../../components/setup/edit-raw'
 import { findPlan } from '../../../components/setup/find-plan'
 import { hasTankSize } from '../../../components/setup/has-tank-size'
-import { listItems } from '../../../components/setup/items-raw'
 import { readSetupVisit, type SetupVisit } from '../../../components/setup/read-setup-visit'
-import { isRefused, reportQuery, type Refused } from '../../../components/setup/report-query'
+import { reportQuery } from '../../../components/setup/report-query'
+import { isRefused, type Refused } from '../../../lib/problem'
 import { writeSetupHref } from '../../../components/setup/setup-href'
 import { toEngineSetup } from '../../../components/setup/to-engine-setup'
 import { paths } from '../../../config/paths'
@@ -59,14 +59,6 @@ function toItems({ items }: Report, { setup }: SetupVisit): readonly Item[] {
   })
 }
 
-/** Names of what is not in the report: pieces that are gone, and the tank. */
-const pickUnreported = (raw: RawSetup): RawSetup => {
-  const gone = new Set(listItems(raw).flatMap(({ id, state }) => (state === 'gone' ? [id] : [])))
-  return Object.fromEntries(
-    Object.entries(raw).filter(([path]) => path.startsWith('tank.') || gone.has(path.split('.')[1] ?? '')),
-  )
-}
-
 export function useSetupReport(): ReportVisit {
   const { api } = useApp()
   const { system } = usePreferences()
@@ -78,7 +70,7 @@ export function useSetupReport(): ReportVisit {
     enabled: canReport(visit),
     placeholderData: keepPreviousData,
   })
-  const named = useNamedItems(useMemo(() => pickUnreported(visit.raw), [visit.raw]))
+  const named = useNamedItems(visit.raw)
   const answer = canReport(visit) ? query.data : undefined
   const refused = answer && isRefused(answer) ? answer : null
   const report = answer && !isRefused(answer) ? answer : null

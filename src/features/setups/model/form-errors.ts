@@ -1,6 +1,7 @@
 import { labelSetupPath } from '#shared/engine/assumptions'
 import type { Plan } from '#shared/engine/setup/plan'
 import { getAttribute, getKind } from '#shared/kinds/index'
+import { findItemField } from '#shared/schemas/setup-link-items'
 import type { SetupRequest } from '#shared/schemas/setup'
 import type { UnitSystem } from '#shared/units/systems'
 import type { FieldError } from '../../../components/ui/error-summary'
@@ -9,7 +10,7 @@ import { fieldId } from '../../../components/setup/field-groups'
 import { hasTankSize } from '../../../components/setup/has-tank-size'
 import { listItems } from '../../../components/setup/items-raw'
 import type { SetupVisit } from '../../../components/setup/read-setup-visit'
-import type { Refused } from '../../../components/setup/report-query'
+import type { Refused } from '../../../lib/problem'
 import { capitalise } from '../../../lib/capitalise'
 
 /** `#/setup/items/0/specs/powerW` as the link spells it: `items.heater.specs.powerW`. */
@@ -20,10 +21,13 @@ export function toLinkPath(pointer: string, { items = [] }: SetupRequest): strin
   return ['items', items[Number(place)]?.id ?? place, ...words.slice(2)].join('.')
 }
 
+/** What of a piece has a control of its own. */
+const typedKeys: ReadonlySet<string> = new Set(['specs', 'quantity', 'state', 'mountHeightMm'])
+
 /** The control of a path, or the part of the form that it is in: which piece it is was chosen, not typed. */
 export function findControl(path: string): string {
   const [section, id, key] = path.split('.')
-  if (section === 'items') return key === 'specs' || key === 'quantity' ? fieldId(path) : `item-${id}`
+  if (section === 'items') return key !== undefined && typedKeys.has(key) ? fieldId(path) : `item-${id}`
   if (path === 'tank' || path === 'tank.gear') return fieldId('tank.volumeL')
   return fieldId(path)
 }
@@ -35,7 +39,8 @@ export function labelPath(path: string, visit: SetupVisit, plan: Plan): string {
   const kind = listItems(visit.raw).find((item) => item.id === id)?.kind ?? null
   const name = kind === null ? `piece “${id}”` : getKind(kind).label
   const key = rest[0] === 'specs' ? rest[1] : rest[0]
-  const label = kind !== null && key !== undefined ? (getAttribute(kind, key)?.label ?? key) : key
+  const field = findItemField(rest.join('.'), kind ?? undefined)
+  const label = field?.label ?? (kind !== null && key !== undefined ? getAttribute(kind, key)?.label : undefined) ?? key
   return capitalise(label === undefined || label === 'gear' ? name : `${name}, ${label}`)
 }
 

@@ -22,6 +22,9 @@ const labels: Readonly<Record<string, string>> = {
   floorKPa: 'Pressure on the floor',
 }
 
+/** Checks that judge what a budget adds up: where one of them refuses, the budget does not call it a mere change. */
+const judgedBy: Readonly<Record<string, string>> = { massKg: 'stand.load', heatW: 'heater.power' }
+
 /** Budgets in the order in which they are asked about, then what each pump moves. */
 export function listBudgets({ budgets, items }: Report, nameOf: (id: string) => string): readonly BudgetLine[] {
   const summed = Object.keys(labels).flatMap((key): BudgetLine[] => {
@@ -29,6 +32,9 @@ export function listBudgets({ budgets, items }: Report, nameOf: (id: string) => 
     if (!budget) return []
     const { used, limit, unit, message } = budget
     const isKept = limit === null || used <= limit
+    const isRefused = items.some(({ checks }) =>
+      checks.some(({ id, outcome }) => id === judgedBy[key] && outcome === 'fail'),
+    )
     return [
       {
         key,
@@ -37,7 +43,7 @@ export function listBudgets({ budgets, items }: Report, nameOf: (id: string) => 
         value: used,
         limit,
         margin: limit === null || limit === 0 ? null : (limit - used) / limit,
-        outcome: isKept ? 'pass' : 'change',
+        outcome: isKept ? 'pass' : isRefused ? 'fail' : 'change',
         message,
       },
     ]

@@ -2,7 +2,7 @@ import { nestInputs } from '#shared/engine/worksheets/nest'
 import type { Worksheet, WorksheetField } from '#shared/engine/worksheets/types'
 import { readSetupLink, writeSetupLink, type LinkProblem } from '#shared/schemas/setup-link'
 import type { SetupRequest } from '#shared/schemas/setup'
-import { readLinkValue } from '#shared/schemas/setup-link-values'
+import { readLinkValue, spellUnit } from '#shared/schemas/setup-link-values'
 import type { UnitSystem } from '#shared/units/systems'
 import { numberEntries } from './number-entries'
 
@@ -94,7 +94,12 @@ export function readSheet(
     if (value.ok) {
       texts[path] = value.text
       read[path] = value.value
-    } else wrong.push({ path, text, detail: value.detail })
+    } else {
+      // What is out of the question keeps the unit it was meant in too.
+      const meant = attribute.type === 'measure' ? spellUnit(text, attribute, typedIn) : text
+      texts[path] = meant
+      wrong.push({ path, text: meant, detail: value.detail })
+    }
   }
   const ownQuery = fields.flatMap(({ path }) => (texts[path] === undefined ? [] : `${path}=${encode(texts[path])}`))
   return {
