@@ -1,7 +1,7 @@
 import type { RequestHandler, Router } from 'express'
 import { AppError } from '../lib/errors'
 
-type Method = 'get' | 'post'
+type Method = 'get' | 'post' | 'put' | 'patch' | 'delete'
 type Handlers = Partial<Record<Method, RequestHandler | readonly RequestHandler[]>>
 
 /** Throws a 405 that names what does work. */
@@ -19,11 +19,11 @@ export function refuseMethod(allowed: readonly string[]): RequestHandler {
 /** Registers a path with its handlers, and a clear 405 for every other method on it. */
 export function addEndpoint(router: Router, path: string, handlers: Handlers): void {
   const allowed: string[] = []
-  for (const method of ['get', 'post'] as const) {
+  for (const method of ['get', 'post', 'put', 'patch', 'delete'] as const) {
     const handler = handlers[method]
     if (handler === undefined) continue
     router[method](path, ...[handler].flat())
-    allowed.push(...(method === 'get' ? ['GET', 'HEAD'] : ['POST']))
+    allowed.push(...(method === 'get' ? ['GET', 'HEAD'] : [method.toUpperCase()]))
   }
   router.all(path, refuseMethod([...allowed, 'OPTIONS']))
 }

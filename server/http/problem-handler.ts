@@ -12,6 +12,7 @@ function toProblem(req: Request, error: AppError | null): Problem {
   const code = error?.code ?? 'internal'
   const { status, title } = problemKinds[code]
   return {
+    ...error?.extra,
     type: `urn:stillfits:problem:${code}`,
     title,
     status,

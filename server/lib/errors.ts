@@ -6,9 +6,14 @@ export interface Issue {
 
 export type ErrorCode =
   | 'malformed'
+  | 'unauthenticated'
+  | 'forbidden'
   | 'not-found'
   | 'method-not-allowed'
   | 'conflict'
+  | 'gone'
+  | 'stale'
+  | 'precondition-required'
   | 'too-large'
   | 'unsupported-media-type'
   | 'invalid'
@@ -19,12 +24,20 @@ export type ErrorCode =
 export class AppError extends Error {
   readonly code: ErrorCode
   readonly issues: readonly Issue[]
+  /** Members that the problem document carries beside the usual ones, such as `current` of something stale. */
+  readonly extra: Readonly<Record<string, unknown>>
 
-  constructor(code: ErrorCode, detail: string, issues: readonly Issue[] = [], options?: ErrorOptions) {
+  constructor(
+    code: ErrorCode,
+    detail: string,
+    issues: readonly Issue[] = [],
+    options: ErrorOptions & { readonly extra?: Readonly<Record<string, unknown>> } = {},
+  ) {
     super(detail, options)
     this.name = 'AppError'
     this.code = code
     this.issues = issues
+    this.extra = options.extra ?? {}
   }
 }
 

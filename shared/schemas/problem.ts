@@ -9,6 +9,8 @@ export const problemSchema = z.object({
   instance: z.string(),
   requestId: z.string(),
   errors: z.array(z.object({ pointer: z.string(), detail: z.string() })).optional(),
+  /** Of something stale: how it stands now. */
+  current: z.unknown().optional(),
 })
 
 export type Problem = z.infer<typeof problemSchema>

@@ -13,7 +13,10 @@ import {
   text,
   timestamp,
   uniqueIndex,
+  uuid,
+  type AnyPgColumn,
 } from 'drizzle-orm/pg-core'
+import { people } from './people'
 
 /** How well one value is backed. `plusMinus` is in the value's own unit; `date` is the day of the measurement or document. */
 export interface StoredProvenance {
@@ -21,7 +24,9 @@ export interface StoredProvenance {
   readonly plusMinus?: number
   readonly evidence?: string
   readonly date: string
-  readonly author: string
+  /** A name as it came with imported data; people with an account are named by `authorId`. */
+  readonly author?: string
+  readonly authorId?: number
   readonly revision: number
 }
 
@@ -42,6 +47,11 @@ export const gear = pgTable(
     gtin: text('gtin'),
     status: text('status').$type<'current' | 'discontinued' | 'unknown'>().notNull().default('unknown'),
     notes: text('notes'),
+    /** A duplicate leads to the piece it is merged into. */
+    mergedInto: integer('merged_into').references((): AnyPgColumn => gear.id),
+    /** Taken out of the catalogue: it never was, or nobody can say what it is. */
+    retiredAt: moment('retired_at'),
+    retiredReason: text('retired_reason'),
     headRevision: integer('head_revision').notNull(),
     specs: jsonb('specs').$type<StoredSpecs>().notNull(),
     provenance: jsonb('provenance').$type<StoredProvenances>().notNull(),
@@ -65,6 +75,9 @@ export const gear = pgTable(
     index('gear_kind_name_idx').on(table.kind, sql`lower(${table.brand})`, sql`lower(${table.model})`, table.id),
     index('gear_name_idx').on(sql`lower(${table.brand})`, sql`lower(${table.model})`, table.id),
     index('gear_updated_idx').on(table.updatedAt, table.id),
+    index('gear_merged_idx').on(table.mergedInto),
+    check('gear_not_merged_into_itself', sql`${table.mergedInto} <> ${table.id}`),
+    check('gear_retired_whole', sql`(${table.retiredAt} is null) = (${table.retiredReason} is null)`),
     check('gear_slug_form', sql`${table.slug} ~ '^[a-z0-9]+(-[a-z0-9]+)*$' and length(${table.slug}) <= 120`),
     check('gear_kind_form', sql`${table.kind} ~ '^[a-z]+(-[a-z]+)*$'`),
     check(
@@ -91,11 +104,17 @@ export const gearRevisions = pgTable(
     number: integer('number').notNull(),
     specs: jsonb('specs').$type<StoredSpecs>().notNull(),
     summary: text('summary'),
-    author: text('author').notNull(),
+    author: text('author'),
+    authorId: integer('author_id').references(() => people.id),
+    /** Who approved it. */
+    reviewerId: integer('reviewer_id').references(() => people.id),
+    proposalId: uuid('proposal_id'),
     createdAt: moment('created_at').notNull().defaultNow(),
   },
   (table) => [
     primaryKey({ columns: [table.gearId, table.number] }),
+    index('gear_revisions_author_idx').on(table.authorId, table.createdAt),
+    check('gear_revisions_author_given', sql`num_nonnulls(${table.author}, ${table.authorId}) = 1`),
     check('gear_revisions_number_positive', sql`${table.number} >= 1`),
     check('gear_revisions_specs_object', sql`jsonb_typeof(${table.specs}) = 'object'`),
   ],
@@ -113,7 +132,12 @@ export const gearValues = pgTable(
     plusMinus: doublePrecision('plus_minus'),
     evidence: text('evidence'),
     dated: date('dated', { mode: 'string' }).notNull(),
-    author: text('author').notNull(),
+    author: text('author'),
+    authorId: integer('author_id').references(() => people.id),
+    /** Ids of the photos and documents behind it. */
+    files: uuid('files').array().notNull().default([]),
+    /** As it was typed. */
+    raw: text('raw'),
   },
   (table) => [
     primaryKey({ columns: [table.gearId, table.revision, table.key] }),
@@ -122,6 +146,8 @@ export const gearValues = pgTable(
       columns: [table.gearId, table.revision],
       foreignColumns: [gearRevisions.gearId, gearRevisions.number],
     }),
+    index('gear_values_author_idx').on(table.authorId),
+    check('gear_values_author_given', sql`num_nonnulls(${table.author}, ${table.authorId}) = 1`),
     check('gear_values_source_known', sql`${table.source} in ('measured', 'maker', 'estimate')`),
     check('gear_values_removed_whole', sql`(${table.value} is null) = (${table.source} is null)`),
     check('gear_values_plus_minus_positive', sql`${table.plusMinus} >= 0`),

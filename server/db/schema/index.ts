@@ -1,1 +1,3 @@
 export * from './gear'
+export * from './people'
+export * from './proposals'

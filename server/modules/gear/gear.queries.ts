@@ -71,6 +71,7 @@ export async function findGear(db: Database, slug: string): Promise<GearRow | nu
 const revisionColumns = {
   number: gearRevisions.number,
   author: gearRevisions.author,
+  authorId: gearRevisions.authorId,
   summary: gearRevisions.summary,
   createdAt: gearRevisions.createdAt,
   changed: sql<

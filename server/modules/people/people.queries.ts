@@ -1,0 +1,11 @@
+import { inArray } from 'drizzle-orm'
+import type { Database } from '../../db/database'
+import { people } from '../../db/schema/index'
+
+export async function listNames(db: Database, ids: readonly number[]) {
+  if (ids.length === 0) return []
+  return db
+    .select({ id: people.id, name: people.name })
+    .from(people)
+    .where(inArray(people.id, [...ids]))
+}

@@ -1,0 +1,16 @@
+import type { Database } from '../../db/database'
+import { listNames } from './people.queries'
+
+/** Stands for somebody whose account is gone: what they contributed stays. */
+export const formerMember = 'a former member'
+
+/** What an imported author or a person is called. */
+export type NameAuthor = (authored: { readonly author?: string | null; readonly authorId?: number | null }) => string
+
+/** Names of people by their ids, as they are called today. */
+export async function findNames(db: Database, ids: Iterable<number | null | undefined>): Promise<NameAuthor> {
+  const wanted = [...new Set(ids)].filter((id) => typeof id === 'number')
+  const rows = await listNames(db, wanted)
+  const names = new Map(rows.map(({ id, name }) => [id, name]))
+  return ({ author, authorId }) => author ?? (typeof authorId === 'number' ? names.get(authorId) : null) ?? formerMember
+}
