@@ -27,9 +27,16 @@ export default {
       to: { pathNot: '^shared/(engine|units|kinds)/' },
     },
     {
+      name: 'doubts-from-kinds-alone',
+      comment: 'What looks unlikely is judged alike by form, server and review: from kinds and units, without I/O.',
+      severity: 'error',
+      from: { path: '^shared/unlikely/' },
+      to: { pathNot: '^shared/(unlikely|units|kinds)/' },
+    },
+    {
       name: 'shared-knows-only-zod',
       severity: 'error',
-      from: { path: '^shared/(?!(engine|units|kinds)/)' },
+      from: { path: '^shared/(?!(engine|units|kinds|unlikely)/)' },
       to: { pathNot: '^shared/|node_modules/zod/' },
     },
     {

@@ -28,7 +28,7 @@ export default tseslint.config(
     extends: [reactHooks.configs.flat.recommended],
   },
   {
-    files: ['shared/{engine,units,kinds}/**/*.ts'],
+    files: ['shared/{engine,units,kinds,unlikely}/**/*.ts'],
     rules: {
       'no-restricted-globals': [
         'error',
