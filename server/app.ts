@@ -9,9 +9,13 @@ import { refuseDotFiles, refuseOddMethods } from './http/methods'
 import { createProblemHandler, refuseUnknownPath } from './http/problem-handler'
 import { createRateLimit, defaultRateLimits, type RateLimits } from './http/rate-limits'
 import { createPageRoutes, type Pages } from './http/render'
+import { createOriginCheck } from './http/origin-check'
 import { refuseRepeatedKeys } from './http/requests'
 import { assignNonce, createSecurityHeaders } from './http/security-headers'
+import { createSessionLookup } from './http/session'
 import type { Logger } from './lib/logger'
+import { createSessionRoutes } from './modules/accounts/session.routes'
+import { createSessions } from './modules/accounts/sessions.service'
 import { createCatalogue } from './modules/catalogue/catalogue.service'
 import { createAskRoutes } from './modules/ask/ask.routes'
 import { createFitRoutes } from './modules/fit/fit.routes'
@@ -31,13 +35,24 @@ export interface AppDependencies {
   /** The built client; without it there is the API alone. */
   readonly pages?: Pages | null
   readonly rateLimits?: RateLimits
+  /** What time it is; tests move it. */
+  readonly now?: () => Date
 }
 
 /** Puts the parts together; everything that lives outside the process is handed in. */
 export function createApp(dependencies: AppDependencies): Express {
-  const { db, env, logger, lifecycle = createLifecycle(), pages = null, rateLimits = defaultRateLimits } = dependencies
+  const {
+    db,
+    env,
+    logger,
+    lifecycle = createLifecycle(),
+    pages = null,
+    rateLimits = defaultRateLimits,
+    now,
+  } = dependencies
   const isHttps = env.PUBLIC_ORIGIN?.startsWith('https:') ?? false
   const catalogue = createCatalogue(db)
+  const sessions = createSessions(db, now)
 
   const app = express()
   app.disable('x-powered-by')
@@ -47,8 +62,10 @@ export function createApp(dependencies: AppDependencies): Express {
   app.use(compression())
   app.use(createSystemRoutes(db, catalogue, lifecycle))
 
+  app.use(createOriginCheck(isHttps, env.PUBLIC_ORIGIN))
+
   const api = Router()
-  api.use(refuseRepeatedKeys)
+  api.use(refuseRepeatedKeys, createSessionLookup(sessions.find, isHttps))
   api.use(
     ['/ask', '/fit', '/replacements', '/setups', '/worksheets'],
     createRateLimit('calculations', rateLimits.calculationsPerMinute),
@@ -57,6 +74,7 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
+  api.use(createSessionRoutes(db, sessions, isHttps))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)
   app.use('/api', refuseUnknownPath)

@@ -8,6 +8,11 @@ export const limits = {
   slug: 120,
   notes: 4000,
   author: 60,
+  /** Of a person: public, and part of an address. */
+  personName: 40,
+  email: 254,
+  passwordMin: 15,
+  password: 256,
   summary: 300,
   evidence: 500,
   setupName: 120,

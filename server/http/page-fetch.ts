@@ -17,7 +17,7 @@ const withoutBody = new Set([204, 304])
 /** Headers of the visit that the page's own calls carry on. The address goes as the connection's own, so it cannot be made up. */
 function carryHeaders(req: Request): Record<string, string> {
   const { cookie } = req.headers
-  return { 'x-request-id': getRequestId(req), ...(cookie !== undefined && { cookie }) }
+  return { 'x-request-id': getRequestId(req), 'sec-fetch-site': 'same-origin', ...(cookie !== undefined && { cookie }) }
 }
 
 /**
