@@ -10,6 +10,7 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/**/*.test.ts'],
           exclude: ['tests/{api,client,e2e}/**'],
+          setupFiles: 'tests/support/property-seed.ts',
           testTimeout: 60_000,
         },
       },
