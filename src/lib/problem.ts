@@ -7,6 +7,8 @@ export class ApiError extends Error {
   readonly title: string
   readonly requestId: string | undefined
   readonly errors: readonly { readonly pointer: string; readonly detail: string }[]
+  /** Of something stale: how it stands now. */
+  readonly current: unknown
 
   constructor(status: number, title: string, detail: string, problem: Partial<Problem> = {}) {
     super(detail)
@@ -14,6 +16,7 @@ export class ApiError extends Error {
     this.title = title
     this.requestId = problem.requestId
     this.errors = problem.errors ?? []
+    this.current = problem.current
   }
 }
 
