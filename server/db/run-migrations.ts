@@ -2,6 +2,7 @@ import { fileURLToPath } from 'node:url'
 import { drizzle } from 'drizzle-orm/node-postgres'
 import { migrate } from 'drizzle-orm/node-postgres/migrator'
 import pg from 'pg'
+import { installQueues } from './install-queues'
 
 /** Any constant that no other user of the database takes: "stillfits" on a telephone's keys, cut to fit. */
 const migrationLockKey = 784_553_487
@@ -31,6 +32,7 @@ export async function runMigrations(databaseUrl: string, options: MigrationOptio
     await client.query('SELECT pg_advisory_lock($1)', [migrationLockKey])
     await client.query(`SET lock_timeout = ${options.lockTimeoutMs ?? 5_000}`)
     await migrate(drizzle(client), { migrationsFolder })
+    await installQueues(client)
   } finally {
     // Closing the session frees the advisory lock, also when the migration failed halfway.
     await client.end()

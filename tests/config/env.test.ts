@@ -23,6 +23,11 @@ describe('the environment', () => {
       LOG_LEVEL: 'info',
       TRUST_PROXY: 0,
       DEMO: true,
+      MAIL_FROM: 'stillfits@example.org',
+      S3_REGION: 'us-east-1',
+      S3_BUCKET: 'stillfits',
+      S3_ACCESS_KEY_ID: '',
+      S3_SECRET_ACCESS_KEY: '',
     })
   })
 
