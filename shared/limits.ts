@@ -15,6 +15,13 @@ export const limits = {
   password: 256,
   summary: 300,
   evidence: 500,
+  /** A value as it was typed. */
+  raw: 120,
+  /** Photos and documents behind one value. */
+  filesPerValue: 8,
+  /** What one person writes to another. */
+  words: 2000,
+  reason: 300,
   setupName: 120,
   searchText: 200,
   sort: 60,

@@ -24,6 +24,16 @@ export const slugSchema = z
 /** Bare values by attribute key, each in the unit that its key names; `GET /api/v1/kinds` tells what a kind can have. */
 export const bareSpecsSchema = z.record(z.string(), z.unknown())
 
+/** A photo or document, to be had at `/api/v1/evidence/{id}`, a photo's small copy at `/api/v1/evidence/{id}/thumbnail`. */
+export const evidenceRefSchema = z.object({
+  id: z.string(),
+  kind: z.enum(['photo', 'document']),
+  contentType: z.string(),
+  width: z.number().int().nullable(),
+  height: z.number().int().nullable(),
+  caption: z.string().nullable(),
+})
+
 export const provenanceSchema = z.object({
   source: sourceSchema,
   plusMinus: z.number().optional(),
@@ -31,7 +41,15 @@ export const provenanceSchema = z.object({
   date: z.string(),
   author: z.string(),
   revision: z.number().int(),
+  /** Who approved it; absent for what was imported. */
+  reviewer: z.string().optional(),
+  /** As it was typed. */
+  raw: z.string().optional(),
+  files: z.array(evidenceRefSchema).optional(),
 })
+
+/** One source of a value. `isUsed`: the newest within the highest rank, or what settled a dispute. */
+export const sourceOfValueSchema = provenanceSchema.extend({ value: z.unknown(), isUsed: z.boolean() })
 
 export const gearItemSchema = z.object({
   slug: z.string(),
@@ -49,6 +67,12 @@ export const gearSchema = gearItemSchema.extend({
   notes: z.string().nullable(),
   createdAt: z.string(),
   provenance: z.record(z.string(), provenanceSchema),
+  /** How many people measured the same, by key; keys that nobody confirmed are absent. */
+  confirmations: z.record(z.string(), z.number().int()),
+  /** Keys of which several sources are on record, each with all of them, the one in use first. */
+  sources: z.record(z.string(), z.array(sourceOfValueSchema)),
+  /** Keys whose value went to and fro, until a moderator settles it. */
+  disputed: z.array(z.string()),
 })
 
 const optionCountSchema = z.object({
@@ -113,6 +137,8 @@ export type GearItem = z.infer<typeof gearItemSchema>
 export type Gear = z.infer<typeof gearSchema>
 export type Facet = z.infer<typeof facetSchema>
 export type GearList = z.infer<typeof gearListSchema>
+export type EvidenceRef = z.infer<typeof evidenceRefSchema>
+export type SourceOfValue = z.infer<typeof sourceOfValueSchema>
 export type Provenance = z.infer<typeof provenanceSchema>
 export type RevisionSummary = z.infer<typeof revisionSummarySchema>
 export type RevisionList = z.infer<typeof revisionListSchema>

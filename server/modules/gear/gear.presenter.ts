@@ -29,6 +29,9 @@ export function presentGear(row: GearRow, nameAuthor: NameAuthor): Gear {
     notes: row.notes,
     createdAt: row.createdAt.toISOString(),
     provenance: presentProvenances(row.provenance, nameAuthor),
+    confirmations: {},
+    sources: {},
+    disputed: [],
   }
 }
 

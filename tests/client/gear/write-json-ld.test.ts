@@ -14,6 +14,9 @@ const gear: Gear = {
   createdAt: '2025-01-01T00:00:00.000Z',
   notes: null,
   provenance: {},
+  confirmations: {},
+  sources: {},
+  disputed: [],
   specs: { powerW: 100, lengthMm: 250, form: 'glass-rod', madeFor: ['reef', 'plants'] },
 }
 
