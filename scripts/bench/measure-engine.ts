@@ -1,3 +1,4 @@
+import { Engine } from 'json-rules-engine'
 import { fit } from '#shared/engine/fit'
 import { lossAt } from '#shared/engine/heat-budget'
 import { resolve } from '#shared/engine/setup/resolve'
@@ -7,7 +8,6 @@ import { generatePieces } from '../generate-catalogue/generate-pieces'
 import { summarise } from './figures.mjs'
 
 const heaters = 10_000
-const calls = 30
 
 const catalogue: readonly Piece[] = [...generatePieces({ pieces: heaters, heaterShare: 1 })].map(
   ({ kind, brand, model, revisions: [revision] }): Piece => ({
@@ -31,42 +31,135 @@ function describeSetup(index: number): Setup {
   }
 }
 
-/** What a heater's checks come down to, written out by hand: compared, counted, and nothing kept to be explained. */
-function countByHand(setup: Setup): number {
+interface Limits {
+  readonly waterDepthMm: number
+  readonly heightMm: number
+  readonly leanMm: number
+  readonly acrossMm: number
+  readonly leastW: number
+  readonly mostW: number
+  readonly ratedL: number
+  readonly volts: number
+}
+
+/** What a setup comes down to for heaters; both yardsticks are given it ready. */
+function findLimits(setup: Setup): Limits {
   const plan = resolve(setup)
   const [chamber] = plan.tank.chambers
   if (!chamber) throw new Error('The setup has no chamber')
   const { totalW, totalUpperW } = lossAt(plan, plan.goals.temperatureC, plan.room.coldestC)
-  const mostW = Math.max(6 * totalW, 3 * plan.tank.waterL)
-  const acrossMm = Math.min(chamber.lengthMm, chamber.widthMm)
+  return {
+    waterDepthMm: chamber.waterDepthMm,
+    heightMm: chamber.heightMm,
+    leanMm: Math.hypot(chamber.lengthMm, chamber.widthMm, chamber.waterDepthMm),
+    acrossMm: Math.min(chamber.lengthMm, chamber.widthMm) - 20,
+    leastW: totalUpperW,
+    mostW: Math.max(6 * totalW, 3 * plan.tank.waterL),
+    ratedL: plan.tank.ratedL,
+    volts: plan.mains.volts,
+  }
+}
+
+interface Heater {
+  readonly lengthMm: number
+  readonly diameterMm: number
+  readonly powerW: number
+  readonly immersionMm: number
+  readonly ratedMostL: number
+  readonly volts: readonly number[]
+}
+
+function readHeater({ specs }: Piece): Heater | null {
+  const read = (key: string) => specs[key]?.value as number | undefined
+  const lengthMm = read('lengthMm')
+  const diameterMm = read('diameterMm')
+  const powerW = read('powerW')
+  if (lengthMm === undefined || diameterMm === undefined || powerW === undefined) return null
+  const immersionMm = read('minImmersionMm') ?? lengthMm
+  const ratedMostL = 1.2 * (read('ratedVolumeMaxL') ?? Infinity)
+  const volts = (specs['volts']?.value as readonly number[] | undefined) ?? []
+  return { lengthMm, diameterMm, powerW, immersionMm, ratedMostL, volts }
+}
+
+/** What a heater's checks come down to, written out by hand: compared, counted, and nothing kept to be explained. */
+function countByHand(setup: Setup): number {
+  const limits = findLimits(setup)
   let fits = 0
-  for (const { specs } of catalogue) {
-    const read = (key: string) => specs[key]?.value as number | undefined
-    const lengthMm = read('lengthMm')
-    const diameterMm = read('diameterMm')
-    const powerW = read('powerW')
-    if (lengthMm === undefined || diameterMm === undefined || powerW === undefined) continue
-    const stands = (read('minImmersionMm') ?? lengthMm) <= chamber.waterDepthMm && lengthMm <= chamber.heightMm
-    const leans = lengthMm <= Math.hypot(chamber.lengthMm, chamber.widthMm, chamber.waterDepthMm) - diameterMm
-    const volts = specs['volts']?.value as readonly number[] | undefined
-    const isRated = plan.tank.ratedL <= 1.2 * (read('ratedVolumeMaxL') ?? Infinity)
-    const isRightHeat = powerW >= totalUpperW && powerW <= mostW
-    if ((stands || leans) && diameterMm + 20 <= acrossMm && isRightHeat && isRated && volts?.includes(plan.mains.volts))
-      fits += 1
+  for (const piece of catalogue) {
+    const heater = readHeater(piece)
+    if (!heater) continue
+    const { lengthMm, diameterMm, powerW } = heater
+    const stands = heater.immersionMm <= limits.waterDepthMm && lengthMm <= limits.heightMm
+    const leans = lengthMm + diameterMm <= limits.leanMm
+    const isRightHeat = powerW >= limits.leastW && powerW <= limits.mostW
+    const isRated = limits.ratedL <= heater.ratedMostL
+    const isSafe = heater.volts.includes(limits.volts)
+    if ((stands || leans) && diameterMm <= limits.acrossMm && isRightHeat && isRated && isSafe) fits += 1
   }
   return fits
 }
 
-function time(work: (index: number) => unknown) {
-  for (let index = 0; index < 10; index += 1) work(1000 + index)
-  const times = Array.from({ length: calls }, (_, index) => {
-    const startedMs = performance.now()
-    work(index)
-    return performance.now() - startedMs
-  })
-  return summarise(times)
+const reaches = (fact: string, operator: string, limit: string) => ({ fact, operator, value: { fact: limit } })
+
+/** The same in a library for rules written as data; a fact of each piece is what the loop by hand compares. */
+const library = new Engine(
+  [
+    {
+      event: { type: 'fits' },
+      conditions: {
+        all: [
+          {
+            any: [
+              {
+                all: [
+                  reaches('immersionMm', 'lessThanInclusive', 'waterDepthMm'),
+                  reaches('lengthMm', 'lessThanInclusive', 'heightMm'),
+                ],
+              },
+              reaches('leaningMm', 'lessThanInclusive', 'leanMm'),
+            ],
+          },
+          reaches('diameterMm', 'lessThanInclusive', 'acrossMm'),
+          reaches('powerW', 'greaterThanInclusive', 'leastW'),
+          reaches('powerW', 'lessThanInclusive', 'mostW'),
+          reaches('ratedMostL', 'greaterThanInclusive', 'ratedL'),
+          reaches('heaterVolts', 'contains', 'volts'),
+        ],
+      },
+    },
+  ],
+  { replaceFactsInEventParams: false },
+)
+
+async function countByLibrary(setup: Setup): Promise<number> {
+  const limits = findLimits(setup)
+  let fits = 0
+  for (const piece of catalogue) {
+    const heater = readHeater(piece)
+    if (!heater) continue
+    const { volts: heaterVolts, ...facts } = heater
+    const leaningMm = facts.lengthMm + facts.diameterMm
+    const { events } = await library.run({ ...limits, ...facts, leaningMm, heaterVolts })
+    fits += events.length
+  }
+  return fits
 }
 
-const engine = time((index) => fit(describeSetup(index), 'heater', catalogue, { limit: 10, offset: 0 }))
-const loop = time((index) => countByHand(describeSetup(index)))
-process.stdout.write(JSON.stringify({ heaters, engine, loop }))
+async function time(times: number, work: (index: number) => unknown) {
+  for (let index = 0; index < Math.ceil(times / 3); index += 1) await work(1000 + index)
+  const taken: number[] = []
+  for (let index = 0; index < times; index += 1) {
+    const startedMs = performance.now()
+    await work(index)
+    taken.push(performance.now() - startedMs)
+  }
+  return summarise(taken)
+}
+
+const [byHand, byLibrary] = [countByHand(describeSetup(0)), await countByLibrary(describeSetup(0))]
+if (byHand !== byLibrary) throw new Error(`The yardsticks disagree: ${byHand} and ${byLibrary} heaters fit`)
+
+const engine = await time(30, (index) => fit(describeSetup(index), 'heater', catalogue, { limit: 10, offset: 0 }))
+const loop = await time(30, (index) => countByHand(describeSetup(index)))
+const rules = await time(3, (index) => countByLibrary(describeSetup(index)))
+process.stdout.write(JSON.stringify({ heaters, engine, loop, rules }))
