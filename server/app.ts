@@ -13,6 +13,7 @@ import { createOriginCheck } from './http/origin-check'
 import { refuseRepeatedKeys } from './http/requests'
 import { assignNonce, createSecurityHeaders } from './http/security-headers'
 import { createSessionLookup } from './http/session'
+import { createWriteLimits } from './http/write-limits'
 import type { Logger } from './lib/logger'
 import { createSessionRoutes } from './modules/accounts/session.routes'
 import { createSessions } from './modules/accounts/sessions.service'
@@ -34,22 +35,15 @@ export interface AppDependencies {
   readonly lifecycle?: Lifecycle
   /** The built client; without it there is the API alone. */
   readonly pages?: Pages | null
-  readonly rateLimits?: RateLimits
+  readonly rateLimits?: Partial<RateLimits>
   /** What time it is; tests move it. */
   readonly now?: () => Date
 }
 
 /** Puts the parts together; everything that lives outside the process is handed in. */
 export function createApp(dependencies: AppDependencies): Express {
-  const {
-    db,
-    env,
-    logger,
-    lifecycle = createLifecycle(),
-    pages = null,
-    rateLimits = defaultRateLimits,
-    now,
-  } = dependencies
+  const { db, env, logger, lifecycle = createLifecycle(), pages = null, now } = dependencies
+  const rateLimits = { ...defaultRateLimits, ...dependencies.rateLimits }
   const isHttps = env.PUBLIC_ORIGIN?.startsWith('https:') ?? false
   const catalogue = createCatalogue(db)
   const sessions = createSessions(db, now)
@@ -70,7 +64,11 @@ export function createApp(dependencies: AppDependencies): Express {
     ['/ask', '/fit', '/replacements', '/setups', '/worksheets'],
     createRateLimit('calculations', rateLimits.calculationsPerMinute),
   )
-  api.use(['/gear', '/kinds', '/openapi.json'], createRateLimit('reads', rateLimits.readsPerMinute))
+  api.use(
+    ['/gear', '/kinds', '/openapi.json', '/people', '/session'],
+    createRateLimit('reads', rateLimits.readsPerMinute),
+  )
+  api.use(createWriteLimits(db, rateLimits, now))
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))

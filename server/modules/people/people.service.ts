@@ -1,5 +1,5 @@
 import type { Database } from '../../db/database'
-import { listNames } from './people.queries'
+import { countRevisionsOf, listNames } from './people.queries'
 
 /** Stands for somebody whose account is gone: what they contributed stays. */
 export const formerMember = 'a former member'
@@ -14,3 +14,6 @@ export async function findNames(db: Database, ids: Iterable<number | null | unde
   const names = new Map(rows.map(({ id, name }) => [id, name]))
   return ({ author, authorId }) => author ?? (typeof authorId === 'number' ? names.get(authorId) : null) ?? formerMember
 }
+
+/** How many revisions by this person were accepted: a person's standing. */
+export const countAccepted = countRevisionsOf
