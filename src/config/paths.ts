@@ -12,5 +12,12 @@ export const paths = {
   measuringSheet: '/setups/measuring-sheet',
   worksheets: '/worksheets',
   worksheet: (name: string) => `/worksheets/${encodeURIComponent(name)}`,
+  review: '/review',
+  reviewProposal: (id: string) => `/review/${encodeURIComponent(id)}`,
+  disputes: '/review/disputes',
+  reports: '/review/reports',
+  revertPerson: (name: string) => `/admin/people/${encodeURIComponent(name)}/revert`,
+  /** Comes back to `next` afterwards. */
+  signIn: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

@@ -8,9 +8,17 @@ import { describeFailure } from '../describe-failure'
 
 const recheckMs = 4_000
 
+/** Where somebody goes from a page that trying again would not bring; null where it might. */
+function findWayOn(status: number, address: string): { readonly href: string; readonly label: string } | null {
+  if (status === 401) return { href: paths.signIn(address), label: 'Sign in' }
+  if (status === 403) return { href: paths.home, label: 'Go to the start' }
+  if (status === 404) return { href: paths.find, label: 'Open the finder' }
+  return status === 410 ? { href: paths.gearList, label: 'Browse the gear' } : null
+}
+
 /** Stands in for a page that could not be shown; while the catalogue is away it keeps asking and comes back by itself. */
 export function ErrorPage() {
-  const { status, title, detail, isAway, requestId } = describeFailure(useRouteError())
+  const { status, heading, title, detail, isAway, requestId } = describeFailure(useRouteError())
   const { revalidate, state } = useRevalidator()
   const { pathname, search } = useLocation()
   useEffect(() => {
@@ -19,36 +27,32 @@ export function ErrorPage() {
     return () => clearTimeout(timer)
   }, [isAway, revalidate, state])
 
-  if (status === 404)
-    return (
-      <>
-        <h1>Not found</h1>
-        <div className="mt-6">
+  const way = findWayOn(status, `${pathname}${search}`)
+  return (
+    <>
+      <h1>{heading}</h1>
+      <div className="mt-6">
+        {way ? (
           <EmptyState
             title={title}
             action={
-              <Link to={paths.find} className={buttonClass({ variant: 'primary' })}>
-                Open the finder
+              <Link to={way.href} className={buttonClass({ variant: 'primary' })}>
+                {way.label}
               </Link>
             }
           >
             {detail}
           </EmptyState>
-        </div>
-      </>
-    )
-  return (
-    <>
-      <h1>{isAway ? 'Away for a moment' : 'This page could not be shown'}</h1>
-      <div className="mt-6">
-        <ErrorState
-          title={title}
-          onRetry={() => void revalidate()}
-          retryHref={`${pathname}${search}`}
-          {...(requestId !== undefined && { requestId })}
-        >
-          {detail}
-        </ErrorState>
+        ) : (
+          <ErrorState
+            title={title}
+            onRetry={() => void revalidate()}
+            retryHref={`${pathname}${search}`}
+            {...(requestId !== undefined && { requestId })}
+          >
+            {detail}
+          </ErrorState>
+        )}
       </div>
     </>
   )

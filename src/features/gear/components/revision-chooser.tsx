@@ -3,7 +3,7 @@ import type { RevisionSummary } from '#shared/schemas/gear'
 import { Button } from '../../../components/ui/button'
 import { SelectField } from '../../../components/ui/select-field'
 import { paths } from '../../../config/paths'
-import { printDate } from '../print-date'
+import { printDate } from '../../../lib/print-date'
 import type { ComparedRevisions } from '../read-compared-revisions'
 
 export interface RevisionChooserProps {

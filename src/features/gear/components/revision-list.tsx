@@ -2,7 +2,7 @@ import { Link } from 'react-router-dom'
 import { getAttribute, type KindKey } from '#shared/kinds/index'
 import type { RevisionSummary } from '#shared/schemas/gear'
 import { paths } from '../../../config/paths'
-import { printDate } from '../print-date'
+import { printDate } from '../../../lib/print-date'
 
 export interface RevisionListProps {
   readonly kind: KindKey

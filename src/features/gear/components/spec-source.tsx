@@ -1,7 +1,7 @@
 import type { Attribute } from '#shared/kinds/types'
 import type { Provenance } from '#shared/schemas/gear'
 import type { Printer } from '#shared/units/print'
-import { printDate } from '../print-date'
+import { printDate } from '../../../lib/print-date'
 
 const sources = { measured: 'measured', maker: 'its maker’s figure', estimate: 'an estimate' } as const
 
