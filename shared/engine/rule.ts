@@ -74,6 +74,11 @@ export type Glance = 'pass' | 'change' | 'fail' | 'never' | 'unknown'
  */
 export interface Glancer {
   readonly read: (specs: Specs) => unknown
+  /**
+   * How hard the rule is on a piece whose glance fails, among pieces that it asks the same of: where one would still
+   * fail whatever else had been said, so would every harder one; where one would not, nor would an easier one.
+   */
+  readonly rate?: (facts: unknown) => { readonly among: number; readonly hardness: number }
   /** Undefined where it takes `judge` to tell. `facts` is what `read` made of the specs. */
   readonly look: (scene: Scene, facts: unknown, way: Way) => Glance | undefined
 }
@@ -81,7 +86,12 @@ export interface Glancer {
 export const glanceBy = <Facts>(
   read: (specs: Specs) => Facts,
   look: (scene: Scene, facts: Facts, way: Way) => Glance | undefined,
-): Glancer => ({ read, look: (scene, facts, way) => look(scene, facts as Facts, way) })
+  rate?: (facts: Facts) => { readonly among: number; readonly hardness: number },
+): Glancer => ({
+  read,
+  look: (scene, facts, way) => look(scene, facts as Facts, way),
+  ...(rate && { rate: (facts: unknown) => rate(facts as Facts) }),
+})
 
 /** One line of the rule table: data for the method page and the API, and the function that judges. */
 export interface Rule {

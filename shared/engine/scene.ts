@@ -17,16 +17,22 @@ export const createScene = (plan: Plan, others: readonly Item[]): Scene => ({ pl
 
 /** Computes `derive(scene)` once per scene. `derive` is its own key, so it must be a named function, not a fresh closure. */
 export function once<T>(scene: Scene, derive: (scene: Scene) => T): T {
-  if (!scene.kept.has(derive)) scene.kept.set(derive, derive(scene))
-  return scene.kept.get(derive) as T
+  const known = scene.kept.get(derive)
+  if (known !== undefined || scene.kept.has(derive)) return known as T
+  const derived = derive(scene)
+  scene.kept.set(derive, derived)
+  return derived
 }
 
 /** Computes `derive(scene, of)` once per scene and number. */
 export function onceFor<T>(scene: Scene, derive: (scene: Scene, of: number) => T, of: number): T {
   let known = scene.kept.get(derive) as Map<number, T> | undefined
   if (!known) scene.kept.set(derive, (known = new Map()))
-  if (!known.has(of)) known.set(of, derive(scene, of))
-  return known.get(of) as T
+  const before = known.get(of)
+  if (before !== undefined || known.has(of)) return before as T
+  const derived = derive(scene, of)
+  known.set(of, derived)
+  return derived
 }
 
 /** The same scene had the setup's owner said a value that was assumed; kept per path and value. */

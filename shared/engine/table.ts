@@ -44,6 +44,7 @@ export class Column {
   private readonly conceded = new Map<number, boolean>()
   private readonly close = new Map<number, boolean>()
   private readonly missing = new Map<number, readonly string[]>()
+  private readonly hardness = new Map<number, { kept: number; hopeless: number }>()
 
   constructor(
     readonly rule: Rule,
@@ -66,8 +67,24 @@ export class Column {
   private ask(index: number): number {
     const facts = this.classes.facts[this.classes.ofPiece[index]!]
     const glance = this.rule.glance?.look(this.scene, facts, this.way)
+    if (glance && glance !== 'fail') return codeOfGlance[glance]
     // A failure may rest on something assumed, which takes a judgement to tell.
-    return glance && glance !== 'fail' ? codeOfGlance[glance] : encode(this.judgementOf(index))
+    return glance ? this.askAmong(index, facts) : encode(this.judgementOf(index))
+  }
+
+  /** A failure at a glance: told by how harder and easier pieces fared, as far as that goes. */
+  private askAmong(index: number, facts: unknown): number {
+    const rated = this.rule.glance?.rate?.(facts)
+    if (!rated) return encode(this.judgementOf(index))
+    const { among, hardness } = rated
+    let known = this.hardness.get(among)
+    if (!known) this.hardness.set(among, (known = { kept: -Infinity, hopeless: Infinity }))
+    if (hardness >= known.hopeless) return codes.fail
+    if (hardness <= known.kept) return codes.change
+    const coded = encode(this.judgementOf(index))
+    if (coded === codes.fail) known.hopeless = hardness
+    else if (coded === codes.change) known.kept = hardness
+    return coded
   }
 
   judgementOf(index: number): Judged | null {

@@ -96,6 +96,19 @@ describe('counting thousands of pieces at a glance', () => {
     )
   }, 240_000)
 
+  it('gives them for a ladder of powers, in whatever order it is climbed', () => {
+    const powersW = [5, 10, 25, 50, 75, 100, 125, 150, 200, 250, 300, 400, 500, 600, 800, 1000]
+    const ladder = (['built-in', 'none'] as const).flatMap((thermostat) =>
+      powersW.map((powerW) => heater({ powerW, thermostat, lengthMm: 200, diameterMm: 20 })),
+    )
+    fc.assert(
+      fc.property(anySetup, fc.shuffledSubarray(ladder, { minLength: 12, maxLength: 20 }), (setup, pieces) => {
+        agree({ ...setup, items: [] }, pieces)
+      }),
+      { numRuns: 60 },
+    )
+  }, 240_000)
+
   it('gives them at the very limits of a chamber too', () => {
     const edges = [-0.11, -0.06, -0.05, 0, 0.05, 0.06, 0.11]
     const size = (values: Values): Piece[] =>

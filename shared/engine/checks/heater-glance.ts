@@ -72,18 +72,6 @@ function findReach(scene: Scene): Reach {
   }
 }
 
-/** The longest rod of a thickness that can lean or lie, mm, per basin: the same for every rod as thick. */
-function findLongest(scene: Scene, diameterMm: number) {
-  return once(scene, findReach).waters.map(({ basin: { lengthMm, widthMm, waterDepthMm } }) => {
-    const runMm = findLongestMm(diameterMm, [lengthMm - 2 * clearanceMm, widthMm - 2 * clearanceMm])
-    const flatMm = findLongestMm(diameterMm + 2 * clearanceMm, [lengthMm, widthMm])
-    return {
-      leaningMm: runMm === null ? null : findLongestMm(diameterMm, [runMm, waterDepthMm]),
-      flatMm: flatMm === null ? null : flatMm - 2 * clearanceMm,
-    }
-  })
-}
-
 /** Well past the 0.05 mm that comparisons of lengths allow. */
 const plainlyMm = 0.1
 
@@ -91,58 +79,81 @@ const plainlyMm = 0.1
 const isPlainlyWithin = (mm: number, limitMm: number): boolean | undefined =>
   mm <= limitMm ? true : mm > limitMm + plainlyMm ? false : undefined
 
+/** One basin as rods of one thickness find it: all that does not turn on their lengths. */
+interface Room {
+  readonly water: Water
+  /** Whether it is wide enough to stand in, by the very limits that `judge` sets. */
+  readonly isWide: boolean
+  /** Whether a rod that leans or lies comes in; undefined where that takes a closer look. */
+  readonly takesSlanting: boolean | undefined
+  /** The longest that can lean or lie, mm; null where that takes a closer look. */
+  readonly longest: () => { readonly leaningMm: number | null; readonly flatMm: number | null }
+}
+
+function findLongest({ lengthMm, widthMm, waterDepthMm }: Basin, diameterMm: number) {
+  const runMm = findLongestMm(diameterMm, [lengthMm - 2 * clearanceMm, widthMm - 2 * clearanceMm])
+  const flatMm = findLongestMm(diameterMm + 2 * clearanceMm, [lengthMm, widthMm])
+  return {
+    leaningMm: runMm === null ? null : findLongestMm(diameterMm, [runMm, waterDepthMm]),
+    flatMm: flatMm === null ? null : flatMm - 2 * clearanceMm,
+  }
+}
+
+function measureRoom(water: Water, diameterMm: number): Room {
+  const { basin, acrossMm, openingMm } = water
+  const passes = isPlainlyWithin(diameterMm, Math.min(openingMm, basin.waterDepthMm))
+  const isThin = isPlainlyWithin(diameterMm + 2 * clearanceMm, acrossMm)
+  let longest: ReturnType<typeof findLongest> | undefined
+  return {
+    water,
+    isWide: isWithinMm(diameterMm + 2 * clearanceMm, acrossMm) && isWithinMm(diameterMm, openingMm),
+    takesSlanting: passes === false || isThin === false ? false : passes && isThin,
+    longest: () => (longest ??= findLongest(basin, diameterMm)),
+  }
+}
+
+/** The same for every rod as thick. */
+const findRooms = (scene: Scene, diameterMm: number): readonly Room[] =>
+  once(scene, findReach).waters.map((water) => measureRoom(water, diameterMm))
+
 interface Sizes {
   readonly lengthMm: number
   readonly diameterMm: number
   readonly immersedMm: number
 }
 
-/** Whether one rod can stand there, by the very limits that `judge` sets. */
-const canStand = ({ basin, acrossMm, openingMm }: Water, { lengthMm, diameterMm, immersedMm }: Sizes): boolean =>
-  isWithinMm(diameterMm + 2 * clearanceMm, acrossMm) &&
-  isWithinMm(diameterMm, openingMm) &&
-  isWithinMm(immersedMm, basin.waterDepthMm) &&
-  isWithinMm(lengthMm, basin.heightMm)
+/** Whether one rod can stand there. */
+const canStand = ({ isWide, water: { basin } }: Room, { lengthMm, immersedMm }: Sizes): boolean =>
+  isWide && isWithinMm(immersedMm, basin.waterDepthMm) && isWithinMm(lengthMm, basin.heightMm)
 
 /** Whether one rod can lean or lie there; undefined where that takes a closer look. */
-function canSlant(
-  scene: Scene,
-  { basin, acrossMm, openingMm }: Water,
-  index: number,
-  { lengthMm, diameterMm }: Sizes,
-  isLeaning: boolean,
-): boolean | undefined {
-  const passes = isPlainlyWithin(diameterMm, Math.min(openingMm, basin.waterDepthMm))
-  const isThin = isPlainlyWithin(diameterMm + 2 * clearanceMm, acrossMm)
-  if (passes === false || isThin === false) return false
-  const longest = onceFor(scene, findLongest, diameterMm)[index]
-  const longestMm = isLeaning ? longest?.leaningMm : longest?.flatMm
-  if (typeof longestMm !== 'number') return undefined
+function canSlant({ takesSlanting, longest }: Room, lengthMm: number, isLeaning: boolean): boolean | undefined {
+  if (takesSlanting === false) return false
+  const { leaningMm, flatMm } = longest()
+  const longestMm = isLeaning ? leaningMm : flatMm
+  if (longestMm === null) return undefined
   const isShort = isPlainlyWithin(lengthMm, longestMm)
-  if (isShort === false) return false
-  return passes && isThin && isShort
+  return isShort === false ? false : takesSlanting && isShort
 }
 
 type Orientation = 'vertical' | 'horizontal' | 'any'
 
 /** Whether a single rod fits there in one of the positions; undefined where that takes a closer look. */
-function canBeIn(scene: Scene, water: Water, index: number, sizes: Sizes, orientation: Orientation) {
-  if (orientation !== 'horizontal' && canStand(water, sizes)) return true
+function canBeIn(room: Room, sizes: Sizes, orientation: Orientation): boolean | undefined {
+  if (orientation !== 'horizontal' && canStand(room, sizes)) return true
   if (orientation === 'vertical') return false
-  const leans = orientation === 'any' && canSlant(scene, water, index, sizes, true)
+  const leans = orientation === 'any' && canSlant(room, sizes.lengthMm, true)
   if (leans === true) return true
-  const lies = canSlant(scene, water, index, sizes, false)
+  const lies = canSlant(room, sizes.lengthMm, false)
   return lies === true ? true : lies === false && leans === false ? false : undefined
 }
 
 /** The same anywhere. */
-function findRoom(scene: Scene, sizes: Sizes, orientation: Orientation): boolean | undefined {
-  const { waters } = once(scene, findReach)
+function findRoom(rooms: readonly Room[], sizes: Sizes, orientation: Orientation): boolean | undefined {
   let isUnsure = false
-  for (let index = 0; index < waters.length; index += 1) {
-    const water = waters[index]
-    const can = water && canBeIn(scene, water, index, sizes, orientation)
-    if (can && water.isFree) return true
+  for (const room of rooms) {
+    const can = canBeIn(room, sizes, orientation)
+    if (can && room.water.isFree) return true
     if (can !== false) isUnsure = true
   }
   return isUnsure ? undefined : false
@@ -164,11 +175,10 @@ function canPair({ basin: { lengthMm, widthMm }, acrossMm }: Water, diameterMm: 
 }
 
 /** Two rods in one basin upright; a slanting one takes at least as much room, and several basins are for a closer look. */
-function findRoomForTwo(scene: Scene, sizes: Sizes, orientation: string | undefined): boolean | undefined {
-  const { waters } = once(scene, findReach)
-  const pairs = waters.map((water) => (water.isFree ? canPair(water, sizes.diameterMm) : undefined))
-  if (orientation !== 'horizontal' && waters.some((water, index) => pairs[index] && canStand(water, sizes))) return true
-  return waters.length === 1 && pairs[0] === false ? false : undefined
+function findRoomForTwo(rooms: readonly Room[], sizes: Sizes, orientation: string | undefined): boolean | undefined {
+  const pairs = rooms.map(({ water }) => (water.isFree ? canPair(water, sizes.diameterMm) : undefined))
+  if (orientation !== 'horizontal' && rooms.some((room, index) => pairs[index] && canStand(room, sizes))) return true
+  return rooms.length === 1 && pairs[0] === false ? false : undefined
 }
 
 const readRod = (specs: Specs) => ({
@@ -183,12 +193,13 @@ type RodFacts = ReturnType<typeof readRod>
 
 function lookForRoom(scene: Scene, rod: RodFacts, lengthMm: number, diameterMm: number, way: Way): Glance | undefined {
   const { orientation } = rod
+  const rooms = onceFor(scene, findRooms, diameterMm)
   const sizes = { lengthMm, diameterMm, immersedMm: rod.minImmersionMm ?? lengthMm }
-  const alone = findRoom(scene, sizes, orientation ?? 'vertical')
-  const hasRoom = way.quantity === 2 && alone !== false ? findRoomForTwo(scene, sizes, orientation) : alone
+  const alone = findRoom(rooms, sizes, orientation ?? 'vertical')
+  const hasRoom = way.quantity === 2 && alone !== false ? findRoomForTwo(rooms, sizes, orientation) : alone
   if (hasRoom !== false) return hasRoom && 'pass'
   // Of a rod that does not stand and may or may not lean or lie, nothing is known.
-  if (orientation === undefined && findRoom(scene, sizes, 'any') !== false) return undefined
+  if (orientation === undefined && findRoom(rooms, sizes, 'any') !== false) return undefined
   return isHopeless(once(scene, findReach), sizes, orientation ?? 'vertical') ? 'never' : 'fail'
 }
 

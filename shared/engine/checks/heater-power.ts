@@ -83,6 +83,7 @@ const glanceAtPower = glanceBy(
     // That two would do is more than an outcome.
     return grade === 'pair' ? undefined : outcomeOf[grade]
   },
+  (powerW = 0) => ({ among: 0, hardness: -powerW }),
 )
 
 function judgePower(scene: Scene, candidate: Candidate): Judgement {
@@ -196,10 +197,14 @@ function gradeStrength(scene: Scene, { quantity }: Way, powerW: number, spoken: 
   return { outcome, totalW, limit, changeW }
 }
 
-const glanceAtStrength = glanceBy(readStrength, (scene, { powerW, spoken }, way) => {
-  if (powerW === undefined) return undefined
-  return hasAreas(scene.plan) ? gradeStrength(scene, way, powerW, spoken).outcome : 'unknown'
-})
+const glanceAtStrength = glanceBy(
+  readStrength,
+  (scene, { powerW, spoken }, way) => {
+    if (powerW === undefined) return undefined
+    return hasAreas(scene.plan) ? gradeStrength(scene, way, powerW, spoken).outcome : 'unknown'
+  },
+  ({ powerW = 0, spoken }) => ({ among: spoken, hardness: powerW }),
+)
 
 function judgeStrength(scene: Scene, candidate: Candidate): Judgement {
   const { piece, quantity } = candidate
