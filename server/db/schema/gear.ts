@@ -30,6 +30,20 @@ export interface StoredProvenance {
   readonly revision: number
 }
 
+/** What a piece is called and said of it, beside its specs. */
+export interface StoredIdentity {
+  readonly brand: string
+  readonly model: string
+  readonly status: 'current' | 'discontinued' | 'unknown'
+  readonly gtin: string | null
+  readonly notes: string | null
+}
+
+export interface IdentityChange {
+  readonly before: Partial<StoredIdentity>
+  readonly after: Partial<StoredIdentity>
+}
+
 export type StoredSpecs = Record<string, unknown>
 export type StoredProvenances = Record<string, StoredProvenance>
 
@@ -106,6 +120,8 @@ export const gearRevisions = pgTable(
     summary: text('summary'),
     author: text('author'),
     authorId: integer('author_id').references(() => people.id),
+    /** What it is called, where the revision changed that: both sides, so that it can be taken back. */
+    identity: jsonb('identity').$type<IdentityChange>(),
     /** Who approved it. */
     reviewerId: integer('reviewer_id').references(() => people.id),
     proposalId: uuid('proposal_id'),
@@ -138,6 +154,11 @@ export const gearValues = pgTable(
     files: uuid('files').array().notNull().default([]),
     /** As it was typed. */
     raw: text('raw'),
+    /**
+     * `plain`: used unless a better source stands · `chosen`: settled a dispute, and used until something at least as good
+     * follows · `reset`: nothing before it counts any longer
+     */
+    standing: text('standing').$type<'plain' | 'chosen' | 'reset'>().notNull().default('plain'),
   },
   (table) => [
     primaryKey({ columns: [table.gearId, table.revision, table.key] }),
@@ -150,6 +171,7 @@ export const gearValues = pgTable(
     check('gear_values_author_given', sql`num_nonnulls(${table.author}, ${table.authorId}) = 1`),
     check('gear_values_source_known', sql`${table.source} in ('measured', 'maker', 'estimate')`),
     check('gear_values_removed_whole', sql`(${table.value} is null) = (${table.source} is null)`),
+    check('gear_values_standing_known', sql`${table.standing} in ('plain', 'chosen', 'reset')`),
     check('gear_values_plus_minus_positive', sql`${table.plusMinus} >= 0`),
   ],
 )

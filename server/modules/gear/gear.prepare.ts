@@ -6,6 +6,7 @@ import { toIssues } from '../../lib/to-issues'
 import { identitySchema, revisionSchema } from './gear-input.schema'
 import type { IdentityInput, PieceInput, PreparedPiece, RevisionInput, SpecsState } from './gear.types'
 import { createSlug } from './slug'
+import { takesPlace } from './value-history'
 
 const noSpecs: SpecsState = { number: 0, specs: {}, provenance: {} }
 
@@ -20,6 +21,7 @@ function mergeRevision(before: SpecsState, revision: RevisionInput): SpecsState 
       continue
     }
     const { value, ...backing } = input
+    if (!takesPlace({ source: input.source, standing: 'plain' }, provenance[key])) continue
     specs[key] = value
     provenance[key] = { ...backing, date: revision.date, author: revision.author, revision: number }
   }
