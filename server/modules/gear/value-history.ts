@@ -49,7 +49,6 @@ export function readSources<Row extends HistoryRow>(rows: readonly Row[]): Sourc
     if (row.standing === 'reset') live = []
     live = [...live.filter((other) => !isOvertaken(other, row)), row]
     if (takesPlace(row, used ?? undefined)) used = row
-    else if (!live.includes(used as Row)) used = row
   }
   return { used, live }
 }
