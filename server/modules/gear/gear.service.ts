@@ -38,3 +38,11 @@ export async function getRevision(db: Database, slug: string, number: number): P
   )
   return presentRevision(gear, revision, values, nameAuthor)
 }
+
+/** A piece that is in the catalogue; one that was merged or retired cannot be changed any more. */
+export async function requireLivePiece(db: Database, slug: string): Promise<GearRow> {
+  const row = await requireGear(db, slug)
+  if (row.retiredAt !== null) throw new AppError('gone', `"${slug}" was taken out of the catalogue.`)
+  if (row.mergedInto !== null) throw new AppError('conflict', `"${slug}" was merged into another piece.`)
+  return row
+}

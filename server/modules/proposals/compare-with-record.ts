@@ -1,6 +1,6 @@
 import type { ProposedField } from '#shared/schemas/proposals'
 import type { ProposedValues } from '../../db/schema/index'
-import type { HistoricValue } from '../gear/gear-revise.queries'
+import type { HistoricValue } from '../gear/gear-history.service'
 import { isSameValue, readSources, takesPlace } from '../gear/value-history'
 
 export interface ComparedValue {
