@@ -1,6 +1,7 @@
 import compression from 'compression'
 import express, { Router, type Express } from 'express'
 import type { Env } from './config/env'
+import { getOwnOrigin } from './config/origin'
 import type { Database } from './db/database'
 import { createErrorPage } from './http/error-page'
 import { createLifecycle, type Lifecycle } from './http/lifecycle'
@@ -23,6 +24,7 @@ import { createFitRoutes } from './modules/fit/fit.routes'
 import { createGearRoutes } from './modules/gear/gear.routes'
 import { createKindRoutes } from './modules/kinds/kinds.routes'
 import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
+import { createProposalRoutes } from './modules/proposals/proposals.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
 import { createSetupRoutes } from './modules/setups/setups.routes'
 import { createSystemRoutes } from './modules/system/system.routes'
@@ -73,6 +75,7 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(createSessionRoutes(db, sessions, isHttps))
+  api.use(createProposalRoutes(db, getOwnOrigin(env)))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)
   app.use('/api', refuseUnknownPath)
