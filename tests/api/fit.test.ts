@@ -233,7 +233,7 @@ describe('POST /api/v1/fit', () => {
       { id: 'b', gear: slugOf('rod-a') },
     ]
     const twice = await post('/setups/report', { setup: { ...setup, items } })
-    expect(listPointers(expectProblem(twice, 422))).toEqual(['#/setup/items/2/id'])
+    expect(listPointers(expectProblem(twice, 422))).toEqual(['#/setup/items/0/gear', '#/setup/items/2/id'])
     const body = { setup: { tank: { gear: slugOf('rod-a') }, items: items.slice(0, 2) }, piece: { gear: 'nothing' } }
     expect(listPointers(expectProblem(await post('/fit/check', body), 422))).toEqual([
       '#/piece/gear',

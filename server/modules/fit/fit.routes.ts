@@ -1,21 +1,25 @@
 import { Router, type Request, type Response } from 'express'
+import type { z } from 'zod'
 import { fitCheckRequestSchema, fitRequestSchema } from '#shared/schemas/fit'
 import { replacementsRequestSchema } from '#shared/schemas/replacements'
 import { addEndpoint } from '../../http/methods'
-import { parseBody, readJsonBody } from '../../http/requests'
+import { parseBodyOnce, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
 import type { Catalogue } from '../catalogue/catalogue.service'
+import { findSetupIssues } from '../setups/find-setup-issues'
 import { checkFit, findFits } from './fit.service'
 import { findReplacements } from './replacements.service'
 
 export function createFitRoutes(catalogue: Catalogue): Router {
   const router = Router()
+  const parse = <Schema extends z.ZodType>(schema: Schema, req: Request) =>
+    parseBodyOnce(schema, req, (body) => findSetupIssues(catalogue, body))
 
   addEndpoint(router, '/fit', {
     post: [
       ...readJsonBody,
       async (req: Request, res: Response) =>
-        sendAnswer(res, await findFits(catalogue, parseBody(fitRequestSchema, req))),
+        sendAnswer(res, await findFits(catalogue, await parse(fitRequestSchema, req))),
     ],
   })
 
@@ -23,7 +27,7 @@ export function createFitRoutes(catalogue: Catalogue): Router {
     post: [
       ...readJsonBody,
       async (req: Request, res: Response) =>
-        sendAnswer(res, await checkFit(catalogue, parseBody(fitCheckRequestSchema, req))),
+        sendAnswer(res, await checkFit(catalogue, await parse(fitCheckRequestSchema, req))),
     ],
   })
 
@@ -31,7 +35,7 @@ export function createFitRoutes(catalogue: Catalogue): Router {
     post: [
       ...readJsonBody,
       async (req: Request, res: Response) =>
-        sendAnswer(res, await findReplacements(catalogue, parseBody(replacementsRequestSchema, req))),
+        sendAnswer(res, await findReplacements(catalogue, await parse(replacementsRequestSchema, req))),
     ],
   })
 

@@ -1,9 +1,10 @@
 import { Router, type Request, type Response } from 'express'
 import { reportRequestSchema } from '#shared/schemas/fit'
 import { addEndpoint } from '../../http/methods'
-import { parseBody, readJsonBody } from '../../http/requests'
+import { parseBodyOnce, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
 import type { Catalogue } from '../catalogue/catalogue.service'
+import { findSetupIssues } from './find-setup-issues'
 import { reportSetup } from './setups.service'
 
 export function createSetupRoutes(catalogue: Catalogue): Router {
@@ -12,7 +13,7 @@ export function createSetupRoutes(catalogue: Catalogue): Router {
     post: [
       ...readJsonBody,
       async (req: Request, res: Response) => {
-        const { setup } = parseBody(reportRequestSchema, req)
+        const { setup } = await parseBodyOnce(reportRequestSchema, req, (body) => findSetupIssues(catalogue, body))
         sendAnswer(res, await reportSetup(catalogue, setup))
       },
     ],
