@@ -16,7 +16,8 @@ import { assignNonce, createSecurityHeaders } from './http/security-headers'
 import { createSessionLookup } from './http/session'
 import { createWriteLimits } from './http/write-limits'
 import type { Logger } from './lib/logger'
-import { createSessionRoutes } from './modules/accounts/session.routes'
+import { createAccountContext } from './modules/accounts/account-context'
+import { createAccountRoutes } from './modules/accounts/accounts.routes'
 import { createSessions } from './modules/accounts/sessions.service'
 import { createCatalogue } from './modules/catalogue/catalogue.service'
 import { createAskRoutes } from './modules/ask/ask.routes'
@@ -74,7 +75,7 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
-  api.use(createSessionRoutes(db, sessions, isHttps))
+  api.use(createAccountRoutes(createAccountContext(db, getOwnOrigin(env), now), sessions, isHttps))
   api.use(createProposalRoutes(db, getOwnOrigin(env)))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)

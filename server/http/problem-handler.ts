@@ -37,6 +37,11 @@ function sendProblem(req: Request, res: Response, problem: Problem, errorPage: E
   else res.type('application/problem+json').send(JSON.stringify(problem))
 }
 
+function findRetryAfter(error: AppError | null): number | undefined {
+  if (error?.retryAt === undefined) return problemKinds[error?.code ?? 'internal'].retryAfterSeconds
+  return Math.max(1, Math.ceil((error.retryAt.getTime() - Date.now()) / 1000))
+}
+
 /** Turns whatever was thrown into an RFC 9457 document, or into a page for people. What nobody foresaw is logged, never shown. */
 export function createProblemHandler(errorPage: ErrorPage): ErrorRequestHandler {
   return (error: unknown, req, res, next) => {
@@ -45,7 +50,7 @@ export function createProblemHandler(errorPage: ErrorPage): ErrorRequestHandler 
       res.err = error instanceof Error ? error : new Error(String(error))
     if (res.headersSent) return next(error)
     const problem = toProblem(req, known)
-    const retryAfter = problemKinds[known?.code ?? 'internal'].retryAfterSeconds
+    const retryAfter = findRetryAfter(known)
     if (retryAfter !== undefined) res.set('Retry-After', String(retryAfter))
     sendProblem(req, res, problem, errorPage)
   }

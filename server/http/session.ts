@@ -8,8 +8,9 @@ export type FindSession = (id: string) => Promise<{ readonly actor: Actor; reado
 /** Browsers keep a name with this prefix to HTTPS, this very host and the whole site; over plain HTTP they refuse it. */
 export const nameSessionCookie = (isHttps: boolean): string => (isHttps ? '__Host-session' : 'session')
 
-export function readSessionId(req: Request, isHttps: boolean): string | null {
-  const name = nameSessionCookie(isHttps)
+const nameDeviceCookie = (isHttps: boolean): string => (isHttps ? '__Host-device' : 'device')
+
+function readCookie(req: Request, name: string): string | null {
   for (const part of (req.headers.cookie ?? '').split(';')) {
     const [key, value] = part.trim().split('=', 2)
     if (key === name && value !== undefined && value !== '') return value
@@ -17,13 +18,27 @@ export function readSessionId(req: Request, isHttps: boolean): string | null {
   return null
 }
 
+export const readSessionId = (req: Request, isHttps: boolean): string | null =>
+  readCookie(req, nameSessionCookie(isHttps))
+
+/** What this browser was given when somebody signed in with it. */
+export const readDevice = (req: Request, isHttps: boolean): string | null => readCookie(req, nameDeviceCookie(isHttps))
+
+const shield = (isHttps: boolean) => ({ httpOnly: true, sameSite: 'lax', secure: isHttps, path: '/' }) as const
+
 /** The server ends a session; the cookie merely lives long enough for the longest. */
 export function sendSessionCookie(res: Response, isHttps: boolean, id: string, maxAge: number): void {
-  res.cookie(nameSessionCookie(isHttps), id, { httpOnly: true, sameSite: 'lax', secure: isHttps, path: '/', maxAge })
+  res.cookie(nameSessionCookie(isHttps), id, { ...shield(isHttps), maxAge })
+}
+
+const yearMs = 365 * 24 * 60 * 60 * 1000
+
+export function sendDeviceCookie(res: Response, isHttps: boolean, device: string): void {
+  res.cookie(nameDeviceCookie(isHttps), device, { ...shield(isHttps), maxAge: yearMs })
 }
 
 export function clearSessionCookie(res: Response, isHttps: boolean): void {
-  res.clearCookie(nameSessionCookie(isHttps), { httpOnly: true, sameSite: 'lax', secure: isHttps, path: '/' })
+  res.clearCookie(nameSessionCookie(isHttps), shield(isHttps))
 }
 
 /** Looks up who is signed in, on each request anew: a lost role or a suspension counts from the next one on. */

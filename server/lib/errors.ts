@@ -20,24 +20,27 @@ export type ErrorCode =
   | 'too-many-requests'
   | 'unavailable'
 
+interface AppErrorOptions extends ErrorOptions {
+  readonly extra?: Readonly<Record<string, unknown>>
+  readonly retryAt?: Date
+}
+
 /** What a service throws when it cannot do what was asked. It knows no HTTP: one table in server/http turns codes into statuses. */
 export class AppError extends Error {
   readonly code: ErrorCode
   readonly issues: readonly Issue[]
   /** Members that the problem document carries beside the usual ones, such as `current` of something stale. */
   readonly extra: Readonly<Record<string, unknown>>
+  /** When it is worth trying again. */
+  readonly retryAt: Date | undefined
 
-  constructor(
-    code: ErrorCode,
-    detail: string,
-    issues: readonly Issue[] = [],
-    options: ErrorOptions & { readonly extra?: Readonly<Record<string, unknown>> } = {},
-  ) {
+  constructor(code: ErrorCode, detail: string, issues: readonly Issue[] = [], options: AppErrorOptions = {}) {
     super(detail, options)
     this.name = 'AppError'
     this.code = code
     this.issues = issues
     this.extra = options.extra ?? {}
+    this.retryAt = options.retryAt
   }
 }
 

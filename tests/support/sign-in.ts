@@ -19,7 +19,8 @@ export async function signInAs(
   { email, password }: Credentials,
 ): Promise<SignedInHeaders> {
   const response = await request(app.url).post('/api/v1/session').send({ email, password }).expect(200)
-  const [cookie = ''] = (response.headers['set-cookie'] as string[] | undefined) ?? []
+  const cookies = (response.headers['set-cookie'] as unknown as string[] | undefined) ?? []
+  const cookie = cookies.find((line) => line.includes('session=')) ?? ''
   return { Cookie: cookie.split(';', 1)[0] ?? '', 'Sec-Fetch-Site': 'same-origin' }
 }
 

@@ -1,6 +1,6 @@
 import type { Database } from '../../db/database'
 import type { Role } from '../../db/schema/people'
-import { insertPeople } from './accounts.queries'
+import { insertDemoPeople } from './accounts.queries'
 import { hashPassword } from './passwords'
 
 export interface DemoPerson {
@@ -18,5 +18,5 @@ export async function importDemoPeople(db: Database, demoPeople: readonly DemoPe
       return { name, email, role, passwordHash, emailConfirmedAt: new Date(), isDemo: true }
     }),
   )
-  return insertPeople(db, rows)
+  return insertDemoPeople(db, rows)
 }

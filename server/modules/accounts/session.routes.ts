@@ -1,17 +1,24 @@
 import { Router } from 'express'
 import { signInSchema } from '#shared/schemas/accounts'
-import type { Database } from '../../db/database'
 import { addEndpoint } from '../../http/methods'
 import { parseBody, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
-import { clearSessionCookie, getActor, readSessionId, sendSessionCookie } from '../../http/session'
+import {
+  clearSessionCookie,
+  getActor,
+  readDevice,
+  readSessionId,
+  sendDeviceCookie,
+  sendSessionCookie,
+} from '../../http/session'
+import type { AccountContext } from './account-context'
 import { presentSession } from './accounts.presenter'
 import { sessionLimits } from './session-limits'
 import type { Sessions } from './sessions.service'
 import { checkSignIn } from './sign-in.service'
 
 /** Signing in and out, and who is signed in. */
-export function createSessionRoutes(db: Database, sessions: Sessions, isHttps: boolean): Router {
+export function createSessionRoutes(context: AccountContext, sessions: Sessions, isHttps: boolean): Router {
   const router = Router()
   const endPresent = async (id: string | null) => (id === null ? undefined : sessions.end(id))
 
@@ -20,9 +27,10 @@ export function createSessionRoutes(db: Database, sessions: Sessions, isHttps: b
     post: [
       ...readJsonBody,
       async (req, res) => {
-        const person = await checkSignIn(db, parseBody(signInSchema, req))
-        const id = await sessions.start(person.id, req.get('User-Agent') ?? null)
+        const proven = await checkSignIn(context, parseBody(signInSchema, req), readDevice(req, isHttps))
+        const id = await sessions.start(proven.personId, req.get('User-Agent') ?? null)
         await endPresent(readSessionId(req, isHttps))
+        sendDeviceCookie(res, isHttps, proven.device)
         sendSessionCookie(res, isHttps, id, sessionLimits.absoluteMs)
         sendAnswer(res, presentSession((await sessions.find(id))?.actor ?? null))
       },

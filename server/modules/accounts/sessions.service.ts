@@ -3,6 +3,7 @@ import type { Database } from '../../db/database'
 import type { Actor } from '../../lib/actor'
 import { createSessionAdapter, type Clock, type SessionAttributes, type UserAttributes } from './session-adapter'
 import { sessionLimits } from './session-limits'
+import { deleteOwnSession, listSessions, type SessionRow } from './sessions.queries'
 
 declare module 'lucia' {
   interface Register {
@@ -23,7 +24,12 @@ export interface Sessions {
   readonly start: (personId: number, agent: string | null) => Promise<string>
   readonly find: (id: string) => Promise<FoundSession | null>
   readonly end: (id: string) => Promise<void>
+  readonly list: (personId: number) => Promise<OwnSession[]>
+  /** Ends one of a person's own sessions; answers whether there was such a one. */
+  readonly endOwn: (personId: number, publicId: string) => Promise<boolean>
 }
+
+export type OwnSession = Omit<SessionRow, 'idHash' | 'personId'>
 
 const agentLength = 200
 
@@ -51,5 +57,7 @@ export function createSessions(db: Database, now: Clock = () => new Date()): Ses
       return { actor: user, publicId: session.publicId }
     },
     end: (id) => lucia.invalidateSession(id),
+    list: (personId) => listSessions(db, personId, now()),
+    endOwn: (personId, publicId) => deleteOwnSession(db, personId, publicId),
   }
 }

@@ -2,7 +2,7 @@ import { createHash, randomBytes } from 'node:crypto'
 import type { Database } from '../../db/database'
 import { recordAudit } from '../../lib/audit'
 import { AppError } from '../../lib/errors'
-import { insertLetter, type NewLetter } from './outbox.queries'
+import { deleteLettersTo, insertLetter, type NewLetter } from './outbox.queries'
 import { composeLetter } from './templates/compose-letter'
 import type { LetterContent } from './templates/letter-content'
 import { findNoticeAddress, insertUnsubscribeToken, stopNotices } from './unsubscribe.queries'
@@ -45,3 +45,6 @@ export async function unsubscribe(db: Database, token: string, requestId: string
     await recordAudit(tx, { actorId: personId, ...event, requestId })
   })
 }
+
+/** Takes away every letter to somebody who leaves. */
+export const forgetLettersOf = deleteLettersTo

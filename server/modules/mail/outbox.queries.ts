@@ -103,3 +103,8 @@ export async function requeueStranded(db: Database): Promise<number> {
   for (const { id } of stranded) await enqueueJob(db, 'letters', { id })
   return stranded.length
 }
+
+/** Takes away every letter to somebody, sent or not. */
+export async function deleteLettersTo(db: Database, personId: number, email: string): Promise<void> {
+  await db.delete(outbox).where(or(eq(outbox.personId, personId), sql`lower(${outbox.recipient}) = lower(${email})`))
+}
