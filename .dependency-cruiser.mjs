@@ -86,7 +86,9 @@ export default {
       comment: 'Only routes, server/http and the assembly know Express.',
       severity: 'error',
       from: { path: '^(server|seeds)/', pathNot: '^server/(http/|app\\.ts$|modules/[^/]+/[^/]+\\.routes\\.ts$)' },
-      to: { path: 'node_modules/(@types/)?(express|express-serve-static-core|express-rate-limit|helmet|compression)/' },
+      to: {
+        path: 'node_modules/(@types/)?(express|express-serve-static-core|express-rate-limit|helmet|compression|multer)/',
+      },
     },
     {
       name: 'drizzle-in-queries',

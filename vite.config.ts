@@ -5,7 +5,7 @@ import react from '@vitejs/plugin-react'
 import { defineConfig, type Plugin } from 'vite'
 
 const apiOrigin = process.env.API_ORIGIN ?? 'http://127.0.0.1:4001'
-const proxied = ['/api', '/health', '/ready', '/preferences', '/oembed']
+const proxied = ['/api', '/health', '/ready', '/preferences', '/oembed', '/mailroom.json']
 
 /** Migrations are read at run time, beside the bundle of what runs them. */
 function copyMigrations(): Plugin {
@@ -48,6 +48,7 @@ export default defineConfig({
     server: forNode('dist/server', {
       index: resolve('server/index.ts'),
       migrate: resolve('server/db/migrate.ts'),
+      fakes: resolve('server/services/run-fakes.ts'),
       load: resolve('seeds/load.ts'),
     }),
   },

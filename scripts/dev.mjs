@@ -2,6 +2,7 @@ import { join } from 'node:path'
 import { checkout } from './lib/checkout.mjs'
 import { databaseEnv, prepareDatabase, readGivenDatabase, startOwnDatabase } from './lib/database.mjs'
 import { ensureDependencies } from './lib/dependencies.mjs'
+import { startFakes } from './lib/fakes.mjs'
 import { live } from './lib/lifecycle.mjs'
 import { findFreePort, formatOrigin, readAddress, requirePort } from './lib/ports.mjs'
 import { requireSetpriv, startChild, stopChild } from './lib/processes.mjs'
@@ -23,9 +24,19 @@ await live(
     await ensureDependencies()
     const urls = given ?? (await startOwnDatabase(life))
     await prepareDatabase(urls, { isBuilt: false })
+    const services = await startFakes(life, { isBuilt: false })
 
     const apiPort = await findFreePort()
-    const env = { NODE_ENV: 'development', HOST: '127.0.0.1', PORT: String(apiPort), ...databaseEnv(urls) }
+    const origin = formatOrigin(host, port)
+    const env = {
+      NODE_ENV: 'development',
+      HOST: '127.0.0.1',
+      PORT: String(apiPort),
+      // Pages are visited by way of Vite: links in letters lead there.
+      PUBLIC_ORIGIN: origin,
+      ...databaseEnv(urls),
+      ...services,
+    }
     const vite = join(checkout, 'node_modules/vite/bin/vite.js')
     const children = [
       startChild(process.execPath, ['--watch', '--watch-preserve-output', '--import', 'tsx', 'server/index.ts'], {
@@ -39,7 +50,6 @@ await live(
     ]
     life.defer(() => Promise.all(children.map((child) => stopChild(child, 5_000))))
     for (const child of children) child.once('exit', () => void life.end(1))
-    const origin = formatOrigin(host, port)
     lock.tell(origin)
     say(`Developing at ${origin}`)
     return null

@@ -3,6 +3,7 @@ import { ensureBuild } from './lib/build.mjs'
 import { checkout } from './lib/checkout.mjs'
 import { databaseEnv, prepareDatabase, readGivenDatabase, startOwnDatabase } from './lib/database.mjs'
 import { ensureDependencies } from './lib/dependencies.mjs'
+import { startFakes } from './lib/fakes.mjs'
 import { live } from './lib/lifecycle.mjs'
 import { takeRunLock } from './lib/run-lock.mjs'
 import { formatOrigin, readAddress, requirePort } from './lib/ports.mjs'
@@ -45,6 +46,7 @@ await live(
     await ensureBuild()
     const urls = given ?? (await startOwnDatabase(life))
     await prepareDatabase(urls, { isBuilt: true })
+    const services = await startFakes(life, { isBuilt: true })
 
     const server = startChild(process.execPath, [join(checkout, 'dist/server/index.js')], {
       cwd: checkout,
@@ -56,6 +58,7 @@ await live(
         HOST: host,
         PORT: String(port),
         ...databaseEnv(urls),
+        ...services,
       },
     })
     life.defer(() => stopChild(server, 15_000))

@@ -18,12 +18,17 @@ import { createWriteLimits } from './http/write-limits'
 import type { Logger } from './lib/logger'
 import { createAccountContext } from './modules/accounts/account-context'
 import { createAccountRoutes } from './modules/accounts/accounts.routes'
+import type { FileStore } from './services/files/file-store'
 import { createSessions } from './modules/accounts/sessions.service'
 import { createCatalogue } from './modules/catalogue/catalogue.service'
+import { createAuditRoutes } from './modules/audit/audit.routes'
 import { createAskRoutes } from './modules/ask/ask.routes'
+import { createEvidenceRoutes } from './modules/evidence/evidence.routes'
 import { createFitRoutes } from './modules/fit/fit.routes'
 import { createGearRoutes } from './modules/gear/gear.routes'
 import { createKindRoutes } from './modules/kinds/kinds.routes'
+import { createMailRoutes } from './modules/mail/mail.routes'
+import { createMailroomRoutes } from './modules/mail/mailroom.routes'
 import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
 import { createProposalRoutes } from './modules/proposals/proposals.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
@@ -39,17 +44,20 @@ export interface AppDependencies {
   /** The built client; without it there is the API alone. */
   readonly pages?: Pages | null
   readonly rateLimits?: Partial<RateLimits>
+  /** Where photos and documents lie; without it none can be added. */
+  readonly files?: FileStore | null
   /** What time it is; tests move it. */
   readonly now?: () => Date
 }
 
 /** Puts the parts together; everything that lives outside the process is handed in. */
 export function createApp(dependencies: AppDependencies): Express {
-  const { db, env, logger, lifecycle = createLifecycle(), pages = null, now } = dependencies
+  const { db, env, logger, lifecycle = createLifecycle(), pages = null, files = null, now } = dependencies
   const rateLimits = { ...defaultRateLimits, ...dependencies.rateLimits }
   const isHttps = env.PUBLIC_ORIGIN?.startsWith('https:') ?? false
   const catalogue = createCatalogue(db)
   const sessions = createSessions(db, now)
+  const mailroomFolder = env.DEMO ? (env.MAILROOM_FOLDER ?? null) : null
 
   const app = express()
   app.disable('x-powered-by')
@@ -77,11 +85,13 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(createAccountRoutes(createAccountContext(db, getOwnOrigin(env), now), sessions, isHttps))
   api.use(createProposalRoutes(db, getOwnOrigin(env)))
+  api.use(createEvidenceRoutes(db, files), createMailRoutes(db), createAuditRoutes(db))
+  api.use(createMailroomRoutes(mailroomFolder, '/mailroom'))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)
   app.use('/api', refuseUnknownPath)
 
-  app.use(createPreferenceRoutes(isHttps))
+  app.use(createPreferenceRoutes(isHttps), createMailroomRoutes(mailroomFolder, '/mailroom.json'))
   if (pages !== null) app.use(createPageRoutes(app, pages, rateLimits.pagesPerMinute))
   app.use(refuseUnknownPath)
   app.use(createProblemHandler(pages?.errorPage ?? createErrorPage()))

@@ -9,6 +9,8 @@ import { createLifecycle } from './http/lifecycle'
 import { loadPages } from './http/render'
 import { createLogger } from './lib/logger'
 import { refreshSearchTexts } from './modules/gear/gear-search.service'
+import { createFileStoreFrom, createMailerFrom } from './services/from-env'
+import { startWorkers } from './workers'
 
 function readEnvOrExit(): Env {
   try {
@@ -35,9 +37,15 @@ const database = createDatabaseClient(env.DATABASE_URL, {
 const pages = await loadPages(findDistFolder())
 if (pages === null) logger.warn('there is no build of the client: the API answers alone')
 
-const app = createApp({ db: database.db, env, logger, lifecycle, pages })
+const mailer = createMailerFrom(env)
+if (mailer === null) logger.warn('SMTP_URL is not set: letters wait in the outbox')
+const files = createFileStoreFrom(env)
+if (files === null) logger.warn('S3_ENDPOINT is not set: no photo or document can be added')
+
+const app = createApp({ db: database.db, env, logger, lifecycle, pages, files })
 const server: Server = app.listen(env.PORT, env.HOST)
-server.requestTimeout = 30_000
+// Long enough for the largest photo on a slow line; headers have to come soon all the same.
+server.requestTimeout = 300_000
 server.headersTimeout = 15_000
 server.keepAliveTimeout = 10_000
 
@@ -53,6 +61,20 @@ server.once('error', (error: NodeJS.ErrnoException) => {
   process.exit(1)
 })
 
+// Connections of their own: a burst of requests holds up no letter, nor letters a request.
+const jobDatabase = createDatabaseClient(env.DATABASE_URL, {
+  max: 3,
+  onError: (error) => logger.warn({ err: error }, 'an idle database connection of the jobs was lost'),
+})
+const workers = startWorkers({
+  db: jobDatabase.db,
+  env,
+  logger,
+  mailer,
+  files,
+  executeSql: (text, values) => jobDatabase.pool.query(text, values),
+})
+
 let isStopping = false
 
 async function stop(signal: NodeJS.Signals): Promise<void> {
@@ -60,8 +82,10 @@ async function stop(signal: NodeJS.Signals): Promise<void> {
   if (isStopping) process.exit(1)
   isStopping = true
   logger.info({ signal }, 'draining')
-  await drain(server, lifecycle)
-  await database.close()
+  await Promise.all([drain(server, lifecycle), workers.stop()])
+  mailer?.close()
+  files?.close()
+  await Promise.all([database.close(), jobDatabase.close()])
   process.exit(0)
 }
 

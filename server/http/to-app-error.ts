@@ -1,5 +1,6 @@
 import { isDatabaseAway } from '../db/errors'
 import { AppError, type ErrorCode } from '../lib/errors'
+import { FileStoreError } from '../services/files/file-store-error'
 
 const codeByStatus: Readonly<Record<number, ErrorCode>> = {
   400: 'malformed',
@@ -22,6 +23,10 @@ function hasStatus(error: unknown): error is { status: number; type?: unknown } 
 /** What Express, its body parser or the database threw, in our own words; null for what nobody foresaw. */
 export function toAppError(error: unknown): AppError | null {
   if (error instanceof AppError) return error
+  if (error instanceof FileStoreError) {
+    const detail = 'Photos and documents cannot be reached just now. Nothing was changed; please try again in a moment.'
+    return new AppError('unavailable', detail, [], { cause: error })
+  }
   if (isDatabaseAway(error)) {
     return new AppError('unavailable', 'The database does not answer. Please try again in a moment.', [], {
       cause: error,

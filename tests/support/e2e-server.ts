@@ -1,4 +1,8 @@
 import { spawn } from 'node:child_process'
+import { mkdtempSync, rmSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
+import { startFakes } from '../../scripts/lib/fakes.mjs'
 import { findFreePort } from '../../scripts/lib/ports.mjs'
 import { startTestCluster } from '../../scripts/lib/test-cluster.mjs'
 import { createTestDatabase } from './test-database'
@@ -28,6 +32,11 @@ export default async function setUpServer(): Promise<() => Promise<void>> {
     await startTestCluster((undo) => undos.push(undo))
     const database = await createTestDatabase()
     undos.push(database.drop)
+    const folder = mkdtempSync(join(tmpdir(), 'stillfits-e2e-'))
+    undos.push(() => rmSync(folder, { recursive: true, force: true }))
+    let isEnding = false
+    const life = { defer: (undo: () => unknown) => void undos.push(undo), isEnding: () => isEnding }
+    const services = await startFakes(life, { isBuilt: true, folder }, {})
     const port = await findFreePort()
     const origin = `http://127.0.0.1:${port}`
     const server = spawn('setpriv', ['--pdeathsig=TERM', '--', process.execPath, 'dist/server/index.js'], {
@@ -39,10 +48,12 @@ export default async function setUpServer(): Promise<() => Promise<void>> {
         HOST: '127.0.0.1',
         PORT: String(port),
         DATABASE_URL: database.databaseUrl,
+        ...services,
       },
     })
     const ended = new Promise((resolve) => server.once('exit', resolve))
     undos.push(async () => {
+      isEnding = true
       server.kill('SIGTERM')
       await ended
     })

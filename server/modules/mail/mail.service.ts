@@ -2,7 +2,7 @@ import { createHash, randomBytes } from 'node:crypto'
 import type { Database } from '../../db/database'
 import { recordAudit } from '../../lib/audit'
 import { AppError } from '../../lib/errors'
-import { deleteLettersTo, insertLetter, type NewLetter } from './outbox.queries'
+import { deleteLettersTo, deleteOldLetters, insertLetter, requeueStranded, type NewLetter } from './outbox.queries'
 import { composeLetter } from './templates/compose-letter'
 import type { LetterContent } from './templates/letter-content'
 import { findNoticeAddress, insertUnsubscribeToken, stopNotices } from './unsubscribe.queries'
@@ -48,3 +48,9 @@ export async function unsubscribe(db: Database, token: string, requestId: string
 
 /** Takes away every letter to somebody who leaves. */
 export const forgetLettersOf = deleteLettersTo
+
+/** Forgets letters that have had their time, and gives those that wait without a job another; says how many. */
+export async function sweepLetters(db: Database): Promise<number> {
+  await deleteOldLetters(db)
+  return requeueStranded(db)
+}

@@ -108,3 +108,15 @@ export async function requeueStranded(db: Database): Promise<number> {
 export async function deleteLettersTo(db: Database, personId: number, email: string): Promise<void> {
   await db.delete(outbox).where(or(eq(outbox.personId, personId), sql`lower(${outbox.recipient}) = lower(${email})`))
 }
+
+/** Letters are kept as long as somebody may ask what became of them. */
+export async function deleteOldLetters(db: Database): Promise<void> {
+  await db
+    .delete(outbox)
+    .where(
+      or(
+        and(eq(outbox.status, 'sent'), lt(outbox.sentAt, sql`now() - interval '30 days'`)),
+        and(eq(outbox.status, 'dead'), lt(outbox.createdAt, sql`now() - interval '90 days'`)),
+      ),
+    )
+}

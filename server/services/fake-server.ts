@@ -1,0 +1,5 @@
+/** A local stand-in for a hosted service. */
+export interface FakeServer {
+  readonly port: number
+  readonly stop: () => Promise<void>
+}
