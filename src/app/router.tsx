@@ -31,6 +31,8 @@ export function createRoutes(app: App): RouteObject[] {
               path: '/gear/:slug/history',
               lazy: createLazy(app, () => import('./routes/gear-history')),
             },
+            { id: 'gear-new', path: paths.gearNew, lazy: createLazy(app, () => import('./routes/gear-new')) },
+            { id: 'gear-edit', path: '/gear/:slug/edit', lazy: createLazy(app, () => import('./routes/gear-edit')) },
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
             { id: 'setup-new', path: paths.setupNew, lazy: createLazy(app, () => import('./routes/setup-new')) },
             { id: 'setup', path: paths.setup, lazy: createLazy(app, () => import('./routes/setup-link')) },

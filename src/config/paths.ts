@@ -19,5 +19,9 @@ export const paths = {
   revertPerson: (name: string) => `/admin/people/${encodeURIComponent(name)}/revert`,
   /** Comes back to `next` afterwards. */
   signIn: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,
+  gearNew: '/gear/new',
+  gearEdit: (slug: string) => `/gear/${encodeURIComponent(slug)}/edit`,
+  proposals: '/proposals',
+  proposal: (id: string) => `/proposals/${encodeURIComponent(id)}`,
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

@@ -22,3 +22,15 @@ export async function requireData<T, Key extends QueryKey>(
     return throwFailure(error)
   }
 }
+
+/** As `requireData`, never from what was fetched earlier: for forms, which change things from there. */
+export async function requireFresh<T, Key extends QueryKey>(
+  app: App,
+  options: EnsureQueryDataOptions<T, Error, T, Key>,
+): Promise<T> {
+  try {
+    return await app.queryClient.fetchQuery({ ...options, staleTime: 0 })
+  } catch (error) {
+    return throwFailure(error)
+  }
+}

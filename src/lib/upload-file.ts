@@ -1,4 +1,5 @@
 import { apiBase } from './api-client'
+import { createKey } from './create-key'
 import { ApiError, readProblem } from './problem'
 
 export interface UploadOptions {
@@ -44,6 +45,7 @@ export async function uploadFile(path: string, file: File, { fields = {}, onProg
       )
     request.open('POST', `${apiBase}${path}`)
     request.setRequestHeader('Accept', 'application/json')
+    request.setRequestHeader('Idempotency-Key', createKey())
     signal?.addEventListener('abort', stop)
     const form = new FormData()
     // Fields first: a reader of the stream knows them before the file arrives.
