@@ -30,8 +30,10 @@ import { createKindRoutes } from './modules/kinds/kinds.routes'
 import { createMailRoutes } from './modules/mail/mail.routes'
 import { createMailroomRoutes } from './modules/mail/mailroom.routes'
 import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
+import { createDecisionRoutes } from './modules/proposals/decision.routes'
 import { createProposalRoutes } from './modules/proposals/proposals.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
+import { createReviewRoutes } from './modules/review/review.routes'
 import { createSetupRoutes } from './modules/setups/setups.routes'
 import { createSystemRoutes } from './modules/system/system.routes'
 import { createWorksheetRoutes } from './modules/worksheets/worksheets.routes'
@@ -55,6 +57,7 @@ export function createApp(dependencies: AppDependencies): Express {
   const { db, env, logger, lifecycle = createLifecycle(), pages = null, files = null, now } = dependencies
   const rateLimits = { ...defaultRateLimits, ...dependencies.rateLimits }
   const isHttps = env.PUBLIC_ORIGIN?.startsWith('https:') ?? false
+  const origin = getOwnOrigin(env)
   const catalogue = createCatalogue(db)
   const sessions = createSessions(db, now)
   const mailroomFolder = env.DEMO ? (env.MAILROOM_FOLDER ?? null) : null
@@ -83,8 +86,9 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createWorksheetRoutes(catalogue))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
-  api.use(createAccountRoutes(createAccountContext(db, getOwnOrigin(env), now), sessions, isHttps))
-  api.use(createProposalRoutes(db, getOwnOrigin(env)))
+  api.use(createAccountRoutes(createAccountContext(db, origin, now), sessions, isHttps))
+  api.use(createProposalRoutes(db, origin), createDecisionRoutes(db, origin))
+  api.use(createReviewRoutes(db))
   api.use(createEvidenceRoutes(db, files), createMailRoutes(db), createAuditRoutes(db))
   api.use(createMailroomRoutes(mailroomFolder, '/mailroom'))
   api.use(refuseUnknownPath)

@@ -6,11 +6,11 @@ import type { ProposedIdentity, StoredIdentity, StoredProvenance, StoredProvenan
 import { AppError, type Issue } from '../../lib/errors'
 import { toIssues } from '../../lib/to-issues'
 import { insertPiece, insertRevision, updatePiece, type NewValue } from './gear-revise.queries'
-import { lockHead } from './gear-writes.queries'
+import { lockHeadById } from './gear-writes.queries'
 import { createSlug } from './slug'
 import { takesPlace } from './value-history'
 
-export type Head = NonNullable<Awaited<ReturnType<typeof lockHead>>>
+export type Head = NonNullable<Awaited<ReturnType<typeof lockHeadById>>>
 
 /** A person's change of a piece, approved by another. */
 export interface Change {
@@ -114,4 +114,11 @@ export async function revisePiece(tx: Database, head: Head, change: Change): Pro
   await insertRevision(tx, { ...rest, gearId: head.id, number, specs: state.specs, identity: changed, values })
   await updatePiece(tx, head.id, { kind: head.kind, identity: after, number, ...state }).catch(explainTaken)
   return number
+}
+
+/** Takes a piece's lock, so that nobody else builds on the same head. */
+export async function lockPiece(tx: Database, id: number): Promise<Head> {
+  const head = await lockHeadById(tx, id)
+  if (head === null) throw new Error(`There is no piece ${id}`)
+  return head
 }

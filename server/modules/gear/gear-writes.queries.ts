@@ -74,6 +74,11 @@ export async function lockHead(db: Database, slug: string) {
   return row ?? null
 }
 
+export async function lockHeadById(db: Database, id: number) {
+  const [row] = await db.select(headColumns).from(gear).where(eq(gear.id, id)).for('update')
+  return row ?? null
+}
+
 export async function lockHeads(db: Database, slugs: readonly string[]) {
   if (slugs.length === 0) return []
   return db

@@ -102,7 +102,7 @@ export function presentProposal(actor: Actor, whole: WholeProposal, nameAuthor: 
     record,
     baseRevision: row.baseRevision,
     identityNow: presentIdentityNow(row),
-    identity: row.identity as Proposal['identity'],
+    identity: row.identity,
     values,
     fields: Object.fromEntries(fields),
     conflicts: row.status === 'approved' ? [] : listConflicts(compared),

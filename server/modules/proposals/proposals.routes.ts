@@ -9,6 +9,7 @@ import {
   proposalsQuerySchema,
 } from '#shared/schemas/proposals'
 import type { Database } from '../../db/database'
+import { createIdempotency } from '../../http/idempotency'
 import { getRequestId } from '../../http/logging'
 import { addEndpoint } from '../../http/methods'
 import { parseBody, parseQuery, readJsonBody } from '../../http/requests'
@@ -39,6 +40,7 @@ export function createProposalRoutes(db: Database, origin: string): Router {
     },
     post: [
       ...readJsonBody,
+      createIdempotency(db),
       async (req, res) => {
         const actor = requireActor(res)
         const proposal = await createProposal(db, actor, parseBody(proposalRequestSchema, req), trace(req))

@@ -19,12 +19,23 @@ export async function requireReadable(db: Database, actor: Actor, id: string): P
   return row
 }
 
+export interface AuthorRecord {
+  readonly accepted: number
+  readonly declined: number
+}
+
+/** What became of people's earlier proposals. */
+export async function findRecords(db: Database, authorIds: readonly number[]): Promise<(id: number) => AuthorRecord> {
+  const rows = await listRecords(db, authorIds)
+  const records = new Map(rows.map(({ authorId, accepted, declined }) => [authorId, { accepted, declined }]))
+  return (id) => records.get(id) ?? { accepted: 0, declined: 0 }
+}
+
 async function describe(db: Database, actor: Actor, row: ProposalRow): Promise<Proposal> {
   const history = await readHistory(db, row.gearId)
   const messages = await listMessages(db, row.id)
   const files = await listFiles(db, row.id)
-  const [record = { accepted: 0, declined: 0 }] = await listRecords(db, [row.authorId])
-  const { accepted, declined } = record
+  const findRecord = await findRecords(db, [row.authorId])
   const nameAuthor = await findNames(db, [
     row.authorId,
     row.decidedBy,
@@ -34,7 +45,7 @@ async function describe(db: Database, actor: Actor, row: ProposalRow): Promise<P
     ...listNamed(history),
   ])
   const compared = compareWithRecord(history, row.baseRevision, row.values)
-  return presentProposal(actor, { row, compared, messages, files, record: { accepted, declined } }, nameAuthor)
+  return presentProposal(actor, { row, compared, messages, files, record: findRecord(row.authorId) }, nameAuthor)
 }
 
 export async function getProposal(db: Database, actor: Actor, id: string): Promise<Proposal> {

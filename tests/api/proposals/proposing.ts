@@ -1,6 +1,8 @@
+import { randomUUID } from 'node:crypto'
 import request from 'supertest'
 import { expect } from 'vitest'
 import { proposalSchema, type Proposal } from '../../../shared/schemas/proposals'
+import { defaultRateLimits } from '../../../server/http/rate-limits'
 import { importPieces } from '../../../server/modules/gear/gear-writes.service'
 import { startApp, type TestApp } from '../../support/app'
 import { signIn, type SignedInHeaders } from '../../support/sign-in'
@@ -12,14 +14,14 @@ export interface Desk extends TestApp {
   readonly admin: SignedInHeaders
 }
 
+const roomyLimits = { ...defaultRateLimits, writesPerHour: 5000, proposalsPerHour: 5000 }
+
 /** The app with its three demo people signed in. */
 export async function startDesk(): Promise<Desk> {
-  const app = await startApp()
-  const [member, moderator, admin] = [
-    await signIn(app, 'member'),
-    await signIn(app, 'moderator'),
-    await signIn(app, 'admin'),
-  ]
+  const app = await startApp({ app: { rateLimits: roomyLimits } })
+  const member = await signIn(app, 'member')
+  const moderator = await signIn(app, 'moderator')
+  const admin = await signIn(app, 'admin')
   return { ...app, member, moderator, admin }
 }
 
@@ -44,9 +46,9 @@ export function send(
   path: string,
   { body, version }: { readonly body?: object; readonly version?: number | string } = {},
 ) {
-  const call = request(desk.url)
-    [method](`/api/v1${path}`)
-    .set(who ?? {})
+  const agent = request(desk.url)
+  const call = agent[method](`/api/v1${path}`).set(who ?? {})
+  if (path === '/proposals' && method === 'post') void call.set('Idempotency-Key', randomUUID())
   if (version !== undefined) void call.set('If-Match', typeof version === 'string' ? version : `"v${version}"`)
   return body === undefined ? call : call.send(body)
 }
