@@ -3,29 +3,10 @@ import { limits } from '../limits'
 import { lineSchema, slugSchema, sourceOfValueSchema } from './gear'
 import { cursorSchema, kindSchema } from './gear-requests'
 import { leaseSchema } from './proposals'
+import { ages, queueSorts, reasons, type ReasonCode } from './review-choices'
 import { wordsSchema } from './text-fields'
 
-/** Why a proposal goes back, or is declined: ours, short, and never without words beside it. */
-export const reasons = {
-  'send-back': {
-    'evidence-missing': 'Nothing backs the value yet',
-    'evidence-unclear': 'The evidence cannot be read or shows something else',
-    'number-doubtful': 'The number looks mistyped',
-    'unit-doubtful': 'The number looks taken in another unit',
-    'place-doubtful': 'It seems measured at another place than the guide shows',
-    question: 'A question comes first',
-  },
-  decline: {
-    'already-there': 'The record says this already',
-    'better-known': 'A better source says otherwise',
-    'not-backed': 'Nothing backs it, and nothing came when asked',
-    'other-piece': 'It is about another piece of gear',
-    'out-of-scope': 'It is nothing that this record keeps',
-    mischief: 'It was not meant to be true',
-  },
-} as const
-
-export type ReasonCode = keyof (typeof reasons)['send-back'] | keyof (typeof reasons)['decline']
+export { reasons, type ReasonCode }
 
 const decisionNames = ['approve', 'send-back', 'decline'] as const
 const reasonCodes = [...Object.keys(reasons['send-back']), ...Object.keys(reasons.decline)] as [
@@ -64,9 +45,6 @@ export const decisionRequestSchema = z
     if (words === undefined) complain('words', 'are needed: its author reads them')
     if (fields !== undefined) complain('fields', 'must be left out unless you approve')
   })
-
-export const ages = ['day', 'week', 'month'] as const
-export const queueSorts = ['oldest', 'newest', 'flagged', 'newcomers'] as const
 
 export const queueQuerySchema = z.strictObject({
   kind: kindSchema.optional(),

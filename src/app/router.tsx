@@ -49,6 +49,12 @@ export function createRoutes(app: App): RouteObject[] {
               lazy: createLazy(app, () => import('./routes/worksheets-sheet')),
             },
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
+            { id: 'review', path: paths.review, lazy: createLazy(app, () => import('./routes/review')) },
+            {
+              id: 'review-proposal',
+              path: '/review/:proposalId',
+              lazy: createLazy(app, () => import('./routes/review-proposal')),
+            },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],
         },

@@ -19,3 +19,6 @@ export function printDate(iso: string): string {
   const name = months[(month ?? 0) - 1]
   return name === undefined || !day || !year ? iso : `${day} ${name} ${year}`
 }
+
+/** "3 March 2025, 14:05 UTC" */
+export const printMoment = (iso: string): string => `${printDate(iso)}, ${iso.slice(11, 16)} UTC`

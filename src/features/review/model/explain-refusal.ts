@@ -1,0 +1,33 @@
+import type { Proposal } from '#shared/schemas/proposals'
+import { toApiError } from '../../../lib/problem'
+import { decisionWordsId, fieldChoiceId, fieldWordsId, reasonId, type DraftError } from './decision-draft'
+import { listAmendments } from './list-amendments'
+
+/** Why a decision did not count. What was typed is kept in every case. */
+export type Refusal =
+  | { readonly kind: 'wrong'; readonly errors: readonly DraftError[] }
+  /** Its author was quicker. */
+  | { readonly kind: 'amended'; readonly changed: readonly string[] }
+  /** Another moderator was quicker, or is at it. */
+  | { readonly kind: 'overtaken'; readonly detail: string }
+  | { readonly kind: 'failed'; readonly detail: string }
+
+function locate(pointer: string): string {
+  const [part, key = '', end] = pointer.replace(/^#\//, '').split('/')
+  if (part === 'reasonCode') return reasonId
+  if (part !== 'fields') return decisionWordsId
+  return end === 'words' ? fieldWordsId(key) : fieldChoiceId(key)
+}
+
+/** `read` is what the decision was about, `now` how it stands: null where that could not be read either. */
+export function explainRefusal(error: unknown, read: Proposal, now: Proposal | null): Refusal {
+  const { status, message, errors } = toApiError(error)
+  if (status === 412 && now?.status === 'pending') return { kind: 'amended', changed: listAmendments(read, now) }
+  if (status === 409 || status === 412) return { kind: 'overtaken', detail: message }
+  if (status === 422 && errors.length > 0)
+    return {
+      kind: 'wrong',
+      errors: errors.map(({ pointer, detail }) => ({ fieldId: locate(pointer), message: detail })),
+    }
+  return { kind: 'failed', detail: message }
+}
