@@ -2,13 +2,7 @@ import { reasons } from '#shared/schemas/review-choices'
 import { Button } from '../../../components/ui/button'
 import { SelectField } from '../../../components/ui/select-field'
 import { TextareaField } from '../../../components/ui/textarea-field'
-import {
-  countApproved,
-  decisionWordsId,
-  reasonId,
-  type Course,
-  type DecisionDraft,
-} from '../model/decision-draft'
+import { countApproved, decisionWordsId, reasonId, type Course, type DecisionDraft } from '../model/decision-draft'
 import type { DeskField } from '../model/list-fields'
 
 export interface DecisionFormProps {

@@ -20,7 +20,11 @@ function Effect({ effect: { origin, question, before, after } }: { readonly effe
     <li className="border-t border-rule py-2">
       <p>{question}</p>
       <p className="flex flex-wrap items-center gap-x-2 text-sm">
-        {before === null ? <span className="text-ink-soft">not in the answers</span> : <VerdictBadge verdict={before} />}
+        {before === null ? (
+          <span className="text-ink-soft">not in the answers</span>
+        ) : (
+          <VerdictBadge verdict={before} />
+        )}
         <span aria-hidden="true">→</span>
         <span className="sr-only">would become</span>
         <VerdictBadge verdict={after} />

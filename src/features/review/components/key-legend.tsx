@@ -16,7 +16,9 @@ export function KeyLegend({ shortcuts }: KeyLegendProps) {
           {shortcuts.map(({ key, label }) => (
             <div key={key} className="flex items-center gap-1.5">
               <dt>
-                <kbd className="rounded-ui border border-ink-soft bg-sheet px-1.5 font-mono text-xs text-ink">{key}</kbd>
+                <kbd className="rounded-ui border border-ink-soft bg-sheet px-1.5 font-mono text-xs text-ink">
+                  {key}
+                </kbd>
               </dt>
               <dd>{label}</dd>
             </div>

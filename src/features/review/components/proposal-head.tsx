@@ -50,7 +50,9 @@ export function ProposalHead({ proposal, readAt, search }: ProposalHeadProps) {
         From {isMine ? 'you' : author} (<RecordWords record={record} />)
         {submittedAt !== null && <>, sent in {printSince(submittedAt, readAt)} ago</>}
       </p>
-      {summary !== null && <blockquote className="mt-2 max-w-prose border-l-[3px] border-rule pl-3">{summary}</blockquote>}
+      {summary !== null && (
+        <blockquote className="mt-2 max-w-prose border-l-[3px] border-rule pl-3">{summary}</blockquote>
+      )}
     </>
   )
 }

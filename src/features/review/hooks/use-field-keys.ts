@@ -42,6 +42,10 @@ export function useFieldKeys({ proposal, fields, kept, hold }: Review): readonly
       label: proposal.lease?.isMine ? 'let go' : 'take',
       run: () => hold(proposal.lease?.isMine ? 'release' : 'take'),
     },
-    { key: 'd', label: 'to the decision', run: () => document.querySelector<HTMLElement>('[name="course"]:checked')?.focus() },
+    {
+      key: 'd',
+      label: 'to the decision',
+      run: () => document.querySelector<HTMLElement>('[name="course"]:checked')?.focus(),
+    },
   ]
 }

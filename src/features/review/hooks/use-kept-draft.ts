@@ -1,7 +1,10 @@
-import { useEffect, useState } from 'react'
+import { useMemo, useSyncExternalStore } from 'react'
 import { emptyDraft, type DecisionDraft } from '../model/decision-draft'
 
 const storageKey = (id: string): string => `stillfits.decision.${id}`
+const listeners = new Set<() => void>()
+/** What this page wrote: holds where storage is full or forbidden. */
+const written = new Map<string, string | null>()
 
 function attempt<T>(access: () => T): T | null {
   try {
@@ -11,35 +14,48 @@ function attempt<T>(access: () => T): T | null {
   }
 }
 
-function readKept(id: string): Partial<DecisionDraft> | null {
-  const text = attempt(() => sessionStorage.getItem(storageKey(id)))
-  const value = text === null ? null : attempt(() => JSON.parse(text) as unknown)
-  return typeof value === 'object' ? value : null
+function readText(id: string): string | null {
+  const mine = written.get(id)
+  return mine === undefined ? attempt(() => sessionStorage.getItem(storageKey(id))) : mine
+}
+
+function writeText(id: string, text: string | null): void {
+  written.set(id, text)
+  attempt(() => {
+    if (text === null) sessionStorage.removeItem(storageKey(id))
+    else sessionStorage.setItem(storageKey(id), text)
+  })
+  for (const listener of listeners) listener()
+}
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener)
+  return () => listeners.delete(listener)
+}
+
+function parseDraft(text: string | null): DecisionDraft {
+  const kept = text === null ? null : attempt(() => JSON.parse(text) as Partial<DecisionDraft> | null)
+  return { ...emptyDraft, ...kept }
 }
 
 export interface KeptDraft {
   readonly draft: DecisionDraft
   readonly change: (change: Partial<DecisionDraft>) => void
-  /** Once it is sent. */
+  /** Once it is sent, or thrown away. */
   readonly drop: () => void
 }
 
 /** A decision in the making outlives a reload of the tab, and whatever others do meanwhile. */
 export function useKeptDraft(id: string): KeptDraft {
-  const [draft, setDraft] = useState(emptyDraft)
-  useEffect(() => {
-    const kept = readKept(id)
-    // Storage is there in the browser alone: the server rendered an empty form.
-    if (kept) setDraft((now) => ({ ...now, ...kept }))
-  }, [id])
-  const change = (wanted: Partial<DecisionDraft>) => {
-    const next = { ...draft, ...wanted }
-    setDraft(next)
-    attempt(() => sessionStorage.setItem(storageKey(id), JSON.stringify(next)))
+  const text = useSyncExternalStore(
+    subscribe,
+    () => readText(id),
+    () => null,
+  )
+  const draft = useMemo(() => parseDraft(text), [text])
+  return {
+    draft,
+    change: (change) => writeText(id, JSON.stringify({ ...parseDraft(readText(id)), ...change })),
+    drop: () => writeText(id, null),
   }
-  const drop = () => {
-    setDraft(emptyDraft)
-    attempt(() => sessionStorage.removeItem(storageKey(id)))
-  }
-  return { draft, change, drop }
 }
