@@ -32,6 +32,7 @@ import { createMailroomRoutes } from './modules/mail/mailroom.routes'
 import { createOpenApiRoutes } from './modules/openapi/openapi.routes'
 import { createDecisionRoutes } from './modules/proposals/decision.routes'
 import { createProposalRoutes } from './modules/proposals/proposals.routes'
+import { createPeopleRoutes } from './modules/people/people.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
 import { createReviewRoutes } from './modules/review/review.routes'
 import { createSetupRoutes } from './modules/setups/setups.routes'
@@ -91,6 +92,7 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createReviewRoutes(db))
   api.use(createEvidenceRoutes(db, files), createMailRoutes(db), createAuditRoutes(db))
   api.use(createMailroomRoutes(mailroomFolder, '/mailroom'))
+  api.use(createPeopleRoutes(db, origin))
   api.use(refuseUnknownPath)
   app.use('/api/v1', api)
   app.use('/api', refuseUnknownPath)

@@ -1,5 +1,5 @@
 import type { Request, RequestHandler, Response } from 'express'
-import type { Actor } from '../lib/actor'
+import { isAdmin, type Actor } from '../lib/actor'
 import { AppError } from '../lib/errors'
 
 /** Who a session's id stands for; `publicId` is what a person's own list calls the session by. */
@@ -60,6 +60,13 @@ export function getActor(res: Response): Actor | null {
 export function requireActor(res: Response): Actor {
   const actor = getActor(res)
   if (actor === null) throw new AppError('unauthenticated', 'Sign in to do this.')
+  return actor
+}
+
+/** Before the body is read: whoever may not come in is told nothing about it. */
+export function requireAdmin(res: Response): Actor {
+  const actor = requireActor(res)
+  if (!isAdmin(actor)) throw new AppError('forbidden', 'Only admins come in here.')
   return actor
 }
 

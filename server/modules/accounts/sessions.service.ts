@@ -3,7 +3,7 @@ import type { Database } from '../../db/database'
 import type { Actor } from '../../lib/actor'
 import { createSessionAdapter, type Clock, type SessionAttributes, type UserAttributes } from './session-adapter'
 import { sessionLimits } from './session-limits'
-import { deleteOwnSession, listSessions, type SessionRow } from './sessions.queries'
+import { deleteOwnSession, deleteSessionsOf, listSessions, type SessionRow } from './sessions.queries'
 
 declare module 'lucia' {
   interface Register {
@@ -61,3 +61,6 @@ export function createSessions(db: Database, now: Clock = () => new Date()): Ses
     endOwn: (personId, publicId) => deleteOwnSession(db, personId, publicId),
   }
 }
+
+/** Ends every session of somebody, in the transaction of why. */
+export const endSessionsOf = (db: Database, personId: number): Promise<void> => deleteSessionsOf(db, personId)

@@ -17,5 +17,6 @@ export function hoistNamed(document: Json, named: Readonly<Record<string, Json>>
 
   const schemas = Object.entries(named).map(([name, schema]) => [name, replaceInside(schema, name)])
   const hoisted = replaceInside(document) as Record<string, Json>
-  return { ...hoisted, components: { schemas: Object.fromEntries(schemas) as Json } }
+  const components = (hoisted.components ?? {}) as Record<string, Json>
+  return { ...hoisted, components: { ...components, schemas: Object.fromEntries(schemas) as Json } }
 }

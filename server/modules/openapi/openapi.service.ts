@@ -69,6 +69,12 @@ function createJson(schema: z.ZodType): object {
 export function createOpenApiDocument(origin: string | undefined): object {
   const registry = new OpenAPIRegistry()
   for (const path of paths) registry.registerPath(path)
+  registry.registerComponent('securitySchemes', 'session', {
+    type: 'apiKey',
+    in: 'cookie',
+    name: '__Host-session',
+    description: 'Set by `POST /api/v1/session`; over plain HTTP its name is `session`.',
+  })
   const document = new OpenApiGeneratorV31(registry.definitions).generateDocument({
     openapi: '3.1.0',
     info,

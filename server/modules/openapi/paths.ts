@@ -7,27 +7,12 @@ import { gearListSchema, gearSchema, revisionListSchema, revisionSchema, slugSch
 import { describedGearQuerySchema } from './gear-query-description'
 import { worksheets } from '#shared/engine/worksheets/registry'
 import { kindListSchema } from '#shared/schemas/kinds'
-import { problemSchema } from '#shared/schemas/problem'
 import { createWorksheetSchema, workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
 import { replacementsRequestSchema, replacementsSchema } from '#shared/schemas/replacements'
+import { accountPaths } from './account-paths'
+import { describeProblems, type ProblemStatus } from './describe-calls'
 import { examples } from './examples'
-
-const problemTexts = {
-  400: 'The body is not JSON',
-  404: 'There is nothing by that name',
-  413: 'The body is too large',
-  415: 'The body is not sent as application/json',
-  422: 'Some fields are wrong; `errors` names each of them',
-  429: 'Too many requests; `Retry-After` says when there is room again',
-  503: 'The database does not answer; `Retry-After` says when to try again',
-} as const
-
-type ProblemStatus = keyof typeof problemTexts
-
-function describeProblems(...statuses: ProblemStatus[]): RouteConfig['responses'] {
-  const content = { 'application/problem+json': { schema: problemSchema } }
-  return Object.fromEntries(statuses.map((status) => [status, { description: problemTexts[status], content }]))
-}
+import { peoplePaths } from './people-paths'
 
 function describeRead(
   path: string,
@@ -140,6 +125,8 @@ export const paths: readonly RouteConfig[] = [
       workingSchema,
     ]),
   ),
+  ...accountPaths,
+  ...peoplePaths,
   describeState('/health', 'Whether the process lives; asks nobody else'),
   describeState('/ready', 'Whether the process can answer: not while the database is away or it shuts down', 503),
 ]

@@ -1,5 +1,9 @@
+import type { Person } from '#shared/schemas/people'
 import type { Database } from '../../db/database'
-import { countRevisionsOf, listNames } from './people.queries'
+import type { Actor } from '../../lib/actor'
+import { AppError } from '../../lib/errors'
+import { presentPerson } from './people.presenter'
+import { countAcceptedOf, countRevisionsOf, getPersonByName, listMeasurementsOf, listNames } from './people.queries'
 
 /** Stands for somebody whose account is gone: what they contributed stays. */
 export const formerMember = 'a former member'
@@ -17,3 +21,13 @@ export async function findNames(db: Database, ids: Iterable<number | null | unde
 
 /** How many revisions by this person were accepted: a person's standing. */
 export const countAccepted = countRevisionsOf
+
+const recentMeasurements = 10
+
+/** What everybody may see of somebody. */
+export async function getPerson(db: Database, name: string, actor: Actor | null): Promise<Person> {
+  const row = await getPersonByName(db, name)
+  if (row === null) throw new AppError('not-found', `Nobody is called ${name.slice(0, 80)}.`)
+  const accepted = await countAcceptedOf(db, row.id)
+  return presentPerson(row, accepted, await listMeasurementsOf(db, row.id, recentMeasurements), actor)
+}
