@@ -49,5 +49,6 @@ export async function startFakes(life, { isBuilt, folder = join(dataFolder, 'ser
   watch()
   const given = Object.keys(settings).filter((name) => (name.startsWith('S3_') ? env.S3_ENDPOINT : env.SMTP_URL))
   for (const name of given) delete settings[name]
-  return settings
+  // Which Node the SDK will want one day is no news for whoever starts the site.
+  return { ...settings, AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true' }
 }

@@ -1,5 +1,5 @@
 import { join } from 'node:path'
-import { startFakeFileServer } from './files/fake-file-server'
+import { fakeAccount, startFakeFileServer } from './files/fake-file-server'
 import { startFakeMailServer } from './mail/fake-mail-server'
 
 const { FAKES_FOLDER, FAKE_MAIL_PORT, FAKE_FILES_PORT } = process.env
@@ -26,7 +26,7 @@ const settings = {
   MAILROOM_FOLDER: mailroomFolder,
   S3_ENDPOINT: `http://127.0.0.1:${files.port}`,
   S3_BUCKET: bucket,
-  S3_ACCESS_KEY_ID: 'local',
-  S3_SECRET_ACCESS_KEY: 'local',
+  S3_ACCESS_KEY_ID: fakeAccount.accessKeyId,
+  S3_SECRET_ACCESS_KEY: fakeAccount.secretAccessKey,
 }
 process.stdout.write(`${JSON.stringify(settings)}\n`)

@@ -2,7 +2,7 @@ import { mkdtempSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import type { FakeServer } from '../../server/services/fake-server'
-import { startFakeFileServer } from '../../server/services/files/fake-file-server'
+import { fakeAccount, startFakeFileServer } from '../../server/services/files/fake-file-server'
 import { createFileStore, type FileStore } from '../../server/services/files/file-store'
 import { startFakeMailServer } from '../../server/services/mail/fake-mail-server'
 import { listMessages, type ReceivedLetter } from '../../server/services/mail/mailroom'
@@ -17,14 +17,22 @@ export interface TestFiles {
   /** Where the objects lie on disk. */
   readonly folder: string
   readonly listKeys: () => Promise<string[]>
+  /** As when the store is away. */
+  readonly pause: () => Promise<void>
+  readonly resume: () => Promise<void>
   readonly stop: () => Promise<void>
 }
 
 export async function startTestFiles(): Promise<TestFiles> {
   const { folder, remove } = createFolder()
-  const server = await startFakeFileServer(folder, 'stillfits')
-  const endpoint = `http://127.0.0.1:${server.port}`
-  const options = { endpoint, region: 'us-east-1', bucket: 'stillfits', accessKeyId: 'a', secretAccessKey: 'b' }
+  const first = await startFakeFileServer(folder, 'stillfits')
+  let server: FakeServer | null = first
+  const pause = async () => {
+    await server?.stop()
+    server = null
+  }
+  const endpoint = `http://127.0.0.1:${first.port}`
+  const options = { endpoint, region: 'us-east-1', bucket: 'stillfits', ...fakeAccount }
   const store = createFileStore(options)
   return {
     store,
@@ -34,9 +42,13 @@ export async function startTestFiles(): Promise<TestFiles> {
       for await (const { key } of store.list()) keys.push(key)
       return keys.sort()
     },
+    pause,
+    async resume() {
+      server ??= await startFakeFileServer(folder, 'stillfits', first.port)
+    },
     async stop() {
       store.close()
-      await server.stop()
+      await pause()
       remove()
     },
   }

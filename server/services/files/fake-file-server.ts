@@ -2,6 +2,9 @@ import { mkdir } from 'node:fs/promises'
 import S3rver from '@20minutes/s3rver'
 import type { FakeServer } from '../fake-server'
 
+/** The one account that the stand-in knows. */
+export const fakeAccount = { accessKeyId: 'S3RVER', secretAccessKey: 'S3RVER' } as const
+
 /** Stands in for an object store: keeps objects as files in a folder. */
 export async function startFakeFileServer(folder: string, bucket: string, port = 0): Promise<FakeServer> {
   await mkdir(folder, { recursive: true })

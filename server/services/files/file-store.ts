@@ -36,7 +36,9 @@ async function guard<T>(work: Promise<T>): Promise<T> {
   try {
     return await work
   } catch (error) {
-    throw new FileStoreError('The file store does not answer', { cause: error })
+    // The SDK hangs the whole request on its errors, the signature included: nothing for a log.
+    const cause = error instanceof Error ? new Error(`${error.name}: ${error.message}`) : undefined
+    throw new FileStoreError('The file store does not answer', { cause })
   }
 }
 
