@@ -25,7 +25,9 @@ import { createAuditRoutes } from './modules/audit/audit.routes'
 import { createAskRoutes } from './modules/ask/ask.routes'
 import { createEvidenceRoutes } from './modules/evidence/evidence.routes'
 import { createFitRoutes } from './modules/fit/fit.routes'
+import { createGearCareRoutes } from './modules/gear-care/gear-care.routes'
 import { createGearRoutes } from './modules/gear/gear.routes'
+import { createMovedPageRoutes } from './modules/gear/moved-pages.routes'
 import { createKindRoutes } from './modules/kinds/kinds.routes'
 import { createMailRoutes } from './modules/mail/mail.routes'
 import { createMailroomRoutes } from './modules/mail/mailroom.routes'
@@ -86,6 +88,7 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createWriteLimits(db, rateLimits, now))
   api.use(createAskRoutes(catalogue), createFitRoutes(catalogue), createSetupRoutes(catalogue))
   api.use(createWorksheetRoutes(catalogue))
+  api.use(createGearCareRoutes(db))
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(createAccountRoutes(createAccountContext(db, origin, now), sessions, isHttps))
   api.use(createProposalRoutes(db, origin), createDecisionRoutes(db, origin))
@@ -98,7 +101,7 @@ export function createApp(dependencies: AppDependencies): Express {
   app.use('/api', refuseUnknownPath)
 
   app.use(createPreferenceRoutes(isHttps), createMailroomRoutes(mailroomFolder, '/mailroom.json'))
-  if (pages !== null) app.use(createPageRoutes(app, pages, rateLimits.pagesPerMinute))
+  if (pages !== null) app.use(createMovedPageRoutes(db), createPageRoutes(app, pages, rateLimits.pagesPerMinute))
   app.use(refuseUnknownPath)
   app.use(createProblemHandler(pages?.errorPage ?? createErrorPage()))
   return app

@@ -6,10 +6,11 @@ export interface CachedBody {
   readonly etag: string
 }
 
-/** Serialised once, with a strong ETag of the content. */
-export function createBody(value: unknown): CachedBody {
+/** Serialised once, with a strong ETag of the content; `revision` lets a change say what it starts from. */
+export function createBody(value: unknown, revision?: string): CachedBody {
   const text = JSON.stringify(value)
-  return { text, etag: `"${createHash('sha256').update(text).digest('base64url').slice(0, 27)}"` }
+  const hash = createHash('sha256').update(text).digest('base64url').slice(0, 27)
+  return { text, etag: revision === undefined ? `"${hash}"` : `"${revision}.${hash}"` }
 }
 
 /** Answers a read: 304 where the visitor already has it. Caches ask again each time, since a number may be corrected. */

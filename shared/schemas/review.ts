@@ -221,6 +221,7 @@ export type Dispute = z.infer<typeof disputeSchema>
 export type DisputeList = z.infer<typeof disputeListSchema>
 export type ErrorReport = z.infer<typeof errorReportSchema>
 export type ErrorReportList = z.infer<typeof errorReportListSchema>
+export type DuplicatesQuery = z.infer<typeof duplicatesQuerySchema>
 export type Duplicates = z.infer<typeof duplicatesSchema>
 export type GearCare = z.infer<typeof gearCareSchema>
 export type LongJob = z.infer<typeof longJobSchema>

@@ -1,4 +1,4 @@
-import { asc, eq, gt, sql } from 'drizzle-orm'
+import { and, asc, eq, gt, isNull, sql } from 'drizzle-orm'
 import type { Database } from '../../db/database'
 import { catalogueVersion, gear } from '../../db/schema/index'
 
@@ -27,11 +27,16 @@ const pieceColumns = {
 const rowsAtOnce = 5000
 
 const listRows = (db: Database, after: number) =>
-  db.select(pieceColumns).from(gear).where(gt(gear.id, after)).orderBy(asc(gear.id)).limit(rowsAtOnce)
+  db
+    .select(pieceColumns)
+    .from(gear)
+    .where(and(gt(gear.id, after), isNull(gear.mergedInto), isNull(gear.retiredAt)))
+    .orderBy(asc(gear.id))
+    .limit(rowsAtOnce)
 
 export type PieceRow = Awaited<ReturnType<typeof listRows>>[number]
 
-/** All gear, some at a time, and the version that it makes: seen at one moment. */
+/** All gear but what was merged or retired, some at a time, and the version that it makes: seen at one moment. */
 export async function readCatalogue(db: Database, take: (rows: readonly PieceRow[]) => void): Promise<number> {
   return db.transaction(
     async (tx) => {

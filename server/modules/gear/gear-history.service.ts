@@ -1,5 +1,5 @@
 import type { Database } from '../../db/database'
-import { listValueRows, type HistoricValue } from './gear-revise.queries'
+import { listValueRows, type HistoricValue, type NewValue } from './gear-revise.queries'
 
 export type { HistoricValue, NewValue } from './gear-revise.queries'
 
@@ -11,3 +11,9 @@ export async function readHistory(db: Database, gearId: number | null): Promise<
 /** Everybody who is named in it. */
 export const listNamed = (rows: readonly HistoricValue[]) =>
   rows.flatMap(({ authorId, reviewerId }) => [authorId, reviewerId])
+
+/** The same value with the same backing, to be put on record once more. */
+export function toNewValue(row: HistoricValue): NewValue {
+  const { revision: _, reviewerId: __, ...value } = row
+  return value
+}

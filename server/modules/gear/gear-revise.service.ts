@@ -5,7 +5,7 @@ import { findUniqueViolation } from '../../db/errors'
 import type { ProposedIdentity, StoredIdentity, StoredProvenance, StoredProvenances } from '../../db/schema/index'
 import { AppError, type Issue } from '../../lib/errors'
 import { toIssues } from '../../lib/to-issues'
-import { insertPiece, insertRevision, updatePiece, type NewValue } from './gear-revise.queries'
+import { insertPiece, insertRevision, listIdentityChanges, updatePiece, type NewValue } from './gear-revise.queries'
 import { lockHeadById } from './gear-writes.queries'
 import { createSlug } from './slug'
 import { takesPlace } from './value-history'
@@ -121,4 +121,16 @@ export async function lockPiece(tx: Database, id: number): Promise<Head> {
   const head = await lockHeadById(tx, id)
   if (head === null) throw new Error(`There is no piece ${id}`)
   return head
+}
+
+/** What it would take to call a piece again as it was called at a revision: later changes of names, undone. */
+export async function readIdentityAt(tx: Database, head: Head, revision: number): Promise<ProposedIdentity> {
+  const changes = (await listIdentityChanges(tx, head.id)).filter(({ number }) => number > revision)
+  const { brand, model, status, gtin, notes } = head
+  const now: StoredIdentity = { brand, model, status, gtin, notes }
+  const then = changes.toReversed().reduce<StoredIdentity>((state, { identity }) => {
+    return { ...state, ...identity?.before }
+  }, now)
+  const { changed } = describeIdentity(now, then)
+  return changed?.after ?? {}
 }

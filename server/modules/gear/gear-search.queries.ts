@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, like, lt, or, sql, type SQL } from 'drizzle-orm'
+import { and, asc, desc, eq, inArray, isNull, like, lt, or, sql, type SQL } from 'drizzle-orm'
 import { isKindKey } from '#shared/kinds/index'
 import type { Candidate } from '#shared/search/rank-matches'
 import { listTermReadings, type Search } from '#shared/search/read-search'
@@ -48,8 +48,11 @@ function toCandidate({ id, kind, name, code, gtin, terms }: CandidateRow): Candi
     : { id, kind, name: name.trim().split(' '), code, gtin, terms: new Set(terms.split(' ')) }
 }
 
+/** Neither merged into another piece nor retired. */
+const isLive = and(isNull(gear.mergedInto), isNull(gear.retiredAt))
+
 function ofKind(kind: string | undefined): SQL | undefined {
-  return kind === undefined ? undefined : eq(gear.kind, kind)
+  return and(isLive, kind === undefined ? undefined : eq(gear.kind, kind))
 }
 
 /** The code itself, as a model, with its brand or as a barcode, and whatever begins with it. */
@@ -67,7 +70,7 @@ async function listByCode(db: Database, { code }: Search, kind: string | undefin
 /** The kind is a term too, so that one index answers all of it. */
 function matchWhole(search: Search, kind: string | undefined): SQL | undefined {
   const isOfKind = kind === undefined ? undefined : hasAny([`kind:${kind}`])
-  return and(isOfKind, or(...listTermReadings(search).map((reading) => and(...reading.map(hasAny)))))
+  return and(isLive, isOfKind, or(...listTermReadings(search).map((reading) => and(...reading.map(hasAny)))))
 }
 
 /** All pieces that have everything that was typed. */

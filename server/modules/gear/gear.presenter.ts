@@ -1,6 +1,8 @@
-import type { Gear, GearItem, Provenance, Revision, RevisionSummary } from '#shared/schemas/gear'
+import type { Gear, GearItem, Revision, RevisionSummary } from '#shared/schemas/gear'
 import type { NameAuthor } from '../people/people.service'
-import type { GearRow, RevisionRow, RevisionSummaryRow, ValueRow } from './gear.queries'
+import type { GearRow, RevisionRow, RevisionSummaryRow } from './gear.queries'
+import type { HistoricValue } from './gear-revise.queries'
+import { groupByKey, presentSources, presentUsed, type FilesById } from './value.presenter'
 
 export function presentGearItem(row: GearRow): GearItem {
   return {
@@ -16,22 +18,26 @@ export function presentGearItem(row: GearRow): GearItem {
   }
 }
 
-function presentProvenances(stored: GearRow['provenance'], nameAuthor: NameAuthor): Gear['provenance'] {
-  const entries = Object.entries(stored).map(([key, { authorId, ...backing }]) => {
-    return [key, { ...backing, author: nameAuthor({ ...backing, authorId: authorId ?? null }) }] as const
-  })
-  return Object.fromEntries(entries)
+export interface GearExtras {
+  readonly history: readonly HistoricValue[]
+  readonly published: FilesById
+  readonly confirmations: readonly { readonly key: string; readonly count: number }[]
+  readonly disputed: readonly string[]
 }
 
-export function presentGear(row: GearRow, nameAuthor: NameAuthor): Gear {
+export function presentGear(row: GearRow, extras: GearExtras, nameAuthor: NameAuthor): Gear {
+  const { history, published, confirmations, disputed } = extras
+  const sources = [...groupByKey(history)].map(([key, rows]) => {
+    return [key, presentSources(rows, nameAuthor, published)] as const
+  })
   return {
     ...presentGearItem(row),
     notes: row.notes,
     createdAt: row.createdAt.toISOString(),
-    provenance: presentProvenances(row.provenance, nameAuthor),
-    confirmations: {},
-    sources: {},
-    disputed: [],
+    provenance: presentUsed(history, nameAuthor, published),
+    confirmations: Object.fromEntries(confirmations.map(({ key, count }) => [key, count])),
+    sources: Object.fromEntries(sources.filter(([, items]) => items.length > 1)),
+    disputed: [...disputed],
   }
 }
 
@@ -40,34 +46,17 @@ export function presentRevisionSummary(row: RevisionSummaryRow, nameAuthor: Name
   return { number, author: nameAuthor(row), summary, createdAt: createdAt.toISOString(), changed }
 }
 
-function presentProvenance(row: ValueRow, nameAuthor: NameAuthor): Provenance | null {
-  if (row.source === null) return null
-  return {
-    source: row.source,
-    ...(row.plusMinus !== null && { plusMinus: row.plusMinus }),
-    ...(row.evidence !== null && { evidence: row.evidence }),
-    date: row.dated,
-    author: nameAuthor(row),
-    revision: row.revision,
-  }
-}
-
 export function presentRevision(
   gear: GearRow,
   revision: RevisionRow,
-  values: readonly ValueRow[],
+  history: readonly HistoricValue[],
   nameAuthor: NameAuthor,
 ): Revision {
-  const provenance: Record<string, Provenance> = {}
-  for (const row of values) {
-    const presented = presentProvenance(row, nameAuthor)
-    if (presented !== null) provenance[row.key] = presented
-  }
   return {
     slug: gear.slug,
     kind: gear.kind,
     ...presentRevisionSummary(revision, nameAuthor),
     specs: revision.specs,
-    provenance,
+    provenance: presentUsed(history, nameAuthor),
   }
 }

@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, getTableColumns, inArray, lte, sql, type SQL } from 'drizzle-orm'
+import { and, asc, count, desc, eq, getTableColumns, inArray, isNull, sql, type SQL } from 'drizzle-orm'
 import type { Database } from '../../db/database'
 import { gear, gearRevisions, gearValues } from '../../db/schema/index'
 
@@ -19,8 +19,11 @@ export type GearPlace =
 const lowerBrand = sql`lower(${gear.brand})`
 const lowerModel = sql`lower(${gear.model})`
 
+/** In the catalogue: neither merged into another piece nor retired. */
+const isLive = and(isNull(gear.mergedInto), isNull(gear.retiredAt))
+
 function ofKind(kind: string | undefined): SQL | undefined {
-  return kind === undefined ? undefined : eq(gear.kind, kind)
+  return and(isLive, kind === undefined ? undefined : eq(gear.kind, kind))
 }
 
 function startAfter(place: GearPlace | null): SQL | undefined {
@@ -68,6 +71,11 @@ export async function findGear(db: Database, slug: string): Promise<GearRow | nu
   return row ?? null
 }
 
+export async function findSlug(db: Database, id: number): Promise<string | null> {
+  const [row] = await db.select({ slug: gear.slug }).from(gear).where(eq(gear.id, id))
+  return row?.slug ?? null
+}
+
 const revisionColumns = {
   number: gearRevisions.number,
   author: gearRevisions.author,
@@ -102,15 +110,5 @@ export async function findRevision(db: Database, gearId: number, number: number)
   return row ?? null
 }
 
-/** What backed each value at that revision: of every key the newest row up to it. */
-export async function listValues(db: Database, gearId: number, number: number) {
-  return db
-    .selectDistinctOn([gearValues.key])
-    .from(gearValues)
-    .where(and(eq(gearValues.gearId, gearId), lte(gearValues.revision, number)))
-    .orderBy(gearValues.key, desc(gearValues.revision))
-}
-
 export type RevisionRow = NonNullable<Awaited<ReturnType<typeof findRevision>>>
 export type RevisionSummaryRow = Awaited<ReturnType<typeof listRevisions>>[number]
-export type ValueRow = Awaited<ReturnType<typeof listValues>>[number]

@@ -1,16 +1,17 @@
-import { Router, type Request } from 'express'
+import { Router, type Request, type RequestHandler } from 'express'
 import { slugSchema } from '#shared/schemas/gear'
 import type { Database } from '../../db/database'
 import { addEndpoint } from '../../http/methods'
-import { createBody, sendRead } from '../../http/responses'
+import { createBody, sendRead, type CachedBody } from '../../http/responses'
 import { AppError } from '../../lib/errors'
 import type { Catalogue } from '../catalogue/catalogue.service'
 import { searchGear } from './gear-list.service'
 import { parseGearQuery } from './gear-query'
-import { getGear, getRevision, getRevisions } from './gear.service'
+import { getGear, getRevision, getRevisions, getSources, resolveGear } from './gear.service'
+import type { GearRow } from './gear.types'
 
 /** Text that cannot be a slug names nothing: it is not there, rather than wrongly asked. */
-function readSlug(req: Request): string {
+export function readSlug(req: Request): string {
   const parsed = slugSchema.safeParse(req.params.slug)
   if (!parsed.success) throw new AppError('not-found', 'There is no piece of gear by that name.')
   return parsed.data
@@ -40,8 +41,21 @@ export function createGearRoutes(db: Database, catalogue: Catalogue): Router {
     },
   })
 
+  /** Answers about a piece, or leads to the one that it was merged into. */
+  const about = (suffix: string, answer: (row: GearRow, req: Request) => Promise<CachedBody>): RequestHandler => {
+    return async (req, res) => {
+      const found = await resolveGear(db, readSlug(req))
+      if ('movedTo' in found) res.redirect(301, `/api/v1/gear/${found.movedTo}${suffix}`)
+      else sendRead(req, res, await answer(found, req))
+    }
+  }
+
   addEndpoint(router, '/gear/:slug', {
-    get: async (req, res) => sendRead(req, res, createBody(await getGear(db, readSlug(req)))),
+    get: about('', async (row) => createBody(await getGear(db, row), `r${row.headRevision}`)),
+  })
+
+  addEndpoint(router, '/gear/:slug/sources/:key', {
+    get: about('', async (row, req) => createBody(await getSources(db, row, String(req.params.key)))),
   })
 
   addEndpoint(router, '/gear/:slug/revisions', {

@@ -2,6 +2,8 @@ import type { KindKey } from '#shared/kinds/index'
 import type { Source } from '#shared/engine/types'
 import type { StoredProvenances, StoredSpecs } from '../../db/schema/index'
 
+export type { GearRow } from './gear.queries'
+
 /** One value with what backs it, in the canonical unit that its key names. */
 export interface ValueInput {
   readonly value: unknown

@@ -10,7 +10,7 @@ import { compareWithRecord } from './compare-with-record'
 import { listFiles, listMessages } from './proposal-talk.queries'
 import { canRead } from './proposals.policy'
 import { findHolder, presentProposal, presentProposalItem, readDecision } from './proposals.presenter'
-import { countMine, findProposal, listMine, listRecords, type ProposalRow } from './proposals.queries'
+import { countMine, findProposal, listMine, listOpenAbout, listRecords, type ProposalRow } from './proposals.queries'
 
 /** The row, for whoever may read it; for everybody else it does not exist. */
 export async function requireReadable(db: Database, actor: Actor, id: string): Promise<ProposalRow> {
@@ -79,3 +79,6 @@ export async function getMine(
     next: hasMore ? createCursor({ updatedAt: last.updatedAt.toISOString(), id: last.id }, question) : null,
   }
 }
+
+/** A person's own proposals about a piece that are still open. */
+export const listOpenProposals = (db: Database, actor: Actor, gearId: number) => listOpenAbout(db, actor.id, gearId)
