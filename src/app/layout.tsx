@@ -4,6 +4,7 @@ import { PageShell } from '../components/layout/page-shell'
 import { SiteFooter } from '../components/layout/site-footer'
 import { SiteHeader } from '../components/layout/site-header'
 import { paths } from '../config/paths'
+import { AccountEntry } from '../features/accounts/components/account-entry'
 import { ThemeSwitch } from '../features/theme/components/theme-switch'
 import { applyTheme } from '../features/theme/theme'
 import { UnitSwitch } from '../features/units/components/unit-switch'
@@ -61,6 +62,7 @@ export function Layout() {
       header={
         <SiteHeader
           links={links}
+          account={<AccountEntry />}
           unitSwitch={<UnitSwitch system={system} next={next} onChange={(wanted) => change({ system: wanted })} />}
           themeSwitch={
             <ThemeSwitch

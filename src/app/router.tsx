@@ -1,6 +1,7 @@
 import { data, type RouteObject } from 'react-router-dom'
 import { paths } from '../config/paths'
 import type { App } from '../lib/app-context'
+import { sessionQuery } from '../lib/session'
 import { Layout } from './layout'
 import { createLazy } from './page-route'
 import { ErrorPage } from './routes/error'
@@ -11,12 +12,19 @@ function throwNotFound(): never {
   throw data(null, { status: 404 })
 }
 
+/** Who is signed in stands over every page that the server renders; the browser asks by itself. */
+async function loadSession(app: App): Promise<null> {
+  if (app.isServer) await app.queryClient.prefetchQuery(sessionQuery(app.api))
+  return null
+}
+
 /** Every page, each in a file of its own that is fetched when it is first visited. */
 export function createRoutes(app: App): RouteObject[] {
   return [
     {
       id: 'root',
       Component: Layout,
+      loader: () => loadSession(app),
       children: [
         {
           id: 'pages',
@@ -55,6 +63,14 @@ export function createRoutes(app: App): RouteObject[] {
               path: '/review/:proposalId',
               lazy: createLazy(app, () => import('./routes/review-proposal')),
             },
+            { id: 'sign-in', path: '/sign-in', lazy: createLazy(app, () => import('./routes/sign-in')) },
+            { id: 'sign-up', path: paths.signUp, lazy: createLazy(app, () => import('./routes/sign-up')) },
+            { id: 'forgot', path: paths.forgot, lazy: createLazy(app, () => import('./routes/forgot')) },
+            { id: 'reset', path: paths.reset, lazy: createLazy(app, () => import('./routes/reset')) },
+            { id: 'confirm', path: paths.confirm, lazy: createLazy(app, () => import('./routes/confirm')) },
+            { id: 'account', path: paths.account, lazy: createLazy(app, () => import('./routes/account')) },
+            { id: 'person', path: '/people/:name', lazy: createLazy(app, () => import('./routes/person')) },
+            { id: 'admin-people', path: paths.admin, lazy: createLazy(app, () => import('./routes/admin-people')) },
             { id: 'unknown', path: '*', loader: throwNotFound, Component: () => null },
           ],
         },

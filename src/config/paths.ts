@@ -19,6 +19,13 @@ export const paths = {
   revertPerson: (name: string) => `/admin/people/${encodeURIComponent(name)}/revert`,
   /** Comes back to `next` afterwards. */
   signIn: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,
+  signUp: '/sign-up',
+  forgot: '/forgot',
+  reset: '/reset',
+  confirm: '/confirm',
+  account: '/account',
+  person: (name: string) => `/people/${encodeURIComponent(name)}`,
+  admin: '/admin',
   gearNew: '/gear/new',
   gearEdit: (slug: string) => `/gear/${encodeURIComponent(slug)}/edit`,
   proposals: '/proposals',

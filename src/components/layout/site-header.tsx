@@ -5,19 +5,24 @@ import { Wordmark } from './wordmark'
 export interface SiteHeaderProps {
   /** Those for wide screens alone are in the footer too. */
   readonly links: readonly { readonly href: string; readonly label: string; readonly isWideOnly?: true }[]
+  /** Who is signed in, or the way there. */
+  readonly account: ReactNode
   readonly unitSwitch: ReactNode
   readonly themeSwitch: ReactNode
 }
 
 /** Two rows on a phone (name and units; pages and theme), one from there on. */
-export function SiteHeader({ links, unitSwitch, themeSwitch }: SiteHeaderProps) {
+export function SiteHeader({ links, account, unitSwitch, themeSwitch }: SiteHeaderProps) {
   return (
     <header className="border-b-[1.5px] border-ink print:border-b-0">
       <div className="page-width grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-6 pt-3 md:h-16 md:grid-cols-[auto_minmax(0,1fr)_auto_auto] md:pt-0">
         <Link to="/" className="justify-self-start">
           <Wordmark />
         </Link>
-        <div className="justify-self-end md:order-3 print:hidden">{unitSwitch}</div>
+        <div className="flex items-center gap-2 justify-self-end md:order-3 md:gap-4 print:hidden">
+          {account}
+          {unitSwitch}
+        </div>
         <nav aria-label="Pages" className="self-stretch overflow-x-auto md:order-2 print:hidden">
           <ul className="flex h-full gap-x-5">
             {links.map(({ href, label, isWideOnly }) => (

@@ -29,6 +29,7 @@ export function Specimen() {
       header={
         <SiteHeader
           links={links}
+          account={<a href="/sign-in">Sign in</a>}
           unitSwitch={<UnitSwitch system={system} next="/find?q=1" onChange={setSystem} />}
           themeSwitch={<ThemeSwitch theme={theme} next="/find?q=1" onChange={changeTheme} />}
         />

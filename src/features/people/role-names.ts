@@ -1,0 +1,3 @@
+export const roleNames = { member: 'Member', moderator: 'Moderator', admin: 'Admin' } as const
+
+export type RoleName = keyof typeof roleNames
