@@ -42,6 +42,8 @@ export function createRoutes(app: App): RouteObject[] {
             { id: 'gear-new', path: paths.gearNew, lazy: createLazy(app, () => import('./routes/gear-new')) },
             { id: 'gear-edit', path: '/gear/:slug/edit', lazy: createLazy(app, () => import('./routes/gear-edit')) },
             { id: 'gear', path: '/gear/:slug', lazy: createLazy(app, () => import('./routes/gear')) },
+            { id: 'proposals', path: paths.proposals, lazy: createLazy(app, () => import('./routes/proposals')) },
+            { id: 'proposal', path: '/proposals/:id', lazy: createLazy(app, () => import('./routes/proposal')) },
             { id: 'setup-new', path: paths.setupNew, lazy: createLazy(app, () => import('./routes/setup-new')) },
             { id: 'setup', path: paths.setup, lazy: createLazy(app, () => import('./routes/setup-link')) },
             { id: 'swap', path: '/setups/link/swap/:itemId', lazy: createLazy(app, () => import('./routes/swap')) },

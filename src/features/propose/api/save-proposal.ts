@@ -9,7 +9,7 @@ export interface SavedProposal {
 
 function readSaved({ body, etag }: Tagged): SavedProposal {
   const proposal = proposalSchema.parse(body)
-  return { proposal, etag: etag ?? `"${proposal.version}"` }
+  return { proposal, etag: etag ?? `"v${proposal.version}"` }
 }
 
 const pathOf = (id: string): string => `/proposals/${encodeURIComponent(id)}`

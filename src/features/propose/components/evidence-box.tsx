@@ -74,7 +74,7 @@ export function EvidenceBox(props: EvidenceBoxProps) {
           Photos and PDFs
         </label>
         <p id="evidence-files-hint" className="text-sm text-ink-soft">
-          {blocked ?? 'Choose files, or drop them here. JPEG, PNG, WebP, HEIC or PDF, up to 25 MB each.'}
+          {blocked ?? 'Choose files, or drop them here. JPEG, PNG, WebP or PDF, up to 25 MB each.'}
         </p>
         <input
           id="evidence-files"

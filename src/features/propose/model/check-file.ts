@@ -1,10 +1,12 @@
-const megabyte = 1024 * 1024
-export const mostBytes = 25 * megabyte
+import { evidenceLimits } from '#shared/schemas/evidence'
 
-export const acceptedTypes = 'image/jpeg,image/png,image/webp,image/heic,image/heif,application/pdf'
+const megabyte = 1024 * 1024
+const { bytes: mostBytes, contentTypes } = evidenceLimits
+
+export const acceptedTypes = contentTypes.join(',')
 
 const isAccepted = ({ type, name }: File): boolean =>
-  acceptedTypes.split(',').includes(type) || (type === '' && /\.(jpe?g|png|webp|hei[cf]|pdf)$/i.test(name))
+  contentTypes.some((accepted) => accepted === type) || (type === '' && /\.(jpe?g|png|webp|pdf)$/i.test(name))
 
 const printMegabytes = (bytes: number): string => `${Math.round((bytes / megabyte) * 10) / 10} MB`
 
@@ -13,6 +15,6 @@ export function refuseFile(file: File): string | undefined {
   if (file.size > mostBytes)
     return `“${file.name}” is ${printMegabytes(file.size)}, and a file can be up to ${printMegabytes(mostBytes)}. Nothing was sent. Choose a smaller copy: a phone’s “share as medium size” is plenty.`
   if (file.size === 0) return `“${file.name}” is empty. Nothing was sent.`
-  if (!isAccepted(file)) return `“${file.name}” is neither a photo (JPEG, PNG, WebP, HEIC) nor a PDF. Nothing was sent.`
+  if (!isAccepted(file)) return `“${file.name}” is neither a photo (JPEG, PNG, WebP) nor a PDF. Nothing was sent.`
   return undefined
 }
