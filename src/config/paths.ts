@@ -30,5 +30,6 @@ export const paths = {
   gearEdit: (slug: string) => `/gear/${encodeURIComponent(slug)}/edit`,
   proposals: '/proposals',
   proposal: (id: string) => `/proposals/${encodeURIComponent(id)}`,
+  person: (name: string) => `/people/${encodeURIComponent(name)}`,
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

@@ -1,7 +1,11 @@
+import { useState } from 'react'
 import { useQuery } from '@tanstack/react-query'
 import { Link } from 'react-router-dom'
 import { getKind, isKindKey } from '#shared/kinds/index'
+import type { Attribute } from '#shared/kinds/types'
 import type { Gear } from '#shared/schemas/gear'
+import { Button } from '../../../components/ui/button'
+import { buttonClass } from '../../../components/ui/button-class'
 import { paths } from '../../../config/paths'
 import { useApp } from '../../../lib/app-context'
 import { describeSpecs } from '../../../lib/describe-specs'
@@ -11,6 +15,7 @@ import { CheckLinks } from './check-links'
 import { GearDrawing } from './gear-drawing'
 import { KindCautions } from './kind-cautions'
 import { MissingNumbers } from './missing-numbers'
+import { ReportDialog } from './report-dialog'
 import { RevisionList } from './revision-list'
 import { SpecList } from './spec-list'
 
@@ -25,6 +30,7 @@ export function GearSheet({ gear }: { readonly gear: Gear }) {
   const { api } = useApp()
   const printer = usePrinter()
   const revisions = useQuery(revisionsQuery(api, gear.slug)).data?.items ?? []
+  const [report, setReport] = useState<{ readonly attribute: Attribute | null } | null>(null)
   const kind = isKindKey(gear.kind) ? gear.kind : null
   if (!kind) return <h1>{gear.model}</h1>
   const { attributes, plural } = getKind(kind)
@@ -52,9 +58,25 @@ export function GearSheet({ gear }: { readonly gear: Gear }) {
         <GearDrawing gear={gear} printer={printer} />
       </div>
       {(['check', 'difference', 'display'] as const).map((role) => (
-        <SpecList key={role} role={role} attributes={attributes} gear={gear} printer={printer} />
+        <SpecList
+          key={role}
+          role={role}
+          attributes={attributes}
+          gear={gear}
+          printer={printer}
+          onReport={(attribute) => setReport({ attribute })}
+        />
       ))}
       <MissingNumbers gear={gear} attributes={attributes} />
+      <p className="mt-8 flex flex-wrap items-center gap-3 print:hidden">
+        <Link to={paths.gearEdit(gear.slug)} className={buttonClass()}>
+          Correct or complete it
+        </Link>
+        <Button variant="quiet" onClick={() => setReport({ attribute: null })}>
+          Something wrong here?
+        </Button>
+      </p>
+      {report && <ReportDialog slug={gear.slug} attribute={report.attribute} onClose={() => setReport(null)} />}
       {gear.notes !== null && (
         <section className="mt-8">
           <h2>Notes</h2>

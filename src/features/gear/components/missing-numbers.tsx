@@ -1,5 +1,7 @@
+import { Link } from 'react-router-dom'
 import type { Attribute } from '#shared/kinds/types'
 import type { Gear } from '#shared/schemas/gear'
+import { correctHref } from '../correct-href'
 
 /** Numbers that checks read and nobody has recorded, each with how to measure it. */
 export function MissingNumbers({
@@ -19,10 +21,19 @@ export function MissingNumbers({
         measure.
       </p>
       <dl className="mt-3 grid gap-x-8 gap-y-2 sm:grid-cols-2">
-        {missing.map(({ key, label, guide }) => (
-          <div key={key} className="text-sm">
-            <dt className="font-semibold first-letter:uppercase">{label}</dt>
-            <dd className="text-ink-soft">{guide ?? 'From its box or its maker’s sheet.'}</dd>
+        {missing.map((attribute) => (
+          <div key={attribute.key} className="text-sm">
+            <dt className="font-semibold first-letter:uppercase">{attribute.label}</dt>
+            <dd className="text-ink-soft">
+              {attribute.guide ?? 'From its box or its maker’s sheet.'}{' '}
+              <Link
+                to={correctHref(gear.slug, attribute)}
+                className="link inline-block min-h-6 print:hidden"
+                aria-label={`Add the ${attribute.label}`}
+              >
+                Add it
+              </Link>
+            </dd>
           </div>
         ))}
       </dl>

@@ -3,6 +3,8 @@ import type { Gear } from '#shared/schemas/gear'
 import type { Printer } from '#shared/units/print'
 import { printValue } from '#shared/kinds/print-value'
 import { roleTitles } from '../../../lib/role-titles'
+import { OtherSources } from './other-sources'
+import { SpecActions } from './spec-actions'
 import { printPlusMinus, SpecSource } from './spec-source'
 
 export interface SpecListProps {
@@ -10,10 +12,11 @@ export interface SpecListProps {
   readonly attributes: readonly Attribute[]
   readonly gear: Gear
   readonly printer: Printer
+  readonly onReport: (attribute: Attribute) => void
 }
 
 /** Values of one role, each with its ±, and who says so. */
-export function SpecList({ role, attributes, gear, printer }: SpecListProps) {
+export function SpecList({ role, attributes, gear, printer, onReport }: SpecListProps) {
   const shown = attributes.filter((attribute) => attribute.role === role && gear.specs[attribute.key] !== undefined)
   if (shown.length === 0) return null
   return (
@@ -35,6 +38,10 @@ export function SpecList({ role, attributes, gear, printer }: SpecListProps) {
               </dd>
               <dd className="text-sm text-ink-soft sm:col-start-2 lg:col-start-auto">
                 <SpecSource provenance={provenance} />
+                <OtherSources attribute={attribute} gear={gear} printer={printer} />
+              </dd>
+              <dd className="sm:col-span-2 lg:col-span-3">
+                <SpecActions gear={gear} attribute={attribute} printer={printer} onReport={onReport} />
               </dd>
             </div>
           )
