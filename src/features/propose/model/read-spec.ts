@@ -5,6 +5,8 @@ import type { UnitSystem } from '#shared/units/systems'
 import { checkField } from '../../../components/setup/check-field'
 import type { TypedSpec } from './typed-form'
 
+type Entry = Readonly<Record<string, string>>
+
 export interface Problem {
   /** Dotted, inside the form: `specs.lengthMm.text`. */
   readonly path: string
@@ -31,17 +33,43 @@ function readField(attribute: FieldAttribute, typed: string, path: string, syste
   return { value: read.value, problems: [], ...(raw !== undefined && { raw }) }
 }
 
-const isEmpty = (entry: Readonly<Record<string, string>>): boolean =>
+/** What is on record, and how that reads when typed: a text that stays keeps the number that it was printed from. */
+export interface Recorded {
+  readonly typed: TypedSpec
+  readonly value: unknown
+}
+
+const isObject = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null
+
+/** The value on record of a field of an entry whose text is as it was; undefined where it was typed. */
+function findKept(entry: Entry, at: number, key: string, recorded: Recorded | undefined): unknown {
+  if (!recorded) return undefined
+  const { entries } = recorded.typed
+  const earlier = entry['id'] === undefined ? at : entries.findIndex(({ id }) => id === entry['id'])
+  const text = entries[earlier]?.[key]
+  if (text === undefined || text.trim() !== (entry[key] ?? '').trim()) return undefined
+  const values: readonly unknown[] = Array.isArray(recorded.value) ? recorded.value : [recorded.value]
+  const value = values[earlier]
+  return isObject(value) ? value[key] : undefined
+}
+
+const isEmpty = (entry: Entry): boolean =>
   Object.entries(entry).every(([key, text]) => key === 'id' || text.trim() === '')
 
 /** Other things refer to an entry by its id: one that has none takes the next that is free. */
-function findId(entry: Readonly<Record<string, string>>, key: string, taken: ReadonlySet<unknown>): string {
+function findId(entry: Entry, key: string, taken: ReadonlySet<unknown>): string {
   if (entry['id'] !== undefined && entry['id'] !== '') return entry['id']
   const stem = key.replace(/s$/, '')
   for (let number = 1; ; number++) if (!taken.has(`${stem}-${number}`)) return `${stem}-${number}`
 }
 
-function readGroup(group: GroupAttribute, entries: TypedSpec['entries'], path: string, system: UnitSystem): ReadSpec {
+function readGroup(
+  group: GroupAttribute,
+  entries: readonly Entry[],
+  recorded: Recorded | undefined,
+  system: UnitSystem,
+): ReadSpec {
+  const path = `specs.${group.key}.entries`
   const problems: Problem[] = []
   const hasId = group.fields.some(({ key }) => key === 'id')
   const taken = new Set<unknown>(entries.map((entry) => entry['id']))
@@ -56,7 +84,9 @@ function readGroup(group: GroupAttribute, entries: TypedSpec['entries'], path: s
     for (const field of group.fields) {
       if (field.type === 'group' || field.key === 'id') continue
       const place = `${path}.${at}.${field.key}`
-      const read = readField(field, entry[field.key] ?? '', place, system)
+      const kept = findKept(entry, at, field.key, recorded)
+      const read =
+        kept === undefined ? readField(field, entry[field.key] ?? '', place, system) : { value: kept, problems: [] }
       problems.push(...read.problems)
       if (read.value !== undefined) value[field.key] = read.value
       else if (read.problems.length === 0 && group.required.includes(field.key))
@@ -69,11 +99,15 @@ function readGroup(group: GroupAttribute, entries: TypedSpec['entries'], path: s
 }
 
 /** What was typed for one attribute, in canonical units. */
-export function readSpec(attribute: Attribute, spec: TypedSpec, system: UnitSystem): ReadSpec {
-  const path = `specs.${attribute.key}`
+export function readSpec(
+  attribute: Attribute,
+  spec: TypedSpec,
+  system: UnitSystem,
+  recorded: Recorded | undefined,
+): ReadSpec {
   return attribute.type === 'group'
-    ? readGroup(attribute, spec.entries, `${path}.entries`, system)
-    : readField(attribute, spec.text, `${path}.text`, system)
+    ? readGroup(attribute, spec.entries, recorded, system)
+    : readField(attribute, spec.text, `specs.${attribute.key}.text`, system)
 }
 
 /** A ± is a difference: 1 °C of it is 1.8 °F, not 33.8. */

@@ -73,7 +73,9 @@ export function readTyped(base: FormBase, typed: TypedForm, system: UnitSystem):
     const recorded = base.gear?.specs[key]
     const isSame = isSameTyped(spec, was)
     if (isSame && !(saysMore(spec) && recorded !== undefined)) continue
-    const read = isSame ? { value: recorded, problems: [] } : readSpec(attribute, spec, system)
+    const read = isSame
+      ? { value: recorded, problems: [] }
+      : readSpec(attribute, spec, system, { typed: was, value: recorded })
     problems.push(...read.problems)
     if ('places' in read && read.places) places[key] = read.places
     if (read.problems.length > 0) continue
