@@ -17,6 +17,8 @@ export interface FieldControlProps {
   readonly error?: string | undefined
   /** What is taken while the field is empty, in words. */
   readonly assumed?: string | undefined
+  /** Instead of a bare example, where that could be taken for a value. */
+  readonly placeholder?: string
 }
 
 const yesNo = [
@@ -49,7 +51,7 @@ export function FieldControl(props: FieldControlProps) {
         <MeasureField
           {...shared}
           echo={echoField(text, attribute, system) ?? (text.trim() === '' && assumed !== undefined ? taken : '')}
-          placeholder={describeExample(attribute.unit, system)}
+          placeholder={props.placeholder ?? describeExample(attribute.unit, system)}
         />
       )
     case 'choice':

@@ -3,7 +3,6 @@ import type { Attribute } from '#shared/kinds/types'
 import { describeExample } from '#shared/units/examples'
 import { readMeasure } from '#shared/units/read'
 import type { Printer } from '#shared/units/print'
-import { Button } from '../../../components/ui/button'
 import { MeasureField } from '../../../components/ui/measure-field'
 import { toApiError } from '../../../lib/problem'
 import { useSignedIn } from '../../../lib/session'
@@ -29,6 +28,7 @@ export function ConfirmValue({ slug, attribute, count, printer }: ConfirmValuePr
   const read =
     reading !== null && measure && reading.trim() !== '' ? readMeasure(reading, measure.unit, printer.system) : null
   const unread = read && !read.ok ? read.reason : undefined
+  const words = measure ? 'Same number here' : 'Same here'
   const confirm = () => {
     if (unread === undefined) mutate({ key, ...(read?.ok && { measured: read.value }) })
   }
@@ -40,9 +40,15 @@ export function ConfirmValue({ slug, attribute, count, printer }: ConfirmValuePr
       </span>
       {person?.can.contribute && !isSuccess && (
         <>
-          <Button size="sm" isBusy={isPending} aria-label={`Same number here: ${label}`} onClick={confirm}>
-            Same number here
-          </Button>
+          <button
+            type="button"
+            aria-disabled={isPending || undefined}
+            className="link min-h-8 font-semibold aria-disabled:opacity-55"
+            aria-label={`${words}: ${label}`}
+            onClick={() => !isPending && confirm()}
+          >
+            {words}
+          </button>
           {measure && reading === null && (
             <button
               type="button"

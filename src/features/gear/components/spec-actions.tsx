@@ -16,7 +16,7 @@ export interface SpecActionsProps {
 export function SpecActions({ gear, attribute, printer, onReport }: SpecActionsProps) {
   const { key, label } = attribute
   return (
-    <div className="mt-1 flex flex-wrap items-center gap-x-4 gap-y-1 text-sm text-ink-soft print:hidden">
+    <div className="flex flex-wrap items-center gap-x-4 gap-y-1 text-sm text-ink-soft print:hidden">
       <ConfirmValue slug={gear.slug} attribute={attribute} count={gear.confirmations[key] ?? 0} printer={printer} />
       <Link
         to={correctHref(gear.slug, attribute)}

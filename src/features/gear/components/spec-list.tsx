@@ -40,7 +40,7 @@ export function SpecList({ role, attributes, gear, printer, onReport }: SpecList
                 <SpecSource provenance={provenance} />
                 <OtherSources attribute={attribute} gear={gear} printer={printer} />
               </dd>
-              <dd className="sm:col-span-2 lg:col-span-3">
+              <dd className="sm:col-start-2 lg:col-span-2">
                 <SpecActions gear={gear} attribute={attribute} printer={printer} onReport={onReport} />
               </dd>
             </div>

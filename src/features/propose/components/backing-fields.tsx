@@ -31,7 +31,7 @@ export function BackingFields({ control, attribute: { key, type, label } }: Back
     error: fieldState.error?.message,
   })
   return (
-    <div className="mt-2 max-w-xl [&>details]:border-t-0">
+    <div className="[&>details]:border-t-0">
       <Disclosure
         isOpen={isSaid}
         summary={

@@ -32,7 +32,7 @@ export function DoubtNote({ doubt, actions }: DoubtNoteProps) {
           <Button
             key={value}
             size="sm"
-            className="whitespace-normal text-left"
+            className="text-left whitespace-normal!"
             onClick={() => actions.onTake(doubt, value)}
           >
             Take {printed} ({because})

@@ -83,7 +83,7 @@ export function EvidenceBox(props: EvidenceBoxProps) {
           accept={acceptedTypes}
           disabled={blocked !== undefined}
           aria-describedby="evidence-files-hint"
-          className="mt-2 block max-w-full min-h-11 text-base"
+          className="mt-2 block max-w-full text-base file:mr-3 file:min-h-11 file:cursor-pointer file:rounded-ui file:border-[1.5px] file:border-solid file:border-ink-soft file:bg-sheet file:px-4 file:font-semibold file:text-ink hover:file:border-action hover:file:text-action disabled:opacity-55"
           onChange={({ currentTarget }) => {
             onAdd([...(currentTarget.files ?? [])])
             currentTarget.value = ''

@@ -5,6 +5,7 @@ import { FieldControl } from '../../../components/setup/field-control'
 import { Button } from '../../../components/ui/button'
 import { capitalise } from '../../../lib/capitalise'
 import { fieldIdOf, type FoundError } from '../model/form-errors'
+import { writePlaceholder } from '../model/type-value'
 import { listEntryFields } from '../model/typed-form'
 import { BackingFields } from './backing-fields'
 import { DoubtNote } from './doubt-note'
@@ -32,7 +33,7 @@ export function GroupField({ group, errors, ...parts }: GroupFieldProps) {
   const messageAt = (path: string) => errors.find((error) => error.path === path)?.message
   const own = messageAt(name)
   return (
-    <fieldset id={fieldIdOf(name)} tabIndex={-1} className="border-t border-rule py-4">
+    <fieldset id={fieldIdOf(name)} tabIndex={-1} className="min-w-0 border-t border-rule py-3 lg:col-span-2">
       <legend className="sr-only">{capitalise(group.label)}</legend>
       <p aria-hidden="true" className="text-sm font-semibold">
         {capitalise(group.label)}
@@ -63,6 +64,7 @@ export function GroupField({ group, errors, ...parts }: GroupFieldProps) {
                         system={printer.system}
                         onChange={(text) => type(at, attribute.key, text)}
                         error={messageAt(path)}
+                        placeholder={writePlaceholder(attribute, printer)}
                       />
                     </div>
                     {shape && <MeasureSketch shape={shape} />}
@@ -85,7 +87,7 @@ export function GroupField({ group, errors, ...parts }: GroupFieldProps) {
       ))}
       {group.many && (
         <Button size="sm" className="mt-3" onClick={() => field.onChange([...entries, {}])}>
-          Add {entries.length === 0 ? 'one' : 'another'}: {nameEntry(group, entries.length).toLowerCase()}
+          Add {nameEntry(group, entries.length).toLowerCase()}
         </Button>
       )}
       {entries.length > 0 && <BackingFields control={control} attribute={group} />}

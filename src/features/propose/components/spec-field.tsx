@@ -4,6 +4,7 @@ import type { FieldAttribute } from '#shared/kinds/types'
 import { findSketch, MeasureSketch } from '../../../components/drawings/measure-sketch'
 import { FieldControl } from '../../../components/setup/field-control'
 import { fieldIdOf } from '../model/form-errors'
+import { writePlaceholder } from '../model/type-value'
 import type { ReadForm } from '../model/read-typed'
 import type { FormBase, TypedForm } from '../model/typed-form'
 import type { Printer } from '#shared/units/print'
@@ -32,9 +33,9 @@ export function SpecField({ attribute, ...parts }: SpecFieldProps) {
   const recorded = base.gear?.specs[attribute.key]
   const isChanged = field.value.trim() !== (base.typed.specs[attribute.key]?.text ?? '').trim()
   return (
-    <div className="border-t border-rule py-4">
+    <div className="min-w-0 border-t border-rule py-3">
       <div className="flex gap-4">
-        <div className="min-w-0 max-w-xl grow">
+        <div className="min-w-0 grow">
           <FieldControl
             id={fieldIdOf(path)}
             path={path}
@@ -43,6 +44,7 @@ export function SpecField({ attribute, ...parts }: SpecFieldProps) {
             system={printer.system}
             onChange={field.onChange}
             error={fieldState.error?.message}
+            placeholder={writePlaceholder(attribute, printer)}
           />
           {isChanged && recorded !== undefined && (
             <p className="text-sm text-ink-soft">

@@ -17,7 +17,7 @@ export function SpecSections({ errors, ...parts }: SpecSectionsProps) {
     return (
       <section key={role} className="mt-8" aria-labelledby={`specs-${role}`}>
         <h2 id={`specs-${role}`}>{roleTitles[role]}</h2>
-        <div className="mt-2">
+        <div className="mt-2 grid gap-x-10 lg:grid-cols-2">
           {shown.map((attribute) =>
             attribute.type === 'group' ? (
               <GroupField key={attribute.key} {...parts} group={attribute} errors={errors} />

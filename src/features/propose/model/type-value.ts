@@ -1,7 +1,20 @@
-import type { FieldAttribute, GroupAttribute } from '#shared/kinds/types'
-import type { Printer } from '#shared/units/print'
+import type { FieldAttribute, GroupAttribute, MeasureAttribute } from '#shared/kinds/types'
+import { describeExample } from '#shared/units/examples'
+import { createPrinter, type Printer } from '#shared/units/print'
+import { readMeasure } from '#shared/units/read'
 
 const plainSpaces = (text: string): string => text.replaceAll('\u00a0', ' ').replaceAll('\u2212', '-')
+
+/** As few digits as it takes that the number reads back, in the other system, as it is on record there. */
+function typeMeasure(value: number, { unit }: MeasureAttribute, printer: Printer): string {
+  const other = createPrinter(printer.system === 'us' ? 'metric' : 'us')
+  const spell = (finer: number) => plainSpaces(printer.measure(value, unit, { finer }))
+  const isTrue = (text: string) => {
+    const read = readMeasure(text, unit, printer.system)
+    return read.ok && other.measure(read.value, unit, { finer: 1 }) === other.measure(value, unit, { finer: 1 })
+  }
+  return [0, 1, 2, 3].map(spell).find(isTrue) ?? spell(4)
+}
 
 /** A value on record as somebody of this unit system would type it; `exact` for numbers that are taken over as they are. */
 export function typeValue(
@@ -14,7 +27,9 @@ export function typeValue(
   switch (attribute.type) {
     case 'measure': {
       if (typeof value !== 'number') return ''
-      return plainSpaces(printer.measure(value, attribute.unit, options.exact ? { exact: true } : { finer: 1 }))
+      return options.exact
+        ? plainSpaces(printer.measure(value, attribute.unit, { exact: true }))
+        : typeMeasure(value, attribute, printer)
     }
     case 'boolean':
       return value === true ? 'yes' : 'no'
@@ -47,3 +62,7 @@ export function typeEntries(
     ),
   )
 }
+
+/** An example that cannot be taken for a value on record. */
+export const writePlaceholder = (attribute: FieldAttribute, { system }: Printer): string =>
+  attribute.type === 'measure' ? `such as ${describeExample(attribute.unit, system)}` : ''
