@@ -24,6 +24,9 @@ import { createCatalogue } from './modules/catalogue/catalogue.service'
 import { createAuditRoutes } from './modules/audit/audit.routes'
 import { createAskRoutes } from './modules/ask/ask.routes'
 import { createEvidenceRoutes } from './modules/evidence/evidence.routes'
+import { askDemoQuestions } from './modules/effects/demo-questions'
+import { createEffectRoutes } from './modules/effects/effects.routes'
+import { createQuestionBook } from './modules/effects/questions'
 import { createFitRoutes } from './modules/fit/fit.routes'
 import { createGearCareRoutes } from './modules/gear-care/gear-care.routes'
 import { createGearRoutes } from './modules/gear/gear.routes'
@@ -36,7 +39,9 @@ import { createDecisionRoutes } from './modules/proposals/decision.routes'
 import { createProposalRoutes } from './modules/proposals/proposals.routes'
 import { createPeopleRoutes } from './modules/people/people.routes'
 import { createPreferenceRoutes } from './modules/preferences/preferences.routes'
+import { createRevertRoutes } from './modules/revert/revert.routes'
 import { createReviewRoutes } from './modules/review/review.routes'
+import { createSettleRoutes } from './modules/review/settle.routes'
 import { createSetupRoutes } from './modules/setups/setups.routes'
 import { createSystemRoutes } from './modules/system/system.routes'
 import { createWorksheetRoutes } from './modules/worksheets/worksheets.routes'
@@ -63,6 +68,8 @@ export function createApp(dependencies: AppDependencies): Express {
   const origin = getOwnOrigin(env)
   const catalogue = createCatalogue(db)
   const sessions = createSessions(db, now)
+  const questions = createQuestionBook()
+  questions.register(askDemoQuestions)
   const mailroomFolder = env.DEMO ? (env.MAILROOM_FOLDER ?? null) : null
 
   const app = express()
@@ -92,7 +99,8 @@ export function createApp(dependencies: AppDependencies): Express {
   api.use(createKindRoutes(), createGearRoutes(db, catalogue), createOpenApiRoutes(env.PUBLIC_ORIGIN))
   api.use(createAccountRoutes(createAccountContext(db, origin, now), sessions, isHttps))
   api.use(createProposalRoutes(db, origin), createDecisionRoutes(db, origin))
-  api.use(createReviewRoutes(db))
+  api.use(createReviewRoutes(db), createSettleRoutes(db), createRevertRoutes(db))
+  api.use(createEffectRoutes(db, catalogue, questions))
   api.use(createEvidenceRoutes(db, files), createMailRoutes(db), createAuditRoutes(db))
   api.use(createMailroomRoutes(mailroomFolder, '/mailroom'))
   api.use(createPeopleRoutes(db, origin))

@@ -7,6 +7,7 @@ import type { Logger } from './lib/logger'
 import { sweepEvidence } from './modules/evidence/evidence-sweep.service'
 import { deliverLetter } from './modules/mail/deliver-letter'
 import { sweepLetters } from './modules/mail/mail.service'
+import { runLongWork } from './modules/revert/revert.service'
 import type { FileStore } from './services/files/file-store'
 import { startJobRunner, type JobRunner, type JobRunnerOptions } from './services/jobs/job-runner'
 import type { Mailer } from './services/mail/mailer'
@@ -40,6 +41,7 @@ function assignWork(runner: JobRunner, { db, env, logger, mailer, files }: Worke
     logger.info({ requeued, swept }, 'swept')
   })
   runner.repeatHourly('sweep')
+  runner.handle('long-work', (data) => runLongWork(db, data))
 }
 
 /** Work outside of requests. The database may be away when the process starts: it is asked again until it answers. */

@@ -92,3 +92,18 @@ export async function unretirePiece(db: Database, actor: Actor, care: Care): Pro
     await audit(tx, actor, head, 'unretire', care)
   })
 }
+
+interface Retiring {
+  readonly head: Head
+  readonly actorId: number
+  readonly words: string
+  readonly jobId: string
+}
+
+/** Retires a piece whose lock is held, as one step of longer work. */
+export async function retireLocked(tx: Database, { head, actorId, words, jobId }: Retiring): Promise<void> {
+  if (nameState(head) !== 'live') return
+  await setRetired(tx, head.id, words)
+  const event = { action: 'gear.retire', subjectType: 'gear', subjectId: head.slug }
+  await recordAudit(tx, { actorId, ...event, detail: { gearId: head.id, words, jobId } })
+}

@@ -22,7 +22,7 @@ export interface Change {
   readonly values: readonly NewValue[]
 }
 
-interface State {
+export interface State {
   readonly specs: Record<string, unknown>
   readonly provenance: StoredProvenances
 }

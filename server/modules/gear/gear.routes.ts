@@ -1,7 +1,7 @@
 import { Router, type Request, type RequestHandler } from 'express'
-import { slugSchema } from '#shared/schemas/gear'
 import type { Database } from '../../db/database'
 import { addEndpoint } from '../../http/methods'
+import { readSlug } from '../../http/path-params'
 import { createBody, sendRead, type CachedBody } from '../../http/responses'
 import { AppError } from '../../lib/errors'
 import type { Catalogue } from '../catalogue/catalogue.service'
@@ -9,13 +9,6 @@ import { searchGear } from './gear-list.service'
 import { parseGearQuery } from './gear-query'
 import { getGear, getRevision, getRevisions, getSources, resolveGear } from './gear.service'
 import type { GearRow } from './gear.types'
-
-/** Text that cannot be a slug names nothing: it is not there, rather than wrongly asked. */
-export function readSlug(req: Request): string {
-  const parsed = slugSchema.safeParse(req.params.slug)
-  if (!parsed.success) throw new AppError('not-found', 'There is no piece of gear by that name.')
-  return parsed.data
-}
 
 function readRevisionNumber(req: Request): number {
   const text = String(req.params.number)

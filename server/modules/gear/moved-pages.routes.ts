@@ -1,7 +1,7 @@
 import { Router } from 'express'
 import type { Database } from '../../db/database'
+import { readSlug } from '../../http/path-params'
 import { AppError } from '../../lib/errors'
-import { readSlug } from './gear.routes'
 import { resolveGear } from './gear.service'
 
 /** Leads from the pages of a merged piece to those of the one that it was merged into. */

@@ -31,3 +31,8 @@ export async function getPerson(db: Database, name: string, actor: Actor | null)
   const accepted = await countAcceptedOf(db, row.id)
   return presentPerson(row, accepted, await listMeasurementsOf(db, row.id, recentMeasurements), actor)
 }
+
+/** The id of somebody by name, as far as they are still here. */
+export async function findPersonId(db: Database, name: string): Promise<number | null> {
+  return (await getPersonByName(db, name))?.id ?? null
+}

@@ -1,5 +1,4 @@
 import { Router, type Request, type Response } from 'express'
-import { z } from 'zod'
 import { isKindKey } from '#shared/kinds/index'
 import {
   createProposalPatchSchema,
@@ -12,26 +11,19 @@ import type { Database } from '../../db/database'
 import { createIdempotency } from '../../http/idempotency'
 import { getRequestId } from '../../http/logging'
 import { addEndpoint } from '../../http/methods'
+import { readId } from '../../http/path-params'
 import { parseBody, parseQuery, readJsonBody } from '../../http/requests'
 import { sendAnswer } from '../../http/responses'
 import { requireActor } from '../../http/session'
 import { readIfMatch, sendVersioned } from '../../http/versions'
-import { AppError } from '../../lib/errors'
 import { addMessage, submitProposal, withdrawProposal } from './proposal-turns.service'
 import { getMine, getProposal } from './read-proposal.service'
 import { amendProposal, createProposal } from './write-proposal.service'
 
-/** What cannot be an id names nothing. */
-export function readProposalId(req: Request): string {
-  const parsed = z.uuid().safeParse(req.params.id)
-  if (!parsed.success) throw new AppError('not-found', 'There is no such proposal.')
-  return parsed.data
-}
-
 export function createProposalRoutes(db: Database, origin: string): Router {
   const router = Router()
   const trace = (req: Request) => ({ requestId: getRequestId(req), origin })
-  const readSeen = (req: Request) => ({ id: readProposalId(req), version: readIfMatch(req) })
+  const readSeen = (req: Request) => ({ id: readId(req, 'proposal'), version: readIfMatch(req) })
 
   addEndpoint(router, '/proposals', {
     get: async (req, res) => {
@@ -59,7 +51,7 @@ export function createProposalRoutes(db: Database, origin: string): Router {
   }
 
   addEndpoint(router, '/proposals/:id', {
-    get: async (req, res) => sendVersioned(res, await getProposal(db, requireActor(res), readProposalId(req))),
+    get: async (req, res) => sendVersioned(res, await getProposal(db, requireActor(res), readId(req, 'proposal'))),
     patch: [...readJsonBody, amend],
   })
 
@@ -83,7 +75,7 @@ export function createProposalRoutes(db: Database, origin: string): Router {
       async (req, res) => {
         const actor = requireActor(res)
         const { words } = parseBody(messageRequestSchema, req)
-        sendVersioned(res, await addMessage(db, actor, readProposalId(req), words, trace(req)), 201)
+        sendVersioned(res, await addMessage(db, actor, readId(req, 'proposal'), words, trace(req)), 201)
       },
     ],
   })
