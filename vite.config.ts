@@ -50,6 +50,7 @@ export default defineConfig({
       migrate: resolve('server/db/migrate.ts'),
       fakes: resolve('server/services/run-fakes.ts'),
       load: resolve('seeds/load.ts'),
+      'sign-ins': resolve('seeds/sign-ins.ts'),
     }),
   },
   builder: {

@@ -1,13 +1,13 @@
 import { join } from 'node:path'
 import { ensureBuild } from './lib/build.mjs'
 import { checkout } from './lib/checkout.mjs'
-import { databaseEnv, prepareDatabase, readGivenDatabase, startOwnDatabase } from './lib/database.mjs'
+import { databaseEnv, isDemo, prepareDatabase, readGivenDatabase, startOwnDatabase } from './lib/database.mjs'
 import { ensureDependencies } from './lib/dependencies.mjs'
 import { startFakes } from './lib/fakes.mjs'
 import { live } from './lib/lifecycle.mjs'
 import { takeRunLock } from './lib/run-lock.mjs'
 import { formatOrigin, readAddress, requirePort } from './lib/ports.mjs'
-import { delay, hasEnded, requireSetpriv, startChild, stopChild } from './lib/processes.mjs'
+import { delay, hasEnded, requireSetpriv, runStep, startChild, stopChild } from './lib/processes.mjs'
 import { ensureRequirements, requireNode } from './lib/requirements.mjs'
 import { say, Trouble } from './lib/say.mjs'
 
@@ -70,6 +70,8 @@ await live(
     })
     lock.tell(origin)
     say(`Stillfits is ready at ${origin}`)
+    // The people of the demo data are for trying things out; elsewhere there are none.
+    if (isDemo()) await runStep(process.execPath, [join(checkout, 'dist/server/sign-ins.js')], { cwd: checkout })
     return null
   },
   { onStopping: () => say('Stopping …') },

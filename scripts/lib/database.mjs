@@ -86,6 +86,9 @@ export async function runProgram(program, urls, { isBuilt }) {
   }
 }
 
+/** Whether invented data stands in: always, unless DEMO=0. */
+export const isDemo = (env = process.env) => !['0', 'false', 'off'].includes(env.DEMO ?? '')
+
 /** Brings a database to where the code wants it, with the demo data unless DEMO=0. */
 export async function prepareDatabase(
   /** @type {DatabaseUrls} */ urls,
@@ -94,7 +97,7 @@ export async function prepareDatabase(
 ) {
   say('Migrating the database …')
   await runProgram('migrate', urls, options)
-  if (['0', 'false', 'off'].includes(env.DEMO ?? '')) return
+  if (!isDemo(env)) return
   say('Loading the demo data …')
   await runProgram('load', urls, options)
 }
