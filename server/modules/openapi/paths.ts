@@ -10,7 +10,9 @@ import { kindListSchema } from '#shared/schemas/kinds'
 import { createWorksheetSchema, workingSchema, worksheetListSchema } from '#shared/schemas/worksheets'
 import { replacementsRequestSchema, replacementsSchema } from '#shared/schemas/replacements'
 import { accountPaths } from './account-paths'
+import { adminPaths } from './admin-paths'
 import { describeProblems, type ProblemStatus } from './describe-calls'
+import { evidencePaths } from './evidence-paths'
 import { examples } from './examples'
 import { peoplePaths } from './people-paths'
 
@@ -127,6 +129,8 @@ export const paths: readonly RouteConfig[] = [
   ),
   ...accountPaths,
   ...peoplePaths,
+  ...evidencePaths,
+  ...adminPaths,
   describeState('/health', 'Whether the process lives; asks nobody else'),
   describeState('/ready', 'Whether the process can answer: not while the database is away or it shuts down', 503),
 ]
