@@ -30,6 +30,12 @@ export const paths = {
   gearEdit: (slug: string) => `/gear/${encodeURIComponent(slug)}/edit`,
   proposals: '/proposals',
   proposal: (id: string) => `/proposals/${encodeURIComponent(id)}`,
-  person: (name: string) => `/people/${encodeURIComponent(name)}`,
+  adminAudit: '/admin/audit',
+  adminLetters: '/admin/letters',
+  mailroom: '/mailroom',
+  unsubscribe: '/unsubscribe',
+  about: '/about',
+  privacy: '/privacy',
+  licence: '/licence',
   gearHistory: (slug: string) => `/gear/${encodeURIComponent(slug)}/history`,
 } as const

@@ -21,7 +21,13 @@ export function SiteFooter({ isDemo }: SiteFooterProps) {
         </div>
         <div className="space-y-2">
           {isDemo && <p className="text-ink">Demo data: every brand and product here is invented.</p>}
-          <p>Nobody pays for a place in the answers.</p>
+          <p>
+            Nobody pays for a place in the answers:{' '}
+            <Link to={paths.about} className="link inline-block min-h-6">
+              about Stillfits
+            </Link>
+            .
+          </p>
           <p className="print:hidden">
             <Link to={paths.worksheets} className="link inline-block min-h-6">
               Worksheets
@@ -33,6 +39,16 @@ export function SiteFooter({ isDemo }: SiteFooterProps) {
               Method
             </Link>
             : every check, threshold and source.
+          </p>
+          <p className="print:hidden">
+            <Link to={paths.privacy} className="link inline-block min-h-6">
+              Privacy
+            </Link>
+            : what is kept.{' '}
+            <Link to={paths.licence} className="link inline-block min-h-6">
+              Licence
+            </Link>
+            : open data.
           </p>
         </div>
       </div>

@@ -2,6 +2,7 @@ import { useState } from 'react'
 import { useSuspenseQuery } from '@tanstack/react-query'
 import { Link, useSearchParams } from 'react-router-dom'
 import type { AdminPerson } from '#shared/schemas/people'
+import { AdminTabs } from '../../../components/admin/admin-tabs'
 import { buttonClass } from '../../../components/ui/button-class'
 import { EmptyState } from '../../../components/ui/empty-state'
 import { paths } from '../../../config/paths'
@@ -24,6 +25,9 @@ export function PeoplePage() {
   return (
     <>
       <h1>People</h1>
+      <div className="mt-4">
+        <AdminTabs />
+      </div>
       <p className="mt-2 max-w-prose text-ink-soft">
         Roles and suspensions count from the next thing that somebody does. Each change is kept in the audit trail, and
         the person is written to.
