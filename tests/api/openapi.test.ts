@@ -87,6 +87,44 @@ describe('the OpenAPI document', () => {
     ])
   })
 
+  it('describes every call about proposals, their review and the care of gear', () => {
+    expect(
+      operationsOf('proposals', 'review', 'gear care')
+        .map(({ method, path }) => `${method} ${path.replace('/api/v1', '')}`)
+        .sort(),
+    ).toEqual([
+      'delete /proposals/{id}/lease',
+      'get /admin/jobs/{id}',
+      'get /gear/duplicates',
+      'get /gear/{slug}/care',
+      'get /gear/{slug}/sources/{key}',
+      'get /proposals',
+      'get /proposals/{id}',
+      'get /proposals/{id}/effects',
+      'get /review',
+      'get /review/disputes',
+      'get /review/reports',
+      'get /review/times',
+      'patch /proposals/{id}',
+      'post /admin/people/{name}/revert',
+      'post /disputes/{id}/settle',
+      'post /gear/{slug}/confirmations',
+      'post /gear/{slug}/merge',
+      'post /gear/{slug}/reports',
+      'post /gear/{slug}/restore',
+      'post /gear/{slug}/retire',
+      'post /gear/{slug}/unmerge',
+      'post /gear/{slug}/unretire',
+      'post /proposals',
+      'post /proposals/{id}/decision',
+      'post /proposals/{id}/lease',
+      'post /proposals/{id}/messages',
+      'post /proposals/{id}/submit',
+      'post /proposals/{id}/withdraw',
+      'post /reports/{id}/settle',
+    ])
+  })
+
   it('has a description for every answer, and a parameter for every name in a path', () => {
     for (const { path, operation } of operations()) {
       expect(operation.summary).not.toBe('')

@@ -12,6 +12,7 @@ import {
   revisionSchema,
 } from '#shared/schemas/gear'
 import { kindDescriptionSchema } from '#shared/schemas/kinds'
+import { proposalSchema } from '#shared/schemas/proposals'
 import { problemSchema } from '#shared/schemas/problem'
 import { replacementSchema, replacementsRequestSchema, replacementsSchema } from '#shared/schemas/replacements'
 import { setupSchema } from '#shared/schemas/setup'
@@ -42,6 +43,7 @@ const named = {
   GearList: gearListSchema,
   Kind: kindDescriptionSchema,
   Problem: problemSchema,
+  Proposal: proposalSchema,
   Provenance: provenanceSchema,
   Question: questionSchema,
   Replacement: replacementSchema,

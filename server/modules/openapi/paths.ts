@@ -14,7 +14,10 @@ import { adminPaths } from './admin-paths'
 import { describeProblems, type ProblemStatus } from './describe-calls'
 import { evidencePaths } from './evidence-paths'
 import { examples } from './examples'
+import { gearCarePaths } from './gear-care-paths'
 import { peoplePaths } from './people-paths'
+import { proposalPaths } from './proposal-paths'
+import { reviewPaths } from './review-paths'
 
 function describeRead(
   path: string,
@@ -131,6 +134,9 @@ export const paths: readonly RouteConfig[] = [
   ...peoplePaths,
   ...evidencePaths,
   ...adminPaths,
+  ...proposalPaths,
+  ...reviewPaths,
+  ...gearCarePaths,
   describeState('/health', 'Whether the process lives; asks nobody else'),
   describeState('/ready', 'Whether the process can answer: not while the database is away or it shuts down', 503),
 ]

@@ -34,7 +34,7 @@ async function undoIdentity(tx: Database, head: Head, personId: number): Promise
       if (stands === after) undone[key] = identity?.before[key as keyof ProposedIdentity]
     }
   }
-  return undone as ProposedIdentity
+  return undone
 }
 
 /** Takes one person's changes of one piece back, as a new revision; a piece that nobody else had a part in is retired. */
