@@ -25,6 +25,7 @@ export function createRoutes(app: App): RouteObject[] {
       id: 'root',
       Component: Layout,
       loader: () => loadSession(app),
+      HydrateFallback: () => null,
       children: [
         {
           id: 'pages',
