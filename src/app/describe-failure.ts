@@ -31,8 +31,8 @@ const away = {
 }
 
 const signedOut = {
-  heading: 'Sign in to go on',
-  title: 'This page is for people who are signed in',
+  heading: 'For people who are signed in',
+  title: 'Who you are is not known here',
   detail: 'Sign in, and you come straight back to it.',
 }
 

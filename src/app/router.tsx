@@ -62,6 +62,26 @@ export function createRoutes(app: App): RouteObject[] {
             { id: 'method', path: paths.method, lazy: createLazy(app, () => import('./routes/method')) },
             { id: 'review', path: paths.review, lazy: createLazy(app, () => import('./routes/review')) },
             {
+              id: 'admin-revert',
+              path: '/admin/people/:name/revert',
+              lazy: createLazy(app, () => import('./routes/admin-revert')),
+            },
+            {
+              id: 'gear-care',
+              path: '/review/gear/:slug',
+              lazy: createLazy(app, () => import('./routes/gear-care')),
+            },
+            {
+              id: 'review-disputes',
+              path: paths.disputes,
+              lazy: createLazy(app, () => import('./routes/review-disputes')),
+            },
+            {
+              id: 'review-reports',
+              path: paths.reports,
+              lazy: createLazy(app, () => import('./routes/review-reports')),
+            },
+            {
               id: 'review-proposal',
               path: '/review/:proposalId',
               lazy: createLazy(app, () => import('./routes/review-proposal')),

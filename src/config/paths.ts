@@ -16,6 +16,8 @@ export const paths = {
   reviewProposal: (id: string) => `/review/${encodeURIComponent(id)}`,
   disputes: '/review/disputes',
   reports: '/review/reports',
+  /** Not below the piece's own address, which may lead elsewhere. */
+  gearCare: (slug: string) => `/review/gear/${encodeURIComponent(slug)}`,
   revertPerson: (name: string) => `/admin/people/${encodeURIComponent(name)}/revert`,
   /** Comes back to `next` afterwards. */
   signIn: (next: string) => `/sign-in?next=${encodeURIComponent(next)}`,

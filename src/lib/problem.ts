@@ -42,11 +42,6 @@ export function isNotFound(error: unknown): boolean {
   return error instanceof ApiError && error.status === 404
 }
 
-/** Not signed in, or not for somebody with this role. */
-export function isRefusedEntry(error: unknown): boolean {
-  return error instanceof ApiError && (error.status === 401 || error.status === 403)
-}
-
 export function toApiError(error: unknown): ApiError {
   if (error instanceof ApiError) return error
   return new ApiError(500, 'Something went wrong on our side', 'The page could not make sense of what it was sent.')

@@ -10,7 +10,7 @@ const recheckMs = 4_000
 
 /** Where somebody goes from a page that trying again would not bring; null where it might. */
 function findWayOn(status: number, address: string): { readonly href: string; readonly label: string } | null {
-  if (status === 401) return { href: paths.signIn(address), label: 'Sign in' }
+  if (status === 401) return { href: paths.signIn(address), label: 'Sign in to go on' }
   if (status === 403) return { href: paths.home, label: 'Go to the start' }
   if (status === 404) return { href: paths.find, label: 'Open the finder' }
   return status === 410 ? { href: paths.gearList, label: 'Browse the gear' } : null

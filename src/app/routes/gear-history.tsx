@@ -1,16 +1,23 @@
-import { useParams } from 'react-router-dom'
+import { useLocation, useParams } from 'react-router-dom'
 import { paths } from '../../config/paths'
 import { gearQuery } from '../../features/gear/api/get-gear'
 import { revisionQuery } from '../../features/gear/api/get-revision'
 import { revisionsQuery } from '../../features/gear/api/get-revisions'
 import { HistoryPage } from '../../features/gear/components/history-page'
+import { RestoreTool } from '../../features/gear-care/components/restore-tool'
 import { readComparedRevisions } from '../../features/gear/read-compared-revisions'
 import { requireData } from '../../lib/loading'
 import type { Page } from '../page-route'
 
 function GearHistoryPage() {
   const { slug = '' } = useParams()
-  return <HistoryPage key={slug} slug={slug} />
+  const { search } = useLocation()
+  const shown = Number(new URLSearchParams(search).get('before') ?? 0)
+  return (
+    <HistoryPage key={slug} slug={slug}>
+      <RestoreTool slug={slug} shown={shown} />
+    </HistoryPage>
+  )
 }
 
 export const page: Page = {

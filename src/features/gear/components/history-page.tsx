@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react'
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query'
 import { Link, useLocation } from 'react-router-dom'
 import { isKindKey } from '#shared/kinds/index'
@@ -71,8 +72,14 @@ function SideBySide({ revisions: { slug, items } }: { readonly revisions: Revisi
   )
 }
 
+export interface HistoryPageProps {
+  readonly slug: string
+  /** What can be done with the revisions. */
+  readonly children?: ReactNode
+}
+
 /** Every approved state of a piece, and any two of them side by side. */
-export function HistoryPage({ slug }: { readonly slug: string }) {
+export function HistoryPage({ slug, children }: HistoryPageProps) {
   const { api } = useApp()
   const { data: gear } = useSuspenseQuery(gearQuery(api, slug))
   const { data: revisions } = useSuspenseQuery(revisionsQuery(api, slug))
@@ -90,6 +97,7 @@ export function HistoryPage({ slug }: { readonly slug: string }) {
       </p>
       <SideBySide revisions={revisions} />
       {kind && <RevisionList kind={kind} revisions={revisions.items} slug={slug} />}
+      {children}
     </>
   )
 }

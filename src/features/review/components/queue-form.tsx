@@ -38,8 +38,9 @@ export function QueueForm({ filters, kinds }: QueueFormProps) {
     isKindKey(kind) ? [{ value: kind, label: `${getKind(kind).plural} (${count})` }] : [],
   )
   const show = (form: HTMLFormElement) => {
-    const entries = [...new FormData(form)].map(([name, value]) => [name, String(value)])
-    void navigate(`${paths.review}${writeQueueQuery(readQueueFilters(new URLSearchParams(entries)))}`)
+    const params = new URLSearchParams()
+    for (const [name, value] of new FormData(form)) if (typeof value === 'string') params.set(name, value)
+    void navigate(`${paths.review}${writeQueueQuery(readQueueFilters(params))}`)
   }
   return (
     <form

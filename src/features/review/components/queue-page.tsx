@@ -7,7 +7,7 @@ import { ErrorState } from '../../../components/ui/error-state'
 import { LiveStatus } from '../../../components/ui/live-status'
 import { paths } from '../../../config/paths'
 import { useApp } from '../../../lib/app-context'
-import { isRefusedEntry, toApiError } from '../../../lib/problem'
+import { toApiError } from '../../../lib/problem'
 import { queueQuery } from '../api/get-queue'
 import { waitingTimesQuery } from '../api/get-waiting-times'
 import { useKeysChoice } from '../hooks/use-keys-choice'
@@ -73,11 +73,7 @@ export function QueuePage() {
   const { api } = useApp()
   const { search } = useLocation()
   const filters = readQueueFilters(new URLSearchParams(search))
-  const { data, error, dataUpdatedAt, refetch } = useQuery({
-    ...queueQuery(api, filters),
-    // Whoever lost their part in the desk meanwhile is told so by the page that says it in full.
-    throwOnError: isRefusedEntry,
-  })
+  const { data, error, dataUpdatedAt, refetch } = useQuery(queueQuery(api, filters))
   const times = useQuery(waitingTimesQuery(api))
   const { list, shortcuts } = useQueueKeys()
   const [isOn] = useKeysChoice()

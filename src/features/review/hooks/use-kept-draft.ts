@@ -3,8 +3,8 @@ import { emptyDraft, type DecisionDraft } from '../model/decision-draft'
 
 const storageKey = (id: string): string => `stillfits.decision.${id}`
 const listeners = new Set<() => void>()
-/** What this page wrote: holds where storage is full or forbidden. */
-const written = new Map<string, string | null>()
+/** Where storage is full or forbidden. */
+const unstored = new Map<string, string>()
 
 function attempt<T>(access: () => T): T | null {
   try {
@@ -15,16 +15,13 @@ function attempt<T>(access: () => T): T | null {
 }
 
 function readText(id: string): string | null {
-  const mine = written.get(id)
-  return mine === undefined ? attempt(() => sessionStorage.getItem(storageKey(id))) : mine
+  return unstored.get(id) ?? attempt(() => sessionStorage.getItem(storageKey(id)))
 }
 
 function writeText(id: string, text: string | null): void {
-  written.set(id, text)
-  attempt(() => {
-    if (text === null) sessionStorage.removeItem(storageKey(id))
-    else sessionStorage.setItem(storageKey(id), text)
-  })
+  unstored.delete(id)
+  if (text === null) attempt(() => sessionStorage.removeItem(storageKey(id)))
+  else if (!attempt(() => (sessionStorage.setItem(storageKey(id), text), true))) unstored.set(id, text)
   for (const listener of listeners) listener()
 }
 
