@@ -15,15 +15,16 @@ export interface SiteHeaderProps {
 export function SiteHeader({ links, account, unitSwitch, themeSwitch }: SiteHeaderProps) {
   return (
     <header className="border-b-[1.5px] border-ink print:border-b-0">
-      <div className="page-width grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-6 pt-3 md:h-16 md:grid-cols-[auto_minmax(0,1fr)_auto_auto] md:pt-0">
-        <Link to="/" className="justify-self-start">
+      <div className="page-width flex flex-wrap items-center gap-x-3 pt-3 md:h-16 md:flex-nowrap md:gap-x-6 md:pt-0">
+        <Link to="/" className="mr-auto md:mr-0">
           <Wordmark />
         </Link>
-        <div className="flex items-center gap-2 justify-self-end md:order-3 md:gap-4 print:hidden">
+        <div className="flex items-center gap-2 md:order-3 md:gap-4 print:hidden">
           {account}
           {unitSwitch}
         </div>
-        <nav aria-label="Pages" className="self-stretch overflow-x-auto md:order-2 print:hidden">
+        <span aria-hidden="true" className="basis-full md:hidden" />
+        <nav aria-label="Pages" className="min-w-0 grow basis-0 self-stretch overflow-x-auto md:order-2 print:hidden">
           <ul className="flex h-full gap-x-5">
             {links.map(({ href, label, isWideOnly }) => (
               <li key={href} className={isWideOnly ? 'hidden lg:flex' : 'flex'}>
@@ -37,7 +38,7 @@ export function SiteHeader({ links, account, unitSwitch, themeSwitch }: SiteHead
             ))}
           </ul>
         </nav>
-        <div className="justify-self-end md:order-4 print:hidden">{themeSwitch}</div>
+        <div className="md:order-4 print:hidden">{themeSwitch}</div>
       </div>
     </header>
   )

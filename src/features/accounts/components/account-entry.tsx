@@ -3,7 +3,7 @@ import { paths } from '../../../config/paths'
 import { useSignedIn } from '../../../lib/session'
 
 const entryClass =
-  'flex min-h-8 max-w-24 items-center rounded-ui border-[1.5px] border-ink-soft px-2 text-sm font-semibold hover:border-action hover:text-action sm:max-w-48'
+  'flex min-h-8 min-w-8 max-w-48 items-center justify-center rounded-ui border-[1.5px] border-ink-soft px-2 text-sm font-semibold hover:border-action hover:text-action'
 
 /** Who is signed in, or the way there; while nobody knows yet, the way there as well. */
 export function AccountEntry() {
@@ -13,7 +13,10 @@ export function AccountEntry() {
     return (
       <Link to={paths.account} className={entryClass} title={`Your account, ${person.name}`}>
         <span className="sr-only">Your account, </span>
-        <span className="truncate">{person.name}</span>
+        <span aria-hidden="true" className="sm:hidden">
+          {[...person.name][0]}
+        </span>
+        <span className="sr-only truncate sm:not-sr-only">{person.name}</span>
       </Link>
     )
   }
