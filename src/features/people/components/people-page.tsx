@@ -24,7 +24,7 @@ export function PeoplePage() {
 
   return (
     <>
-      <h1>People</h1>
+      <h1 className="mt-6">People</h1>
       <div className="mt-4">
         <AdminTabs />
       </div>
