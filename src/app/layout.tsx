@@ -20,16 +20,18 @@ const links = [
 ]
 
 /** A page of its own begins at the top, with focus on its content; a changed query of the same page moves nothing. */
-function useFreshStart(pathname: string): void {
+function useFreshStart(pathname: string, hash: string): void {
   const shown = useRef(pathname)
   useEffect(() => {
     if (shown.current === pathname) return
     shown.current = pathname
+    // The address names a part of the page: that has focus.
+    if (hash.length > 1 && document.getElementById(decodeURIComponent(hash.slice(1)))) return
     window.scrollTo(0, 0)
     // What went wrong with the form that led here has taken it already.
     if (document.activeElement?.closest('[role="alert"]')) return
     document.getElementById('main')?.focus({ preventScroll: true })
-  }, [pathname])
+  }, [pathname, hash])
 }
 
 function PendingBar() {
@@ -50,8 +52,8 @@ function PendingBar() {
 export function Layout() {
   const { preferences } = useApp()
   const { system, theme } = usePreferences()
-  const { pathname, search } = useLocation()
-  useFreshStart(pathname)
+  const { pathname, search, hash } = useLocation()
+  useFreshStart(pathname, hash)
   const next = `${pathname}${search}`
   const change = (wanted: Partial<Preferences>) => {
     preferences.set(wanted)

@@ -114,22 +114,33 @@ test('a visitor without an account keeps what was typed, and can tell that somet
 
 for (const colorScheme of ['light', 'dark'] as const) {
   for (const width of [360, 1280]) {
-    test(`the forms are readable and reachable in the ${colorScheme} theme at ${width} px`, async ({ page }) => {
-      const { slug } = await findHeater(page, 4)
-      await page.setViewportSize({ width, height: 800 })
-      await page.emulateMedia({ colorScheme })
-      await signIn(page)
-      await page.goto(`/gear/${slug}/edit`)
-      await page.getByLabel('Power', { exact: true }).fill('10000 W')
-      await length(page).fill('27 mm')
-      await page.getByText('Is this right?').first().waitFor()
-      await page.getByRole('button', { name: 'Propose the change' }).click()
-      await page.getByRole('alert').filter({ hasText: 'need another look' }).waitFor()
-      for (const address of [null, '/gear/new', '/gear/new?kind=tank', `/gear/${slug}`, '/proposals']) {
-        if (address !== null) await page.goto(address)
+    test.describe(`in the ${colorScheme} theme at ${width} px`, () => {
+      test.use({ colorScheme, viewport: { width, height: 800 } })
+
+      const expectReadable = async (page: Page) => {
         await expectNoAxeViolations(page)
         const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)
-        expect(overflow, `${address ?? 'the form'} scrolls sideways`).toBeLessThanOrEqual(0)
+        expect(overflow, 'scrolls sideways').toBeLessThanOrEqual(0)
+      }
+
+      test('the form is readable with its errors and questions', async ({ page }) => {
+        const { slug } = await findHeater(page, 4)
+        await signIn(page)
+        await page.goto(`/gear/${slug}/edit`)
+        await page.getByLabel('Power', { exact: true }).fill('4000 W')
+        await length(page).fill('5 gallons')
+        await page.getByText('Is this right?').first().waitFor()
+        await page.getByRole('button', { name: 'Propose the change' }).click()
+        await page.getByRole('alert').filter({ hasText: 'need another look' }).waitFor()
+        await expectReadable(page)
+      })
+
+      for (const address of ['/gear/new', '/gear/new?kind=tank', '/proposals']) {
+        test(`${address} is readable`, async ({ page }) => {
+          await signIn(page)
+          await page.goto(address)
+          await expectReadable(page)
+        })
       }
     })
   }
