@@ -5,7 +5,7 @@ import { createPrinter } from '#shared/units/print'
 import type { Gear } from '#shared/schemas/gear'
 import { usePreferences } from '../../../lib/app-context'
 import { askDoubts } from '../model/doubts'
-import type { FoundError } from '../model/form-errors'
+import { flattenErrors } from '../model/form-errors'
 import { readTyped, type ReadForm } from '../model/read-typed'
 import { rebaseTyped, respellTyped } from '../model/rebase'
 import { createTypedSchema } from '../model/typed-schema'
@@ -17,14 +17,6 @@ export interface ProposeFormOptions {
   readonly base: FormBase
   /** What stands in it at first: the record, or a proposal that is taken up again. */
   readonly typed: TypedForm
-}
-
-/** Every message in a tree of errors, with its path. */
-function flatten(errors: unknown, path: readonly string[] = []): FoundError[] {
-  if (typeof errors !== 'object' || errors === null) return []
-  if ('message' in errors && typeof errors.message === 'string' && 'type' in errors)
-    return [{ path: path.join('.'), message: errors.message }]
-  return Object.entries(errors).flatMap(([key, inner]) => (key === 'ref' ? [] : flatten(inner, [...path, key])))
 }
 
 /** The form as it is typed, as it is read, and what looks unlikely in it. */
@@ -54,7 +46,7 @@ export function useProposeForm(initial: ProposeFormOptions) {
   const rested = useDeferredValue(typed)
   const read = useMemo(() => readTyped(base, rested, system), [base, rested, system])
   const doubts = useMemo(() => askDoubts(base, read, createPrinter(system)), [base, read, system])
-  const errors = flatten(form.formState.errors)
+  const errors = flattenErrors(form.formState.errors)
 
   return {
     form,

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react'
+import { useEffect } from 'react'
 import { useLocation } from 'react-router-dom'
 import { getAttribute } from '#shared/kinds/index'
 import { useApp } from '../../../lib/app-context'
@@ -6,7 +6,7 @@ import { printMoment } from '../../../lib/print-moment'
 import { fetchProposal, type SavedProposal } from '../api/save-proposal'
 import { dropDraft } from '../model/drafts'
 import { typeSuggestion, type PlacedDoubt } from '../model/doubts'
-import { summarise, type FoundError } from '../model/form-errors'
+import { summarise } from '../model/form-errors'
 import { layOver } from '../model/touched'
 import type { FormBase, TypedFile, TypedForm } from '../model/typed-form'
 import type { Mapping } from '../paste/read-pasted'
@@ -31,13 +31,6 @@ function useNamedField(): void {
     field?.scrollIntoView({ block: 'center' })
     field?.focus({ preventScroll: true })
   }, [hash])
-}
-
-/** The errors as they were when it was last sent: a list that came and went with every letter would take focus while somebody types. */
-function useToldErrors(errors: readonly FoundError[], attempt: number): readonly FoundError[] {
-  const [told, setTold] = useState({ attempt, errors })
-  if (told.attempt !== attempt) setTold({ attempt, errors })
-  return told.errors
 }
 
 /** All that the propose form does, put together. */
@@ -71,7 +64,6 @@ export function useProposePage({ place, base, typed, saved }: ProposePageOptions
     onTaken: (file) => setValue('files', [...getValues('files'), file]),
   })
   useNamedField()
-  const told = useToldErrors(propose.errors, send.attempt)
 
   const actions = {
     onTake: (doubt: PlacedDoubt, value: number) => {
@@ -117,6 +109,6 @@ export function useProposePage({ place, base, typed, saved }: ProposePageOptions
     takeMapped,
     removeFile,
     kept,
-    summary: summarise(base.kind, told),
+    summary: summarise(base.kind, send.told),
   }
 }

@@ -9,7 +9,7 @@ import { toApiError } from '../../../lib/problem'
 import { sessionQuery, useSignedIn } from '../../../lib/session'
 import type { SavedProposal } from '../api/save-proposal'
 import { writeFlags } from '../model/doubts'
-import { readRefusal } from '../model/form-errors'
+import { flattenErrors, readRefusal, type FoundError } from '../model/form-errors'
 import { hasChanges, type ReadForm } from '../model/read-typed'
 import type { ProposeForm } from './use-propose-form'
 import { useSavedProposal } from './use-saved-proposal'
@@ -32,6 +32,8 @@ export function useSend(propose: ProposeForm, initial: SavedProposal | null, onS
   const { saved, save, submit, catchUp, adopt } = useSavedProposal(initial)
   const [halt, setHalt] = useState<Halt | null>(null)
   const [attempt, setAttempt] = useState(0)
+  /** As they were when it was last sent: a list that came and went with every letter would take focus while somebody types. */
+  const [told, setTold] = useState<readonly FoundError[]>([])
   const [isSent, setIsSent] = useState(false)
   const [isSending, setIsSending] = useState(false)
   const [savedText, setSavedText] = useState<string | null>(null)
@@ -63,6 +65,7 @@ export function useSend(propose: ProposeForm, initial: SavedProposal | null, onS
     const refused = readRefusal(base.kind, failure)
     for (const one of refused)
       if ('path' in one) form.setError(one.path as never, { type: 'server', message: one.message })
+    setTold(refused.flatMap((one) => ('path' in one ? [one] : [])))
     const words = refused.flatMap((one) => ('path' in one ? [] : [one.message]))
     stop({ reason: 'failed', title: 'It was not taken yet; everything you typed is kept', words })
   }
@@ -97,6 +100,7 @@ export function useSend(propose: ProposeForm, initial: SavedProposal | null, onS
   const trySend = async (read: ReadForm): Promise<void> => {
     setIsSending(true)
     setHalt(null)
+    setTold([])
     try {
       await send(read)
     } catch (error) {
@@ -115,10 +119,12 @@ export function useSend(propose: ProposeForm, initial: SavedProposal | null, onS
     isSaved: savedText !== null && savedText === JSON.stringify(typed),
     halt,
     attempt,
+    told,
     isSending,
     isSent,
-    onSubmit: form.handleSubmit(trySend, () => {
+    onSubmit: form.handleSubmit(trySend, (errors) => {
       setHalt(null)
+      setTold(flattenErrors(errors))
       setAttempt((count) => count + 1)
     }),
     goOn: () => setHalt(null),

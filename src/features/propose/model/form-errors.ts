@@ -11,6 +11,14 @@ export interface FoundError {
   readonly message: string
 }
 
+/** Every message in a tree of errors, with its path. */
+export function flattenErrors(errors: unknown, path: readonly string[] = []): FoundError[] {
+  if (typeof errors !== 'object' || errors === null) return []
+  if ('message' in errors && typeof errors.message === 'string' && 'type' in errors)
+    return [{ path: path.join('.'), message: errors.message }]
+  return Object.entries(errors).flatMap(([key, inner]) => (key === 'ref' ? [] : flattenErrors(inner, [...path, key])))
+}
+
 const backingKeys = new Set(['plusMinus', 'evidence', 'date', 'source'])
 
 function mapValuePointer(kind: KindKey, [key = '', part, ...rest]: readonly string[]): string {
