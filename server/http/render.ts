@@ -101,9 +101,13 @@ async function sendPage(res: Response, pages: Pages, page: RenderedPage): Promis
   res.end(after)
 }
 
+/** Pages of which nothing is to stay on the machine: whose they are, or what signs somebody in, stands on them. */
+const leavesNoCopy = /^\/(account|admin|confirm|mailroom|proposals|reset|review|unsubscribe)(\/|$)/
+
 function createPageHandler(app: Express, pages: Pages): RequestHandler {
   return async (req: Request, res: Response) => {
-    res.set({ 'Cache-Control': 'private, no-cache', Vary: 'Cookie' })
+    const caching = leavesNoCopy.test(req.path) ? 'private, no-store' : 'private, no-cache'
+    res.set({ 'Cache-Control': caching, Vary: 'Cookie' })
     const page = await pages.render({
       url: req.originalUrl,
       cookie: req.headers.cookie,

@@ -23,6 +23,15 @@ export async function requireData<T, Key extends QueryKey>(
   }
 }
 
+/** For a page that shows by itself that it is loading: waits on the server alone, and never shows what was fetched earlier. */
+export async function loadFresh<T, Key extends QueryKey>(
+  app: App,
+  options: EnsureQueryDataOptions<T, Error, T, Key>,
+): Promise<void> {
+  if (app.isServer) await requireFresh(app, options)
+  else void app.queryClient.prefetchQuery({ ...options, staleTime: 0 })
+}
+
 /** As `requireData`, never from what was fetched earlier: for forms, which change things from there. */
 export async function requireFresh<T, Key extends QueryKey>(
   app: App,

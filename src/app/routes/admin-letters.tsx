@@ -1,12 +1,12 @@
 import { lettersQuery, readLetterFilters } from '../../features/admin/api/letters-query'
 import { LettersPage } from '../../features/admin/components/letters-page'
-import { requireFresh } from '../../lib/loading'
+import { loadFresh } from '../../lib/loading'
 import type { Page } from '../page-route'
 
 export const page: Page = {
   Component: LettersPage,
   load: async (app, { request }) => {
-    await requireFresh(app, lettersQuery(app.api, readLetterFilters(new URL(request.url).searchParams)))
+    await loadFresh(app, lettersQuery(app.api, readLetterFilters(new URL(request.url).searchParams)))
   },
   head: () => ({ title: 'Letters', description: 'What became of the mail.', isUnlisted: true }),
 }

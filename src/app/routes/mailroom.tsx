@@ -1,10 +1,10 @@
 import { mailroomQuery } from '../../features/admin/api/mailroom-query'
 import { MailroomPage } from '../../features/admin/components/mailroom-page'
-import { requireFresh } from '../../lib/loading'
+import { loadFresh } from '../../lib/loading'
 import type { Page } from '../page-route'
 
 export const page: Page = {
   Component: MailroomPage,
-  load: async (app) => void (await requireFresh(app, mailroomQuery(app.api))),
+  load: (app) => loadFresh(app, mailroomQuery(app.api)),
   head: () => ({ title: 'Mailroom', description: 'Letters that this demo would have sent.', isUnlisted: true }),
 }

@@ -32,7 +32,7 @@ const withAccount = [
   {
     term: 'Where you are signed in',
     facts:
-      'A hash of each session’s id, when it began and was last used, and what your browser calls itself. You see the list and can end each of them.',
+      'A cookie with the session’s id in your browser; here only a hash of it, when it began and was last used, and what your browser calls itself. You see the list and can end each of them.',
   },
   {
     term: 'Links by e-mail',

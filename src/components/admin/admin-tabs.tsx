@@ -10,7 +10,7 @@ const tabs = [
 /** The pages of those who answer for the site. */
 export function AdminTabs() {
   return (
-    <nav aria-label="Administration" className="overflow-x-auto border-b border-hairline">
+    <nav aria-label="Administration" className="overflow-x-auto border-b border-rule">
       <ul className="flex gap-x-5">
         {tabs.map(({ href, label }) => (
           <li key={href} className="flex">

@@ -7,9 +7,9 @@ export interface FactsProps {
 /** Terms with what there is to say of each: side by side where there is room. */
 export function Facts({ rows }: FactsProps) {
   return (
-    <dl className="mt-3 border-b border-hairline">
+    <dl className="mt-3 border-b border-rule">
       {rows.map(({ term, facts }) => (
-        <div key={term} className="grid gap-x-6 border-t border-hairline py-3 md:grid-cols-[14rem_minmax(0,1fr)]">
+        <div key={term} className="grid gap-x-6 border-t border-rule py-3 md:grid-cols-[14rem_minmax(0,1fr)]">
           <dt className="font-semibold">{term}</dt>
           <dd className="max-w-prose">{facts}</dd>
         </div>

@@ -13,7 +13,7 @@ export interface LetterFooter {
   readonly unsubscribePageUrl?: string
 }
 
-const notice = 'You get this because of something you did on Stillfits.'
+const notice = 'Sent by Stillfits, because of an account with this address.'
 
 export function describeFooter({ unsubscribePageUrl }: LetterFooter): string {
   return unsubscribePageUrl === undefined ? notice : `${notice} To get no more such notices:`

@@ -8,7 +8,7 @@ const hasDetail = (detail: AuditEventItem['detail']) => Object.keys(detail).leng
 export function AuditEvent({ event }: { readonly event: AuditEventItem }) {
   const { at, actor, action, subject, detail, requestId } = event
   return (
-    <li className="grid gap-x-4 gap-y-1 border-t border-hairline py-3 md:grid-cols-[11rem_minmax(0,1fr)]">
+    <li className="grid gap-x-4 gap-y-1 border-t border-rule py-3 md:grid-cols-[11rem_minmax(0,1fr)]">
       <time dateTime={at} className="font-mono text-sm text-ink-soft">
         {printMoment(at)}
       </time>

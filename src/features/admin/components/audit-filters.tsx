@@ -7,10 +7,10 @@ import type { AuditFilters } from '../api/audit-query'
 
 const fields = [
   { key: 'actor', label: 'Who', hint: 'a name, or "system"' },
-  { key: 'action', label: 'What', hint: 'such as proposal or proposal.approve' },
-  { key: 'subject', label: 'About what', hint: 'such as gear, or proposal: and its id' },
-  { key: 'from', label: 'From', hint: 'a day, such as 2026-05-01' },
-  { key: 'to', label: 'To', hint: 'a day, itself included' },
+  { key: 'action', label: 'What', hint: 'such as proposal.approve' },
+  { key: 'subject', label: 'About what', hint: 'such as gear or evidence' },
+  { key: 'from', label: 'From', hint: 'such as 2026-05-01' },
+  { key: 'to', label: 'To', hint: 'that day included' },
 ] as const
 
 export interface AuditFilterFormProps {

@@ -17,11 +17,15 @@ import { AuditFilterForm } from './audit-filters'
 
 function AuditResults({ list, filters }: { readonly list: AuditList; readonly filters: AuditFilters }) {
   if (list.items.length === 0) {
-    return <EmptyState title="Nothing in the trail matches">Take a filter away, or widen the days.</EmptyState>
+    return Object.keys(filters).length === 0 ? (
+      <EmptyState title="Nothing has happened yet">Whatever anybody changes is written here.</EmptyState>
+    ) : (
+      <EmptyState title="Nothing in the trail matches">Take a filter away, or widen the days.</EmptyState>
+    )
   }
   return (
     <>
-      <ol className="border-b border-hairline">
+      <ol className="border-b border-rule">
         {list.items.map((event) => (
           <AuditEvent key={event.id} event={event} />
         ))}

@@ -10,7 +10,7 @@ export function LetterRow({ letter }: { readonly letter: LetterItem }) {
   const { subject, recipient, kind, attempts, lastError, createdAt, sentAt, can } = letter
   const retry = useRetryLetter(letter.id)
   return (
-    <li className="grid gap-x-4 gap-y-2 border-t border-hairline py-3 md:grid-cols-[minmax(0,1fr)_auto]">
+    <li className="grid gap-x-4 gap-y-2 border-t border-rule py-3 md:grid-cols-[minmax(0,1fr)_auto]">
       <div className="min-w-0 space-y-1">
         <p className="font-semibold break-words">{subject}</p>
         <p className="text-sm break-words text-ink-soft">

@@ -49,7 +49,7 @@ function Letters({ list, filters }: { readonly list: LetterList; readonly filter
       {items.length === 0 ? (
         <EmptyState title={empty[filters.status]} />
       ) : (
-        <ul className="border-b border-hairline">
+        <ul className="border-b border-rule">
           {items.map((letter) => (
             <LetterRow key={letter.id} letter={letter} />
           ))}

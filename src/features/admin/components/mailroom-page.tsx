@@ -3,7 +3,11 @@ import { useQuery } from '@tanstack/react-query'
 import type { ReceivedLetter } from '#shared/schemas/admin'
 import { Button } from '../../../components/ui/button'
 import { EmptyState } from '../../../components/ui/empty-state'
+import { ErrorState } from '../../../components/ui/error-state'
+import { LoadingBlock } from '../../../components/ui/loading-block'
+import { Skeleton } from '../../../components/ui/skeleton'
 import { useApp } from '../../../lib/app-context'
+import { toApiError } from '../../../lib/problem'
 import { mailroomQuery } from '../api/mailroom-query'
 import { printMoment } from '../print-moment'
 
@@ -24,7 +28,7 @@ function LinkedText({ text }: { readonly text: string }) {
 
 function Received({ letter }: { readonly letter: ReceivedLetter }) {
   return (
-    <li className="border border-hairline bg-sheet p-4">
+    <li className="border border-rule bg-sheet p-4">
       <article aria-label={letter.subject}>
         <h2 className="text-lg break-words">{letter.subject}</h2>
         <p className="text-sm break-words text-ink-soft">
@@ -41,8 +45,7 @@ function Received({ letter }: { readonly letter: ReceivedLetter }) {
 /** Demo mode alone: letters that would have gone out, to be read by whoever tries the site. */
 export function MailroomPage() {
   const { api } = useApp()
-  const { data, refetch, isFetching } = useQuery(mailroomQuery(api))
-  const items = data?.items ?? []
+  const { data, error, refetch, isFetching } = useQuery(mailroomQuery(api))
   return (
     <div className="space-y-6">
       <h1>Mailroom</h1>
@@ -53,11 +56,17 @@ export function MailroomPage() {
       <Button isBusy={isFetching} onClick={() => void refetch()}>
         Look again
       </Button>
-      {items.length === 0 ? (
+      {error !== null ? (
+        <ErrorState title={toApiError(error).title}>{toApiError(error).message}</ErrorState>
+      ) : data === undefined ? (
+        <LoadingBlock label="Loading letters">
+          <Skeleton className="h-64 w-full" />
+        </LoadingBlock>
+      ) : data.items.length === 0 ? (
         <EmptyState title="No letter has arrived">Sign up, or ask for a new password, and look again.</EmptyState>
       ) : (
         <ul className="space-y-4" aria-label="Letters">
-          {items.map((letter) => (
+          {data.items.map((letter) => (
             <Received key={`${letter.messageId} ${letter.receivedAt}`} letter={letter} />
           ))}
         </ul>
