@@ -1,5 +1,6 @@
 import { Link } from 'react-router-dom'
 import { Button } from '../../../components/ui/button'
+import { paths } from '../../../config/paths'
 
 export interface SendBarProps {
   readonly label: string
@@ -16,7 +17,7 @@ export function SendBar({ label, isSending, isUploading, kept }: SendBarProps) {
       <p className="max-w-prose text-sm">
         By sending it you give the values to the open record: facts under an open data licence, photos to be shown
         beside them with your name. The{' '}
-        <Link to="/licence" className="link">
+        <Link to={paths.licence} className="link">
           terms of contributing
         </Link>{' '}
         say it in full.
