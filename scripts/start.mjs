@@ -72,6 +72,7 @@ await live(
     say(`Stillfits is ready at ${origin}`)
     // The people of the demo data are for trying things out; elsewhere there are none.
     if (isDemo()) await runStep(process.execPath, [join(checkout, 'dist/server/sign-ins.js')], { cwd: checkout })
+    if ('MAILROOM_FOLDER' in services) say(`No e-mail leaves this machine: letters arrive at ${origin}/mailroom`)
     return null
   },
   { onStopping: () => say('Stopping …') },
