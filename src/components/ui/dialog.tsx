@@ -1,4 +1,4 @@
-import { useEffect, useId, useRef, type ReactNode } from 'react'
+import { useId, useLayoutEffect, useRef, type ReactNode } from 'react'
 import { Button } from './button'
 
 export interface DialogProps {
@@ -15,7 +15,8 @@ export interface DialogProps {
 export function Dialog({ title, onClose, children, isWide = false }: DialogProps) {
   const box = useRef<HTMLDialogElement>(null)
   const titleId = useId()
-  useEffect(() => {
+  // Closed while it still stands on the page: only then does the browser give focus back.
+  useLayoutEffect(() => {
     const dialog = box.current
     dialog?.showModal()
     return () => dialog?.close()

@@ -4,7 +4,6 @@ import { Link } from 'react-router-dom'
 import { limits } from '#shared/limits'
 import type { GearCare } from '#shared/schemas/review'
 import { Button } from '../../../components/ui/button'
-import { LiveStatus } from '../../../components/ui/live-status'
 import { paths } from '../../../config/paths'
 import { useApp } from '../../../lib/app-context'
 import { careQuery } from '../api/get-care'
@@ -82,8 +81,9 @@ export function CarePage({ slug }: { readonly slug: string }) {
       </p>
       <h1 className="mt-1">Look after this entry</h1>
       <Standing care={care} />
-      <LiveStatus message={message} />
-      {message && <p className="mt-3 border-l-[5px] border-fits bg-sheet px-4 py-3">{message}</p>}
+      <p role="status" className={message === '' ? 'sr-only' : 'mt-3 border-l-[5px] border-fits bg-sheet px-4 py-3'}>
+        {message}
+      </p>
       {!hasCare(care) && <p className="mt-4">There is nothing that you can do with it here.</p>}
       {can.merge && (
         <section className="mt-8 border-t-[1.5px] border-ink pt-4">

@@ -4,6 +4,7 @@ import { usePrinter } from '../../../lib/use-printer'
 import { pieceQuery } from '../api/get-piece'
 import type { Review } from '../hooks/use-review'
 import { readFieldDraft } from '../model/decision-draft'
+import type { DeskField } from '../model/list-fields'
 import { findFlagWords } from '../model/find-flag-words'
 import { FieldCard } from './field-card'
 import { FieldChoice } from './field-choice'
@@ -13,6 +14,10 @@ export interface FieldListProps {
   readonly canChoose: boolean
   readonly errors: ReadonlyMap<string, string>
 }
+
+/** A sole value stands and falls with the whole, unless somebody else changed it too. */
+const hasChoice = ({ isChoosable, state }: DeskField, all: number): boolean =>
+  isChoosable && (state === 'conflict' || (all > 1 && state !== 'settled'))
 
 /** Every value of a proposal, each with what is on record and what backs it. */
 export function FieldList({ review: { proposal, fields, kept }, canChoose, errors }: FieldListProps) {
@@ -35,7 +40,7 @@ export function FieldList({ review: { proposal, fields, kept }, canChoose, error
             sources={piece?.sources[field.key] ?? []}
             printer={printer}
           >
-            {canChoose && field.isChoosable && field.state !== 'settled' && fields.length > 1 && (
+            {canChoose && hasChoice(field, fields.length) && (
               <FieldChoice
                 field={field}
                 draft={readFieldDraft(draft, field)}
